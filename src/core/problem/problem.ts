@@ -1,0 +1,82 @@
+/**
+ * Faults that the user can mend, as data. Their sentences stand in messages.ts alone.
+ * `cells` are addresses as the user knows them ("Months!C14", or "row 13 of the drivers, column 2"
+ * for arguments of a worksheet function); lists hold at most ten, `count` holds how many there are.
+ */
+export type Problem = TableProblem | ModelProblem | FitProblem | SettingProblem | HostProblem;
+
+export interface Spots {
+  readonly column: string;
+  readonly cells: readonly string[];
+  readonly values: readonly string[];
+  readonly count: number;
+}
+
+export type TableProblem =
+  | { readonly code: "no-data"; readonly where: string }
+  | { readonly code: "no-headings"; readonly where: string }
+  | { readonly code: "empty-column"; readonly column: string; readonly where: string }
+  | { readonly code: "no-numbers"; readonly column: string; readonly where: string }
+  | ({ readonly code: "text-in-number-column" } & Spots)
+  | ({ readonly code: "text-numbers" } & Spots)
+  | ({ readonly code: "dates-as-text" } & Spots)
+  | ({ readonly code: "error-cells" } & Spots)
+  | ({ readonly code: "unreadable-time" } & Spots)
+  | ({ readonly code: "missing-time" } & Spots)
+  | ({ readonly code: "repeated-time" } & Spots)
+  | { readonly code: "unequal-heights"; readonly first: string; readonly rows: number; readonly second: string; readonly otherRows: number }
+  | { readonly code: "overlapping-ranges"; readonly first: string; readonly second: string };
+
+export type ModelProblem =
+  | { readonly code: "no-outcome" }
+  | { readonly code: "no-drivers" }
+  | { readonly code: "unknown-heading"; readonly heading: string; readonly nearest: string | null; readonly where: string }
+  | { readonly code: "repeated-heading"; readonly heading: string; readonly cells: readonly string[] }
+  | { readonly code: "column-used-twice"; readonly column: string; readonly first: string; readonly second: string }
+  | { readonly code: "no-time-column" }
+  | { readonly code: "no-group-column" }
+  | { readonly code: "one-group"; readonly column: string; readonly value: string }
+  | { readonly code: "one-category"; readonly column: string; readonly value: string }
+  | { readonly code: "unknown-base"; readonly column: string; readonly base: string; readonly nearest: string | null }
+  | { readonly code: "logarithm-of-nonpositive"; readonly column: string; readonly cells: readonly string[]; readonly count: number }
+  | { readonly code: "transform-needs-time"; readonly column: string; readonly transform: string };
+
+export type FitProblem =
+  | { readonly code: "too-few-rows"; readonly rows: number; readonly needed: number; readonly leftOut: number }
+  | { readonly code: "constant-column"; readonly column: string }
+  | { readonly code: "constant-outcome"; readonly column: string }
+  | { readonly code: "dependent-columns"; readonly column: string; readonly madeOf: readonly string[] }
+  | { readonly code: "perfect-fit"; readonly column: string }
+  | { readonly code: "numbers-too-large"; readonly column: string; readonly cell: string; readonly value: number }
+  | { readonly code: "too-many-lags"; readonly lags: number; readonly rows: number };
+
+export type SettingProblem =
+  | { readonly code: "unknown-setting"; readonly setting: string; readonly nearest: string | null }
+  | {
+      readonly code: "unknown-value";
+      readonly setting: string;
+      readonly value: string;
+      readonly allowed: readonly string[];
+      readonly nearest: string | null;
+    }
+  | { readonly code: "missing-option"; readonly option: string }
+  | { readonly code: "unreadable-file"; readonly file: string; readonly because: string }
+  | { readonly code: "unwritable-file"; readonly file: string; readonly because: string };
+
+/** What the spreadsheet itself refuses; only the office and desk rooms make these. */
+export type HostProblem =
+  | { readonly code: "cell-being-edited" }
+  | { readonly code: "nothing-selected" }
+  | { readonly code: "several-areas-selected"; readonly areas: number }
+  | { readonly code: "chart-selected" }
+  | { readonly code: "other-workbook" }
+  | { readonly code: "sheet-protected"; readonly sheet: string }
+  | { readonly code: "workbook-protected" }
+  | { readonly code: "unknown-place"; readonly place: string; readonly nearest: string | null }
+  | { readonly code: "bad-address"; readonly address: string }
+  | { readonly code: "too-much-for-excel"; readonly cells: number; readonly limit: number }
+  | { readonly code: "excel-too-old"; readonly missing: string }
+  | { readonly code: "excel-busy" }
+  | { readonly code: "excel-refused"; readonly detail: string }
+  | { readonly code: "time-limit"; readonly seconds: number }
+  | { readonly code: "cancelled" };

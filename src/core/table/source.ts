@@ -1,0 +1,19 @@
+import type { CellColumn } from "./cells.ts";
+
+/** Where a column stands, so that a fault can name its cells. Rows and columns count from 0. */
+export type Place =
+  | { readonly kind: "sheet"; readonly sheet: string; readonly column: number; readonly firstRow: number }
+  | { readonly kind: "argument"; readonly argument: string; readonly column: number; readonly firstRow: number };
+
+/** One named column of data, heading not included. */
+export interface Column {
+  readonly name: string;
+  readonly place: Place;
+  readonly cells: CellColumn;
+}
+
+/** Columns of equal height that stand side by side: row i of each belongs to the same observation. */
+export interface Source {
+  readonly columns: readonly Column[];
+  readonly rowCount: number;
+}
