@@ -1,0 +1,53 @@
+import type { Result } from "../core/problem/result.ts";
+import type { CellColumn } from "../core/table/cells.ts";
+import type { SheetPlan } from "../sheet/plan.ts";
+
+/** A rectangle of cells read from a workbook, column by column. Rows and columns count from 0. */
+export interface CellBlock {
+  readonly sheet: string;
+  /** "Months!A1:D97" */
+  readonly address: string;
+  readonly firstRow: number;
+  readonly firstColumn: number;
+  readonly rowCount: number;
+  readonly columns: readonly CellColumn[];
+  /** The table the block is the range of, if any: for structured references. */
+  readonly table: string | null;
+}
+
+/** A place a user can choose data from. */
+export interface DataPlace {
+  readonly kind: "table" | "name" | "sheet";
+  readonly name: string;
+  /** "Months!A1:D97" */
+  readonly address: string;
+}
+
+export type WhereToRead =
+  | { readonly kind: "selection" }
+  | { readonly kind: "address"; readonly address: string }
+  | { readonly kind: "place"; readonly place: DataPlace };
+
+export interface Progress {
+  readonly what: string;
+  /** From 0 to 1, or null where it cannot be told. */
+  readonly share: number | null;
+}
+
+export interface Errand {
+  readonly signal: AbortSignal;
+  readonly progress: (progress: Progress) => void;
+}
+
+/** What the app needs of a spreadsheet. The office room answers it with Excel's API. */
+export interface Host {
+  /** Reads in chunks; a selection of one cell widens to the data around it; whole columns stop at the used range. */
+  readonly read: (where: WhereToRead, errand: Errand) => Promise<Result<CellBlock>>;
+  readonly listPlaces: () => Promise<Result<readonly DataPlace[]>>;
+  /** Writes to a new sheet, shows it, and answers with its name. */
+  readonly write: (plan: SheetPlan, errand: Errand) => Promise<Result<{ readonly sheet: string }>>;
+  /** Selects and shows a cell or range. */
+  readonly goTo: (address: string) => Promise<Result<null>>;
+  /** Calls back when a cell inside one of the addresses changes; answers with a way to stop. */
+  readonly watch: (addresses: readonly string[], changed: (address: string) => void) => Promise<Result<() => Promise<void>>>;
+}

@@ -1,0 +1,98 @@
+import type { WhiteVersion } from "../covariance/choice.ts";
+import type { Decision } from "../decision/decision.ts";
+import type { LeftOut, Period } from "../design/design.ts";
+import type { TestOutcome } from "../diagnostics/outcome.ts";
+import type { InferenceTable } from "../inference/inference.ts";
+import type { Options } from "./options.ts";
+
+/** Everything that is said of a regression, as plain values that cross to the pane, the sheet and the terminal. */
+export interface Answer {
+  /** "Repairs explained by Price, Advertising and Rainy days" */
+  readonly title: string;
+  readonly outcome: string;
+  readonly observations: number;
+  /** Names of the k coefficients; the constant, where there is one, comes first as "constant". */
+  readonly terms: readonly string[];
+  readonly coefficients: readonly number[];
+  readonly standardErrors: AllStandardErrors;
+  readonly fit: FitFigures;
+  readonly tests: readonly TestOutcome[];
+  readonly decision: Decision;
+  /** Lags that Newey-West used, null where rows do not run through time. */
+  readonly lags: number | null;
+  readonly inference: {
+    readonly classical: InferenceTable;
+    readonly white: InferenceTable;
+    readonly neweyWest: InferenceTable | null;
+    readonly grouped: InferenceTable | null;
+    readonly inForce: InferenceTable;
+  };
+  /** One entry a term, in the order of `terms`. */
+  readonly drivers: readonly DriverAnswer[];
+  readonly verdict: readonly string[];
+  readonly rows: RowsSummary;
+  readonly leftOut: readonly LeftOut[];
+  readonly leftOutCount: number;
+  /** What was done to the data, as sentences. */
+  readonly notes: readonly string[];
+  readonly options: Options;
+  readonly points: ResidualPoints;
+}
+
+export interface AllStandardErrors {
+  readonly classical: readonly number[];
+  readonly white: Readonly<Partial<Record<WhiteVersion, readonly number[]>>>;
+  /** Said where a White version could not be had as asked (a leverage of one), else null. */
+  readonly whiteFallback: string | null;
+  readonly neweyWest: { readonly lags: number; readonly adjusted: readonly number[]; readonly unadjusted: readonly number[] } | null;
+  readonly grouped: { readonly groups: number; readonly CR0: readonly number[]; readonly CR1: readonly number[] } | null;
+}
+
+export interface FitFigures {
+  readonly columns: number;
+  readonly degreesOfFreedom: number;
+  readonly sigma: number;
+  readonly rSquared: number;
+  readonly adjustedRSquared: number;
+  readonly uncentred: boolean;
+  readonly rss: number;
+  readonly logLikelihood: number;
+  readonly aic: number;
+  readonly bic: number;
+}
+
+/** What is said of one term. */
+export interface DriverAnswer {
+  readonly term: string;
+  readonly coefficient: number;
+  readonly against: number;
+  readonly standardError: number;
+  readonly ratio: number;
+  readonly pValue: number;
+  readonly low: number;
+  readonly high: number;
+  readonly firmness: { readonly kind: "firm" } | { readonly kind: "leaning"; readonly on: readonly string[] };
+  /** The verdict's sentence about this term; null for the constant. */
+  readonly sentence: string | null;
+}
+
+export type RowsSummary =
+  | { readonly kind: "cases" }
+  | {
+      readonly kind: "time";
+      readonly period: Period;
+      readonly first: string;
+      readonly last: string;
+      readonly gaps: number;
+      readonly gapLabels: readonly string[];
+    }
+  | { readonly kind: "groups"; readonly by: string; readonly groups: number };
+
+/** Points for the pictures: at most 2,000, evenly thinned where there are more rows. */
+export interface ResidualPoints {
+  readonly fitted: readonly number[];
+  readonly residuals: readonly number[];
+  /** Sheet row (from 1) of each point. */
+  readonly rows: readonly number[];
+  readonly thinned: boolean;
+}

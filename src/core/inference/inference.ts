@@ -1,0 +1,18 @@
+import type { Reference } from "./reference.ts";
+
+/** Ratios, p-values and intervals of k coefficients under one kind of standard errors. */
+export interface InferenceTable {
+  readonly reference: Reference;
+  readonly standardErrors: readonly number[];
+  /** (b - b0) / se. */
+  readonly ratio: readonly number[];
+  /** Two-sided, under `reference`. */
+  readonly pValue: readonly number[];
+  /** Two-sided, t with n - k degrees of freedom. */
+  readonly pValueT: readonly number[];
+  /** Two-sided, standard normal. */
+  readonly pValueNormal: readonly number[];
+  /** Interval at 1 - level under `reference`. */
+  readonly low: readonly number[];
+  readonly high: readonly number[];
+}

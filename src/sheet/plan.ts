@@ -1,0 +1,69 @@
+/** A sheet as data: what stands in which cell, how it looks, which charts stand beside. Rows and columns count from 0. */
+export interface SheetPlan {
+  /** The wanted name; the host makes it unique ("Repairs answer", "Repairs answer 2"). */
+  readonly name: string;
+  readonly blocks: readonly PlanBlock[];
+  readonly formats: readonly PlanFormat[];
+  readonly links: readonly PlanLink[];
+  /** Width of each column in characters of the normal font, from column 0. */
+  readonly columnWidths: readonly number[];
+  /** Rows kept in view while scrolling. */
+  readonly frozenRows: number;
+  readonly charts: readonly ChartPlan[];
+  /** What is printed, one page wide; null prints all. */
+  readonly printArea: Area | null;
+}
+
+export interface Area {
+  readonly row: number;
+  readonly column: number;
+  readonly rows: number;
+  readonly columns: number;
+}
+
+/** Text is never executed: a heading that begins with = stays text. A blank is null. */
+export type PlanCell =
+  | null
+  | { readonly kind: "text"; readonly text: string }
+  | { readonly kind: "number"; readonly number: number }
+  /** Begins with "=", in the English, comma-separated form that Excel's API takes. */
+  | { readonly kind: "formula"; readonly formula: string };
+
+/** A rectangular block, written in one go. */
+export interface PlanBlock {
+  readonly row: number;
+  readonly column: number;
+  readonly cells: readonly (readonly PlanCell[])[];
+}
+
+export type PlanStyle = "title" | "heading" | "table heading" | "label" | "note" | "sentence" | "in force" | "caution";
+
+export interface PlanFormat {
+  readonly area: Area;
+  readonly style?: PlanStyle;
+  readonly numberFormat?: string;
+  readonly wrap?: boolean;
+  readonly align?: "left" | "right" | "center";
+  /** Cells joined into one, for sentences that run over several columns. */
+  readonly merge?: boolean;
+  /** Height of each row in points, for wrapped sentences. */
+  readonly rowHeight?: number;
+}
+
+export interface PlanLink {
+  readonly row: number;
+  readonly column: number;
+  readonly text: string;
+  /** An address in this workbook, "Months!C14". */
+  readonly target: string;
+}
+
+export interface ChartPlan {
+  readonly title: string;
+  readonly kind: "scatter" | "lines";
+  readonly place: Area;
+  readonly xTitle: string;
+  readonly yTitle: string;
+  /** Areas on the same sheet; x and y of a series are columns of equal height. */
+  readonly series: readonly { readonly name: string; readonly x: Area; readonly y: Area; readonly drawn: "points" | "line" }[];
+}
