@@ -1,16 +1,11 @@
 import type { Result } from "../core/problem/result.ts";
-import type { CellColumn } from "../core/table/cells.ts";
+import type { CellBlock } from "../core/table/block.ts";
 import type { SheetPlan } from "../sheet/plan.ts";
 
-/** A rectangle of cells read from a workbook, column by column. Rows and columns count from 0. */
-export interface CellBlock {
-  readonly sheet: string;
+/** A block of cells and where it was found. */
+export interface PlacedBlock extends CellBlock {
   /** "Months!A1:D97" */
   readonly address: string;
-  readonly firstRow: number;
-  readonly firstColumn: number;
-  readonly rowCount: number;
-  readonly columns: readonly CellColumn[];
   /** The table the block is the range of, if any: for structured references. */
   readonly table: string | null;
 }
@@ -42,12 +37,15 @@ export interface Errand {
 /** What the app needs of a spreadsheet. The office room answers it with Excel's API. */
 export interface Host {
   /** Reads in chunks; a selection of one cell widens to the data around it; whole columns stop at the used range. */
-  readonly read: (where: WhereToRead, errand: Errand) => Promise<Result<CellBlock>>;
+  readonly read: (where: WhereToRead, errand: Errand) => Promise<Result<PlacedBlock>>;
   readonly listPlaces: () => Promise<Result<readonly DataPlace[]>>;
   /** Writes to a new sheet, shows it, and answers with its name. */
   readonly write: (plan: SheetPlan, errand: Errand) => Promise<Result<{ readonly sheet: string }>>;
   /** Selects and shows a cell or range. */
   readonly goTo: (address: string) => Promise<Result<null>>;
   /** Calls back when a cell inside one of the addresses changes; answers with a way to stop. */
-  readonly watch: (addresses: readonly string[], changed: (address: string) => void) => Promise<Result<() => Promise<void>>>;
+  readonly watch: (
+    addresses: readonly string[],
+    changed: (address: string) => void,
+  ) => Promise<Result<() => Promise<void>>>;
 }

@@ -65,5 +65,10 @@ export interface ChartPlan {
   readonly xTitle: string;
   readonly yTitle: string;
   /** Areas on the same sheet; x and y of a series are columns of equal height. */
-  readonly series: readonly { readonly name: string; readonly x: Area; readonly y: Area; readonly drawn: "points" | "line" }[];
+  readonly series: readonly {
+    readonly name: string;
+    readonly x: Area;
+    readonly y: Area;
+    readonly drawn: "points" | "line";
+  }[];
 }

@@ -44,8 +44,16 @@ export interface AllStandardErrors {
   readonly white: Readonly<Partial<Record<WhiteVersion, readonly number[]>>>;
   /** Said where a White version could not be had as asked (a leverage of one), else null. */
   readonly whiteFallback: string | null;
-  readonly neweyWest: { readonly lags: number; readonly adjusted: readonly number[]; readonly unadjusted: readonly number[] } | null;
-  readonly grouped: { readonly groups: number; readonly CR0: readonly number[]; readonly CR1: readonly number[] } | null;
+  readonly neweyWest: {
+    readonly lags: number;
+    readonly adjusted: readonly number[];
+    readonly unadjusted: readonly number[];
+  } | null;
+  readonly grouped: {
+    readonly groups: number;
+    readonly CR0: readonly number[];
+    readonly CR1: readonly number[];
+  } | null;
 }
 
 export interface FitFigures {

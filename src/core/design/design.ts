@@ -61,7 +61,12 @@ export type RowOrder =
 
 /** The regression as numbers: outcome y (n), terms X (n by k, column by column), what rows are. */
 export interface Design {
-  readonly outcome: { readonly name: string; readonly column: string; readonly transform: string; readonly values: Float64Array<ArrayBuffer> };
+  readonly outcome: {
+    readonly name: string;
+    readonly column: string;
+    readonly transform: string;
+    readonly values: Float64Array<ArrayBuffer>;
+  };
   readonly terms: readonly Term[];
   readonly hasConstant: boolean;
   readonly rowCount: number;

@@ -24,13 +24,24 @@ export type TableProblem =
   | ({ readonly code: "unreadable-time" } & Spots)
   | ({ readonly code: "missing-time" } & Spots)
   | ({ readonly code: "repeated-time" } & Spots)
-  | { readonly code: "unequal-heights"; readonly first: string; readonly rows: number; readonly second: string; readonly otherRows: number }
+  | {
+      readonly code: "unequal-heights";
+      readonly first: string;
+      readonly rows: number;
+      readonly second: string;
+      readonly otherRows: number;
+    }
   | { readonly code: "overlapping-ranges"; readonly first: string; readonly second: string };
 
 export type ModelProblem =
   | { readonly code: "no-outcome" }
   | { readonly code: "no-drivers" }
-  | { readonly code: "unknown-heading"; readonly heading: string; readonly nearest: string | null; readonly where: string }
+  | {
+      readonly code: "unknown-heading";
+      readonly heading: string;
+      readonly nearest: string | null;
+      readonly where: string;
+    }
   | { readonly code: "repeated-heading"; readonly heading: string; readonly cells: readonly string[] }
   | { readonly code: "column-used-twice"; readonly column: string; readonly first: string; readonly second: string }
   | { readonly code: "no-time-column" }
@@ -38,7 +49,12 @@ export type ModelProblem =
   | { readonly code: "one-group"; readonly column: string; readonly value: string }
   | { readonly code: "one-category"; readonly column: string; readonly value: string }
   | { readonly code: "unknown-base"; readonly column: string; readonly base: string; readonly nearest: string | null }
-  | { readonly code: "logarithm-of-nonpositive"; readonly column: string; readonly cells: readonly string[]; readonly count: number }
+  | {
+      readonly code: "logarithm-of-nonpositive";
+      readonly column: string;
+      readonly cells: readonly string[];
+      readonly count: number;
+    }
   | { readonly code: "transform-needs-time"; readonly column: string; readonly transform: string };
 
 export type FitProblem =

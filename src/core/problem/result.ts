@@ -5,4 +5,7 @@ export type Result<T> = { readonly ok: true; readonly value: T } | { readonly ok
 
 export const success = <T>(value: T): Result<T> => ({ ok: true, value });
 
-export const failure = (problem: Problem): { readonly ok: false; readonly problem: Problem } => ({ ok: false, problem });
+export const failure = (problem: Problem): { readonly ok: false; readonly problem: Problem } => ({
+  ok: false,
+  problem,
+});

@@ -1,0 +1,72 @@
+/** A workbook as plain data: what files hold, what the grid opens, what the demo script writes. */
+export interface BookData {
+  readonly sheets: readonly SheetData[];
+  readonly names: readonly { readonly name: string; readonly refersTo: string }[];
+  /** Index of the sheet shown first. */
+  readonly active: number;
+}
+
+export interface SheetData {
+  readonly name: string;
+  /** Row by row from A1; rows may be shorter than the sheet is wide. */
+  readonly rows: readonly (readonly BookCell[])[];
+  /** Width in characters of the normal font by column, undefined for the standard width. */
+  readonly columnWidths: readonly (number | undefined)[];
+  readonly merges: readonly string[];
+  readonly frozenRows: number;
+  readonly hidden: boolean;
+  readonly hiddenRows: readonly number[];
+  readonly protected: boolean;
+  readonly tables: readonly { readonly name: string; readonly address: string }[];
+  readonly charts: readonly BookChart[];
+  readonly printArea: string | null;
+  readonly onePageWide: boolean;
+  readonly links: readonly { readonly cell: string; readonly target: string }[];
+}
+
+export type BookValue = number | string | boolean | null | { readonly error: string };
+
+/** A bare value, or a value with the formula behind it and its looks. Dates are serial numbers with a date format. */
+export type BookCell = BookValue | StyledCell;
+
+export interface StyledCell {
+  readonly value: BookValue;
+  /** With its "=", in English with commas; add-in functions by their own names, FOOTING.ANSWER(...). */
+  readonly formula?: string;
+  /** The range that the formula's result spills into, "A1:C9". */
+  readonly spill?: string;
+  readonly style?: CellStyle;
+}
+
+export interface CellStyle {
+  readonly numberFormat?: string;
+  readonly bold?: boolean;
+  readonly italic?: boolean;
+  /** In points. */
+  readonly size?: number;
+  /** "#1f2937" */
+  readonly color?: string;
+  readonly fill?: string;
+  readonly wrap?: boolean;
+  readonly horizontal?: "left" | "right" | "center";
+  readonly vertical?: "top" | "middle" | "bottom";
+  readonly lineAbove?: string;
+  readonly lineBelow?: string;
+}
+
+export interface BookChart {
+  readonly name: string;
+  readonly title: string;
+  readonly kind: "scatter" | "scatter with lines" | "lines" | "columns";
+  readonly place: { readonly row: number; readonly column: number; readonly rows: number; readonly columns: number };
+  readonly xTitle: string;
+  readonly yTitle: string;
+  /** Ranges as formulas write them: "'Repairs answer'!$H$4:$H$99". */
+  readonly series: readonly {
+    readonly name: string;
+    readonly x: string;
+    readonly y: string;
+    readonly line: boolean;
+    readonly markers: boolean;
+  }[];
+}
