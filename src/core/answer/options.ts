@@ -1,21 +1,12 @@
-import type { ErrorsChoice, LagRule, WhiteVersion } from "../covariance/choice.ts";
-import type { Policy } from "../decision/decision.ts";
+import type { ErrorsWish } from "../decision/wish.ts";
 
 /** How the answer is to be made, beside the model. */
-export interface Options {
-  readonly policy: Policy;
-  /** A kind of standard errors fixed by the user, and the reason given for it. */
-  readonly fixed: { readonly errors: ErrorsChoice["kind"]; readonly reason: string | null } | null;
-  readonly whiteVersion: WhiteVersion;
-  /** null: the policy's own rule. */
-  readonly lags: LagRule | null;
-  /** Whether Newey-West carries the factor n / (n - k). */
-  readonly adjusted: boolean;
+export interface Options extends ErrorsWish {
   /** Two-sided level, 0.05 for 95 % intervals. */
   readonly level: number;
   /** The value each driver is tested against, by term name; 0 where none is given. */
   readonly against: Readonly<Record<string, number>>;
-  /** Units in words by column, "orders a month". */
+  /** Words for one unit by column: "repairs a month", "rainy day". */
   readonly units: Readonly<Record<string, string>>;
 }
 
@@ -23,6 +14,7 @@ export const defaultOptions: Options = {
   policy: "careful",
   fixed: null,
   whiteVersion: "HC3",
+  groupedVersion: "CR1",
   lags: null,
   adjusted: true,
   level: 0.05,

@@ -1,8 +1,7 @@
 import type { ErrorsChoice } from "../covariance/choice.ts";
 import type { TestOutcome } from "../diagnostics/outcome.ts";
 import type { Reference } from "../inference/reference.ts";
-
-export type Policy = "careful" | "textbook" | "always-robust";
+import type { Policy } from "./wish.ts";
 
 /** What the tests say of the two questions that make the four cases. */
 export interface FourCase {

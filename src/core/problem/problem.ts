@@ -64,6 +64,7 @@ export type FitProblem =
   | { readonly code: "dependent-columns"; readonly column: string; readonly madeOf: readonly string[] }
   | { readonly code: "perfect-fit"; readonly column: string }
   | { readonly code: "numbers-too-large"; readonly column: string; readonly cell: string; readonly value: number }
+  | { readonly code: "errors-need-order"; readonly errors: string; readonly rows: string }
   | { readonly code: "too-many-lags"; readonly lags: number; readonly rows: number };
 
 export type SettingProblem =
