@@ -1,3 +1,5 @@
+import type { Transform } from "./model.ts";
+
 /** A row that was not used, named as the user knows it (sheet rows count from 1). */
 export interface LeftOut {
   readonly row: number;
@@ -16,7 +18,7 @@ export interface Term {
 
 export type TermMeaning =
   | { readonly kind: "constant" }
-  | { readonly kind: "number"; readonly column: string; readonly transform: string }
+  | { readonly kind: "number"; readonly column: string; readonly transform: Transform }
   | { readonly kind: "level"; readonly column: string; readonly level: string; readonly base: string }
   | { readonly kind: "date"; readonly column: string; readonly unit: string }
   | { readonly kind: "trend"; readonly unit: string }
@@ -64,7 +66,7 @@ export interface Design {
   readonly outcome: {
     readonly name: string;
     readonly column: string;
-    readonly transform: string;
+    readonly transform: Transform;
     readonly values: Float64Array<ArrayBuffer>;
   };
   readonly terms: readonly Term[];

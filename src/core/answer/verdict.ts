@@ -1,0 +1,117 @@
+import type { Decision } from "../decision/decision.ts";
+import type { ErrorsChoice } from "../covariance/choice.ts";
+import type { Answer, DriverAnswer, RowsSummary } from "./answer.ts";
+import { type Effect } from "./effects.ts";
+import {
+  capitalised,
+  confidenceInWords,
+  decimalsFor,
+  listInWords,
+  numberInWords,
+  pValueInWords,
+  shareInWords,
+} from "./wording.ts";
+
+type Facts = Pick<Answer, "outcome" | "observations" | "terms" | "fit" | "decision" | "lags" | "rows" | "options">;
+
+/** The name a kind of standard errors goes by in sentences. */
+export function errorsInWords(errors: ErrorsChoice, lags: number | null): string {
+  switch (errors.kind) {
+    case "classical":
+      return "classical";
+    case "white":
+      return `White (${errors.version})`;
+    case "newey-west":
+      return `Newey-West (${lags ?? 0} ${lags === 1 ? "lag" : "lags"})`;
+    case "grouped":
+      return `grouped (${errors.version})`;
+  }
+}
+
+/** What was fitted, and how much of the outcome the drivers account for. */
+export function openingSentence({ outcome, observations, terms, fit, rows }: Facts): string {
+  const drivers = terms.filter((term) => term !== "constant");
+  const share = shareInWords(fit.rSquared);
+  const measure = fit.uncentred
+    ? `R-squared about zero is ${share} (there is no constant)`
+    : `together they account for ${share} of the variation in ${outcome}`;
+  const subject = drivers.length === 1 ? measure.replace("together they account", "it accounts") : measure;
+  return `${outcome} explained by ${listInWords(drivers)}, ${rowsInWords(rows, observations)}: ${subject}.`;
+}
+
+function rowsInWords(rows: RowsSummary, observations: number): string {
+  switch (rows.kind) {
+    case "cases":
+      return `${observations} separate cases`;
+    case "time":
+      return `${observations} ${rows.period.unit}s from ${rows.first} to ${rows.last}`;
+    case "groups":
+      return `${observations} rows in ${rows.groups} groups by ${rows.by}`;
+  }
+}
+
+/** Which standard errors count, and why. */
+export function choiceSentence({ decision, lags }: Facts): string {
+  const inForce = errorsInWords(decision.inForce.errors, lags);
+  if (decision.override === null) {
+    return `${capitalised(decision.because)}, so the ${inForce} standard errors count.`;
+  }
+  const called = errorsInWords(decision.called.errors, lags);
+  return `The ${inForce} standard errors were fixed by hand (reason: ${decision.override}). The evidence calls for ${called}: ${decision.because}.`;
+}
+
+export interface Spoken {
+  readonly driver: Omit<DriverAnswer, "sentence">;
+  readonly effect: Effect;
+  readonly decision: Decision;
+  readonly lags: number | null;
+  readonly level: number;
+  /** "all three kinds", "classical and White standard errors", ... */
+  readonly agreeing: string;
+}
+
+/** The sentence about one driver: what it goes with, how sure, and whether that hangs on the choice of standard errors. */
+export function driverSentence(spoken: Spoken): string {
+  const { driver, level } = spoken;
+  const differs = driver.pValue < level;
+  const statement = driver.against === 0 ? aboutZero(spoken, differs) : aboutValue(spoken, differs);
+  return `${statement} ${firmnessSentence(spoken)}`;
+}
+
+function aboutZero(spoken: Spoken, differs: boolean): string {
+  const { driver, effect, level } = spoken;
+  const { amount, words } = effect;
+  const [low, high] = [amount(driver.low), amount(driver.high)];
+  const decimals = decimalsFor((high - low) / 2);
+  const text = (value: number): string => withUnit(numberInWords(Math.abs(value), decimals), words.up);
+  const direction = driver.coefficient > 0 ? words.up : words.down;
+  if (differs) {
+    const [near, far] = driver.coefficient > 0 ? [low, high] : [high, low];
+    return `${effect.step} goes with ${text(amount(driver.coefficient))} ${bare(direction)} (between ${text(near)} and ${text(far)} ${comparative(direction)}, ${confidenceInWords(level)}).`;
+  }
+  const p = pValueInWords(driver.pValue, level);
+  return `${driver.term}: no effect can be shown (${p}); from ${text(low)} ${comparative(low < 0 ? words.down : words.up)} to ${text(high)} ${bare(high < 0 ? words.down : words.up)} is compatible with the data (${confidenceInWords(level)}).`;
+}
+
+/** Per cent signs stand beside their number: "2.3 % less Repairs". */
+const withUnit = (number: string, words: string): string => (words.startsWith("% ") ? `${number} %` : number);
+const bare = (words: string): string => words.replace(/^% /, "");
+const comparative = (words: string): string =>
+  /(more|less|fewer|percentage points more|percentage points less)/.exec(words)?.[0] ?? "";
+
+function aboutValue({ driver, level }: Spoken, differs: boolean): string {
+  const decimals = decimalsFor((driver.high - driver.low) / 2);
+  const [coefficient, low, high] = [driver.coefficient, driver.low, driver.high].map((value) =>
+    numberInWords(value, decimals),
+  );
+  const judged = differs ? "differs from" : "is compatible with";
+  const p = pValueInWords(driver.pValue, level);
+  return `${driver.term}: the coefficient ${coefficient ?? ""} (between ${low ?? ""} and ${high ?? ""}, ${confidenceInWords(level)}) ${judged} the tested value ${driver.against} (${p}).`;
+}
+
+function firmnessSentence({ driver, decision, lags, level, agreeing }: Spoken): string {
+  if (driver.firmness.kind === "firm") return `This is firm: ${agreeing} agree.`;
+  const { on } = driver.firmness;
+  const inForce = errorsInWords(decision.inForce.errors, lags);
+  return `This leans on the choice: with ${inForce} ${pValueInWords(driver.pValue, level)}, but ${listInWords(on)} would say otherwise.`;
+}
