@@ -20,6 +20,7 @@ export type TableProblem =
   | ({ readonly code: "text-in-number-column" } & Spots)
   | ({ readonly code: "text-numbers" } & Spots)
   | ({ readonly code: "dates-as-text" } & Spots)
+  | ({ readonly code: "dates-in-number-column" } & Spots)
   | ({ readonly code: "error-cells" } & Spots)
   | ({ readonly code: "unreadable-time" } & Spots)
   | ({ readonly code: "missing-time" } & Spots)
@@ -55,7 +56,15 @@ export type ModelProblem =
       readonly cells: readonly string[];
       readonly count: number;
     }
-  | { readonly code: "transform-needs-time"; readonly column: string; readonly transform: string };
+  | ({ readonly code: "growth-from-nonpositive" } & Omit<Spots, "values">)
+  | {
+      readonly code: "too-many-categories";
+      readonly column: string;
+      readonly categories: number;
+      readonly rows: number;
+    }
+  | { readonly code: "transform-needs-time"; readonly column: string; readonly transform: string }
+  | { readonly code: "calendar-needs-dates"; readonly driver: string; readonly column: string | null };
 
 export type FitProblem =
   | { readonly code: "too-few-rows"; readonly rows: number; readonly needed: number; readonly leftOut: number }
