@@ -1,0 +1,33 @@
+import type { Source } from "../core/table/source.ts";
+import type { FromWorker, ToWorker, WorkerPort } from "./protocol.ts";
+import type { Tasks } from "./tasks.ts";
+
+type Compute = Extract<ToWorker, { kind: "compute" }>;
+
+/** Computes what is asked over the port, one question after the other, and says when it is ready. */
+export function serve(port: WorkerPort, tasks: Tasks): void {
+  const sources = new Map<number, Source>();
+  const compute = ({ job, task, question }: Compute, source: Source | undefined): FromWorker => {
+    const report = (what: string, share: number): void => port.postMessage({ kind: "progress", job, what, share });
+    try {
+      if (source === undefined) throw new Error("The worker was asked about data it does not hold.");
+      return { kind: "done", job, result: tasks[task]({ ...question, source }, report) };
+    } catch (fault) {
+      const { message, stack } = fault instanceof Error ? fault : new Error(String(fault));
+      return { kind: "failed", job, message, stack: stack ?? "" };
+    }
+  };
+  port.onmessage = ({ data }) => {
+    switch (data.kind) {
+      case "keep":
+        sources.set(data.source, data.data);
+        return;
+      case "forget":
+        sources.delete(data.source);
+        return;
+      case "compute":
+        port.postMessage(compute(data, sources.get(data.source)));
+    }
+  };
+  port.postMessage({ kind: "ready" });
+}
