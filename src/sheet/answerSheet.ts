@@ -1,0 +1,67 @@
+import type { Answer } from "../core/answer/answer.ts";
+import { residualChart, intervalChart } from "./charts.ts";
+import { chartColumn, chartColumns, page, pageWidths } from "./columns.ts";
+import { driversSection } from "./driversSection.ts";
+import { evidenceSection } from "./evidenceSection.ts";
+import { type Figures, keptFigures, liveFigures } from "./figures.ts";
+import { fourCasesSection } from "./fourCasesSection.ts";
+import { type SheetFacts, howMadeSection, settingsArea } from "./howMadeSection.ts";
+import type { SheetPlan } from "./plan.ts";
+import { titleSection, verdictSection } from "./plainWordsSection.ts";
+import { rectangle, stack } from "./section.ts";
+
+export type SheetKind = "live" | "kept";
+
+/** Order of the parts on the page; charts stand beside the parts named here. */
+const part = { title: 0, verdict: 1, fourCases: 2, drivers: 3, evidence: 4, howMade: 5 } as const;
+
+/**
+ * Lays an answer out on a sheet that someone who was not there can read and redo.
+ * @param answer - what is said of the regression.
+ * @param facts - where the data stand, when and with which version it was made, the fingerprint of the data.
+ * @param kind - live: figures are worksheet functions over the source ranges; kept: figures are values.
+ */
+export function planAnswer(answer: Answer, facts: SheetFacts, kind: SheetKind): SheetPlan {
+  const laidOut = stack(partsOf(answer, facts, keptFigures(answer)));
+  const figures = kind === "kept" ? keptFigures(answer) : live(answer, facts, laidOut.starts[part.howMade] ?? 0);
+  const { rows, formats, links, starts } = stack(partsOf(answer, facts, figures));
+  const charts = [
+    residualChart(answer, starts[part.fourCases] ?? 0),
+    intervalChart(answer, starts[part.evidence] ?? 0),
+  ];
+  return {
+    name: sheetName(answer.outcome),
+    blocks: [
+      { row: 0, column: 0, cells: rectangle(rows, page.columns) },
+      ...charts.flatMap(({ blocks }) => blocks),
+      ...figures.blocks,
+    ],
+    formats: [...formats, ...figures.formats, ...charts.flatMap((chart) => chart.formats)],
+    links,
+    columnWidths: pageWidths,
+    frozenRows: 1,
+    charts: charts.map(({ chart }) => chart),
+    printArea: { row: 0, column: 0, rows: rows.length, columns: chartColumn + chartColumns },
+  };
+}
+
+const partsOf = (answer: Answer, facts: SheetFacts, figures: Figures) => [
+  titleSection(answer, facts),
+  verdictSection(answer, figures),
+  fourCasesSection(answer, figures),
+  driversSection(answer, figures),
+  evidenceSection(answer, figures),
+  howMadeSection(answer, facts),
+];
+
+const live = (answer: Answer, facts: SheetFacts, howMadeRow: number): Figures =>
+  liveFigures(answer, { ...facts.ranges, settings: settingsArea(answer, facts, howMadeRow) });
+
+const longestName = 31;
+
+/** A name Excel takes: at most 31 characters, none of \ / ? * [ ] : and no apostrophe at either end. */
+function sheetName(outcome: string): string {
+  const plain = outcome.replaceAll(/[\\/?*[\]:']/g, " ").trim();
+  const suffix = " answer";
+  return `${plain.slice(0, longestName - suffix.length - 3).trim() || "Regression"}${suffix}`;
+}

@@ -1,0 +1,32 @@
+import type { Answer } from "../core/answer/answer.ts";
+import { evidenceTable } from "../core/answer/tables.ts";
+import type { Figures } from "./figures.ts";
+import { pValueFormat, statisticFormat } from "./numberFormats.ts";
+import { headingFormat } from "./plainWordsSection.ts";
+import type { PlanFormat } from "./plan.ts";
+import { type Section, section, text } from "./section.ts";
+
+/** Columns of the evidence table that hold statistics and p-values; the reading stands last. */
+const statistics = [2, 5];
+const pValues = [4, 7];
+
+/** All tests with their readings, then the fit as a whole. */
+export function evidenceSection(answer: Answer, figures: Figures): Section {
+  const [headings = [], ...body] = evidenceTable(answer);
+  const rows = body.map((row, index) => row.map((_, column) => figures.evidence(index + 1, column)));
+  const column = (at: number, numberFormat: string): PlanFormat => ({
+    area: { row: 2, column: at, rows: body.length, columns: 1 },
+    numberFormat,
+    align: "right",
+  });
+  return section(
+    [[text("Evidence")], headings.map((heading) => text(String(heading))), ...rows],
+    [
+      headingFormat(0),
+      { area: { row: 1, column: 0, rows: 1, columns: headings.length }, style: "table heading", wrap: true },
+      { area: { row: 2, column: 0, rows: body.length, columns: 1 }, style: "label" },
+      ...statistics.map((at) => column(at, statisticFormat)),
+      ...pValues.map((at) => column(at, pValueFormat)),
+    ],
+  );
+}

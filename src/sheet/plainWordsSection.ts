@@ -1,0 +1,41 @@
+import type { Answer } from "../core/answer/answer.ts";
+import { verdictLines } from "../core/answer/tables.ts";
+import { page, sentenceHeight } from "./columns.ts";
+import type { Figures } from "./figures.ts";
+import type { SheetFacts } from "./howMadeSection.ts";
+import type { PlanFormat } from "./plan.ts";
+import { type Section, section, text } from "./section.ts";
+
+/** The caution every result carries. */
+export const cautionLine =
+  "A statistical check, not financial, legal or audit advice; have a qualified person look before money or a filing depends on it.";
+
+export const titleSection = (answer: Answer, { date, version }: SheetFacts): Section =>
+  section(
+    [[text(answer.title)], [text(`${date}. Made with Footing ${version}.`)], [text(cautionLine)]],
+    [acrossPage(0, "title"), acrossPage(1, "note"), acrossPage(2, "caution")],
+  );
+
+const acrossPage = (row: number, style: NonNullable<PlanFormat["style"]>, rows = 1): PlanFormat => ({
+  area: { row, column: page.first, rows, columns: page.columns },
+  style,
+});
+
+/** Lines kept free below a live verdict, in case new figures call for another sentence. */
+const spareLines = 2;
+
+/** One sentence a row, joined across the page so that it wraps. */
+export function verdictSection(answer: Answer, figures: Figures): Section {
+  const lines = verdictLines(answer);
+  const spare = figures.blocks.length === 0 ? 0 : spareLines;
+  const rows = Array.from({ length: lines.length + spare }, (_, line) => [figures.verdict(line)]);
+  const formats = rows.map((_, line): PlanFormat => ({
+    ...acrossPage(line + 1, "sentence"),
+    merge: true,
+    wrap: true,
+    rowHeight: sentenceHeight(lines[line] ?? ""),
+  }));
+  return section([[text("In plain words")], ...rows], [acrossPage(0, "heading"), ...formats]);
+}
+
+export const headingFormat = (row: number): PlanFormat => acrossPage(row, "heading");

@@ -1,0 +1,30 @@
+import { settingTable } from "../core/answer/settingTable.ts";
+
+const settingLine = ({ name, values, standard, meaning }: (typeof settingTable)[number]): string =>
+  `  --${name.replaceAll(" ", "-")}\n      ${meaning}\n      Takes: ${values}. Without it: ${standard}.`;
+
+/** What `footing --help` prints. */
+export const usage = `footing answer BOOK --outcome H --drivers H,H,... [options]
+
+Reads a workbook (.xlsx or .csv), fits the outcome on the drivers, tests which standard errors the evidence
+calls for, and prints the verdict. H is a heading, or a range such as B3:B99.
+
+  --sheet S            the sheet to read; without it the sheet that has the headings
+  --outcome H          the left-hand variable
+  --drivers H,H,...    the right-hand variables; repeat the option for headings with commas
+  --order H            the column that puts rows in time
+  --groups H           the column that says which group a row belongs to
+  --no-constant        fit without a constant
+  --save OUT.xlsx      write the result sheet into a copy of the workbook
+  --live               with --save: figures as worksheet functions instead of values
+  --json               print everything in full precision as JSON
+
+Settings, the same as in the worksheet functions:
+${settingTable
+  .filter(({ name }) => name !== "constant")
+  .map(settingLine)
+  .join("\n")}
+
+Exit status: 0 done, 2 a fault in the input (the sentence says what and where), 1 a fault of the program.
+A statistical check, not financial, legal or audit advice; have a qualified person look before money or a filing depends on it.
+`;
