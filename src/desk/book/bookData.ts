@@ -12,6 +12,8 @@ export interface SheetData {
   readonly rows: readonly (readonly BookCell[])[];
   /** Width in characters of the normal font by column, undefined for the standard width. */
   readonly columnWidths: readonly (number | undefined)[];
+  /** Height in points by row, undefined for the standard height. */
+  readonly rowHeights?: readonly (number | undefined)[];
   readonly merges: readonly string[];
   readonly frozenRows: number;
   readonly hidden: boolean;
