@@ -1,8 +1,110 @@
-import type { Result } from "../problem/result.ts";
-import type { Answer } from "./answer.ts";
+import { covarianceOf } from "../covariance/covarianceOf.ts";
+import { lagsOf } from "../covariance/lags.ts";
+import { decide } from "../decision/decide.ts";
+import { rulesOf } from "../decision/policies.ts";
+import { autocorrelationOrder } from "../decision/testOrder.ts";
+import { buildDesign } from "../design/buildDesign.ts";
+import type { Design } from "../design/design.ts";
+import type { Fit } from "../fit/fit.ts";
+import { fitLeastSquares } from "../fit/fitLeastSquares.ts";
+import { type Result, success } from "../problem/result.ts";
+import { allErrors } from "./allErrors.ts";
+import type { Answer, FitFigures, RowsSummary } from "./answer.ts";
+import { driverAnswers } from "./drivers.ts";
+import { residualPoints } from "./points.ts";
 import type { Question, Report } from "./question.ts";
+import { runTests } from "./runTests.ts";
+import { choiceSentence, openingSentence } from "./verdict.ts";
+import { listInWords } from "./wording.ts";
 
+/**
+ * The whole chain: columns to design, fit, tests, decision, standard errors of every kind, inference, verdict.
+ * @param question - the columns, what is made of them, and how the answer is to be made.
+ * @param report - told between the steps how far the work has come.
+ * @returns every figure finite; Problems of the table, the model and the fit as they are found.
+ */
 export function analyse(question: Question, report: Report): Result<Answer> {
-  report("", 0);
-  throw new Error(`not yet: ${question.model.outcome.column}`);
+  const { source, model } = question;
+  report("Reading the columns", 0);
+  const design = buildDesign(source, model);
+  if (!design.ok) return design;
+  report("Fitting", 0.15);
+  const fitted = fitLeastSquares(design.value);
+  if (!fitted.ok) return fitted;
+  return answerFrom(fitted.value, question, (step, share) => report(step, 0.35 + 0.65 * share));
+}
+
+function answerFrom(fit: Fit, { source, options }: Question, report: Report): Result<Answer> {
+  const { design } = fit;
+  const testOrder = autocorrelationOrder(design.order, fit.rowCount);
+  const tests = runTests(fit, testOrder, report);
+  const lags = design.order.kind === "time" ? lagsOf(fit, options.lags ?? rulesOf(options.policy).lags) : null;
+  const sizes = { rows: fit.rowCount, columns: fit.columnCount, lags: lags ?? 0 };
+  const decided = decide({ tests, order: design.order, sizes, testOrder }, options);
+  if (!decided.ok) return decided;
+  const decision = decided.value;
+  report("Standard errors", 0.7);
+  const errors = allErrors(fit, { decision, options, lags, sizes });
+  if (!errors.ok) return errors;
+  const { standardErrors, inference } = errors.value;
+  const drivers = driverAnswers({ fit, inference, decision, lags, options });
+  const said = {
+    outcome: design.outcome.name,
+    observations: fit.rowCount,
+    terms: design.terms.map(({ name }) => name),
+    fit: figuresOf(fit),
+    decision,
+    lags,
+    rows: rowsSummary(design),
+    options,
+  };
+  report("Verdict", 1);
+  return success({
+    ...said,
+    title: titleOf(design),
+    coefficients: [...fit.coefficients],
+    standardErrors,
+    tests,
+    inference,
+    drivers,
+    verdict: [openingSentence(said), choiceSentence(said), ...sentences(drivers), ...decision.cautions],
+    leftOut: design.leftOut,
+    leftOutCount: design.leftOutCount,
+    notes: design.notes,
+    points: residualPoints(fit, source),
+  });
+}
+
+const sentences = (drivers: Answer["drivers"]): string[] =>
+  drivers.flatMap(({ sentence }) => (sentence === null ? [] : [sentence]));
+
+function titleOf({ outcome, terms }: Design): string {
+  const drivers = terms.filter(({ meaning }) => meaning.kind !== "constant").map(({ name }) => name);
+  return `${outcome.name} explained by ${listInWords(drivers)}`;
+}
+
+const figuresOf = (fit: Fit): FitFigures => ({
+  columns: fit.columnCount,
+  degreesOfFreedom: fit.degreesOfFreedom,
+  sigma: fit.sigma,
+  rSquared: fit.rSquared,
+  adjustedRSquared: fit.adjustedRSquared,
+  uncentred: fit.uncentred,
+  rss: fit.residualSumOfSquares,
+  logLikelihood: fit.logLikelihood,
+  aic: fit.aic,
+  bic: fit.bic,
+});
+
+function rowsSummary({ order }: Design): RowsSummary {
+  switch (order.kind) {
+    case "cases":
+      return { kind: "cases" };
+    case "time": {
+      const { period, labels, gaps, gapLabels } = order;
+      return { kind: "time", period, first: labels.first, last: labels.last, gaps, gapLabels };
+    }
+    case "groups":
+      return { kind: "groups", by: order.by, groups: order.labels.length };
+  }
 }
