@@ -4,6 +4,9 @@ export interface BookData {
   readonly names: readonly { readonly name: string; readonly refersTo: string }[];
   /** Index of the sheet shown first. */
   readonly active: number;
+  /** What add-ins keep in the workbook; their parts and settings travel with the file. */
+  readonly customXml?: readonly { readonly id: string; readonly xml: string }[];
+  readonly settings?: Readonly<Record<string, unknown>>;
 }
 
 export interface SheetData {
@@ -12,6 +15,8 @@ export interface SheetData {
   readonly rows: readonly (readonly BookCell[])[];
   /** Width in characters of the normal font by column, undefined for the standard width. */
   readonly columnWidths: readonly (number | undefined)[];
+  /** Height in points by row, undefined for the standard height. */
+  readonly rowHeights?: readonly (number | undefined)[];
   /** Height in points by row, undefined for the standard height. */
   readonly rowHeights?: readonly (number | undefined)[];
   readonly merges: readonly string[];
@@ -23,7 +28,10 @@ export interface SheetData {
   readonly charts: readonly BookChart[];
   readonly printArea: string | null;
   readonly onePageWide: boolean;
+  readonly landscape?: boolean;
   readonly links: readonly { readonly cell: string; readonly target: string }[];
+  /** Marks that add-ins set on a sheet. */
+  readonly customProperties?: Readonly<Record<string, string>>;
 }
 
 export type BookValue = number | string | boolean | null | { readonly error: string };
@@ -63,6 +71,10 @@ export interface BookChart {
   readonly place: { readonly row: number; readonly column: number; readonly rows: number; readonly columns: number };
   readonly xTitle: string;
   readonly yTitle: string;
+  /** Ends of the axes; null or absent leaves the end to the program that draws. */
+  readonly xRange?: AxisRange;
+  readonly yRange?: AxisRange;
+  readonly legend?: boolean;
   /** Ranges as formulas write them: "'Repairs answer'!$H$4:$H$99". */
   readonly series: readonly {
     readonly name: string;
@@ -70,5 +82,14 @@ export interface BookChart {
     readonly y: string;
     readonly line: boolean;
     readonly markers: boolean;
+    /** "#1f2937"; absent takes the next colour of the theme. */
+    readonly color?: string;
+    /** In points. */
+    readonly lineWeight?: number;
   }[];
+}
+
+export interface AxisRange {
+  readonly minimum: number | null;
+  readonly maximum: number | null;
 }
