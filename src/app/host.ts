@@ -8,6 +8,8 @@ export interface PlacedBlock extends CellBlock {
   readonly address: string;
   /** The table the block is the range of, if any: for structured references. */
   readonly table: string | null;
+  /** Sheet rows (from 0) of the block that are hidden or filtered away, where the host tells. */
+  readonly hiddenRows?: readonly number[];
 }
 
 /** A place a user can choose data from. */

@@ -1,0 +1,105 @@
+import type { Host } from "../app/host.ts";
+import { type Result, failure, success } from "../core/problem/result.ts";
+import { type SheetArea, addressOf, parseAddress } from "../core/table/address.ts";
+import type { Rectangle } from "./areas.ts";
+import type { ExcelClient } from "./client.ts";
+import { unknownSheet } from "./locate.ts";
+import { type SheetChange, moved } from "./moved.ts";
+import { inExcel } from "./session.ts";
+
+type Watching = Awaited<ReturnType<Host["watch"]>>;
+
+/** An editing user makes many changes in a row; half a second after the last of them is soon enough. */
+const quietMilliseconds = 500;
+
+/** Watches areas for changes; the areas follow rows and columns that are put in or taken out. */
+export async function watch(
+  client: ExcelClient,
+  addresses: readonly string[],
+  changed: (address: string) => void,
+): Promise<Watching> {
+  const areas = addresses.map(parseAddress);
+  const bad = addresses.find((_, index) => areas[index] === null);
+  if (bad !== undefined) return failure({ code: "bad-address", address: bad });
+  const watched = areas.filter((area) => area !== null);
+  const teller = quietTeller(changed);
+  return inExcel(client, async (context): Promise<Watching> => {
+    const stops: (() => Promise<void>)[] = [];
+    const stopAll = async (): Promise<void> => {
+      teller.silence();
+      for (const stop of stops) await stop();
+    };
+    for (const name of new Set(watched.map(({ sheet }) => sheet))) {
+      const mine = watched.filter(({ sheet }) => sheet === name);
+      const stop = await listen(context, name, follower(mine, teller.tell));
+      if (!stop.ok) {
+        await stopAll();
+        return stop;
+      }
+      stops.push(() => client.run(context, stop.value));
+    }
+    return success(stopAll);
+  });
+}
+
+async function listen(
+  context: Excel.RequestContext,
+  name: string,
+  hear: (change: SheetChange) => void,
+): Promise<Result<(context: Excel.RequestContext) => Promise<void>>> {
+  const sheet = context.workbook.worksheets.getItemOrNullObject(name);
+  sheet.load("id");
+  await context.sync();
+  if (sheet.isNullObject) return unknownSheet(context, name);
+  const handler = sheet.onChanged.add(({ address, changeType }) => {
+    const area = parseAddress(address);
+    if (area !== null) hear({ kind: changeType, area });
+    return Promise.resolve();
+  });
+  await context.sync();
+  return success(async (stopping) => {
+    handler.remove();
+    await stopping.sync();
+  });
+}
+
+/** Keeps where the areas of one sheet stand now, and tells of each that a change touched. */
+function follower(watched: readonly SheetArea[], tell: (address: string) => void): (change: SheetChange) => void {
+  let areas: readonly { readonly at: Rectangle | null; readonly last: SheetArea }[] = watched.map((area) => ({
+    at: area,
+    last: area,
+  }));
+  return (change) => {
+    areas = areas.map(({ at, last }) => {
+      if (at === null) return { at, last };
+      const { area, touched } = moved(at, change);
+      const now = { ...last, ...area };
+      if (touched) tell(addressOf(now));
+      return { at: area, last: now };
+    });
+  };
+}
+
+interface Teller {
+  readonly tell: (address: string) => void;
+  readonly silence: () => void;
+}
+
+/** Tells of each address once, when no further change has come for a while. */
+function quietTeller(changed: (address: string) => void): Teller {
+  const addresses = new Set<string>();
+  let timer: ReturnType<typeof setTimeout> | undefined;
+  const speak = (): void => {
+    const told = [...addresses];
+    addresses.clear();
+    for (const address of told) changed(address);
+  };
+  return {
+    tell: (address) => {
+      addresses.add(address);
+      clearTimeout(timer);
+      timer = setTimeout(speak, quietMilliseconds);
+    },
+    silence: () => clearTimeout(timer),
+  };
+}
