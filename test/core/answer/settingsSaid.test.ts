@@ -1,0 +1,92 @@
+import fc from "fast-check";
+import { describe, expect, it } from "vitest";
+import { modelOf } from "../../../src/core/answer/modelOf.ts";
+import { type Options, defaultOptions } from "../../../src/core/answer/options.ts";
+import { readSettings } from "../../../src/core/answer/settings.ts";
+import { settingsSaid } from "../../../src/core/answer/settingsSaid.ts";
+import type { LagRule } from "../../../src/core/covariance/choice.ts";
+import type { Model, Transform } from "../../../src/core/design/model.ts";
+
+const columns = ["Price index", "Advertising", "Region"] as const;
+const periods = fc.integer({ min: 1, max: 12 });
+const transforms: fc.Arbitrary<Transform> = fc.oneof(
+  fc.constant<Transform>({ kind: "none" }),
+  fc.constant<Transform>({ kind: "logarithm" }),
+  fc.constant<Transform>({ kind: "square" }),
+  periods.map((count): Transform => ({ kind: "lag", periods: count })),
+  periods.map((count): Transform => ({ kind: "change", periods: count })),
+  periods.map((count): Transform => ({ kind: "growth rate", periods: count })),
+);
+const lagRules: fc.Arbitrary<LagRule | null> = fc.oneof(
+  fc.constant(null),
+  fc.integer({ min: 0, max: 40 }).map((lags): LagRule => ({ kind: "given", lags })),
+  fc.constantFrom<LagRule>({ kind: "careful" }, { kind: "thumb" }, { kind: "cube root" }),
+  fc.boolean().map((prewhiten): LagRule => ({ kind: "newey-west 1994", prewhiten })),
+  fc
+    .tuple(fc.constantFrom("bartlett" as const, "parzen" as const, "quadratic spectral" as const), fc.boolean())
+    .map(([kernel, prewhiten]): LagRule => ({ kind: "andrews 1991", kernel, prewhiten })),
+);
+const models: fc.Arbitrary<Model> = fc.record({
+  outcome: fc.record({ column: fc.constant("Repairs"), transform: transforms }),
+  drivers: fc
+    .tuple(transforms, transforms, fc.option(fc.constantFrom("North", "South")))
+    .map(([price, advertising, base]) => [
+      { column: columns[0], as: "number" as const, base: null, transform: price },
+      { column: columns[1], as: "number" as const, base: null, transform: advertising },
+      { column: columns[2], as: "category" as const, base, transform: { kind: "none" as const } },
+    ]),
+  calendar: fc.subarray(["trend" as const, "month indicators" as const]),
+  rows: fc.constantFrom(
+    { kind: "cases" as const },
+    { kind: "time" as const, order: "Month" },
+    { kind: "groups" as const, by: "Month", second: null, order: null },
+  ),
+  constant: fc.boolean(),
+  textNumbers: fc.constant([]),
+});
+const options: fc.Arbitrary<Options> = fc.record({
+  policy: fc.constantFrom("careful", "textbook", "always-robust"),
+  fixed: fc.option(
+    fc.record({ errors: fc.constantFrom("classical", "white"), reason: fc.option(fc.constant("agreed in March")) }),
+  ),
+  whiteVersion: fc.constantFrom("HC0", "HC3", "HC4m"),
+  groupedVersion: fc.constantFrom("CR0", "CR1", "CR2"),
+  lags: lagRules,
+  adjusted: fc.boolean(),
+  level: fc.constantFrom(0.01, 0.05, 0.1),
+  against: fc.constantFrom({}, { "Price index": -1, Advertising: 0.25 }),
+  units: fc.constantFrom({}, { Repairs: "repairs a month" }),
+});
+
+describe("settings as a report states them", () => {
+  it("lead back to the same model and options", () => {
+    fc.assert(
+      fc.property(models, options, (model, wanted) => {
+        const settings = readSettings(settingsSaid(model, wanted));
+        if (!settings.ok) throw new Error(JSON.stringify(settings.problem));
+        const parts = {
+          outcome: "Repairs",
+          drivers: columns,
+          key: model.rows.kind === "cases" ? null : "Month",
+          keyIs: "time",
+          order: null,
+        } as const;
+        expect(modelOf(settings.value, parts)).toEqual({ ok: true, value: model });
+        expect(settings.value.options).toEqual(wanted);
+      }),
+      { seed: 20260901, numRuns: 300 },
+    );
+  });
+
+  it("leave defaults unsaid", () => {
+    const model: Model = {
+      outcome: { column: "Repairs", transform: { kind: "none" } },
+      drivers: [],
+      calendar: [],
+      rows: { kind: "cases" },
+      constant: true,
+      textNumbers: [],
+    };
+    expect(settingsSaid(model, defaultOptions)).toEqual([["rows", "cases"]]);
+  });
+});
