@@ -17,8 +17,6 @@ export interface SheetData {
   readonly columnWidths: readonly (number | undefined)[];
   /** Height in points by row, undefined for the standard height. */
   readonly rowHeights?: readonly (number | undefined)[];
-  /** Height in points by row, undefined for the standard height. */
-  readonly rowHeights?: readonly (number | undefined)[];
   readonly merges: readonly string[];
   readonly frozenRows: number;
   readonly hidden: boolean;
