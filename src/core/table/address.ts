@@ -36,8 +36,9 @@ export function localAddressOf(area: Omit<SheetArea, "sheet">): string {
   return `${first}:${columnLetters(area.column + area.columns - 1)}${area.row + area.rows}`;
 }
 
-const letters = (text: string): number =>
-  [...text.toUpperCase()].reduce((sum, letter) => sum * 26 + letter.charCodeAt(0) - 64, 0) - 1;
+/** "A" -> 0, "AB" -> 27. */
+const columnOf = (letters: string): number =>
+  Array.from(letters.toUpperCase()).reduce((sum, letter) => sum * 26 + letter.charCodeAt(0) - 64, 0) - 1;
 
 const grammar =
   /^(?:(?:'((?:[^']|'')+)'|([^'!]+))!)?(?:\$?([A-Z]{1,3})\$?(\d{1,7})(?::\$?([A-Z]{1,3})\$?(\d{1,7}))?|\$?([A-Z]{1,3}):\$?([A-Z]{1,3}))$/i;
@@ -50,21 +51,27 @@ export function parseAddress(text: string): SheetArea | null {
   const parts = grammar.exec(text.trim());
   if (parts === null) return null;
   const sheet = parts[1]?.replaceAll("''", "'") ?? parts[2] ?? "";
-  const wholeColumns = parts[7] !== undefined;
-  const first = { row: wholeColumns ? 0 : Number(parts[4]) - 1, column: letters(parts[3] ?? parts[7] ?? "") };
-  const last = {
-    row: wholeColumns ? mostRows - 1 : Number(parts[6] ?? parts[4]) - 1,
-    column: letters(parts[5] ?? parts[8] ?? parts[3] ?? ""),
-  };
+  const [first, last] = parts[7] === undefined ? cornersOfCells(parts) : cornersOfColumns(parts);
   const row = Math.min(first.row, last.row);
   const column = Math.min(first.column, last.column);
-  const area = {
-    sheet,
-    row,
-    column,
-    rows: Math.abs(last.row - first.row) + 1,
-    columns: Math.abs(last.column - first.column) + 1,
-  };
-  const inside = row >= 0 && row + area.rows <= mostRows && column + area.columns <= mostColumns;
-  return inside ? area : null;
+  const rows = Math.abs(last.row - first.row) + 1;
+  const columns = Math.abs(last.column - first.column) + 1;
+  const inside = row >= 0 && row + rows <= mostRows && column + columns <= mostColumns;
+  return inside ? { sheet, row, column, rows, columns } : null;
 }
+
+interface Corner {
+  readonly row: number;
+  readonly column: number;
+}
+
+function cornersOfCells(parts: RegExpExecArray): readonly [Corner, Corner] {
+  const first = { row: Number(parts[4]) - 1, column: columnOf(parts[3] ?? "") };
+  if (parts[5] === undefined) return [first, first];
+  return [first, { row: Number(parts[6]) - 1, column: columnOf(parts[5]) }];
+}
+
+const cornersOfColumns = (parts: RegExpExecArray): readonly [Corner, Corner] => [
+  { row: 0, column: columnOf(parts[7] ?? "") },
+  { row: mostRows - 1, column: columnOf(parts[8] ?? "") },
+];
