@@ -74,6 +74,10 @@ const sentences: { readonly [Code in Problem["code"]]: (problem: Extract<Problem
     `The ranges are not equally tall: ${first} has ${counted(rows, "row")} of data, ${second} has ${counted(otherRows, "row")}.`,
     "Choose ranges that begin and end in the same rows, all with their headings or all without.",
   ],
+  "too-many-columns": ({ where, columns, most }) => [
+    `${capitalised(where)} has ${counted(columns, "column")}, but takes ${most === 1 ? "one" : `at most ${most}`}.`,
+    most === 1 ? "Choose the one column that is meant." : "Choose fewer columns.",
+  ],
   "overlapping-ranges": ({ first, second }) => [
     `${capitalised(first)} overlaps ${second}.`,
     "Choose ranges that have no cell in common.",

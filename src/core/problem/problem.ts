@@ -32,6 +32,7 @@ export type TableProblem =
       readonly second: string;
       readonly otherRows: number;
     }
+  | { readonly code: "too-many-columns"; readonly where: string; readonly columns: number; readonly most: number }
   | { readonly code: "overlapping-ranges"; readonly first: string; readonly second: string };
 
 export type ModelProblem =
