@@ -1,0 +1,38 @@
+import type { Problem } from "../core/problem/problem.ts";
+import { sense, senseOfText } from "../core/table/senses.ts";
+import type { Column } from "../core/table/source.ts";
+import { type RawCells, isMissing, plainValue } from "./rawCells.ts";
+
+/** An outcome is numbers, so a word above it is its heading; so is a row of words above the drivers where it has none. */
+export function hasHeadings(outcome: RawCells, drivers: RawCells): boolean {
+  const above = outcome[0]?.[0];
+  if (!isMissing(above)) return isWord(above);
+  return (drivers[0] ?? []).every(isWord);
+}
+
+function isWord(cell: unknown): boolean {
+  const value = plainValue(cell);
+  return typeof value === "string" && senseOfText(value) === sense.text;
+}
+
+/** The text of a heading cell; null where there is none. */
+export function headingOf(cell: unknown): string | null {
+  const value = plainValue(cell);
+  const text = value === null || typeof value === "object" ? "" : String(value).trim();
+  return text === "" ? null : text;
+}
+
+const sameName = (a: string, b: string): boolean => a.toLowerCase() === b.toLowerCase();
+
+export function repeatedHeading(columns: readonly Column[]): Problem | null {
+  const first = columns.find(({ name }, index) => columns.slice(index + 1).some((other) => sameName(name, other.name)));
+  if (first === undefined) return null;
+  const cells = columns
+    .filter(({ name }) => sameName(name, first.name))
+    .map(({ place }) => `row 1 of ${place.kind === "argument" ? place.argument : ""}, column ${place.column + 1}`);
+  return { code: "repeated-heading", heading: first.name, cells };
+}
+
+/** A time column may be a driver too; as the key it goes by a name of its own. */
+export const apartFrom = (others: readonly Column[], column: Column): Column =>
+  others.some(({ name }) => sameName(name, column.name)) ? { ...column, name: `${column.name} (key)` } : column;

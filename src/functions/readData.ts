@@ -1,0 +1,119 @@
+import type { Parts } from "../core/answer/modelOf.ts";
+import type { Problem } from "../core/problem/problem.ts";
+import { type Result, failure, success } from "../core/problem/result.ts";
+import { mostRows } from "../core/table/address.ts";
+import { cellKind } from "../core/table/cells.ts";
+import type { Column, Source } from "../core/table/source.ts";
+import { apartFrom, hasHeadings, headingOf, repeatedHeading } from "./headings.ts";
+import { type RawCells, columnOf, isMissing, rawCells, usedHeight, widthOf } from "./rawCells.ts";
+
+/** The columns that a function is called over, and which part each plays. */
+export interface CalledData {
+  readonly source: Source;
+  readonly parts: Parts;
+}
+
+interface Argument {
+  readonly name: "outcome" | "drivers" | "key";
+  readonly cells: RawCells;
+  /** Rows down to the last one in use. */
+  readonly height: number;
+}
+
+type Arguments = Readonly<Record<Argument["name"], Argument>>;
+
+/**
+ * Brings the arguments of a function into columns: headings in the first row become names, empty rows at the end go.
+ * @returns Problem "no-outcome", "no-drivers", "too-many-columns", "unequal-heights" or "repeated-heading".
+ */
+export function readData(values: Readonly<Record<string, unknown>>): Result<CalledData> {
+  const given: Arguments = {
+    outcome: argument("outcome", values["outcome"]),
+    drivers: argument("drivers", values["drivers"]),
+    key: argument("key", values["key"]),
+  };
+  const problem = shapeProblem(given);
+  if (problem !== null) return failure(problem);
+  const firstRow = hasHeadings(given.outcome.cells, given.drivers.cells) ? 1 : 0;
+  const rows = [firstRow, heightOfData(Object.values(given))] as const;
+  const outcome = columnsOf(given.outcome, rows);
+  const drivers = columnsOf(given.drivers, rows);
+  const repeated = repeatedHeading([...outcome, ...drivers]);
+  if (repeated !== null) return failure(repeated);
+  const keys = columnsOf(given.key, rows).map((column) => apartFrom([...outcome, ...drivers], column));
+  return success({
+    source: { columns: [...outcome, ...drivers, ...keys], rowCount: rows[1] - firstRow },
+    parts: partsOf(outcome, drivers, keys),
+  });
+}
+
+function partsOf(outcome: readonly Column[], drivers: readonly Column[], [by, order]: readonly Column[]): Parts {
+  const inGroups = order !== undefined || (by !== undefined && repeats(by));
+  return {
+    outcome: outcome[0]!.name,
+    drivers: drivers.map(({ name }) => name),
+    key: by?.name ?? null,
+    keyIs: inGroups ? "groups" : "time",
+    order: order?.name ?? null,
+  };
+}
+
+function argument(name: Argument["name"], value: unknown): Argument {
+  const cells = rawCells(value);
+  return { name, cells, height: usedHeight(cells) };
+}
+
+function shapeProblem({ outcome, drivers, key }: Arguments): Problem | null {
+  if (outcome.height === 0) return { code: "no-outcome" };
+  if (drivers.height === 0) return { code: "no-drivers" };
+  const tooWide = tooManyColumns(outcome, 1) ?? tooManyColumns(key, 2);
+  return tooWide ?? unequalHeights(outcome, drivers) ?? (key.height === 0 ? null : unequalHeights(outcome, key));
+}
+
+function tooManyColumns({ name, cells }: Argument, most: number): Problem | null {
+  const columns = widthOf(cells);
+  return columns > most ? { code: "too-many-columns", where: `the ${name}`, columns, most } : null;
+}
+
+/** Ranges may differ by empty rows alone: the shorter one must reach as far as the data of the other. */
+function unequalHeights(one: Argument, other: Argument): Problem | null {
+  const needed = Math.max(one.height, other.height);
+  const rows = Math.min(one.cells.length, needed);
+  const otherRows = Math.min(other.cells.length, needed);
+  if (rows === otherRows) return null;
+  return { code: "unequal-heights", first: `the ${one.name}`, rows, second: `the ${other.name}`, otherRows };
+}
+
+/**
+ * Rows down to the last one in use. Older versions of Excel hand blanks over as zeros: where whole columns arrive so,
+ * the rows at the end that are zero in every argument are taken for empty.
+ */
+function heightOfData(given: readonly Argument[]): number {
+  let rows = Math.max(...given.map(({ height }) => height));
+  if (rows < mostRows - 1) return rows;
+  const isEmpty = (cell: unknown): boolean => cell === 0 || isMissing(cell);
+  while (rows > 0 && given.every(({ cells }) => (cells[rows - 1] ?? []).every(isEmpty))) rows--;
+  return rows;
+}
+
+const columnsOf = ({ name, cells }: Argument, [first, last]: readonly [number, number]): Column[] =>
+  Array.from({ length: widthOf(cells) }, (_, column) => ({
+    name: headingOf(first === 0 ? null : cells[0]?.[column]) ?? unnamed(name, column),
+    place: { kind: "argument", argument: name, column, firstRow: first },
+    cells: columnOf(cells, column, [first, last]),
+  }));
+
+const unnamed = (argument: Argument["name"], column: number): string =>
+  argument === "drivers" ? `driver ${column + 1}` : column === 0 ? argument : `${argument} ${column + 1}`;
+
+/** A key that comes back names groups; times come once. */
+function repeats({ cells: { kinds, numbers } }: Column): boolean {
+  const seen = Object.values(cellKind).map(() => new Set<number>());
+  for (let row = 0; row < kinds.length; row++) {
+    const kind = kinds[row]!;
+    if (kind === cellKind.blank) continue;
+    if (seen[kind]!.has(numbers[row]!)) return true;
+    seen[kind]!.add(numbers[row]!);
+  }
+  return false;
+}

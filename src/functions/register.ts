@@ -1,0 +1,60 @@
+import type { Analyst } from "../app/analyst.ts";
+import { withinLimits } from "../app/timeLimit.ts";
+import { answerer } from "./answerer.ts";
+import { type FunctionsRuntime, cellError, notAvailable, ownFault } from "./cellErrors.ts";
+import { type FunctionSpec, functionTable } from "./functionTable.ts";
+import { type Leaving, leave } from "./leave.ts";
+import type { CallValues, Reply } from "./replies.ts";
+
+/** How one call is computed: what to show for the function, from the values given, until the signal is raised. */
+export type Answering = (id: string, values: CallValues, signal: AbortSignal) => Promise<Reply>;
+
+/** A call that has no answer by then ends with an error: a promise that never settles shows #BUSY! for ever. */
+const secondsPerCall = 120;
+
+/** Gives Excel an implementation for every function of the table. */
+export function registerFunctions(runtime: FunctionsRuntime, analyst: Analyst): void {
+  const answering = answerer(analyst);
+  for (const spec of functionTable) runtime.associate(spec.id, implementation(spec, { runtime, answering }));
+}
+
+interface Making {
+  readonly runtime: FunctionsRuntime;
+  readonly answering: Answering;
+}
+
+/** Excel hands over one value a parameter and, last, the invocation. */
+function implementation({ id, parameters }: FunctionSpec, { runtime, answering }: Making) {
+  return async (...handed: unknown[]): Promise<Leaving> => {
+    const invocation = handed.at(-1) as CustomFunctions.CancelableInvocation;
+    const given = handed.slice(0, -1);
+    const values = Object.fromEntries(parameters.map(({ name }, index) => [name, given[index] ?? null]));
+    if (isPreview(invocation)) return leave(runtime, [["Shown once the formula is entered"]]);
+    const caller = new AbortController();
+    invocation.onCanceled = () => caller.abort();
+    const reply = await replyTo({ signal: caller.signal, seconds: secondsPerCall }, (signal) =>
+      answering(id, values, signal),
+    ).catch((fault: unknown) => {
+      refuse(ownFault(runtime, fault));
+    });
+    if (reply.ok) return leave(runtime, reply.value);
+    return refuse("problem" in reply ? cellError(runtime, reply.problem) : notAvailable(runtime, reply.notApplicable));
+  };
+}
+
+/** Ends a call with the error of its cell. */
+function refuse(error: CustomFunctions.Error): never {
+  // eslint-disable-next-line @typescript-eslint/only-throw-error -- the runtime's own class alone brings a sentence to the cell
+  throw error;
+}
+
+/** Excel previews a formula that is being selected; its types say text, its documentation true or false. */
+const isPreview = ({ isInValuePreview }: CustomFunctions.Invocation): boolean => Boolean(isInValuePreview);
+
+async function replyTo(
+  limits: Parameters<typeof withinLimits>[0],
+  work: (signal: AbortSignal) => Promise<Reply>,
+): Promise<Reply> {
+  const within = await withinLimits(limits, async (signal) => ({ ok: true, value: await work(signal) }));
+  return within.ok ? within.value : within;
+}

@@ -1,0 +1,92 @@
+import type { Answer } from "../core/answer/answer.ts";
+import { type Grid, answerTable, choiceText, evidenceTable, verdictLines } from "../core/answer/tables.ts";
+import { settingTable } from "../core/answer/settingTable.ts";
+import type { TestOutcome } from "../core/diagnostics/outcome.ts";
+import { type Result, failure, success } from "../core/problem/result.ts";
+import { nearestName } from "../core/problem/nearestName.ts";
+import type { FunctionId } from "./functionTable.ts";
+import { inferenceOfKind, pValuesAgainst } from "./kinds.ts";
+import { isMissing } from "./rawCells.ts";
+import { written } from "./readSettings.ts";
+
+/** What a function replies: a rectangle, a problem, or word that what was asked for does not apply here. */
+export type Reply = Result<Grid> | { readonly ok: false; readonly notApplicable: string };
+
+/** The values of a call by the names of its parameters; what was left out is null. */
+export type CallValues = Readonly<Record<string, unknown>>;
+
+/** What each function over data shows of the answer. */
+export const replies = {
+  ANSWER: (answer) => success(answerTable(answer)),
+  VERDICT: (answer, { driver }) =>
+    isMissing(driver) ? success(column(verdictLines(answer))) : sentence(answer, driver),
+  CHOICE: (answer) => success([[choiceText(answer)]]),
+  EVIDENCE: (answer, { test }) => (isMissing(test) ? success(evidenceTable(answer)) : oneTest(answer, written(test))),
+  COEFFICIENTS: (answer) => success(column(answer.coefficients)),
+  ERRORS: (answer, { kind }) => {
+    const table = inferenceOfKind(answer, kind);
+    return table.ok ? success(column(table.value.standardErrors)) : table;
+  },
+  PVALUES: (answer, { kind, against }) => {
+    const table = inferenceOfKind(answer, kind);
+    if (!table.ok) return table;
+    const pValues = pValuesAgainst(answer, table.value, against);
+    return pValues.ok ? success(column(pValues.value)) : pValues;
+  },
+  INTERVALS: (answer, { kind }) => {
+    const table = inferenceOfKind(answer, kind);
+    return table.ok ? success(table.value.low.map((low, row) => [low, table.value.high[row] ?? ""])) : table;
+  },
+} satisfies Partial<Record<FunctionId, (answer: Answer, values: CallValues) => Reply>>;
+
+/** What the other functions reply, without data. */
+export const plainReplies = {
+  SETTINGS: () =>
+    success([
+      ["setting", "values", "when left out", "meaning"],
+      ...settingTable.map(({ name, values, standard, meaning }) => [name, values, standard, meaning]),
+    ]),
+} satisfies Record<Exclude<FunctionId, keyof typeof replies>, (values: CallValues) => Reply>;
+
+const column = (values: readonly (string | number)[]): Grid => values.map((value) => [value]);
+
+function sentence(answer: Answer, driver: unknown): Reply {
+  const wanted = written(driver).trim();
+  const drivers = answer.drivers.filter((entry) => entry.sentence !== null);
+  const found =
+    drivers.find(({ term }) => term.toLowerCase() === wanted.toLowerCase()) ??
+    (typeof driver === "number" ? drivers[driver - 1] : undefined);
+  if (found !== undefined) return success([[found.sentence ?? ""]]);
+  const names = drivers.map(({ term }) => term);
+  const nearest = nearestName(wanted, names);
+  return failure({ code: "unknown-heading", heading: wanted, nearest, where: "the drivers" });
+}
+
+/** Statistic, degrees of freedom and p-value, a row an order where the test has orders. */
+function oneTest({ tests }: Answer, wanted: string): Reply {
+  const plain = (name: string): string =>
+    name
+      .trim()
+      .toLowerCase()
+      .replaceAll(/[\s_]+/g, "-");
+  const found = tests.filter(({ test }) => test === plain(wanted));
+  if (found.length === 0) {
+    const allowed = [...new Set(tests.map(({ test }) => test))];
+    const nearest = nearestName(plain(wanted), allowed);
+    return failure({ code: "unknown-value", setting: "test", value: wanted, allowed, nearest });
+  }
+  const computed = found.filter(isComputed);
+  if (computed.length > 0) return success(computed.map(figures));
+  const because = found.flatMap((outcome) => (isComputed(outcome) ? [] : [outcome.because]));
+  return { ok: false, notApplicable: `The test does not apply: ${because[0] ?? ""}` };
+}
+
+type Computed = Extract<TestOutcome, { kind: "computed" }>;
+
+const isComputed = (outcome: TestOutcome): outcome is Computed => outcome.kind === "computed";
+
+const figures = ({ figure }: Computed): (string | number)[] => [
+  figure.statistic,
+  figure.df.length === 1 ? (figure.df[0] ?? "") : figure.df.join(", "),
+  figure.pValue,
+];
