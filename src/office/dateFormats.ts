@@ -16,8 +16,8 @@ const seen = new Map<string, boolean>();
 
 function readFormat(format: string): boolean {
   const [first = ""] = format
-    .replaceAll(/"[^"]*"|\\.|_.|\*.|\[[^\]]*\]/g, "")
+    .replaceAll(/"[^"]*"|\\.|_.|\*.|\[(?![hms]+\])[^\]]*\]/gi, "")
     .replaceAll(/AM\/PM|A\/P|General/gi, "")
     .split(";");
-  return /[yd]/i.test(first) || (/m/i.test(first) && !/[hs]/i.test(first));
+  return /[yd]/i.test(first) || (/m/i.test(first) && !/[hs]|\[m/i.test(first));
 }

@@ -1,9 +1,18 @@
+import { mostColumns, mostRows, parseAddress } from "../core/table/address.ts";
 import { type Rectangle, intersection } from "./areas.ts";
 
 /** A change to a sheet as Excel tells it: the cells meant, and whether they were edited, put in or taken out. */
 export interface SheetChange {
   readonly kind: string;
   readonly area: Rectangle;
+}
+
+/** The cells an event speaks of: "B2:C4", whole columns "B:C", whole rows "5:7"; the whole sheet where that cannot be told. */
+export function changedArea(address: string): Rectangle {
+  const rows = /^\$?(\d+):\$?(\d+)$/.exec(address);
+  if (rows === null) return parseAddress(address) ?? { row: 0, column: 0, rows: mostRows, columns: mostColumns };
+  const [first, last] = [Number(rows[1]), Number(rows[2])];
+  return { row: first - 1, column: 0, rows: last - first + 1, columns: mostColumns };
 }
 
 /** Where a watched area stands after a change, and whether the change touched it. null once all its cells are gone. */

@@ -4,7 +4,7 @@ import { type SheetArea, addressOf, parseAddress } from "../core/table/address.t
 import type { Rectangle } from "./areas.ts";
 import type { ExcelClient } from "./client.ts";
 import { unknownSheet } from "./locate.ts";
-import { type SheetChange, moved } from "./moved.ts";
+import { type SheetChange, changedArea, moved } from "./moved.ts";
 import { inExcel } from "./session.ts";
 
 type Watching = Awaited<ReturnType<Host["watch"]>>;
@@ -52,8 +52,7 @@ async function listen(
   await context.sync();
   if (sheet.isNullObject) return unknownSheet(context, name);
   const handler = sheet.onChanged.add(({ address, changeType }) => {
-    const area = parseAddress(address);
-    if (area !== null) hear({ kind: changeType, area });
+    hear({ kind: changeType, area: changedArea(address) });
     return Promise.resolve();
   });
   await context.sync();
