@@ -1,0 +1,143 @@
+import {
+  parseRange,
+  writeXlsx,
+  type Cell,
+  type CellValue,
+  type RowDef,
+  type TableDefinition,
+  type WriteSheet,
+} from "hucre";
+import type { BookCell, BookData, BookValue, SheetData, StyledCell } from "../book/bookData.ts";
+import { chartParts, toFileChart, finishedChart } from "./charts.ts";
+import { standardFont, withWholeFonts } from "./fonts.ts";
+import { keptOf, withKept } from "./keptParts.ts";
+import { changeParts, pack, unpack, type Parts } from "./parts.ts";
+import { toStored } from "./storedFormulas.ts";
+import { toFileStyle } from "./styles.ts";
+
+/** Writes a workbook file that Excel and others open, every formula with its last result. */
+export async function saveXlsx(book: BookData): Promise<Uint8Array> {
+  return pack(withKept(await toParts(book, standardFont), keptOf(book)));
+}
+
+/** The parts of the file; texts stand in their cells, so that sheets can be carried into another workbook. */
+export async function toParts(book: BookData, usualFont: string): Promise<Parts> {
+  const bytes = await writeXlsx({
+    sheets: book.sheets.map(toFileSheet),
+    namedRanges: book.names.map(({ name, refersTo }) => ({ name, range: refersTo.replace(/^=/, "") })),
+    activeSheet: book.active,
+    stringMode: "inline",
+  });
+  const parts = changeParts(unpack(bytes), /^xl\/worksheets\/[^/]+\.xml$/, withErrorResults);
+  const drawn = changeParts(parts, chartParts, finishedChart);
+  const styled = changeParts(drawn, /^xl\/styles\.xml$/, (part) => withWholeFonts(part, usualFont));
+  return changeParts(styled, /^xl\/workbook\.xml$/, withResultsKept);
+}
+
+/** Excel's own mark since 2019: with another it would calculate everything on opening, and show #NAME? where the add-in is missing. */
+const calculatedBy = '<calcPr calcId="191029"/>';
+const withResultsKept = (workbookPart: string): string => workbookPart.replace(/<calcPr[^>]*\/>/, calculatedBy);
+
+/** The file library writes the result of a failed formula as text; spreadsheets must know it for an error. */
+function withErrorResults(sheetPart: string): string {
+  return sheetPart.replace(
+    / t="str">(<f(?: [^>]*)?>[^<]*<\/f><v>#(?:NULL!|DIV\/0!|VALUE!|REF!|NAME\?|NUM!|N\/A|SPILL!|CALC!)<\/v>)/g,
+    ' t="e">$1',
+  );
+}
+
+function toFileSheet(sheet: SheetData): WriteSheet {
+  const { columnWidths, printArea } = sheet;
+  return {
+    name: sheet.name,
+    rows: sheet.rows.map((row) => row.map((cell) => plain(valueOf(cell)))),
+    cells: detailsOf(sheet),
+    columns: Array.from(columnWidths, (width) => (width === undefined ? {} : { width })),
+    merges: sheet.merges.map(parseRange),
+    rowDefs: rowDefsOf(sheet),
+    hidden: sheet.hidden,
+    tables: sheet.tables.map((table) => toFileTable(table, sheet)),
+    charts: sheet.charts.map(toFileChart),
+    ...(sheet.frozenRows > 0 && { freezePane: { rows: sheet.frozenRows } }),
+    ...(sheet.protected && { protection: { sheet: true } }),
+    pageSetup: {
+      ...(printArea !== null && { printArea: absolute(printArea) }),
+      ...(sheet.landscape === true && { orientation: "landscape" }),
+      ...(sheet.onePageWide && { fitToPage: true, fitToWidth: 1, fitToHeight: 0 }),
+    },
+  };
+}
+
+function rowDefsOf({ rowHeights = [], hiddenRows }: SheetData): Map<number, RowDef> {
+  const rowDefs = new Map<number, RowDef>();
+  rowHeights.forEach((height, row) => {
+    if (height !== undefined) rowDefs.set(row, { height });
+  });
+  hiddenRows.forEach((row) => rowDefs.set(row, { ...rowDefs.get(row), hidden: true }));
+  return rowDefs;
+}
+
+const isStyled = (cell: BookCell): cell is StyledCell =>
+  typeof cell === "object" && cell !== null && !("error" in cell);
+
+const valueOf = (cell: BookCell): BookValue => (isStyled(cell) ? cell.value : cell);
+
+const plain = (value: BookValue): CellValue => (typeof value === "object" && value !== null ? value.error : value);
+
+const absolute = (area: string): string => area.replaceAll("$", "").replace(/([A-Z]+)(\d+)/gi, "$$$1$$$2");
+
+/** Whatever a cell is beyond its value, by "row,column". */
+function detailsOf(sheet: SheetData): Map<string, Partial<Cell>> {
+  const details = new Map<string, Partial<Cell>>();
+  sheet.rows.forEach((row, r) =>
+    row.forEach((cell, c) => {
+      if (typeof cell === "object" && cell !== null) details.set(`${r},${c}`, detailOf(cell));
+    }),
+  );
+  for (const { cell, target } of sheet.links) {
+    const { startRow, startCol } = parseRange(cell);
+    const place = `${startRow},${startCol}`;
+    details.set(place, { ...details.get(place), hyperlink: linkTo(target) });
+  }
+  return details;
+}
+
+const linkTo = (target: string): NonNullable<Cell["hyperlink"]> =>
+  /^[a-z]+:\/\/|^mailto:/i.test(target) ? { target } : { target: "", location: target };
+
+function detailOf(cell: StyledCell | { readonly error: string }): Partial<Cell> {
+  if (!isStyled(cell)) return { value: cell.error, type: "error" };
+  const value = plain(cell.value);
+  return {
+    value,
+    ...(cell.style !== undefined && { style: toFileStyle(cell.style) }),
+    ...(cell.formula === undefined ? { type: typeOf(cell.value) } : formulaOf(cell)),
+  };
+}
+
+function typeOf(value: BookValue): Cell["type"] {
+  if (value === null) return "empty";
+  if (typeof value === "object") return "error";
+  return typeof value === "string" ? "string" : typeof value === "number" ? "number" : "boolean";
+}
+
+/** A formula that spills is marked as a dynamic array: without the mark Excel would show one cell of it, with "@". */
+function formulaOf({ value, formula = "", spill }: StyledCell): Partial<Cell> {
+  const result = plain(value);
+  return {
+    type: "formula",
+    formula: toStored(formula),
+    ...(result !== null && { formulaResult: result }),
+    ...(spill !== undefined && { formulaDynamic: true, formulaType: "array", formulaRef: spill }),
+  };
+}
+
+function toFileTable({ name, address }: SheetData["tables"][number], sheet: SheetData): TableDefinition {
+  const { startRow, startCol, endCol } = parseRange(address);
+  const headings = sheet.rows[startRow]?.slice(startCol, endCol + 1) ?? [];
+  const columns = Array.from({ length: endCol - startCol + 1 }, (_, index) => {
+    const heading = plain(valueOf(headings[index] ?? null));
+    return { name: heading === null || heading === "" ? `Column${index + 1}` : String(heading) };
+  });
+  return { name, range: address, columns };
+}
