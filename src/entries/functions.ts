@@ -3,7 +3,8 @@ import { inlineAnalyst } from "../worker/inlineAnalyst.ts";
 import type { WorkerLine } from "../worker/protocol.ts";
 import { workerAnalyst } from "../worker/workerAnalyst.ts";
 
-const hire = (): WorkerLine => new Worker(new URL("./worker.ts", import.meta.url)) as WorkerLine;
+const hire = (): WorkerLine =>
+  new Worker(/* webpackChunkName: "worker" */ new URL("./worker.ts", import.meta.url)) as WorkerLine;
 
 /** Functions have a worker of their own, so that a long analysis in the pane does not hold up the cells. */
 const analyst = workerAnalyst({ hire, fallback: inlineAnalyst, seconds: 600 });
