@@ -7,7 +7,7 @@ export type Leaving = (string | number | CustomFunctions.Error)[][];
 const longestText = 32_767;
 
 /** Texts that a spreadsheet may take for an error. */
-const errorLook = /^#[A-Z][A-Z0-9_/ ]*[!?]?$/i;
+const errorLook = /^#(N\/A|GETTING_DATA|[A-Z0-9/]+[!?])$/i;
 
 /**
  * The one way out to the cells. Within a spilled result Excel shows null, NaN and infinities as zeros without a word,

@@ -1,0 +1,258 @@
+import { describe, expect, it, vi } from "vitest";
+import type { Analyst } from "../../src/app/analyst.ts";
+import type { Answer } from "../../src/core/answer/answer.ts";
+import type { Question } from "../../src/core/answer/question.ts";
+import { settingTable } from "../../src/core/answer/settingTable.ts";
+import { type Result, failure, success } from "../../src/core/problem/result.ts";
+import { registerFunctions } from "../../src/functions/register.ts";
+import { answerFixture } from "../support/answerFixture.ts";
+import { type Runtime, call, functionsRuntime } from "../support/functionsRuntime.ts";
+
+const outcome = [["Repairs"], [5], [7], [6]];
+const drivers = [
+  ["Price", "Rain"],
+  [1, 2],
+  [3, 4],
+  [5, 7],
+];
+
+interface Desk extends Runtime {
+  readonly asked: Question[];
+}
+
+function deskWith(analyse: Analyst["analyse"]): Desk {
+  const asked: Question[] = [];
+  const runtime = functionsRuntime();
+  registerFunctions(runtime.runtime, {
+    analyse: (question, errand) => {
+      asked.push(question);
+      return analyse(question, errand);
+    },
+  });
+  return { ...runtime, asked };
+}
+
+const answering = (answer: Answer = answerFixture) => deskWith(() => Promise.resolve(success(answer)));
+const { inference, coefficients } = answerFixture;
+const column = (values: readonly (number | string)[]) => values.map((value) => [value]);
+
+describe("what each function shows of an answer", () => {
+  const desk = answering();
+  const ask = (id: string, ...more: unknown[]) => call(desk, id, outcome, drivers, ...more);
+
+  it("ANSWER: a row a driver under its headings, blank where a kind does not apply", async () => {
+    const table = await ask("ANSWER", null, null);
+    expect(table).toHaveLength(4);
+    expect(table).toEqual([
+      [
+        "driver",
+        "coefficient",
+        "classical",
+        "White",
+        "Newey-West",
+        "in force",
+        "ratio",
+        "p-value",
+        "low",
+        "high",
+        "conclusion",
+      ],
+      ["constant", 101.5, 1.515625, 1.53125, 1.546875, 1.546875, 14, 0.004, 87, 113, ""],
+      ["Price", -2.25, 0.515625, 0.53125, 0.546875, 0.546875, 15, 0.023, -7, 2, "shown, firm"],
+      ["Rain", 0.375, 0.265625, 0.28125, 0.296875, 0.296875, 16, 0.303, -4, 5, "not shown, leans on the choice"],
+    ]);
+    const cases = answering({ ...answerFixture, inference: { ...inference, neweyWest: null } });
+    const rows = (await call(cases, "ANSWER", outcome, drivers, null, null)) as unknown[][];
+    expect(rows.slice(1).map((row) => row[4])).toEqual(["", "", ""]);
+  });
+
+  it("COEFFICIENTS, ERRORS, PVALUES and INTERVALS: columns in the order of the terms", async () => {
+    expect(await ask("COEFFICIENTS", null, null)).toEqual(column(coefficients));
+    expect(await ask("ERRORS", null, null, null)).toEqual(column(inference.inForce.standardErrors));
+    expect(await ask("ERRORS", "White", null, null)).toEqual(column(inference.white.standardErrors));
+    expect(await ask("ERRORS", "newey west", null, null)).toEqual(column(inference.neweyWest!.standardErrors));
+    expect(await ask("PVALUES", "classical", null, null, null)).toEqual(column(inference.classical.pValue));
+    expect(await ask("INTERVALS", "by tests", null, null)).toEqual(
+      inference.inForce.low.map((low, row) => [low, inference.inForce.high[row]]),
+    );
+  });
+
+  it("PVALUES against given values: none of them 0", async () => {
+    const rows = (await ask("PVALUES", "classical", [[101.5], [-2.25], [0.375]], null, null)) as number[][];
+    expect(rows).toEqual([[1], [1], [1]]);
+    const [one] = (await ask("PVALUES", "classical", [[100]], null, null)) as number[][];
+    // Two-sided t(46) at (101.5 - 100) / 1.515625, by integration of the density.
+    expect(one?.[0]).toBeCloseTo(0.327502839018894, 12);
+    expect(await ask("PVALUES", null, [[1], [2]], null, null)).toMatchObject({ error: "#VALUE!" });
+    expect(await ask("PVALUES", null, [["one"]], null, null)).toMatchObject({ error: "#VALUE!" });
+  });
+
+  it("VERDICT: a sentence a row, or the one about a driver by name or number", async () => {
+    expect(await ask("VERDICT", null, null, null)).toEqual(column(answerFixture.verdict));
+    expect(await ask("VERDICT", "rain", null, null)).toEqual([["Rain: nothing can be shown."]]);
+    expect(await ask("VERDICT", 1, null, null)).toEqual([["Price matters."]]);
+    expect(await ask("VERDICT", "Pirce", null, null)).toMatchObject({
+      error: "#VALUE!",
+      message: expect.stringContaining("Price") as string,
+    });
+  });
+
+  it("EVIDENCE: all tests, or the figures of one, a row an order", async () => {
+    const table = (await ask("EVIDENCE", null, null, null)) as unknown[][];
+    expect(table[0]).toContain("p-value");
+    expect(table.flat()).toContain(7.25);
+    expect(table.flat()).toContain("Does not apply: too few rows for its columns");
+    expect(await ask("EVIDENCE", "koenker", null, null)).toEqual([[7.25, 2, 0.0266]]);
+    expect(await ask("EVIDENCE", "Breusch Godfrey", null, null)).toEqual([
+      [6.5, 1, 0.019],
+      [7.5, 2, 0.0095],
+    ]);
+    expect(await ask("EVIDENCE", "white", null, null)).toEqual({
+      error: "#N/A",
+      message: "The test does not apply: too few rows for its columns",
+    });
+    expect(await ask("EVIDENCE", "koenkr", null, null)).toMatchObject({
+      error: "#VALUE!",
+      message: expect.stringContaining("koenker") as string,
+    });
+  });
+
+  it("CHOICE: one text", async () => {
+    expect(await ask("CHOICE", null, null)).toEqual([["Newey-West (8 lags), ratio against t(48)"]]);
+  });
+
+  it("a kind that is unknown or does not fit the rows: an error with its sentence", async () => {
+    expect(await ask("ERRORS", "robust", null, null)).toMatchObject({ error: "#VALUE!" });
+    const fault = await ask("ERRORS", "grouped", null, null);
+    expect(fault).toMatchObject({ error: "#N/A" });
+    expect((fault as { message: string }).message.length).toBeGreaterThan(20);
+  });
+
+  it("SETTINGS: the manual inside the sheet, without any data", async () => {
+    const table = (await call(desk, "SETTINGS")) as unknown[][];
+    expect(table).toHaveLength(settingTable.length + 1);
+    expect(table.map(([name]) => name)).toContain("white version");
+  });
+});
+
+describe("settings of a call", () => {
+  const settingsOf = async (settings: unknown, key: unknown = null) => {
+    const desk = answering();
+    const reply = await call(desk, "ANSWER", outcome, drivers, settings, key);
+    return { reply, question: desk.asked[0] };
+  };
+
+  it("come as a text or as two columns, under a heading or not", async () => {
+    const texts = [
+      [["lags: 4; policy: textbook"]],
+      "lags: 4; policy: textbook",
+      [
+        ["lags", 4],
+        ["policy", "textbook"],
+      ],
+      [
+        ["Setting", "Value"],
+        ["lags", 4],
+        [null, null],
+        ["level", null],
+        ["policy", "textbook"],
+      ],
+    ];
+    for (const text of texts) {
+      const { question } = await settingsOf(text);
+      expect(question?.options.policy).toBe("textbook");
+      expect(question?.options.lags).toEqual({ kind: "given", lags: 4 });
+    }
+  });
+
+  it("say what the key is, where the key does not say it itself", async () => {
+    const key = [["Month"], [1], [2], [3]];
+    expect((await settingsOf(null, key)).question?.model.rows).toEqual({ kind: "time", order: "Month" });
+    const groups = [["Town"], ["a"], ["a"], ["b"]];
+    expect((await settingsOf(null, groups)).question?.model.rows).toMatchObject({ kind: "groups", by: "Town" });
+    expect((await settingsOf("rows: cases", key)).question?.model.rows).toEqual({ kind: "cases" });
+    expect((await settingsOf("rows: time")).question?.model.rows).toEqual({ kind: "time", order: null });
+  });
+
+  it("that are unknown are answered with the nearest known one", async () => {
+    const { reply, question } = await settingsOf("lag rule: 4");
+    expect(reply).toMatchObject({ error: "#VALUE!" });
+    expect((await settingsOf("polcy: careful")).reply).toMatchObject({
+      message: expect.stringContaining("policy") as string,
+    });
+    expect(question).toBeUndefined();
+  });
+});
+
+describe("calls in Excel's hands", () => {
+  it("share one analysis of the same cells, however many functions ask, and ask again when a cell changes", async () => {
+    const desk = answering();
+    await Promise.all([
+      call(desk, "ANSWER", outcome, drivers, null, null),
+      call(desk, "ERRORS", outcome, drivers, "white", null, null),
+      call(desk, "VERDICT", outcome, drivers, null, null, null),
+    ]);
+    await call(desk, "CHOICE", outcome, drivers, null, null);
+    expect(desk.asked).toHaveLength(1);
+    await call(desk, "CHOICE", outcome, drivers.with(2, [3, 4.5]), null, null);
+    await call(desk, "CHOICE", outcome, drivers, "level: 0.1", null);
+    expect(desk.asked).toHaveLength(3);
+  });
+
+  it("end with the sentence of a problem", async () => {
+    const desk = deskWith(() => Promise.resolve(failure({ code: "too-few-rows", rows: 3, needed: 4, leftOut: 0 })));
+    const reply = await call(desk, "ANSWER", outcome, drivers, null, null);
+    expect(reply).toMatchObject({ error: "#N/A", message: expect.stringContaining("needs at least 4") as string });
+  });
+
+  it("say of a fault of ours that it is one", async () => {
+    const desk = deskWith(() => Promise.reject(new Error("index 7 of nothing")));
+    expect(await call(desk, "ANSWER", outcome, drivers, null, null)).toEqual({
+      error: "#VALUE!",
+      message: "Footing has a fault of its own here: index 7 of nothing",
+    });
+  });
+
+  it("are answered without any work while a formula is previewed", async () => {
+    const desk = answering();
+    const shown = await desk.functions.get("ANSWER")!(outcome, drivers, null, null, { isInValuePreview: true });
+    expect(shown).toEqual([["Shown once the formula is entered"]]);
+    expect(desk.asked).toHaveLength(0);
+  });
+
+  it("stop the work when the last of them is cancelled", async () => {
+    const signals: AbortSignal[] = [];
+    const desk = deskWith((_, { signal }) => {
+      signals.push(signal);
+      return new Promise<Result<Answer>>(() => undefined);
+    });
+    const invocations = [{}, {}] as { onCanceled?: () => void }[];
+    const calls = invocations.map((invocation) =>
+      desk.functions.get("ANSWER")!(outcome, drivers, null, null, invocation).catch((fault: unknown) => fault),
+    );
+    await vi.waitFor(() => expect(signals).toHaveLength(1));
+    await new Promise((resolve) => setTimeout(resolve, 5));
+    invocations[0]!.onCanceled!();
+    expect(await calls[0]).toMatchObject({ code: "#N/A" });
+    expect(signals[0]!.aborted).toBe(false);
+    invocations[1]!.onCanceled!();
+    invocations[1]!.onCanceled!();
+    await calls[1];
+    expect(signals[0]!.aborted).toBe(true);
+  });
+
+  it("end after two minutes at the latest", async () => {
+    vi.useFakeTimers();
+    try {
+      const desk = deskWith(() => new Promise<Result<Answer>>(() => undefined));
+      const waiting = call(desk, "ANSWER", outcome, drivers, null, null);
+      await vi.advanceTimersByTimeAsync(119_000);
+      const early = await Promise.race([waiting, Promise.resolve("still waiting")]);
+      expect(early).toBe("still waiting");
+      await vi.advanceTimersByTimeAsync(2000);
+      expect(await waiting).toMatchObject({ error: "#N/A" });
+    } finally {
+      vi.useRealTimers();
+    }
+  });
+});
