@@ -26,6 +26,7 @@ const signs = {
   "overlapping-ranges": "invalidValue",
   "no-outcome": "invalidValue",
   "no-drivers": "invalidValue",
+  "ambiguous-heading": "invalidValue",
   "unknown-heading": "invalidValue",
   "repeated-heading": "invalidValue",
   "column-used-twice": "invalidValue",

@@ -84,6 +84,10 @@ const sentences: { readonly [Code in Problem["code"]]: (problem: Extract<Problem
   ],
   "no-outcome": () => ["No outcome has been chosen.", "Choose the column that is to be explained."],
   "no-drivers": () => ["No drivers have been chosen.", "Choose at least one column that may explain the outcome."],
+  "ambiguous-heading": ({ headings, sheets }) => [
+    `The sheets ${listed(sheets, sheets.length)} all have the headings ${headings.join(", ")}.`,
+    "Say which sheet is meant.",
+  ],
   "unknown-heading": ({ heading, nearest, where }) => [
     `There is no column "${heading}" in ${where}.`,
     suggestion(nearest, "Use one of the headings as it stands in the sheet."),

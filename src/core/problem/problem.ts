@@ -39,6 +39,11 @@ export type ModelProblem =
   | { readonly code: "no-outcome" }
   | { readonly code: "no-drivers" }
   | {
+      readonly code: "ambiguous-heading";
+      readonly headings: readonly string[];
+      readonly sheets: readonly string[];
+    }
+  | {
       readonly code: "unknown-heading";
       readonly heading: string;
       readonly nearest: string | null;
