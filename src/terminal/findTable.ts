@@ -1,0 +1,79 @@
+import type { DataPlace, Errand, Host } from "../app/host.ts";
+import { nearestName } from "../core/problem/nearestName.ts";
+import { type Result, failure } from "../core/problem/result.ts";
+import { plainHeading } from "../core/table/headingRow.ts";
+import { type LocatedTable, readBlock } from "../core/table/locate.ts";
+
+/** The names the user gave, to be matched with headings. */
+export interface Wanted {
+  readonly sheet: string | null;
+  readonly headings: readonly string[];
+}
+
+/**
+ * Finds the sheet and the table that have the headings asked for.
+ * @returns Problem "unknown-place" for a sheet that does not exist, "unknown-heading" with the nearest one,
+ *   "ambiguous-heading" where several sheets have them all.
+ */
+export async function findTable(host: Host, wanted: Wanted, errand: Errand): Promise<Result<LocatedTable>> {
+  const places = await host.listPlaces();
+  if (!places.ok) return places;
+  const sheets = places.value.filter(({ kind }) => kind === "sheet");
+  const chosen = sheets.filter(
+    ({ name }) => wanted.sheet === null || plainHeading(name) === plainHeading(wanted.sheet),
+  );
+  if (chosen.length === 0) return failure(noSuchSheet(wanted.sheet, sheets));
+  const tables: { readonly place: DataPlace; readonly table: Result<LocatedTable> }[] = [];
+  for (const place of chosen) {
+    const block = await host.read({ kind: "place", place }, errand);
+    if (!block.ok) return block;
+    tables.push({ place, table: readBlock(block.value, wanted.headings) });
+  }
+  const fitting = tables.filter(({ table }) => table.ok && missingFrom(table.value, wanted.headings) === undefined);
+  if (fitting.length > 1) {
+    return failure({
+      code: "ambiguous-heading",
+      headings: wanted.headings,
+      sheets: fitting.map(({ place }) => place.name),
+    });
+  }
+  return fitting[0]?.table ?? nearMiss(tables, wanted);
+}
+
+const noSuchSheet = (sheet: string | null, sheets: readonly DataPlace[]) =>
+  sheet === null
+    ? ({ code: "no-data", where: "the workbook" } as const)
+    : ({
+        code: "unknown-place",
+        place: sheet,
+        nearest: nearestName(
+          sheet,
+          sheets.map(({ name }) => name),
+        ),
+      } as const);
+
+const namesOf = (table: LocatedTable): string[] => table.source.columns.map(({ name }) => name);
+
+const missingFrom = (table: LocatedTable, headings: readonly string[]): string | undefined =>
+  headings.find((heading) => !namesOf(table).some((name) => plainHeading(name) === plainHeading(heading)));
+
+/** Where no sheet has all the headings: the fault of the sheet that has most of them. */
+function nearMiss(
+  tables: readonly { readonly place: DataPlace; readonly table: Result<LocatedTable> }[],
+  { headings }: Wanted,
+): Result<LocatedTable> {
+  const ranked = tables.flatMap(({ place, table }) => {
+    if (!table.ok) return [{ place, table, found: -1 }];
+    const found = headings.filter((heading) => missingFrom(table.value, [heading]) === undefined).length;
+    return [{ place, table, found }];
+  });
+  const [best] = ranked.toSorted((a, b) => b.found - a.found);
+  if (best === undefined || !best.table.ok) return best?.table ?? failure({ code: "no-data", where: "the workbook" });
+  const heading = missingFrom(best.table.value, headings) ?? "";
+  const nearest = nearestName(heading, namesOf(best.table.value));
+  return failure({ code: "unknown-heading", heading, nearest, where: best.place.name });
+}
+
+/** The column's own name for a heading given in another case or spacing. */
+export const ownName = (table: LocatedTable, heading: string): string =>
+  namesOf(table).find((name) => plainHeading(name) === plainHeading(heading)) ?? heading;
