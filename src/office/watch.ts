@@ -42,6 +42,7 @@ export async function watch(
   });
 }
 
+/** Hears of cells that were edited and of formulas that came to another value, until told to stop. */
 async function listen(
   context: Excel.RequestContext,
   name: string,
@@ -51,13 +52,16 @@ async function listen(
   sheet.load("id");
   await context.sync();
   if (sheet.isNullObject) return unknownSheet(context, name);
-  const handler = sheet.onChanged.add(({ address, changeType }) => {
-    hear({ kind: changeType, area: changedArea(address) });
+  const hearAll = (kind: string, addresses: string): Promise<void> => {
+    for (const address of addresses.split(",")) hear({ kind, area: changedArea(address) });
     return Promise.resolve();
-  });
+  };
+  const edited = sheet.onChanged.add(({ address, changeType }) => hearAll(changeType, address));
+  const calculated = sheet.onCalculated.add(({ address }) => hearAll("Calculated", address));
   await context.sync();
   return success(async (stopping) => {
-    handler.remove();
+    edited.remove();
+    calculated.remove();
     await stopping.sync();
   });
 }

@@ -56,7 +56,8 @@ function entered(cell: PlanCell): string | number | null {
 export function applyFormats(sheet: Excel.Worksheet, formats: readonly PlanFormat[]): void {
   for (const { area, style, numberFormat, wrap, align, merge, rowHeight } of formats) {
     const range = rangeAt(sheet, area);
-    if (numberFormat !== undefined) range.numberFormat = [[numberFormat]];
+    // One format for all cells is given bare, which the library's types do not say.
+    if (numberFormat !== undefined) Object.assign(range, { numberFormat });
     if (style !== undefined) dress(range, style);
     if (wrap !== undefined) range.format.wrapText = wrap;
     if (align !== undefined) range.format.horizontalAlignment = alignments[align];
