@@ -17,8 +17,7 @@ export function bracketedRoot(f: (x: number) => number, [low, high]: readonly [n
   for (let step = 0; step < mostSteps; step++) {
     const middle = (a + b) / 2;
     const fm = f(middle);
-    // |fm| outside the root: fa and fb have opposite signs, so the radicand exceeds fm^2.
-    const x = middle + ((middle - a) * Math.sign(fa - fb) * fm) / Math.sqrt(fm * fm - fa * fb);
+    const x = middle + ((middle - a) * Math.sign(fa - fb) * fm) / bend(fa, fm, fb);
     if (fm === 0) return middle;
     const fx = f(x);
     if (fx === 0 || Math.abs(x - last) <= Number.EPSILON * Math.abs(x) || b - a <= Number.EPSILON * Math.abs(x))
@@ -29,4 +28,10 @@ export function bracketedRoot(f: (x: number) => number, [low, high]: readonly [n
     else [a, fa] = [x, fx];
   }
   return last;
+}
+
+/** sqrt(fm^2 - fa fb), above |fm| since fa and fb differ in sign; scaled, so that the smallest doubles do not vanish. */
+function bend(fa: number, fm: number, fb: number): number {
+  const scale = Math.max(Math.abs(fa), Math.abs(fm), Math.abs(fb));
+  return scale * Math.sqrt((fm / scale) ** 2 - (fa / scale) * (fb / scale));
 }
