@@ -7,7 +7,7 @@ const fault = (code: string, message = "as Excel says it") =>
   Object.assign(new Error(message), { code, debugInfo: { errorLocation: "Range.values" } });
 
 const clientThatThrows = (thrown: Error): ExcelClient => ({
-  run: (() => Promise.reject(thrown)) as typeof Excel.run,
+  run: () => Promise.reject(thrown),
   isSetSupported: () => true,
 });
 
@@ -44,7 +44,7 @@ describe("what Excel refuses", () => {
   it("asks for the oldest usable Excel before it starts", async () => {
     const asked: string[] = [];
     const client: ExcelClient = {
-      run: (() => Promise.reject(new Error("not to be run"))) as typeof Excel.run,
+      run: () => Promise.reject(new Error("not to be run")),
       isSetSupported: (set, version) => {
         asked.push(`${set} ${version}`);
         return false;
@@ -57,11 +57,11 @@ describe("what Excel refuses", () => {
 
   it("waits for a cell that is being edited, where Excel can", async () => {
     const options: unknown[] = [];
-    const run = (given: unknown, work: (context: Excel.RequestContext) => Promise<unknown>) => {
+    const run = (given: unknown, work: (context: null) => Promise<unknown>) => {
       options.push(given);
-      return work({} as Excel.RequestContext);
+      return work(null);
     };
-    const client = { run: run as typeof Excel.run, isSetSupported: () => true };
+    const client = { run: run as unknown as typeof Excel.run, isSetSupported: () => true };
     expect(await inExcel(client, () => Promise.resolve(success(5)))).toEqual(success(5));
     expect(options).toEqual([{ delayForCellEdit: true }]);
   });
