@@ -62,11 +62,9 @@ function nearMiss(
   tables: readonly { readonly place: DataPlace; readonly table: Result<LocatedTable> }[],
   { headings }: Wanted,
 ): Result<LocatedTable> {
-  const ranked = tables.flatMap(({ place, table }) => {
-    if (!table.ok) return [{ place, table, found: -1 }];
-    const found = headings.filter((heading) => missingFrom(table.value, [heading]) === undefined).length;
-    return [{ place, table, found }];
-  });
+  const foundIn = (table: Result<LocatedTable>): number =>
+    table.ok ? headings.filter((heading) => missingFrom(table.value, [heading]) === undefined).length : -1;
+  const ranked = tables.map(({ place, table }) => ({ place, table, found: foundIn(table) }));
   const [best] = ranked.toSorted((a, b) => b.found - a.found);
   if (best === undefined || !best.table.ok) return best?.table ?? failure({ code: "no-data", where: "the workbook" });
   const heading = missingFrom(best.table.value, headings) ?? "";
