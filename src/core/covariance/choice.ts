@@ -33,5 +33,7 @@ export interface Covariance {
     readonly fallback: string | null;
   };
   readonly matrix: SquareMatrix;
+  /** For each coefficient the t law's degrees of freedom that go with it: with groups only, null otherwise. */
+  readonly degreesOfFreedom: Float64Array<ArrayBuffer> | null;
   readonly standardErrors: Float64Array<ArrayBuffer>;
 }

@@ -12,3 +12,28 @@ export function inOrder(values: Float64Array, rows: Int32Array): Float64Array<Ar
   for (let i = 0; i < rows.length; i++) ordered[i] = values[rows[i]!]!;
   return ordered;
 }
+
+/** The numbers of the rows whose entry is above a bound, ascending. */
+export function rowsAbove(values: Float64Array, bound: number): number[] {
+  const rows: number[] = [];
+  for (let i = 0; i < values.length; i++) if (values[i]! > bound) rows.push(i);
+  return rows;
+}
+
+/** Whether no entry is below the one before it. */
+export function isAscending(keys: Int32Array): boolean {
+  for (let i = 1; i < keys.length; i++) if (keys[i]! < keys[i - 1]!) return false;
+  return true;
+}
+
+/** One number for each pair that occurs, counted from 0 in the order of first appearance. */
+export function pairNumbers(first: Int32Array, second: Int32Array): Int32Array<ArrayBuffer> {
+  const width = second.reduce((most, number) => Math.max(most, number), 0) + 1;
+  const known = new Map<number, number>();
+  return Int32Array.from(first, (number, row) => {
+    const key = number * width + second[row]!;
+    const pair = known.get(key) ?? known.size;
+    known.set(key, pair);
+    return pair;
+  });
+}

@@ -40,7 +40,7 @@ export const scaled = ({ size, values }: SquareMatrix, factor: number): SquareMa
   values: values.map((value) => value * factor),
 });
 
-export const added = (a: SquareMatrix, b: SquareMatrix): SquareMatrix => ({
+export const plus = (a: SquareMatrix, b: SquareMatrix): SquareMatrix => ({
   size: a.size,
   values: a.values.map((value, index) => value + b.values[index]!),
 });
@@ -52,6 +52,12 @@ export function timesVector({ size, values }: SquareMatrix, x: ArrayLike<number>
     for (let j = 0; j < size; j++) sum += values[i * size + j]! * x[j]!;
     return sum;
   });
+}
+
+/** sums += x x'. */
+export function addOuterProduct(sums: Float64Array, x: Float64Array): void {
+  const size = x.length;
+  for (let i = 0; i < size; i++) for (let j = 0; j < size; j++) sums[i * size + j]! += x[i]! * x[j]!;
 }
 
 /** x' A y. */
@@ -84,6 +90,21 @@ export function symmetricEigen(a: SquareMatrix): Eigen {
     values: Float64Array.from(decomposition.realEigenvalues),
     vectors: fromMatrix(decomposition.eigenvectorMatrix),
   };
+}
+
+/** V f(L) V' for a symmetric matrix V L V': its square root, or the inverse of that, and the like. */
+export function symmetricFunction(a: SquareMatrix, f: (eigenvalue: number) => number): SquareMatrix {
+  const { values, vectors } = symmetricEigen(a);
+  const { size } = a;
+  const result = new Float64Array(size * size);
+  values.forEach((value, m) => {
+    const weight = f(value);
+    for (let i = 0; i < size; i++) {
+      const left = weight * vectors.values[i * size + m]!;
+      for (let j = 0; j < size; j++) result[i * size + j]! += left * vectors.values[j * size + m]!;
+    }
+  });
+  return { size, values: result };
 }
 
 /** The largest size among the eigenvalues of any square matrix. */
