@@ -26,7 +26,7 @@ export function answerer(analyst: Analyst): Answering {
       );
       return answer.ok ? replies[id](answer.value, values) : answer;
     }
-    if (isPlain(id)) return plainReplies[id]();
+    if (isPlain(id)) return plainReplies[id](values);
     throw new Error(`There is no function ${id}.`);
   };
 }

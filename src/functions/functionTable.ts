@@ -126,6 +126,15 @@ export const functionTable = [
     gives: "Two columns, low and high, in the order of ANSWER.",
   },
   {
+    id: "LAGS",
+    description: "The number of lags that a rule gives for a number of rows.",
+    parameters: [
+      { name: "rows", description: "How many rows the regression uses.", shape: "one value", optional: false },
+      optional("rule", 'The rule: "careful" (also when left out), "thumb" or "cube root".'),
+    ],
+    gives: "One number.",
+  },
+  {
     id: "SETTINGS",
     description: "Every setting with its values, what holds when it is left out, and what it does.",
     parameters: [],

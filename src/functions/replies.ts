@@ -1,6 +1,8 @@
 import type { Answer } from "../core/answer/answer.ts";
 import { type Grid, answerTable, choiceText, evidenceTable, verdictLines } from "../core/answer/tables.ts";
-import { settingTable } from "../core/answer/settingTable.ts";
+import { readOneOf } from "../core/answer/settingReaders.ts";
+import { isNotUnderstood, settingTable } from "../core/answer/settingTable.ts";
+import { lagsForRows } from "../core/covariance/lags.ts";
 import type { TestOutcome } from "../core/diagnostics/outcome.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";
 import { nearestName } from "../core/problem/nearestName.ts";
@@ -41,11 +43,12 @@ export const replies = {
 
 /** What the other functions reply, without data. */
 export const plainReplies = {
-  SETTINGS: () =>
+  SETTINGS: (): Reply =>
     success([
       ["setting", "values", "when left out", "meaning"],
       ...settingTable.map(({ name, values, standard, meaning }) => [name, values, standard, meaning]),
     ]),
+  LAGS: ({ rows, rule }) => lags(rows, isMissing(rule) ? "careful" : written(rule)),
 } satisfies Record<Exclude<FunctionId, keyof typeof replies>, (values: CallValues) => Reply>;
 
 const column = (values: readonly (string | number)[]): Grid => values.map((value) => [value]);
@@ -90,3 +93,17 @@ const figures = ({ figure }: Computed): (string | number)[] => [
   figure.df.length === 1 ? (figure.df[0] ?? "") : figure.df.join(", "),
   figure.pValue,
 ];
+
+const readRule = readOneOf("careful", "thumb", "cube root");
+
+function lags(rows: unknown, rule: string): Reply {
+  if (typeof rows !== "number" || !Number.isInteger(rows) || rows < 1) {
+    return failure({ ...notUnderstood, setting: "rows", value: written(rows), allowed: ["a whole number above 0"] });
+  }
+  const known = readRule(rule);
+  if (!isNotUnderstood(known)) return success([[lagsForRows(rows, known)]]);
+  const nearest = nearestName(rule, known.allowed);
+  return failure({ ...notUnderstood, setting: "rule", value: rule, allowed: known.allowed, nearest });
+}
+
+const notUnderstood = { code: "unknown-value", nearest: null } as const;

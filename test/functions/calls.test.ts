@@ -128,6 +128,18 @@ describe("what each function shows of an answer", () => {
     expect((fault as { message: string }).message.length).toBeGreaterThan(20);
   });
 
+  it("LAGS: what a rule gives for a number of rows", async () => {
+    // Careful: ceil(1.3 sqrt 100) - 1; thumb: floor(4 (250/100)^(2/9)); cube root: floor(0.75 * 6).
+    expect(await call(desk, "LAGS", 100, null)).toEqual([[12]]);
+    expect(await call(desk, "LAGS", 250, "thumb")).toEqual([[4]]);
+    expect(await call(desk, "LAGS", 216, "Cube-root")).toEqual([[4]]);
+    expect(await call(desk, "LAGS", 2.5, null)).toMatchObject({ error: "#VALUE!" });
+    expect(await call(desk, "LAGS", 100, "thum")).toMatchObject({
+      error: "#VALUE!",
+      message: expect.stringContaining("thumb") as string,
+    });
+  });
+
   it("SETTINGS: the manual inside the sheet, without any data", async () => {
     const table = (await call(desk, "SETTINGS")) as unknown[][];
     expect(table).toHaveLength(settingTable.length + 1);
