@@ -9,10 +9,11 @@ import type { Fit } from "../fit/fit.ts";
 import { fitLeastSquares } from "../fit/fitLeastSquares.ts";
 import { type Result, success } from "../problem/result.ts";
 import { allErrors } from "./allErrors.ts";
-import type { Answer, FitFigures, RowsSummary } from "./answer.ts";
+import type { Answer, FitFigures } from "./answer.ts";
 import { driverAnswers } from "./drivers.ts";
 import { residualPoints } from "./points.ts";
 import type { Question, Report } from "./question.ts";
+import { rowsSummary } from "./rowsSummary.ts";
 import { runTests } from "./runTests.ts";
 import { choiceSentence, openingSentence } from "./verdict.ts";
 import { listInWords } from "./wording.ts";
@@ -95,16 +96,3 @@ const figuresOf = (fit: Fit): FitFigures => ({
   aic: fit.aic,
   bic: fit.bic,
 });
-
-function rowsSummary({ order }: Design): RowsSummary {
-  switch (order.kind) {
-    case "cases":
-      return { kind: "cases" };
-    case "time": {
-      const { period, labels, gaps, gapLabels } = order;
-      return { kind: "time", period, first: labels.first, last: labels.last, gaps, gapLabels };
-    }
-    case "groups":
-      return { kind: "groups", by: order.by, groups: order.labels.length };
-  }
-}
