@@ -1,11 +1,11 @@
 import { type Result, failure, success } from "../problem/result.ts";
 import type { NumberCells } from "../table/numberCells.ts";
+import type { TimeUnit } from "../table/periodLabels.ts";
 import type { Column } from "../table/source.ts";
 import { spotsOf } from "../table/spots.ts";
-import { type TimeCells, readTimeCells, timeState } from "../table/timeCells.ts";
-import { findGrid } from "./period.ts";
-import { timeInWords } from "./periodNames.ts";
-import { distinctTimes, nothingRead, unreadableTime } from "./timeline.ts";
+import { readTimeCells, timeState } from "../table/timeCells.ts";
+import { type TimesFound, timesIn } from "../table/timesFound.ts";
+import { nothingRead, unreadableTime } from "./timeline.ts";
 
 /** A column of dates or periods as a number: how many units have passed since its first time. */
 export interface DateNumbers {
@@ -26,16 +26,16 @@ const daysAYear = 365.2425;
 export function dateNumbers(column: Column): Result<DateNumbers> {
   const times = readTimeCells(column);
   const { values, states } = times;
-  const distinct = distinctTimes(times);
-  if (distinct.length === 0) return failure(nothingRead(column, times));
+  const found = timesIn(times);
+  if (found === null) return failure(nothingRead(column, times));
   const spots = spotsOf(column, (row) => states[row] === timeState.unreadable);
   if (spots.count > 0) return failure(unreadableTime(column, spots));
-  const { unit, count, since } = countingOf(distinct, times);
+  const { unit, count } = countingOf(found, times.unit);
   return success({
     numbers: {
       values: values.map((value, row) => (states[row] === timeState.read ? count(value) : 0)),
       present: states.map((state) => (state === timeState.read ? 1 : 0)),
-      notes: [...times.notes, `${column.name} counts ${unit}s since ${since}.`],
+      notes: [...times.notes, `${column.name} counts ${unit}s since ${found.labelOf(0)}.`],
     },
     unit,
   });
@@ -44,15 +44,12 @@ export function dateNumbers(column: Column): Result<DateNumbers> {
 interface Counting {
   readonly unit: string;
   readonly count: (time: number) => number;
-  readonly since: string;
 }
 
-function countingOf(distinct: Float64Array, { unit, counts }: TimeCells): Counting {
-  const grid = findGrid({ values: distinct, unit, counts });
-  if (grid !== null) return { unit: grid.period.unit, count: grid.positionOf, since: grid.labelOf(0) };
+function countingOf({ distinct, regular, period, positionOf }: TimesFound, unit: TimeUnit): Counting {
+  if (regular) return { unit: period.unit, count: positionOf };
   const first = distinct[0]!;
-  const step = unit === "number" ? "step" : unit;
   const long = unit === "day" && distinct.at(-1)! - first > daysTold;
-  const scale = long ? daysAYear : 1;
-  return { unit: long ? "year" : step, count: (time) => (time - first) / scale, since: timeInWords(step, first) };
+  if (long) return { unit: "year", count: (time) => (time - first) / daysAYear };
+  return { unit: unit === "number" ? "step" : unit, count: (time) => time - first };
 }

@@ -1,4 +1,7 @@
+import type { Period } from "../table/periodNames.ts";
 import type { Transform } from "./model.ts";
+
+export type { Period };
 
 /** A row that was not used, named as the user knows it (sheet rows count from 1). */
 export interface LeftOut {
@@ -23,16 +26,6 @@ export type TermMeaning =
   | { readonly kind: "date"; readonly column: string; readonly unit: string }
   | { readonly kind: "trend"; readonly unit: string }
   | { readonly kind: "season"; readonly level: string; readonly base: string };
-
-/** How the periods of a time column follow one another. */
-export interface Period {
-  /** "monthly", "quarterly", "yearly", "weekly", "daily", "business-daily", "row by row", or "every 3 days". */
-  readonly name: string;
-  /** One period in words: "month", "quarter", "row". */
-  readonly unit: string;
-  /** How many periods make a season: 12, 4, 52, 5 or 7; 1 where there is none. */
-  readonly season: number;
-}
 
 /**
  * What rows are to each other, in design order. `positions` are whole period numbers that count from 0

@@ -1,4 +1,5 @@
 import { type Result, failure, success } from "../problem/result.ts";
+import { gapsIn } from "../table/timesFound.ts";
 import type { RowOrder } from "./design.ts";
 import type { Grouping, RowFrame } from "./rowFrame.ts";
 import type { Timeline } from "./timeline.ts";
@@ -13,26 +14,16 @@ export function rowOrderOf({ groups, second, timeline }: RowFrame, rows: Int32Ar
   return success(timeline === null ? { kind: "cases" } : timeOrder(timeline, rows));
 }
 
-/** Gaps beyond these are counted, not named. */
-const mostGapLabels = 5;
-
 function timeOrder({ positions, period, labelOf }: Timeline, rows: Int32Array): RowOrder {
   const first = positions[rows[0]!]!;
-  const last = positions[rows.at(-1)!]!;
-  const gapLabels: string[] = [];
-  for (let i = 1; i < rows.length && gapLabels.length < mostGapLabels; i++) {
-    const next = positions[rows[i]!]!;
-    for (let gap = positions[rows[i - 1]!]! + 1; gap < next && gapLabels.length < mostGapLabels; gap++) {
-      gapLabels.push(labelOf(gap));
-    }
-  }
+  const used = Int32Array.from(rows, (row) => positions[row]! - first);
+  const label = (position: number): string => labelOf(position + first);
   return {
     kind: "time",
-    positions: Int32Array.from(rows, (row) => positions[row]! - first),
+    positions: used,
     period,
-    labels: { first: labelOf(first), last: labelOf(last) },
-    gaps: last - first + 1 - rows.length,
-    gapLabels,
+    labels: { first: label(0), last: label(used.at(-1)!) },
+    ...gapsIn(used, label),
   };
 }
 

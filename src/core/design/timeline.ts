@@ -2,14 +2,13 @@ import type { Problem } from "../problem/problem.ts";
 import { type Result, failure, success } from "../problem/result.ts";
 import { calendarDay, mondayOf } from "../table/calendar.ts";
 import type { TimeUnit } from "../table/periodLabels.ts";
+import { type Period, rowByRow } from "../table/periodNames.ts";
 import { rangeOf, rowNumberOf } from "../table/place.ts";
 import type { Column, Source } from "../table/source.ts";
 import { spotsOf } from "../table/spots.ts";
 import { isSlashedDate } from "../table/timeTexts.ts";
 import { type TimeCells, readTimeCells, timeState } from "../table/timeCells.ts";
-import type { Period } from "./design.ts";
-import { findGrid } from "./period.ts";
-import { rowByRow, timeInWords } from "./periodNames.ts";
+import { timesIn } from "../table/timesFound.ts";
 
 /** Where each row of a source stands in time. */
 export interface Timeline {
@@ -45,11 +44,9 @@ export const rowTimeline = ({ rowCount, columns }: Source): Timeline => ({
  */
 export function columnTimeline(column: Column): Result<Timeline> {
   const times = readTimeCells(column);
-  const distinct = distinctTimes(times);
-  if (distinct.length === 0) return failure(nothingRead(column, times));
-  const grid = findGrid({ values: distinct, unit: times.unit, counts: times.counts });
-  const ranked = rankedGrid(distinct, times.unit);
-  const { period, positionOf, labelOf } = grid ?? ranked;
+  const found = timesIn(times);
+  if (found === null) return failure(nothingRead(column, times));
+  const { regular, period, positionOf, labelOf } = found;
   const positions = new Int32Array(times.values.length).fill(-1);
   for (let row = 0; row < positions.length; row++) {
     if (times.states[row] === timeState.read) positions[row] = positionOf(times.values[row]!);
@@ -62,24 +59,8 @@ export function columnTimeline(column: Column): Result<Timeline> {
     labelOf,
     ...calendarOf(times),
     isUnreadable: (row) => times.states[row] === timeState.unreadable,
-    notes: grid === null ? [...times.notes, irregular] : times.notes,
+    notes: regular ? times.notes : [...times.notes, irregular],
   });
-}
-
-export function distinctTimes({ values, states }: TimeCells): Float64Array {
-  const sorted = values.filter((_, row) => states[row] === timeState.read).sort();
-  return sorted.filter((time, i) => i === 0 || time !== sorted[i - 1]!);
-}
-
-/** Times without a period, each one step after the one before. */
-function rankedGrid(distinct: Float64Array, unit: TimeUnit) {
-  const ranks = new Map(Array.from(distinct, (time, rank) => [time, rank]));
-  const words = unit === "number" ? "step" : unit;
-  return {
-    period: rowByRow,
-    positionOf: (time: number) => ranks.get(time)!,
-    labelOf: (position: number) => timeInWords(words, distinct[position]!),
-  };
 }
 
 export function nothingRead(column: Column, { states }: Pick<TimeCells, "states">): Problem {

@@ -1,12 +1,11 @@
 import { type Result, failure, success } from "../problem/result.ts";
 import type { NumberCells } from "../table/numberCells.ts";
+import { type Period, periodsInWords } from "../table/periodNames.ts";
 import { cellOf } from "../table/place.ts";
 import type { Column } from "../table/source.ts";
 import { spotsOf } from "../table/spots.ts";
-import type { Period } from "./design.ts";
 import { type Lack, missingCell } from "./ingredient.ts";
 import type { Transform } from "./model.ts";
-import { periodsInWords } from "./periodNames.ts";
 
 /** What transforms that look back in time need: for each row the row so many periods earlier, -1 where there is none. */
 export interface LookBack {

@@ -1,9 +1,19 @@
 import type { TimeUnit } from "./periodLabels.ts";
+import type { Period } from "./periodNames.ts";
 import { type TimeCells, timeState } from "./timeCells.ts";
+import { gapsIn, timesIn } from "./timesFound.ts";
 
 /** How the times of a column run. */
 export interface TimeSummary {
   readonly unit: TimeUnit;
+  readonly period: Period;
+  /** First and last time in words, "January 2019". */
+  readonly first: string;
+  readonly last: string;
+  /** How many periods between them have no row. */
+  readonly gaps: number;
+  /** The first few of them in words. */
+  readonly gapLabels: readonly string[];
   /** Different times. */
   readonly distinct: number;
   /** Whether any time stands in more than one row, as in a panel. */
@@ -12,9 +22,21 @@ export interface TimeSummary {
   readonly ascending: boolean;
 }
 
-export function summariseTime({ unit, values, states }: TimeCells): TimeSummary {
-  const times = values.filter((_, row) => states[row] === timeState.read);
-  const ascending = times.every((time, i) => i === 0 || time > times[i - 1]!);
-  const distinct = ascending ? times.length : new Set(times).size;
-  return { unit, distinct, repeats: distinct < times.length, ascending };
+/** @returns null where no cell could be read as a time. */
+export function summariseTime(cells: TimeCells): TimeSummary | null {
+  const found = timesIn(cells);
+  if (found === null) return null;
+  const { distinct, period, positionOf, labelOf } = found;
+  const positions = Int32Array.from(distinct, positionOf);
+  const times = cells.values.filter((_, row) => cells.states[row] === timeState.read);
+  return {
+    unit: cells.unit,
+    period,
+    first: labelOf(0),
+    last: labelOf(positions.at(-1)!),
+    ...gapsIn(positions, labelOf),
+    distinct: distinct.length,
+    repeats: distinct.length < times.length,
+    ascending: times.every((time, i) => i === 0 || time > times[i - 1]!),
+  };
 }

@@ -1,7 +1,6 @@
-import { calendarDay, dayCount, minutesADay, weekIndexOf, weekdayOf } from "../table/calendar.ts";
-import type { TimeUnit } from "../table/periodLabels.ts";
-import type { Period } from "./design.ts";
-import { type GridUnit, businessDay, periodOf, timeInWords } from "./periodNames.ts";
+import { calendarDay, dayCount, minutesADay, weekIndexOf, weekdayOf } from "./calendar.ts";
+import type { TimeUnit } from "./periodLabels.ts";
+import { type GridUnit, type Period, businessDay, periodOf, timeInWords } from "./periodNames.ts";
 
 /** Times that fall on whole periods of equal length. */
 export interface Grid {
@@ -34,7 +33,7 @@ export function findGrid({ values, unit, counts }: Times): Grid | null {
     case "number":
       return values.every(Number.isInteger) ? numberGrid(values, counts) : null;
     case "day":
-      return values.every(Number.isInteger) ? dayGrid(values) : clockGrid(values);
+      return atOneHour(values) ? dayGrid(values) : clockGrid(values);
   }
 }
 
@@ -89,6 +88,14 @@ function dayGrid(values: Float64Array): Grid | null {
   }
   return filled(byDay, values);
 }
+
+/** Whole days, or all at the same time of day to the second. */
+function atOneHour(values: Float64Array): boolean {
+  const hour = values[0]! - Math.floor(values[0]!);
+  return values.every((value) => Math.abs(value - Math.floor(value) - hour) < 1 / secondsADay);
+}
+
+const secondsADay = 86_400;
 
 const clockGrid = (values: Float64Array): Grid | null =>
   filled(stepped(values, { unit: "minute", read: (time) => Math.round(time * minutesADay), word: null }), values);

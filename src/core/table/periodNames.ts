@@ -1,5 +1,14 @@
-import { dayInDigits, dayInWords, isoWeek, minutesADay, monthNames } from "../table/calendar.ts";
-import type { Period } from "./design.ts";
+import { dayInDigits, dayInWords, isoWeek, minutesADay, monthNames } from "./calendar.ts";
+
+/** How the periods of a time column follow one another. */
+export interface Period {
+  /** "monthly", "quarterly", "yearly", "weekly", "daily", "business-daily", "hourly", "every 3 days", "by running number" or "row by row". */
+  readonly name: string;
+  /** One period in words: "month", "quarter", "3 days", "step", "row". */
+  readonly unit: string;
+  /** How many periods make a season: 12, 4, 52, 5, 7 or 24; 1 where there is none. */
+  readonly season: number;
+}
 
 /** What the positions of a grid count: calendar units, days without weekends, minutes, or plain steps. */
 export type GridUnit = "year" | "quarter" | "month" | "week" | "day" | "business day" | "hour" | "minute" | "step";
