@@ -1,0 +1,107 @@
+import type { BookData } from "../book/bookData.ts";
+import { startEvents } from "../excel/events.ts";
+import { calm, type Host, type Switches } from "../excel/host.ts";
+import { raiseChanges } from "../excel/raise.ts";
+import { registerFunctions, type AddInFunctions } from "../workbook/addInFunctions.ts";
+import { recalculate, watchCalculation } from "../workbook/calculation.ts";
+import { watchChanges } from "../workbook/changes.ts";
+import type { Book } from "../workbook/book.ts";
+import type { Grid } from "../workbook/grid.ts";
+import type { BlankArrival, FunctionsMetadata } from "../workbook/metadata.ts";
+import { openBook } from "../workbook/openBook.ts";
+import { startCalls } from "../workbook/pendingCalls.ts";
+import { snapshotOf } from "../workbook/snapshot.ts";
+import { growTo } from "../workbook/write.ts";
+import { callTexts, cancelText, eventText, outcomeOf } from "./callTexts.ts";
+import { hands, type Hands } from "./hands.ts";
+import { serveRequests } from "./serve.ts";
+import type { Transport } from "./transport.ts";
+
+export interface DeskOptions {
+  readonly book: BookData;
+  /** functions.json of the add-in; without it every function of the add-in answers #NAME?. */
+  readonly functions?: FunctionsMetadata;
+  readonly namespace?: string;
+  readonly profile?: Switches["profile"];
+  /** What a blank cell becomes in an argument of type any. */
+  readonly blank?: BlankArrival;
+}
+
+/** The stand-in spreadsheet at work: one workbook, one add-in. */
+export interface Desk extends Hands {
+  readonly book: Book;
+  readonly host: Host;
+  readonly switches: Switches;
+  /** How a blank cell arrives at a function. */
+  readonly arrival: { blank: BlankArrival };
+  /** Resolves when no formula is being calculated and no function of the add-in is at work. */
+  readonly settle: () => Promise<void>;
+  readonly snapshot: () => BookData;
+  readonly stop: () => void;
+}
+
+const standardNamespace = "FOOTING";
+
+/** Opens a workbook in a grid and answers the add-in at the other end of the line. */
+export function startDesk(grid: Grid, line: Transport, options: DeskOptions): Desk {
+  const arrival = { blank: options.blank ?? null };
+  const messages = new Map<string, string>();
+  const switches = calm(options.profile ?? "desktop");
+  const calls = startCalls({
+    make: (asked) => callTexts(asked, options.functions).forEach(line.send),
+    cancel: (ids) => line.send(cancelText(ids)),
+    arrived: (results) => {
+      for (const { fills } of results) growTo(book, fills);
+      recalculate(
+        book,
+        results.map(({ cell }) => cell),
+      );
+    },
+  });
+  const add: AddInFunctions = {
+    namespace: options.namespace ?? standardNamespace,
+    metadata: options.functions ?? { functions: [] },
+    calls,
+    arrival,
+    messages,
+  };
+  const book = openBook(grid, options.book, (opened) => registerFunctions(opened, add));
+  const calculation = watchCalculation(book);
+  calculation.onFinished(calls.settle);
+  const server = serveRequests(line);
+  const events = startEvents((event) => server.after(eventText(event)));
+  const host: Host = {
+    book,
+    switches,
+    events,
+    references: { kept: new Map(), given: 0 },
+    isCalculating: calculation.busy,
+    calculated: () => until(() => !calculation.busy()),
+    takeResults: (results) => calls.answer(results.map((result) => [result[0], outcomeOf(result)] as const)),
+  };
+  book.listeners.add((change) => raiseChanges(host, change));
+  const stopWatching = watchChanges(book);
+  server.answer(host);
+  return {
+    ...hands(host, messages),
+    book,
+    host,
+    switches,
+    arrival,
+    settle: () => until(() => !calculation.busy() && calls.waiting() === 0 && !server.busy()),
+    snapshot: () => snapshotOf(book),
+    stop: () => {
+      stopWatching();
+      calculation.stop();
+    },
+  };
+}
+
+const pollMilliseconds = 5;
+
+/** Looks twice, since the end of one thing may set off another a moment later. */
+async function until(quiet: () => boolean): Promise<void> {
+  for (let seen = 0; seen < 2; seen = quiet() ? seen + 1 : 0) {
+    await new Promise((resolve) => setTimeout(resolve, pollMilliseconds));
+  }
+}

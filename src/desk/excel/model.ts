@@ -1,0 +1,101 @@
+import type { Area } from "../workbook/areas.ts";
+import type { ChartRecord, CustomXmlRecord, SeriesRecord } from "../workbook/records.ts";
+import type { Host } from "./host.ts";
+
+/** What the host remembers of an object while a request runs, by the object's type in Excel's model. */
+export interface States {
+  Workbook: null;
+  Application: null;
+  CultureInfo: null;
+  NumberFormatInfo: null;
+  Runtime: null;
+  WorkbookProtection: null;
+  WorksheetCollection: null;
+  Worksheet: OnSheet;
+  WorksheetProtection: OnSheet;
+  WorksheetFreezePanes: OnSheet;
+  PageLayout: OnSheet;
+  WorksheetCustomPropertyCollection: OnSheet;
+  WorksheetCustomProperty: OnSheet & { readonly key: string };
+  Range: Area;
+  RangeView: { readonly area: Area; readonly rows: readonly number[] };
+  RangeAreas: readonly Area[];
+  RangeCollection: readonly Area[];
+  RangeFormat: readonly Area[];
+  RangeFill: readonly Area[];
+  RangeFont: readonly Area[];
+  RangeBorderCollection: readonly Area[];
+  RangeBorder: { readonly areas: readonly Area[]; readonly side: string };
+  TableCollection: { readonly sheet: string | null };
+  TableScopedCollection: { readonly ids: readonly string[] };
+  Table: OnTable;
+  TableColumnCollection: OnTable;
+  TableColumn: OnTable & { readonly index: number };
+  NamedItemCollection: { readonly sheet: string | null };
+  NamedItem: { readonly id: string };
+  SettingCollection: null;
+  Setting: { readonly key: string };
+  CustomXmlPartCollection: null;
+  CustomXmlPartScopedCollection: { readonly namespace: string };
+  CustomXmlPart: CustomXmlRecord;
+  ChartCollection: OnSheet;
+  Chart: OnChart;
+  ChartTitle: OnChart;
+  ChartLegend: OnChart;
+  ChartAxes: OnChart;
+  ChartAxis: OnAxis;
+  ChartAxisTitle: OnAxis;
+  ChartGridlines: OnAxis;
+  ChartSeriesCollection: OnChart;
+  ChartSeries: OnSeries;
+  ChartSeriesFormat: OnSeries;
+  ChartLineFormat: OnSeries;
+  ChartFill: OnSeries;
+  CustomFunctions: null;
+}
+
+export interface OnSheet {
+  readonly sheet: string;
+}
+export interface OnTable {
+  readonly id: string;
+}
+export interface OnChart extends OnSheet {
+  readonly chart: ChartRecord;
+}
+export interface OnAxis extends OnChart {
+  readonly axis: "x" | "y";
+}
+export interface OnSeries extends OnChart {
+  readonly series: SeriesRecord;
+}
+
+export type TypeName = keyof States;
+
+/** An object of the model: its type and what the host needs to find it. */
+export type Held = { [T in TypeName]: { readonly type: T; readonly state: States[T] } }[TypeName];
+
+export const hold = <T extends TypeName>(type: T, state: States[T]): Held => ({ type, state }) as Held;
+
+export type Arguments = readonly unknown[];
+
+/**
+ * One type of the object model. Names are those of the wire: the API's, with a capital.
+ * A member that stands in no table answers ApiNotFound.
+ */
+export interface Family<S> {
+  /** What identifies the object within its collection, where it has an identity. */
+  readonly id?: (state: S, host: Host) => string | number;
+  readonly read?: Readonly<Record<string, (state: S, host: Host) => unknown>>;
+  readonly write?: Readonly<Record<string, (state: S, host: Host, value: unknown) => void>>;
+  /** Properties and methods that answer with an object; null is the null object. */
+  readonly part?: Readonly<Record<string, (state: S, host: Host, args: Arguments) => Held | null>>;
+  /** Methods that do something or answer with a value. */
+  readonly call?: Readonly<Record<string, (state: S, host: Host, args: Arguments) => unknown>>;
+  /** The members of a collection. */
+  readonly items?: (state: S, host: Host) => readonly Held[];
+  /** Values that are loaded only by name, since Excel never loads them by default. */
+  readonly unasked?: readonly string[];
+  /** Properties that Excel has and this host has not: they answer ApiNotFound, other names InvalidArgument. */
+  readonly lacks?: readonly string[];
+}

@@ -1,0 +1,120 @@
+import { FormulaDataModel, IDefinedNamesService } from "@univerjs/engine-formula";
+import { parseAddress } from "../../core/table/address.ts";
+import type { BookData, SheetData } from "../book/bookData.ts";
+import { toRange, type Area } from "./areas.ts";
+import { worksheetOf, type Book } from "./book.ts";
+import { recalculate } from "./calculation.ts";
+import { toChartRecord } from "./charts.ts";
+import type { Grid } from "./grid.ts";
+import { emptySheetRecord, type SheetRecord } from "./records.ts";
+import { registerTable } from "./tables.ts";
+import { isStyled, toGrid } from "./toGrid.ts";
+
+let opened = 0;
+
+/**
+ * Opens a workbook in the grid. Saved values stand; only formulas without one are calculated.
+ * @param prepare - what must be in place before the first formula is calculated, such as an add-in's functions.
+ */
+export function openBook(grid: Grid, data: BookData, prepare: (book: Book) => void = () => undefined): Book {
+  opened += 1;
+  const ids = data.sheets.map((_, index) => `sheet-${index + 1}`);
+  const book: Book = {
+    grid,
+    unit: `book-${opened}`,
+    sheets: new Map(data.sheets.map((sheet, index) => [ids[index]!, toRecord(sheet)])),
+    customXml: (data.customXml ?? []).map((part) => ({ ...part })),
+    settings: new Map(Object.entries(data.settings ?? {})),
+    listeners: new Set(),
+  };
+  // Told before the formula engine reads a formula: told later, they would count as changes.
+  registerNames(book, data);
+  data.sheets.forEach((sheet, index) => registerTables(book, sheet, ids[index]!));
+  const workbook = grid.api.createWorkbook(toGrid(book.unit, data, ids));
+  data.sheets.forEach((sheet, index) => seedSpills(book, sheet, ids[index]!));
+  workbook.setActiveSheet(ids[data.active] ?? ids[0]!);
+  prepare(book);
+  const unsaved = data.sheets.flatMap((sheet, index) => unsavedFormulas(sheet, ids[index]!));
+  if (unsaved.length > 0) recalculate(book, unsaved);
+  return book;
+}
+
+function registerNames(book: Book, data: BookData): void {
+  const names = book.grid.injector.get(IDefinedNamesService);
+  for (const { name, refersTo } of data.names) {
+    const id = `name-${name.toLowerCase()}`;
+    names.registerDefinedName(book.unit, { id, name, formulaOrRefString: refersTo.replace(/^=/, "") });
+  }
+}
+
+function toRecord(sheet: SheetData): SheetRecord {
+  const links = sheet.links.flatMap(({ cell, target }) => {
+    const at = parseAddress(cell);
+    return at === null ? [] : [[`${at.row},${at.column}`, { target, screenTip: "" }] as const];
+  });
+  return {
+    ...emptySheetRecord(),
+    charts: sheet.charts.map((chart, index) => toChartRecord(chart, { sheet, index })),
+    links: new Map(links),
+    customProperties: new Map(Object.entries(sheet.customProperties ?? {})),
+    protected: sheet.protected,
+    printArea: sheet.printArea,
+    onePageWide: sheet.onePageWide,
+    landscape: sheet.landscape ?? false,
+  };
+}
+
+function registerTables(book: Book, data: SheetData, sheet: string): void {
+  data.tables.forEach(({ name, address }, index) => {
+    const area = parseAddress(address);
+    if (area === null) return;
+    const { row, column, rows, columns } = area;
+    const table = { id: `{${sheet}-table-${index + 1}}`, name, row, column, rows, columns, style: "TableStyleMedium2" };
+    const headings = Array.from({ length: columns }, (_, offset) => headingAt(data, row, column + offset));
+    registerTable(book, { sheet, table }, headings);
+    book.sheets.get(sheet)?.tables.push(table);
+  });
+}
+
+function headingAt(sheet: SheetData, row: number, column: number): string {
+  const cell = sheet.rows[row]?.[column] ?? null;
+  const value = isStyled(cell) ? cell.value : cell;
+  return value === null || typeof value === "object" ? "" : String(value);
+}
+
+/** Lays the saved results of spilling formulas back over the cells they fill: the grid keeps them apart. */
+function seedSpills(book: Book, data: SheetData, sheet: string): void {
+  const model = book.grid.injector.get(FormulaDataModel);
+  const ranges = ((model.getArrayFormulaRange()[book.unit] ??= {})[sheet] ??= {});
+  const values = ((model.getArrayFormulaCellData()[book.unit] ??= {})[sheet] ??= {});
+  const stored = worksheetOf(book, sheet).getCellMatrix();
+  for (const { row, column, rows, columns } of savedSpills(data, sheet)) {
+    (ranges[row] ??= {})[column] = toRange({ row, column, rows, columns });
+    for (let r = row; r < row + rows; r++) {
+      for (let c = column; c < column + columns; c++) {
+        const cell = stored.getValue(r, c) ?? {};
+        (values[r] ??= {})[c] = { v: cell.v ?? null, t: cell.t ?? null };
+        if (r !== row || c !== column) stored.setValue(r, c, cell.s === undefined ? {} : { s: cell.s });
+      }
+    }
+  }
+}
+
+function savedSpills(data: SheetData, sheet: string): readonly Area[] {
+  return data.rows.flatMap((row) =>
+    row.flatMap((cell) => {
+      const area = isStyled(cell) && cell.spill !== undefined ? parseAddress(cell.spill) : null;
+      return area === null || area.rows * area.columns < 2 ? [] : [{ ...area, sheet }];
+    }),
+  );
+}
+
+function unsavedFormulas(data: SheetData, sheet: string): readonly Area[] {
+  return data.rows.flatMap((cells, row) =>
+    cells.flatMap((cell, column) =>
+      isStyled(cell) && cell.formula !== undefined && cell.value === null
+        ? [{ sheet, row, column, rows: 1, columns: 1 }]
+        : [],
+    ),
+  );
+}
