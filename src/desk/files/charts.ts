@@ -1,11 +1,12 @@
 import type { Sheet, SheetChart } from "hucre/xlsx";
-import type { BookChart } from "../book/bookData.ts";
+import type { AxisRange, BookChart } from "../book/bookData.ts";
+import { known } from "./known.ts";
 
 type FileChart = NonNullable<Sheet["charts"]>[number];
 type FileSeries = SheetChart["series"][number];
 
 /** In points. */
-const lineWidth = 1.5;
+const usualLineWidth = 2.25;
 const markerSize = 5;
 
 /** A chart in the words of the file library; points without a line are finished by `finishedChart`. */
@@ -19,10 +20,16 @@ export function toFileChart(chart: BookChart): SheetChart {
     series: chart.series.map(toFileSeries),
     anchor: { from: { row, col: column }, to: { row: row + rows, col: column + columns } },
     ...(chart.kind.startsWith("scatter") && { scatterStyle: "lineMarker" }),
-    legend: chart.series.length > 1 ? "bottom" : false,
-    axes: { x: { ...axis, title: chart.xTitle }, y: { ...axis, title: chart.yTitle, gridlines: { major: true } } },
+    legend: (chart.legend ?? chart.series.length > 1) ? "bottom" : false,
+    axes: {
+      x: { ...axis, title: chart.xTitle, scale: scaleOf(chart.xRange) },
+      y: { ...axis, title: chart.yTitle, scale: scaleOf(chart.yRange), gridlines: { major: true } },
+    },
   };
 }
+
+const scaleOf = (range: AxisRange | undefined): { min?: number; max?: number } =>
+  known({ min: range?.minimum ?? undefined, max: range?.maximum ?? undefined });
 
 /** Numbers stand at the edge, where negative values do not run through them; a file that says nothing gets crosses. */
 const axis = { majorTickMark: "out", minorTickMark: "none", tickLblPos: "low" } as const;
@@ -34,13 +41,15 @@ const fileKind = {
   columns: "column",
 } as const satisfies Record<BookChart["kind"], SheetChart["type"]>;
 
-function toFileSeries({ name, x, y, line, markers }: BookChart["series"][number]): FileSeries {
+function toFileSeries({ name, x, y, line, markers, color, lineWeight }: BookChart["series"][number]): FileSeries {
+  const fill = color?.replace("#", "").toUpperCase();
   return {
     name,
     ...(x !== "" && { categories: x }),
     values: y,
-    marker: markers ? { symbol: "circle", size: markerSize } : { symbol: "none" },
-    ...(line && { stroke: { width: lineWidth } }),
+    ...known({ color: fill }),
+    marker: markers ? { symbol: "circle", size: markerSize, ...known({ fill, line: fill }) } : { symbol: "none" },
+    ...(line && { stroke: { width: lineWeight ?? usualLineWidth } }),
   };
 }
 
@@ -48,17 +57,30 @@ function toFileSeries({ name, x, y, line, markers }: BookChart["series"][number]
 export function toBookChart(chart: FileChart, index: number): BookChart | null {
   const kind = bookKind(chart);
   if (kind === null || chart.anchor === undefined) return null;
-  const { frameTitle = `Chart ${index + 1}`, title = "", axes, series = [] } = chart;
+  const { frameTitle = `Chart ${index + 1}`, title = "", legend = false, series = [] } = chart;
   return {
     name: frameTitle,
     title,
     kind,
     place: placeOf(chart.anchor),
-    xTitle: axes?.x?.title ?? "",
-    yTitle: axes?.y?.title ?? "",
+    ...axesOf(chart.axes),
+    legend: legend !== false,
     series: series.flatMap(toBookSeries),
   };
 }
+
+type Axes = Pick<BookChart, "xTitle" | "yTitle" | "xRange" | "yRange">;
+
+const axesOf = ({ x, y }: NonNullable<FileChart["axes"]> = {}): Axes => ({
+  xTitle: x?.title ?? "",
+  yTitle: y?.title ?? "",
+  ...known({ xRange: rangeOf(x?.scale), yRange: rangeOf(y?.scale) }),
+});
+
+const rangeOf = (scale: { readonly min?: number; readonly max?: number } | undefined): AxisRange | undefined =>
+  scale?.min === undefined && scale?.max === undefined
+    ? undefined
+    : { minimum: scale.min ?? null, maximum: scale.max ?? null };
 
 /** The size of a chart that names no lower right corner, in cells of standard size: 5 by 3 inches. */
 const usualRows = 15;
@@ -95,6 +117,10 @@ function toBookSeries(series: FileSeriesInfo, index: number): BookChart["series"
       y: series.valuesRef,
       line,
       markers: series.marker?.symbol === undefined ? !line : series.marker.symbol !== "none",
+      ...(typeof series.color === "string" && { color: `#${series.color.toLowerCase()}` }),
+      ...(line &&
+        series.stroke?.width !== undefined &&
+        series.stroke.width !== usualLineWidth && { lineWeight: series.stroke.width }),
     },
   ];
 }
@@ -107,13 +133,19 @@ export const chartParts = /^xl\/charts\/[^/]+\.xml$/;
  */
 export function finishedChart(part: string): string {
   return part
-    .replace(/<c:ser>.*?<\/c:ser>/gs, (series) =>
-      series.includes("<a:ln ") || !series.includes("<c:xVal>")
-        ? series
-        : series.replace("<c:marker>", `<c:spPr><a:ln><a:noFill/></a:ln></c:spPr><c:marker>`),
-    )
+    .replace(/<c:ser>.*?<\/c:ser>/gs, withoutLine)
     .replaceAll("<c:majorGridlines/>", `<c:majorGridlines>${lineOf("D5DBE1")}</c:majorGridlines>`)
     .replaceAll("<c:crossAx ", `${lineOf("7B8794")}<c:crossAx `);
+}
+
+function withoutLine(series: string): string {
+  const [before = "", after = ""] = series.split("<c:marker>");
+  if (!series.includes("<c:xVal>") || before.includes("<a:ln w=")) return series;
+  const noLine = "<a:ln><a:noFill/></a:ln>";
+  const looks = before.includes("<c:spPr>")
+    ? before.replace(/(?:<a:ln>.*?<\/a:ln>)?<\/c:spPr>/s, `${noLine}</c:spPr>`)
+    : `${before}<c:spPr>${noLine}</c:spPr>`;
+  return `${looks}<c:marker>${after}`;
 }
 
 const lineOf = (color: string): string =>

@@ -70,6 +70,7 @@ const answer: SheetData = {
       place: { row: 6, column: 1, rows: 12, columns: 6 },
       xTitle: "x",
       yTitle: "y",
+      legend: false,
       series: [
         { name: "Rows", x: "'Tubes answer'!$B$2:$B$4", y: "'Tubes answer'!$B$2:$B$4", line: false, markers: true },
       ],

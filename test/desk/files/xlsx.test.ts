@@ -179,9 +179,21 @@ describe("charts", () => {
     place: { row: 3, column: 5, rows: 14, columns: 7 },
     xTitle: "Fitted",
     yTitle: "Residual",
+    xRange: { minimum: 0.5, maximum: null },
+    yRange: { minimum: -4, maximum: 4.5 },
+    legend: true,
     series: [
       { name: "Rows", x: "Data!$A$1:$A$3", y: "Data!$B$1:$B$3", line: false, markers: true },
-      { name: "Zero", x: "Data!$A$1:$A$2", y: "Data!$C$1:$C$2", line: true, markers: false },
+      { name: "Odd", x: "Data!$A$1:$A$3", y: "Data!$B$1:$B$3", line: false, markers: true, color: "#7a1f1f" },
+      {
+        name: "Zero",
+        x: "Data!$A$1:$A$2",
+        y: "Data!$C$1:$C$2",
+        line: true,
+        markers: false,
+        color: "#0f4c5c",
+        lineWeight: 1,
+      },
       { name: "Both", x: "Data!$A$1:$A$3", y: "Data!$C$1:$C$3", line: true, markers: true },
     ],
   };
@@ -205,7 +217,7 @@ describe("charts", () => {
     const sheet = { ...blankSheet("Data", data), charts: [chart] };
     const part = textOf(unpack(await saveXlsx(bookOf(sheet)))["xl/charts/chart1.xml"]!);
     const lines = [...part.matchAll(/<c:ser>.*?<\/c:ser>/gs)].map(([series]) => !series.includes("<a:noFill/>"));
-    expect(lines).toEqual([false, true, true]);
+    expect(lines).toEqual([false, false, true, true]);
   });
 });
 
