@@ -1,0 +1,26 @@
+import type { SheetKind } from "../sheet/answerSheet.ts";
+import type { DataInHand } from "./dataInHand.ts";
+import type { DataPlace, Progress } from "./host.ts";
+import type { ColumnDetails, Role, Setup } from "./setup.ts";
+import type { Answered, Busy, Fault, Section } from "./state.ts";
+
+/** Everything that can happen to the pane. */
+export type Action =
+  | { readonly kind: "shown"; readonly section: Section }
+  | { readonly kind: "places found"; readonly places: readonly DataPlace[] }
+  | { readonly kind: "started"; readonly on: Busy["with"] }
+  | { readonly kind: "progressed"; readonly progress: Progress }
+  | { readonly kind: "cancelled" }
+  | { readonly kind: "failed"; readonly fault: Fault }
+  | { readonly kind: "dismissed" }
+  | { readonly kind: "read"; readonly data: DataInHand; readonly setup: Setup }
+  | { readonly kind: "role chosen"; readonly column: string; readonly role: Role }
+  | { readonly kind: "column changed"; readonly column: string; readonly details: ColumnDetails }
+  | {
+      readonly kind: "setup changed";
+      readonly change: Partial<Pick<Setup, "rows" | "constant" | "calendar" | "options">>;
+    }
+  | { readonly kind: "answered"; readonly answered: Omit<Answered, "outdated"> }
+  | { readonly kind: "written"; readonly sheet: string; readonly as: SheetKind }
+  | { readonly kind: "cell changed"; readonly cell: string }
+  | { readonly kind: "said"; readonly text: string };

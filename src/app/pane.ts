@@ -1,0 +1,61 @@
+import type { SheetKind } from "../sheet/answerSheet.ts";
+import type { Action } from "./actions.ts";
+import type { Analyst } from "./analyst.ts";
+import { findAnswer } from "./answering.ts";
+import { createErrands } from "./errands.ts";
+import type { Host, WhereToRead } from "./host.ts";
+import { listPlaces, readData } from "./reading.ts";
+import { reduce } from "./reduce.ts";
+import { type Store, createStore } from "./store.ts";
+import { type PaneState, emptyState } from "./state.ts";
+import { createWatch } from "./watching.ts";
+import { type Edition, goToCell, writeSheet } from "./writing.ts";
+import type { Work } from "./work.ts";
+
+export interface PaneParts {
+  readonly host: Host;
+  readonly analyst: Analyst;
+  readonly edition: Edition;
+  /** Runs work and tells the pane of a fault of ours: the entry's one place to catch. */
+  readonly guard: (work: () => Promise<void>) => void;
+}
+
+/** What a person can ask of the pane beside changing its set-up, which is done by actions alone. */
+export interface Commands {
+  readonly open: () => void;
+  readonly read: (where: WhereToRead) => void;
+  readonly answer: () => void;
+  readonly write: (kind: SheetKind) => void;
+  /** Reads the cells again, answers again, and writes a kept sheet again where one was left out of date. */
+  readonly redo: () => void;
+  readonly goTo: (address: string) => void;
+  readonly cancel: () => void;
+}
+
+export interface Pane {
+  readonly store: Store<PaneState, Action>;
+  readonly commands: Commands;
+}
+
+/** The pane without its looks: state, actions and what can be asked, over any spreadsheet and any analyst. */
+export function createPane({ host, analyst, edition, guard }: PaneParts): Pane {
+  const store = createStore(reduce, emptyState);
+  const errands = createErrands(store.dispatch);
+  const work: Work = { host, analyst, store, errands, watch: createWatch(host, store.dispatch), edition };
+  const commands: Commands = {
+    open: () => guard(() => listPlaces(work)),
+    read: (where) => guard(() => readData(work, where)),
+    answer: () => guard(() => findAnswer(work)),
+    write: (kind) => guard(() => writeSheet(work, kind)),
+    redo: () => guard(() => redo(work)),
+    goTo: (address) => guard(() => goToCell(work, address)),
+    cancel: errands.cancel,
+  };
+  return { store, commands };
+}
+
+async function redo(work: Work): Promise<void> {
+  await findAnswer(work);
+  const { written, answered } = work.store.get();
+  if (written?.outdated === true && answered?.outdated === null) await writeSheet(work, written.kind);
+}

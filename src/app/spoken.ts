@@ -1,0 +1,19 @@
+import type { Answer } from "../core/answer/answer.ts";
+import type { DataInHand } from "./dataInHand.ts";
+import type { PaneState, Written } from "./state.ts";
+
+/** Tells screen readers something, once each time it happens. */
+export const announce = (state: PaneState, text: string): PaneState => ({
+  ...state,
+  said: { text, count: state.said.count + 1 },
+});
+
+export const readWords = ({ address, source }: DataInHand): string =>
+  `Read ${source.rowCount} rows and ${source.columns.length} columns from ${address}.`;
+
+export const answeredWords = ({ verdict }: Answer): string => `The answer is ready. ${verdict.join(" ")}`;
+
+export const changedWords = (cell: string): string => `${cell} has changed. The answer is out of date.`;
+
+export const writtenWords = ({ sheet, kind }: Written): string =>
+  `Written to the sheet ${sheet}, ${kind === "live" ? "as formulas that follow the cells" : "as values that stay"}.`;

@@ -1,0 +1,71 @@
+import type { Answer } from "../core/answer/answer.ts";
+import type { Question } from "../core/answer/question.ts";
+import type { Problem } from "../core/problem/problem.ts";
+import type { SheetKind } from "../sheet/answerSheet.ts";
+import type { DataInHand } from "./dataInHand.ts";
+import type { DataPlace, Progress } from "./host.ts";
+import type { Setup } from "./setup.ts";
+
+export type Section = "data" | "answer" | "evidence";
+
+/** What is under way; one thing at a time. */
+export interface Busy {
+  readonly with: "reading" | "answering" | "writing";
+  readonly progress: Progress;
+}
+
+/** Why figures that are shown no longer tell what the sheet and the set-up say. */
+export type Outdated = { readonly because: "cells"; readonly cell: string } | { readonly because: "set-up" };
+
+export interface Answered {
+  readonly answer: Answer;
+  readonly question: Question;
+  /** The set-up that asked it. */
+  readonly setup: Setup;
+  /** Where its data stand, "Months!A1:D97". */
+  readonly address: string;
+  /** The sheet row of its headings, from 0. */
+  readonly headingRow: number | null;
+  readonly outdated: Outdated | null;
+}
+
+/** A result sheet written from this pane. */
+export interface Written {
+  readonly sheet: string;
+  readonly kind: SheetKind;
+  /** Whether it holds an earlier answer than the one shown: only a kept sheet can. */
+  readonly outdated: boolean;
+}
+
+export type Fault =
+  | { readonly kind: "problem"; readonly problem: Problem }
+  /** A fault of the add-in's own, with what a report of it needs. */
+  | { readonly kind: "bug"; readonly details: string };
+
+export interface PaneState {
+  readonly section: Section;
+  /** Counts how often the user was taken to a section, so that focus can follow. */
+  readonly arrivals: number;
+  readonly places: readonly DataPlace[];
+  readonly data: DataInHand | null;
+  readonly setup: Setup | null;
+  readonly answered: Answered | null;
+  readonly written: Written | null;
+  readonly busy: Busy | null;
+  readonly fault: Fault | null;
+  /** What a screen reader is told; counted, so that the same words can be said twice. */
+  readonly said: { readonly text: string; readonly count: number };
+}
+
+export const emptyState: PaneState = {
+  section: "data",
+  arrivals: 0,
+  places: [],
+  data: null,
+  setup: null,
+  answered: null,
+  written: null,
+  busy: null,
+  fault: null,
+  said: { text: "", count: 0 },
+};

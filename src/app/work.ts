@@ -1,0 +1,25 @@
+import type { Problem } from "../core/problem/problem.ts";
+import type { Action } from "./actions.ts";
+import type { Analyst } from "./analyst.ts";
+import type { Errands } from "./errands.ts";
+import type { Host } from "./host.ts";
+import type { PaneState } from "./state.ts";
+import type { Store } from "./store.ts";
+import type { Watch } from "./watching.ts";
+import type { Edition } from "./writing.ts";
+
+/** What the pane's use cases work with. */
+export interface Work {
+  readonly host: Host;
+  readonly analyst: Analyst;
+  readonly store: Store<PaneState, Action>;
+  readonly errands: Errands;
+  readonly watch: Watch;
+  readonly edition: Edition;
+}
+
+/** Shows a fault that the user can mend; what the user cancelled is none. */
+export function fail({ store }: Pick<Work, "store">, problem: Problem): void {
+  if (problem.code === "cancelled") store.dispatch({ kind: "cancelled" });
+  else store.dispatch({ kind: "failed", fault: { kind: "problem", problem } });
+}

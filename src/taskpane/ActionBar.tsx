@@ -1,0 +1,108 @@
+import { Button, ProgressBar, Select, makeStyles, tokens } from "@fluentui/react-components";
+import { type ReactNode, useState } from "react";
+import type { Busy } from "../app/state.ts";
+import type { SheetKind } from "../sheet/answerSheet.ts";
+import { CellLink } from "./parts/CellLink.tsx";
+import { usePane } from "./paneContext.ts";
+
+const useStyles = makeStyles({
+  bar: {
+    flexShrink: 0,
+    display: "grid",
+    rowGap: tokens.spacingVerticalXS,
+    padding: `${tokens.spacingVerticalS} ${tokens.spacingHorizontalL}`,
+    borderTop: `1px solid ${tokens.colorNeutralStroke2}`,
+    backgroundColor: tokens.colorNeutralBackground2,
+    fontSize: tokens.fontSizeBase200,
+  },
+  line: {
+    display: "grid",
+    gridTemplateColumns: "1fr auto",
+    columnGap: tokens.spacingHorizontalS,
+    alignItems: "center",
+  },
+  hint: { color: tokens.colorNeutralForeground3 },
+  words: { overflow: "hidden", textOverflow: "ellipsis", whiteSpace: "nowrap" },
+});
+
+/** What can be done next, or how far the work under way has come. */
+export function ActionBar(): ReactNode {
+  const { state } = usePane();
+  if (state.busy !== null) return <Working busy={state.busy} />;
+  if (state.section === "data") return state.data === null ? null : <AskBar />;
+  return state.answered === null ? null : <WriteBar />;
+}
+
+function AskBar(): ReactNode {
+  const styles = useStyles();
+  const { commands } = usePane();
+  return (
+    <footer className={styles.bar}>
+      <Button appearance="primary" onClick={commands.answer}>
+        Get the answer
+      </Button>
+    </footer>
+  );
+}
+
+const doing: Readonly<Record<Busy["with"], string>> = {
+  reading: "Reading the cells",
+  answering: "Finding the answer",
+  writing: "Writing the sheet",
+};
+
+function Working({ busy }: { readonly busy: Busy }): ReactNode {
+  const styles = useStyles();
+  const { commands } = usePane();
+  const { what, share } = busy.progress;
+  const words = what === "" ? doing[busy.with] : what;
+  return (
+    <footer className={styles.bar}>
+      <ProgressBar aria-label={doing[busy.with]} {...(share === null ? {} : { value: share })} />
+      <div className={styles.line}>
+        <span className={styles.words}>
+          {words}
+          {share !== null && `, ${Math.round(100 * share)} %`}
+        </span>
+        <Button size="small" onClick={commands.cancel}>
+          Cancel
+        </Button>
+      </div>
+    </footer>
+  );
+}
+
+function WriteBar(): ReactNode {
+  const styles = useStyles();
+  const { state, commands } = usePane();
+  const [kind, setKind] = useState<SheetKind>("live");
+  const { written } = state;
+  return (
+    <footer className={styles.bar}>
+      <div className={styles.line}>
+        <Button appearance="primary" onClick={() => commands.write(kind)}>
+          Write to the workbook
+        </Button>
+        <Select
+          size="small"
+          aria-label="Live or kept"
+          value={kind}
+          onChange={(_, { value }) => setKind(value === "kept" ? "kept" : "live")}
+        >
+          <option value="live">live</option>
+          <option value="kept">kept</option>
+        </Select>
+      </div>
+      <span className={styles.hint}>
+        {kind === "live" ? "Live: formulas that follow the cells." : "Kept: values that stay as they are."}
+      </span>
+      {written !== null && (
+        <span>
+          Written to <CellLink address={`'${written.sheet.replaceAll("'", "''")}'!A1`}>{written.sheet}</CellLink>,{" "}
+          {written.kind}
+          {written.outdated && ", out of date"}.
+        </span>
+      )}
+    </footer>
+  );
+}

@@ -1,0 +1,34 @@
+import { makeStyles, tokens } from "@fluentui/react-components";
+import type { ReactNode } from "react";
+import type { Answer } from "../../core/answer/answer.ts";
+import { useType } from "../look/type.ts";
+import { FirmnessMark } from "./FirmnessMark.tsx";
+
+const useStyles = makeStyles({
+  list: { margin: 0, padding: 0, listStyleType: "none" },
+  item: { display: "grid", gridTemplateColumns: "16px 1fr", columnGap: tokens.spacingHorizontalS },
+  mark: { paddingTop: "7px" },
+});
+
+/** The sentences a reader takes along: one a driver, then how much the drivers account for. */
+export function Verdict({ answer }: { readonly answer: Answer }): ReactNode {
+  const styles = useStyles();
+  const type = useType();
+  const [opening] = answer.verdict;
+  return (
+    <section aria-label="Verdict">
+      <ul className={styles.list}>
+        {answer.drivers.map(
+          ({ term, sentence, firmness }) =>
+            sentence !== null && (
+              <li key={term} className={styles.item}>
+                <FirmnessMark firmness={firmness} className={styles.mark} />
+                <p className={type.verdict}>{sentence}</p>
+              </li>
+            ),
+        )}
+      </ul>
+      <p className={type.body}>{opening}</p>
+    </section>
+  );
+}

@@ -1,0 +1,58 @@
+import { makeStyles, tokens } from "@fluentui/react-components";
+import type { ReactNode } from "react";
+import type { Answer } from "../../core/answer/answer.ts";
+import { pValueInWords } from "../../core/answer/wording.ts";
+import type { Decision } from "../../core/decision/decision.ts";
+import { testWords } from "../../core/diagnostics/words.ts";
+import { useType } from "../look/type.ts";
+import { FourCases } from "../pictures/FourCases.tsx";
+import { settledBy } from "../pictures/caseGrid.ts";
+
+const useStyles = makeStyles({
+  reasons: {
+    display: "grid",
+    gridTemplateColumns: "auto 1fr",
+    columnGap: tokens.spacingHorizontalM,
+    margin: `${tokens.spacingVerticalXS} 0 ${tokens.spacingVerticalS}`,
+    fontSize: tokens.fontSizeBase200,
+    lineHeight: "18px",
+  },
+  question: { color: tokens.colorNeutralForeground3 },
+  finding: { margin: 0, fontVariantNumeric: "tabular-nums" },
+  cautions: { margin: 0, padding: 0, listStyleType: "none" },
+});
+
+/** Why these standard errors: the sentence, the four cases, and the two p-values that put the answer there. */
+export function WhichErrors({ answer }: { readonly answer: Answer }): ReactNode {
+  const styles = useStyles();
+  const type = useType();
+  const { decision, verdict } = answer;
+  return (
+    <>
+      <p className={type.body}>{verdict[1]}</p>
+      <FourCases decision={decision} />
+      <dl className={styles.reasons}>
+        <dt className={styles.question}>Spread</dt>
+        <dd className={styles.finding}>{findingOf(decision, "spread")}</dd>
+        <dt className={styles.question}>Follow-on</dt>
+        <dd className={styles.finding}>{findingOf(decision, "follow-on")}</dd>
+      </dl>
+      <ul className={styles.cautions}>
+        {decision.cautions.map((caution) => (
+          <li key={caution} className={type.remark}>
+            {caution}
+          </li>
+        ))}
+      </ul>
+    </>
+  );
+}
+
+/** "uneven: Koenker's test, p = 0.0031, tested at 10 %". */
+function findingOf(decision: Decision, question: "spread" | "follow-on"): string {
+  const found = question === "spread" ? decision.fourCase.spread : decision.fourCase.followOn;
+  const test = settledBy(decision, question);
+  if (test === null) return found;
+  const p = pValueInWords(test.pValue, decision.testLevel);
+  return `${found}: ${testWords[test.outcome.test].title}, ${p}, tested at ${Number((100 * decision.testLevel).toPrecision(6))} %`;
+}

@@ -1,0 +1,63 @@
+import type { Answer } from "../../core/answer/answer.ts";
+import { confidenceInWords, decimalsFor, numberInWords, pValueInWords } from "../../core/answer/wording.ts";
+import type { ErrorsChoice } from "../../core/covariance/choice.ts";
+import type { InferenceTable } from "../../core/inference/inference.ts";
+import { referenceInWords } from "../../core/answer/tables.ts";
+
+/** One kind of standard errors beside the others, for one term. */
+export interface KindFigures {
+  readonly kind: ErrorsChoice["kind"];
+  readonly label: string;
+  readonly inForce: boolean;
+  readonly standardError: number;
+  readonly ratio: number;
+  readonly pValue: number;
+  readonly pValueNormal: number;
+  readonly low: number;
+  readonly high: number;
+  readonly reference: string;
+}
+
+/** The kinds that the answer has, in the trade's order. The kind in force shows the figures in force. */
+export function kindFigures({ inference, decision }: Answer, index: number): readonly KindFigures[] {
+  const kinds: readonly (readonly [ErrorsChoice["kind"], string, InferenceTable | null])[] = [
+    ["classical", "classical", inference.classical],
+    ["white", "White", inference.white],
+    ["newey-west", "Newey-West", inference.neweyWest],
+    ["grouped", "grouped", inference.grouped],
+  ];
+  return kinds.flatMap(([kind, label, own]) => {
+    if (own === null) return [];
+    const inForce = kind === decision.inForce.errors.kind;
+    return [{ kind, label, inForce, ...figuresAt(inForce ? inference.inForce : own, index) }];
+  });
+}
+
+const figuresAt = (table: InferenceTable, index: number) => ({
+  standardError: table.standardErrors[index]!,
+  ratio: table.ratio[index]!,
+  pValue: table.pValue[index]!,
+  pValueNormal: table.pValueNormal[index]!,
+  low: table.low[index]!,
+  high: table.high[index]!,
+  reference: referenceInWords(table.reference),
+});
+
+/** Figures of one term are all written to what the standard error in force supports. */
+export function writerFor({ low, high }: Pick<KindFigures, "low" | "high">): (value: number) => string {
+  const decimals = decimalsFor((high - low) / 2);
+  return (value) => numberInWords(value, decimals).replace("-", "−");
+}
+
+/** What the picture of the intervals shows, for those who do not see it. */
+export function intervalsInWords(answer: Answer, index: number): string {
+  const kinds = kindFigures(answer, index);
+  const write = writerFor(answer.drivers[index]!);
+  const intervals = kinds.map(
+    ({ label, low, high, inForce }) => `${label}${inForce ? " (in force)" : ""} from ${write(low)} to ${write(high)}`,
+  );
+  return `${confidenceInWords(answer.options.level)} intervals of ${answer.terms[index] ?? ""}: ${intervals.join("; ")}.`;
+}
+
+/** "p = 0.034", held against the level at which an effect is called shown. */
+export const pInWords = (pValue: number, { options }: Answer): string => pValueInWords(pValue, options.level);

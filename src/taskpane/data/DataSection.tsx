@@ -1,0 +1,58 @@
+import type { ReactNode } from "react";
+import { useType } from "../look/type.ts";
+import { Disclosure } from "../parts/Disclosure.tsx";
+import { SectionTitle } from "../parts/SectionTitle.tsx";
+import { usePane } from "../paneContext.ts";
+import { ChangedNotice } from "./ChangedNotice.tsx";
+import { ColumnList } from "./ColumnList.tsx";
+import { PlaceChooser } from "./PlaceChooser.tsx";
+import { RowsAre } from "./RowsAre.tsx";
+import { WhatIsUsed } from "./WhatIsUsed.tsx";
+import { WayToAnswer } from "./WayToAnswer.tsx";
+
+/** From cells to a question: which data, what each column is, what rows are to each other. */
+export function DataSection(): ReactNode {
+  const type = useType();
+  const { data, setup } = usePane().state;
+  if (data === null || setup === null) return <FirstRun />;
+  const { address, source, notes } = data;
+  return (
+    <>
+      <SectionTitle>{address}</SectionTitle>
+      <p className={type.remark}>
+        {source.rowCount.toLocaleString("en-US")} rows, {source.columns.length} columns
+      </p>
+      {notes.map((note) => (
+        <p key={note} className={type.remark}>
+          {note}
+        </p>
+      ))}
+      <ChangedNotice />
+      <Disclosure key={address} label="Choose other data">
+        <PlaceChooser />
+      </Disclosure>
+      <h2 className={type.head}>Columns</h2>
+      <ColumnList />
+      <h2 className={type.head}>Rows are</h2>
+      <RowsAre />
+      <WhatIsUsed />
+      <WayToAnswer />
+    </>
+  );
+}
+
+function FirstRun(): ReactNode {
+  const type = useType();
+  return (
+    <>
+      <SectionTitle>What holds, and how firmly?</SectionTitle>
+      <p className={type.verdict}>
+        Footing fits a regression to your cells, tests which standard errors may be used, and says in plain words what
+        holds for each driver.
+      </p>
+      <p className={type.remark}>Select the columns with their headings, or one cell among them.</p>
+      <PlaceChooser />
+      <p className={type.footnote}>All of it is computed on this computer. Nothing is sent anywhere.</p>
+    </>
+  );
+}

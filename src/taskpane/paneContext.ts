@@ -1,0 +1,19 @@
+import { createContext, useContext } from "react";
+import type { Action } from "../app/actions.ts";
+import type { Commands } from "../app/pane.ts";
+import type { PaneState } from "../app/state.ts";
+
+/** What every part of the pane shows and can ask for. */
+export interface PaneView {
+  readonly state: PaneState;
+  readonly dispatch: (action: Action) => void;
+  readonly commands: Commands;
+}
+
+export const PaneContext = createContext<PaneView | null>(null);
+
+export function usePane(): PaneView {
+  const view = useContext(PaneContext);
+  if (view === null) throw new Error("A part of the pane stands outside of it.");
+  return view;
+}

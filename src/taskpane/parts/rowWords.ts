@@ -1,0 +1,22 @@
+import type { RowsSummary } from "../../core/answer/answer.ts";
+
+/** "3 rows", "1 row", thousands apart. */
+export const counted = (number: number, word: string): string =>
+  `${number.toLocaleString("en-US")} ${word}${number === 1 ? "" : "s"}`;
+
+/** What rows are to each other, after "94 rows": ", monthly from January 2018 to December 2025, no gaps". */
+export function rowsInWords(rows: RowsSummary): string {
+  switch (rows.kind) {
+    case "cases":
+      return "each a separate case";
+    case "groups":
+      return `in ${rows.groups} groups by ${rows.by}`;
+    case "time": {
+      const gaps = rows.gaps === 0 ? "no gaps" : `${counted(rows.gaps, "gap")}: ${gapList(rows)}`;
+      return `${rows.period.name} from ${rows.first} to ${rows.last}, ${gaps}`;
+    }
+  }
+}
+
+const gapList = ({ gaps, gapLabels }: Extract<RowsSummary, { kind: "time" }>): string =>
+  [...gapLabels, ...(gaps > gapLabels.length ? [`${gaps - gapLabels.length} more`] : [])].join(", ");

@@ -1,0 +1,41 @@
+/** A straight scale from values to per cent of a picture's width or height. */
+export interface Scale {
+  readonly low: number;
+  readonly high: number;
+  readonly percent: (value: number) => number;
+}
+
+export function scaleOver(values: readonly number[], margin = 0.06): Scale {
+  const first = Math.min(...values);
+  const last = Math.max(...values);
+  // One value alone still needs a width: a tenth of itself, or one.
+  const span = last > first ? last - first : Math.abs(first) / 10 || 1;
+  const low = first - margin * span;
+  const high = last + margin * span;
+  return { low, high, percent: (value) => ((value - low) / (high - low)) * 100 };
+}
+
+/** A place on a scale as SVG takes it. */
+export const percentOf = (scale: Scale, value: number): string => `${scale.percent(value).toFixed(2)}%`;
+
+/** How the ticks of an axis are written: short, without rounding dust. */
+export const tickLabel = (tick: number): string =>
+  (tick !== 0 && Math.abs(tick) < smallestPlain ? tick.toExponential() : compact.format(tick)).replace("-", "−");
+
+const smallestPlain = 1e-4;
+const compact = new Intl.NumberFormat("en-US", { maximumSignificantDigits: 5, notation: "compact" });
+
+const roundSteps = [1, 2, 2.5, 5, 10];
+
+/** Round values inside the scale, about `wanted` of them. */
+export function roundTicks({ low, high }: Scale, wanted: number): readonly number[] {
+  const rough = (high - low) / wanted;
+  const power = 10 ** Math.floor(Math.log10(rough));
+  const step = power * (roundSteps.find((size) => size * power >= rough) ?? 10);
+  const first = Math.ceil(low / step);
+  const last = Math.floor(high / step);
+  return Array.from({ length: Math.max(0, last - first + 1) }, (_, index) => tidy((first + index) * step));
+}
+
+/** Takes off the rounding dust of a product, so that 0.30000000000000004 reads 0.3. */
+const tidy = (value: number): number => Number(value.toPrecision(12));
