@@ -1,0 +1,103 @@
+import type { Analyst } from "../app/analyst.ts";
+import { fingerprint } from "../app/fingerprint.ts";
+import type { Errand, Host } from "../app/host.ts";
+import { sheetFactsOf } from "../app/sheetFacts.ts";
+import type { Answer } from "../core/answer/answer.ts";
+import { type Result, failure, success } from "../core/problem/result.ts";
+import type { BookData } from "../desk/book/bookData.ts";
+import { addSheets } from "../desk/files/addSheets.ts";
+import { saveXlsx } from "../desk/files/saveXlsx.ts";
+import { planAnswer } from "../sheet/answerSheet.ts";
+import type { AnswerCommand } from "./arguments.ts";
+import { answerJson } from "./answerJson.ts";
+import { type BookFile, openBookFile } from "./bookFile.ts";
+import type { FileAccess } from "./fileAccess.ts";
+import { type Asked, questionOf } from "./question.ts";
+import { report } from "./report.ts";
+
+/** A workbook opened in the desk, for as long as a command needs it. */
+export interface OpenBook {
+  readonly host: Host;
+  readonly snapshot: () => Promise<BookData>;
+  readonly close: () => void;
+}
+
+/** What the command needs of the world outside. */
+export interface Surroundings {
+  readonly files: FileAccess;
+  readonly openBook: (book: BookData) => Promise<OpenBook>;
+  readonly analyst: Analyst;
+  readonly today: () => string;
+  readonly version: string;
+}
+
+const quiet: Errand = { signal: new AbortController().signal, progress: () => undefined };
+
+/** Carries out `footing answer`. @returns what is printed on standard output. */
+export async function answerCommand(command: AnswerCommand, world: Surroundings): Promise<Result<string>> {
+  const file = await openBookFile(command.book, world.files);
+  if (!file.ok) return file;
+  const opened = await world.openBook(file.value.book);
+  const answered = await answerIn(opened, command, world);
+  if (!answered.ok) return answered;
+  const { asked, answer } = answered.value;
+  const saved =
+    command.save === null ? success(null) : await save({ opened, asked, answer, file: file.value, command }, world);
+  opened.close();
+  if (!saved.ok) return saved;
+  const savedAs = saved.value === null ? [] : [`Sheet "${saved.value}" is in ${command.save ?? ""}.`];
+  return success(command.json ? JSON.stringify(answerJson(answer), null, 2) : report(answer, savedAs));
+}
+
+interface Answered {
+  readonly asked: Asked;
+  readonly answer: Answer;
+}
+
+async function answerIn(
+  opened: OpenBook,
+  command: AnswerCommand,
+  { analyst }: Surroundings,
+): Promise<Result<Answered>> {
+  const asked = await questionOf(opened.host, command, quiet);
+  if (!asked.ok) return asked;
+  const answer = await analyst.analyse(asked.value.question, quiet);
+  return answer.ok ? success({ asked: asked.value, answer: answer.value }) : answer;
+}
+
+interface Saving extends Answered {
+  readonly opened: OpenBook;
+  readonly file: BookFile;
+  readonly command: AnswerCommand;
+}
+
+/** Writes the result sheet through the same adapter as in Excel, then puts it into a copy of the file. */
+async function save({ opened, asked, answer, file, command }: Saving, world: Surroundings): Promise<Result<string>> {
+  const { question, table } = asked;
+  const made = {
+    date: world.today(),
+    version: world.version,
+    fingerprint: await fingerprint(question.source.columns),
+    headingRow: table.headingRow,
+  };
+  const plan = planAnswer(answer, sheetFactsOf(question, made), command.live ? "live" : "kept");
+  const written = await opened.host.write(plan, quiet);
+  if (!written.ok) return written;
+  const book = await opened.snapshot();
+  const { sheet } = written.value;
+  const bytes = await copyWith(book, file, sheet);
+  if (!bytes.ok) return failure({ code: "unreadable-file", file: command.book, because: bytes.because });
+  const stored = await world.files.write(command.save ?? "", bytes.value);
+  return stored.ok
+    ? success(sheet)
+    : failure({ code: "unwritable-file", file: command.save ?? "", because: stored.because });
+}
+
+/** A copy of an .xlsx file keeps all that is in it; a .csv file becomes a workbook. */
+async function copyWith(book: BookData, { original }: BookFile, sheet: string): ReturnType<typeof addSheets> {
+  if (original === null) return { ok: true, value: await saveXlsx(book) };
+  return addSheets(
+    original,
+    book.sheets.filter(({ name }) => name === sheet),
+  );
+}

@@ -1,0 +1,64 @@
+import type { Answer } from "../core/answer/answer.ts";
+import { answerTable, choiceText, verdictLines } from "../core/answer/tables.ts";
+import { listInWords } from "../core/answer/wording.ts";
+import { cautionLine } from "../sheet/plainWordsSection.ts";
+
+const mostListed = 10;
+
+/** What a person reads in the terminal: the verdict, the drivers, what was left out. */
+export function report(answer: Answer, closing: readonly string[]): string {
+  const verdict = verdictLines(answer).map(wrapped);
+  return [
+    answer.title,
+    "",
+    ...verdict,
+    "",
+    choiceText(answer),
+    "",
+    ...table(answer),
+    "",
+    ...leftOut(answer),
+    ...answer.notes,
+    ...closing,
+    cautionLine,
+  ]
+    .filter((line, index, lines) => line !== "" || lines[index - 1] !== "")
+    .join("\n");
+}
+
+const lineLength = 100;
+
+/** Sentences wrapped at words. */
+function wrapped(sentence: string): string {
+  const lines: string[] = [];
+  for (const word of sentence.split(" ")) {
+    const last = lines.at(-1);
+    if (last !== undefined && last.length + word.length < lineLength) lines[lines.length - 1] = `${last} ${word}`;
+    else lines.push(word);
+  }
+  return lines.join("\n  ");
+}
+
+/** Drivers in columns, numbers to five significant digits. */
+function table(answer: Answer): string[] {
+  const cells = answerTable(answer).map((row) =>
+    row.map((value) => (typeof value === "number" ? shown(value) : value)),
+  );
+  const widths = (cells[0] ?? []).map((_, column) => Math.max(...cells.map((row) => (row[column] ?? "").length)));
+  return cells.map((row) =>
+    row
+      .map((value, column) => (column === 0 ? value.padEnd(widths[column] ?? 0) : value.padStart(widths[column] ?? 0)))
+      .join("  ")
+      .trimEnd(),
+  );
+}
+
+const shown = (value: number): string => String(Number(value.toPrecision(5)));
+
+function leftOut({ leftOut: rows, leftOutCount }: Answer): string[] {
+  if (leftOutCount === 0) return [];
+  const listed = rows.slice(0, mostListed).map(({ cell, because }) => `${cell} (${because})`);
+  const more = leftOutCount - listed.length;
+  const all = more > 0 ? [...listed, `${more} more`] : listed;
+  return [wrapped(`Rows left out: ${leftOutCount}: ${listInWords(all)}.`)];
+}
