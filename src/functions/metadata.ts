@@ -18,7 +18,7 @@ const functionMetadata = ({ id, description, parameters, gives }: FunctionSpec) 
   description: `${description} ${gives}`,
   helpUrl: `${address}/help.html#${id.toLowerCase()}`,
   parameters: parameters.map(parameterMetadata),
-  result: { dimensionality: "matrix" },
+  result: { dimensionality: "matrix" as const },
   options: { cancelable: true },
 });
 
@@ -26,7 +26,9 @@ const parameterMetadata = ({ name, description, shape, optional }: ParameterSpec
   name,
   description,
   /** No conversion: a blank, a zero, a text and an error stay what they are. */
-  type: "any",
-  dimensionality: shape === "cells" ? "matrix" : "scalar",
+  type: "any" as const,
+  dimensionality: dimensionalities[shape],
   optional,
 });
+
+const dimensionalities = { cells: "matrix", "one value": "scalar" } as const;
