@@ -3,6 +3,7 @@ import { monthNames } from "../table/calendar.ts";
 import type { Term } from "./design.ts";
 import type { Ingredient, Lack } from "./ingredient.ts";
 import type { CalendarDriver } from "./model.ts";
+import { presentIn, valuesAt } from "./rows.ts";
 import type { Timeline } from "./timeline.ts";
 
 /**
@@ -22,7 +23,7 @@ export function calendarDriver(driver: CalendarDriver, timeline: Timeline | null
 }
 
 const ingredient = ({ positions }: Timeline, terms: Ingredient["terms"]): Ingredient => ({
-  present: Uint8Array.from(positions, (position) => (position < 0 ? 0 : 1)),
+  present: presentIn(positions),
   lackOf: noTime,
   terms,
   notes: [],
@@ -35,7 +36,7 @@ function noTime(row: number): Lack {
 
 function trendTerm(rows: Int32Array, positions: Int32Array, unit: string): Result<readonly Term[]> {
   const first = rows.reduce((least, row) => Math.min(least, positions[row]!), Infinity);
-  const values = Float64Array.from(rows, (row) => positions[row]! - first);
+  const values = valuesAt(rows, (row) => positions[row]! - first);
   return success([{ name: "trend", meaning: { kind: "trend", unit }, values }]);
 }
 
@@ -46,7 +47,7 @@ interface Season {
 }
 
 function seasonTerms(driver: CalendarDriver, rows: Int32Array, { read, names }: Season): Result<readonly Term[]> {
-  const seasons = Uint8Array.from(rows, (row) => read(row));
+  const seasons = valuesAt(rows, read);
   const used = names.flatMap((_, index) => (seasons.includes(index + 1) ? [index + 1] : []));
   const base = names[used[0]! - 1]!;
   if (used.length === 1) return failure({ code: "one-category", column: driver, value: base });
@@ -54,7 +55,7 @@ function seasonTerms(driver: CalendarDriver, rows: Int32Array, { read, names }: 
     used.slice(1).map((season) => ({
       name: names[season - 1]!,
       meaning: { kind: "season", level: names[season - 1]!, base },
-      values: Float64Array.from(seasons, (one) => (one === season ? 1 : 0)),
+      values: seasons.map((one) => (one === season ? 1 : 0)),
     })),
   );
 }

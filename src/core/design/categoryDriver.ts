@@ -4,6 +4,7 @@ import { type LevelCells, readLevelCells } from "../table/levelCells.ts";
 import type { Column } from "../table/source.ts";
 import type { Term } from "./design.ts";
 import { type Ingredient, missingCell } from "./ingredient.ts";
+import { presentIn, valuesAt } from "./rows.ts";
 
 /**
  * A driver of categories in treatment coding: one term for each level but the base, 1 in its rows and 0 elsewhere.
@@ -16,7 +17,7 @@ export function categoryDriver(column: Column, base: string | null): Result<Ingr
   if (!read.ok) return read;
   const { codes } = read.value;
   return success({
-    present: Uint8Array.from(codes, (code) => (code < 0 ? 0 : 1)),
+    present: presentIn(codes),
     lackOf: (row) => missingCell(column, row),
     terms: (rows) => levelTerms(column, read.value, { base, rows }),
     notes: likenessNotes(column, read.value),
@@ -48,7 +49,7 @@ function levelTerms({ name }: Column, { codes, levels }: LevelCells, { base, row
       .map((code) => ({
         name: `${name}: ${levels[code]!}`,
         meaning: { kind: "level", column: name, level: levels[code]!, base: baseLevel },
-        values: Float64Array.from(rows, (row) => (codes[row] === code ? 1 : 0)),
+        values: valuesAt(rows, (row) => (codes[row] === code ? 1 : 0)),
       })),
   );
 }

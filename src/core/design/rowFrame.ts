@@ -4,6 +4,7 @@ import type { Column, Source } from "../table/source.ts";
 import { findColumn } from "./columns.ts";
 import { type Ingredient, missingCell } from "./ingredient.ts";
 import type { RowsAre } from "./model.ts";
+import { presentIn } from "./rows.ts";
 import { type Sequence, earlierRows, sequenceOf } from "./sequence.ts";
 import { type Timeline, columnTimeline, rowTimeline } from "./timeline.ts";
 import type { LookBack } from "./transforms.ts";
@@ -92,7 +93,7 @@ export const groupIngredients = ({ groups, second }: RowFrame): Ingredient[] =>
   [groups, second]
     .filter((grouping) => grouping !== null)
     .map(({ column, cells }) => ({
-      present: Uint8Array.from(cells.codes, (code) => (code < 0 ? 0 : 1)),
+      present: presentIn(cells.codes),
       lackOf: (row) => missingCell(column, row),
       terms: () => success([]),
       notes: [],

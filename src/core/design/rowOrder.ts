@@ -9,14 +9,14 @@ import type { Timeline } from "./timeline.ts";
  * @param rows - the source rows used, in design order.
  * @returns Problem "one-group" where all of them belong to the same.
  */
-export function rowOrderOf({ groups, second, timeline }: RowFrame, rows: Int32Array): Result<RowOrder> {
+export function rowOrderOf({ groups, second, timeline }: RowFrame, rows: Int32Array<ArrayBuffer>): Result<RowOrder> {
   if (groups !== null) return groupOrder({ groups, second, timeline }, rows);
   return success(timeline === null ? { kind: "cases" } : timeOrder(timeline, rows));
 }
 
-function timeOrder({ positions, period, labelOf }: Timeline, rows: Int32Array): RowOrder {
+function timeOrder({ positions, period, labelOf }: Timeline, rows: Int32Array<ArrayBuffer>): RowOrder {
   const first = positions[rows[0]!]!;
-  const used = Int32Array.from(rows, (row) => positions[row]! - first);
+  const used = rows.map((row) => positions[row]! - first);
   const label = (position: number): string => labelOf(position + first);
   return {
     kind: "time",
@@ -29,7 +29,7 @@ function timeOrder({ positions, period, labelOf }: Timeline, rows: Int32Array): 
 
 type GroupFrame = Pick<RowFrame, "second" | "timeline"> & { readonly groups: Grouping };
 
-function groupOrder({ groups, second, timeline }: GroupFrame, rows: Int32Array): Result<RowOrder> {
+function groupOrder({ groups, second, timeline }: GroupFrame, rows: Int32Array<ArrayBuffer>): Result<RowOrder> {
   const by = regrouped(groups, rows);
   const across = second === null ? null : regrouped(second, rows);
   for (const [grouping, { labels }] of [
@@ -49,18 +49,18 @@ function groupOrder({ groups, second, timeline }: GroupFrame, rows: Int32Array):
   });
 }
 
-function fromZero(positions: Int32Array, rows: Int32Array): Int32Array<ArrayBuffer> {
+function fromZero(positions: Int32Array, rows: Int32Array<ArrayBuffer>): Int32Array<ArrayBuffer> {
   const first = rows.reduce((least, row) => Math.min(least, positions[row]!), Infinity);
-  return Int32Array.from(rows, (row) => positions[row]! - first);
+  return rows.map((row) => positions[row]! - first);
 }
 
 /** Groups numbered anew, without those that lost all their rows. */
-function regrouped({ cells: { codes, levels } }: Grouping, rows: Int32Array) {
+function regrouped({ cells: { codes, levels } }: Grouping, rows: Int32Array<ArrayBuffer>) {
   const occurs = new Uint8Array(levels.length);
   for (const row of rows) occurs[codes[row]!] = 1;
   const numbers = new Int32Array(levels.length);
   const labels = levels.filter((_, code) => occurs[code] === 1);
   let next = 0;
   for (let code = 0; code < levels.length; code++) if (occurs[code] === 1) numbers[code] = next++;
-  return { groups: Int32Array.from(rows, (row) => numbers[codes[row]!]!), labels };
+  return { groups: rows.map((row) => numbers[codes[row]!]!), labels };
 }

@@ -1,6 +1,7 @@
 import { type Result, failure, success } from "../problem/result.ts";
 import type { LevelCells } from "../table/levelCells.ts";
 import { spotsOf } from "../table/spots.ts";
+import { everyRow, keptRows, presentIn } from "./rows.ts";
 import type { Timeline } from "./timeline.ts";
 
 /** All rows that have a time (and a group), by group and by time within it. */
@@ -37,8 +38,9 @@ export function sequenceOf(timeline: Timeline, groups: LevelCells | null): Resul
 }
 
 function rowsWithTime(positions: Int32Array, codes: Int32Array | null): Int32Array<ArrayBuffer> {
-  const rows = Int32Array.from({ length: positions.length }, (_, row) => row);
-  return rows.filter((row) => positions[row]! >= 0 && (codes === null || codes[row]! >= 0));
+  const usable = presentIn(positions);
+  for (let row = 0; codes !== null && row < usable.length; row++) if (codes[row]! < 0) usable[row] = 0;
+  return keptRows(everyRow(positions.length), usable);
 }
 
 /**

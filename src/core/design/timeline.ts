@@ -9,6 +9,7 @@ import { spotsOf } from "../table/spots.ts";
 import { isSlashedDate } from "../table/timeTexts.ts";
 import { type TimeCells, readTimeCells, timeState } from "../table/timeCells.ts";
 import { timesIn } from "../table/timesFound.ts";
+import { everyRow } from "./rows.ts";
 
 /** Where each row of a source stands in time. */
 export interface Timeline {
@@ -30,7 +31,7 @@ export interface Timeline {
 export const rowTimeline = ({ rowCount, columns }: Source): Timeline => ({
   column: null,
   period: rowByRow,
-  positions: Int32Array.from({ length: rowCount }, (_, row) => row),
+  positions: everyRow(rowCount),
   labelOf: (position) => `row ${columns[0] === undefined ? position + 1 : rowNumberOf(columns[0].place, position)}`,
   monthOf: null,
   quarterOf: null,

@@ -43,6 +43,7 @@ export function transformed(
   const raw = tooLarge(source.column, source.numbers);
   if (raw !== null) return raw;
   const made = applied(source, transform, lookBack);
+  if (transform.kind === "none") return made;
   return (made.ok ? tooLarge(source.column, made.value) : null) ?? made;
 }
 
@@ -50,8 +51,9 @@ export function transformed(
 const largest = 1e150;
 
 function tooLarge({ name, place }: Column, { values, present }: Pick<NumberCells, "values" | "present">) {
-  const row = values.findIndex((value, i) => present[i] === 1 && !(Math.abs(value) <= largest));
-  if (row < 0) return null;
+  let row = 0;
+  while (row < values.length && (present[row] === 0 || Math.abs(values[row]!) <= largest)) row++;
+  if (row === values.length) return null;
   return failure({ code: "numbers-too-large", column: name, cell: cellOf(place, row), value: values[row]! });
 }
 

@@ -6,6 +6,7 @@ import { spotsOf } from "../table/spots.ts";
 import type { LeftOut } from "./design.ts";
 import type { Ingredient, Lack } from "./ingredient.ts";
 import type { RowFrame } from "./rowFrame.ts";
+import { everyRow, keptRows } from "./rows.ts";
 import { type Timeline, unreadableTime } from "./timeline.ts";
 
 /** Which rows of a source are used, in design order, and which are not. */
@@ -31,11 +32,11 @@ export function chooseRows(source: Source, needs: Needs): Result<UsedRows> {
   const { ingredients, frame } = needs;
   const timeless = frame.timeline === null ? null : timeFault(frame.timeline, ingredients[0]!.present);
   if (timeless !== null) return timeless;
-  const usable = new Uint8Array(source.rowCount);
-  for (let row = 0; row < usable.length; row++) {
-    usable[row] = ingredients.every(({ present }) => present[row] === 1) ? 1 : 0;
+  const usable = new Uint8Array(source.rowCount).fill(1);
+  for (const { present } of ingredients) {
+    for (let row = 0; row < usable.length; row++) usable[row]! &= present[row]!;
   }
-  const rows = inOrder(frame, source.rowCount).filter((row) => usable[row] === 1);
+  const rows = keptRows(inOrder(frame, source.rowCount), usable);
   return success({
     rows,
     leftOut: leftOutRows(source, needs, usable),
@@ -54,7 +55,7 @@ function timeFault({ column, positions, isUnreadable }: Timeline, outcome: Uint8
 
 function inOrder({ sequence, groups }: RowFrame, rowCount: number): Int32Array<ArrayBuffer> {
   if (sequence !== null) return sequence.rows;
-  const rows = Int32Array.from({ length: rowCount }, (_, row) => row);
+  const rows = everyRow(rowCount);
   if (groups === null) return rows;
   const { codes } = groups.cells;
   return rows.sort((a, b) => codes[a]! - codes[b]! || a - b);

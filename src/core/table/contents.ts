@@ -1,5 +1,5 @@
 import { cellKind } from "./cells.ts";
-import { countSenses, sense, sensesOf } from "./senses.ts";
+import { countSenses, picked, sense, sensesOf } from "./senses.ts";
 import type { Column } from "./source.ts";
 
 /** A column's cells by sense, counted, and its values in brief. */
@@ -27,9 +27,9 @@ export interface Counts {
 export interface Values {
   /** Different values, counted up to 1,000. */
   readonly distinct: number;
-  /** At most 40 of the numbers, evenly thinned, in row order; serials for dates. */
+  /** At most 40 of the same, evenly thinned, in row order; serials for dates. */
   readonly sample: readonly number[];
-  /** Of numbers and dates; null where there is none. */
+  /** Of the numbers, or of the dates where they are the most; null where there is none. */
   readonly min: number | null;
   readonly max: number | null;
   /** Whether the numbers merely count the rows: whole, each one more than the one above. */
@@ -52,26 +52,39 @@ export function contentsOf(column: Column): Contents {
       blanks: counts[sense.blank]!,
       marks: counts[sense.mark]!,
     },
-    values: valuesOf(column, senses),
+    values: valuesOf(column, senses, counts[sense.date]! > counts[sense.number]! ? sense.date : sense.number),
   };
 }
 
 const mostDistinct = 1000;
 const sampleSize = 40;
 
-function valuesOf(column: Column, senses: Uint8Array): Values {
-  const numbers = column.cells.numbers.filter((_, row) => senses[row] === sense.number || senses[row] === sense.date);
+function valuesOf(column: Column, senses: Uint8Array, most: number): Values {
+  const numbers = picked(column.cells.numbers, senses, most);
   const step = Math.max(1, (numbers.length - 1) / (sampleSize - 1));
   const size = Math.min(numbers.length, sampleSize);
   return {
     distinct: countDistinct(column, senses),
     sample: Array.from({ length: size }, (_, i) => numbers[Math.round(i * step)]!),
-    min: numbers.length === 0 ? null : numbers.reduce((least, one) => Math.min(least, one)),
-    max: numbers.length === 0 ? null : numbers.reduce((most, one) => Math.max(most, one)),
-    counter:
-      numbers.length > 2 &&
-      numbers.every((one, i) => Number.isInteger(one) && (i === 0 || one === numbers[i - 1]! + 1)),
+    ...rangeOfNumbers(numbers),
+    counter: countsUp(numbers),
   };
+}
+
+function rangeOfNumbers(numbers: Float64Array): Pick<Values, "min" | "max"> {
+  if (numbers.length === 0) return { min: null, max: null };
+  let [min, max] = [Infinity, -Infinity];
+  for (let i = 0; i < numbers.length; i++) {
+    if (numbers[i]! < min) min = numbers[i]!;
+    if (numbers[i]! > max) max = numbers[i]!;
+  }
+  return { min, max };
+}
+
+function countsUp(numbers: Float64Array): boolean {
+  if (numbers.length < 3 || !Number.isInteger(numbers[0])) return false;
+  for (let i = 1; i < numbers.length; i++) if (numbers[i] !== numbers[i - 1]! + 1) return false;
+  return true;
 }
 
 /** Texts are told apart by their index, all else by number; the kind keeps the two from meeting. */

@@ -70,8 +70,7 @@ export function describeColumn(column: Column): ColumnDescription {
 
 function unusableFor(holds: Holding, { senses }: Contents): (row: number) => boolean {
   if (holds === "numbers") return (row) => senses[row] !== sense.number;
-  const lost: readonly number[] = [sense.blank, sense.mark, sense.error];
-  return (row) => lost.includes(senses[row]!);
+  return (row) => senses[row] === sense.blank || senses[row] === sense.mark || senses[row] === sense.error;
 }
 
 /** So many texts are enough to tell the decimal mark. */

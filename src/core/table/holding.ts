@@ -2,7 +2,7 @@ import type { CellColumn } from "./cells.ts";
 import { cellKind } from "./cells.ts";
 import type { Contents } from "./contents.ts";
 import { isYear, numberedThing, readLabel } from "./periodLabels.ts";
-import { sense } from "./senses.ts";
+import { picked, sense } from "./senses.ts";
 import type { Column } from "./source.ts";
 import { readingOf } from "./timeNumbers.ts";
 import { isSlashedDate } from "./timeTexts.ts";
@@ -49,7 +49,7 @@ function textsArePeriods({ kinds, numbers, texts }: CellColumn, senses: Uint8Arr
  * Serials of dates are not guessed here, because sheets mark dates as such.
  */
 function numbersArePeriods({ name, cells }: Column, senses: Uint8Array): boolean {
-  const numbers = cells.numbers.filter((_, row) => senses[row] === sense.number);
+  const numbers = picked(cells.numbers, senses, sense.number);
   const ascending = numbers.every((one, i) => i === 0 || one > numbers[i - 1]!);
   if (numbers.every(isYear)) return numberedThing(name) === "year" || (ascending && numbers.length >= fewestToRun);
   const { unit } = readingOf(numbers);

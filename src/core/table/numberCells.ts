@@ -26,12 +26,15 @@ export interface NumberCells {
  */
 export function readNumberCells(column: Column, decimal: DecimalMark | null): Result<NumberCells> {
   const senses = sensesOf(column.cells);
-  const fault = emptiness(column, senses) ?? misfits(column, senses);
+  const counts = countSenses(senses);
+  const fault = emptiness(column, { senses, counts }) ?? misfits(column, { senses, counts });
   if (fault !== null) return fault;
-  const agreed = decimal === null ? null : column.cells.texts.map((text) => readTextNumber(text, decimal));
-  const unread = unreadTexts(column, senses, agreed);
+  const texts = counts[sense.textNumber]!;
+  const agreed =
+    decimal === null || texts === 0 ? null : column.cells.texts.map((text) => readTextNumber(text, decimal));
+  const unread = texts === 0 ? null : unreadTexts(column, senses, agreed);
   if (unread !== null) return unread;
-  const notes = [...textNotes(column, senses), ...booleanNotes(column, senses)];
+  const notes = [...textNotes(column, { senses, counts }), ...booleanNotes(column, counts)];
   return success({ ...filled(column.cells, senses, agreed ?? []), notes });
 }
 
@@ -49,10 +52,15 @@ function filled({ numbers }: CellColumn, senses: Uint8Array, agreed: Agreed): Om
   return { values, present };
 }
 
+interface Counted {
+  readonly senses: Uint8Array;
+  /** Cells of each sense, by its byte. */
+  readonly counts: Int32Array;
+}
+
 type Fault = ReturnType<typeof failure> | null;
 
-function emptiness(column: Column, senses: Uint8Array): Fault {
-  const counts = countSenses(senses);
+function emptiness(column: Column, { senses, counts }: Counted): Fault {
   const where = rangeOf(column.place, senses.length);
   const present = senses.length - counts[sense.blank]!;
   if (present === 0) return failure({ code: "empty-column", column: column.name, where });
@@ -63,8 +71,7 @@ function emptiness(column: Column, senses: Uint8Array): Fault {
 }
 
 /** The faults of single cells, the plainest first. */
-function misfits(column: Column, senses: Uint8Array): Fault {
-  const counts = countSenses(senses);
+function misfits(column: Column, { senses, counts }: Counted): Fault {
   const among = counts[sense.number]! + counts[sense.textNumber]! + counts[sense.date]! + counts[sense.text]!;
   const at = (one: number) => (row: number) => senses[row] === one;
   if (counts[sense.error]! > 0) return failure({ code: "error-cells", ...spotsOf(column, at(sense.error)) });
@@ -97,8 +104,8 @@ function unreadTexts(column: Column, senses: Uint8Array, agreed: Agreed | null):
   return failure({ code: agreed === null ? "text-numbers" : "text-in-number-column", ...spots });
 }
 
-function textNotes(column: Column, senses: Uint8Array): string[] {
-  const count = countSenses(senses)[sense.textNumber]!;
+function textNotes(column: Column, { senses, counts }: Counted): string[] {
+  const count = counts[sense.textNumber]!;
   if (count === 0) return [];
   const example = cellInWords(column.cells, senses.indexOf(sense.textNumber));
   const texts =
@@ -106,5 +113,5 @@ function textNotes(column: Column, senses: Uint8Array): string[] {
   return [`${column.name}: ${texts}, such as "${example}".`];
 }
 
-const booleanNotes = (column: Column, senses: Uint8Array): string[] =>
-  senses.includes(sense.boolean) ? [`${column.name}: TRUE was read as 1 and FALSE as 0.`] : [];
+const booleanNotes = (column: Column, counts: Int32Array): string[] =>
+  counts[sense.boolean]! > 0 ? [`${column.name}: TRUE was read as 1 and FALSE as 0.`] : [];

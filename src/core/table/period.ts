@@ -109,7 +109,7 @@ function monthOf(serial: number): number {
 const monthEndDays = 6;
 
 function areMonthly(values: Float64Array): boolean {
-  if (values.length < 2) return false;
+  if (values.length < 2 || values.length > monthOf(values.at(-1)!) - monthOf(values[0]!) + 1) return false;
   const days = Array.from(values, (value) => calendarDay(value));
   const distinct = days.every(
     (day, i) => i === 0 || day.month !== days[i - 1]!.month || day.year !== days[i - 1]!.year,
@@ -124,6 +124,7 @@ function areMonthly(values: Float64Array): boolean {
 const weekDays = 2;
 
 function areWeekly(values: Float64Array): boolean {
+  if (values.length > weekIndexOf(values.at(-1)!) - weekIndexOf(values[0]!) + 1) return false;
   const weeks = Array.from(values, weekIndexOf);
   const distinct = weeks.every((week, i) => i === 0 || week !== weeks[i - 1]!);
   return values.length > 2 && distinct && spread(Array.from(values, weekdayOf)) <= weekDays;

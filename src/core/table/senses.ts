@@ -56,8 +56,18 @@ export const isMissingMark = (text: string): boolean => missingMarks.has(text.tr
 const errorSigns = new Set(["#DIV/0!", "#VALUE!", "#REF!", "#NAME?", "#NUM!", "#NULL!", "#SPILL!", "#CALC!"]);
 
 /** How many cells have each sense, by its byte. */
-export function countSenses(senses: Uint8Array): readonly number[] {
-  const counts = new Array<number>(Object.keys(sense).length).fill(0);
-  for (const one of senses) counts[one]!++;
+export function countSenses(senses: Uint8Array): Int32Array {
+  const counts = new Int32Array(Object.keys(sense).length);
+  for (let row = 0; row < senses.length; row++) counts[senses[row]!]!++;
   return counts;
+}
+
+/** The values of the rows whose byte is the one wanted. A typed array's own filter collects them in slow memory first. */
+export function picked(values: Float64Array, bytes: Uint8Array, wanted: number): Float64Array<ArrayBuffer> {
+  let count = 0;
+  for (let row = 0; row < bytes.length; row++) if (bytes[row] === wanted) count++;
+  const found = new Float64Array(count);
+  let next = 0;
+  for (let row = 0; row < bytes.length; row++) if (bytes[row] === wanted) found[next++] = values[row]!;
+  return found;
 }

@@ -1,6 +1,6 @@
 import { type CellColumn, cellKind } from "./cells.ts";
 import { type Moment, type TimeUnit, numberedThing } from "./periodLabels.ts";
-import { sense, sensesOf } from "./senses.ts";
+import { picked, sense, sensesOf } from "./senses.ts";
 import type { Column } from "./source.ts";
 import { firstDayOf, readingOf } from "./timeNumbers.ts";
 import { readTimeTexts } from "./timeTexts.ts";
@@ -26,7 +26,7 @@ export function readTimeCells({ name, cells }: Column): TimeCells {
   const found: Found = {
     units: new Uint8Array(senses.length).fill(noUnit),
     values: new Float64Array(senses.length),
-    states: Uint8Array.from(senses, (one) => (isMissing(one) ? timeState.missing : timeState.unreadable)),
+    states: senses.map((one) => (isMissing(one) ? timeState.missing : timeState.unreadable)),
   };
   const notes = [
     ...readDates(cells, senses, found),
@@ -70,7 +70,7 @@ function readDates({ numbers }: CellColumn, senses: Uint8Array, found: Found): s
 }
 
 function readNumbers({ numbers }: CellColumn, senses: Uint8Array, found: Found): string[] {
-  const plain = numbers.filter((_, row) => senses[row] === sense.number);
+  const plain = picked(numbers, senses, sense.number);
   if (plain.length === 0) return [];
   const { unit, read, words } = readingOf(plain);
   for (let row = 0; row < senses.length; row++) {
@@ -101,10 +101,11 @@ function readTexts({ kinds, numbers, texts }: CellColumn, senses: Uint8Array, fo
 
 /** The unit of all cells; days where several calendar units meet; running numbers only where they are the most. */
 function commonUnit(found: Uint8Array): TimeUnit {
-  const counts = units.map((_, code) => found.reduce((sum, one) => sum + (one === code ? 1 : 0), 0));
-  const numbered = counts.at(-1) ?? 0;
+  const counts = new Int32Array(noUnit + 1);
+  for (let row = 0; row < found.length; row++) counts[found[row]!]!++;
+  const numbered = counts[units.indexOf("number")]!;
   const calendar = units.filter((unit, code) => unit !== "number" && counts[code]! > 0);
-  const dated = counts.reduce((sum, count) => sum + count, 0) - numbered;
+  const dated = found.length - counts[noUnit]! - numbered;
   if (numbered > dated) return "number";
   return calendar.length === 1 ? calendar[0]! : "day";
 }

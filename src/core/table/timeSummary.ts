@@ -1,5 +1,6 @@
 import type { TimeUnit } from "./periodLabels.ts";
 import type { Period } from "./periodNames.ts";
+import { picked } from "./senses.ts";
 import { type TimeCells, timeState } from "./timeCells.ts";
 import { gapsIn, timesIn } from "./timesFound.ts";
 
@@ -27,8 +28,8 @@ export function summariseTime(cells: TimeCells): TimeSummary | null {
   const found = timesIn(cells);
   if (found === null) return null;
   const { distinct, period, positionOf, labelOf } = found;
-  const positions = Int32Array.from(distinct, positionOf);
-  const times = cells.values.filter((_, row) => cells.states[row] === timeState.read);
+  const positions = positionsOf(distinct, positionOf);
+  const times = picked(cells.values, cells.states, timeState.read);
   return {
     unit: cells.unit,
     period,
@@ -39,4 +40,10 @@ export function summariseTime(cells: TimeCells): TimeSummary | null {
     repeats: distinct.length < times.length,
     ascending: times.every((time, i) => i === 0 || time > times[i - 1]!),
   };
+}
+
+function positionsOf(distinct: Float64Array, positionOf: (time: number) => number): Int32Array {
+  const positions = new Int32Array(distinct.length);
+  for (let i = 0; i < distinct.length; i++) positions[i] = positionOf(distinct[i]!);
+  return positions;
 }

@@ -1,5 +1,6 @@
 import { findGrid } from "./period.ts";
 import { type Period, rowByRow, timeInWords } from "./periodNames.ts";
+import { picked } from "./senses.ts";
 import { type TimeCells, timeState } from "./timeCells.ts";
 
 /** The different times of a column and the periods they fall on. */
@@ -16,8 +17,7 @@ export interface TimesFound {
 
 /** @returns null where no cell could be read as a time. */
 export function timesIn({ values, states, unit, counts }: TimeCells): TimesFound | null {
-  const sorted = values.filter((_, row) => states[row] === timeState.read).sort();
-  const distinct = sorted.filter((time, i) => i === 0 || time !== sorted[i - 1]!);
+  const distinct = withoutRepeats(picked(values, states, timeState.read).sort());
   if (distinct.length === 0) return null;
   const grid = findGrid({ values: distinct, unit, counts });
   if (grid !== null) return { distinct, regular: true, ...grid };
@@ -29,6 +29,14 @@ export function timesIn({ values, states, unit, counts }: TimeCells): TimesFound
     positionOf: (time) => ranks.get(time)!,
     labelOf: (position) => timeInWords(unit === "number" ? "step" : unit, distinct[position]!),
   };
+}
+
+function withoutRepeats(sorted: Float64Array): Float64Array {
+  let kept = 0;
+  for (let i = 0; i < sorted.length; i++) {
+    if (i === 0 || sorted[i] !== sorted[kept - 1]) sorted[kept++] = sorted[i]!;
+  }
+  return sorted.subarray(0, kept);
 }
 
 /** Periods between the first and the last that have no row. */
