@@ -3,18 +3,18 @@ import { startEvents } from "../excel/events.ts";
 import { calm, type Host, type Switches } from "../excel/host.ts";
 import { raiseChanges } from "../excel/raise.ts";
 import { registerFunctions, type AddInFunctions } from "../workbook/addInFunctions.ts";
-import { recalculate, watchCalculation } from "../workbook/calculation.ts";
+import { recalculate, watchCalculation, type Calculation } from "../workbook/calculation.ts";
 import { watchChanges } from "../workbook/changes.ts";
 import type { Book } from "../workbook/book.ts";
 import type { Grid } from "../workbook/grid.ts";
 import type { BlankArrival, FunctionsMetadata } from "../workbook/metadata.ts";
 import { openBook } from "../workbook/openBook.ts";
-import { startCalls } from "../workbook/pendingCalls.ts";
+import { startCalls, type CallDoors } from "../workbook/pendingCalls.ts";
 import { snapshotOf } from "../workbook/snapshot.ts";
 import { growTo } from "../workbook/write.ts";
 import { callTexts, cancelText, eventText, outcomeOf } from "./callTexts.ts";
 import { hands, type Hands } from "./hands.ts";
-import { serveRequests } from "./serve.ts";
+import { serveRequests, type Server } from "./serve.ts";
 import type { Transport } from "./transport.ts";
 
 export interface DeskOptions {
@@ -44,56 +44,65 @@ const standardNamespace = "FOOTING";
 
 /** Opens a workbook in a grid and answers the add-in at the other end of the line. */
 export function startDesk(grid: Grid, line: Transport, options: DeskOptions): Desk {
-  const arrival = { blank: options.blank ?? null };
-  const messages = new Map<string, string>();
-  const switches = calm(options.profile ?? "desktop");
-  const calls = startCalls({
-    make: (asked) => callTexts(asked, options.functions).forEach(line.send),
-    cancel: (ids) => line.send(cancelText(ids)),
-    arrived: (results) => {
-      for (const { fills } of results) growTo(book, fills);
-      recalculate(
-        book,
-        results.map(({ cell }) => cell),
-      );
-    },
-  });
-  const add: AddInFunctions = {
-    namespace: options.namespace ?? standardNamespace,
-    metadata: options.functions ?? { functions: [] },
-    calls,
-    arrival,
-    messages,
+  const functions = functionsOf(line, options, (results) => take(results));
+  const book = openBook(grid, options.book, (opened) => registerFunctions(opened, functions));
+  const take = (results: Arrived): void => {
+    for (const { fills } of results) growTo(book, fills);
+    recalculate(
+      book,
+      results.map(({ cell }) => cell),
+    );
   };
-  const book = openBook(grid, options.book, (opened) => registerFunctions(opened, add));
   const calculation = watchCalculation(book);
-  calculation.onFinished(calls.settle);
+  calculation.onFinished(functions.calls.settle);
   const server = serveRequests(line);
-  const events = startEvents((event) => server.after(eventText(event)));
-  const host: Host = {
-    book,
-    switches,
-    events,
-    references: { kept: new Map(), given: 0 },
-    isCalculating: calculation.busy,
-    calculated: () => until(() => !calculation.busy()),
-    takeResults: (results) => calls.answer(results.map((result) => [result[0], outcomeOf(result)] as const)),
-  };
+  const host = hostOf(book, { calculation, functions, server, profile: options.profile ?? "desktop" });
   book.listeners.add((change) => raiseChanges(host, change));
   const stopWatching = watchChanges(book);
   server.answer(host);
   return {
-    ...hands(host, messages),
+    ...hands(host, functions.messages),
     book,
     host,
-    switches,
-    arrival,
-    settle: () => until(() => !calculation.busy() && calls.waiting() === 0 && !server.busy()),
+    switches: host.switches,
+    arrival: functions.arrival,
+    settle: () => until(() => !calculation.busy() && functions.calls.waiting() === 0 && !server.busy()),
     snapshot: () => snapshotOf(book),
     stop: () => {
       stopWatching();
       calculation.stop();
     },
+  };
+}
+
+type Arrived = Parameters<CallDoors["arrived"]>[0];
+
+function functionsOf(line: Transport, options: DeskOptions, arrived: CallDoors["arrived"]): AddInFunctions {
+  const { functions = { functions: [] }, namespace = standardNamespace, blank = null } = options;
+  const calls = startCalls({
+    make: (asked) => callTexts(asked, functions).forEach(line.send),
+    cancel: (ids) => line.send(cancelText(ids)),
+    arrived,
+  });
+  return { namespace, metadata: functions, calls, arrival: { blank }, messages: new Map() };
+}
+
+interface Parts {
+  readonly calculation: Calculation;
+  readonly functions: AddInFunctions;
+  readonly server: Server;
+  readonly profile: Switches["profile"];
+}
+
+function hostOf(book: Book, { calculation, functions, server, profile }: Parts): Host {
+  return {
+    book,
+    switches: calm(profile),
+    events: startEvents((event) => server.after(eventText(event))),
+    references: { kept: new Map(), given: 0 },
+    isCalculating: calculation.busy,
+    calculated: () => until(() => !calculation.busy()),
+    takeResults: (results) => functions.calls.answer(results.map((result) => [result[0], outcomeOf(result)] as const)),
   };
 }
 

@@ -21,7 +21,10 @@ export async function loadNodeClient(transport: Transport, surroundings: Surroun
   const script = await compiled;
   const globals = pageGlobals();
   installLoader(globals, transport, surroundings);
+  const loaded = globals["Office"];
   script.runInContext(createContext(globals));
+  // The library lays its own Office object over the loader's, without the context that only the loader knows.
+  globals["Office"] = loaded;
   return globals as unknown as Client;
 }
 
@@ -30,49 +33,49 @@ async function compile(): Promise<Script> {
   return new Script(await readFile(path, "utf8"), { filename: path });
 }
 
-/** The little of a page that the library looks at, and the objects it must share with the code that calls it. */
+/** Built-in objects that the library must share with the code that calls it: an array of one is an array of the other. */
+const shared: Globals = {
+  Array,
+  Boolean,
+  Date,
+  Error,
+  Function,
+  JSON,
+  Map,
+  Math,
+  Number,
+  Object,
+  Promise,
+  RegExp,
+  Set,
+  String,
+  Symbol,
+  TypeError,
+  Uint8Array,
+  clearTimeout,
+  console,
+  decodeURIComponent,
+  encodeURIComponent,
+  isFinite,
+  isNaN,
+  parseFloat,
+  parseInt,
+  performance,
+  setTimeout,
+};
+
+/** The little of a page that the library looks at. */
 function pageGlobals(): Globals {
-  const shared = {
-    console,
-    setTimeout,
-    clearTimeout,
-    performance,
-    Promise,
-    JSON,
-    Math,
-    Date,
-    Object,
-    Array,
-    String,
-    Number,
-  };
-  const more = {
-    Boolean,
-    Error,
-    TypeError,
-    RegExp,
-    Symbol,
-    Function,
-    Map,
-    Set,
-    Uint8Array,
-    parseInt,
-    parseFloat,
-    isNaN,
-    isFinite,
-  };
-  const text = { encodeURIComponent, decodeURIComponent, escape, unescape };
   const nothing = (): undefined => undefined;
-  const element = { setAttribute: nothing, style: {} };
   const document = {
-    createElement: () => element,
+    createElement: () => ({ setAttribute: nothing, style: {} }),
     getElementsByTagName: () => [],
     addEventListener: nothing,
     cookie: "",
     readyState: "complete",
   };
   const page = { navigator: { userAgent: "desk" }, location: { href: "https://localhost/" }, document };
-  const globals: Globals = { ...shared, ...more, ...text, ...page, addEventListener: nothing };
+  const globals: Globals = { ...shared, ...page, addEventListener: nothing };
   globals["window"] = globals["self"] = globals["global"] = globals;
   return globals;
 }

@@ -73,7 +73,15 @@ function ensureSize(
 async function ensureNotEditing({ switches }: Host, { flags = 0, message }: BridgeRequest): Promise<void> {
   if (!switches.editing || isFunctionResult(message.body as RequestBody)) return;
   if ((flags & delayForCellEdit) === 0) throw fault("InvalidOperationInCellEditMode");
-  while (switches.editing) await new Promise((resolve) => setTimeout(resolve, 10));
+  await finished(switches);
 }
+
+async function finished(switches: Host["switches"]): Promise<void> {
+  if (!switches.editing) return;
+  await new Promise((resolve) => setTimeout(resolve, pollMilliseconds));
+  await finished(switches);
+}
+
+const pollMilliseconds = 10;
 
 const isFunctionResult = ({ Actions }: RequestBody): boolean => Actions.some(({ Name }) => Name.includes("Invocation"));

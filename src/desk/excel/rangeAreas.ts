@@ -92,7 +92,7 @@ export const rangeView: Family<States["RangeView"]> = {
   lacks: ["FormulasLocal", "FormulasR1C1", "Index"],
 };
 
-function visible<T>({ area, rows }: States["RangeView"], block: readonly (readonly T[])[] | null): unknown {
+function visible({ area, rows }: States["RangeView"], block: readonly (readonly unknown[])[] | null): unknown {
   return block === null ? null : rows.map((row) => block[row - area.row]);
 }
 

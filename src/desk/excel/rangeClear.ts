@@ -2,7 +2,6 @@ import type { ICellData } from "@univerjs/core";
 import { intersectionOf, type Area } from "../workbook/areas.ts";
 import { usedWithin } from "../workbook/cells.ts";
 import { carryOut, command } from "../workbook/grid.ts";
-import { setStyles } from "../workbook/styles.ts";
 import { writeCells } from "../workbook/write.ts";
 import { oneOf } from "./arguments.ts";
 import { ensureWritable } from "./guards.ts";

@@ -4,7 +4,6 @@ import {
   HorizontalAlign,
   VerticalAlign,
   WrapStrategy,
-  type IBorderData,
   type IStyleData,
   type Nullable,
 } from "@univerjs/core";
@@ -12,7 +11,8 @@ import type { Area } from "../workbook/areas.ts";
 import { worksheetOf } from "../workbook/book.ts";
 import { cellAt, cellsOf } from "../workbook/cells.ts";
 import { pointsPerPixel, standardHeight, standardWidth } from "../workbook/sizes.ts";
-import { applyStyle, flag, styleAt } from "../workbook/styles.ts";
+import { applyStyle, styleAt } from "../workbook/styles.ts";
+import { flag } from "../workbook/styleTables.ts";
 import { asFlag, asNumber, asText, oneOf } from "./arguments.ts";
 import { autofitColumns, autofitRows, setColumnWidth, setRowHeight } from "./autofit.ts";
 import { fault } from "./fault.ts";
@@ -185,7 +185,7 @@ function drawBorder(
       const old = styleAt(host.book, cellAt(cells, strip.row, strip.column)).bd?.[at];
       const drawn = { s: line.s ?? old?.s ?? BorderStyleTypes.THIN, cl: line.cl ?? old?.cl ?? { rgb: "#000000" } };
       const none = line.s === BorderStyleTypes.NONE;
-      applyStyle(host.book, strip, { bd: { [at]: none ? null : drawn } as IBorderData });
+      applyStyle(host.book, strip, { bd: { [at]: none ? null : drawn } });
     }
   }
 }

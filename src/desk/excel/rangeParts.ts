@@ -9,6 +9,7 @@ import type { Host } from "./host.ts";
 import { hold, type Arguments, type Family, type Held } from "./model.ts";
 import { isRowHidden } from "./rangeShape.ts";
 import { surroundingRegion } from "./region.ts";
+import { specialCells } from "./specialCells.ts";
 
 const held = (area: Area): Held => {
   if (!isInside(area)) throw fault("InvalidArgument");
@@ -56,8 +57,14 @@ export const rangeParts: NonNullable<Family<Area>["part"]> = {
   GetSpillParent: (area, host) => orFault(spillParent(host, area), "ItemNotFound"),
   GetSpillParentOrNullObject: (area, host) => orNull(spillParent(host, area)),
   GetVisibleView: (area, host) => hold("RangeView", { area, rows: visibleRows(host, area) }),
+  GetSpecialCells: (area, host, args) => specialCells(host, area, args) ?? missing(),
+  GetSpecialCellsOrNullObject: (area, host, args) => specialCells(host, area, args),
   GetTables: (area, host, args) => hold("TableScopedCollection", { ids: tableIds(host, area, flagAt(args, 0)) }),
 };
+
+function missing(): never {
+  throw fault("ItemNotFound");
+}
 
 function shifted(area: Area, args: Arguments): Area {
   return { ...area, row: area.row + integerAt(args, 0), column: area.column + integerAt(args, 1) };

@@ -1,5 +1,5 @@
 import { parseArea } from "../workbook/areas.ts";
-import { hasSheet } from "../workbook/book.ts";
+import { activeSheet, hasSheet, recordOf } from "../workbook/book.ts";
 import { selectedAreas } from "../workbook/selection.ts";
 import { recalculate, recalculateAll } from "../workbook/calculation.ts";
 import { asFlag, oneOf, optionalText } from "./arguments.ts";
@@ -28,6 +28,7 @@ export const workbook: Family<null> = {
       ensureSelection(host);
       return hold("RangeAreas", selectedAreas(host.book));
     },
+    GetActiveChartOrNullObject: (_state, host) => activeChart(host),
     GetActiveCell: (_state, host) => activeCell(host),
     _GetRangeForEventByReferenceId: (_state, host, args) => eventRange(host, args[0]) ?? missing(),
     _GetRangeOrNullObjectForEventByReferenceId: (_state, host, args) => eventRange(host, args[0]),

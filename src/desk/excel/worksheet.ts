@@ -4,6 +4,7 @@ import { nameOf, recordOf, sheetIds, worksheetOf } from "../workbook/book.ts";
 import { recalculate } from "../workbook/calculation.ts";
 import { usedWithin } from "../workbook/cells.ts";
 import { carryOut, command } from "../workbook/grid.ts";
+import { flag } from "../workbook/styleTables.ts";
 import { pointsPerPixel, standardHeight } from "../workbook/sizes.ts";
 import { hideSheet, isHidden, removeSheet, renameSheet, showSheet } from "../workbook/sheets.ts";
 import { areaAt, areasAt } from "./addresses.ts";
@@ -32,9 +33,9 @@ export const worksheet: Family<OnSheet> = {
     Name: ({ sheet }, host, value) => rename(host, sheet, asText(value)),
     Position: ({ sheet }, host, value) => place(host, sheet, asNumber(value)),
     Visibility: ({ sheet }, host, value) => setVisibility(host, sheet, visibilities[oneOf(value, visibilities)]),
-    TabColor: ({ sheet }, host, value) => mark(host, sheet, command.tabColor, { color: asText(value) || undefined }),
+    TabColor: ({ sheet }, host, value) => mark(host, command.tabColor, { sheet, color: asText(value) }),
     ShowGridlines: ({ sheet }, host, value) =>
-      mark(host, sheet, command.gridlines, { showGridlines: asFlag(value) ? BooleanNumber.TRUE : BooleanNumber.FALSE }),
+      mark(host, command.gridlines, { sheet, showGridlines: flag(asFlag(value)) }),
   },
   part: {
     GetRange: ({ sheet }, host, args) => hold("Range", rangeOf(host, sheet, optionalText(args, 0))),
@@ -129,9 +130,10 @@ function setVisibility(host: Host, sheet: string, hide: boolean): void {
   hideSheet(host.book, sheet, hide);
 }
 
-function mark(host: Host, sheet: string, name: string, params: object): void {
+function mark(host: Host, name: string, params: OnSheet & Readonly<Record<string, unknown>>): void {
+  const { sheet, ...what } = params;
   ensureSheet(host, sheet);
-  carryOut(host.book.grid, name, { unitId: host.book.unit, subUnitId: sheet, ...params });
+  carryOut(host.book.grid, name, { unitId: host.book.unit, subUnitId: sheet, ...what });
 }
 
 function activate(host: Host, sheet: string): void {

@@ -2,16 +2,15 @@ import {
   ArrayValueObject,
   BaseFunction,
   ERROR_TYPE_SET,
-  ErrorValueObject,
   FunctionType,
   IFunctionService,
   NumberValueObject,
   SetFormulaCalculationNotificationMutation,
   StringValueObject,
+  ValueObjectFactory,
   BooleanValueObject,
   type BaseReferenceObject,
   type BaseValueObject,
-  type ErrorType,
   type FunctionVariantType,
 } from "@univerjs/engine-formula";
 import { ICommandService } from "@univerjs/core";
@@ -20,6 +19,7 @@ import { fromRange, fullAddress } from "./areas.ts";
 import type { Book } from "./book.ts";
 import type { BlankArrival, FunctionMetadata, FunctionsMetadata } from "./metadata.ts";
 import type { CallOutcome, Calls, Wanted } from "./pendingCalls.ts";
+import { flag } from "./styleTables.ts";
 
 /** What a cell shows while an add-in's function is at work. */
 const busy = "#BUSY!";
@@ -37,7 +37,7 @@ export interface AddInFunctions {
 /** Makes every function of the metadata known to the formula engine; others answer #NAME? by themselves. */
 export function registerFunctions(book: Book, add: AddInFunctions): void {
   // The engine knows no such error: taught here, it travels on to dependent formulas like any other.
-  ERROR_TYPE_SET.add(busy as ErrorType);
+  (ERROR_TYPE_SET as Set<string>).add(busy);
   const spelled: Shaping["spelled"] = new Map();
   forgetBetweenStages(book, spelled);
   const service = book.grid.injector.get(IFunctionService);
@@ -53,8 +53,8 @@ export function registerFunctions(book: Book, add: AddInFunctions): void {
         name: parameter.name,
         detail: parameter.description ?? "",
         example: "",
-        require: parameter.optional === true ? 0 : 1,
-        repeat: parameter.repeating === true ? 1 : 0,
+        require: flag(parameter.optional !== true),
+        repeat: flag(parameter.repeating === true),
       })),
     });
   }
@@ -93,7 +93,7 @@ class AddInFunction extends BaseFunction {
     try {
       return evaluate(this.#setting, variants, at);
     } catch {
-      return ErrorValueObject.create("#VALUE!" as ErrorType);
+      return errorValue("#VALUE!");
     }
   }
 }
@@ -102,11 +102,11 @@ type Cell = Parameters<Calls["ask"]>[0];
 
 function evaluate(setting: Setting, variants: readonly FunctionVariantType[], cell: Cell): BaseValueObject {
   const wanted = wantedBy(setting, variants, cell);
-  if ("error" in wanted) return ErrorValueObject.create(wanted.error as ErrorType);
+  if ("error" in wanted) return errorValue(wanted.error);
   const outcome = setting.add.calls.ask(cell, wanted);
   const place = `${cell.sheet} ${cell.row} ${cell.column}`;
   setting.add.messages.delete(place);
-  if (outcome === null) return ErrorValueObject.create(busy as ErrorType);
+  if (outcome === null) return errorValue(busy);
   if ("error" in outcome && outcome.message !== "") setting.add.messages.set(place, outcome.message);
   return toValue(outcome);
 }
@@ -150,14 +150,13 @@ function addressOf(book: Book, variant: FunctionVariantType): string {
 }
 
 function toValue(outcome: CallOutcome): BaseValueObject {
-  if ("error" in outcome) return ErrorValueObject.create(outcome.error as ErrorType);
+  if ("error" in outcome) return errorValue(outcome.error);
   const { value } = outcome;
   if (!Array.isArray(value)) return toElement(value);
   const rows = (value as readonly unknown[]).map((row) => (Array.isArray(row) ? (row as unknown[]) : [row]));
   const columns = rows[0]?.length ?? 0;
   // Excel takes a block whose rows differ in length for no block at all.
-  if (columns === 0 || rows.some((row) => row.length !== columns))
-    return ErrorValueObject.create("#VALUE!" as ErrorType);
+  if (columns === 0 || rows.some((row) => row.length !== columns)) return errorValue("#VALUE!");
   return ArrayValueObject.create({
     calculateValueList: rows.map((row) => row.map(toElement)),
     rowCount: rows.length,
@@ -169,6 +168,9 @@ function toValue(outcome: CallOutcome): BaseValueObject {
   });
 }
 
+/** The engine's factory knows the error signs; the set it knows them by was taught ours. */
+const errorValue = (sign: string): BaseValueObject => ValueObjectFactory.create(sign);
+
 /** A value of the add-in in a cell. Null shows as 0, by Excel's design; an error is an object with its sign. */
 function toElement(value: unknown): BaseValueObject {
   if (value === null || value === undefined) return NumberValueObject.create(0);
@@ -176,8 +178,8 @@ function toElement(value: unknown): BaseValueObject {
   if (typeof value === "boolean") return BooleanValueObject.create(value);
   if (typeof value === "string") return StringValueObject.create(value);
   const { type, basicValue, code } = value as { type?: string; basicValue?: unknown; code?: unknown };
-  if (type === "Error") return ErrorValueObject.create(String(basicValue ?? code) as ErrorType);
+  if (type === "Error") return errorValue(String(basicValue ?? code));
   if (type === "FormattedNumber" || type === "Double") return NumberValueObject.create(Number(basicValue));
   if (type === "String") return StringValueObject.create(String(basicValue));
-  return ErrorValueObject.create("#VALUE!" as ErrorType);
+  return errorValue("#VALUE!");
 }

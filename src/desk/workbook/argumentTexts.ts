@@ -1,11 +1,11 @@
-import { CellValueType, type ICellData, type Nullable } from "@univerjs/core";
-import type {
+import type { ICellData, Nullable } from "@univerjs/core";
+import {
   ArrayValueObject,
-  BaseReferenceObject,
-  BaseValueObject,
-  FunctionVariantType,
+  type BaseReferenceObject,
+  type BaseValueObject,
+  type FunctionVariantType,
 } from "@univerjs/engine-formula";
-import { isErrorSign } from "./cells.ts";
+import { isFormula, kindOf, valueOf } from "./cells.ts";
 import { elementText, type Element } from "./elementTexts.ts";
 import type { BlankArrival, ParameterMetadata } from "./metadata.ts";
 
@@ -35,7 +35,7 @@ export function argumentText(
   const value = variant as BaseValueObject;
   // An argument left out between commas; a reference to a blank cell is something else.
   if (value.isNull()) return { text: "null" };
-  const block = value.isArray() ? blockOf(value as ArrayValueObject) : [[elementOfValue(value)]];
+  const block = value instanceof ArrayValueObject ? blockOf(value) : [[elementOfValue(value)]];
   return blockText(block, parameter, shaping);
 }
 
@@ -51,16 +51,13 @@ function rangeText(range: BaseReferenceObject, parameter: ParameterMetadata, sha
   return text;
 }
 
-/** Rows below the last that holds anything are blank; a whole column is cut where the grid ends. */
 function readRange(range: BaseReferenceObject): Block {
   const { startRow, startColumn, endRow, endColumn } = range.getRangePosition();
-  const cellOf = cellsOfRange(range);
+  const elementAt = elementsOfRange(range);
   const rows = new Array<readonly Element[]>(endRow - startRow + 1);
   for (let row = startRow; row <= endRow; row++) {
     const line = new Array<Element>(endColumn - startColumn + 1);
-    for (let column = startColumn; column <= endColumn; column++) {
-      line[column - startColumn] = elementOfCell(cellOf(row, column));
-    }
+    for (let column = startColumn; column <= endColumn; column++) line[column - startColumn] = elementAt(row, column);
     rows[row - startRow] = line;
   }
   return rows;
@@ -70,27 +67,33 @@ function readRange(range: BaseReferenceObject): Block {
  * The engine's own reading of a cell builds two matrices each time. What this calculation computed stands first, then
  * the sheet; only cells under a spill need the engine's longer way, which knows whether the spill still holds.
  */
-function cellsOfRange(range: BaseReferenceObject): (row: number, column: number) => Nullable<ICellData> {
-  const computed = range.getCurrentRuntimeSheetData();
-  const spilled = range.getCurrentRuntimeActiveArrayFormulaCellData();
-  const spilledBefore = range.getCurrentActiveArrayFormulaCellData();
-  const stored = range.getCurrentActiveSheetData()?.cellData;
+function elementsOfRange(range: BaseReferenceObject): (row: number, column: number) => Element {
+  const computed = orNothing(range.getCurrentRuntimeSheetData());
+  const spilled = orNothing(range.getCurrentRuntimeActiveArrayFormulaCellData());
+  const spilledBefore = orNothing(range.getCurrentActiveArrayFormulaCellData());
+  const stored = orNothing(range.getCurrentActiveSheetData())?.cellData;
   return (row, column) => {
     const fresh = computed?.getValue(row, column) ?? spilled?.getValue(row, column);
-    if (fresh !== undefined && fresh !== null) return fresh;
-    if ((spilledBefore?.getValue(row, column) ?? null) !== null) return range.getCellData(row, column);
-    return stored?.getValue(row, column);
+    if (fresh !== undefined && fresh !== null) return elementOfResult(fresh);
+    if ((spilledBefore?.getValue(row, column) ?? null) === null) return elementOfCell(stored?.getValue(row, column));
+    const cell = range.getCellData(row, column);
+    return isFormula(cell ?? undefined) ? elementOfCell(cell) : elementOfResult(cell);
   };
 }
 
+/** The engine's declarations promise more than there is: a sheet without results has no matrix of them. */
+const orNothing = <T>(value: T): T | undefined => value;
+
 function elementOfCell(cell: Nullable<ICellData>): Element {
-  const value = cell?.v;
-  if (value === undefined || value === null) return null;
-  if (cell?.t === CellValueType.BOOLEAN) return { value: value === 1 || value === true };
-  if (typeof value !== "string") return { value };
-  if (cell?.t !== CellValueType.FORCE_STRING && isErrorSign(value)) return { error: value };
-  // A cell of no content and no formula is blank; a formula's "" is text, and so is an apostrophe alone.
-  return value === "" && cell?.t !== CellValueType.FORCE_STRING && (cell?.f ?? "") === "" ? null : { value };
+  const kind = kindOf(cell ?? undefined);
+  if (kind === "Empty") return null;
+  const value = valueOf(cell ?? undefined);
+  return kind === "Error" ? { error: String(value) } : { value };
+}
+
+/** A formula's "" is text, where a cell's own would be blank. */
+function elementOfResult(cell: Nullable<ICellData>): Element {
+  return cell?.v === "" ? { value: "" } : elementOfCell(cell);
 }
 
 function elementOfValue(value: BaseValueObject): Element {

@@ -28,12 +28,17 @@ export function cellsOf(book: Book, sheet: string): SheetCells {
   };
 }
 
-const isBlank = (cell: ICellData | null | undefined): boolean =>
-  cell === undefined || cell === null || cell.v === undefined || cell.v === null || cell.v === "";
+/** No value and no formula. An apostrophe alone is an empty text, and a text is no blank. */
+function isBlank(cell: ICellData | null | undefined): boolean {
+  if (cell === undefined || cell === null) return true;
+  if (isFormula(cell)) return false;
+  const value = cell.v ?? null;
+  return value === null || (value === "" && !isForcedText(cell));
+}
 
 export function cellAt(cells: SheetCells, row: number, column: number): ICellData | undefined {
   const stored = cells.stored[row]?.[column] ?? undefined;
-  if (!isBlank(stored) || isFormula(stored)) return stored;
+  if (!isBlank(stored)) return stored;
   const spilled = cells.spilled[row]?.[column] ?? undefined;
   if (spilled === undefined || isBlank(spilled)) return stored;
   return stored?.s === undefined ? spilled : { ...spilled, s: stored.s };
@@ -73,7 +78,7 @@ export function kindOf(cell: ICellData | undefined): CellKind {
   if (typeof value === "boolean") return "Boolean";
   if (typeof value === "number") return "Double";
   if (cell !== undefined && errorSign.test(value) && !isForcedText(cell)) return "Error";
-  return value === "" && !isFormula(cell) ? "Empty" : "String";
+  return isBlank(cell) ? "Empty" : "String";
 }
 
 /** The area a formula in this cell fills, the cell itself included; null where it fills no other. */
@@ -130,8 +135,8 @@ function usedColumns(
     const column = Number(key);
     if (column < area.column || column >= area.column + area.columns) continue;
     const cell = row[column] ?? undefined;
-    const counts = isFormula(cell) || !isBlank(cell) || (!valuesOnly && (cell?.s ?? null) !== null);
-    if (!counts) continue;
+    const styled = !valuesOnly && (cell?.s ?? null) !== null;
+    if (isBlank(cell) && !styled) continue;
     if (first < 0) first = column;
     last = column;
   }

@@ -1,12 +1,12 @@
-import { FormulaDataModel, IDefinedNamesService } from "@univerjs/engine-formula";
+import { IDefinedNamesService } from "@univerjs/engine-formula";
 import { parseAddress } from "../../core/table/address.ts";
 import type { BookData, SheetData } from "../book/bookData.ts";
-import { toRange, type Area } from "./areas.ts";
-import { worksheetOf, type Book } from "./book.ts";
+import type { Book } from "./book.ts";
 import { recalculate } from "./calculation.ts";
 import { toChartRecord } from "./charts.ts";
 import type { Grid } from "./grid.ts";
 import { emptySheetRecord, type SheetRecord } from "./records.ts";
+import { seedSpills, unsavedFormulas } from "./savedResults.ts";
 import { registerTable } from "./tables.ts";
 import { isStyled, toGrid } from "./toGrid.ts";
 
@@ -80,41 +80,4 @@ function headingAt(sheet: SheetData, row: number, column: number): string {
   const cell = sheet.rows[row]?.[column] ?? null;
   const value = isStyled(cell) ? cell.value : cell;
   return value === null || typeof value === "object" ? "" : String(value);
-}
-
-/** Lays the saved results of spilling formulas back over the cells they fill: the grid keeps them apart. */
-function seedSpills(book: Book, data: SheetData, sheet: string): void {
-  const model = book.grid.injector.get(FormulaDataModel);
-  const ranges = ((model.getArrayFormulaRange()[book.unit] ??= {})[sheet] ??= {});
-  const values = ((model.getArrayFormulaCellData()[book.unit] ??= {})[sheet] ??= {});
-  const stored = worksheetOf(book, sheet).getCellMatrix();
-  for (const { row, column, rows, columns } of savedSpills(data, sheet)) {
-    (ranges[row] ??= {})[column] = toRange({ row, column, rows, columns });
-    for (let r = row; r < row + rows; r++) {
-      for (let c = column; c < column + columns; c++) {
-        const cell = stored.getValue(r, c) ?? {};
-        (values[r] ??= {})[c] = { v: cell.v ?? null, t: cell.t ?? null };
-        if (r !== row || c !== column) stored.setValue(r, c, cell.s === undefined ? {} : { s: cell.s });
-      }
-    }
-  }
-}
-
-function savedSpills(data: SheetData, sheet: string): readonly Area[] {
-  return data.rows.flatMap((row) =>
-    row.flatMap((cell) => {
-      const area = isStyled(cell) && cell.spill !== undefined ? parseAddress(cell.spill) : null;
-      return area === null || area.rows * area.columns < 2 ? [] : [{ ...area, sheet }];
-    }),
-  );
-}
-
-function unsavedFormulas(data: SheetData, sheet: string): readonly Area[] {
-  return data.rows.flatMap((cells, row) =>
-    cells.flatMap((cell, column) =>
-      isStyled(cell) && cell.formula !== undefined && cell.value === null
-        ? [{ sheet, row, column, rows: 1, columns: 1 }]
-        : [],
-    ),
-  );
 }

@@ -1,4 +1,4 @@
-import { BooleanNumber, type ICellData, type IStyleData } from "@univerjs/core";
+import { BooleanNumber, type IColumnData, type ICellData, type IRowData } from "@univerjs/core";
 import { localAddressOf, columnLetters } from "../../core/table/address.ts";
 import type { BookCell, BookData, BookValue, SheetData, StyledCell } from "../book/bookData.ts";
 import { fromRange, localAddress } from "./areas.ts";
@@ -8,7 +8,8 @@ import { wholeSheet } from "./areas.ts";
 import { rulersOf, toBookChart } from "./charts.ts";
 import { namesOf } from "./names.ts";
 import { charactersOf, pointsPerPixel } from "./sizes.ts";
-import { fromGridStyle, styleAt } from "./styles.ts";
+import { styleAt } from "./styles.ts";
+import { fromGridStyle } from "./styleTables.ts";
 
 /** The workbook as it stands now, as plain data: what is saved, and what tests compare. */
 export function snapshotOf(book: Book): BookData {
@@ -53,12 +54,12 @@ function cellName(place: string): string {
 function sizesOf(book: Book, sheet: string): Pick<SheetData, "columnWidths" | "rowHeights" | "hiddenRows"> {
   const config = worksheetOf(book, sheet).getConfig();
   const columnWidths: (number | undefined)[] = [];
-  for (const [column, data] of Object.entries(config.columnData)) {
+  for (const [column, data] of Object.entries(config.columnData as Record<string, Partial<IColumnData>>)) {
     if (data.w !== undefined) columnWidths[Number(column)] = charactersOf(data.w);
   }
   const rowHeights: (number | undefined)[] = [];
   const hiddenRows: number[] = [];
-  for (const [row, data] of Object.entries(config.rowData)) {
+  for (const [row, data] of Object.entries(config.rowData as Record<string, Partial<IRowData>>)) {
     if (data.h !== undefined && data.ia === BooleanNumber.FALSE) rowHeights[Number(row)] = data.h * pointsPerPixel;
     if (data.hd === BooleanNumber.TRUE) hiddenRows.push(Number(row));
   }

@@ -10,7 +10,7 @@ import { parseAddress } from "../../core/table/address.ts";
 import type { BookCell, BookData, BookValue, SheetData, StyledCell } from "../book/bookData.ts";
 import { toRange } from "./areas.ts";
 import { pixelsOf, pointsPerPixel, standardHeight, standardWidth } from "./sizes.ts";
-import { toGridStyle } from "./styles.ts";
+import { toGridStyle } from "./styleTables.ts";
 
 /** The grid shows at least this much, so that an empty sheet looks like one. */
 const leastRows = 1000;

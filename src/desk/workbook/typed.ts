@@ -32,5 +32,5 @@ export function asTyped(value: string | number | boolean, format: string): Typed
   const read = numfmt.parseValue(value);
   if (read === null) return keep({ v: value, t: CellValueType.STRING });
   if (typeof read.v === "boolean") return boolean(read.v);
-  return keep({ v: Number(read.v), t: CellValueType.NUMBER }, read.z ?? null);
+  return keep({ v: read.v, t: CellValueType.NUMBER }, read.z ?? null);
 }
