@@ -1,0 +1,27 @@
+import type { Analyst } from "../app/analyst.ts";
+import type { BookData } from "../desk/book/bookData.ts";
+import { openDesk } from "../desk/client/openDesk.ts";
+import { functionsMetadata } from "../functions/metadata.ts";
+import { registerFunctions } from "../functions/register.ts";
+import { excelHost } from "../office/excelHost.ts";
+import type { OpenBook } from "./answerCommand.ts";
+
+/** Opens a workbook in the desk without a screen, the add-in's functions in it, so that a live sheet has values when saved. */
+export const deskBook =
+  (analyst: Analyst) =>
+  async (book: BookData): Promise<OpenBook> => {
+    const desk = await openDesk({ book, functions: functionsMetadata() });
+    await desk.Office.onReady();
+    registerFunctions(desk.CustomFunctions, analyst);
+    return {
+      host: excelHost({
+        run: desk.Excel.run,
+        isSetSupported: (set, version) => desk.Office.context.requirements.isSetSupported(set, version),
+      }),
+      snapshot: async () => {
+        await desk.settle();
+        return desk.snapshot();
+      },
+      close: desk.close,
+    };
+  };
