@@ -6,7 +6,8 @@ import { isRowHidden } from "./rangeShape.ts";
 
 /** The cells of an area that are not hidden, in as few areas as there are stretches of rows; null where all are hidden. */
 export function specialCells(host: Host, area: Area, args: Arguments): Held | null {
-  if (args[0] !== "Visible") throw fault("ApiNotFound", `The stand-in finds no special cells of type ${String(args[0])}.`);
+  if (args[0] !== "Visible")
+    throw fault("ApiNotFound", `The stand-in finds no special cells of type ${String(args[0])}.`);
   const stretches: Area[] = [];
   let start = area.row;
   for (let row = area.row; row <= area.row + area.rows; row++) {

@@ -52,6 +52,13 @@ function selectedRange(host: Host): Held {
   return hold("Range", area);
 }
 
+/** The chart that is selected: the first of the sheet in front. */
+function activeChart({ book, switches }: Host): Held | null {
+  const sheet = activeSheet(book);
+  const [chart] = recordOf(book, sheet).charts;
+  return switches.chartSelected && chart !== undefined ? hold("Chart", { sheet, chart }) : null;
+}
+
 function activeCell(host: Host): Held {
   ensureSelection(host);
   const area = selectedAreas(host.book).at(-1);
