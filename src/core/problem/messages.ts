@@ -51,7 +51,7 @@ const sentences: { readonly [Code in Problem["code"]]: (problem: Extract<Problem
     "Turn the text into dates in the sheet, written year-month-day if need be.",
   ],
   "dates-in-number-column": (spots) => [
-    `${theCells(spots)} in column "${spots.column}" ${spots.count === 1 ? "holds a date" : "hold dates"}, not numbers.`,
+    `${theCells(spots)} in column "${spots.column}" ${spots.count === 1 ? "holds a date, not a number" : "hold dates, not numbers"}.`,
     `Give the ${cellWord(spots)} a number format if numbers are meant, or use the column as dates.`,
   ],
   "error-cells": (spots) => [
@@ -71,7 +71,7 @@ const sentences: { readonly [Code in Problem["code"]]: (problem: Extract<Problem
     "Keep one row for each time; where several units share a time, say that rows are in groups and name the group column.",
   ],
   "unequal-heights": ({ first, rows, second, otherRows }) => [
-    `The ranges are not equally tall: ${first} has ${counted(rows, "row")} of data, ${second} has ${counted(otherRows, "row")}.`,
+    `The ranges are not equally tall: ${counted(rows, "row")} in ${first}, ${counted(otherRows, "row")} in ${second}.`,
     "Choose ranges that begin and end in the same rows, all with their headings or all without.",
   ],
   "too-many-columns": ({ where, columns, most }) => [
