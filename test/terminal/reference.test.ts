@@ -132,7 +132,6 @@ describe.each(["longley", "school-scores-3", "investment", "orange-juice-6-lags"
       expectTest(tests.white, "white");
     else expect(["squares", "fitted values"]).toContain(tests.white.form);
   });
-
 });
 
 describe.each(["longley", "investment", "orange-juice-6-lags"])("%s through time", (id) => {
