@@ -56,7 +56,7 @@ export function problemOf(fault: unknown): HostProblem | null {
       return { code: "other-workbook" };
     case "ApiNotFound":
     case "ApiNotAvailable":
-      return { code: "excel-too-old", missing: place ?? fault.message };
+      return { code: "excel-too-old", missing: place || fault.message };
     default:
       return { code: "excel-refused", detail: [fault.code, fault.message, place].filter(Boolean).join(", ") };
   }
