@@ -69,7 +69,7 @@ const addIn = (mode, serving) => ({
 /** The stand-in spreadsheet. Its pane is the add-in's own page; only the address of Excel's library differs. */
 const desk = (mode, serving) => ({
   ...common("desk", mode),
-  entry: { desk: "./src/entries/desk.ts", office: "./src/entries/deskOffice.ts" },
+  entry: { desk: "./src/entries/desk.tsx", office: "./src/entries/deskOffice.ts" },
   output: {
     path: at("dist/desk"),
     publicPath: serving ? "/desk/" : "auto",

@@ -24,11 +24,11 @@ const monthsSheet = (months: readonly Month[]): SheetData =>
   columnSheet(
     "Months",
     [
-      { heading: "Month", values: months.map(({ month }) => month), numberFormat: "mmm yyyy", width: 12 },
-      { heading: "Repairs", values: months.map(({ repairs }) => repairs), numberFormat: "#,##0", width: 11 },
-      { heading: "Price index", values: months.map(({ priceIndex }) => priceIndex), numberFormat: "0.0", width: 13 },
-      { heading: "Advertising", values: months.map(({ advertising }) => advertising), numberFormat: "0.0", width: 13 },
-      { heading: "Rainy days", values: months.map(({ rainyDays }) => rainyDays), numberFormat: "0", width: 12 },
+      { heading: "Month", values: months.map(({ month }) => month), numberFormat: "mmm yyyy", width: 14 },
+      { heading: "Repairs", values: months.map(({ repairs }) => repairs), numberFormat: "#,##0", width: 13 },
+      { heading: "Price index", values: months.map(({ priceIndex }) => priceIndex), numberFormat: "0.0", width: 15 },
+      { heading: "Advertising", values: months.map(({ advertising }) => advertising), numberFormat: "0.0", width: 15 },
+      { heading: "Rainy days", values: months.map(({ rainyDays }) => rainyDays), numberFormat: "0", width: 14 },
     ],
     ["Kestrel & Vane: repairs by month", "All shops. Price index: 2014 = 100. Advertising in thousands."],
   );
@@ -36,11 +36,11 @@ const monthsSheet = (months: readonly Month[]): SheetData =>
 function shopsSheet(): SheetData {
   const all = shops();
   const sheet = columnSheet("Shops", [
-    { heading: "Shop", values: all.map(({ shop }) => shop), width: 10 },
-    { heading: "Takings", values: all.map(({ takings }) => takings), numberFormat: "#,##0", width: 11 },
-    { heading: "Staff hours", values: all.map(({ staffHours }) => staffHours), numberFormat: "0", width: 13 },
-    { heading: "Floor area", values: all.map(({ floorArea }) => floorArea), numberFormat: "0", width: 12 },
-    { heading: "Footfall", values: all.map(({ footfall }) => footfall), numberFormat: "#,##0", width: 11 },
+    { heading: "Shop", values: all.map(({ shop }) => shop), width: 12 },
+    { heading: "Takings", values: all.map(({ takings }) => takings), numberFormat: "#,##0", width: 13 },
+    { heading: "Staff hours", values: all.map(({ staffHours }) => staffHours), numberFormat: "0", width: 15 },
+    { heading: "Floor area", values: all.map(({ floorArea }) => floorArea), numberFormat: "0", width: 14 },
+    { heading: "Footfall", values: all.map(({ footfall }) => footfall), numberFormat: "#,##0", width: 13 },
   ]);
   return { ...sheet, tables: [{ name: "Shop_figures", address: `A1:E${all.length + 1}` }] };
 }
@@ -50,10 +50,10 @@ function partsSheet(): SheetData {
   return columnSheet(
     "Parts",
     [
-      { heading: "Lot", values: lots.map(({ lot }) => lot), width: 10 },
-      { heading: "Unit cost", values: lots.map(({ unitCost }) => unitCost), numberFormat: "0.00", width: 12 },
-      { heading: "Lot size", values: lots.map(({ lotSize }) => lotSize), numberFormat: "0", width: 11 },
-      { heading: "Lead time", values: lots.map(({ leadTime }) => leadTime), numberFormat: "0", width: 12 },
+      { heading: "Lot", values: lots.map(({ lot }) => lot), width: 12 },
+      { heading: "Unit cost", values: lots.map(({ unitCost }) => unitCost), numberFormat: "0.00", width: 14 },
+      { heading: "Lot size", values: lots.map(({ lotSize }) => lotSize), numberFormat: "0", width: 13 },
+      { heading: "Lead time", values: lots.map(({ leadTime }) => leadTime), numberFormat: "0", width: 14 },
     ],
     ["Purchase lots of brake sets", "Lead time in days."],
   );
@@ -62,14 +62,14 @@ function partsSheet(): SheetData {
 function weeksSheet(): SheetData {
   const weeks = courierWeeks();
   return columnSheet("Weeks", [
-    { heading: "Week from", values: weeks.map(({ week }) => week), numberFormat: "dd/mm/yyyy", width: 13 },
+    { heading: "Week from", values: weeks.map(({ week }) => week), numberFormat: "dd/mm/yyyy", width: 15 },
     {
       heading: "Courier cost",
       values: weeks.map(({ courierCost }) => courierCost),
       numberFormat: "#,##0.00",
-      width: 14,
+      width: 16,
     },
-    { heading: "Parcels", values: weeks.map(({ parcels }) => parcels), numberFormat: "0", width: 11 },
-    { heading: "Fuel", values: weeks.map(({ fuel }) => fuel), numberFormat: "0.000", width: 10 },
+    { heading: "Parcels", values: weeks.map(({ parcels }) => parcels), numberFormat: "0", width: 13 },
+    { heading: "Fuel", values: weeks.map(({ fuel }) => fuel), numberFormat: "0.000", width: 12 },
   ]);
 }

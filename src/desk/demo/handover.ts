@@ -1,10 +1,11 @@
 import { blankSheet } from "../book/blankSheet.ts";
 import type { BookCell, SheetData } from "../book/bookData.ts";
 import { roundTo } from "./draws.ts";
-import { looks, titleRows } from "./looks.ts";
+import { heightsUnder, looks, titleRows } from "./looks.ts";
 import type { Month } from "./months.ts";
 import { ordinaryFit } from "./ordinaryFit.ts";
 
+const above = ["What drives our repairs?", "Regression of repairs on price, advertising and rain. Data: sheet Months."];
 const drivers = ["Constant", "Price index", "Advertising", "Rainy days"];
 
 /**
@@ -28,10 +29,7 @@ export function handover(months: readonly Month[]): SheetData {
   });
   return {
     ...blankSheet("Handover", [
-      ...titleRows([
-        "What drives our repairs?",
-        "Regression of repairs on price, advertising and rain. Data: sheet Months.",
-      ]),
+      ...titleRows(above),
       headings,
       ...results,
       [],
@@ -40,7 +38,8 @@ export function handover(months: readonly Month[]): SheetData {
       [],
       [{ value: conclusion(fit.coefficients[1]!), style: looks.note }],
     ]),
-    columnWidths: [18, 14, 16, 10],
+    columnWidths: [18, 16, 18, 12],
+    rowHeights: heightsUnder(above),
   };
 }
 

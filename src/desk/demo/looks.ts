@@ -29,6 +29,7 @@ export function columnSheet(name: string, columns: readonly DemoColumn[], above:
   return {
     ...blankSheet(name, [...top, headings, ...rows]),
     columnWidths: columns.map(({ width }) => width),
+    rowHeights: heightsUnder(above),
     frozenRows: top.length + 1,
   };
 }
@@ -38,6 +39,11 @@ export function titleRows([title, ...notes]: readonly string[]): BookCell[][] {
   if (title === undefined) return [];
   return [[{ value: title, style: looks.title }], ...notes.map((value) => [{ value, style: looks.note }]), []];
 }
+
+/** In points; a title of 16 points needs more than the standard row. */
+const titleHeight = 24;
+
+export const heightsUnder = (above: readonly string[]): readonly number[] => (above.length === 0 ? [] : [titleHeight]);
 
 function cellOf({ values, numberFormat }: DemoColumn, row: number): BookCell {
   const value = values[row] ?? null;

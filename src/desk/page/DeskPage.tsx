@@ -1,0 +1,72 @@
+import { useEffect, useRef, useState, type ReactNode } from "react";
+import type { BookData } from "../book/bookData.ts";
+import { demoBook } from "../demo/demoBook.ts";
+import type { FunctionsMetadata } from "../workbook/metadata.ts";
+import { baseName, downloadCsv, downloadXlsx, readBook } from "./bookFiles.ts";
+import { DeskBar } from "./DeskBar.tsx";
+import { useParts } from "./parts.ts";
+import { openSession, type Session } from "./session.ts";
+import { Splitter } from "./Splitter.tsx";
+
+interface Opened {
+  readonly name: string;
+  readonly book: BookData;
+}
+
+const demo = (): Opened => ({ name: "Kestrel & Vane", book: demoBook() });
+
+/** In pixels; no pane of Excel's is narrower. */
+const usualPaneWidth = 400;
+
+/** The stand-in spreadsheet: a bar of its own, the cells, and the add-in's pane beside them. */
+export function DeskPage({ functions }: { readonly functions: FunctionsMetadata }): ReactNode {
+  const [opened, setOpened] = useState(demo);
+  const [note, setNote] = useState("");
+  const [paneWidth, setPaneWidth] = useState(usualPaneWidth);
+  const parts = useParts();
+  const session = useSession(parts, opened, functions);
+  const open = async (file: File): Promise<void> => {
+    const reading = await readBook(file);
+    if (reading.ok) setOpened({ name: baseName(file.name), book: reading.value });
+    setNote(reading.ok ? "" : `${file.name} cannot be read: ${reading.because}.`);
+  };
+  const withBook = (use: (book: BookData) => unknown) => (): void => {
+    if (session.current !== null) use(session.current.desk.snapshot());
+  };
+  return (
+    <div className="desk" style={{ gridTemplateColumns: `minmax(0, 1fr) auto ${paneWidth}px` }}>
+      <DeskBar
+        name={opened.name}
+        note={note}
+        bar={parts.bar}
+        openDemo={() => setOpened(demo())}
+        open={(file) => void open(file)}
+        save={withBook((book) => downloadXlsx(book, opened.name))}
+        saveSheet={withBook(downloadCsv)}
+        goToGrid={parts.goToGrid}
+        goToPane={parts.goToPane}
+      />
+      <main className="grid" aria-label="Sheet" ref={parts.grid} />
+      <Splitter width={paneWidth} resize={setPaneWidth} />
+      <iframe className="pane" title="Footing" ref={parts.pane} />
+    </div>
+  );
+}
+
+function useSession(parts: ReturnType<typeof useParts>, { book }: Opened, functions: FunctionsMetadata) {
+  const session = useRef<Session>(null);
+  useEffect(() => {
+    const [grid, pane] = [parts.grid.current, parts.pane.current];
+    if (grid === null || pane === null) return;
+    const started = openSession({ grid, pane }, book, functions);
+    session.current = started;
+    parts.attend(started.desk.book.grid);
+    // For the browser's console and for tests: the desk as a person's hands have it.
+    Object.assign(globalThis, { desk: started.desk });
+    return () => {
+      session.current = null;
+      started.close();
+    };
+  }, [parts, book, functions]);
+  return session;
+}
