@@ -83,6 +83,7 @@ async function fill(sheet: Excel.Worksheet, plan: SheetPlan, { name, errand }: F
 async function layOutPage(sheet: Excel.Worksheet, { printArea }: SheetPlan): Promise<void> {
   try {
     if (printArea !== null) sheet.pageLayout.setPrintArea(rangeAt(sheet, printArea));
+    sheet.pageLayout.orientation = "Landscape";
     sheet.pageLayout.zoom = { horizontalFitToPages: 1 };
     await sheet.context.sync();
   } catch (fault) {

@@ -33,7 +33,7 @@ export function residualChart(answer: Answer, row: number): PlacedChart {
       yTitle: "Residual",
       series: [{ name: "Residuals", x: area(0), y: area(1), drawn: "points" }],
     },
-    blocks: [dataBlock(column, "Behind the chart of residuals", ["Fitted", "Residual"], cells)],
+    blocks: [dataBlock(column, ["Behind the chart of residuals", "Fitted", "Residual"], cells)],
     formats: [noteOver(column, 2)],
   };
 }
@@ -58,14 +58,14 @@ export function intervalChart(answer: Answer, row: number): PlacedChart {
   });
   return {
     chart: {
-      title: "Intervals of each driver, in standard errors in force from the tested value",
+      title: `Intervals of each driver, from top: ${terms.map((term) => answer.terms[term] ?? "").join(", ")}`,
       kind: "scatter",
       place: placeAt(row),
-      xTitle: "Standard errors in force",
-      yTitle: terms.map((term, position) => `${terms.length - position}: ${answer.terms[term] ?? ""}`).join(", "),
+      xTitle: "Standard errors (in force) from the tested value",
+      yTitle: "Driver",
       series: series.map(({ name, x, y }) => ({ name, x, y, drawn: "line" })),
     },
-    blocks: series.map(({ name, column, cells }) => dataBlock(column, name, ["From and to", "Height"], cells)),
+    blocks: series.map(({ name, column, cells }) => dataBlock(column, [name, "From and to", "Height"], cells)),
     formats: series.map(({ column }) => noteOver(column, 2)),
   };
 }
@@ -99,16 +99,15 @@ function intervalRows({ inference, drivers }: Answer, { table, term, height }: I
   ];
 }
 
+/** Numbers behind a chart, under what they are and the headings of the two columns. */
 const dataBlock = (
   column: number,
-  about: string,
-  headings: readonly string[],
+  headings: readonly [string, string, string],
   cells: readonly PlanCell[][],
-): PlanBlock => ({
-  row: dataRow - 2,
-  column,
-  cells: [[text(about), null], headings.map(text), ...cells],
-});
+): PlanBlock => {
+  const [about, ...names] = headings;
+  return { row: dataRow - 2, column, cells: [[text(about), null], names.map(text), ...cells] };
+};
 
 const noteOver = (column: number, columns: number): PlanFormat => ({
   area: { row: dataRow - 2, column, rows: 2, columns },

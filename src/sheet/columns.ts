@@ -9,11 +9,15 @@ export const chartDataColumn = 24;
 export const liveColumn = 40;
 
 /** Widths in characters: the names, ten columns of figures, a gutter, the charts' columns. */
-export const pageWidths: readonly number[] = [30, 12, 12, 12, 12, 12, 10, 12, 12, 12, 30, 3];
+export const pageWidths: readonly number[] = [30, 18, 12, 14, 13, 11, 12, 13, 12, 12, 30, 2];
 
-const pageCharacters = pageWidths.slice(page.first, page.last + 1).reduce((sum, width) => sum + width, 0);
+/** In points. */
 const lineHeight = 15;
+/** Fonts differ from machine to machine: a sentence may need more than its count of characters. */
+const margin = 1.12;
 
-/** Height in points of a sentence wrapped over the page's width; a margin is kept since fonts differ. */
-export const sentenceHeight = (sentence: string): number =>
-  lineHeight * Math.max(1, Math.ceil((sentence.length * 1.12) / pageCharacters));
+/** Height in points of a text wrapped over the columns from `first` on, by default over the whole page. */
+export function sentenceHeight(sentence: string, first: number = page.first): number {
+  const characters = pageWidths.slice(first, page.last + 1).reduce((sum, width) => sum + width, 0);
+  return lineHeight * Math.max(1, Math.ceil((sentence.length * margin) / characters));
+}

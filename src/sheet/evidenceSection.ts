@@ -1,14 +1,16 @@
 import type { Answer } from "../core/answer/answer.ts";
 import { evidenceTable } from "../core/answer/tables.ts";
+import { page, sentenceHeight } from "./columns.ts";
 import type { Figures } from "./figures.ts";
 import { pValueFormat, statisticFormat } from "./numberFormats.ts";
 import { headingFormat } from "./plainWordsSection.ts";
 import type { PlanFormat } from "./plan.ts";
 import { type Section, section, text } from "./section.ts";
 
-/** Columns of the evidence table that hold statistics and p-values; the reading stands last. */
+/** Columns of the evidence table that hold statistics, p-values and the reading, which runs to the page's end. */
 const statistics = [2, 5];
 const pValues = [4, 7];
+const reading = 8;
 
 /** All tests with their readings, then the fit as a whole. */
 export function evidenceSection(answer: Answer, figures: Figures): Section {
@@ -19,14 +21,26 @@ export function evidenceSection(answer: Answer, figures: Figures): Section {
     numberFormat,
     align: "right",
   });
+  const readings = body.map((row, index): PlanFormat => ({
+    area: { row: index + 2, column: reading, rows: 1, columns: page.columns - reading },
+    merge: true,
+    wrap: true,
+    align: "left",
+    rowHeight: sentenceHeight(String(row[reading] ?? ""), reading),
+  }));
   return section(
     [[text("Evidence")], headings.map((heading) => text(String(heading))), ...rows],
     [
       headingFormat(0),
-      { area: { row: 1, column: 0, rows: 1, columns: headings.length }, style: "table heading", wrap: true },
+      { area: { row: 1, column: 0, rows: 1, columns: page.columns }, style: "table heading" },
+      ...[...statistics, ...pValues].map((at): PlanFormat => ({
+        area: { row: 1, column: at, rows: 1, columns: 1 },
+        align: "right",
+      })),
       { area: { row: 2, column: 0, rows: body.length, columns: 1 }, style: "label" },
       ...statistics.map((at) => column(at, statisticFormat)),
       ...pValues.map((at) => column(at, pValueFormat)),
+      ...readings,
     ],
   );
 }

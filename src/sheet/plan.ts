@@ -10,7 +10,7 @@ export interface SheetPlan {
   /** Rows kept in view while scrolling. */
   readonly frozenRows: number;
   readonly charts: readonly ChartPlan[];
-  /** What is printed, one page wide; null prints all. */
+  /** What is printed, one page wide and lying; null prints all. */
   readonly printArea: Area | null;
 }
 

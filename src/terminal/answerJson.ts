@@ -6,47 +6,37 @@ const byOrder: readonly string[] = ["breusch-godfrey", "ljung-box", "arch"];
 
 /** An answer as the object that `--json` prints: full double precision, stable keys. */
 export function answerJson(answer: Answer): object {
-  const { decision, inference, standardErrors } = answer;
-  const { neweyWest } = standardErrors;
+  const { observations, outcome, terms, coefficients, fit, inference, drivers } = answer;
+  const { verdict, rows, leftOut, leftOutCount, notes } = answer;
   return {
-    observations: answer.observations,
-    outcome: answer.outcome,
-    terms: answer.terms,
-    coefficients: answer.coefficients,
-    standardErrors: {
-      classical: standardErrors.classical,
-      white: standardErrors.white,
-      whiteFallback: standardErrors.whiteFallback,
-      neweyWest: neweyWest ?? { notApplicable: "Rows do not run through time." },
-      grouped: standardErrors.grouped ?? { notApplicable: "Rows are not in groups." },
-    },
-    fit: answer.fit,
+    ...{ observations, outcome, terms, coefficients },
+    standardErrors: standardErrorsJson(answer.standardErrors),
+    fit,
     tests: testsJson(answer.tests),
-    choice: {
-      policy: decision.policy,
-      errors: decision.inForce.errors.kind,
-      calledFor: decision.called.errors.kind,
-      version: "version" in decision.inForce.errors ? decision.inForce.errors.version : null,
-      lags: decision.inForce.errors.kind === "newey-west" ? answer.lags : null,
-      reference: decision.inForce.reference,
-      because: decision.because,
-      fourCase: decision.fourCase,
-      override: decision.override,
-      cautions: decision.cautions,
-    },
-    inference: {
-      classical: inference.classical,
-      white: inference.white,
-      neweyWest: inference.neweyWest,
-      grouped: inference.grouped,
-      inForce: inference.inForce,
-    },
-    drivers: answer.drivers,
-    verdict: answer.verdict,
-    rows: answer.rows,
-    leftOut: answer.leftOut,
-    leftOutCount: answer.leftOutCount,
-    notes: answer.notes,
+    choice: choiceJson(answer),
+    ...{ inference, drivers, verdict, rows, leftOut, leftOutCount, notes },
+  };
+}
+
+const standardErrorsJson = (errors: Answer["standardErrors"]): object => ({
+  ...errors,
+  neweyWest: errors.neweyWest ?? { notApplicable: "Rows do not run through time." },
+  grouped: errors.grouped ?? { notApplicable: "Rows are not in groups." },
+});
+
+function choiceJson({ decision, lags }: Answer): object {
+  const { errors, reference } = decision.inForce;
+  return {
+    policy: decision.policy,
+    errors: errors.kind,
+    calledFor: decision.called.errors.kind,
+    version: "version" in errors ? errors.version : null,
+    lags: errors.kind === "newey-west" ? lags : null,
+    reference,
+    because: decision.because,
+    fourCase: decision.fourCase,
+    override: decision.override,
+    cautions: decision.cautions,
   };
 }
 

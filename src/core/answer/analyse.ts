@@ -1,4 +1,3 @@
-import { covarianceOf } from "../covariance/covarianceOf.ts";
 import { lagsOf } from "../covariance/lags.ts";
 import { decide } from "../decision/decide.ts";
 import { rulesOf } from "../decision/policies.ts";

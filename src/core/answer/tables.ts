@@ -95,12 +95,16 @@ function testRow(outcome: TestOutcome, context: Context): (string | number)[] {
   ];
 }
 
-/** What a computed test means here: held against the level of the tests that decide. */
+/**
+ * What a computed test means here, held against the level of the tests that decide; the consequence for the standard
+ * errors is said only of the tests that the decision rests on.
+ */
 export function readingOf(outcome: Extract<TestOutcome, { kind: "computed" }>, { decision }: Context): string {
   const counted = decision.restsOn.find((entry) => entry.outcome === outcome);
   const pValue = counted?.pValue ?? (outcome.fForm ?? outcome.figure).pValue;
   const { rejected, notRejected } = testWords[outcome.test];
-  return pValue < decision.testLevel ? rejected : notRejected;
+  const reading = pValue < decision.testLevel ? rejected : notRejected;
+  return counted === undefined ? reading.replace(/: .*$/s, ".") : reading;
 }
 
 /** "chi-square(3)", "F(3, 92)". */

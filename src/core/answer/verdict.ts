@@ -109,9 +109,13 @@ function aboutValue({ driver, level }: Spoken, differs: boolean): string {
   return `${driver.term}: the coefficient ${coefficient ?? ""} (between ${low ?? ""} and ${high ?? ""}, ${confidenceInWords(level)}) ${judged} the tested value ${driver.against} (${p}).`;
 }
 
-function firmnessSentence({ driver, decision, lags, level, agreeing }: Spoken): string {
+/** Firm, or leaning and on what; where the kind in force says less than another, why it counts all the same. */
+function firmnessSentence({ driver, decision, level, agreeing }: Spoken): string {
   if (driver.firmness.kind === "firm") return `This is firm: ${agreeing} agree.`;
-  const { on } = driver.firmness;
-  const inForce = errorsInWords(decision.inForce.errors, lags);
-  return `This leans on the choice: with ${inForce} ${pValueInWords(driver.pValue, level)}, but ${listInWords(on)} would say otherwise.`;
+  const others = listInWords(driver.firmness.on);
+  const shown = driver.pValue < level;
+  const because = decision.override === null ? decision.because : "the kind in force was fixed by hand";
+  return shown
+    ? `This leans on the choice: ${others} would say otherwise.`
+    : `This leans on the choice: ${others} would have said otherwise, but ${because}.`;
 }
