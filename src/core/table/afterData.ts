@@ -1,5 +1,5 @@
 import { cellKind } from "./cells.ts";
-import { type Grid, coverage, fitsBody, hasFit } from "./grid.ts";
+import { type Grid, coverage, fitsBody, hasFit, nextFilled } from "./grid.ts";
 import { wordsOf } from "./headingRow.ts";
 
 /** Where the data end, and what was said of the rows below them. */
@@ -18,7 +18,7 @@ export function endOfData(grid: Grid, first: number): DataEnd {
   for (;;) {
     const before = last;
     last = withoutWords(grid, { first, last });
-    if (last < before) notes.unshift(wordsNote(grid, last + 1, before));
+    if (last < before) notes.unshift(wordsNote(grid, nextFilled(grid, last + 1), before));
     const summed = last > first && isSummary(grid, { first, last });
     if (summed) notes.unshift(summaryNote(grid, last));
     last = lastFilled(grid, { first, last: summed ? last - 1 : last });

@@ -42,6 +42,12 @@ export const isBlankCell = ({ kinds, numbers, texts }: CellColumn, row: number):
 export const coverage = ({ block, filled }: Grid, row: number): number =>
   filled.filter((column) => !isBlankCell(block.columns[column]!, row)).length;
 
+/** The first row from here on that holds anything; one beyond the last where none does. */
+export function nextFilled(grid: Grid, row: number): number {
+  while (row <= grid.last && coverage(grid, row) === 0) row++;
+  return row;
+}
+
 /** Whether a cell is of the sort that its column mostly holds, where that sort can be told from words. */
 export function fitsBody({ block, bodies }: Grid, column: number, row: number): boolean {
   const { kind, valued } = bodies[column]!;

@@ -32,7 +32,7 @@ export function firstDataRow(grid: Grid): number | null {
 }
 
 function firstCoveringRow(grid: Grid): number | null {
-  for (let row = grid.first; row < grid.last; row++) {
+  for (let row = grid.first; row <= grid.last; row++) {
     if (coversHalf(grid, row)) return row;
   }
   return null;

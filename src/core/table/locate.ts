@@ -4,7 +4,7 @@ import { addressOf } from "./address.ts";
 import { endOfData, firstWord, rowsInWords } from "./afterData.ts";
 import type { CellBlock } from "./block.ts";
 import type { CellColumn } from "./cells.ts";
-import { type Grid, coverage, gridOf, isBlankCell } from "./grid.ts";
+import { type Grid, gridOf, isBlankCell, nextFilled } from "./grid.ts";
 import { findHeadingRow, firstDataRow, isUnitsRow, plainHeading, rowOfHeadings, wordsOf } from "./headingRow.ts";
 import { columnInWords, distinctNames } from "./headings.ts";
 import type { Column, Source } from "./source.ts";
@@ -84,11 +84,6 @@ function startWithoutHeadings(grid: Grid): { first: number; notes: readonly stri
     first,
     notes: [`${unnamed} ${rows} above the data ${first - grid.first === 1 ? "was" : "were"} not read: "${word}".`],
   };
-}
-
-function nextFilled(grid: Grid, row: number): number {
-  while (row <= grid.last && coverage(grid, row) === 0) row++;
-  return row;
 }
 
 function hasData({ grid, first, last }: Read, column: number): boolean {
