@@ -22,8 +22,7 @@ const part = { title: 0, verdict: 1, fourCases: 2, drivers: 3, evidence: 4, howM
  * @param kind - live: figures are worksheet functions over the source ranges; kept: figures are values.
  */
 export function planAnswer(answer: Answer, facts: SheetFacts, kind: SheetKind): SheetPlan {
-  const laidOut = stack(partsOf(answer, facts, keptFigures(answer)));
-  const figures = kind === "kept" ? keptFigures(answer) : live(answer, facts, laidOut.starts[part.howMade] ?? 0);
+  const figures = kind === "kept" ? keptFigures(answer) : liveWithSettings(answer, facts);
   const { rows, formats, links, starts } = stack(partsOf(answer, facts, figures));
   const charts = [
     residualChart(answer, starts[part.fourCases] ?? 0),
@@ -54,8 +53,12 @@ const partsOf = (answer: Answer, facts: SheetFacts, figures: Figures) => [
   howMadeSection(answer, facts),
 ];
 
-const live = (answer: Answer, facts: SheetFacts, howMadeRow: number): Figures =>
-  liveFigures(answer, { ...facts.ranges, settings: settingsArea(answer, facts, howMadeRow) });
+/** The functions of a live sheet read the settings that stand on it; where they stand is known once it is laid out. */
+function liveWithSettings(answer: Answer, facts: SheetFacts): Figures {
+  const figuresWith = (settings: string): Figures => liveFigures(answer, { ...facts.ranges, settings });
+  const { starts } = stack(partsOf(answer, facts, figuresWith("$A$1")));
+  return figuresWith(settingsArea(answer, facts, starts[part.howMade] ?? 0));
+}
 
 const longestName = 31;
 
