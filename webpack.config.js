@@ -52,7 +52,7 @@ const addIn = (mode, serving) => ({
     publicPath: serving ? "/" : "auto",
     filename: "[name].js",
     chunkFilename: "[name].js",
-    clean: { keep: /^(desk\/|terminal\.mjs)/ },
+    clean: { keep: /^(desk\/|terminal)/ },
   },
   plugins: [
     new FunctionsFiles({ metadata: at("src/functions/metadata.ts"), footingUrl }),
@@ -94,12 +94,15 @@ const deskPane = (page) =>
 /** The command line. Packages that read files of their own, and the desk's, stay in node_modules. */
 const terminal = (mode) => ({
   ...common("terminal", mode),
+  // The program looks for its packages from where it lies when it runs, not from where it was built.
+  module: { ...shared.module, parser: { javascript: { importMeta: false, createRequire: false } } },
   target: "node20",
   entry: { terminal: "./src/entries/terminal.ts" },
   experiments: { outputModule: true },
   output: {
     path: at("dist"),
     filename: "[name].mjs",
+    chunkFilename: "terminal-[id].mjs",
     module: true,
     chunkFormat: "module",
     library: { type: "module" },

@@ -1,6 +1,6 @@
 import { type ReactNode, StrictMode } from "react";
 import { createRoot } from "react-dom/client";
-import { version } from "../../package.json";
+import packageFile from "../../package.json" with { type: "json" };
 import { detailsOf } from "../app/faultDetails.ts";
 import { createPane } from "../app/pane.ts";
 import { pageClient } from "../office/client.ts";
@@ -12,7 +12,8 @@ import { inlineAnalyst } from "../worker/inlineAnalyst.ts";
 import type { WorkerLine } from "../worker/protocol.ts";
 import { workerAnalyst } from "../worker/workerAnalyst.ts";
 
-const hire = (): WorkerLine => new Worker(new URL("./worker.ts", import.meta.url)) as WorkerLine;
+const hire = (): WorkerLine =>
+  new Worker(/* webpackChunkName: "worker" */ new URL("./worker.ts", import.meta.url)) as WorkerLine;
 
 const day = new Intl.DateTimeFormat("en-GB", { dateStyle: "long" });
 
@@ -22,7 +23,7 @@ const patienceMs = 15_000;
 const pane = createPane({
   host: excelHost(),
   analyst: workerAnalyst({ hire, fallback: inlineAnalyst, seconds: 600 }),
-  edition: { today: () => day.format(new Date()), version },
+  edition: { today: () => day.format(new Date()), version: packageFile.version },
   guard: (work) => void work().catch(showFault),
 });
 
