@@ -23,31 +23,34 @@ export async function watch(
   if (bad !== undefined) return failure({ code: "bad-address", address: bad });
   const watched = areas.filter((area) => area !== null);
   const teller = quietTeller(changed);
+  const stops: Stop[] = [];
+  const stopAll: Stop = async (context) => {
+    teller.silence();
+    for (const stop of stops) await stop(context);
+  };
   return inExcel(client, async (context): Promise<Watching> => {
-    const stops: (() => Promise<void>)[] = [];
-    const stopAll = async (): Promise<void> => {
-      teller.silence();
-      for (const stop of stops) await stop();
-    };
     for (const name of new Set(watched.map(({ sheet }) => sheet))) {
       const mine = watched.filter(({ sheet }) => sheet === name);
       const stop = await listen(context, name, follower(mine, teller.tell));
       if (!stop.ok) {
-        await stopAll();
+        await stopAll(context);
         return stop;
       }
-      stops.push(() => client.run(context, stop.value));
+      stops.push(stop.value);
     }
-    return success(stopAll);
+    // Handlers are taken back in the context that they were added in.
+    return success(() => client.run(context, stopAll));
   });
 }
+
+type Stop = (context: Excel.RequestContext) => Promise<void>;
 
 /** Hears of cells that were edited and of formulas that came to another value, until told to stop. */
 async function listen(
   context: Excel.RequestContext,
   name: string,
   hear: (change: SheetChange) => void,
-): Promise<Result<(context: Excel.RequestContext) => Promise<void>>> {
+): Promise<Result<Stop>> {
   const sheet = context.workbook.worksheets.getItemOrNullObject(name);
   sheet.load("id");
   await context.sync();
@@ -92,6 +95,7 @@ interface Teller {
 function quietTeller(changed: (address: string) => void): Teller {
   const addresses = new Set<string>();
   let timer: ReturnType<typeof setTimeout> | undefined;
+  let silent = false;
   const speak = (): void => {
     const told = [...addresses];
     addresses.clear();
@@ -99,10 +103,14 @@ function quietTeller(changed: (address: string) => void): Teller {
   };
   return {
     tell: (address) => {
+      if (silent) return;
       addresses.add(address);
       clearTimeout(timer);
       timer = setTimeout(speak, quietMilliseconds);
     },
-    silence: () => clearTimeout(timer),
+    silence: () => {
+      silent = true;
+      clearTimeout(timer);
+    },
   };
 }

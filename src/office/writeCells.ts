@@ -1,51 +1,62 @@
 import type { Area, PlanBlock, PlanCell, PlanFormat, PlanLink, SheetPlan } from "../sheet/plan.ts";
 import { dress } from "./styles.ts";
 
-/** Excel on the web refuses requests above 5 MB; a cell takes some 25 bytes, a sentence a few hundred. */
-const cellsAtOnce = 20_000;
+/** Excel on the web refuses requests above 5 MB; a character takes up to three bytes. */
+const charactersAtOnce = 1_200_000;
 
 export const rangeAt = (sheet: Excel.Worksheet, { row, column, rows, columns }: Area): Excel.Range =>
   sheet.getRangeByIndexes(row, column, rows, columns);
 
-/** Writes all blocks, a bounded number of cells a trip. */
+/** Writes all blocks, a bounded amount a trip. */
 export async function writeBlocks(sheet: Excel.Worksheet, blocks: readonly PlanBlock[]): Promise<void> {
   let unsent = 0;
   for (const piece of blocks.flatMap(pieces)) {
-    const cells = piece.cells.length * width(piece);
-    if (cells === 0) continue;
-    if (unsent > 0 && unsent + cells > cellsAtOnce) {
+    const characters = piece.cells.reduce((sum, line) => sum + charactersIn(line), 0);
+    if (unsent > 0 && unsent + characters > charactersAtOnce) {
       await sheet.context.sync();
       unsent = 0;
     }
     writePiece(sheet, piece);
-    unsent += cells;
+    unsent += characters;
   }
   await sheet.context.sync();
 }
 
-const width = ({ cells }: PlanBlock): number => Math.max(0, ...cells.map(({ length }) => length));
+/** Numbers have up to 24 characters, and a comma. */
+const charactersIn = (line: readonly PlanCell[]): number =>
+  line.reduce((sum, cell) => sum + (cell === null ? 5 : entered(cell).toString().length + 3), 0);
 
-function pieces(block: PlanBlock): PlanBlock[] {
-  const height = Math.max(1, Math.floor(cellsAtOnce / Math.max(1, width(block))));
-  return Array.from({ length: Math.ceil(block.cells.length / height) }, (_, piece) => ({
-    row: block.row + piece * height,
-    column: block.column,
-    cells: block.cells.slice(piece * height, (piece + 1) * height),
-  }));
+/** A block in as few pieces of whole rows as one trip each allows. */
+function pieces({ row, column, cells }: PlanBlock): PlanBlock[] {
+  const columns = Math.max(0, ...cells.map(({ length }) => length));
+  if (columns === 0) return [];
+  const found: PlanCell[][][] = [];
+  let room = 0;
+  for (const line of cells) {
+    const whole = Array.from({ length: columns }, (_, index) => line[index] ?? null);
+    const characters = charactersIn(whole);
+    if (characters > room) {
+      found.push([]);
+      room = charactersAtOnce;
+    }
+    found.at(-1)?.push(whole);
+    room -= characters;
+  }
+  let next = row;
+  return found.map((lines) => ({ row: (next += lines.length) - lines.length, column, cells: lines }));
 }
 
 function writePiece(sheet: Excel.Worksheet, { row, column, cells }: PlanBlock): void {
-  const columns = width({ row, column, cells });
-  const range = rangeAt(sheet, { row, column, rows: cells.length, columns });
-  range.formulas = cells.map((line) => Array.from({ length: columns }, (_, index) => entered(line[index] ?? null)));
+  const range = rangeAt(sheet, { row, column, rows: cells.length, columns: cells[0]?.length ?? 0 });
+  // A null leaves its cell as it is: empty, on a new sheet.
+  range.formulas = cells.map((line) => line.map((cell) => (cell === null ? null : entered(cell))));
 }
 
 /** A text is entered behind an apostrophe, which Excel takes off: so it is never read as a formula, a date or a number. */
-function entered(cell: PlanCell): string | number | null {
-  if (cell === null) return null;
+function entered(cell: NonNullable<PlanCell>): string | number {
   switch (cell.kind) {
     case "text":
-      return cell.text === "" ? null : `'${cell.text}`;
+      return cell.text === "" ? "" : `'${cell.text}`;
     case "number":
       return cell.number;
     case "formula":
