@@ -9,7 +9,7 @@ export interface Regression {
 
 export interface RecursiveResiduals {
   /**
-   * w_t = (y_t - x_t' b_(t-1)) / sqrt(1 + x_t' (X'X)_(t-1)^-1 x_t) up to sign, one a row; 0 where the row raised the
+   * w_t = (y_t - x_t' b_(t-1)) / sqrt(1 + x_t' (X'X)_(t-1)^-1 x_t), one a row; 0 where the row raised the
    * rank, since no earlier row says anything about its new direction.
    */
   readonly residuals: Float64Array<ArrayBuffer>;
@@ -57,7 +57,8 @@ function rotateIn(row: Float64Array, triangle: Float64Array, floors: Float64Arra
     const pivot = triangle[start + j]!;
     if (pivot === 0) {
       if (Math.abs(x) <= floors[j]!) continue;
-      triangle.set(row.subarray(j), start + j);
+      // A positive pivot keeps every cosine positive, and with them the sign of the residuals.
+      for (let l = j; l < width; l++) triangle[start + l] = x < 0 ? -row[l]! : row[l]!;
       return true;
     }
     if (x === 0) continue;
