@@ -22,7 +22,7 @@ const looks: Readonly<Record<PlanStyle, Look>> = {
   title: { bold: true, size: 16, color: ink },
   heading: { bold: true, size: 12, color: ink, below: line },
   "table heading": { bold: true, color: ink, fill: "#F3F4F6", below: line, vertical: "Top" },
-  label: { color: quiet },
+  label: { color: quiet, vertical: "Top" },
   note: { italic: true, color: quiet, vertical: "Top" },
   sentence: { color: ink, vertical: "Top" },
   "in force": { bold: true, color: ink, fill: "#DBEAFE" },

@@ -1,5 +1,5 @@
 import type { Answer } from "../core/answer/answer.ts";
-import { residualChart, intervalChart } from "./charts.ts";
+import { chartRows, residualChart, intervalChart } from "./charts.ts";
 import { chartColumn, chartColumns, page, pageWidths } from "./columns.ts";
 import { driversSection } from "./driversSection.ts";
 import { evidenceSection } from "./evidenceSection.ts";
@@ -26,7 +26,7 @@ export function planAnswer(answer: Answer, facts: SheetFacts, kind: SheetKind): 
   const { rows, formats, links, starts } = stack(partsOf(answer, facts, figures));
   const charts = [
     residualChart(answer, starts[part.fourCases] ?? 0),
-    intervalChart(answer, starts[part.evidence] ?? 0),
+    intervalChart(answer, (starts[part.fourCases] ?? 0) + chartRows + 1),
   ];
   return {
     name: sheetName(answer.outcome),

@@ -11,7 +11,8 @@ export interface PlacedChart {
   readonly formats: readonly PlanFormat[];
 }
 
-const chartRows = 16;
+/** Height of each chart in rows of the sheet. */
+export const chartRows = 14;
 const dataRow = 3;
 const placeAt = (row: number): Area => ({ row, column: chartColumn, rows: chartRows, columns: chartColumns });
 

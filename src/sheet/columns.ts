@@ -9,15 +9,15 @@ export const chartDataColumn = 24;
 export const liveColumn = 40;
 
 /** Widths in characters: the names, ten columns of figures, a gutter, the charts' columns. */
-export const pageWidths: readonly number[] = [30, 18, 12, 14, 13, 11, 12, 13, 12, 12, 30, 2];
+export const pageWidths: readonly number[] = [30, 25, 12, 14, 13, 11, 12, 13, 12, 12, 34, 2];
 
 /** In points. */
 const lineHeight = 15;
-/** Fonts differ from machine to machine: a sentence may need more than its count of characters. */
-const margin = 1.12;
+/** A column's width counts digits; letters are narrower on the average. A margin is left, since fonts differ. */
+const digitsALetter = 0.95;
 
 /** Height in points of a text wrapped over the columns from `first` on, by default over the whole page. */
 export function sentenceHeight(sentence: string, first: number = page.first): number {
   const characters = pageWidths.slice(first, page.last + 1).reduce((sum, width) => sum + width, 0);
-  return lineHeight * Math.max(1, Math.ceil((sentence.length * margin) / characters));
+  return lineHeight * Math.max(1, Math.ceil((sentence.length * digitsALetter) / characters));
 }

@@ -1,7 +1,7 @@
 import type { Answer } from "../core/answer/answer.ts";
 import { answerTable } from "../core/answer/tables.ts";
 import type { Figures } from "./figures.ts";
-import { formatFor, pValueFormat, ratioFormat } from "./numberFormats.ts";
+import { formatFor, numberHeadingFormat, pValueFormat, ratioFormat } from "./numberFormats.ts";
 import { headingFormat } from "./plainWordsSection.ts";
 import type { PlanFormat } from "./plan.ts";
 import { type Section, section, text } from "./section.ts";
@@ -32,7 +32,7 @@ export function driversSection(answer: Answer, figures: Figures): Section {
     [
       headingFormat(0),
       { area: { row: 1, column: 0, rows: 1, columns }, style: "table heading" },
-      { area: { row: 1, column: 1, rows: 1, columns: columns - 2 }, align: "right" },
+      { area: { row: 1, column: 1, rows: 1, columns: columns - 2 }, align: "right", numberFormat: numberHeadingFormat },
       { area: { row: 2, column: 0, rows: body.length, columns: 1 }, style: "label" },
       { area: { row: 2, column: 5, rows: body.length, columns: 1 }, style: "in force" },
       ...formats,

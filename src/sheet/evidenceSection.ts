@@ -2,7 +2,7 @@ import type { Answer } from "../core/answer/answer.ts";
 import { evidenceTable } from "../core/answer/tables.ts";
 import { page, sentenceHeight } from "./columns.ts";
 import type { Figures } from "./figures.ts";
-import { pValueFormat, statisticFormat } from "./numberFormats.ts";
+import { figureFormat, numberHeadingFormat, pValueFormat } from "./numberFormats.ts";
 import { headingFormat } from "./plainWordsSection.ts";
 import type { PlanFormat } from "./plan.ts";
 import { type Section, section, text } from "./section.ts";
@@ -16,11 +16,15 @@ const reading = 8;
 export function evidenceSection(answer: Answer, figures: Figures): Section {
   const [headings = [], ...body] = evidenceTable(answer);
   const rows = body.map((row, index) => row.map((_, column) => figures.evidence(index + 1, column)));
-  const column = (at: number, numberFormat: string): PlanFormat => ({
-    area: { row: 2, column: at, rows: body.length, columns: 1 },
+  const cell = (row: number, column: number, numberFormat: string): PlanFormat => ({
+    area: { row, column, rows: 1, columns: 1 },
     numberFormat,
     align: "right",
   });
+  const figureFormats = body.flatMap((row, index) => [
+    ...statistics.map((at) => cell(index + 2, at, figureFormat(row[at]))),
+    ...pValues.map((at) => cell(index + 2, at, pValueFormat)),
+  ]);
   const readings = body.map((row, index): PlanFormat => ({
     area: { row: index + 2, column: reading, rows: 1, columns: page.columns - reading },
     merge: true,
@@ -33,13 +37,10 @@ export function evidenceSection(answer: Answer, figures: Figures): Section {
     [
       headingFormat(0),
       { area: { row: 1, column: 0, rows: 1, columns: page.columns }, style: "table heading" },
-      ...[...statistics, ...pValues].map((at): PlanFormat => ({
-        area: { row: 1, column: at, rows: 1, columns: 1 },
-        align: "right",
-      })),
+      ...[...statistics, ...pValues].map((at) => cell(1, at, numberHeadingFormat)),
+      { area: { row: 2, column: 0, rows: body.length, columns: page.columns }, style: "sentence" },
       { area: { row: 2, column: 0, rows: body.length, columns: 1 }, style: "label" },
-      ...statistics.map((at) => column(at, statisticFormat)),
-      ...pValues.map((at) => column(at, pValueFormat)),
+      ...figureFormats,
       ...readings,
     ],
   );

@@ -69,9 +69,14 @@ export function liveFigures(answer: Answer, sources: LiveSources): Figures {
     at(1, evidenceColumn + readingColumn(evidence)),
     at(2, evidenceColumn + readingColumn(evidence)),
   ];
+  // A figure that does not apply by its nature stays blank: a formula there would have nothing to show.
+  const liveFrom =
+    (grid: Grid, first: number) =>
+    (row: number, column: number): PlanCell =>
+      grid[row]?.[column] === "" ? null : reference(at(row, first + column));
   return {
-    answer: (row, column) => reference(at(row, liveColumn + column)),
-    evidence: (row, column) => reference(at(row, evidenceColumn + column)),
+    answer: liveFrom(answers, liveColumn),
+    evidence: liveFrom(evidence, evidenceColumn),
     verdict: (line) => reference(at(line, verdictColumn)),
     choice: () => reference(at(0, choiceColumn)),
     mark: (spreadIs, followOnIs, words) =>

@@ -1,39 +1,44 @@
 import type { Answer } from "../core/answer/answer.ts";
-import { page, sentenceHeight } from "./columns.ts";
 import type { Figures } from "./figures.ts";
+import { pValueFormat } from "./numberFormats.ts";
 import { headingFormat } from "./plainWordsSection.ts";
 import type { PlanCell, PlanFormat } from "./plan.ts";
 import { type Section, section, text } from "./section.ts";
 
 const heading = "Which standard errors, and why";
 
-/** The table of the four cases with the one in force marked in words; policies that ask no tests say so instead. */
+/** Where the evidence table holds what the tests say of the two questions: their rows, the p-value and its level. */
+const question = { spread: 1, followOn: 2, level: 1, pValue: 4 } as const;
+
+/**
+ * The four cases with the one in force marked in words, and the p-values that put it there; policies that ask no
+ * tests say so by leaving them out.
+ */
 export function fourCasesSection(answer: Answer, figures: Figures): Section {
-  const { decision } = answer;
-  const inForce: PlanCell[] = [text("In force:"), figures.choice()];
-  const because: PlanCell[] = [text(becauseLine(answer))];
-  const asked = decision.fourCase.spread !== "not asked" || decision.fourCase.followOn !== "not asked";
-  const table = asked ? caseTable(answer, figures) : [];
-  const becauseRow = table.length + 2;
-  const formats: PlanFormat[] = [
-    headingFormat(0),
-    ...(asked ? caseFormats : []),
-    { area: { row: becauseRow - 1, column: 0, rows: 1, columns: 1 }, style: "label" },
-    {
-      area: { row: becauseRow, column: 0, rows: 1, columns: page.columns },
-      style: "sentence",
-      merge: true,
-      wrap: true,
-      rowHeight: sentenceHeight(becauseLine(answer)),
-    },
+  const { fourCase } = answer.decision;
+  const decided = [
+    ...(fourCase.spread === "not asked" ? [] : [decidedRow("p-value for uneven spread", question.spread, figures)]),
+    ...(fourCase.followOn === "not asked" ? [] : [decidedRow("p-value for follow-on", question.followOn, figures)]),
   ];
-  return section([[text(heading)], ...table, inForce, because], formats);
+  const table = decided.length === 0 ? [] : caseTable(answer, figures);
+  const inForce: PlanCell[] = [text("In force"), figures.choice()];
+  const rows = [...table, ...decided, inForce, [text("Policy"), text(answer.decision.policy)], ...overrideRow(answer)];
+  return section(
+    [[text(heading)], ...rows],
+    [
+      headingFormat(0),
+      ...(table.length === 0 ? [] : [tableHeading]),
+      { area: { row: table.length === 0 ? 1 : 2, column: 0, rows: rows.length, columns: 1 }, style: "label" },
+      {
+        area: { row: table.length + 1, column: 1, rows: Math.max(decided.length, 1), columns: 1 },
+        numberFormat: pValueFormat,
+        align: "left",
+      },
+    ],
+  );
 }
 
-const caseFormats: readonly PlanFormat[] = [
-  { area: { row: 1, column: 0, rows: 1, columns: 7 }, style: "table heading" },
-  { area: { row: 2, column: 0, rows: 2, columns: 1 }, style: "label" },
-];
+const tableHeading: PlanFormat = { area: { row: 1, column: 0, rows: 1, columns: 7 }, style: "table heading" };
 
 function caseTable(answer: Answer, { mark }: Figures): PlanCell[][] {
   const asked = answer.decision.fourCase.followOn !== "not asked";
@@ -45,9 +50,13 @@ function caseTable(answer: Answer, { mark }: Figures): PlanCell[][] {
   ];
 }
 
-function becauseLine({ decision }: Answer): string {
-  const policy = `Policy: ${decision.policy}.`;
-  const because = `Called for because ${decision.because}.`;
-  const override = decision.override === null ? "" : ` Fixed by hand; reason: ${decision.override}.`;
-  return `${policy} ${because}${override}`;
-}
+const decidedRow = (label: string, row: number, figures: Figures): PlanCell[] => [
+  text(label),
+  figures.evidence(row, question.pValue),
+  null,
+  null,
+  figures.evidence(row, question.level),
+];
+
+const overrideRow = ({ decision }: Answer): PlanCell[][] =>
+  decision.override === null ? [] : [[text("Fixed by hand, reason"), text(decision.override)]];

@@ -17,6 +17,13 @@ export function formatFor(values: readonly number[]): string {
 export const pValueFormat = `[<0.0001]"under 0.0001"${room};0.0000${room}`;
 
 export const ratioFormat = `0.00${room}`;
-export const statisticFormat = `#,##0.000${room}`;
-export const shareFormat = `0.0000${room}`;
-export const countFormat = `#,##0${room}`;
+const countFormat = `#,##0${room}`;
+
+/** For a column of figures of different kinds: counts without decimals, the rest with four significant digits. */
+export const figureFormat = (value: string | number | undefined): string =>
+  typeof value === "number" && Number.isInteger(value)
+    ? countFormat
+    : formatFor(typeof value === "number" ? [value] : []);
+
+/** For the headings of such columns: the same room behind them. */
+export const numberHeadingFormat = `General;General;General;@${room}`;

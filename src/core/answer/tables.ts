@@ -63,26 +63,54 @@ const evidenceHeadings = [
   "reading",
 ] as const;
 
-/** What the tests say of the two questions, then one row a test with its reading. */
-export function evidenceTable({ decision, tests, ...answer }: Answer): Grid {
-  const { spread, followOn } = decision.fourCase;
+/** What the tests say of the two questions, one row a test with its reading, then the fit as a whole. */
+export function evidenceTable(answer: Answer): Grid {
   return [
     [...evidenceHeadings],
-    ["Spread of the errors", ...blanks, spread],
-    ["Follow-on of the errors", ...blanks, followOn],
-    ...tests.map((outcome) => testRow(outcome, { decision, ...answer })),
+    questionRow("Spread of the errors", answer.decision, "spread"),
+    questionRow("Follow-on of the errors", answer.decision, "followOn"),
+    ...answer.tests.map((outcome) => testRow(outcome, answer)),
+    ...fitRows(answer),
   ];
 }
 
-const blanks = Array.from({ length: evidenceHeadings.length - 2 }, () => "");
+const blanks = (count: number): string[] => Array.from({ length: count }, () => "");
+
+/** One of the two questions behind the four cases: the smallest p-value of the tests that decide it, and the answer. */
+function questionRow(
+  title: string,
+  decision: Answer["decision"],
+  question: "spread" | "followOn",
+): (string | number)[] {
+  const asked = decision.restsOn.filter(
+    ({ outcome }) => (outcome.test === "breusch-godfrey") === (question === "followOn"),
+  );
+  const found = decision.fourCase[question];
+  const pValue = found === "not asked" ? "" : Math.min(...asked.map((entry) => entry.pValue));
+  const heldAgainst = found === "not asked" ? "" : `smallest p, held against ${decision.testLevel}`;
+  return [title, heldAgainst, "", "", pValue, "", "", "", found];
+}
+
+function fitRows({ observations, fit }: Answer): (string | number)[][] {
+  const figures: readonly (readonly [string, number])[] = [
+    ["Rows used", observations],
+    ["Degrees of freedom", fit.degreesOfFreedom],
+    [fit.uncentred ? "R-squared about zero" : "R-squared", fit.rSquared],
+    ["Adjusted R-squared", fit.adjustedRSquared],
+    ["Standard error of the regression", fit.sigma],
+    ["Log-likelihood", fit.logLikelihood],
+    ["AIC", fit.aic],
+    ["BIC", fit.bic],
+  ];
+  return figures.map(([name, value]) => [name, "", value, ...blanks(evidenceHeadings.length - 3)]);
+}
 
 type Context = Pick<Answer, "decision" | "options">;
 
 function testRow(outcome: TestOutcome, context: Context): (string | number)[] {
   const { title } = testWords[outcome.test];
   const order = outcome.order === null ? "" : `order ${outcome.order}`;
-  if (outcome.kind === "not-applicable")
-    return [title, order, ...blanks.slice(1), `Does not apply: ${outcome.because}`];
+  if (outcome.kind === "not-applicable") return [title, order, ...blanks(6), `Does not apply: ${outcome.because}`];
   const { figure, fForm } = outcome;
   return [
     title,
