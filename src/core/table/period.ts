@@ -74,8 +74,11 @@ function filled(grid: Grid, values: Float64Array): Grid | null {
   return values.length >= leastFilled * periods ? grid : null;
 }
 
+/** Numbers that are said to count weeks or months keep their gaps, however many; bare ones may be no count at all. */
 const numberGrid = (values: Float64Array, counts: Times["counts"]): Grid | null =>
-  filled(stepped(values, { unit: counts ?? "step", read: itself, word: counts }), values);
+  counts === null
+    ? filled(stepped(values, { unit: "step", read: itself, word: null }), values)
+    : stepped(values, { unit: counts, read: itself, word: counts });
 
 function dayGrid(values: Float64Array): Grid | null {
   if (areMonthly(values)) return stepped(values, { unit: "month", read: monthOf, word: null });

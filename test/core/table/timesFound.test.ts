@@ -95,6 +95,7 @@ describe("the period of a time column", () => {
       ).period,
     ).toEqual({ name: "weekly", unit: "week", season: 52 });
     expect(found([3, 4], "Week").labelOf(1)).toBe("week 4");
+    expect(positions(found([3, 4, 90], "Week"))).toEqual([0, 1, 87]);
   });
 
   it("keeps the place of periods that are missing", () => {
