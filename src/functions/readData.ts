@@ -1,7 +1,6 @@
 import type { Parts } from "../core/answer/modelOf.ts";
 import type { Problem } from "../core/problem/problem.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";
-import { mostRows } from "../core/table/address.ts";
 import { cellKind } from "../core/table/cells.ts";
 import type { Column, Source } from "../core/table/source.ts";
 import { apartFrom, hasHeadings, headingOf, repeatedHeading } from "./headings.ts";
@@ -84,16 +83,20 @@ function unequalHeights(one: Argument, other: Argument): Problem | null {
   return { code: "unequal-heights", first: `the ${one.name}`, rows, second: `the ${other.name}`, otherRows };
 }
 
+/** Hardly any data end in so many rows in which everything is exactly zero. */
+const zeroRowsTakenForEmpty = 100;
+
 /**
- * Rows down to the last one in use. Older versions of Excel hand blanks over as zeros: where whole columns arrive so,
- * the rows at the end that are zero in every argument are taken for empty.
+ * Rows down to the last one in use. Older versions of Excel hand blanks over as zeros: where a range reaches far beyond
+ * its data and not one blank arrives, the rows at its end that are zero in every argument are taken for empty.
  */
 function heightOfData(given: readonly Argument[]): number {
-  let rows = Math.max(...given.map(({ height }) => height));
-  if (rows < mostRows - 1) return rows;
-  const isEmpty = (cell: unknown): boolean => cell === 0 || isMissing(cell);
-  while (rows > 0 && given.every(({ cells }) => (cells[rows - 1] ?? []).every(isEmpty))) rows--;
-  return rows;
+  const rows = Math.max(...given.map(({ height }) => height));
+  const isZero = (row: number): boolean => given.every(({ cells }) => (cells[row] ?? []).every((cell) => cell === 0));
+  let nonZero = rows;
+  while (nonZero > 0 && isZero(nonZero - 1)) nonZero--;
+  if (rows - nonZero < zeroRowsTakenForEmpty) return rows;
+  return given.some(({ cells }) => cells.some((row) => row.some(isMissing))) ? rows : nonZero;
 }
 
 const columnsOf = ({ name, cells }: Argument, [first, last]: readonly [number, number]): Column[] =>

@@ -169,7 +169,15 @@ describe("whole columns", () => {
     expect(source.rowCount).toBe(49_999);
   });
 
-  it("keep zeros at the end of ranges that are not", () => {
-    expect(read(column(1, 2, 0), column(3, 4, 0)).source.rowCount).toBe(3);
+  it("keep zeros at the end where they are few, or where blanks are told from zeros", () => {
+    const ending = (zeros: number, first: unknown) => [
+      ["y"],
+      [first],
+      [2],
+      ...Array.from({ length: zeros }, () => [0]),
+    ];
+    expect(read(ending(99, 1), ending(99, 3).with(0, ["x"])).source.rowCount).toBe(101);
+    expect(read(ending(100, 1), ending(100, 3).with(0, ["x"])).source.rowCount).toBe(2);
+    expect(read(ending(100, 1), ending(100, null).with(0, ["x"])).source.rowCount).toBe(102);
   });
 });
