@@ -37,7 +37,11 @@ const common = (name, mode) => ({
   cache: { ...cache, name: `${name}-${mode}` },
   // No eval: the pages forbid it.
   devtool: mode === "production" ? false : "cheap-module-source-map",
-  optimization: mode === "production" ? { minimizer: [new EsbuildPlugin({ target, css: true })] } : {},
+  optimization: {
+    // One file a bundle: the manifest and the pages name them.
+    splitChunks: false,
+    ...(mode === "production" && { minimizer: [new EsbuildPlugin({ target, css: true })] }),
+  },
 });
 
 /** What Excel loads: nothing of the desk's is in it. One page holds functions and pane, so they share one runtime. */

@@ -1,0 +1,134 @@
+import { readFile } from "node:fs/promises";
+import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from "vitest";
+import type { Download, Page } from "playwright-core";
+import { demoBook } from "../../src/desk/demo/demoBook.ts";
+import { openXlsx } from "../../src/desk/files/openXlsx.ts";
+import { atSheet, startDeskSuite, type DeskPage, type DeskSuite } from "./support/deskPage.ts";
+
+let suite: DeskSuite;
+let desk: DeskPage;
+beforeAll(async () => {
+  suite = await startDeskSuite();
+});
+afterAll(() => suite.close());
+beforeEach(async () => {
+  desk = await suite.openDesk();
+});
+afterEach(async () => {
+  expect(desk.asked, "no other host is asked for anything").toEqual([]);
+  expect(desk.faults).toEqual([]);
+  await desk.close();
+});
+
+async function saved(page: Page, button: string): Promise<Download> {
+  const [download] = await Promise.all([
+    page.waitForEvent("download"),
+    page.getByRole("button", { name: button }).click(),
+  ]);
+  return download;
+}
+
+const bytesOf = async (download: Download): Promise<Uint8Array> =>
+  new Uint8Array(await readFile(await download.path()));
+
+describe("the desk", () => {
+  it("opens with the demo workbook and the pane beside it", async () => {
+    const { page } = desk;
+    for (const { name } of demoBook().sheets) await page.getByText(name, { exact: true }).first().waitFor();
+    expect(await atSheet(page, (d) => d.values("Months!A4:C5"))).toEqual([
+      ["Month", "Repairs", "Price index"],
+      [42370, expect.any(Number), expect.any(Number)],
+    ]);
+  });
+
+  it("computes a formula of the grid and one of the add-in, and again when a cell changes", async () => {
+    const { page } = desk;
+    await atSheet(page, (d) => d.edit("Parts!H5", "=AVERAGE(B5:B64)"));
+    await atSheet(page, (d) => d.edit("Parts!H6", "=FOOTING.COEFFICIENTS(B4:B64,C4:D64)"));
+    const before = await atSheet(page, (d) => [d.value("Parts!H5"), ...d.values("Parts!H6:H8").flat()]);
+    expect(before.every((value) => typeof value === "number")).toBe(true);
+    await atSheet(page, (d) => d.edit("Parts!B5", 99));
+    const after = await atSheet(page, (d) => [d.value("Parts!H5"), ...d.values("Parts!H6:H8").flat()]);
+    after.forEach((value, index) => expect(value).not.toBe(before[index]));
+  });
+
+  it("saves the workbook, opens it again and finds the same", async () => {
+    const { page } = desk;
+    await atSheet(page, (d) => d.edit("Parts!H5", "=SUM(B5:B6)"));
+    const download = await saved(page, "Save workbook");
+    expect(download.suggestedFilename()).toBe("Kestrel & Vane.xlsx");
+    const reading = await openXlsx(await bytesOf(download));
+    const expected = await atSheet(page, (d) => d.values("Parts!A1:H64"));
+    await page.getByLabel("File to open").setInputFiles(await download.path());
+    await desk.pane.getByRole("button", { name: "Use selection" }).waitFor();
+    expect(reading.ok && reading.value.sheets.map(({ name }) => name)).toEqual(
+      demoBook().sheets.map(({ name }) => name),
+    );
+    expect(await atSheet(page, (d) => d.values("Parts!A1:H64"))).toEqual(expected);
+    expect(await atSheet(page, (d) => d.formula("Parts!H5"))).toBe("=SUM(B5:B6)");
+  });
+
+  it("saves the sheet in front as separated text and opens such text", async () => {
+    const { page } = desk;
+    await page.getByText("Weeks", { exact: true }).first().click();
+    const download = await saved(page, "Save sheet as CSV");
+    expect(download.suggestedFilename()).toBe("Weeks.csv");
+    const text = new TextDecoder().decode(await bytesOf(download));
+    expect(text).toMatch(/^\uFEFF?Week from,Courier cost,Parcels,Fuel\r\n2021-01-04,/);
+    const file = { name: "weeks of ours.csv", mimeType: "text/csv", buffer: Buffer.from(text) };
+    await page.getByLabel("File to open").setInputFiles(file);
+    await desk.pane.getByRole("button", { name: "Use selection" }).waitFor();
+    expect(await atSheet(page, (d) => d.value("'weeks of ours'!A2"))).toBe(44_200);
+  });
+
+  it("says why a file cannot be read, and leaves the workbook as it was", async () => {
+    const { page } = desk;
+    const file = { name: "notes.xlsx", mimeType: "", buffer: Buffer.from("just notes") };
+    await page.getByLabel("File to open").setInputFiles(file);
+    await page.getByText("notes.xlsx cannot be read: it is no Excel workbook (.xlsx).").waitFor();
+    expect(await atSheet(page, (d) => d.value("Months!B4"))).toBe("Repairs");
+  });
+});
+
+describe("by keyboard", () => {
+  const focused = (page: Page): Promise<string> =>
+    page.evaluate(() => {
+      const parts = { bar: "header", sheet: "main", pane: "iframe" };
+      const inside = Object.entries(parts).find(([, part]) =>
+        document.querySelector(part)?.contains(document.activeElement),
+      );
+      return inside?.[0] ?? "none";
+    });
+
+  it("F6 goes round bar, sheet and pane, and back with Shift", async () => {
+    const { page } = desk;
+    await page.getByRole("button", { name: "Open..." }).focus();
+    const seen: string[] = [];
+    for (const key of ["F6", "F6", "F6", "Shift+F6", "Shift+F6"]) {
+      await page.keyboard.press(key);
+      await page.waitForTimeout(100);
+      seen.push(await focused(page));
+    }
+    expect(seen).toEqual(["sheet", "pane", "bar", "pane", "sheet"]);
+  });
+
+  it("a cell is typed into after F6", async () => {
+    const { page } = desk;
+    await atSheet(page, (d) => d.select("Handover!F3"));
+    await page.getByRole("button", { name: "Open..." }).focus();
+    await page.keyboard.press("F6");
+    await page.keyboard.type("1.5");
+    await page.keyboard.press("Enter");
+    expect(await atSheet(page, (d) => d.value("Handover!F3"))).toBe(1.5);
+  });
+
+  it("the pane is made wider and narrower with the arrow keys", async () => {
+    const edge = desk.page.getByRole("separator", { name: "Width of the pane" });
+    const before = Number(await edge.getAttribute("aria-valuenow"));
+    await edge.focus();
+    await desk.page.keyboard.press("ArrowLeft");
+    expect(Number(await edge.getAttribute("aria-valuenow"))).toBeGreaterThan(before);
+    for (let i = 0; i < 40; i++) await desk.page.keyboard.press("ArrowRight");
+    expect(Number(await edge.getAttribute("aria-valuenow"))).toBe(320);
+  });
+});
