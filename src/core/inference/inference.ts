@@ -3,6 +3,8 @@ import type { Reference } from "./reference.ts";
 /** Ratios, p-values and intervals of k coefficients under one kind of standard errors. */
 export interface InferenceTable {
   readonly reference: Reference;
+  /** Where each coefficient has t degrees of freedom of its own (Satterthwaite's): one value a coefficient. */
+  readonly degreesOfFreedom?: readonly number[];
   readonly standardErrors: readonly number[];
   /** (b - b0) / se. */
   readonly ratio: readonly number[];
