@@ -18,6 +18,8 @@ export interface FakeHost extends Host {
   readonly plans: SheetPlan[];
   readonly gone: string[];
   readonly watched: () => readonly string[];
+  /** Everyone who ever asked to be told of changes, those who no longer listen included. */
+  readonly listeners: ((address: string) => void)[];
   readonly change: (row: number, column: number, cell: Cell) => void;
 }
 
@@ -37,6 +39,7 @@ export function fakeHost(sheet: string, rows: Cell[][]): FakeHost {
     plans: [],
     gone: [],
     watched: () => watched,
+    listeners: [],
     change: (row, column, cell) => {
       host.rows = host.rows.map((cells, r) => cells.map((old, c) => (r === row && c === column ? cell : old)));
       if (watched.length > 0) tell(addressOf({ sheet, row, column, rows: 1, columns: 1 }));
@@ -60,6 +63,7 @@ export function fakeHost(sheet: string, rows: Cell[][]): FakeHost {
     watch: (addresses, changed) => {
       watched = addresses;
       tell = changed;
+      host.listeners.push(changed);
       const stop = (): Promise<void> => {
         watched = [];
         return Promise.resolve();

@@ -1,8 +1,9 @@
 import type { Cell } from "../../src/core/table/cells.ts";
 
-/** 1 January 2018 as a spreadsheet counts days. */
-const firstDay = 43_101;
-const monthDays = [31, 28, 31, 30, 31, 30, 31, 31, 30, 31, 30, 31];
+const firstYear = 2018;
+
+/** The first day of a month as a spreadsheet counts days, from the end of 1899. */
+const serialOf = (month: number): number => (Date.UTC(firstYear, month, 1) - Date.UTC(1899, 11, 30)) / 86_400_000;
 
 /** The same invented figures on every machine, between 0 and 1 (Mulberry32). */
 function generator(seed: number): () => number {
@@ -22,7 +23,6 @@ function generator(seed: number): () => number {
 export function repairMonths(months: number): Cell[][] {
   const next = generator(20_261);
   const centred = (): number => next() + next() + next() - 1.5;
-  let day = firstDay;
   let error = 0;
   const rows = Array.from({ length: months }, (_, month): Cell[] => {
     const price = 100 + month * 0.35 + 6 * centred();
@@ -30,9 +30,7 @@ export function repairMonths(months: number): Cell[][] {
     const rain = Math.round(11 + 5 * centred());
     error = 0.6 * error + 9 * centred();
     const repairs = 520 - 1.9 * price + 0.8 * advertising - 3.1 * rain + error;
-    const date = { date: day };
-    day += monthDays[month % 12]!;
-    return [date, Math.round(repairs), round(price), round(advertising), rain];
+    return [{ date: serialOf(month) }, Math.round(repairs), round(price), round(advertising), rain];
   });
   return [["Month", "Repairs", "Price index", "Advertising", "Rainy days"], ...rows];
 }

@@ -2,7 +2,8 @@ import { makeStyles, mergeClasses, tokens } from "@fluentui/react-components";
 import type { ReactNode } from "react";
 import type { Answer } from "../../core/answer/answer.ts";
 import { numberInWords } from "../../core/answer/wording.ts";
-import { type KindFigures, kindFigures, pInWords, writerFor } from "./driverFigures.ts";
+import { type KindFigures, kindFigures, writerFor } from "./driverFigures.ts";
+import { pFigure } from "../parts/pFigure.ts";
 
 const useStyles = makeStyles({
   table: {
@@ -70,7 +71,7 @@ const ratioDecimals = 2;
 
 function linesFor(answer: Answer, index: number): readonly Line[] {
   const write = writerFor(answer.drivers[index]!);
-  const bare = (pValue: number): string => pInWords(pValue, answer).replace(/^p (= )?/, "");
+  const bare = (pValue: number): string => pFigure(pValue, answer.options.level);
   return [
     ["standard error", ({ standardError }) => numberInWords(standardError, decimalsBeyond(standardError))],
     ["ratio", ({ ratio }) => numberInWords(ratio, ratioDecimals).replace("-", "−")],

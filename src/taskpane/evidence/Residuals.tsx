@@ -4,16 +4,23 @@ import { addressOf, parseAddress } from "../../core/table/address.ts";
 import { useType } from "../look/type.ts";
 import { CellList } from "../parts/CellList.tsx";
 import { ResidualPicture } from "../pictures/ResidualPicture.tsx";
-import { largestResiduals, residualsInWords } from "./residualWords.ts";
+import { largestResiduals, overFittedInWords, overRowsInWords } from "./residualWords.ts";
 
 const mostListed = 5;
 
-/** Residuals over fitted values: a fan says uneven spread, a bend says a missing curve; and the rows that fit worst. */
-export function Residuals({ answer, address }: { readonly answer: Answer; readonly address: string }): ReactNode {
+interface ResidualsProps {
+  readonly answer: Answer;
+  /** Where the data stand. */
+  readonly address: string;
+}
+
+/** Residuals over fitted values, over the rows where these run through time, and the rows that fit worst. */
+export function Residuals({ answer, address }: ResidualsProps): ReactNode {
   const type = useType();
-  const { points } = answer;
-  const words = useMemo(() => residualsInWords(points), [points]);
+  const { points, observations } = answer;
   const worst = useMemo(() => largestResiduals(points, mostListed), [points]);
+  const words = useMemo(() => overFittedInWords(points), [points]);
+  const shown = points.fitted.length.toLocaleString("en-US");
   return (
     <>
       <ResidualPicture
@@ -25,14 +32,32 @@ export function Residuals({ answer, address }: { readonly answer: Answer; readon
       />
       <p className={type.remark}>
         A fan says that the spread is uneven, a bend that a curve is missing.
-        {points.thinned &&
-          ` Shown are ${points.fitted.length.toLocaleString("en-US")} of ${answer.observations.toLocaleString("en-US")} rows.`}
+        {points.thinned && ` Shown are ${shown} of ${observations.toLocaleString("en-US")} rows.`}
       </p>
-      <p className={type.remark}>Farthest from the fit{points.thinned ? ", among the rows shown" : ""}:</p>
+      {answer.rows.kind === "time" && <OverRows answer={answer} />}
+      <h3 className={type.subhead}>Farthest from the fit{points.thinned && ", among the rows shown"}</h3>
       <CellList
         items={worst.map(({ row, words: said }) => ({ address: rowAddress(address, row), words: said }))}
         more={0}
       />
+    </>
+  );
+}
+
+function OverRows({ answer }: { readonly answer: Answer }): ReactNode {
+  const type = useType();
+  const { points } = answer;
+  const words = useMemo(() => overRowsInWords(points), [points]);
+  return (
+    <>
+      <ResidualPicture
+        x={points.rows}
+        residuals={points.residuals}
+        xTitle="row of the sheet"
+        yTitle="residual"
+        alternative={words}
+      />
+      <p className={type.remark}>Long runs on one side of zero say that the errors follow on.</p>
     </>
   );
 }

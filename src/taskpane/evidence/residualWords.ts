@@ -3,7 +3,7 @@ import type { ResidualPoints } from "../../core/answer/answer.ts";
 const brief = new Intl.NumberFormat("en-US", { maximumSignificantDigits: 3 });
 
 /** What the picture of residuals over fitted values shows, for those who do not see it: range, and spread low and high. */
-export function residualsInWords({ fitted, residuals }: ResidualPoints): string {
+export function overFittedInWords({ fitted, residuals }: ResidualPoints): string {
   const order = fitted.map((_, index) => index).sort((a, b) => fitted[a]! - fitted[b]!);
   const third = Math.max(1, Math.floor(order.length / 3));
   const low = spreadOf(order.slice(0, third).map((index) => residuals[index]!));
@@ -13,6 +13,14 @@ export function residualsInWords({ fitted, residuals }: ResidualPoints): string 
     `Residuals of ${residuals.length} rows over the fitted values, from ${least ?? ""} to ${most ?? ""}. ` +
     `Among the third with the smallest fitted values they spread by ${brief.format(low)}, among the third with the largest by ${brief.format(high)}.`
   );
+}
+
+/** What the picture of residuals over rows shows: how often two neighbours stand on the same side of zero. */
+export function overRowsInWords({ residuals, rows }: ResidualPoints): string {
+  const order = rows.map((_, index) => index).sort((a, b) => rows[a]! - rows[b]!);
+  const pairs = order.slice(1).map((index, before) => residuals[index]! * residuals[order[before]!]!);
+  const same = pairs.filter((product) => product > 0).length;
+  return `Residuals in the order of the rows. Of ${pairs.length} neighbouring pairs, ${same} lie on the same side of zero.`;
 }
 
 /** Root mean square about zero, the centre of residuals. */

@@ -44,6 +44,12 @@ export const useType = makeStyles({
     ":focus": { outlineStyle: "none" },
     ":focus-visible": { outline: `2px solid ${tokens.colorStrokeFocus2}`, outlineOffset: "2px" },
   },
+  subhead: {
+    margin: `${tokens.spacingVerticalM} 0 ${tokens.spacingVerticalXS}`,
+    fontSize: tokens.fontSizeBase200,
+    lineHeight: tokens.lineHeightBase200,
+    fontWeight: tokens.fontWeightSemibold,
+  },
   footnote: {
     margin: `${tokens.spacingVerticalL} 0 0`,
     paddingTop: tokens.spacingVerticalS,

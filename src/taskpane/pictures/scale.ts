@@ -9,9 +9,10 @@ export function scaleOver(values: readonly number[], margin = 0.06): Scale {
   const first = Math.min(...values);
   const last = Math.max(...values);
   // One value alone still needs a width: a tenth of itself, or one.
-  const span = last > first ? last - first : Math.abs(first) / 10 || 1;
-  const low = first - margin * span;
-  const high = last + margin * span;
+  const alone = Math.abs(first) / 10 || 1;
+  const room = last > first ? margin * (last - first) : alone / 2;
+  const low = first - room;
+  const high = last + room;
   return { low, high, percent: (value) => ((value - low) / (high - low)) * 100 };
 }
 

@@ -1,0 +1,116 @@
+import { makeStyles, mergeClasses, tokens } from "@fluentui/react-components";
+import type { ReactNode } from "react";
+import type { Answer } from "../../core/answer/answer.ts";
+import { lawInWords } from "../../core/answer/tables.ts";
+import { pValueInWords } from "../../core/answer/wording.ts";
+import type { Figure, TestOutcome } from "../../core/diagnostics/outcome.ts";
+import { testWords } from "../../core/diagnostics/words.ts";
+import { pFigure } from "../parts/pFigure.ts";
+import type { TestGroup } from "./testGroups.ts";
+
+const useStyles = makeStyles({
+  figures: {
+    margin: `0 0 ${tokens.spacingVerticalXS}`,
+    fontSize: tokens.fontSizeBase200,
+    lineHeight: "18px",
+    fontVariantNumeric: "tabular-nums",
+  },
+  table: { borderCollapse: "collapse", width: "100%" },
+  head: { fontWeight: tokens.fontWeightRegular, textAlign: "right", color: tokens.colorNeutralForeground3 },
+  cell: {
+    textAlign: "right",
+    whiteSpace: "nowrap",
+    borderTop: `1px solid ${tokens.colorNeutralStroke2}`,
+    padding: "2px 0",
+  },
+  wide: { textAlign: "left", borderTop: `1px solid ${tokens.colorNeutralStroke2}`, padding: "2px 0 2px 12px" },
+  side: { textAlign: "left", fontWeight: tokens.fontWeightRegular },
+  main: { fontWeight: tokens.fontWeightSemibold },
+});
+
+interface TestFiguresProps {
+  readonly group: TestGroup;
+  readonly answer: Answer;
+}
+
+/** Statistic, the law it is held against, p-value: two lines for one outcome, a table where there are several orders. */
+export function TestFigures({ group, answer }: TestFiguresProps): ReactNode {
+  const styles = useStyles();
+  if (group.outcomes.length > 1) return <OrderTable group={group} answer={answer} />;
+  const { main } = group;
+  if (main.kind !== "computed") return null;
+  return (
+    <p className={styles.figures}>
+      {figureInWords(main.figure, answer)}
+      {main.fForm !== null && (
+        <>
+          <br />
+          {figureInWords(main.fForm, answer)}
+        </>
+      )}
+    </p>
+  );
+}
+
+const statistic = new Intl.NumberFormat("en-US", { maximumSignificantDigits: 4 });
+
+/** "8.412 against chi-square(3), p = 0.038". */
+const figureInWords = (figure: Figure, answer: Answer): string =>
+  `${statistic.format(figure.statistic)} against ${lawInWords(figure)}, ${pInWords(figure, answer)}`;
+
+const pInWords = ({ pValue }: Figure, { decision }: Answer): string => pValueInWords(pValue, decision.testLevel);
+
+/** One line an order; the one that decided in bold. */
+function OrderTable({ group, answer }: TestFiguresProps): ReactNode {
+  const styles = useStyles();
+  const heads = ["statistic", "p-value", "F form", "p-value"];
+  return (
+    <table
+      className={mergeClasses(styles.figures, styles.table)}
+      aria-label={`${testWords[group.test].title} by order`}
+    >
+      <thead>
+        <tr>
+          <th scope="col" className={mergeClasses(styles.head, styles.side)}>
+            order
+          </th>
+          {heads.map((head, index) => (
+            <th key={index} scope="col" className={styles.head}>
+              {head}
+            </th>
+          ))}
+        </tr>
+      </thead>
+      <tbody>
+        {group.outcomes.map((outcome) => (
+          <tr key={outcome.order} className={mergeClasses(outcome === group.main && group.decided && styles.main)}>
+            <th scope="row" className={mergeClasses(styles.cell, styles.side)}>
+              {outcome.order}
+            </th>
+            <Figures outcome={outcome} answer={answer} />
+          </tr>
+        ))}
+      </tbody>
+    </table>
+  );
+}
+
+function Figures({ outcome, answer }: { readonly outcome: TestOutcome; readonly answer: Answer }): ReactNode {
+  const styles = useStyles();
+  if (outcome.kind !== "computed") {
+    return (
+      <td colSpan={4} className={styles.wide}>
+        {outcome.because}
+      </td>
+    );
+  }
+  const bare = ({ pValue }: Figure): string => pFigure(pValue, answer.decision.testLevel);
+  const { figure, fForm } = outcome;
+  const cells = [statistic.format(figure.statistic), bare(figure)];
+  const fCells = fForm === null ? ["", ""] : [statistic.format(fForm.statistic), bare(fForm)];
+  return [...cells, ...fCells].map((words, index) => (
+    <td key={index} className={styles.cell}>
+      {words}
+    </td>
+  ));
+}

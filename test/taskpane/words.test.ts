@@ -1,0 +1,148 @@
+import { describe, expect, it } from "vitest";
+import { describeColumn } from "../../src/core/table/describe.ts";
+import type { Cell } from "../../src/core/table/cells.ts";
+import type { ColumnSetup } from "../../src/app/setup.ts";
+import { holdsInWords, unusableCells } from "../../src/taskpane/data/columnWords.ts";
+import { intervalsInWords, kindFigures, writerFor } from "../../src/taskpane/answer/driverFigures.ts";
+import { groupTests, readingOfGroup } from "../../src/taskpane/evidence/testGroups.ts";
+import { largestResiduals, overFittedInWords, overRowsInWords } from "../../src/taskpane/evidence/residualWords.ts";
+import { pFigure } from "../../src/taskpane/parts/pFigure.ts";
+import { counted, rowsInWords } from "../../src/taskpane/parts/rowWords.ts";
+import { answerFixture } from "../support/answerFixture.ts";
+import { columnOf, day } from "../support/sheet.ts";
+
+const describing = (name: string, cells: readonly Cell[]) => describeColumn(columnOf(name, cells));
+const shops = ["North", "South", "North", "South", "North", "South"];
+
+describe("what a column holds", () => {
+  it.each([
+    ["3 numbers", [4, 7, 9]],
+    ["3 numbers that count the rows", [1, 2, 3]],
+    ["2 numbers, all the same", [5, null, 5]],
+    ["2 dates", [day(2020, 1, 1), day(2020, 2, 1)]],
+    ["2 categories", shops],
+    ["text, 4 different", ["alpha", "beta", "gamma", "delta"]],
+  ] as const)("%s", (words, cells) => {
+    expect(holdsInWords(describing("Column", cells))).toBe(words);
+  });
+});
+
+describe("cells that cannot be used", () => {
+  const setup: ColumnSetup = {
+    column: "Price",
+    role: "driver",
+    guessed: false,
+    as: "number",
+    base: null,
+    transform: { kind: "none" },
+    unit: "",
+    against: 0,
+    textNumbers: null,
+  };
+  const column = describing("Price", [4, "7.5", null, 9, "n/a", 3, 8, 2, 5, 6]);
+
+  it("are listed with what they hold", () => {
+    expect(unusableCells(column, setup)).toEqual({
+      count: 3,
+      cells: [
+        { address: "Months!A3", value: "7.5" },
+        { address: "Months!A4", value: "" },
+        { address: "Months!A6", value: "n/a" },
+      ],
+    });
+  });
+
+  it("are fewer once text may be read as numbers", () => {
+    const agreed = unusableCells(column, { ...setup, textNumbers: "." });
+    expect(agreed.count).toBe(2);
+    expect(agreed.cells.map(({ address }) => address)).toEqual(["Months!A4", "Months!A6"]);
+  });
+});
+
+describe("rows in words", () => {
+  it("count", () => {
+    expect([counted(1, "row"), counted(2400, "row")]).toEqual(["1 row", "2,400 rows"]);
+  });
+
+  it("tell period and gaps, and how many gaps are not named", () => {
+    const period = { name: "monthly", unit: "month", season: 12 };
+    const rows = {
+      kind: "time",
+      period,
+      first: "May 2020",
+      last: "June 2022",
+      gaps: 3,
+      gapLabels: ["July 2020"],
+    } as const;
+    expect(rowsInWords(rows)).toBe("monthly from May 2020 to June 2022, 3 gaps: July 2020, 2 more");
+    expect(rowsInWords({ ...rows, gaps: 0, gapLabels: [] })).toBe("monthly from May 2020 to June 2022, no gaps");
+    expect(rowsInWords({ kind: "groups", by: "Shop", groups: 7 })).toBe("in 7 groups by Shop");
+  });
+});
+
+describe("figures of a driver", () => {
+  it("stand under their kinds, the one in force as it counts", () => {
+    const figures = kindFigures(answerFixture, 1);
+    expect(figures.map(({ label, inForce }) => [label, inForce])).toEqual([
+      ["classical", false],
+      ["White", false],
+      ["Newey-West", true],
+    ]);
+    expect(figures[0]).toMatchObject({ low: -5, high: 0, reference: "t(46)" });
+    expect(figures[2]).toMatchObject({ low: -7, high: 2, pValue: 0.023, pValueNormal: 0.0242 });
+  });
+
+  it("are written to what the interval supports, with a minus sign", () => {
+    expect(writerFor({ low: -2.5, high: -2.1 })(-2.3456)).toBe("−2.35");
+    expect(writerFor({ low: 900, high: 1700 })(1288)).toBe("1,290");
+  });
+
+  it("are told to those who do not see the picture", () => {
+    expect(intervalsInWords(answerFixture, 1)).toBe(
+      "95 % intervals of Price: classical from −5.0 to 0.0; White from −6.0 to 1.0; Newey-West (in force) from −7.0 to 2.0.",
+    );
+  });
+
+  it("show p-values without their name", () => {
+    expect([pFigure(0.0341, 0.05), pFigure(0.00001, 0.05)]).toEqual(["0.034", "< 0.0001"]);
+  });
+});
+
+describe("tests by name", () => {
+  const groups = groupTests(answerFixture);
+
+  it("have their orders together, and those that decided first", () => {
+    expect(groups.map(({ test, decided, outcomes }) => [test, decided, outcomes.length])).toEqual([
+      ["koenker", true, 1],
+      ["breusch-godfrey", false, 2],
+      ["white", false, 1],
+    ]);
+  });
+
+  it("say why one does not apply", () => {
+    expect(readingOfGroup(groups[2]!, answerFixture)).toBe("Does not apply: too few rows for its columns");
+    expect(readingOfGroup(groups[0]!, answerFixture)).toContain("changes with the drivers");
+  });
+});
+
+describe("residuals in words", () => {
+  const points = { fitted: [10, 30, 20, 40], residuals: [1, -3, 2, 4], rows: [5, 3, 4, 2], thinned: false };
+
+  it("tell the range and the spread at either end", () => {
+    expect(overFittedInWords(points)).toContain("from -3 to 4");
+    expect(overFittedInWords(points)).toContain(
+      "smallest fitted values they spread by 1, among the third with the largest by 4",
+    );
+  });
+
+  it("tell how often neighbours are on the same side", () => {
+    expect(overRowsInWords(points)).toContain("Of 3 neighbouring pairs, 1 lie on the same side");
+  });
+
+  it("name the rows that are farthest off", () => {
+    expect(largestResiduals(points, 2)).toEqual([
+      { row: 2, words: "4 above the fitted 40" },
+      { row: 3, words: "3 below the fitted 30" },
+    ]);
+  });
+});
