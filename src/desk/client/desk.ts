@@ -10,6 +10,7 @@ import type { Grid } from "../workbook/grid.ts";
 import type { BlankArrival, FunctionsMetadata } from "../workbook/metadata.ts";
 import { openBook } from "../workbook/openBook.ts";
 import { startCalls, type CallDoors } from "../workbook/pendingCalls.ts";
+import { followChanges } from "../workbook/shifts.ts";
 import { snapshotOf } from "../workbook/snapshot.ts";
 import { growTo } from "../workbook/write.ts";
 import { callTexts, cancelText, eventText, outcomeOf } from "./callTexts.ts";
@@ -57,6 +58,7 @@ export function startDesk(grid: Grid, line: Transport, options: DeskOptions): De
   calculation.onFinished(functions.calls.settle);
   const server = serveRequests(line);
   const host = hostOf(book, { calculation, functions, server, profile: options.profile ?? "desktop" });
+  book.listeners.add((change) => followChanges(book, change));
   book.listeners.add((change) => raiseChanges(host, change));
   const stopWatching = watchChanges(book);
   server.answer(host);

@@ -6,6 +6,7 @@ import { blockOf } from "../excel/rangeValues.ts";
 import type { Area } from "../workbook/areas.ts";
 import { activeSheet } from "../workbook/book.ts";
 import { cellAt, cellsOf, formulaAt, kindOf, valueOf, type CellValue } from "../workbook/cells.ts";
+import { flushDrafts } from "../workbook/drafts.ts";
 import { selectAreas } from "../workbook/selection.ts";
 import { writeCells } from "../workbook/write.ts";
 
@@ -38,6 +39,7 @@ export function hands(host: Host, messages: ReadonlyMap<string, string>): Hands 
     edit: (address, typed) => {
       ensureWritable(host, area(address).sheet);
       writeCells(book, area(address), () => typed);
+      flushDrafts(book);
     },
     select: (...addresses) => selectAreas(book, addresses.map(area)),
     value: (address) => valueOf(cell(address)),

@@ -1,3 +1,4 @@
+import { flushDrafts } from "../workbook/drafts.ts";
 import { fault, isFault } from "./fault.ts";
 import { families } from "./families.ts";
 import type { Host } from "./host.ts";
@@ -65,16 +66,23 @@ export async function execute(host: Host, body: RequestBody): Promise<ResponseBo
   for (const [ActionIndex, one] of body.Actions.entries()) {
     try {
       // Excel calculates as it writes: what is read afterwards is up to date.
-      if (one.ActionType === action.query && host.isCalculating()) await host.calculated();
+      if (one.ActionType === action.query) await upToDate(host);
       Results.push({ ActionId: one.Id, Value: carryOut(run, one) });
     } catch (error) {
       // A fault of the stand-in itself is told as one, with its own words: it must never look like Excel's.
       const Code = isFault(error) ? error.code : "GeneralException";
       const Message = error instanceof Error ? error.message : String(error);
+      flushDrafts(host.book);
       return { Results, TraceIds: [], Error: { Code, Message, ActionIndex, Location: one.Name } };
     }
   }
+  flushDrafts(host.book);
   return { Results, TraceIds };
+}
+
+async function upToDate(host: Host): Promise<void> {
+  flushDrafts(host.book);
+  if (host.isCalculating()) await host.calculated();
 }
 
 function carryOut(run: Run, one: Action): unknown {

@@ -34,6 +34,7 @@ export function raiseChanges(host: Host, change: BookChange): void {
     case "deleted":
       raise(eventKind.deleted, { source: "Local" });
       break;
+    case "renamed":
     case "charts":
       break;
   }

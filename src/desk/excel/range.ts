@@ -76,7 +76,7 @@ export const range: Family<Area> = {
     Unmerge: (area, host) => unmergeRange(host, area),
     Calculate: (area, host) => recalculate(host.book, [area]),
     // The client asks before it writes a large block in pieces: the whole must fit first.
-    _ValidateArraySize: ({ rows, columns }, _host, args) => ensureSize({ rows, columns }, args),
+    _ValidateArraySize: (area, host, args) => ensureSize(host, area, args),
   },
   lacks: ["FormulasR1C1", "Hidden", "ColumnHidden", "Style", "LinkedDataTypeState", "SavedAsArray"],
 };

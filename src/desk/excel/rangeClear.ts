@@ -1,7 +1,6 @@
-import type { ICellData } from "@univerjs/core";
 import { intersectionOf, type Area } from "../workbook/areas.ts";
 import { usedWithin } from "../workbook/cells.ts";
-import { carryOut, command } from "../workbook/grid.ts";
+import { clearStyles } from "../workbook/styles.ts";
 import { writeCells } from "../workbook/write.ts";
 import { oneOf } from "./arguments.ts";
 import { ensureWritable } from "./guards.ts";
@@ -27,16 +26,5 @@ export function clearRange(host: Host, area: Area, applyTo: unknown): void {
   if (contents && formats) unmergeRange(host, area);
   if (reach === null) return;
   if (contents) writeCells(host.book, reach, () => "");
-  if (formats) clearStyles(host, reach);
-}
-
-function clearStyles(host: Host, area: Area): void {
-  const cellValue: Record<number, Record<number, ICellData>> = {};
-  for (let row = area.row; row < area.row + area.rows; row++) {
-    const line: Record<number, ICellData> = {};
-    for (let column = area.column; column < area.column + area.columns; column++) line[column] = { s: null };
-    cellValue[row] = line;
-  }
-  const trigger = "sheet.command.set-style";
-  carryOut(host.book.grid, command.setValues, { unitId: host.book.unit, subUnitId: area.sheet, cellValue, trigger });
+  if (formats) clearStyles(host.book, reach);
 }

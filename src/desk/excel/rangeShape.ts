@@ -14,8 +14,11 @@ import type { Arguments } from "./model.ts";
 /** Excel's count is a 32-bit number; where it cannot hold the count, Excel says -1. */
 export const countOf = (count: number): number => (count > 2 ** 31 - 1 ? -1 : count);
 
-export function ensureSize({ rows, columns }: { rows: number; columns: number }, args: Arguments): null {
-  if (args[0] === rows && args[1] === columns) return null;
+export function ensureSize(host: Host, area: Area, args: Arguments): void {
+  if (args[0] === area.rows && args[1] === area.columns) {
+    if (!isUnbounded(area)) growTo(host.book, area);
+    return;
+  }
   throw fault(
     "InvalidArgument",
     "The number of rows or columns in the input array doesn't match the size or dimensions of the range.",

@@ -1,4 +1,5 @@
 import { IUniverInstanceService, UniverInstanceType, type Workbook, type Worksheet } from "@univerjs/core";
+import type { Draft } from "./drafts.ts";
 import type { Grid } from "./grid.ts";
 import { emptySheetRecord, type CustomXmlRecord, type SheetRecord } from "./records.ts";
 
@@ -10,6 +11,8 @@ export interface Book {
   readonly sheets: Map<string, SheetRecord>;
   readonly customXml: CustomXmlRecord[];
   readonly settings: Map<string, unknown>;
+  /** Changes to cells on their way to the grid, by sheet. */
+  readonly drafts: Map<string, Draft>;
   readonly listeners: Set<(change: BookChange) => void>;
 }
 
@@ -26,7 +29,8 @@ export type BookChange =
       readonly shift?: "RowInserted" | "RowDeleted" | "ColumnInserted" | "ColumnDeleted";
     }
   | { readonly kind: "selected"; readonly sheet: string }
-  | { readonly kind: "activated"; readonly sheet: string; readonly before: string }
+  /** Before is the sheet shown until then, or the name it had. */
+  | { readonly kind: "activated" | "renamed"; readonly sheet: string; readonly before: string }
   | { readonly kind: "added" | "deleted" | "charts"; readonly sheet: string };
 
 export function announce(book: Book, change: BookChange): void {

@@ -9,6 +9,7 @@ import {
 import { FormulaDataModel } from "@univerjs/engine-formula";
 import { boundsOf, fromRange, intersectionOf, type Area } from "./areas.ts";
 import { worksheetOf, type Book } from "./book.ts";
+import { flushDrafts } from "./drafts.ts";
 
 type Matrix<T> = IObjectMatrixPrimitiveType<Nullable<T>>;
 
@@ -20,6 +21,7 @@ export interface SheetCells {
 }
 
 export function cellsOf(book: Book, sheet: string): SheetCells {
+  flushDrafts(book);
   const model = book.grid.injector.get(FormulaDataModel);
   return {
     stored: worksheetOf(book, sheet).getCellMatrix().getMatrix(),

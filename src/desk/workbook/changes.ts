@@ -1,6 +1,6 @@
 import { ICommandService, type ICommandInfo, type IExecutionOptions, type IRange } from "@univerjs/core";
 import { boundsOf, fromRange, type Area } from "./areas.ts";
-import { activeSheet, announce, type Book } from "./book.ts";
+import { activeSheet, announce, nameOf, sheetIds, type Book } from "./book.ts";
 import { command, styleTrigger } from "./grid.ts";
 
 interface Params {
@@ -9,6 +9,7 @@ interface Params {
   readonly trigger?: string;
   readonly type?: number;
   readonly range?: IRange;
+  readonly sheet?: { readonly id: string };
   readonly cellValue?: Readonly<Record<number, Readonly<Record<number, unknown>> | undefined>>;
 }
 
@@ -22,22 +23,49 @@ const shifts = {
 /** A selection still being dragged is none yet. */
 const dragging = [0, 1];
 
+interface Seen {
+  shown: string;
+  readonly names: Map<string, string>;
+}
+
 /** Tells the book's listeners what happens in the grid, whoever does it: a person, an add-in, a formula. */
 export function watchChanges(book: Book): () => void {
-  let shown = activeSheet(book);
+  const names = new Map(sheetIds(book).map((sheet) => [sheet, nameOf(book, sheet)]));
+  const seen: Seen = { shown: activeSheet(book), names };
   const watch = book.grid.injector.get(ICommandService).onCommandExecuted((info, options) => {
     const params = (info.params ?? {}) as Params;
     if (params.unitId !== book.unit) return;
-    const sheet = params.subUnitId ?? shown;
-    if (info.id === command.activate) {
-      if (sheet !== shown) announce(book, { kind: "activated", sheet, before: shown });
-      shown = sheet;
-    } else if (info.id === command.selections) {
-      if (!dragging.includes(params.type ?? -1)) announce(book, { kind: "selected", sheet });
-    } else if (info.id === command.setValues) announceValues(book, params, options);
-    else announceShift(book, info, params);
+    if (info.id === command.setValues) announceValues(book, params, options);
+    else if (info.id === command.selections) announceSelection(book, params, seen);
+    else if (info.id in shifts) announceShift(book, info, params);
+    else announceSheet(book, info, { params, seen });
   });
   return () => watch.dispose();
+}
+
+function announceSelection(book: Book, { type = -1, subUnitId }: Params, { shown }: Seen): void {
+  if (!dragging.includes(type)) announce(book, { kind: "selected", sheet: subUnitId ?? shown });
+}
+
+/** Sheets that are shown, named, added and removed. */
+function announceSheet(
+  book: Book,
+  { id }: Readonly<ICommandInfo>,
+  { params, seen }: { params: Params; seen: Seen },
+): void {
+  const sheet = params.subUnitId ?? params.sheet?.id ?? "";
+  if (id === command.activate && sheet !== seen.shown) {
+    const before = seen.shown;
+    seen.shown = sheet;
+    announce(book, { kind: "activated", sheet, before });
+  } else if (id === command.rename) {
+    const before = seen.names.get(sheet) ?? "";
+    seen.names.set(sheet, nameOf(book, sheet));
+    announce(book, { kind: "renamed", sheet, before });
+  } else if (id === command.insertSheet) {
+    seen.names.set(sheet, nameOf(book, sheet));
+    announce(book, { kind: "added", sheet });
+  } else if (id === command.removeSheet) announce(book, { kind: "deleted", sheet });
 }
 
 function announceValues(book: Book, params: Params, options?: IExecutionOptions): void {

@@ -25,6 +25,7 @@ export function openBook(grid: Grid, data: BookData, prepare: (book: Book) => vo
     sheets: new Map(data.sheets.map((sheet, index) => [ids[index]!, toRecord(sheet)])),
     customXml: (data.customXml ?? []).map((part) => ({ ...part })),
     settings: new Map(Object.entries(data.settings ?? {})),
+    drafts: new Map(),
     listeners: new Set(),
   };
   // Told before the formula engine reads a formula: told later, they would count as changes.

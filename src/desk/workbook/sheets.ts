@@ -1,5 +1,5 @@
 import { BooleanNumber, generateRandomId, mergeWorksheetSnapshotWithDefault } from "@univerjs/core";
-import { activeSheet, announce, hasSheet, nameOf, sheetIds, worksheetOf, type Book } from "./book.ts";
+import { activeSheet, hasSheet, nameOf, sheetIds, worksheetOf, type Book } from "./book.ts";
 import { carryOut, command } from "./grid.ts";
 import { standardHeight, standardWidth } from "./sizes.ts";
 
@@ -14,7 +14,6 @@ export function addSheet(book: Book, name: string): string {
   };
   const sheet = mergeWorksheetSnapshotWithDefault({ id, name, ...sizes });
   carryOut(book.grid, command.insertSheet, { unitId: book.unit, index: sheetIds(book).length, sheet });
-  announce(book, { kind: "added", sheet: id });
   return id;
 }
 
@@ -33,8 +32,6 @@ export function removeSheet(book: Book, sheet: string): void {
     if (next !== undefined) showSheet(book, next);
   }
   carryOut(book.grid, command.removeSheet, { unitId: book.unit, subUnitId: sheet, subUnitName: nameOf(book, sheet) });
-  book.sheets.delete(sheet);
-  announce(book, { kind: "deleted", sheet });
 }
 
 export const showSheet = (book: Book, sheet: string): void =>

@@ -3,7 +3,17 @@ import { localAddressOf, columnLetters } from "../../core/table/address.ts";
 import type { BookCell, BookData, BookValue, SheetData, StyledCell } from "../book/bookData.ts";
 import { fromRange, localAddress } from "./areas.ts";
 import { activeSheet, nameOf, recordOf, sheetIds, worksheetOf, type Book } from "./book.ts";
-import { cellAt, cellsOf, formulaAt, kindOf, spillFrom, usedWithin, valueOf, type SheetCells } from "./cells.ts";
+import {
+  cellAt,
+  cellsOf,
+  formulaAt,
+  isFormula,
+  kindOf,
+  spillFrom,
+  usedWithin,
+  valueOf,
+  type SheetCells,
+} from "./cells.ts";
 import { wholeSheet } from "./areas.ts";
 import { rulersOf, toBookChart } from "./charts.ts";
 import { namesOf } from "./names.ts";
@@ -89,6 +99,7 @@ function bookCell(book: Book, cells: SheetCells, at: { sheet: string; row: numbe
   const cell = cellAt(cells, at.row, at.column);
   if (cell === undefined) return null;
   const value = bookValue(cell);
+  if (!isFormula(cell) && (cell.s ?? null) === null) return value;
   const style = fromGridStyle(styleAt(book, cell));
   const formula = formulaAt(book, at.sheet, at);
   if (formula === "" && style === undefined) return value;

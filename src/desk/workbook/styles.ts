@@ -1,6 +1,7 @@
 import type { ICellData, IStyleData } from "@univerjs/core";
 import type { Area } from "./areas.ts";
 import { workbookOf, type Book } from "./book.ts";
+import { draftRow, flushDrafts, overlay } from "./drafts.ts";
 import { carryOut, command, styleTrigger } from "./grid.ts";
 
 export function styleAt(book: Book, cell: ICellData | undefined): IStyleData {
@@ -19,19 +20,25 @@ export function applyStyle(book: Book, area: Area, style: IStyleData): void {
 }
 
 export function setStyles(book: Book, area: Area, styleOf: (row: number, column: number) => IStyleData | null): void {
-  const cellValue: Record<number, Record<number, ICellData>> = {};
   for (let row = 0; row < area.rows; row++) {
-    const cells: Record<number, ICellData> = {};
+    const draft = draftRow(book, area.sheet, area.row + row);
     for (let column = 0; column < area.columns; column++) {
       const style = styleOf(row, column);
-      if (style !== null) cells[area.column + column] = { s: style };
+      const at = area.column + column;
+      if (style !== null) draft[at] = overlay(draft[at], { s: style });
     }
-    cellValue[area.row + row] = cells;
   }
-  carryOut(book.grid, command.setValues, {
-    unitId: book.unit,
-    subUnitId: area.sheet,
-    cellValue,
-    trigger: styleTrigger,
-  });
+}
+
+/** Takes every look away. Nothing gathered can say "first nothing, then this", so it goes to the grid at once. */
+export function clearStyles(book: Book, area: Area): void {
+  flushDrafts(book);
+  const cellValue: Record<number, Record<number, ICellData>> = {};
+  for (let row = area.row; row < area.row + area.rows; row++) {
+    const line: Record<number, ICellData> = {};
+    for (let column = area.column; column < area.column + area.columns; column++) line[column] = { s: null };
+    cellValue[row] = line;
+  }
+  const shared = { unitId: book.unit, subUnitId: area.sheet };
+  carryOut(book.grid, command.setValues, { ...shared, cellValue, trigger: styleTrigger });
 }

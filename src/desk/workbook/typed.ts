@@ -8,8 +8,11 @@ export interface Typed {
   readonly format: string | null;
 }
 
-const blank: ICellData = { v: null, f: null, si: null, p: null };
-const keep = (cell: ICellData, format: string | null = null): Typed => ({ cell: { ...blank, ...cell }, format });
+/** What a cell held before goes with the new content: formula, share in a filled formula, rich text. */
+const keep = ({ v = null, t = null, f = null }: ICellData, format: string | null = null): Typed => ({
+  cell: { v, t, f, si: null, p: null },
+  format,
+});
 
 const text = (value: string): Typed => keep({ v: value, t: CellValueType.FORCE_STRING });
 const boolean = (value: boolean): Typed => keep({ v: value ? 1 : 0, t: CellValueType.BOOLEAN });

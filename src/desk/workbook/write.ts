@@ -1,7 +1,7 @@
 import type { ICellData } from "@univerjs/core";
 import type { Area } from "./areas.ts";
 import { worksheetOf, type Book } from "./book.ts";
-import { cellsOf } from "./cells.ts";
+import { draftRow, markValues, overlay } from "./drafts.ts";
 import { carryOut, command } from "./grid.ts";
 import { formatAt } from "./styles.ts";
 import { asTyped } from "./typed.ts";
@@ -22,26 +22,28 @@ export function growTo(book: Book, { sheet, row, column, rows, columns }: Area):
   }
 }
 
-/** Writes cells at once; what is null in the block stays as it is. */
-export function writeCells(
-  book: Book,
-  area: Area,
-  cellOf: (row: number, column: number) => string | number | boolean | null,
-): void {
+type Written = string | number | boolean | null;
+
+/** Writes cells as if typed; what is null in the block stays as it is. They reach the grid with the next flush. */
+export function writeCells(book: Book, area: Area, valueOf: (row: number, column: number) => Written): void {
   growTo(book, area);
-  const cells = cellsOf(book, area.sheet);
-  const cellValue: Record<number, Record<number, ICellData>> = {};
+  markValues(book, area.sheet);
+  const stored = worksheetOf(book, area.sheet).getCellMatrix().getMatrix();
   for (let row = 0; row < area.rows; row++) {
-    const line: Record<number, ICellData> = {};
+    const draft = draftRow(book, area.sheet, area.row + row);
+    const cells = stored[area.row + row];
     for (let column = 0; column < area.columns; column++) {
-      const value = cellOf(row, column);
-      if (value === null) continue;
-      const format = formatAt(book, cells.stored[area.row + row]?.[area.column + column] ?? undefined);
-      const typed = asTyped(value, format);
-      const takesFormat = typed.format !== null && format === "General";
-      line[area.column + column] = takesFormat ? { ...typed.cell, s: { n: { pattern: typed.format } } } : typed.cell;
+      const value = valueOf(row, column);
+      const at = area.column + column;
+      if (value !== null) draft[at] = overlay(draft[at], typedInto(book, value, draft[at] ?? cells?.[at] ?? undefined));
     }
-    cellValue[area.row + row] = line;
   }
-  carryOut(book.grid, command.setValues, { unitId: book.unit, subUnitId: area.sheet, cellValue });
+}
+
+/** A text that brings a number format along gives it to a cell that has none. */
+function typedInto(book: Book, value: string | number | boolean, cell: ICellData | undefined): ICellData {
+  const format = formatAt(book, cell);
+  const typed = asTyped(value, format);
+  const takesFormat = typed.format !== null && format === "General";
+  return takesFormat ? { ...typed.cell, s: { n: { pattern: typed.format } } } : typed.cell;
 }
