@@ -3,6 +3,7 @@ import { plusCombination } from "../numeric/combination.ts";
 import { leastSquares } from "../numeric/leastSquares.ts";
 import { inOrder } from "../numeric/ordering.ts";
 import { type RowSource, columnsOf } from "../numeric/rowSource.ts";
+import { extremes } from "../numeric/sums.ts";
 import { laggedProducts, onGrid, rowsWithPredecessor } from "../numeric/timeGrid.ts";
 import type { Kernel, LagRule } from "./choice.ts";
 import { type Scores, plainScores, prewhitenedScores } from "./scores.ts";
@@ -94,5 +95,14 @@ function rawScores({ design, triangle }: Fit, source: RowSource, how: "each" | "
   const weights = counted.map((j) => Float64Array.from({ length: size }, (_, i) => values[i * size + j]!));
   const total = Float64Array.from({ length: size }, (_, i) => weights.reduce((sum, weight) => sum + weight[i]!, 0));
   const zeros = new Float64Array(source.rowCount);
-  return (how === "each" ? weights : [total]).map((weight) => plusCombination(zeros, columns, weight));
+  return relative((how === "each" ? weights : [total]).map((weight) => plusCombination(zeros, columns, weight)));
+}
+
+/** All in parts of the largest entry: no rule depends on the unit that they share, and fourth powers stay in range. */
+function relative(columns: readonly Float64Array[]): Float64Array[] {
+  const largest = columns.reduce((most, column) => {
+    const { least, greatest } = extremes(column);
+    return Math.max(most, greatest, -least);
+  }, 0);
+  return columns.map((column) => (largest === 0 ? column : column.map((value) => value / largest)));
 }

@@ -13,7 +13,8 @@ import type { Fit } from "./fit.ts";
  * The log-likelihood is that of normal errors, -n/2 (ln(2 pi RSS/n) + 1); AIC and BIC count k + 1 parameters,
  * the error variance among them. Without a constant the total sum of squares and R^2 are about zero.
  * @param design - n rows, k terms.
- * @returns the fit; Problems too-few-rows (n < k + 1), constant-outcome, constant-column, dependent-columns, perfect-fit.
+ * @returns the fit; Problems too-few-rows (n < k + 1), constant-outcome,
+ *   numbers-too-large (a column of nothing but tiny numbers), constant-column, dependent-columns, perfect-fit.
  * @see Akaike (1974), IEEE Trans. Automatic Control 19, 716-723; Schwarz (1978), Annals of Statistics 6, 461-464.
  */
 export function fitLeastSquares(design: Design): Result<Fit> {
@@ -27,12 +28,29 @@ export function fitLeastSquares(design: Design): Result<Fit> {
 }
 
 /** What can be seen before anything is solved. */
-function unfit({ terms, outcome, hasConstant, rowCount, leftOutCount }: Design): Problem | null {
+function unfit({ terms, outcome, hasConstant, rowCount, leftOutCount, sourceRows }: Design): Problem | null {
   const needed = terms.length + 1;
   if (rowCount < needed) return { code: "too-few-rows", rows: rowCount, needed, leftOut: leftOutCount };
   if (varies(outcome.values) === "never") return { code: "constant-outcome", column: outcome.name };
+  const tiny = tooSmall([{ name: outcome.name, values: outcome.values }, ...terms], sourceRows);
+  if (tiny !== null) return tiny;
   const idle = terms.find(({ meaning, values }) => meaning.kind !== "constant" && varies(values) === "never");
   return hasConstant && idle !== undefined ? { code: "constant-column", column: idle.name } : null;
+}
+
+/** A column whose largest number is smaller has squares, or the inverse of them, outside the range of doubles. */
+const smallest = 1e-140;
+
+function tooSmall(columns: readonly Pick<Term, "name" | "values">[], sourceRows: Int32Array): Problem | null {
+  const column = columns.find(({ values }) => largest(values) > 0 && largest(values) < smallest);
+  if (column === undefined) return null;
+  const row = column.values.findIndex((value) => value !== 0);
+  return {
+    code: "numbers-too-large",
+    column: column.name,
+    cell: `row ${sourceRows[row]! + 1} of the data`,
+    value: column.values[row]!,
+  };
 }
 
 function varies(values: Float64Array): "never" | "somewhere" {

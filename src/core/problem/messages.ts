@@ -165,8 +165,8 @@ const sentences: { readonly [Code in Problem["code"]]: (problem: Extract<Problem
     "See whether the outcome is computed from a driver, and leave that driver out.",
   ],
   "numbers-too-large": ({ column, cell, value }) => [
-    `${capitalised(asCell(cell))} in column "${column}" gives ${value}, which is too large to calculate with.`,
-    "Correct the cell, or give the column in larger units.",
+    `${capitalised(asCell(cell))} in column "${column}" gives ${value}, which is too ${Math.abs(value) < 1 ? "small" : "large"} to calculate with.`,
+    `Correct the cell, or give the column in ${Math.abs(value) < 1 ? "smaller" : "larger"} units.`,
   ],
   "too-many-lags": ({ lags, rows }) => [
     `${capitalised(counted(lags, "lag"))} cannot be used with ${counted(rows, "row")}.`,

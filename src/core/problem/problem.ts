@@ -78,6 +78,7 @@ export type FitProblem =
   | { readonly code: "constant-outcome"; readonly column: string }
   | { readonly code: "dependent-columns"; readonly column: string; readonly madeOf: readonly string[] }
   | { readonly code: "perfect-fit"; readonly column: string }
+  /** Or too small, where `value` is below one. */
   | { readonly code: "numbers-too-large"; readonly column: string; readonly cell: string; readonly value: number }
   | { readonly code: "errors-need-order"; readonly errors: string; readonly rows: string }
   | { readonly code: "too-many-lags"; readonly lags: number; readonly rows: number };

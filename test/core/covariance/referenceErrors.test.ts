@@ -206,3 +206,26 @@ describe.each(Object.keys(directErrors))("errors of %s against their definitions
       expectAllDigits(errorsOf(orderedFit(id, "by year too"), { kind: "grouped", version: "CR1" }), twoWay, 11);
     });
 });
+
+describe("figures that books print", () => {
+  /** To half a unit of the last digit printed, and what was lost when the book rounded 700.15 up. */
+  const expectPrinted = (found: number, printed: string): void => {
+    const unit = 10 ** -(printed.split(".")[1] ?? "").length;
+    expect(Math.abs(found - Number(printed)) / unit).toBeLessThan(0.51);
+  };
+
+  // Stock and Watson, Introduction to Econometrics, chapters 5 and 7; standard errors are HC1.
+  it.each([
+    { id: "school-scores-1", coefficients: ["698.9", "-2.28"], errors: ["10.4", "0.52"] },
+    {
+      id: "school-scores-3",
+      coefficients: ["700.2", "-1.00", "-0.122", "-0.547"],
+      errors: ["5.6", "0.27", "0.033", "0.024"],
+    },
+  ])("$id", ({ id, coefficients, errors }) => {
+    const fit = orderedFit(id);
+    const found = errorsOf(fit, { kind: "white", version: "HC1" });
+    coefficients.forEach((printed, j) => expectPrinted(fit.coefficients[j]!, printed));
+    errors.forEach((printed, j) => expectPrinted(found[j]!, printed));
+  });
+});
