@@ -23,6 +23,7 @@ const signs = {
   "repeated-time": "invalidValue",
   "unequal-heights": "invalidValue",
   "too-many-columns": "invalidValue",
+  "ranges-apart": "invalidValue",
   "overlapping-ranges": "invalidValue",
   "no-outcome": "invalidValue",
   "no-drivers": "invalidValue",

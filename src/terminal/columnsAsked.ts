@@ -2,6 +2,7 @@ import type { Errand, Host } from "../app/host.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";
 import { type SheetArea, addressOf, localAddressOf, parseAddress } from "../core/table/address.ts";
 import { type LocatedTable, readBlock } from "../core/table/locate.ts";
+import { rangesFault } from "../core/table/ranges.ts";
 import type { AnswerCommand } from "./arguments.ts";
 import { findTable, ownName } from "./findTable.ts";
 
@@ -49,31 +50,25 @@ async function byRange(host: Host, command: AnswerCommand, errand: Errand): Prom
   const areas = given.map((text) => ({ text, area: parseAddress(text) }));
   const unread = areas.find(({ area }) => area === null);
   if (unread !== undefined) return failure({ code: "bad-address", address: unread.text });
-  const ranges = areas.flatMap(({ area }) => (area === null ? [] : [withSheet(area, command.sheet)]));
-  const uneven = ranges.findIndex((area) => area.row !== ranges[0]?.row || area.rows !== ranges[0].rows);
-  if (uneven > 0) return failure(unequal(given, ranges, uneven));
-  const rectangle = around(ranges);
+  const ranges = areas.flatMap(({ text, area }) =>
+    area === null ? [] : [{ words: text, area: withSheet(area, command.sheet) }],
+  );
+  const fault = rangesFault(ranges);
+  if (fault !== null) return failure(fault);
+  const places = ranges.map(({ area }) => area);
+  const rectangle = around(places);
   const address = rectangle.sheet === "" ? localAddressOf(rectangle) : addressOf(rectangle);
   const block = await host.read({ kind: "address", address }, errand);
   if (!block.ok) return block;
   const located = readBlock(block.value);
   if (!located.ok) return located;
-  return success(named(located.value, command, ranges));
+  return success(named(located.value, command, places));
 }
 
 const withSheet = (area: SheetArea, sheet: string | null): SheetArea => ({
   ...area,
   sheet: area.sheet || (sheet ?? ""),
 });
-
-const unequal = (texts: readonly string[], ranges: readonly SheetArea[], at: number) =>
-  ({
-    code: "unequal-heights",
-    first: texts[0] ?? "",
-    rows: ranges[0]?.rows ?? 0,
-    second: texts[at] ?? "",
-    otherRows: ranges[at]?.rows ?? 0,
-  }) as const;
 
 function around(ranges: readonly SheetArea[]): SheetArea {
   const { sheet, row, rows } = ranges[0] ?? { sheet: "", row: 0, rows: 1 };

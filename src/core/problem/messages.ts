@@ -78,6 +78,10 @@ const sentences: { readonly [Code in Problem["code"]]: (problem: Extract<Problem
     `${capitalised(where)} has ${counted(columns, "column")}, but takes ${most === 1 ? "one" : `at most ${most}`}.`,
     most === 1 ? "Choose the one column that is meant." : "Choose fewer columns.",
   ],
+  "ranges-apart": ({ first, second }) => [
+    `${capitalised(first)} and ${second} do not stand in the same rows of one sheet.`,
+    "Choose ranges that begin and end in the same rows.",
+  ],
   "overlapping-ranges": ({ first, second }) => [
     `${capitalised(first)} overlaps ${second}.`,
     "Choose ranges that have no cell in common.",

@@ -33,6 +33,7 @@ export type TableProblem =
       readonly otherRows: number;
     }
   | { readonly code: "too-many-columns"; readonly where: string; readonly columns: number; readonly most: number }
+  | { readonly code: "ranges-apart"; readonly first: string; readonly second: string }
   | { readonly code: "overlapping-ranges"; readonly first: string; readonly second: string };
 
 export type ModelProblem =

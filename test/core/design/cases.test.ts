@@ -173,6 +173,9 @@ describe("faults of a model", () => {
       first: "the outcome",
       second: "a driver",
     });
+    expect(fault({ drivers: [driver("Repairs", { transform: { kind: "square" } })] })).toMatchObject({
+      second: "a driver",
+    });
     expect(fault({ drivers: [driver("Price"), driver("price")] })).toMatchObject({
       first: "a driver",
       second: "the same driver",

@@ -65,6 +65,10 @@ const sentences: Sentences = {
     { code: "too-many-columns", where: "the outcome", columns: 3, most: 1 },
     "The outcome has 3 columns, but takes one. Choose the one column that is meant.",
   ],
+  "ranges-apart": [
+    { code: "ranges-apart", first: "B2:B97", second: "C3:C98" },
+    "B2:B97 and C3:C98 do not stand in the same rows of one sheet. Choose ranges that begin and end in the same rows.",
+  ],
   "overlapping-ranges": [
     { code: "overlapping-ranges", first: "the outcome (A2:A97)", second: "the drivers (A2:C97)" },
     "The outcome (A2:A97) overlaps the drivers (A2:C97). Choose ranges that have no cell in common.",

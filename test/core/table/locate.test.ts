@@ -84,6 +84,12 @@ describe("the table in a block", () => {
     expect(notes).toEqual(['Row 2 under the headings holds no data and was not read: "a month", "EUR".']);
   });
 
+  it("tells headings from units that cover all columns", () => {
+    const { source, notes } = must(readBlock(blockOf([headings, ["date", "a month", "EUR"], ...data])));
+    expect([names(source), source.rowCount]).toEqual([["Month", "Repairs", "Price"], 3]);
+    expect(notes).toHaveLength(1);
+  });
+
   it("keeps a first row of text that is data, to be faulted with its cell", () => {
     const rows = [
       ["Shop", "Takings", "Staff"],

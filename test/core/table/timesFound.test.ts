@@ -52,6 +52,14 @@ describe("the period of a time column", () => {
     ["days", days(monday, range(10)), ["daily", "day", 7]],
     ["working days", days(monday, workdays(3)), ["business-daily", "business day", 5]],
     [
+      "every day but Sunday",
+      days(
+        monday,
+        range(24).filter((i) => i % 7 !== 6),
+      ),
+      ["daily", "day", 7],
+    ],
+    [
       "every third day",
       days(
         monday,
