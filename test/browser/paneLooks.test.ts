@@ -1,0 +1,125 @@
+import { readFileSync } from "node:fs";
+import { createRequire } from "node:module";
+import type { AxeResults } from "axe-core";
+import type { Browser, Page } from "playwright-core";
+import { afterAll, beforeAll, describe, expect, it } from "vitest";
+import { type Look, openPane } from "./panePage/openPane.ts";
+import { allowTextNumbers, button, getAnswer, openTab, useSelection } from "./panePage/steps.ts";
+import { launchBrowser } from "./support/browser.ts";
+
+const axe = readFileSync(createRequire(import.meta.url).resolve("axe-core/axe.min.js"), "utf8");
+
+let browser: Browser;
+beforeAll(async () => {
+  browser = await launchBrowser();
+});
+afterAll(() => browser.close());
+
+const looks: Readonly<Record<string, Look>> = {
+  "light, 320 wide": { width: 320 },
+  "dark, 320 wide": { width: 320, colorScheme: "dark" },
+  "forced colours, 320 wide": { width: 320, forcedColors: "active" },
+  "light, 400 wide": { width: 400 },
+  "dark, 400 wide": { width: 400, colorScheme: "dark" },
+};
+
+const open = (page: Page, ...names: (string | RegExp)[]): Promise<void> =>
+  names.reduce((before, name) => before.then(() => button(page, name).first().click()), Promise.resolve());
+
+/** Every state of the pane, as a person comes to it. */
+const states: Readonly<Record<string, (page: Page) => Promise<void>>> = {
+  empty: () => Promise.resolve(),
+  "no answer": (page) => openTab(page, "Answer"),
+  data: async (page) => {
+    await useSelection(page);
+    await open(page, /Choose other data/, /^Advertising/, /^Price index/, /95 % intervals/);
+  },
+  working: async (page) => {
+    await useSelection(page);
+    await allowTextNumbers(page);
+    await page.evaluate(() => (window.stage.hold = "next"));
+    await open(page, "Get the answer");
+    await page.getByRole("progressbar").waitFor();
+  },
+  answer: async (page) => {
+    await getAnswer(page);
+    await open(page, "Write to the workbook", /Change how/, /Figures of Price/, /left out/);
+    await page.getByLabel("Standard errors").selectOption({ label: "always classical" });
+    await button(page, "Repairs answer").waitFor();
+  },
+  "out of date": async (page) => {
+    await getAnswer(page);
+    await page.evaluate(() => window.stage.host.change(5, 1, 99));
+    await page.getByText(/Out of date/).waitFor();
+  },
+  evidence: async (page) => {
+    await getAnswer(page);
+    await openTab(page, "Evidence");
+  },
+  "a fault to mend": async (page) => {
+    await useSelection(page);
+    await open(page, "Get the answer");
+    await page.getByRole("alert").getByRole("button", { name: "Dismiss" }).waitFor();
+  },
+  "a fault of ours": async (page) => {
+    await page.evaluate(() => {
+      window.stage.host.hold = () => Promise.reject(new Error("something broke"));
+    });
+    await open(page, "Use selection");
+    await page.getByText("Footing made a mistake.").waitFor();
+  },
+};
+
+describe.each(Object.entries(looks))("in %s", (_, look) => {
+  it.each(Object.entries(states))("the state %s is sound", async (_, reach) => {
+    const page = await openPane(browser, look);
+    await reach(page);
+    expect(await violationsOn(page)).toEqual([]);
+    expect(await widerThanPane(page)).toEqual([]);
+    expect(await smallTargets(page)).toEqual([]);
+    await page.close();
+  });
+});
+
+async function violationsOn(page: Page): Promise<string[]> {
+  await page.addScriptTag({ content: axe });
+  const results = await page.evaluate(() =>
+    (window as unknown as { axe: { run: () => Promise<AxeResults> } }).axe.run(),
+  );
+  return results.violations.map(({ id, nodes }) => `${id}: ${nodes.map(({ html }) => html).join(" ")}`);
+}
+
+/** What reaches beyond the right edge: hidden overflow would cut it off unseen. */
+const widerThanPane = (page: Page): Promise<string[]> =>
+  page.evaluate(() => {
+    const edge = document.documentElement.clientWidth + 0.5;
+    const isShown = (element: Element): boolean => element.getBoundingClientRect().width > 1;
+    return [...document.querySelectorAll("main *, header *, footer *")]
+      .filter((element) => isShown(element) && element.getBoundingClientRect().right > edge)
+      .map((element) => element.outerHTML.slice(0, 120));
+  });
+
+/** Controls smaller than 24 by 24 pixels; the label of a radio button or switch counts with it. */
+const smallTargets = (page: Page): Promise<string[]> =>
+  page.evaluate(() =>
+    [...document.querySelectorAll("button, select, input, textarea, a[href]")]
+      .filter((element) => {
+        const { width, height } = element.getBoundingClientRect();
+        return width < 24 || height < 24;
+      })
+      .map((element) => element.outerHTML.slice(0, 160)),
+  );
+
+it("follows the host's theme before the system's", async () => {
+  const page = await openPane(browser, { width: 320, colorScheme: "light" });
+  const ground = () =>
+    page.evaluate(() => getComputedStyle(document.querySelector(".fui-FluentProvider")!).backgroundColor);
+  const light = await ground();
+  await page.evaluate(() => {
+    window.stage.hostIsDark = true;
+    window.dispatchEvent(new Event("focus"));
+  });
+  await expect.poll(ground).not.toBe(light);
+  expect(await ground()).toBe("rgb(28, 31, 33)");
+  await page.close();
+});

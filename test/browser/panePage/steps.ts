@@ -1,0 +1,39 @@
+import type { Page } from "playwright-core";
+
+/** What a person does in the pane, by role and label. */
+export const button = (page: Page, name: string | RegExp) => page.getByRole("button", { name });
+
+export const heading = (page: Page, name: string | RegExp) => page.getByRole("heading", { name });
+
+export const roleOf = (page: Page, column: string) =>
+  page.getByRole("combobox", { name: new RegExp(`^Role of ${column}( \\(a guess\\))?$`) });
+
+export async function useSelection(page: Page): Promise<void> {
+  await button(page, "Use selection").click();
+  await heading(page, "Months!A1:F97").waitFor();
+}
+
+export async function allowTextNumbers(page: Page): Promise<void> {
+  await button(page, "Read them as numbers").click();
+  await page.getByText(/^94 rows can be used/).waitFor();
+}
+
+export async function getAnswer(page: Page): Promise<void> {
+  await useSelection(page);
+  await allowTextNumbers(page);
+  await button(page, "Get the answer").click();
+  await heading(page, /^Repairs explained by/).waitFor();
+}
+
+export const openTab = (page: Page, name: string) => page.getByRole("tab", { name }).click();
+
+/** What screen readers were told last. */
+export const announced = (page: Page): Promise<string> =>
+  page.evaluate(() => [...document.querySelectorAll("[role=status]")].map((region) => region.textContent).join(""));
+
+/** What has the focus, in words. */
+export const focused = (page: Page): Promise<string> =>
+  page.evaluate(() => {
+    const { activeElement } = document;
+    return `${activeElement?.tagName ?? ""} ${activeElement?.textContent ?? ""}`;
+  });
