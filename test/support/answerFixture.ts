@@ -55,6 +55,12 @@ const breuschGodfrey = [1, 2].map((order) =>
 
 const neweyWestErrors = { kind: "newey-west", lags: { kind: "given", lags: 8 }, adjusted: true } as const;
 
+const jointly = (statistic: number, pValue: number): Answer["joint"]["classical"] => {
+  const chiSquare = { statistic, law: "chi-square", df: [2], pValue } as const;
+  const f = { statistic: statistic / 2, law: "F", df: [2, 45], pValue: pValue * 1.5 } as const;
+  return { kind: "computed", figure: f, chiSquare, f };
+};
+
 export const answerFixture: Answer = {
   title: "Repairs explained by Price and Rain",
   outcome: "Repairs",
@@ -94,6 +100,12 @@ export const answerFixture: Answer = {
   },
   lags: 8,
   inference: { classical, white, neweyWest, grouped: null, inForce: neweyWest },
+  joint: {
+    classical: jointly(21.5, 0.00021),
+    white: jointly(19.25, 0.00066),
+    neweyWest: jointly(17.75, 0.0014),
+    grouped: null,
+  },
   drivers: [driver(0, null), driver(1, "Price matters."), driver(2, "Rain: nothing can be shown.")],
   verdict: ["Repairs were explained.", "Price matters.", "Rain: nothing can be shown."],
   rows: {

@@ -1,5 +1,6 @@
-import type { Covariance, ErrorsChoice, WhiteVersion } from "../covariance/choice.ts";
+import type { Covariance, ErrorsChoice, GroupedVersion } from "../covariance/choice.ts";
 import { covarianceOf } from "../covariance/covarianceOf.ts";
+import { allWhite, whiteVersions } from "../covariance/white.ts";
 import { chosen } from "../decision/decide.ts";
 import type { Decision } from "../decision/decision.ts";
 import type { Sizes } from "../decision/policies.ts";
@@ -7,8 +8,9 @@ import type { RowOrder } from "../design/design.ts";
 import type { Fit } from "../fit/fit.ts";
 import type { InferenceTable } from "../inference/inference.ts";
 import { inferenceOf } from "../inference/inferenceOf.ts";
+import { allDriversZero, jointTest } from "../inference/joint.ts";
 import { type Result, success } from "../problem/result.ts";
-import type { AllStandardErrors, Answer } from "./answer.ts";
+import type { AllStandardErrors, Answer, GroupedErrors } from "./answer.ts";
 import type { Options } from "./options.ts";
 
 interface Setting {
@@ -21,22 +23,30 @@ interface Setting {
 interface AllErrors {
   readonly standardErrors: AllStandardErrors;
   readonly inference: Answer["inference"];
+  readonly joint: Answer["joint"];
 }
-
-const whiteVersions: readonly WhiteVersion[] = ["HC0", "HC1", "HC2", "HC3", "HC4", "HC4m", "HC5"];
 
 /** Every kind of standard errors that what rows are allows, and the inference that follows from each. */
 export function allErrors(fit: Fit, setting: Setting): Result<AllErrors> {
-  const choices = choicesFor(fit.design.order, setting);
-  const found = new Map<string, Covariance>();
-  for (const choice of choices) {
+  const white = allWhite(fit);
+  const found = new Map<string, Covariance>(
+    whiteVersions.map((version) => [keyOf({ kind: "white", version }), white[version]]),
+  );
+  for (const choice of choicesFor(fit.design.order, setting)) {
     const covariance = covarianceOf(fit, choice);
     if (!covariance.ok) return covariance;
     found.set(keyOf(choice), covariance.value);
   }
-  const of = (choice: ErrorsChoice): Covariance | null => found.get(keyOf(choice)) ?? null;
-  return success({ standardErrors: standardErrorsFrom(fit, of, setting), inference: inferenceFrom(fit, of, setting) });
+  const of: Lookup = (choice) => found.get(keyOf(choice)) ?? null;
+  const inForce = inForceOf(fit, of, setting);
+  return success({
+    standardErrors: standardErrorsFrom(fit, of, setting),
+    inference: inferenceFrom(fit, inForce, setting),
+    joint: jointFrom(fit, inForce),
+  });
 }
+
+type Lookup = (choice: ErrorsChoice) => Covariance | null;
 
 const keyOf = (choice: ErrorsChoice): string =>
   "version" in choice
@@ -51,22 +61,19 @@ const neweyWest = (lags: number, adjusted: boolean): ErrorsChoice => ({
   adjusted,
 });
 
-function choicesFor(order: RowOrder, { lags, options }: Setting): ErrorsChoice[] {
-  const white = whiteVersions.map((version): ErrorsChoice => ({ kind: "white", version }));
-  const time = lags === null ? [] : [neweyWest(lags, true), neweyWest(lags, false)];
-  const versions = new Set(["CR0", "CR1", options.groupedVersion] as const);
-  const grouped =
-    order.kind === "groups" ? [...versions].map((version): ErrorsChoice => ({ kind: "grouped", version })) : [];
-  return [{ kind: "classical" }, ...white, ...time, ...grouped];
-}
+const groupedVersions: readonly GroupedVersion[] = ["CR0", "CR1", "CR2"];
 
-type Lookup = (choice: ErrorsChoice) => Covariance | null;
+function choicesFor(order: RowOrder, { lags }: Setting): ErrorsChoice[] {
+  const time = lags === null ? [] : [neweyWest(lags, true), neweyWest(lags, false)];
+  const grouped =
+    order.kind === "groups" ? groupedVersions.map((version): ErrorsChoice => ({ kind: "grouped", version })) : [];
+  return [{ kind: "classical" }, ...time, ...grouped];
+}
 
 const listed = (covariance: Covariance | null): number[] => [...(covariance?.standardErrors ?? [])];
 
 function standardErrorsFrom(fit: Fit, of: Lookup, { lags, options }: Setting): AllStandardErrors {
   const white = whiteVersions.map((version) => [version, listed(of({ kind: "white", version }))] as const);
-  const { order } = fit.design;
   return {
     classical: listed(of({ kind: "classical" })),
     white: Object.fromEntries(white),
@@ -75,34 +82,57 @@ function standardErrorsFrom(fit: Fit, of: Lookup, { lags, options }: Setting): A
       lags === null
         ? null
         : { lags, adjusted: listed(of(neweyWest(lags, true))), unadjusted: listed(of(neweyWest(lags, false))) },
-    grouped:
-      order.kind === "groups"
-        ? {
-            groups: order.labels.length,
-            CR0: listed(of({ kind: "grouped", version: "CR0" })),
-            CR1: listed(of({ kind: "grouped", version: "CR1" })),
-          }
-        : null,
+    grouped: groupedFrom(fit.design.order, of),
+  };
+}
+
+function groupedFrom(order: RowOrder, of: Lookup): GroupedErrors | null {
+  if (order.kind !== "groups") return null;
+  const version = (name: GroupedVersion): Covariance | null => of({ kind: "grouped", version: name });
+  return {
+    groups: order.labels.length,
+    CR0: listed(version("CR0")),
+    CR1: listed(version("CR1")),
+    CR2: listed(version("CR2")),
+    CR2DegreesOfFreedom: [...(version("CR2")?.degreesOfFreedom ?? [])],
+  };
+}
+
+type ByKind = Readonly<Record<ErrorsChoice["kind"], Covariance | null>>;
+
+/** The covariance that each kind has under the wishes: which White version, which factor, which grouped version. */
+function inForceOf(fit: Fit, of: Lookup, { options, sizes }: Setting): ByKind {
+  const kind = (name: ErrorsChoice["kind"]): Covariance | null =>
+    of(chosen(name, { order: fit.design.order, sizes }, options).errors);
+  return {
+    classical: kind("classical"),
+    white: kind("white"),
+    "newey-west": kind("newey-west"),
+    grouped: kind("grouped"),
   };
 }
 
 /** One table a kind, each under the law that the policy compares that kind with. */
-function inferenceFrom(fit: Fit, of: Lookup, { decision, options, sizes }: Setting): Answer["inference"] {
+function inferenceFrom(fit: Fit, covariances: ByKind, { decision, options, sizes }: Setting): Answer["inference"] {
   const against = fit.design.terms.map(({ name }) => options.against[name] ?? 0);
   const table = (kind: ErrorsChoice["kind"]): InferenceTable | null => {
-    const { errors, reference } = chosen(kind, { order: fit.design.order, sizes }, options);
-    const covariance = of(errors);
-    return covariance === null ? null : inferenceOf(fit, covariance, { reference, against, level: options.level });
+    const covariance = covariances[kind];
+    if (covariance === null) return null;
+    const { reference } = chosen(kind, { order: fit.design.order, sizes }, options);
+    const { degreesOfFreedom } = covariance;
+    const settings = { reference, against, level: options.level };
+    return inferenceOf(fit, covariance, degreesOfFreedom === null ? settings : { ...settings, degreesOfFreedom });
   };
-  const tables = {
-    classical: table("classical"),
-    white: table("white"),
-    "newey-west": table("newey-west"),
-    grouped: table("grouped"),
-  };
-  const inForce = tables[decision.inForce.errors.kind];
-  if (tables.classical === null || tables.white === null || inForce === null)
-    throw new Error("a kind in force was not computed");
-  const { classical, white, grouped } = tables;
-  return { classical, white, neweyWest: tables["newey-west"], grouped, inForce };
+  const [classical, white, inForce] = [table("classical"), table("white"), table(decision.inForce.errors.kind)];
+  if (classical === null || white === null || inForce === null) throw new Error("a kind in force was not computed");
+  return { classical, white, neweyWest: table("newey-west"), grouped: table("grouped"), inForce };
+}
+
+function jointFrom(fit: Fit, covariances: ByKind): Answer["joint"] {
+  const restrictions = allDriversZero(fit);
+  const test = (covariance: Covariance | null) =>
+    covariance === null ? null : jointTest(fit, covariance, restrictions);
+  const [classical, white] = [test(covariances.classical), test(covariances.white)];
+  if (classical === null || white === null) throw new Error("classical and White covariances always exist");
+  return { classical, white, neweyWest: test(covariances["newey-west"]), grouped: test(covariances.grouped) };
 }

@@ -13,7 +13,7 @@ import { driverAnswers } from "./drivers.ts";
 import { residualPoints } from "./points.ts";
 import type { Question, Report } from "./question.ts";
 import { rowsSummary } from "./rowsSummary.ts";
-import { runTests } from "./runTests.ts";
+import { decidingTests, furtherTests } from "./runTests.ts";
 import { choiceSentence, openingSentence } from "./verdict.ts";
 import { listInWords } from "./wording.ts";
 
@@ -37,42 +37,49 @@ export function analyse(question: Question, report: Report): Result<Answer> {
 function answerFrom(fit: Fit, { source, options }: Question, report: Report): Result<Answer> {
   const { design } = fit;
   const testOrder = autocorrelationOrder(design.order, fit.rowCount);
-  const tests = runTests(fit, testOrder, report);
+  const deciding = decidingTests(fit, testOrder, report);
   const lags = design.order.kind === "time" ? lagsOf(fit, options.lags ?? rulesOf(options.policy).lags) : null;
   const sizes = { rows: fit.rowCount, columns: fit.columnCount, lags: lags ?? 0 };
-  const decided = decide({ tests, order: design.order, sizes, testOrder }, options);
+  const decided = decide({ tests: deciding, order: design.order, sizes, testOrder }, options);
   if (!decided.ok) return decided;
   const decision = decided.value;
-  report("Standard errors", 0.7);
+  report("Standard errors", 0.55);
   const errors = allErrors(fit, { decision, options, lags, sizes });
   if (!errors.ok) return errors;
-  const { standardErrors, inference } = errors.value;
-  const drivers = driverAnswers({ fit, inference, decision, lags, options });
+  const { standardErrors, inference, joint } = errors.value;
+  report("The other tests", 0.7);
+  const tests = [...deciding, ...furtherTests(fit, decision.inForce.errors, testOrder)];
+  report("Verdict", 1);
+  const found = { decision, lags, tests, standardErrors, inference, joint };
+  return success(spoken(fit, found, { source, options }));
+}
+
+type Found = Pick<Answer, "decision" | "lags" | "tests" | "standardErrors" | "inference" | "joint">;
+
+/** The figures with everything that is said of them. */
+function spoken(fit: Fit, found: Found, { source, options }: Pick<Question, "source" | "options">): Answer {
+  const { design } = fit;
+  const drivers = driverAnswers({ fit, options, ...found });
   const said = {
+    ...found,
     outcome: design.outcome.name,
     observations: fit.rowCount,
     terms: design.terms.map(({ name }) => name),
     fit: figuresOf(fit),
-    decision,
-    lags,
     rows: rowsSummary(design),
     options,
   };
-  report("Verdict", 1);
-  return success({
+  const verdict = [openingSentence(said), choiceSentence(said), ...sentences(drivers), ...found.decision.cautions];
+  const { leftOut, leftOutCount, notes } = design;
+  return {
     ...said,
     title: titleOf(design),
     coefficients: [...fit.coefficients],
-    standardErrors,
-    tests,
-    inference,
     drivers,
-    verdict: [openingSentence(said), choiceSentence(said), ...sentences(drivers), ...decision.cautions],
-    leftOut: design.leftOut,
-    leftOutCount: design.leftOutCount,
-    notes: design.notes,
+    verdict,
+    ...{ leftOut, leftOutCount, notes },
     points: residualPoints(fit, source),
-  });
+  };
 }
 
 const sentences = (drivers: Answer["drivers"]): string[] =>

@@ -3,6 +3,7 @@ import type { Decision } from "../decision/decision.ts";
 import type { LeftOut, Period } from "../design/design.ts";
 import type { TestOutcome } from "../diagnostics/outcome.ts";
 import type { InferenceTable } from "../inference/inference.ts";
+import type { JointOutcome } from "../inference/joint.ts";
 import type { Options } from "./options.ts";
 
 /** Everything that is said of a regression, as plain values that cross to the pane, the sheet and the terminal. */
@@ -27,6 +28,13 @@ export interface Answer {
     readonly grouped: InferenceTable | null;
     readonly inForce: InferenceTable;
   };
+  /** That all coefficients but the constant are zero, under each kind of standard errors. */
+  readonly joint: {
+    readonly classical: JointOutcome;
+    readonly white: JointOutcome;
+    readonly neweyWest: JointOutcome | null;
+    readonly grouped: JointOutcome | null;
+  };
   /** One entry a term, in the order of `terms`. */
   readonly drivers: readonly DriverAnswer[];
   readonly verdict: readonly string[];
@@ -49,11 +57,16 @@ export interface AllStandardErrors {
     readonly adjusted: readonly number[];
     readonly unadjusted: readonly number[];
   } | null;
-  readonly grouped: {
-    readonly groups: number;
-    readonly CR0: readonly number[];
-    readonly CR1: readonly number[];
-  } | null;
+  readonly grouped: GroupedErrors | null;
+}
+
+export interface GroupedErrors {
+  readonly groups: number;
+  readonly CR0: readonly number[];
+  readonly CR1: readonly number[];
+  readonly CR2: readonly number[];
+  /** Satterthwaite's, one a coefficient; those of the smaller number of groups with two groupings. */
+  readonly CR2DegreesOfFreedom: readonly number[];
 }
 
 export interface FitFigures {
