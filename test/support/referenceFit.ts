@@ -48,8 +48,11 @@ export const referenceIds = [
   "wages",
 ] as const;
 
-export const reference = (id: string): Reference =>
-  JSON.parse(readFileSync(new URL(`../reference/${id}.json`, import.meta.url), "utf8")) as Reference;
+/** A single driver's name stands in the files without a list around it. */
+export function reference(id: string): Reference {
+  const found = JSON.parse(readFileSync(new URL(`../reference/${id}.json`, import.meta.url), "utf8")) as Reference;
+  return { ...found, drivers: [found.drivers].flat() };
+}
 
 /** A design from plain columns: a constant first unless left out, numbers after it. */
 export function designOf(

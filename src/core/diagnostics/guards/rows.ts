@@ -1,0 +1,61 @@
+import type { RowOrder } from "../../design/design.ts";
+import { type Guard, namesInWords } from "./guard.ts";
+
+/** With fewer groups the figures for groups are too optimistic (Cameron and Miller 2015, J. Human Resources 50, 317-372). */
+const fewGroups = 42;
+/** A group with more than this share of the rows counts for more than one of many. */
+const largeShare = 0.25;
+
+/** What the rows' places in time or in groups mean for the figures; null where rows are separate cases. */
+export function rowsGuard(order: RowOrder): Guard | null {
+  switch (order.kind) {
+    case "cases":
+      return null;
+    case "time":
+      return gapsGuard(order);
+    case "groups":
+      return groupsGuard(order);
+  }
+}
+
+function gapsGuard({ gaps, gapLabels, period, labels }: Extract<RowOrder, { kind: "time" }>): Guard {
+  if (gaps === 0) {
+    const sentences = [`Every ${period.unit} from ${labels.first} to ${labels.last} has its row.`];
+    return { guard: "time", finding: "nothing found", sentences };
+  }
+  const shown = namesInWords(gapLabels);
+  const more = gaps > gapLabels.length ? ` and ${gaps - gapLabels.length} more` : "";
+  const missing = gaps === 1 ? `One ${period.unit} has no row` : `${gaps} ${period.unit}s have no row`;
+  return {
+    guard: "time",
+    finding: "worth knowing",
+    sentences: [
+      `${missing}: ${shown}${more}.`,
+      "Each keeps its place: rows on either side of it are not taken for neighbours.",
+    ],
+  };
+}
+
+function groupsGuard({ groups, labels, by }: Extract<RowOrder, { kind: "groups" }>): Guard {
+  const sizes = new Float64Array(labels.length);
+  for (const group of groups) sizes[group]! += 1;
+  const largest = sizes.indexOf(Math.max(...sizes));
+  const share = sizes[largest]! / groups.length;
+  const few = labels.length < fewGroups;
+  const sentences = [
+    ...(few
+      ? [`There are only ${labels.length} groups by ${by}: standard errors by group are then often too small.`]
+      : []),
+    ...(share > largeShare
+      ? [
+          `"${labels[largest]}" holds ${Math.round(100 * share)} % of the rows, so that there are fewer groups than it seems.`,
+        ]
+      : []),
+  ];
+  if (sentences.length > 0) return { guard: "groups", finding: few ? "look into it" : "worth knowing", sentences };
+  return {
+    guard: "groups",
+    finding: "nothing found",
+    sentences: [`There are ${labels.length} groups by ${by}, none of them very large.`],
+  };
+}
