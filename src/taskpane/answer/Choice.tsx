@@ -1,10 +1,11 @@
-import { Button, Field, Input, Select, makeStyles, tokens } from "@fluentui/react-components";
+import { Button, Field, Select, makeStyles, tokens } from "@fluentui/react-components";
 import { type ReactNode, useState } from "react";
 import type { Setup } from "../../app/setup.ts";
 import type { Options } from "../../core/answer/options.ts";
 import type { Policy } from "../../core/decision/wish.ts";
 import { useType } from "../look/type.ts";
 import { Disclosure } from "../parts/Disclosure.tsx";
+import { TextField } from "../parts/TextField.tsx";
 import { usePane } from "../paneContext.ts";
 
 type Fixed = NonNullable<Options["fixed"]>;
@@ -97,9 +98,7 @@ function FixedKind({ setup, fixed, change }: FixedKindProps): ReactNode {
       </Field>
       {kind !== null && (
         <>
-          <Field label="Reason, which the report keeps" size="small">
-            <Input size="small" value={reason} onChange={(_, { value }) => setReason(value)} />
-          </Field>
+          <TextField label="Reason, which the report keeps" value={reason} onText={setReason} />
           <p className={type.remark}>Without a reason the report says: none given.</p>
           <Button size="small" onClick={fix}>
             {fixed === null ? "Fix this kind" : "Keep this kind and reason"}

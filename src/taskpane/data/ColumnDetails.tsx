@@ -1,8 +1,9 @@
-import { Field, Input, makeStyles, tokens } from "@fluentui/react-components";
+import { makeStyles, tokens } from "@fluentui/react-components";
 import type { ReactNode } from "react";
 import type { ColumnSetup } from "../../app/setup.ts";
 import { useType } from "../look/type.ts";
 import { CellList } from "../parts/CellList.tsx";
+import { TextField } from "../parts/TextField.tsx";
 import { usePane } from "../paneContext.ts";
 import type { ColumnRowProps } from "./ColumnRow.tsx";
 import { NumberField } from "./NumberField.tsx";
@@ -49,17 +50,8 @@ function Unusable({ column, setup }: ColumnRowProps): ReactNode {
 function Unit({ setup }: { readonly setup: ColumnSetup }): ReactNode {
   const { dispatch } = usePane();
   const example = setup.role === "outcome" ? "Such as: orders a month" : "Such as: rainy day";
-  return (
-    <Field label="One unit of it, in words" hint={example} size="small">
-      <Input
-        size="small"
-        value={setup.unit}
-        onChange={(_, { value }) =>
-          dispatch({ kind: "column changed", column: setup.column, details: { unit: value } })
-        }
-      />
-    </Field>
-  );
+  const change = (unit: string): void => dispatch({ kind: "column changed", column: setup.column, details: { unit } });
+  return <TextField label="One unit of it, in words" hint={example} value={setup.unit} onText={change} />;
 }
 
 const Against = ({ setup }: { readonly setup: ColumnSetup }): ReactNode => {

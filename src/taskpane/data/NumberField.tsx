@@ -1,5 +1,5 @@
-import { Field, Input } from "@fluentui/react-components";
 import { type ReactNode, useState } from "react";
+import { TextField } from "../parts/TextField.tsx";
 
 export interface NumberFieldProps {
   readonly label: string;
@@ -18,15 +18,14 @@ export function NumberField({ label, value, onNumber, fault = () => null }: Numb
     if (complaintOf(text, fault) === null) onNumber(readNumber(text));
   };
   return (
-    <Field label={label} size="small" {...(complaint === null ? {} : { validationMessage: complaint })}>
-      <Input
-        size="small"
-        inputMode="decimal"
-        value={typed ?? String(value)}
-        onChange={(_, data) => change(data.value)}
-        onBlur={() => complaint === null && setTyped(null)}
-      />
-    </Field>
+    <TextField
+      label={label}
+      inputMode="decimal"
+      value={typed ?? String(value)}
+      onText={change}
+      complaint={complaint}
+      onBlur={() => complaint === null && setTyped(null)}
+    />
   );
 }
 

@@ -1,6 +1,7 @@
-import { Button, Field, Input, Select, makeStyles, tokens } from "@fluentui/react-components";
+import { Button, Field, Select, makeStyles, tokens } from "@fluentui/react-components";
 import { type ReactNode, useState } from "react";
 import type { DataPlace } from "../../app/host.ts";
+import { TextField } from "../parts/TextField.tsx";
 import { usePane } from "../paneContext.ts";
 
 const useStyles = makeStyles({
@@ -86,16 +87,7 @@ function AddressForm(): ReactNode {
   };
   return (
     <form className={styles.line} onSubmit={submit}>
-      <Field label="Or type an address" size="small" className={styles.narrow}>
-        <Input
-          size="small"
-          value={address}
-          placeholder="Sheet1!A1:D97"
-          spellCheck={false}
-          className={styles.narrow}
-          onChange={(_, { value }) => setAddress(value)}
-        />
-      </Field>
+      <TextField label="Or type an address" placeholder="Sheet1!A1:D97" value={address} onText={setAddress} />
       <Button size="small" type="submit">
         Read it
       </Button>

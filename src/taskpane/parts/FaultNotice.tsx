@@ -5,7 +5,7 @@ import { usePane } from "../paneContext.ts";
 import { BugReport } from "./BugReport.tsx";
 import { ProblemWords } from "./ProblemWords.tsx";
 
-const useStyles = makeStyles({ notice: { marginBottom: tokens.spacingVerticalM, ":empty": { display: "none" } } });
+const useStyles = makeStyles({ notice: { marginBottom: tokens.spacingVerticalM } });
 
 /** What went wrong and what to do; read aloud as soon as it stands there. */
 export function FaultNotice(): ReactNode {
@@ -18,7 +18,7 @@ export function FaultNotice(): ReactNode {
   }, [state.fault]);
   const dismiss = (): void => dispatch({ kind: "dismissed" });
   return (
-    <div ref={place} role="alert" className={styles.notice}>
+    <div ref={place} role="alert" className={state.fault === null ? undefined : styles.notice}>
       {state.fault !== null && <Notice fault={state.fault} onDismiss={dismiss} />}
     </div>
   );
