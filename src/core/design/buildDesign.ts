@@ -13,7 +13,7 @@ import { type UsedRows, chooseRows } from "./usedRows.ts";
  * in order of time or group by group.
  * @param source - columns of equal height; blank cells and marks for missing values leave their row out.
  * @returns the design, every row left out with its cell and reason; Problems of roles, headings, cells, times, groups,
- *   categories and transforms as they are found, and "too-few-rows", "constant-outcome", "constant-column".
+ *   categories and transforms as they are found, and "too-few-rows" where there are fewer than one more than drivers.
  */
 export function buildDesign(source: Source, model: Model): Result<Design> {
   const roles = roleFault(model);
@@ -27,8 +27,7 @@ export function buildDesign(source: Source, model: Model): Result<Design> {
   if (used.value.rows.length < fewest) return failure(tooFewRows(used.value, fewest));
   const terms = allTerms(read.value.drivers, used.value.rows, model.constant);
   if (!terms.ok) return terms;
-  if (used.value.rows.length <= terms.value.length) return failure(tooFewRows(used.value, terms.value.length + 1));
-  return designOf({ model, read: read.value, used: used.value, terms: terms.value });
+  return designOf({ source, model, read: read.value, used: used.value, terms: terms.value });
 }
 
 const tooFewRows = ({ rows, leftOutCount }: UsedRows, needed: number) =>
@@ -46,22 +45,20 @@ function allTerms(drivers: readonly Ingredient[], rows: Int32Array, constant: bo
 }
 
 interface Parts {
+  readonly source: Source;
   readonly model: Model;
   readonly read: ReadModel;
   readonly used: UsedRows;
   readonly terms: readonly Term[];
 }
 
-function designOf({ model, read, used, terms }: Parts): Result<Design> {
+function designOf({ source, model, read, used, terms }: Parts): Result<Design> {
   const order = rowOrderOf(read.frame, used.rows);
   if (!order.ok) return order;
-  const { column, name } = read.outcome;
-  const values = gather(read.outcome.values, used.rows);
-  if (isConstant(values)) return failure({ code: "constant-outcome", column: name });
-  const still = terms.find(({ meaning, values: term }) => meaning.kind !== "constant" && isConstant(term));
-  if (model.constant && still !== undefined) return failure({ code: "constant-column", column: still.name });
+  const { column, name, values } = read.outcome;
+  const { transform } = model.outcome;
   return success({
-    outcome: { name, column: column.name, transform: model.outcome.transform, values },
+    outcome: { name, column: column.name, transform, values: gather(values, used.rows) },
     terms,
     hasConstant: model.constant,
     rowCount: used.rows.length,
@@ -69,11 +66,9 @@ function designOf({ model, read, used, terms }: Parts): Result<Design> {
     sourceRows: used.rows,
     leftOut: used.leftOut,
     leftOutCount: used.leftOutCount,
-    notes: [...read.notes, ...baseNotes(terms)],
+    notes: [...(source.notes ?? []), ...read.notes, ...baseNotes(terms)],
   });
 }
-
-const isConstant = (values: Float64Array): boolean => values.every((value) => value === values[0]);
 
 /** Which level the others of each category are compared with. */
 function baseNotes(terms: readonly Term[]): string[] {

@@ -15,7 +15,7 @@ export interface LocatedTable {
   readonly source: Source;
   /** Sheet row of the headings, from 0; null where there are none and columns go by their letters. */
   readonly headingRow: number | null;
-  /** What was read otherwise than a reader would expect, or not read, as sentences. */
+  /** What was read otherwise than a reader would expect, or not read, as sentences; the source carries them too. */
   readonly notes: readonly string[];
 }
 
@@ -40,10 +40,11 @@ export function readBlock(block: CellBlock, wanted: readonly string[] = []): Res
   const read = { grid, heading, first: start.first, last: end.last };
   const empty = emptyAmong(read, wanted);
   if (empty !== null) return failure(empty);
+  const notes = [...start.notes, ...emptyNotes(read), ...end.notes];
   return success({
-    source: sourceOf(read),
+    source: { ...sourceOf(read), notes },
     headingRow: heading === null ? null : block.firstRow + heading,
-    notes: [...start.notes, ...emptyNotes(read), ...end.notes],
+    notes,
   });
 }
 

@@ -16,4 +16,6 @@ export interface Column {
 export interface Source {
   readonly columns: readonly Column[];
   readonly rowCount: number;
+  /** What was not read around the columns, or otherwise than expected, as sentences; they go with the answer. */
+  readonly notes?: readonly string[];
 }
