@@ -12,7 +12,8 @@ export function bracketedRoot(f: (x: number) => number, [low, high]: readonly [n
   let [a, b, fa, fb] = [low, high, f(low), f(high)];
   if (fa === 0) return a;
   if (fb === 0) return b;
-  if (Math.sign(fa) === Math.sign(fb)) throw new Error(`no sign change between ${low} and ${high}`);
+  // Not a number has no sign either.
+  if (!(Math.sign(fa) * Math.sign(fb) < 0)) throw new Error(`no sign change between ${low} and ${high}`);
   let last = Number.NaN;
   for (let step = 0; step < mostSteps; step++) {
     const middle = (a + b) / 2;
