@@ -10,10 +10,11 @@ export function deskServer(at) {
   return {
     port: "auto",
     host: "localhost",
+    // The pages run what is published and nothing of the server's: after a change, reload by hand.
+    client: false,
     hot: false,
-    liveReload: true,
+    liveReload: false,
     static: [{ directory: at("node_modules/@microsoft/office-js/dist"), publicPath: "/desk/vendor", watch: false }],
-    client: { overlay: { errors: true, warnings: false } },
     setupMiddlewares: (middlewares) => [{ name: "to-the-desk", path: "/", middleware: toTheDesk }, ...middlewares],
     onListening: tellAddress,
   };
