@@ -10,6 +10,8 @@ export interface Grid {
   readonly filled: readonly number[];
   /** For each column of the block. */
   readonly bodies: readonly Body[];
+  /** The most cells that hold anything in one row: stray columns beside a table do not count against it. */
+  readonly width: number;
   /** First and last row that hold anything. */
   readonly first: number;
   readonly last: number;
@@ -26,20 +28,26 @@ export function gridOf(block: CellBlock): Grid | null {
   const ends = block.columns.map(endsOf);
   const filled = ends.flatMap((end, column) => (end === null ? [] : [column]));
   if (filled.length === 0) return null;
-  return {
-    block,
-    filled,
-    bodies: block.columns.map(bodyOf),
-    first: Math.min(...ends.map((end) => end?.first ?? Infinity)),
-    last: Math.max(...ends.map((end) => end?.last ?? -Infinity)),
-  };
+  const first = Math.min(...ends.map((end) => end?.first ?? Infinity));
+  const last = Math.max(...ends.map((end) => end?.last ?? -Infinity));
+  const width = widest({ block, filled }, first, Math.min(last, first + rowsLookedAt));
+  return { block, filled, bodies: block.columns.map(bodyOf), width, first, last };
+}
+
+/** So many rows from the top tell how wide a table is. */
+const rowsLookedAt = 500;
+
+function widest(grid: Pick<Grid, "block" | "filled">, first: number, last: number): number {
+  let most = 0;
+  for (let row = first; row <= last; row++) most = Math.max(most, coverage(grid, row));
+  return most;
 }
 
 export const isBlankCell = ({ kinds, numbers, texts }: CellColumn, row: number): boolean =>
   kinds[row] === cellKind.blank || (kinds[row] === cellKind.text && texts[numbers[row]!]!.trim() === "");
 
 /** How many cells of a row hold anything. */
-export const coverage = ({ block, filled }: Grid, row: number): number =>
+export const coverage = ({ block, filled }: Pick<Grid, "block" | "filled">, row: number): number =>
   filled.filter((column) => !isBlankCell(block.columns[column]!, row)).length;
 
 /** The first row from here on that holds anything; one beyond the last where none does. */

@@ -5,7 +5,7 @@ import { sense, senseOfText } from "./senses.ts";
 import { cellInWords } from "./spots.ts";
 
 /**
- * The row of headings in a block: the row of words nearest above the data that covers at least half of the columns.
+ * The row of headings in a block: the row of words nearest above the data that covers at least half of its width.
  * Titles cover less, or stand apart by a blank row.
  * @returns null where the data begin without headings.
  */
@@ -23,7 +23,7 @@ export function findHeadingRow(grid: Grid): number | null {
   return areYearHeadings(grid, data) ? data : null;
 }
 
-/** The first row that covers half of the columns and holds what its columns hold; null where all is words. */
+/** The first row that covers half of the width and holds what its columns hold; null where all is words. */
 export function firstDataRow(grid: Grid): number | null {
   for (let row = grid.first; row <= grid.last; row++) {
     if (coversHalf(grid, row) && hasFit(grid, row)) return row;
@@ -78,7 +78,7 @@ const deepestHeading = 100;
 export const wordsOf = ({ block, filled }: Grid, row: number): string[] =>
   filled.map((column) => cellInWords(block.columns[column]!, row)).filter((word) => word !== "");
 
-const coversHalf = (grid: Grid, row: number): boolean => coverage(grid, row) * 2 >= grid.filled.length;
+const coversHalf = (grid: Grid, row: number): boolean => coverage(grid, row) * 2 >= grid.width;
 
 /** From this many columns on, a row of units under the headings is likelier than a title that covers them all. */
 const wide = 3;

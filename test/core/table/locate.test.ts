@@ -49,6 +49,18 @@ describe("the table in a block", () => {
     expect(names(must(readBlock(blockOf(above))).source)).toEqual(["Month", "Repairs", "Price"]);
   });
 
+  it("is not led astray by stray cells beside the table", () => {
+    const beside = (row: Cell[], i: number): Cell[] => [...row, ...Array<Cell>(i).fill(null), "see there"];
+    const rows = [
+      ["Title"],
+      headings,
+      ...data.map((row, i) => beside(row, 1 + i)),
+      [null, null, null, 5, null, null, null, 7],
+    ];
+    const { source, headingRow } = must(readBlock(blockOf(rows)));
+    expect([headingRow, names(source).slice(0, 3)]).toEqual([1, ["Month", "Repairs", "Price"]]);
+  });
+
   it("names columns by their letters where there are no headings, and eats no row", () => {
     const { source, headingRow, notes } = must(readBlock(blockOf(data, { firstColumn: 1 })));
     expect(names(source)).toEqual(["Column B", "Column C", "Column D"]);
