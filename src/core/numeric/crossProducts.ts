@@ -22,14 +22,14 @@ export function weightedCrossProducts(basis: Basis, weightings: readonly Float64
 }
 
 /** Rows of `size` columns: entry (i, j) is values[j * basisBlockRows + i]. */
-export interface RowBlock {
+interface RowBlock {
   readonly values: Float64Array;
   readonly rows: number;
   readonly size: number;
 }
 
 /** Each row of the block times its factor, into `to`. */
-export function scaleRows({ values, rows, size }: RowBlock, factors: Float64Array, to: Float64Array): void {
+function scaleRows({ values, rows, size }: RowBlock, factors: Float64Array, to: Float64Array): void {
   for (let j = 0; j < size; j++) {
     const start = j * basisBlockRows;
     for (let i = 0; i < rows; i++) to[start + i] = values[start + i]! * factors[i]!;

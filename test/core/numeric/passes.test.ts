@@ -1,0 +1,164 @@
+import { describe, expect, it } from "vitest";
+import { visitBasis } from "../../../src/core/numeric/basis.ts";
+import { basisTimes, squaredRowLengths, weightedCrossProducts } from "../../../src/core/numeric/crossProducts.ts";
+import { filterColumns } from "../../../src/core/numeric/fourier.ts";
+import { visitGroups } from "../../../src/core/numeric/groupMoments.ts";
+import { movingWindowProducts } from "../../../src/core/numeric/movingWindows.ts";
+import { randomFrom } from "../../../src/core/numeric/random.ts";
+import { basisRows, columnsOf, storedRows, weightedRows } from "../../../src/core/numeric/rowSource.ts";
+import { triangularFactor } from "../../../src/core/numeric/triangularFactor.ts";
+
+const random = randomFrom(3);
+const column = (n: number): Float64Array<ArrayBuffer> => Float64Array.from({ length: n }, () => random.normal());
+const dot = (x: Float64Array, y: Float64Array): number => x.reduce((sum, value, i) => sum + value * y[i]!, 0);
+
+/** Odd and even numbers of columns, rows that do and do not fill their blocks. */
+const shapes = [
+  { n: 7, k: 1 },
+  { n: 256, k: 4 },
+  { n: 257, k: 5 },
+  { n: 1300, k: 7 },
+];
+
+describe.each(shapes)("passes over $n rows of $k columns", ({ n, k }) => {
+  const columns = [new Float64Array(n).fill(1), ...Array.from({ length: k - 1 }, () => column(n))];
+  const basis = { columns, triangle: triangularFactor(columns) };
+  const q = columnsOf(basisRows(basis));
+  const weights = column(n).map(Math.abs);
+
+  it("the basis is orthonormal and spans the columns", () => {
+    q.forEach((left, i) => q.forEach((right, j) => expect(dot(left, right)).toBeCloseTo(i === j ? 1 : 0, 13)));
+    columns.forEach((x, j) => {
+      const back = x.map((_, row) => q.reduce((sum, qi, i) => sum + qi[row]! * basis.triangle.values[i * k + j]!, 0));
+      back.forEach((value, row) => expect(value).toBeCloseTo(x[row]!, 12));
+    });
+  });
+
+  it("blocks come in order and cover every row once", () => {
+    const seen: number[] = [];
+    visitBasis(basis, ({ first, rows }) => seen.push(...Array.from({ length: rows }, (_, i) => first + i)));
+    expect(seen).toEqual(Array.from({ length: n }, (_, i) => i));
+  });
+
+  it("weighted cross-products are their sums", () => {
+    const twice = weights.map((w) => 2 * w);
+    const [once, doubled] = weightedCrossProducts(basis, [weights, twice]);
+    q.forEach((left, i) =>
+      q.forEach((right, j) => {
+        const expected = dot(
+          left.map((value, row) => value * weights[row]!),
+          right,
+        );
+        expect(once!.values[i * k + j]).toBeCloseTo(expected, 12);
+        expect(doubled!.values[i * k + j]).toBeCloseTo(2 * expected, 12);
+      }),
+    );
+  });
+
+  it("row lengths and products with a vector", () => {
+    const z = column(k);
+    const lengths = squaredRowLengths(basis);
+    const product = basisTimes(basis, z);
+    for (let row = 0; row < n; row++) {
+      expect(lengths[row]).toBeCloseTo(
+        q.reduce((sum, qi) => sum + qi[row]! ** 2, 0),
+        13,
+      );
+      expect(product[row]).toBeCloseTo(
+        q.reduce((sum, qi, i) => sum + qi[row]! * z[i]!, 0),
+        13,
+      );
+    }
+  });
+
+  it("groups add up their rows, wherever blocks end", () => {
+    const groups = Int32Array.from({ length: n }, (_, i) => Math.floor(Math.sqrt(i)));
+    const visited: number[] = [];
+    visitGroups(basisRows(basis), { factors: weights, groups }, ({ group, score, gram }) => {
+      visited.push(group);
+      const rows = [...groups.keys()].filter((row) => groups[row] === group);
+      q.forEach((left, i) => {
+        expect(score[i]).toBeCloseTo(
+          rows.reduce((sum, row) => sum + left[row]! * weights[row]!, 0),
+          12,
+        );
+        for (let j = i; j < k; j++)
+          expect(gram[i * k + j]).toBeCloseTo(
+            rows.reduce((sum, row) => sum + left[row]! * q[j]![row]!, 0),
+            12,
+          );
+      });
+    });
+    expect(visited).toEqual([...new Set(groups)]);
+  });
+
+  it.each([0, 3, 300])("moving windows of %i lags are the Bartlett sum", (lags) => {
+    const positions = new Float64Array(n);
+    for (let i = 1; i < n; i++) positions[i] = positions[i - 1]! + (random.uniform() < 0.9 ? 1 : 1 + random.below(9));
+    const rows = columnsOf(weightedRows(basis, weights));
+    const found = movingWindowProducts(weightedRows(basis, weights), positions, lags);
+    expect(movingWindowProducts(storedRows(rows), positions, lags)).toEqual(found);
+    const expected = new Float64Array(k * k);
+    for (let t = 0; t < n; t++) {
+      for (let s = t; s < n && positions[s]! - positions[t]! <= lags; s++) {
+        const weight = lags + 1 - (positions[s]! - positions[t]!);
+        for (let i = 0; i < k; i++) {
+          for (let j = 0; j < k; j++) {
+            const both = rows[i]![t]! * rows[j]![s]! + (s === t ? 0 : rows[i]![s]! * rows[j]![t]!);
+            expected[i * k + j]! += weight * both;
+          }
+        }
+      }
+    }
+    expected.forEach((value, index) => {
+      const scale = Math.sqrt(expected[Math.floor(index / k) * (k + 1)]! * expected[(index % k) * (k + 1)]!);
+      expect(Math.abs(found.values[index]! - value) / scale).toBeLessThan(1e-13);
+    });
+  });
+});
+
+describe("moving windows over a long series", () => {
+  it("do not drift: numbers far apart in size leave nothing behind", () => {
+    const n = 40_000;
+    const x = Float64Array.from({ length: n }, (_, i) => (i === 5 ? 1e12 : i % 2 === 0 ? 0.1 : -0.1));
+    const positions = Float64Array.from({ length: n }, (_, i) => i);
+    const { values } = movingWindowProducts(storedRows([x.subarray(10), x.subarray(10)]), positions.subarray(10), 7);
+    const withSpike = movingWindowProducts(storedRows([x, x]), positions, 7);
+    // Eight windows hold the spike; what they add is about 8e24, known to 1e9, so that only the others can be compared.
+    expect(withSpike.values[0]! / 8e24).toBeCloseTo(1, 9);
+    const windows = movingWindowProducts(storedRows([x.subarray(20)]), positions.subarray(20), 7).values[0]!;
+    expect(values[0]! - windows).toBeLessThan(1);
+  });
+
+  it("forget a spike to the last digit once it has left", () => {
+    const n = 1000;
+    const spike = Float64Array.from({ length: n }, (_, i) => (i === 0 ? 1e17 : 0));
+    const small = Float64Array.from({ length: n }, (_, i) => (i < 10 ? 0 : Math.sin(i)));
+    const both = spike.map((value, i) => value + small[i]!);
+    const positions = Float64Array.from({ length: n }, (_, i) => i);
+    const cross = movingWindowProducts(storedRows([both, small]), positions, 3).values[1]!;
+    const alone = movingWindowProducts(storedRows([small, small]), positions, 3).values[1]!;
+    expect(Math.abs(cross / alone - 1)).toBeLessThan(1e-12);
+  });
+});
+
+describe("filters", () => {
+  it.each([
+    { n: 1, reach: 1 },
+    { n: 5, reach: 9 },
+    { n: 64, reach: 64 },
+    { n: 300, reach: 40 },
+  ])("of $reach weights over $n rows are the sums they stand for", ({ n, reach }) => {
+    const columns = [column(n), column(n), column(n)];
+    const weights = column(reach);
+    const filtered = filterColumns(columns, weights);
+    expect(filtered).toHaveLength(3);
+    columns.forEach((x, j) => {
+      for (let t = 0; t < n; t++) {
+        let sum = 0;
+        for (let s = 0; s < n; s++) sum += (weights[Math.abs(t - s)] ?? 0) * x[s]!;
+        expect(filtered[j]![t]).toBeCloseTo(sum, 11);
+      }
+    });
+  });
+});
