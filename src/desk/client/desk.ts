@@ -101,7 +101,7 @@ function hostOf(book: Book, { calculation, functions, server, profile }: Parts):
     book,
     switches: calm(profile),
     events: startEvents((event) => server.after(eventText(event))),
-    references: { kept: new Map(), given: 0 },
+    references: { kept: new Map(), names: new WeakMap(), given: 0 },
     isCalculating: calculation.busy,
     calculated: () => until(() => !calculation.busy()),
     takeResults: (results) => functions.calls.answer(results.map((result) => [result[0], outcomeOf(result)] as const)),

@@ -56,17 +56,22 @@ interface Run {
   readonly body: RequestBody;
   /** Each path is walked once a request: a method that makes something must not make it twice. */
   readonly found: Map<number, Held | null>;
+  /** Paths of objects that the client tracks from now on. */
+  readonly keeps: ReadonlySet<number>;
 }
+
+const keepReference = "_KeepReference";
 
 /** Carries out a request in order and stops at the first fault; what was done before it stays done. */
 export async function execute(host: Host, body: RequestBody): Promise<ResponseBody> {
-  const run: Run = { host, body, found: new Map() };
+  const keeps = body.Actions.filter(({ Name }) => Name === keepReference).map(({ ObjectPathId }) => ObjectPathId);
+  const run: Run = { host, body, found: new Map(), keeps: new Set(keeps) };
   const Results: { ActionId: number; Value: unknown }[] = [];
   const TraceIds = body.Actions.filter(({ ActionType }) => ActionType === action.trace).map(({ Id }) => Id);
   for (const [ActionIndex, one] of body.Actions.entries()) {
     try {
       // Excel calculates as it writes: what is read afterwards is up to date.
-      if (one.ActionType === action.query) await upToDate(host);
+      if (dependsOnResults(run, one)) await upToDate(host);
       Results.push({ ActionId: one.Id, Value: carryOut(run, one) });
     } catch (error) {
       // A fault of the stand-in itself is told as one, with its own words: it must never look like Excel's.
@@ -80,6 +85,13 @@ export async function execute(host: Host, body: RequestBody): Promise<ResponseBo
   return { Results, TraceIds };
 }
 
+/** Loads, and ranges that are found by what formulas fill. */
+function dependsOnResults({ body }: Run, one: Action): boolean {
+  if (one.ActionType === action.query) return true;
+  const name = body.ObjectPaths[one.ObjectPathId]?.Name ?? "";
+  return one.ActionType === action.instantiate && /Spill|UsedRange|SurroundingRegion/.test(name);
+}
+
 async function upToDate(host: Host): Promise<void> {
   flushDrafts(host.book);
   if (host.isCalculating()) await host.calculated();
@@ -90,9 +102,9 @@ function carryOut(run: Run, one: Action): unknown {
   const object = find(run, one.ObjectPathId);
   switch (one.ActionType) {
     case action.instantiate:
-      return object === null ? null : identityOf(readingOf(run), object);
+      return object === null ? null : identityOf(readingOf(run, one), object);
     case action.query:
-      return object === null ? null : query(readingOf(run), object, one.QueryInfo ?? {});
+      return object === null ? null : query(readingOf(run, one), object, one.QueryInfo ?? {});
     case action.method:
       return invoke(run, object, one);
     case action.set:
@@ -103,7 +115,7 @@ function carryOut(run: Run, one: Action): unknown {
 }
 
 function invoke(run: Run, object: Held | null, one: Action): unknown {
-  if (one.Name === "_KeepReference") return null;
+  if (one.Name === keepReference) return null;
   if (object === null) throw fault("ItemNotFound");
   const method = familyOf(object).call?.[one.Name];
   if (method !== undefined) return method(object.state, run.host, argumentsOf(run, one)) ?? null;
@@ -174,14 +186,17 @@ function argumentsOf(run: Run, { ArgumentInfo }: Named): readonly unknown[] {
 }
 
 /** A tracked range is found again by its reference, wherever the selection has gone since. */
-function readingOf({ host, body }: Run): Reading {
+function readingOf({ host, keeps }: Run, { ObjectPathId }: Action): Reading {
+  const { kept, names } = host.references;
   return {
     host,
     referenceOf: (object) => {
-      const tracked = object.type === "Range" || object.type === "RangeAreas";
-      if (!tracked || body.AutoKeepReference !== true) return null;
+      const known = names.get(object);
+      if (known !== undefined) return known;
+      if (!keeps.has(ObjectPathId)) return null;
       const reference = `reference-${++host.references.given}`;
-      host.references.kept.set(reference, object);
+      kept.set(reference, object);
+      names.set(object, reference);
       return reference;
     },
   };

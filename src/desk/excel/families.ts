@@ -1,17 +1,6 @@
-import {
-  chartAxes,
-  chartAxis,
-  chartAxisTitle,
-  chartFill,
-  chartGridlines,
-  chartLegend,
-  chartLine,
-  chartSeries,
-  chartSeriesCollection,
-  chartSeriesFormat,
-  chartTitle,
-} from "./chartParts.ts";
+import { chartAxes, chartAxis, chartAxisTitle, chartGridlines, chartLegend, chartTitle } from "./chartParts.ts";
 import { chart, charts } from "./charts.ts";
+import { chartFill, chartLine, chartSeries, chartSeriesCollection, chartSeriesFormat } from "./chartSeries.ts";
 import { customFunctions } from "./customFunctions.ts";
 import type { Family, States } from "./model.ts";
 import { namedItem, names } from "./names.ts";

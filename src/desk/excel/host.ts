@@ -31,7 +31,11 @@ export interface Host {
   readonly switches: Switches;
   readonly events: Events;
   /** Ranges that an add-in tracks, by the reference it was given. */
-  readonly references: { readonly kept: Map<string, Held>; given: number };
+  readonly references: {
+    readonly kept: Map<string, Held>;
+    readonly names: WeakMap<Held, string>;
+    given: number;
+  };
   readonly isCalculating: () => boolean;
   /** Resolves when every formula has its value; functions of the add-in still at work show #BUSY! meanwhile. */
   readonly calculated: () => Promise<void>;

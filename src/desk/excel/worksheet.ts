@@ -34,8 +34,8 @@ export const worksheet: Family<OnSheet> = {
     Position: ({ sheet }, host, value) => place(host, sheet, asNumber(value)),
     Visibility: ({ sheet }, host, value) => setVisibility(host, sheet, visibilities[oneOf(value, visibilities)]),
     TabColor: ({ sheet }, host, value) => mark(host, command.tabColor, { sheet, color: asText(value) }),
-    ShowGridlines: ({ sheet }, host, value) =>
-      mark(host, command.gridlines, { sheet, showGridlines: flag(asFlag(value)) }),
+    // So the client calls the setter of showGridlines.
+    Gridlines: ({ sheet }, host, value) => mark(host, command.gridlines, { sheet, showGridlines: flag(asFlag(value)) }),
   },
   part: {
     GetRange: ({ sheet }, host, args) => hold("Range", rangeOf(host, sheet, optionalText(args, 0))),

@@ -54,11 +54,8 @@ function announceSheet(
   { params, seen }: { params: Params; seen: Seen },
 ): void {
   const sheet = params.subUnitId ?? params.sheet?.id ?? "";
-  if (id === command.activate && sheet !== seen.shown) {
-    const before = seen.shown;
-    seen.shown = sheet;
-    announce(book, { kind: "activated", sheet, before });
-  } else if (id === command.rename) {
+  if (id === command.activate) queueMicrotask(() => announceShown(book, seen));
+  else if (id === command.rename) {
     const before = seen.names.get(sheet) ?? "";
     seen.names.set(sheet, nameOf(book, sheet));
     announce(book, { kind: "renamed", sheet, before });
@@ -66,6 +63,14 @@ function announceSheet(
     seen.names.set(sheet, nameOf(book, sheet));
     announce(book, { kind: "added", sheet });
   } else if (id === command.removeSheet) announce(book, { kind: "deleted", sheet });
+}
+
+/** The grid shows a new sheet for a moment even where it is told to stay: only what is shown in the end counts. */
+function announceShown(book: Book, seen: Seen): void {
+  const [sheet, before] = [activeSheet(book), seen.shown];
+  if (sheet === before) return;
+  seen.shown = sheet;
+  announce(book, { kind: "activated", sheet, before });
 }
 
 function announceValues(book: Book, params: Params, options?: IExecutionOptions): void {

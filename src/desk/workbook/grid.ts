@@ -36,6 +36,9 @@ export const command = {
   removeColumns: "sheet.mutation.remove-col",
   insertSheet: "sheet.mutation.insert-sheet",
   removeSheet: "sheet.mutation.remove-sheet",
+  /** Those of the user's own commands that also rewrite the formulas which speak of the sheet. */
+  renameEverywhere: "sheet.command.set-worksheet-name",
+  removeEverywhere: "sheet.command.remove-sheet",
 } as const;
 
 /** The sheet command whose formatting leaves values alone, so that nothing is recalculated. */

@@ -13,7 +13,9 @@ export function addSheet(book: Book, name: string): string {
     defaultRowHeight: standardHeight,
   };
   const sheet = mergeWorksheetSnapshotWithDefault({ id, name, ...sizes });
+  const shown = activeSheet(book);
   carryOut(book.grid, command.insertSheet, { unitId: book.unit, index: sheetIds(book).length, sheet });
+  if (activeSheet(book) !== shown) showSheet(book, shown);
   return id;
 }
 
@@ -31,14 +33,14 @@ export function removeSheet(book: Book, sheet: string): void {
     const next = ids[ids.indexOf(sheet) + 1] ?? ids[ids.indexOf(sheet) - 1];
     if (next !== undefined) showSheet(book, next);
   }
-  carryOut(book.grid, command.removeSheet, { unitId: book.unit, subUnitId: sheet, subUnitName: nameOf(book, sheet) });
+  carryOut(book.grid, command.removeEverywhere, { unitId: book.unit, subUnitId: sheet });
 }
 
 export const showSheet = (book: Book, sheet: string): void =>
   carryOut(book.grid, command.activate, { unitId: book.unit, subUnitId: sheet });
 
 export const renameSheet = (book: Book, sheet: string, name: string): void =>
-  carryOut(book.grid, command.rename, { unitId: book.unit, subUnitId: sheet, name });
+  carryOut(book.grid, command.renameEverywhere, { unitId: book.unit, subUnitId: sheet, name });
 
 export function moveSheet(book: Book, sheet: string, toOrder: number): void {
   const fromOrder = sheetIds(book).indexOf(sheet);
