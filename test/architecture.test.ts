@@ -40,7 +40,11 @@ const files = readdirSync(src, { recursive: true, encoding: "utf8" })
   .map((file) => file.replaceAll("\\", "/"));
 
 const textOf = (file: string): string => readFileSync(join(src, file), "utf8");
-const roomOf = (file: string): string => file.split("/").slice(0, file.startsWith("core/") ? 2 : 1).join("/");
+const roomOf = (file: string): string =>
+  file
+    .split("/")
+    .slice(0, file.startsWith("core/") ? 2 : 1)
+    .join("/");
 
 const specifiers = (file: string): string[] =>
   [...textOf(file).matchAll(/(?:from|import)\s*\(?\s*"([^"]+)"/g)].map((match) => match[1] ?? "");
@@ -52,7 +56,9 @@ const targets = (file: string): string[] =>
 
 describe("architecture", () => {
   it("finds the rooms it speaks of", () => {
-    expect(new Set(files.map(roomOf))).toEqual(new Set(Object.keys(mayImport).filter((room) => files.some((file) => roomOf(file) === room))));
+    expect(new Set(files.map(roomOf))).toEqual(
+      new Set(Object.keys(mayImport).filter((room) => files.some((file) => roomOf(file) === room))),
+    );
     expect(files.length).toBeGreaterThan(100);
   });
 
@@ -60,7 +66,9 @@ describe("architecture", () => {
     const wrong = files.flatMap((file) =>
       targets(file)
         .filter((target) => roomOf(target) !== roomOf(file))
-        .filter((target) => !(mayImport[roomOf(file)] ?? []).some((room) => target === room || target.startsWith(`${room}/`)))
+        .filter(
+          (target) => !(mayImport[roomOf(file)] ?? []).some((room) => target === room || target.startsWith(`${room}/`)),
+        )
         .map((target) => `${file} imports ${target}`),
     );
     expect(wrong).toEqual([]);
@@ -90,7 +98,9 @@ describe("architecture", () => {
 
   it("catches only at the borders", () => {
     const borders = ["office", "functions", "worker", "desk", "terminal", "entries", "app", "taskpane"];
-    expect(files.filter((file) => /\bcatch\b\s*[({]/.test(textOf(file))).filter((file) => !borders.includes(roomOf(file)))).toEqual([]);
+    expect(
+      files.filter((file) => /\bcatch\b\s*[({]/.test(textOf(file))).filter((file) => !borders.includes(roomOf(file))),
+    ).toEqual([]);
   });
 
   it("has no file without an idea of its own: no barrels, no leftover names", () => {
