@@ -40,6 +40,7 @@ export function handover(months: readonly Month[]): SheetData {
     ]),
     columnWidths: [18, 16, 18, 12],
     rowHeights: heightsUnder(above),
+    onePageWide: true,
   };
 }
 

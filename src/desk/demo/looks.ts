@@ -30,6 +30,7 @@ export function columnSheet(name: string, columns: readonly DemoColumn[], above:
     ...blankSheet(name, [...top, headings, ...rows]),
     columnWidths: columns.map(({ width }) => width),
     rowHeights: heightsUnder(above),
+    onePageWide: true,
     frozenRows: top.length + 1,
   };
 }
