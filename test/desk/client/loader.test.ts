@@ -21,7 +21,7 @@ describe("the stand-in for the loader", () => {
     const { context } = page().Office;
     expect(context.officeTheme.bodyBackgroundColor).toBe(darkTheme.bodyBackgroundColor);
     expect(context.requirements.isSetSupported("ExcelApi", "1.12")).toBe(true);
-    expect(context.requirements.isSetSupported("excelapi", 1.4)).toBe(true);
+    expect(context.requirements.isSetSupported("excelapi", "1.4")).toBe(true);
     expect(context.requirements.isSetSupported("ExcelApi", "1.13")).toBe(false);
     expect(context.requirements.isSetSupported("WordApi", "1.1")).toBe(false);
   });
