@@ -11,6 +11,7 @@ import { inferenceOf } from "../inference/inferenceOf.ts";
 import { allDriversZero, jointTest } from "../inference/joint.ts";
 import { type Result, success } from "../problem/result.ts";
 import type { AllStandardErrors, Answer, GroupedErrors } from "./answer.ts";
+import { againstOf } from "./drivers.ts";
 import type { Options } from "./options.ts";
 
 interface Setting {
@@ -114,7 +115,7 @@ function inForceOf(fit: Fit, of: Lookup, { options, sizes }: Setting): ByKind {
 
 /** One table a kind, each under the law that the policy compares that kind with. */
 function inferenceFrom(fit: Fit, covariances: ByKind, { decision, options, sizes }: Setting): Answer["inference"] {
-  const against = fit.design.terms.map(({ name }) => options.against[name] ?? 0);
+  const against = againstOf(fit, options);
   const table = (kind: ErrorsChoice["kind"]): InferenceTable | null => {
     const covariance = covariances[kind];
     if (covariance === null) return null;

@@ -7,11 +7,15 @@ import type { Design } from "../design/design.ts";
 import type { Fit } from "../fit/fit.ts";
 import { fitLeastSquares } from "../fit/fitLeastSquares.ts";
 import { type Result, success } from "../problem/result.ts";
+import { type Firmness, firmness } from "../robustness/firmness.ts";
 import { allErrors } from "./allErrors.ts";
 import type { Answer, FitFigures } from "./answer.ts";
-import { driverAnswers } from "./drivers.ts";
+import { againstOf, driverAnswers } from "./drivers.ts";
+import { guardsOf } from "./guards.ts";
+import type { Options } from "./options.ts";
 import { residualPoints } from "./points.ts";
 import type { Question, Report } from "./question.ts";
+import { type RowPlaces, rowPlacesOf } from "./rowPlaces.ts";
 import { rowsSummary } from "./rowsSummary.ts";
 import { decidingTests, furtherTests } from "./runTests.ts";
 import { choiceSentence, openingSentence } from "./verdict.ts";
@@ -49,15 +53,39 @@ function answerFrom(fit: Fit, { source, options }: Question, report: Report): Re
   const { standardErrors, inference, joint } = errors.value;
   report("The other tests", 0.7);
   const tests = [...deciding, ...furtherTests(fit, decision.inForce.errors, testOrder)];
-  report("Verdict", 1);
-  const found = { decision, lags, tests, standardErrors, inference, joint };
-  return success(spoken(fit, found, { source, options }));
+  report("How firm it is", 0.85);
+  const against = againstOf(fit, options);
+  const { adjusted, level } = options;
+  const firm = firmness(fit, { inForce: inference.inForce, against, level, lags, adjusted });
+  if (!firm.ok) return firm;
+  const places = rowPlacesOf(design, source);
+  const guards = guardsOf(fit, { tests, level, places });
+  const found = {
+    decision,
+    lags,
+    tests,
+    standardErrors,
+    inference,
+    joint,
+    firmness: placed(firm.value, places),
+    guards,
+  };
+  return success(spoken(fit, found, { options, places }));
 }
 
-type Found = Pick<Answer, "decision" | "lags" | "tests" | "standardErrors" | "inference" | "joint">;
+type Found = Pick<
+  Answer,
+  "decision" | "lags" | "tests" | "standardErrors" | "inference" | "joint" | "firmness" | "guards"
+>;
+
+/** Each coefficient's most telling row by its place in the sheet. */
+const placed = ({ choices, terms }: Firmness, { cell }: RowPlaces): Answer["firmness"] => ({
+  choices,
+  terms: terms.map((term) => ({ ...term, leaveOneOut: { ...term.leaveOneOut, cell: cell(term.leaveOneOut.row) } })),
+});
 
 /** The figures with everything that is said of them. */
-function spoken(fit: Fit, found: Found, { source, options }: Pick<Question, "source" | "options">): Answer {
+function spoken(fit: Fit, found: Found, { options, places }: { options: Options; places: RowPlaces }): Answer {
   const { design } = fit;
   const drivers = driverAnswers({ fit, options, ...found });
   const said = {
@@ -78,7 +106,7 @@ function spoken(fit: Fit, found: Found, { source, options }: Pick<Question, "sou
     drivers,
     verdict,
     ...{ leftOut, leftOutCount, notes },
-    points: residualPoints(fit, source),
+    points: residualPoints(fit, places),
   };
 }
 

@@ -4,6 +4,8 @@ import type { LeftOut, Period } from "../design/design.ts";
 import type { TestOutcome } from "../diagnostics/outcome.ts";
 import type { InferenceTable } from "../inference/inference.ts";
 import type { JointOutcome } from "../inference/joint.ts";
+import type { ChoiceTable, TermFirmness } from "../robustness/firmness.ts";
+import type { Guards } from "./guards.ts";
 import type { Options } from "./options.ts";
 
 /** Everything that is said of a regression, as plain values that cross to the pane, the sheet and the terminal. */
@@ -35,6 +37,12 @@ export interface Answer {
     readonly neweyWest: JointOutcome | null;
     readonly grouped: JointOutcome | null;
   };
+  /** Every choice of standard errors side by side, and what each conclusion hangs on. */
+  readonly firmness: {
+    readonly choices: readonly ChoiceTable[];
+    readonly terms: readonly PlacedFirmness[];
+  };
+  readonly guards: Guards;
   /** One entry a term, in the order of `terms`. */
   readonly drivers: readonly DriverAnswer[];
   readonly verdict: readonly string[];
@@ -82,6 +90,9 @@ export interface FitFigures {
   readonly bic: number;
 }
 
+/** How firm the conclusion about a term is, and the cell of the outcome in the row it hangs on most. */
+export type PlacedFirmness = TermFirmness & { readonly leaveOneOut: { readonly cell: string } };
+
 /** What is said of one term. */
 export interface DriverAnswer {
   readonly term: string;
@@ -92,7 +103,9 @@ export interface DriverAnswer {
   readonly pValue: number;
   readonly low: number;
   readonly high: number;
-  readonly firmness: { readonly kind: "firm" } | { readonly kind: "leaning"; readonly on: readonly string[] };
+  /** Leaning: the choices that say otherwise, in words, and the p-value among them that is farthest from the one in force. */
+  readonly firmness:
+    { readonly kind: "firm" } | { readonly kind: "leaning"; readonly on: readonly string[]; readonly farthest: number };
   /** The verdict's sentence about this term; null for the constant. */
   readonly sentence: string | null;
 }

@@ -111,11 +111,11 @@ function aboutValue({ driver, level }: Spoken, differs: boolean): string {
 
 /** Firm, or leaning and on what; where the kind in force says less than another, why it counts all the same. */
 function firmnessSentence({ driver, decision, level, agreeing }: Spoken): string {
-  if (driver.firmness.kind === "firm") return `This is firm: ${agreeing} agree.`;
-  const others = listInWords(driver.firmness.on);
-  const shown = driver.pValue < level;
+  const { firmness } = driver;
+  if (firmness.kind === "firm") return `This is firm: ${agreeing} agree.`;
+  const others = listInWords(firmness.on);
+  const p = pValueInWords(firmness.farthest, level);
+  if (driver.pValue < level) return `This leans on the choice: ${others} would say otherwise (up to ${p}).`;
   const because = decision.override === null ? decision.because : "the kind in force was fixed by hand";
-  return shown
-    ? `This leans on the choice: ${others} would say otherwise.`
-    : `This leans on the choice: ${others} would have said otherwise, but ${because}.`;
+  return `This leans on the choice: ${others} would have said otherwise (down to ${p}), but ${because}.`;
 }
