@@ -1,4 +1,5 @@
 import type { Problem } from "../core/problem/problem.ts";
+import { isYear } from "../core/table/periodLabels.ts";
 import { sense, senseOfText } from "../core/table/senses.ts";
 import type { Column } from "../core/table/source.ts";
 import { type RawCells, isMissing, plainValue } from "./rawCells.ts";
@@ -8,6 +9,19 @@ export function hasHeadings(outcome: RawCells, drivers: RawCells): boolean {
   const above = outcome[0]?.[0];
   if (!isMissing(above)) return isWord(above);
   return (drivers[0] ?? []).every(isWord);
+}
+
+/**
+ * Whether a range begins with numbers where the outcome has its heading: it was chosen without its headings, and its
+ * rows would not line up. A blank above a column may arrive as zero; a year above other numbers is a heading.
+ */
+export function beginsWithNumbers([first = [], second = []]: RawCells): boolean {
+  const filled = first.flatMap((cell, column) => (isMissing(cell) || cell === 0 ? [] : [column]));
+  const isData = (column: number): boolean => {
+    const above = plainValue(first[column]);
+    return typeof above === "number" && (!isYear(above) || isYear(Number(plainValue(second[column]))));
+  };
+  return filled.length > 0 && filled.every(isData);
 }
 
 function isWord(cell: unknown): boolean {

@@ -3,7 +3,7 @@ import type { Problem } from "../core/problem/problem.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";
 import { cellKind } from "../core/table/cells.ts";
 import type { Column, Source } from "../core/table/source.ts";
-import { apartFrom, hasHeadings, headingOf, repeatedHeading } from "./headings.ts";
+import { apartFrom, beginsWithNumbers, hasHeadings, headingOf, repeatedHeading } from "./headings.ts";
 import { type RawCells, columnOf, isMissing, rawCells, usedHeight, widthOf } from "./rawCells.ts";
 
 /** The columns that a function is called over, and which part each plays. */
@@ -34,6 +34,8 @@ export function readData(values: Readonly<Record<string, unknown>>): Result<Call
   const problem = shapeProblem(given);
   if (problem !== null) return failure(problem);
   const firstRow = hasHeadings(given.outcome.cells, given.drivers.cells) ? 1 : 0;
+  const lower = firstRow === 0 ? undefined : [given.drivers, given.key].find(({ cells }) => beginsWithNumbers(cells));
+  if (lower !== undefined) return failure(withoutHeadings(given.outcome, lower));
   const rows = [firstRow, heightOfData(Object.values(given))] as const;
   const outcome = columnsOf(given.outcome, rows);
   const drivers = columnsOf(given.drivers, rows);
@@ -45,6 +47,15 @@ export function readData(values: Readonly<Record<string, unknown>>): Result<Call
     parts: partsOf(outcome, drivers, keys),
   });
 }
+
+/** The outcome has a heading and another range has none, so that their data differ in height. */
+const withoutHeadings = (outcome: Argument, lower: Argument): Problem => ({
+  code: "unequal-heights",
+  first: "the outcome",
+  rows: outcome.cells.length - 1,
+  second: `the ${lower.name}`,
+  otherRows: lower.cells.length,
+});
 
 function partsOf(outcome: readonly Column[], drivers: readonly Column[], [by, order]: readonly Column[]): Parts {
   const inGroups = order !== undefined || (by !== undefined && repeats(by));

@@ -148,6 +148,18 @@ describe("arguments that cannot be used", () => {
       rows: 2,
       otherRows: 3,
     });
+    expect(problemOf(column("Repairs", 5, 6), column(4, 7, 9))).toEqual({
+      code: "unequal-heights",
+      first: "the outcome",
+      rows: 2,
+      second: "the drivers",
+      otherRows: 3,
+    });
+    expect(problemOf(column("Repairs", 5, 6), column(1990, 2010, 2005))).toMatchObject({ code: "unequal-heights" });
+    expect(problemOf(column("Repairs", 5, 6), column("Price", 7, 9), column(45_292, 45_323, 45_352))).toMatchObject({
+      code: "unequal-heights",
+      second: "the key",
+    });
     expect(problemOf(column("Price", 1), [["price"], [2]])).toEqual({
       code: "repeated-heading",
       heading: "Price",
