@@ -5,6 +5,7 @@ import type { Options } from "../../core/answer/options.ts";
 import type { Policy } from "../../core/decision/wish.ts";
 import { useType } from "../look/type.ts";
 import { Disclosure } from "../parts/Disclosure.tsx";
+import { KindSettings } from "./KindSettings.tsx";
 import { TextField } from "../parts/TextField.tsx";
 import { usePane } from "../paneContext.ts";
 
@@ -48,6 +49,7 @@ export function Choice(): ReactNode {
           </Select>
         </Field>
         <FixedKind key={fixed?.errors ?? "by tests"} setup={setup} fixed={fixed} change={change} />
+        <KindSettings setup={setup} change={change} />
       </div>
     </Disclosure>
   );

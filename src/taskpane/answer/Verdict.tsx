@@ -2,6 +2,7 @@ import { makeStyles, tokens } from "@fluentui/react-components";
 import type { ReactNode } from "react";
 import type { Answer } from "../../core/answer/answer.ts";
 import { useType } from "../look/type.ts";
+import { keepTogether } from "../parts/keepTogether.ts";
 import { FirmnessMark } from "./FirmnessMark.tsx";
 
 const useStyles = makeStyles({
@@ -23,7 +24,7 @@ export function Verdict({ answer }: { readonly answer: Answer }): ReactNode {
             sentence !== null && (
               <li key={term} className={styles.item}>
                 <FirmnessMark firmness={firmness} className={styles.mark} />
-                <p className={type.verdict}>{sentence}</p>
+                <p className={type.verdict}>{keepTogether(sentence)}</p>
               </li>
             ),
         )}

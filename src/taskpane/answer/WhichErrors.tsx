@@ -5,6 +5,7 @@ import { pValueInWords } from "../../core/answer/wording.ts";
 import type { Decision } from "../../core/decision/decision.ts";
 import { testWords } from "../../core/diagnostics/words.ts";
 import { useType } from "../look/type.ts";
+import { keepTogether } from "../parts/keepTogether.ts";
 import { FourCases } from "../pictures/FourCases.tsx";
 import { settledBy } from "../pictures/caseGrid.ts";
 
@@ -33,14 +34,14 @@ export function WhichErrors({ answer }: { readonly answer: Answer }): ReactNode 
       <FourCases decision={decision} />
       <dl className={styles.reasons}>
         <dt className={styles.question}>Spread</dt>
-        <dd className={styles.finding}>{findingOf(decision, "spread")}</dd>
+        <dd className={styles.finding}>{keepTogether(findingOf(decision, "spread"))}</dd>
         <dt className={styles.question}>Follow-on</dt>
-        <dd className={styles.finding}>{findingOf(decision, "follow-on")}</dd>
+        <dd className={styles.finding}>{keepTogether(findingOf(decision, "follow-on"))}</dd>
       </dl>
       <ul className={styles.cautions}>
         {decision.cautions.map((caution) => (
           <li key={caution} className={type.remark}>
-            {caution}
+            {keepTogether(caution)}
           </li>
         ))}
       </ul>

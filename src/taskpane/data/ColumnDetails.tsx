@@ -6,7 +6,7 @@ import { CellList } from "../parts/CellList.tsx";
 import { TextField } from "../parts/TextField.tsx";
 import { usePane } from "../paneContext.ts";
 import type { ColumnRowProps } from "./ColumnRow.tsx";
-import { NumberField } from "./NumberField.tsx";
+import { NumberField } from "../parts/NumberField.tsx";
 import { ReadAs } from "./ReadAs.tsx";
 import { TextNumbers } from "./TextNumbers.tsx";
 import { Transforms } from "./Transforms.tsx";

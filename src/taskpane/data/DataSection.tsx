@@ -2,7 +2,9 @@ import type { ReactNode } from "react";
 import { useType } from "../look/type.ts";
 import { Disclosure } from "../parts/Disclosure.tsx";
 import { SectionTitle } from "../parts/SectionTitle.tsx";
+import { counted } from "../parts/rowWords.ts";
 import { usePane } from "../paneContext.ts";
+import { Calendar } from "./Calendar.tsx";
 import { ChangedNotice } from "./ChangedNotice.tsx";
 import { ColumnList } from "./ColumnList.tsx";
 import { PlaceChooser } from "./PlaceChooser.tsx";
@@ -15,12 +17,13 @@ export function DataSection(): ReactNode {
   const type = useType();
   const { data, setup } = usePane().state;
   if (data === null || setup === null) return <FirstRun />;
-  const { address, source, notes } = data;
+  const { address, source, notes, hiddenRows } = data;
   return (
     <>
       <SectionTitle>{address}</SectionTitle>
       <p className={type.remark}>
         {source.rowCount.toLocaleString("en-US")} rows, {source.columns.length} columns
+        {hiddenRows > 0 && `; ${counted(hiddenRows, "hidden row")} among them`}
       </p>
       {notes.map((note) => (
         <p key={note} className={type.remark}>
@@ -36,6 +39,7 @@ export function DataSection(): ReactNode {
       <h2 className={type.head}>Rows are</h2>
       <RowsAre />
       <WhatIsUsed />
+      <Calendar />
       <WayToAnswer />
     </>
   );

@@ -3,7 +3,7 @@ import type { ReactNode } from "react";
 import type { ColumnSetup } from "../../app/setup.ts";
 import type { Transform } from "../../core/design/model.ts";
 import { usePane } from "../paneContext.ts";
-import { NumberField } from "./NumberField.tsx";
+import { NumberField } from "../parts/NumberField.tsx";
 
 const ways: readonly (readonly [Transform["kind"], string])[] = [
   ["none", "as it stands"],

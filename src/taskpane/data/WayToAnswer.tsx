@@ -3,7 +3,7 @@ import type { ReactNode } from "react";
 import { confidenceInWords } from "../../core/answer/wording.ts";
 import { Disclosure } from "../parts/Disclosure.tsx";
 import { usePane } from "../paneContext.ts";
-import { NumberField } from "./NumberField.tsx";
+import { NumberField } from "../parts/NumberField.tsx";
 
 const useStyles = makeStyles({
   block: { marginTop: tokens.spacingVerticalS },

@@ -3,7 +3,12 @@ import { type ReactNode, useRef } from "react";
 import { copyFrom } from "./copyText.ts";
 
 const useStyles = makeStyles({
-  body: { display: "grid", rowGap: tokens.spacingVerticalS, padding: `${tokens.spacingVerticalS} 0` },
+  body: {
+    minWidth: 0,
+    display: "grid",
+    rowGap: tokens.spacingVerticalS,
+    padding: `${tokens.spacingVerticalS} ${tokens.spacingHorizontalM} ${tokens.spacingVerticalS} 0`,
+  },
   text: {
     width: "100%",
     boxSizing: "border-box",

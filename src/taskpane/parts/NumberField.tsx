@@ -1,5 +1,5 @@
 import { type ReactNode, useState } from "react";
-import { TextField } from "../parts/TextField.tsx";
+import { TextField } from "./TextField.tsx";
 
 export interface NumberFieldProps {
   readonly label: string;

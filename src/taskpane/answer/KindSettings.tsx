@@ -1,0 +1,76 @@
+import { Field, Select } from "@fluentui/react-components";
+import type { ReactNode } from "react";
+import type { Setup } from "../../app/setup.ts";
+import type { LagRule, WhiteVersion } from "../../core/covariance/choice.ts";
+import { usePane } from "../paneContext.ts";
+import { NumberField } from "../parts/NumberField.tsx";
+
+export interface KindSettingsProps {
+  readonly setup: Setup;
+  readonly change: (options: Partial<Setup["options"]>) => void;
+}
+
+const versions: readonly WhiteVersion[] = ["HC0", "HC1", "HC2", "HC3", "HC4", "HC4m", "HC5"];
+
+/** How White and Newey-West are made in detail. */
+export function KindSettings({ setup, change }: KindSettingsProps): ReactNode {
+  return (
+    <>
+      <Field label="White version" size="small">
+        <Select
+          size="small"
+          value={setup.options.whiteVersion}
+          onChange={(_, { value }) => change({ whiteVersion: versions.find((version) => version === value) ?? "HC3" })}
+        >
+          {versions.map((version) => (
+            <option key={version}>{version}</option>
+          ))}
+        </Select>
+      </Field>
+      {setup.rows === "time" && <Lags setup={setup} change={change} />}
+    </>
+  );
+}
+
+type Rule = readonly [name: string, rule: LagRule | null, words: string];
+
+/** @param used - the lags that the answer shown used: where a number of one's own begins. */
+const rulesFrom = (used: number): readonly Rule[] => [
+  ["policy", null, "by the policy's rule"],
+  ["careful", { kind: "careful" }, "careful: 1.3 √n less 1, rounded up"],
+  ["thumb", { kind: "thumb" }, "thumb: 4 (n / 100)^(2/9)"],
+  ["cube root", { kind: "cube root" }, "cube root: 0.75 n^(1/3)"],
+  ["newey-west 1994", { kind: "newey-west 1994", prewhiten: false }, "from the data: Newey and West 1994"],
+  ["andrews 1991", { kind: "andrews 1991", kernel: "bartlett", prewhiten: false }, "from the data: Andrews 1991"],
+  ["given", { kind: "given", lags: used }, "a number"],
+];
+
+function Lags({ setup, change }: KindSettingsProps): ReactNode {
+  const { lags } = setup.options;
+  const rules = rulesFrom(usePane().state.answered?.answer.lags ?? 1);
+  return (
+    <>
+      <Field label="Lags of Newey-West" size="small">
+        <Select
+          size="small"
+          value={lags?.kind ?? "policy"}
+          onChange={(_, { value }) => change({ lags: rules.find(([name]) => name === value)?.[1] ?? null })}
+        >
+          {rules.map(([name, , words]) => (
+            <option key={name} value={name}>
+              {words}
+            </option>
+          ))}
+        </Select>
+      </Field>
+      {lags?.kind === "given" && (
+        <NumberField
+          label="Number of lags"
+          value={lags.lags}
+          fault={(count) => (Number.isInteger(count) && count >= 0 ? null : "Type a whole number, 0 or more.")}
+          onNumber={(count) => change({ lags: { kind: "given", lags: count } })}
+        />
+      )}
+    </>
+  );
+}
