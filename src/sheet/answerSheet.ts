@@ -5,6 +5,7 @@ import { driversSection } from "./driversSection.ts";
 import { evidenceSection } from "./evidenceSection.ts";
 import { type Figures, keptFigures, liveFigures } from "./figures.ts";
 import { fourCasesSection } from "./fourCasesSection.ts";
+import { guardsSection } from "./guardsSection.ts";
 import { type SheetFacts, howMadeSection, settingsArea } from "./howMadeSection.ts";
 import type { SheetPlan } from "./plan.ts";
 import { titleSection, verdictSection } from "./plainWordsSection.ts";
@@ -13,7 +14,7 @@ import { rectangle, stack } from "./section.ts";
 export type SheetKind = "live" | "kept";
 
 /** Order of the parts on the page; charts stand beside the parts named here. */
-const part = { title: 0, verdict: 1, fourCases: 2, drivers: 3, evidence: 4, howMade: 5 } as const;
+const part = { title: 0, verdict: 1, fourCases: 2, drivers: 3, evidence: 4, guards: 5, howMade: 6 } as const;
 
 /**
  * Lays an answer out on a sheet that someone who was not there can read and redo.
@@ -50,6 +51,7 @@ const partsOf = (answer: Answer, facts: SheetFacts, figures: Figures) => [
   fourCasesSection(answer, figures),
   driversSection(answer, figures),
   evidenceSection(answer, figures),
+  guardsSection(answer),
   howMadeSection(answer, facts),
 ];
 

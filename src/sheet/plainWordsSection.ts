@@ -10,10 +10,13 @@ import { type Section, section, text } from "./section.ts";
 export const cautionLine =
   "A statistical check, not financial, legal or audit advice; have a qualified person look before money or a filing depends on it.";
 
+/** In points: the title is larger than a standard row. */
+const titleHeight = 24;
+
 export const titleSection = (answer: Answer, { date, version }: SheetFacts): Section =>
   section(
     [[text(answer.title)], [text(`${date}. Made with Footing ${version}.`)], [text(cautionLine)]],
-    [acrossPage(0, "title"), acrossPage(1, "note"), acrossPage(2, "caution")],
+    [{ ...acrossPage(0, "title"), rowHeight: titleHeight }, acrossPage(1, "note"), acrossPage(2, "caution")],
   );
 
 const acrossPage = (row: number, style: NonNullable<PlanFormat["style"]>, rows = 1): PlanFormat => ({
