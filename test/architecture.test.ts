@@ -51,7 +51,7 @@ const specifiers = (file: string): string[] =>
 
 const targets = (file: string): string[] =>
   specifiers(file)
-    .filter((specifier) => specifier.startsWith("."))
+    .filter((specifier) => specifier.startsWith(".") && !specifier.endsWith(".json"))
     .map((specifier) => relative(src, normalize(join(src, dirname(file), specifier))).replaceAll("\\", "/"));
 
 describe("architecture", () => {

@@ -11,12 +11,13 @@ export const deskBook =
   (analyst: Analyst) =>
   async (book: BookData): Promise<OpenBook> => {
     const desk = await openDesk({ book, functions: functionsMetadata() });
-    await desk.Office.onReady();
-    registerFunctions(desk.CustomFunctions, analyst);
+    const { Excel: excel, Office: office, CustomFunctions: functions } = desk;
+    await office.onReady();
+    registerFunctions(functions, analyst);
     return {
       host: excelHost({
-        run: desk.Excel.run,
-        isSetSupported: (set, version) => desk.Office.context.requirements.isSetSupported(set, version),
+        run: excel.run,
+        isSetSupported: (set, version) => office.context.requirements.isSetSupported(set, version),
       }),
       snapshot: async () => {
         await desk.settle();
