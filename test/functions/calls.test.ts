@@ -1,11 +1,14 @@
 import { describe, expect, it, vi } from "vitest";
 import type { Analyst } from "../../src/app/analyst.ts";
 import type { Answer } from "../../src/core/answer/answer.ts";
+import { choiceText } from "../../src/core/answer/tables.ts";
+import { notApplicable } from "../../src/core/diagnostics/outcome.ts";
+import { pValueOf } from "../../src/core/inference/ratioLaw.ts";
 import type { Question } from "../../src/core/answer/question.ts";
 import { settingTable } from "../../src/core/answer/settingTable.ts";
 import { type Result, failure, success } from "../../src/core/problem/result.ts";
 import { registerFunctions } from "../../src/functions/register.ts";
-import { answerFixture } from "../support/answerFixture.ts";
+import { answerOverCases, answerThroughTime } from "../support/answersOfMonths.ts";
 import { type Runtime, call, functionsRuntime } from "../support/functionsRuntime.ts";
 
 const outcome = [["Repairs"], [5], [7], [6]];
@@ -32,8 +35,8 @@ function deskWith(analyse: Analyst["analyse"]): Desk {
   return { ...runtime, asked };
 }
 
-const answering = (answer: Answer = answerFixture) => deskWith(() => Promise.resolve(success(answer)));
-const { inference, coefficients } = answerFixture;
+const answering = (answer: Answer = answerThroughTime) => deskWith(() => Promise.resolve(success(answer)));
+const { inference, coefficients } = answerThroughTime;
 const column = (values: readonly (number | string)[]) => values.map((value) => [value]);
 
 describe("what each function shows of an answer", () => {
@@ -41,29 +44,35 @@ describe("what each function shows of an answer", () => {
   const ask = (id: string, ...more: unknown[]) => call(desk, id, outcome, drivers, ...more);
 
   it("ANSWER: a row a driver under its headings, blank where a kind does not apply", async () => {
-    const table = await ask("ANSWER", null, null);
-    expect(table).toHaveLength(4);
-    expect(table).toEqual([
-      [
-        "driver",
-        "coefficient",
-        "classical",
-        "White",
-        "Newey-West",
-        "in force",
-        "ratio",
-        "p-value",
-        "low",
-        "high",
-        "conclusion",
-      ],
-      ["constant", 101.5, 1.515625, 1.53125, 1.546875, 1.546875, 14, 0.004, 87, 113, ""],
-      ["Price", -2.25, 0.515625, 0.53125, 0.546875, 0.546875, 15, 0.023, -7, 2, "shown, firm"],
-      ["Rain", 0.375, 0.265625, 0.28125, 0.296875, 0.296875, 16, 0.303, -4, 5, "not shown, leans on the choice"],
+    const [headings, ...table] = (await ask("ANSWER", null, null)) as unknown[][];
+    expect(headings?.slice(0, 10)).toEqual([
+      "driver",
+      "coefficient",
+      "classical",
+      "White",
+      "Newey-West",
+      "in force",
+      "ratio",
+      "p-value",
+      "low",
+      "high",
     ]);
-    const cases = answering({ ...answerFixture, inference: { ...inference, neweyWest: null } });
-    const rows = (await call(cases, "ANSWER", outcome, drivers, null, null)) as unknown[][];
-    expect(rows.slice(1).map((row) => row[4])).toEqual(["", "", ""]);
+    const { classical, white, neweyWest, inForce } = inference;
+    const expected = ["constant", "Price", "Rain"].map((name, row) => [
+      name,
+      coefficients[row],
+      classical.standardErrors[row],
+      white.standardErrors[row],
+      neweyWest?.standardErrors[row],
+      inForce.standardErrors[row],
+      inForce.ratio[row],
+      inForce.pValue[row],
+      inForce.low[row],
+      inForce.high[row],
+    ]);
+    expect(table.map((row) => row.slice(0, 10))).toEqual(expected);
+    const cases = (await call(answering(answerOverCases), "ANSWER", outcome, drivers, null, null)) as unknown[][];
+    expect(cases.slice(1).map((row) => row[4])).toEqual(["", "", ""]);
   });
 
   it("COEFFICIENTS, ERRORS, PVALUES and INTERVALS: columns in the order of the terms", async () => {
@@ -77,20 +86,22 @@ describe("what each function shows of an answer", () => {
     );
   });
 
-  it("PVALUES against given values: none of them 0", async () => {
-    const rows = (await ask("PVALUES", "classical", [[101.5], [-2.25], [0.375]], null, null)) as number[][];
-    expect(rows).toEqual([[1], [1], [1]]);
-    const [one] = (await ask("PVALUES", "classical", [[100]], null, null)) as number[][];
-    // Two-sided t(46) at (101.5 - 100) / 1.515625, by integration of the density.
-    expect(one?.[0]).toBeCloseTo(0.327502839018894, 12);
+  it("PVALUES against given values: one for all, or one a coefficient", async () => {
+    const own = coefficients.map((coefficient) => [coefficient]);
+    expect(await ask("PVALUES", "classical", own, null, null)).toEqual([[1], [1], [1]]);
+    expect(await ask("PVALUES", "classical", [[0]], null, null)).toEqual(column(inference.classical.pValue));
+    const one = (await ask("PVALUES", "classical", 0.25, null, null)) as number[][];
+    const ratio = (coefficients[2]! - 0.25) / inference.classical.standardErrors[2]!;
+    expect(one[2]![0]).toBeCloseTo(pValueOf(ratio, { law: "t", degreesOfFreedom: 45 }), 12);
     expect(await ask("PVALUES", null, [[1], [2]], null, null)).toMatchObject({ error: "#VALUE!" });
     expect(await ask("PVALUES", null, [["one"]], null, null)).toMatchObject({ error: "#VALUE!" });
   });
 
   it("VERDICT: a sentence a row, or the one about a driver by name or number", async () => {
-    expect(await ask("VERDICT", null, null, null)).toEqual(column(answerFixture.verdict));
-    expect(await ask("VERDICT", "rain", null, null)).toEqual([["Rain: nothing can be shown."]]);
-    expect(await ask("VERDICT", 1, null, null)).toEqual([["Price matters."]]);
+    expect(await ask("VERDICT", null, null, null)).toEqual(column(answerThroughTime.verdict));
+    const [, price, rain] = answerThroughTime.drivers;
+    expect(await ask("VERDICT", "rain", null, null)).toEqual([[rain?.sentence]]);
+    expect(await ask("VERDICT", 1, null, null)).toEqual([[price?.sentence]]);
     expect(await ask("VERDICT", "Pirce", null, null)).toMatchObject({
       error: "#VALUE!",
       message: expect.stringContaining("Price") as string,
@@ -98,18 +109,24 @@ describe("what each function shows of an answer", () => {
   });
 
   it("EVIDENCE: all tests, or the figures of one, a row an order", async () => {
+    const { tests } = answerThroughTime;
+    const figures = (name: string) =>
+      tests.flatMap((outcome) => {
+        if (outcome.test !== name || outcome.kind !== "computed") return [];
+        const { statistic, df, pValue } = outcome.figure;
+        return [[statistic, df.length === 1 ? df[0] : df.join(", "), pValue]];
+      });
     const table = (await ask("EVIDENCE", null, null, null)) as unknown[][];
     expect(table[0]).toContain("p-value");
-    expect(table.flat()).toContain(7.25);
-    expect(table.flat()).toContain("Does not apply: too few rows for its columns");
-    expect(await ask("EVIDENCE", "koenker", null, null)).toEqual([[7.25, 2, 0.0266]]);
-    expect(await ask("EVIDENCE", "Breusch Godfrey", null, null)).toEqual([
-      [6.5, 1, 0.019],
-      [7.5, 2, 0.0095],
-    ]);
-    expect(await ask("EVIDENCE", "white", null, null)).toEqual({
+    expect(table.flat()).toContain(figures("koenker")[0]?.[0]);
+    expect(await ask("EVIDENCE", "koenker", null, null)).toEqual(figures("koenker"));
+    expect(figures("breusch-godfrey").length).toBeGreaterThan(1);
+    expect(await ask("EVIDENCE", "Breusch Godfrey", null, null)).toEqual(figures("breusch-godfrey"));
+    const because = "too few rows for its columns";
+    const without = answering({ ...answerThroughTime, tests: [notApplicable("white", because)] });
+    expect(await call(without, "EVIDENCE", outcome, drivers, "white", null, null)).toEqual({
       error: "#N/A",
-      message: "The test does not apply: too few rows for its columns",
+      message: `The test does not apply: ${because}`,
     });
     expect(await ask("EVIDENCE", "koenkr", null, null)).toMatchObject({
       error: "#VALUE!",
@@ -118,7 +135,7 @@ describe("what each function shows of an answer", () => {
   });
 
   it("CHOICE: one text", async () => {
-    expect(await ask("CHOICE", null, null)).toEqual([["Newey-West (8 lags), ratio against t(48)"]]);
+    expect(await ask("CHOICE", null, null)).toEqual([[choiceText(answerThroughTime)]]);
   });
 
   it("a kind that is unknown or does not fit the rows: an error with its sentence", async () => {
