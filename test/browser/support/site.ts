@@ -17,7 +17,7 @@ const types: Readonly<Record<string, string>> = {
 };
 
 export interface Site {
-  /** "http://localhost:41234" */
+  /** "http://127.0.0.1:41234" */
   readonly address: string;
   readonly close: () => Promise<void>;
 }
@@ -31,10 +31,10 @@ export async function startSite(): Promise<Site> {
     response.writeHead(200, { "Content-Type": types[extname(path)] ?? "application/octet-stream" });
     createReadStream(path).pipe(response);
   });
-  await new Promise<void>((resolve) => server.listen(0, "localhost", resolve));
+  await new Promise<void>((resolve) => server.listen(0, "127.0.0.1", resolve));
   const { port } = server.address() as AddressInfo;
   return {
-    address: `http://localhost:${port}`,
+    address: `http://127.0.0.1:${port}`,
     close: () => new Promise((resolve) => server.close(() => resolve())),
   };
 }
