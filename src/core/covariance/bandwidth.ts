@@ -12,6 +12,8 @@ import { timelineOf } from "./timeline.ts";
 /** Rules that look at the scores. */
 export type DataRule = Extract<LagRule, { kind: "newey-west 1994" | "andrews 1991" }>;
 
+export const looksAtScores = (rule: LagRule): rule is DataRule => "prewhiten" in rule;
+
 /**
  * The bandwidth, in periods, that an automatic rule finds in the scores e_t x_t of all terms but the constant, each in
  * its own units and with weight one, after prewhitening where the rule says so.
@@ -19,7 +21,11 @@ export type DataRule = Extract<LagRule, { kind: "newey-west 1994" | "andrews 199
  */
 export function bandwidthOf(fit: Fit, rule: DataRule): number {
   const timeline = timelineOf(fit);
-  const scores = rule.prewhiten ? prewhitenedScores(fit, timeline) : plainScores(fit, timeline);
+  return bandwidthFrom(rule.prewhiten ? prewhitenedScores(fit, timeline) : plainScores(fit, timeline), fit, rule);
+}
+
+/** The same, from scores that stand ready. */
+export function bandwidthFrom(scores: Scores, fit: Fit, rule: DataRule): number {
   switch (rule.kind) {
     case "newey-west 1994":
       return neweyWest1994(fit, scores, rule.prewhiten ? 3 : 4);

@@ -1,10 +1,10 @@
 import type { RowOrder } from "../design/design.ts";
 import type { Fit } from "../fit/fit.ts";
 import { mirrored } from "../numeric/crossProducts.ts";
-import { visitGroups } from "../numeric/groupMoments.ts";
+import { type Runs, visitGroups } from "../numeric/groupMoments.ts";
 import type { SquareMatrix } from "../numeric/matrix.ts";
 import { ascendingRows, inOrder, isAscending, pairNumbers } from "../numeric/ordering.ts";
-import { basisRows } from "../numeric/rowSource.ts";
+import { type RowSource, basisRows } from "../numeric/rowSource.ts";
 import {
   addOuterProduct,
   plus,
@@ -15,6 +15,7 @@ import {
 } from "../numeric/smallMatrix.ts";
 import { basisOf } from "./basisOf.ts";
 import type { Covariance, GroupedVersion } from "./choice.ts";
+import { memory } from "./memory.ts";
 import { fromMeat } from "./sandwich.ts";
 import { satterthwaite } from "./satterthwaite.ts";
 
@@ -38,12 +39,13 @@ export function groupedCovariance(
   { version, order }: { readonly version: GroupedVersion; readonly order: Groups },
 ): Covariance {
   const choice = { kind: "grouped", version } as const;
-  const first = oneWay(fit, order.groups, version);
+  const first = oneWay(fit, version, { way: "first", groups: () => order.groups });
   if (order.second === null) {
     return { ...fromMeat(fit, first.meat, { choice, used: { version } }), degreesOfFreedom: first.degreesOfFreedom };
   }
-  const second = oneWay(fit, order.second.groups, version);
-  const both = oneWay(fit, pairNumbers(order.groups, order.second.groups), version);
+  const { groups } = order.second;
+  const second = oneWay(fit, version, { way: "second", groups: () => groups });
+  const both = oneWay(fit, version, { way: "both", groups: () => pairNumbers(order.groups, groups) });
   const difference = plus(plus(first.meat, second.meat), scaled(both.meat, -1));
   const { meat, fallback } = notIndefinite(difference);
   const fewer = Math.min(first.groupCount, second.groupCount) - 1;
@@ -54,51 +56,70 @@ export function groupedCovariance(
 }
 
 interface OneWay {
-  /** In the basis Q, with the factor of CR1 in it. */
+  /** In the basis Q. */
   readonly meat: SquareMatrix;
   readonly groupCount: number;
   readonly degreesOfFreedom: Float64Array<ArrayBuffer>;
 }
 
-function oneWay(fit: Fit, groups: Int32Array, version: GroupedVersion): OneWay {
-  const { columns, factors, runs } = inRuns(fit, groups);
+interface Grouping {
+  readonly way: "first" | "second" | "both";
+  readonly groups: () => Int32Array;
+}
+
+const known = memory<OneWay>();
+
+/** One grouping, with the factor of CR1 in it. */
+function oneWay(fit: Fit, version: GroupedVersion, { way, groups }: Grouping): OneWay {
+  const pass = version === "CR2" ? adjustedSums : plainSums;
+  const key = `${way} ${version === "CR2" ? "adjusted" : "plain"}`;
+  const found = known.find(fit, key) ?? known.keep(fit, key, pass(fit, groups()));
+  if (version !== "CR1") return found;
+  const { rowCount: n, degreesOfFreedom } = fit;
+  const factor = (found.groupCount / (found.groupCount - 1)) * ((n - 1) / degreesOfFreedom);
+  return { ...found, meat: scaled(found.meat, factor) };
+}
+
+/** sum of s_g s_g', s_g = sum of e_i q_i over the group. */
+function plainSums(fit: Fit, groups: Int32Array): OneWay {
+  const size = fit.columnCount;
+  const sums = new Float64Array(size * size);
+  let groupCount = 0;
+  const { rows, runs } = inRuns(fit, groups);
+  visitGroups(rows, runs, ({ score }) => {
+    groupCount++;
+    addOuterProduct(sums, score);
+  });
+  const degreesOfFreedom = new Float64Array(size).fill(groupCount - 1);
+  return { meat: { size, values: sums }, groupCount, degreesOfFreedom };
+}
+
+/** The same with A_g before e_g, and Satterthwaite's degrees of freedom. */
+function adjustedSums(fit: Fit, groups: Int32Array): OneWay {
   const size = fit.columnCount;
   const sums = new Float64Array(size * size);
   const approximation = satterthwaite(fit.inverseTriangle);
   let groupCount = 0;
-  visitGroups(basisRows({ columns, triangle: fit.triangle }), { factors, groups: runs }, ({ score, gram }) => {
+  const { rows, runs } = inRuns(fit, groups);
+  visitGroups(rows, runs, ({ score, gram }) => {
     groupCount++;
-    if (version !== "CR2") {
-      addOuterProduct(sums, score);
-      return;
-    }
     const within = mirrored(Float64Array.from(gram), size);
     const adjustment = symmetricFunction(within, inverseRootOfRest);
     approximation.add(within, adjustment);
     addOuterProduct(sums, timesVector(adjustment, score));
   });
-  const { rowCount: n, degreesOfFreedom } = fit;
-  const factor = version === "CR1" ? (groupCount / (groupCount - 1)) * ((n - 1) / degreesOfFreedom) : 1;
-  return {
-    meat: scaled({ size, values: sums }, factor),
-    groupCount,
-    degreesOfFreedom:
-      version === "CR2" ? approximation.degreesOfFreedom() : new Float64Array(size).fill(groupCount - 1),
-  };
+  return { meat: { size, values: sums }, groupCount, degreesOfFreedom: approximation.degreesOfFreedom() };
 }
 
-/** The fit's columns and residuals in an order in which rows of one group stand together. */
-function inRuns(
-  fit: Fit,
-  groups: Int32Array,
-): { columns: readonly Float64Array[]; factors: Float64Array; runs: Int32Array } {
-  const { columns } = basisOf(fit);
-  if (isAscending(groups)) return { columns, factors: fit.residuals, runs: groups };
-  const rows = ascendingRows(groups);
+/** The basis and the residuals in an order in which rows of one group stand together. */
+function inRuns(fit: Fit, groups: Int32Array): { readonly rows: RowSource; readonly runs: Runs } {
+  const { columns, triangle } = basisOf(fit);
+  if (isAscending(groups)) return { rows: basisRows({ columns, triangle }), runs: { factors: fit.residuals, groups } };
+  const order = ascendingRows(groups);
+  const moved = columns.map((column) => inOrder(column, order));
   return {
-    columns: columns.map((column) => inOrder(column, rows)),
-    factors: inOrder(fit.residuals, rows),
-    runs: rows.map((row) => groups[row]!),
+    rows: basisRows({ columns: moved, triangle }),
+    runs: { factors: inOrder(fit.residuals, order), groups: order.map((row) => groups[row]!) },
   };
 }
 

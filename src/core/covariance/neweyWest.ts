@@ -7,13 +7,14 @@ import { sandwich, scaled } from "../numeric/smallMatrix.ts";
 import { innerProduct } from "../numeric/sums.ts";
 import { onGrid } from "../numeric/timeGrid.ts";
 import { type Result, failure, success } from "../problem/result.ts";
-import { bandwidthOf } from "./bandwidth.ts";
-import type { Covariance, ErrorsChoice } from "./choice.ts";
+import { bandwidthFrom, looksAtScores } from "./bandwidth.ts";
+import type { Covariance, ErrorsChoice, LagRule } from "./choice.ts";
 import { lagWeights } from "./kernels.ts";
 import { lagsOf } from "./lags.ts";
+import { memory } from "./memory.ts";
 import { fromMeat } from "./sandwich.ts";
 import { type Scores, plainScores, prewhitenedScores } from "./scores.ts";
-import { timelineOf } from "./timeline.ts";
+import { type Timeline, timelineOf } from "./timeline.ts";
 
 type NeweyWestChoice = Extract<ErrorsChoice, { kind: "newey-west" }>;
 
@@ -34,19 +35,33 @@ export function neweyWestCovariance(fit: Fit, choice: NeweyWestChoice): Result<C
   if (rule.kind === "given" && rule.lags >= timeline.rows) {
     return failure({ code: "too-many-lags", lags: rule.lags, rows: timeline.rows });
   }
-  const prewhiten = "prewhiten" in rule && rule.prewhiten;
-  const scores = prewhiten ? prewhitenedScores(fit, timeline) : plainScores(fit, timeline);
+  const { meat, used } = known.find(fit, keyOf(rule)) ?? known.keep(fit, keyOf(rule), longRun(fit, rule, timeline));
   const factor = adjusted ? fit.rowCount / fit.degreesOfFreedom : 1;
-  const lags = lagsOf(fit, rule);
-  const bandwidth = "prewhiten" in rule ? bandwidthOf(fit, rule) : null;
-  const meat =
-    rule.kind === "andrews 1991"
-      ? kernelMeat(scores, lagWeights(rule.kernel, bandwidth!, timeline.span))
-      : bartlettMeat(scores, lags);
-  const coloured = scores.recolouring === null ? meat : sandwich(scores.recolouring, meat);
-  return success(
-    fromMeat(fit, scaled(coloured, factor), { choice, used: { lags, bandwidth, fallback: scores.caution } }),
-  );
+  return success(fromMeat(fit, scaled(meat, factor), { choice, used }));
+}
+
+/** The sum over lags in the basis Q, and how it was found. */
+interface LongRun {
+  readonly meat: SquareMatrix;
+  readonly used: Pick<Covariance["used"], "lags" | "bandwidth" | "fallback">;
+}
+
+const known = memory<LongRun>();
+const keyOf = (rule: LagRule): string => JSON.stringify(Object.entries(rule).sort());
+
+function longRun(fit: Fit, rule: LagRule, timeline: Timeline): LongRun {
+  if (!looksAtScores(rule)) {
+    const lags = lagsOf(fit, rule);
+    const meat = bartlettMeat(plainScores(fit, timeline), lags);
+    return { meat, used: { lags, bandwidth: null, fallback: null } };
+  }
+  const scores = rule.prewhiten ? prewhitenedScores(fit, timeline) : plainScores(fit, timeline);
+  const bandwidth = bandwidthFrom(scores, fit, rule);
+  const weights = rule.kind === "andrews 1991" ? lagWeights(rule.kernel, bandwidth, timeline.span) : null;
+  const lags = weights === null ? Math.floor(bandwidth) : weights.length - 1;
+  const filtered = weights === null ? bartlettMeat(scores, lags) : kernelMeat(scores, weights);
+  const meat = scores.recolouring === null ? filtered : sandwich(scores.recolouring, filtered);
+  return { meat, used: { lags, bandwidth, fallback: scores.caution } };
 }
 
 const bartlettMeat = ({ source, positions }: Scores, lags: number): SquareMatrix =>

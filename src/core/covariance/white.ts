@@ -1,8 +1,10 @@
 import type { Fit } from "../fit/fit.ts";
 import { weightedCrossProducts } from "../numeric/crossProducts.ts";
+import type { SquareMatrix } from "../numeric/matrix.ts";
 import { basisOf } from "./basisOf.ts";
 import type { Covariance, WhiteVersion } from "./choice.ts";
 import { leverageOfOne } from "./leverageOfOne.ts";
+import { memory } from "./memory.ts";
 import { fromMeat } from "./sandwich.ts";
 
 /** What a weight may depend on beside the row: rows, columns and the largest leverage. */
@@ -59,22 +61,25 @@ export function whiteCovariances(
   const fallback = leverageOfOne(fit);
   const instead = (version: WhiteVersion): WhiteVersion =>
     fallback === null || withoutLeverage.includes(version) ? version : "HC1";
-  const computed = [...new Set(versions.map(instead))];
-  const meats = weightedCrossProducts(
-    basisOf(fit),
-    computed.map((version) => weightsOf(fit, version)),
-  );
+  const meats = meatsOf(fit, [...new Set(versions.map(instead))]);
   return Object.fromEntries(
     versions.map((version) => {
       const used = instead(version);
-      const meat = meats[computed.indexOf(used)]!;
       const sentence = used === version ? null : `${version} ${fallback ?? ""}`;
-      return [
-        version,
-        fromMeat(fit, meat, { choice: { kind: "white", version }, used: { version: used, fallback: sentence } }),
-      ];
+      const white = { choice: { kind: "white", version }, used: { version: used, fallback: sentence } } as const;
+      return [version, fromMeat(fit, meats(used), white)];
     }),
   );
+}
+
+const known = memory<SquareMatrix>();
+
+/** The meats of the versions in the basis Q; those not known yet in one pass. */
+function meatsOf(fit: Fit, versions: readonly WhiteVersion[]): (version: WhiteVersion) => SquareMatrix {
+  const missing = versions.filter((version) => known.find(fit, version) === null);
+  const weightings = missing.map((version) => weightsOf(fit, version));
+  weightedCrossProducts(basisOf(fit), weightings).forEach((meat, index) => known.keep(fit, missing[index]!, meat));
+  return (version) => known.find(fit, version)!;
 }
 
 function weightsOf({ residuals, leverages, rowCount, columnCount }: Fit, version: WhiteVersion): Float64Array {

@@ -11,15 +11,20 @@ export interface GroupMoments {
   readonly gram: Float64Array;
 }
 
+/** The factor of each row and the group that it belongs to; rows of one group stand together. */
+export interface Runs {
+  readonly factors: Float64Array;
+  readonly groups: Int32Array;
+}
+
 /**
  * Calls `visit` with the moments of each run of rows that carry the same group number.
  * @param source - n rows q_i.
- * @param factors - e_i, n values.
- * @param groups - n group numbers; rows of one group stand together.
+ * @param runs - e_i and the group numbers, n values each.
  */
 export function visitGroups(
   source: RowSource,
-  { factors, groups }: { readonly factors: Float64Array; readonly groups: Int32Array },
+  { factors, groups }: Runs,
   visit: (moments: GroupMoments) => void,
 ): void {
   const score = new Float64Array(source.size);
