@@ -2,6 +2,7 @@ import type { Fit } from "../fit/fit.ts";
 import { earlierRows, valuesAt } from "../numeric/earlierRows.ts";
 import { explain } from "../numeric/explain.ts";
 import { inOrder } from "../numeric/ordering.ts";
+import { sumOfSquares } from "../numeric/sums.ts";
 import { relativeSquares } from "./auxiliary.ts";
 import { fewRows, lagrangeMultiplier } from "./lagrangeMultiplier.ts";
 import { type TestOutcome, notApplicable } from "./outcome.ts";
@@ -24,6 +25,8 @@ export function arch(fit: Fit, order: number): TestOutcome {
   const squares = relativeSquares(fit);
   const columns = earlier.map((rows) => inOrder(valuesAt(squares, rows), complete));
   const constant = new Float64Array(complete.length).fill(1);
-  const explained = explain([constant, ...columns], inOrder(squares, complete));
-  return lagrangeMultiplier({ test: "arch", order, rowCount: complete.length, explained, underNull: 1 });
+  const explainedSquares = inOrder(squares, complete);
+  const explained = explain([constant, ...columns], explainedSquares);
+  const size = sumOfSquares(explainedSquares);
+  return lagrangeMultiplier({ test: "arch", order, rowCount: complete.length, explained, size, underNull: 1 });
 }

@@ -34,8 +34,9 @@ export function breuschGodfreyOrders(fit: Fit, orders: readonly number[]): TestO
   return orders.map((order) => {
     const drivers = Array.from({ length: terms.length + order }, (_, j) => j);
     const explained = explainWithin(factor, { drivers, target: factor.size - 1, about: "zero" });
-    const { rowCount, columnCount } = fit;
-    return lagrangeMultiplier({ test: "breusch-godfrey", order, rowCount, explained, underNull: columnCount });
+    const { rowCount, columnCount: underNull } = fit;
+    const size = explained.total;
+    return lagrangeMultiplier({ test: "breusch-godfrey", order, rowCount, explained, size, underNull });
   });
 }
 

@@ -1,6 +1,7 @@
 import type { Fit } from "../fit/fit.ts";
 import { fTail } from "../numeric/distributions.ts";
 import { explain, type Explained } from "../numeric/explain.ts";
+import { isPerfect } from "../numeric/perfect.ts";
 import { type TestOutcome, computed, notApplicable } from "./outcome.ts";
 import { noTime } from "./timeLine.ts";
 
@@ -20,7 +21,7 @@ export function chow(fit: Fit, firstRows: number): TestOutcome {
   const [before, after] = [part(fit, 0, firstRows), part(fit, firstRows, rowCount)];
   const residual = before.residual + after.residual;
   const df = [before.rank + after.rank - columnCount, rowCount - before.rank - after.rank] as const;
-  if (df[0] < 1 || df[1] < 1 || residual === 0) {
+  if (df[0] < 1 || df[1] < 1 || isPerfect(residual, fit.residualSumOfSquares)) {
     return notApplicable("chow", `${rowCount} rows parted after row ${firstRows} leave too few on a side`);
   }
   const statistic = (before.explained + after.explained) / df[0] / (residual / df[1]);

@@ -1,6 +1,7 @@
 import type { Fit } from "../fit/fit.ts";
 import { fTail } from "../numeric/distributions.ts";
 import { explain } from "../numeric/explain.ts";
+import { isPerfect } from "../numeric/perfect.ts";
 import { ascendingRows, inOrder } from "../numeric/ordering.ts";
 import { fittedValues } from "./auxiliary.ts";
 import { type TestOutcome, computed, notApplicable } from "./outcome.ts";
@@ -23,7 +24,8 @@ export function goldfeldQuandt(fit: Fit): TestOutcome {
       `half of the ${fit.rowCount} rows are too few for a regression of their own`,
     );
   }
-  if (!(smaller.rss > 0)) return notApplicable("goldfeld-quandt", "the rows with small fitted values fit perfectly");
+  if (isPerfect(smaller.rss, fit.residualSumOfSquares))
+    return notApplicable("goldfeld-quandt", "the rows with small fitted values fit perfectly");
   const statistic = larger.rss / larger.df / (smaller.rss / smaller.df);
   const df = [larger.df, smaller.df] as const;
   const figure = { statistic, law: "F", df, pValue: fTail(statistic, ...df) } as const;

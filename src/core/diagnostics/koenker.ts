@@ -1,5 +1,6 @@
 import type { Fit } from "../fit/fit.ts";
 import { explain } from "../numeric/explain.ts";
+import { sumOfSquares } from "../numeric/sums.ts";
 import { constantAndDrivers, relativeSquares } from "./auxiliary.ts";
 import { lagrangeMultiplier } from "./lagrangeMultiplier.ts";
 import type { TestOutcome } from "./outcome.ts";
@@ -13,6 +14,8 @@ import type { TestOutcome } from "./outcome.ts";
  * @see Koenker (1981), J. Econometrics 17, 107-112; Breusch and Pagan (1979), Econometrica 47, 1287-1294.
  */
 export function koenker(fit: Fit): TestOutcome {
-  const explained = explain(constantAndDrivers(fit), relativeSquares(fit));
-  return lagrangeMultiplier({ test: "koenker", rowCount: fit.rowCount, explained, underNull: 1 });
+  const squares = relativeSquares(fit);
+  const explained = explain(constantAndDrivers(fit), squares);
+  const { rowCount } = fit;
+  return lagrangeMultiplier({ test: "koenker", rowCount, explained, size: sumOfSquares(squares), underNull: 1 });
 }

@@ -1,6 +1,7 @@
 import type { Fit } from "../fit/fit.ts";
 import { fTail } from "../numeric/distributions.ts";
 import { explain } from "../numeric/explain.ts";
+import { isPerfect } from "../numeric/perfect.ts";
 import { powersOfFitted } from "./auxiliary.ts";
 import { type TestOutcome, computed, notApplicable } from "./outcome.ts";
 import { fewRows } from "./lagrangeMultiplier.ts";
@@ -17,7 +18,8 @@ export function reset(fit: Fit): TestOutcome {
   const { explained, residual, rank } = explain([...terms, ...powersOfFitted(fit)], fit.residuals, "zero");
   const df = [rank - fit.columnCount, fit.rowCount - rank] as const;
   if (df[0] < 1) return notApplicable("reset", noPower);
-  if (df[1] < 1 || residual === 0) return notApplicable("reset", fewRows(fit.rowCount, rank));
+  if (df[1] < 1 || isPerfect(residual, fit.residualSumOfSquares))
+    return notApplicable("reset", fewRows(fit.rowCount, rank));
   const statistic = explained / df[0] / (residual / df[1]);
   const figure = { statistic, law: "F", df, pValue: fTail(statistic, ...df) } as const;
   return computed({ test: "reset", form: null, order: null, figure, fForm: null, details: {} });

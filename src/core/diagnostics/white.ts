@@ -1,6 +1,6 @@
 import type { Fit } from "../fit/fit.ts";
 import { explain, type Explained } from "../numeric/explain.ts";
-import { extremes, mean } from "../numeric/sums.ts";
+import { extremes, mean, sumOfSquares } from "../numeric/sums.ts";
 import { constantAndDrivers, fittedValues, relativeSquares } from "./auxiliary.ts";
 import { lagrangeMultiplier } from "./lagrangeMultiplier.ts";
 import type { TestOutcome } from "./outcome.ts";
@@ -25,14 +25,19 @@ const rowsPerSquare = 2;
  */
 export function whiteTest(fit: Fit, form?: WhiteForm): TestOutcome {
   const chosen = form === undefined ? byRule(fit) : { form, explained: explainForm[form](fit) };
-  return lagrangeMultiplier({ test: "white", ...chosen, rowCount: fit.rowCount, underNull: 1 });
+  return lagrangeMultiplier({ test: "white", ...chosen, ...sizesOf(fit), underNull: 1 });
 }
 
 /** White's test on the fitted values and their squares, whatever the rows. */
 export function whiteFitted(fit: Fit): TestOutcome {
   const explained = onFittedValues(fit);
-  return lagrangeMultiplier({ test: "white-fitted", explained, rowCount: fit.rowCount, underNull: 1 });
+  return lagrangeMultiplier({ test: "white-fitted", explained, ...sizesOf(fit), underNull: 1 });
 }
+
+const sizesOf = (fit: Fit): { rowCount: number; size: number } => ({
+  rowCount: fit.rowCount,
+  size: sumOfSquares(relativeSquares(fit)),
+});
 
 interface Chosen {
   readonly form: WhiteForm;

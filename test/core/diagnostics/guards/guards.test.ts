@@ -57,6 +57,10 @@ describe("collinearity", () => {
     expect(found.terms.map(({ inflation }) => inflation > 10)).toEqual([true, true, false, true]);
     expect(found.terms.find(({ term }) => term === "Total")!.madeOf).toHaveLength(2);
     expect(new Set(found.terms.find(({ term }) => term === "Total")!.madeOf)).toEqual(new Set(["Price", "Fuel"]));
+    // Price less its share in Total is all that Rent could carry of it: less than three tenths.
+    for (const { term, madeOf } of found.terms.slice(0, 2))
+      expect([term, madeOf]).toEqual([term, ["Total", term === "Price" ? "Fuel" : "Price"]]);
+    expect(found.terms[2]!.madeOf.length).toBeLessThan(3);
     const [closest] = found.dependencies;
     const carried = closest!.shares.filter(({ share }) => share > 0.5).map(({ term }) => term);
     expect(carried).toEqual(["Price", "Fuel", "Total"]);
@@ -73,10 +77,22 @@ describe("collinearity", () => {
   it("finds nothing among drivers that do not move together", () => {
     const fit = fitOf(designOf(y, columns, { names }));
     expect(collinearityGuard(collinearity(fit))).toMatchObject({ finding: "nothing found" });
+    // Columns about 10 with a deviation of 1: the indices reach 20, not 30.
+    expect(collinearity(fit).conditionNumber).toBeGreaterThan(15);
+    expect(collinearity(fit).dependencies).toEqual([]);
     expect(collinearityGuard(collinearity(referenceFit("longley")))).toMatchObject({
       guard: "collinearity",
       finding: "worth knowing",
     });
+  });
+
+  it("calls a dependency near from a condition index of 30 on", () => {
+    const x = Array.from({ length: 50 }, () => random.normal());
+    const beside = (noise: number): number[] => x.map((value) => value + noise * random.normal());
+    const loose = collinearity(fitOf(designOf(y, [x, beside(0.2)])));
+    expect(loose.conditionNumber).toBeGreaterThan(5);
+    expect(loose.dependencies).toEqual([]);
+    expect(collinearity(fitOf(designOf(y, [x, beside(0.02)]))).dependencies).toHaveLength(1);
   });
 
   it("does not change with a driver's unit", () => {
@@ -133,6 +149,15 @@ describe("trending series", () => {
     expect(linked.suspected).toBe(false);
     expect(trendingGuard(linked).finding).toBe("nothing found");
     expect(trendingGuard({ ...linked, suspected: true })).toMatchObject({ finding: "worth knowing" });
+    // Between the 5 % and the 10 % point.
+    const undecided = { statistic: -3.2, lags: 2, critical: [-4, -3.4, -3.1] } as const;
+    expect(trendingGuard({ ...linked, suspected: true, unitRoot: undecided })).toMatchObject({
+      finding: "look into it",
+    });
+    const manyDrivers = { ...undecided, critical: null };
+    expect(trendingGuard({ ...linked, suspected: true, unitRoot: manyDrivers }).sentences[1]).toMatch(
+      /too many drivers/,
+    );
   });
 
   it("are not asked of cases, and without the unit root across gaps", () => {
