@@ -27,10 +27,9 @@ export function usedHeight(cells: RawCells): number {
  * A number that JSON cannot hold never arrives, but a caller within the page could hand one over.
  */
 export function plainValue(value: unknown): number | string | boolean | null | { readonly error: string } {
+  if (typeof value === "number") return Number.isFinite(value) ? value : { error: "#NUM!" };
   if (isMissing(value)) return null;
   switch (typeof value) {
-    case "number":
-      return Number.isFinite(value) ? value : { error: "#NUM!" };
     case "string":
     case "boolean":
       return value;
@@ -64,10 +63,15 @@ export function columnOf(cells: RawCells, column: number, [first, last]: readonl
   for (let row = 0; row < kinds.length; row++) {
     const value = plainValue(cells[first + row]?.[column]);
     if (value === null) continue;
-    if (typeof value === "number") [kinds[row], numbers[row]] = [cellKind.number, value];
-    else if (typeof value === "string") [kinds[row], numbers[row]] = [cellKind.text, indexOf(value)];
-    else if (typeof value === "boolean") [kinds[row], numbers[row]] = [cellKind.boolean, Number(value)];
-    else [kinds[row], numbers[row]] = [cellKind.error, indexOf(value.error)];
+    kinds[row] = kindOf(value);
+    numbers[row] =
+      typeof value === "object" ? indexOf(value.error) : typeof value === "string" ? indexOf(value) : +value;
   }
   return { kinds, numbers, texts: [...known.keys()] };
+}
+
+function kindOf(value: NonNullable<ReturnType<typeof plainValue>>): number {
+  if (typeof value === "number") return cellKind.number;
+  if (typeof value === "string") return cellKind.text;
+  return typeof value === "boolean" ? cellKind.boolean : cellKind.error;
 }
