@@ -77,8 +77,10 @@ const known = memory<SquareMatrix>();
 /** The meats of the versions in the basis Q; those not known yet in one pass. */
 function meatsOf(fit: Fit, versions: readonly WhiteVersion[]): (version: WhiteVersion) => SquareMatrix {
   const missing = versions.filter((version) => known.find(fit, version) === null);
-  const weightings = missing.map((version) => weightsOf(fit, version));
-  weightedCrossProducts(basisOf(fit), weightings).forEach((meat, index) => known.keep(fit, missing[index]!, meat));
+  if (missing.length > 0) {
+    const weightings = missing.map((version) => weightsOf(fit, version));
+    weightedCrossProducts(basisOf(fit), weightings).forEach((meat, index) => known.keep(fit, missing[index]!, meat));
+  }
   return (version) => known.find(fit, version)!;
 }
 

@@ -81,16 +81,15 @@ function addFourthMoments(moments: Float64Array, pass: Pass): void {
   const { size, c } = pass;
   const left = productCount(c + 1);
   for (let d = c; d < size; d += 2) {
-    const right = productIndex(c, d);
-    const next = d + 1 < size ? productIndex(c, d + 1) : right;
-    for (let l = 0; l < left; l += 2) {
-      addFour(moments, pass, { l, left, right, next, entry: (d - c) * left + l, paired: d + 1 < size });
-    }
+    const paired = d + 1 < size;
+    const right = productIndex(c, d) * basisBlockRows;
+    const next = paired ? productIndex(c, d + 1) * basisBlockRows : right;
+    addAgainstTwo(moments, pass, { left, right, next, entry: (d - c) * left, paired });
   }
 }
 
-interface Four {
-  readonly l: number;
+/** Two columns on the right, against which all on the left are taken. */
+interface Right {
   readonly left: number;
   readonly right: number;
   readonly next: number;
@@ -98,28 +97,34 @@ interface Four {
   readonly paired: boolean;
 }
 
-function addFour(moments: Float64Array, { products, rows }: Pass, { l, left, right, next, entry, paired }: Four): void {
-  const [x0, y0, y1] = [l * basisBlockRows, right * basisBlockRows, next * basisBlockRows];
-  const x1 = l + 1 < left ? x0 + basisBlockRows : x0;
-  let s00 = 0;
-  let s10 = 0;
-  let s01 = 0;
-  let s11 = 0;
-  for (let i = 0; i < rows; i++) {
-    const p0 = products[x0 + i]!;
-    const p1 = products[x1 + i]!;
-    const r0 = products[y0 + i]!;
-    const r1 = products[y1 + i]!;
-    s00 += p0 * r0;
-    s10 += p1 * r0;
-    s01 += p0 * r1;
-    s11 += p1 * r1;
+function addAgainstTwo(
+  moments: Float64Array,
+  { products, rows }: Pass,
+  { left, right, next, entry, paired }: Right,
+): void {
+  for (let l = 0; l < left; l += 2) {
+    const x0 = l * basisBlockRows;
+    const x1 = l + 1 < left ? x0 + basisBlockRows : x0;
+    let s00 = 0;
+    let s10 = 0;
+    let s01 = 0;
+    let s11 = 0;
+    for (let i = 0; i < rows; i++) {
+      const p0 = products[x0 + i]!;
+      const p1 = products[x1 + i]!;
+      const r0 = products[right + i]!;
+      const r1 = products[next + i]!;
+      s00 += p0 * r0;
+      s10 += p1 * r0;
+      s01 += p0 * r1;
+      s11 += p1 * r1;
+    }
+    moments[entry + l]! += s00;
+    if (paired) moments[entry + left + l]! += s01;
+    if (x1 === x0) continue;
+    moments[entry + l + 1]! += s10;
+    if (paired) moments[entry + left + l + 1]! += s11;
   }
-  moments[entry]! += s00;
-  if (paired) moments[entry + left]! += s01;
-  if (l + 1 === left) return;
-  moments[entry + 1]! += s10;
-  if (paired) moments[entry + left + 1]! += s11;
 }
 
 function columnProduct(products: Float64Array, { i, j, rows }: { i: number; j: number; rows: number }): number {
