@@ -61,10 +61,12 @@ const watchTasks = (): Promise<void> =>
 /** Blocks the pane on purpose, so that a watch that sees nothing is found out; then forgets it. */
 const provesItself = async (): Promise<number> => {
   await paneFrame().evaluate(() => {
-    const end = performance.now() + 120;
-    while (performance.now() < end);
+    setTimeout(() => {
+      const end = performance.now() + 120;
+      while (performance.now() < end);
+    });
   });
-  await desk.page.waitForTimeout(200);
+  await desk.page.waitForTimeout(600);
   const seen = await longestTask();
   await paneFrame().evaluate(() => void ((globalThis as unknown as { durations: number[] }).durations.length = 0));
   return seen;
