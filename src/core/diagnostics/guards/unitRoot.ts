@@ -1,4 +1,4 @@
-import { leastSquares } from "../../numeric/leastSquares.ts";
+import { levelRatio } from "../../numeric/levelRatio.ts";
 import { unitRootSurfaces } from "./mackinnon2010.ts";
 
 export interface UnitRoot {
@@ -29,17 +29,10 @@ export function unitRoot(
   residuals: Float64Array,
   { variables, deterministic, lags }: UnitRootSettings,
 ): UnitRoot | null {
-  const changes = residuals.slice(1).map((u, i) => u - residuals[i]!);
-  const rows = changes.length - lags;
+  const rows = residuals.length - 1 - lags;
   if (rows <= lags + 1) return null;
-  const level = residuals.subarray(lags, lags + rows);
-  const earlier = Array.from({ length: lags }, (_, lag) => changes.subarray(lags - lag - 1, lags - lag - 1 + rows));
-  const found = leastSquares([level, ...earlier], changes.subarray(lags));
-  if (found.kind === "dependent" || found.rss === 0) return null;
-  const [first] = found.coefficients;
-  const row = found.inverseTriangle.values.subarray(0, lags + 1);
-  const variance = (found.rss / (rows - lags - 1)) * row.reduce((sum, r) => sum + r * r, 0);
-  return { statistic: first! / Math.sqrt(variance), lags, critical: unitRootPoints(variables, deterministic, rows) };
+  const statistic = levelRatio(residuals, lags);
+  return statistic === null ? null : { statistic, lags, critical: unitRootPoints(variables, deterministic, rows) };
 }
 
 /** beta_0 + beta_1 / T + beta_2 / T^2 + beta_3 / T^3 at 1, 5 and 10 %. */
