@@ -34,8 +34,12 @@ export async function startDeskSuite(): Promise<DeskSuite> {
   };
 }
 
+/** In milliseconds; a loaded machine takes its time to start a grid. */
+const patience = 60_000;
+
 async function openDesk(browser: Browser, site: Site, options: BrowserContextOptions = {}): Promise<DeskPage> {
   const context = await browser.newContext({ viewport: { width: 1280, height: 800 }, ...options });
+  context.setDefaultTimeout(patience);
   const page = await context.newPage();
   const asked: string[] = [];
   const faults: string[] = [];
@@ -53,10 +57,11 @@ async function openDesk(browser: Browser, site: Site, options: BrowserContextOpt
   return { page, pane, asked, faults, close: () => context.close() };
 }
 
-/** Works at the sheet with the desk's own hands, in the page; resolves when all formulas have come to rest. */
+/** Works at the sheet with the desk's own hands, in the page, while all formulas are at rest, and waits until they are again. */
 export function atSheet<T>(page: Page, work: (desk: Desk) => T): Promise<T> {
   return page.evaluate(
     `(async () => {
+      await globalThis.desk.settle();
       const result = (${work.toString()})(globalThis.desk);
       await globalThis.desk.settle();
       return result;

@@ -1,0 +1,117 @@
+import { readFile } from "node:fs/promises";
+import type { Page } from "playwright-core";
+import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from "vitest";
+import type { SheetData } from "../../src/desk/book/bookData.ts";
+import { openXlsx } from "../../src/desk/files/openXlsx.ts";
+import { atSheet, startDeskSuite, type DeskPage, type DeskSuite } from "./support/deskPage.ts";
+
+let suite: DeskSuite;
+let desk: DeskPage;
+beforeAll(async () => {
+  suite = await startDeskSuite();
+});
+afterAll(() => suite.close());
+beforeEach(async () => {
+  desk = await suite.openDesk();
+});
+afterEach(async () => {
+  expect(desk.asked).toEqual([]);
+  expect(desk.faults).toEqual([]);
+  await desk.close();
+});
+
+/** Every number on the printed part of the result sheet, by cell. */
+const numbersOn = (page: Page): Promise<Readonly<Record<string, number>>> =>
+  atSheet(page, (d) => {
+    const found: Record<string, number> = {};
+    d.values("'Repairs answer'!A1:K120").forEach((row, r) =>
+      row.forEach((value, c) => {
+        if (typeof value === "number") found[`${r},${c}`] = value;
+      }),
+    );
+    return found;
+  });
+
+async function savedSheet(page: Page): Promise<{ readonly path: string; readonly sheet: SheetData }> {
+  const [download] = await Promise.all([
+    page.waitForEvent("download"),
+    page.getByRole("button", { name: "Save workbook" }).click(),
+  ]);
+  const path = await download.path();
+  const reading = await openXlsx(new Uint8Array(await readFile(path)));
+  if (!reading.ok) throw new Error(reading.because);
+  return { path, sheet: reading.value.sheets.find(({ name }) => name === "Repairs answer")! };
+}
+
+describe("from cells to a result sheet", { timeout: 180_000 }, () => {
+  it("by mouse: the sheet follows the cells, and a saved copy opens with the same numbers", async () => {
+    const { page, pane } = desk;
+    await atSheet(page, (d) => d.select("Months!A4:E100"));
+    await pane.getByRole("button", { name: "Use selection" }).click();
+    await pane.getByRole("button", { name: "Get the answer" }).click();
+    await pane.getByRole("button", { name: "Write to the workbook" }).click();
+    await pane.getByText("Written to the sheet").waitFor({ state: "attached" });
+    const before = await numbersOn(page);
+    expect(Object.keys(before).length).toBeGreaterThan(50);
+
+    await atSheet(page, (d) => d.edit("Months!B50", 700));
+    const after = await numbersOn(page);
+    const moved = Object.keys(before).filter((cell) => before[cell] !== after[cell]);
+    expect(moved.length).toBeGreaterThan(40);
+
+    const { path, sheet } = await savedSheet(page);
+    expect(sheet.charts).toHaveLength(2);
+    await page.getByLabel("File to open").setInputFiles(path);
+    await pane.getByRole("button", { name: "Use selection" }).waitFor();
+    expect(await numbersOn(page)).toEqual(after);
+    await atSheet(page, (d) => d.edit("Months!B50", 430));
+    expect(await numbersOn(page)).not.toEqual(after);
+  });
+
+  it("by keyboard alone", async () => {
+    const { page, pane } = desk;
+    await page.getByRole("button", { name: "To the pane" }).focus();
+    await page.keyboard.press("Enter");
+    await tabTo(page, "Or type an address");
+    await page.keyboard.type("Months!A4:E100");
+    await page.keyboard.press("Enter");
+    await pane.getByRole("button", { name: "Get the answer" }).waitFor();
+    await tabTo(page, "Get the answer");
+    await page.keyboard.press("Enter");
+    await pane.getByRole("button", { name: "Write to the workbook" }).waitFor();
+    await tabTo(page, "Write to the workbook");
+    await page.keyboard.press("Enter");
+    await pane.getByText("Written to the sheet").waitFor({ state: "attached" });
+    const before = await numbersOn(page);
+
+    await atSheet(page, (d) => d.select("Months!B50"));
+    for (const part of ["header", "main"]) {
+      await page.keyboard.press("F6");
+      await page.waitForFunction((wanted) => document.querySelector(wanted)?.contains(document.activeElement), part);
+    }
+    await page.keyboard.type("700");
+    await page.keyboard.press("Enter");
+    expect(await atSheet(page, (d) => d.value("Months!B50"))).toBe(700);
+    expect(await numbersOn(page)).not.toEqual(before);
+  });
+});
+
+const mostStops = 60;
+
+/** Tabs on in the pane until the control of that name has the focus. */
+async function tabTo(page: Page, name: string): Promise<void> {
+  const pane = page.frames().find((frame) => frame.url().includes("taskpane.html"))!;
+  for (let stop = 0; stop < mostStops; stop++) {
+    const reached = await pane.evaluate((wanted) => {
+      const focused = document.activeElement;
+      const labels =
+        focused instanceof HTMLInputElement ? [...(focused.labels ?? [])].map((label) => label.textContent) : [];
+      return [focused?.textContent, focused?.getAttribute("aria-label"), ...labels].some(
+        (text) => text?.trim() === wanted,
+      );
+    }, name);
+    if (reached) return;
+    await page.keyboard.press("Tab");
+  }
+  throw new Error(`"${name}" is not reached with the Tab key.`);
+}
