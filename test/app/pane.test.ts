@@ -1,54 +1,25 @@
 import { beforeEach, describe, expect, it } from "vitest";
-import type { Analyst } from "../../src/app/analyst.ts";
-import { type Pane, createPane } from "../../src/app/pane.ts";
+import { type PaneBench, paneBench } from "../support/paneBench.ts";
 import type { PaneState } from "../../src/app/state.ts";
 import { success } from "../../src/core/problem/result.ts";
 import { answerFixture } from "../support/answerFixture.ts";
-import { type FakeHost, fakeHost } from "../support/fakeHost.ts";
-import { repairMonths } from "../support/repairs.ts";
-
-const months = 24;
-const address = "Months!A1:E25";
-
-let host: FakeHost;
-let pane: Pane;
-let analyse: Analyst["analyse"];
-let questions: Parameters<Analyst["analyse"]>[0][];
-let work: Promise<void>[];
-
-/** Lets all that was asked of the pane come to its end. */
-const settled = async (): Promise<void> => {
-  while (work.length > 0) await work.shift();
-};
-const state = (): PaneState => pane.store.get();
-const said = (): string => state().said.text;
+let bench: PaneBench;
+let host: PaneBench["host"];
+let pane: PaneBench["pane"];
+let questions: PaneBench["questions"];
+let work: PaneBench["work"];
+let state: PaneBench["state"];
+let said: PaneBench["said"];
+let settled: PaneBench["settled"];
+let read: PaneBench["read"];
+let answer: PaneBench["answer"];
 
 beforeEach(() => {
-  host = fakeHost("Months", repairMonths(months));
-  questions = [];
-  work = [];
-  analyse = () => Promise.resolve(success(answerFixture));
-  pane = createPane({
-    host,
-    analyst: {
-      analyse: (question, errand) => {
-        questions.push(question);
-        return analyse(question, errand);
-      },
-    },
-    edition: { today: () => "1 December 2026", version: "0.1.0" },
-    guard: (task) => void work.push(task()),
-  });
+  bench = paneBench();
+  ({ host, pane, questions, work, state, said, settled, read, answer } = bench);
 });
 
-const read = async (): Promise<void> => {
-  pane.commands.read({ kind: "selection" });
-  await settled();
-};
-const answer = async (): Promise<void> => {
-  pane.commands.answer();
-  await settled();
-};
+const address = "Months!A1:E25";
 
 describe("reading", () => {
   it("brings data, guessed roles and a word of it", async () => {
@@ -103,6 +74,23 @@ describe("reading", () => {
     expect(state().fault).toBeNull();
   });
 
+  it("drops what comes late from a host that heeds no signal", async () => {
+    let release: () => void = () => undefined;
+    host.heedless = true;
+    host.hold = () => new Promise((resolve) => void (release = resolve));
+    pane.commands.read({ kind: "selection" });
+    pane.commands.cancel();
+    release();
+    await settled();
+    expect(state().data).toBeNull();
+  });
+
+  it("takes a cancelling on the host's side for what it is", async () => {
+    host.refusals.read = { code: "cancelled" };
+    await read();
+    expect(state()).toMatchObject({ busy: null, fault: null, said: { text: "Cancelled." } });
+  });
+
   it("gives way to a second reading", async () => {
     const releases: (() => void)[] = [];
     host.hold = () => new Promise((resolve) => void releases.push(resolve));
@@ -134,6 +122,21 @@ describe("reading", () => {
 });
 
 describe("answering", () => {
+  it("shows no progress of work that has been given up", async () => {
+    await read();
+    const told: ((share: number) => void)[] = [];
+    bench.analyse = (_, { progress }) => {
+      told.push((share) => progress({ what: "Fitting", share }));
+      return new Promise(() => undefined);
+    };
+    pane.commands.answer();
+    pane.commands.answer();
+    await Promise.resolve();
+    told[1]?.(0.75);
+    told[0]?.(0.25);
+    expect(state().busy?.progress.share).toBe(0.75);
+  });
+
   it("asks what the set-up says and brings the user to the answer", async () => {
     await read();
     await answer();
@@ -166,7 +169,7 @@ describe("answering", () => {
   });
 
   it("passes the analyst's fault on", async () => {
-    analyse = () => Promise.resolve({ ok: false, problem: { code: "perfect-fit", column: "Repairs" } });
+    bench.analyse = () => Promise.resolve({ ok: false, problem: { code: "perfect-fit", column: "Repairs" } });
     await read();
     await answer();
     expect(state().fault).toEqual({ kind: "problem", problem: { code: "perfect-fit", column: "Repairs" } });
@@ -175,7 +178,7 @@ describe("answering", () => {
 
   it("can be cancelled, which raises the signal", async () => {
     let raised = false;
-    analyse = (_, { signal }) =>
+    bench.analyse = (_, { signal }) =>
       new Promise((resolve) =>
         signal.addEventListener("abort", () => {
           raised = true;
@@ -194,14 +197,14 @@ describe("answering", () => {
 
   it("lets a fault of ours through to the one who guards", async () => {
     await read();
-    analyse = () => Promise.reject(new Error("broken"));
+    bench.analyse = () => Promise.reject(new Error("broken"));
     pane.commands.answer();
     await expect(work[0]).rejects.toThrow("broken");
   });
 
   it("is out of date as soon as the set-up changes, also while it is being found", async () => {
     await read();
-    analyse = () => {
+    bench.analyse = () => {
       pane.store.dispatch({ kind: "setup changed", change: { constant: false } });
       return Promise.resolve(success(answerFixture));
     };
@@ -232,7 +235,7 @@ describe("cells that change", () => {
 
   it("while the answer is being found leave it out of date", async () => {
     await read();
-    analyse = () => {
+    bench.analyse = () => {
       host.change(3, 1, 5);
       return Promise.resolve(success(answerFixture));
     };
@@ -258,72 +261,6 @@ describe("cells that change", () => {
     await answer();
     expect(questions).toHaveLength(1);
     expect(state().fault).toEqual({ kind: "problem", problem: { code: "cell-being-edited" } });
-  });
-});
-
-describe("writing", () => {
-  it("writes the answer shown, live or kept, and says where", async () => {
-    await read();
-    await answer();
-    pane.commands.write("kept");
-    await settled();
-    expect(host.plans).toHaveLength(1);
-    expect(host.plans[0]?.name).toContain("Repairs");
-    expect(state().written).toEqual({ sheet: host.plans[0]?.name, kind: "kept", outdated: false });
-    expect(said()).toContain("as values that stay");
-  });
-
-  it("does nothing without an answer", async () => {
-    await read();
-    pane.commands.write("live");
-    await settled();
-    expect(host.plans).toHaveLength(0);
-  });
-
-  it("says why it could not write", async () => {
-    await read();
-    await answer();
-    host.refusals.write = { code: "workbook-protected" };
-    pane.commands.write("live");
-    await settled();
-    expect(state().fault).toEqual({ kind: "problem", problem: { code: "workbook-protected" } });
-    expect(state().written).toBeNull();
-  });
-
-  it("leaves a kept sheet out of date when cells change, a live one not", async () => {
-    await read();
-    await answer();
-    pane.commands.write("live");
-    await settled();
-    host.change(1, 1, 3);
-    expect(state().written?.outdated).toBe(false);
-    await answer();
-    pane.commands.write("kept");
-    await settled();
-    host.change(1, 1, 4);
-    expect(state().written?.outdated).toBe(true);
-  });
-
-  it("redoes answer and kept sheet in one go", async () => {
-    await read();
-    await answer();
-    pane.commands.write("kept");
-    await settled();
-    host.change(1, 1, 4);
-    pane.commands.redo();
-    await settled();
-    expect(questions).toHaveLength(2);
-    expect(host.plans).toHaveLength(2);
-    expect(state().written).toMatchObject({ sheet: `${host.plans[0]?.name ?? ""} 2`, outdated: false });
-  });
-
-  it("forgets answer and sheet when other data are read", async () => {
-    await read();
-    await answer();
-    pane.commands.write("kept");
-    pane.commands.read({ kind: "address", address: "Months!A1:E20" });
-    await settled();
-    expect(state()).toMatchObject({ answered: null, written: null, section: "data" });
   });
 });
 

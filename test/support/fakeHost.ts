@@ -13,6 +13,8 @@ export interface FakeHost extends Host {
   readonly places: DataPlace[];
   /** What the next call of each kind answers instead of what was asked. */
   readonly refusals: Partial<Record<"read" | "write" | "goTo" | "watch", Problem>>;
+  /** Whether it carries on as if nothing had been cancelled. */
+  heedless: boolean;
   /** Holds readings back until it is called. */
   hold: (() => Promise<void>) | null;
   readonly plans: SheetPlan[];
@@ -35,6 +37,7 @@ export function fakeHost(sheet: string, rows: Cell[][]): FakeHost {
     rows,
     places: [],
     refusals: {},
+    heedless: false,
     hold: null,
     plans: [],
     gone: [],
@@ -47,7 +50,9 @@ export function fakeHost(sheet: string, rows: Cell[][]): FakeHost {
     read: async (where: WhereToRead, errand: Errand) => {
       errand.progress({ what: "Reading the cells", share: 0.25 });
       await host.hold?.();
-      return errand.signal.aborted ? failure({ code: "cancelled" }) : refused("read", blockOf(host, where));
+      return errand.signal.aborted && !host.heedless
+        ? failure({ code: "cancelled" })
+        : refused("read", blockOf(host, where));
     },
     listPlaces: () => Promise.resolve(success(host.places)),
     write: (plan) => {

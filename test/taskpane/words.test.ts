@@ -82,14 +82,16 @@ describe("rows in words", () => {
 
 describe("figures of a driver", () => {
   it("stand under their kinds, the one in force as it counts", () => {
-    const figures = kindFigures(answerFixture, 1);
+    const { inference } = answerFixture;
+    const inForce = { ...inference.inForce, pValue: [0.001, 0.0625, 0.3] };
+    const figures = kindFigures({ ...answerFixture, inference: { ...inference, inForce } }, 1);
     expect(figures.map(({ label, inForce }) => [label, inForce])).toEqual([
       ["classical", false],
       ["White", false],
       ["Newey-West", true],
     ]);
     expect(figures[0]).toMatchObject({ low: -5, high: 0, reference: "t(46)" });
-    expect(figures[2]).toMatchObject({ low: -7, high: 2, pValue: 0.023, pValueNormal: 0.0242 });
+    expect(figures[2]).toMatchObject({ low: -7, high: 2, pValue: 0.0625, pValueNormal: 0.0242 });
   });
 
   it("are written to what the interval supports, with a minus sign", () => {
