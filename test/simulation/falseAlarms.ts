@@ -26,13 +26,13 @@ interface Procedure {
  * The Monte Carlo behind the policies held each of the textbook's two looks at spread, Koenker's and White's, to half
  * the level, which no policy of the tool does. So `decide` is given twice their p-values: 2p < 5 % is p < 2.5 %.
  */
-export const procedures = {
+const procedures = {
   "textbook, looks at half": { policy: "textbook", spreadAs: atHalfTheLevel },
   textbook: { policy: "textbook", spreadAs: (outcome) => outcome },
   careful: { policy: "careful", spreadAs: (outcome) => outcome },
 } as const satisfies Readonly<Record<string, Procedure>>;
 
-export type ProcedureName = keyof typeof procedures;
+type ProcedureName = keyof typeof procedures;
 
 const procedureNames = Object.keys(procedures) as readonly ProcedureName[];
 
@@ -74,7 +74,7 @@ function drawn({ rows, rowCount, driverCount, driver, errors }: Cell, random: Ra
   return designOf(errors(drivers, random), drivers, { order });
 }
 
-/** At the order that decides in the tool, 2 where there is no season; orders 1 and 4 change the rates by less than 1 %. */
+/** At the order that decides in the tool, 2 where there is no season; orders 1 and 4 change the rates by less than a point. */
 const followOnTests = (fit: Fit): TestOutcome[] =>
   fit.design.order.kind === "time" ? [breuschGodfrey(fit, autocorrelationOrder(fit.design.order, fit.rowCount))] : [];
 
