@@ -1,14 +1,17 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
+import { arch } from "../../../src/core/diagnostics/arch.ts";
 import { breuschGodfrey, breuschGodfreyOrders } from "../../../src/core/diagnostics/breuschGodfrey.ts";
+import { goldfeldQuandt } from "../../../src/core/diagnostics/goldfeldQuandt.ts";
 import { koenker } from "../../../src/core/diagnostics/koenker.ts";
+import { ljungBox } from "../../../src/core/diagnostics/ljungBox.ts";
 import type { TestOutcome } from "../../../src/core/diagnostics/outcome.ts";
 import { whiteTest } from "../../../src/core/diagnostics/white.ts";
 import { chiSquareTail, fTail } from "../../../src/core/numeric/distributions.ts";
 import { explain } from "../../../src/core/numeric/explain.ts";
 import { randomFrom } from "../../../src/core/numeric/random.ts";
 import { expectDigits } from "../../support/digits.ts";
-import { designOf, fitOf, inGroups, referenceFit, throughTime } from "../../support/referenceFit.ts";
+import { designOf, fitOf, inGroups, reference, referenceFit, throughTime } from "../../support/referenceFit.ts";
 
 type Computed = Extract<TestOutcome, { kind: "computed" }>;
 
@@ -211,5 +214,60 @@ describe("the Breusch-Godfrey test", () => {
     const fit = fitOf(designOf(y, X, { order: throughTime(40, everyThird) }));
     expect(computedOf(breuschGodfrey(fit, 4)).figure.df).toEqual([1]);
     expect(breuschGodfrey(fit, 2).kind).toBe("not-applicable");
+  });
+});
+
+describe("tests that look along time", () => {
+  const { X, y } = drawn(31, 40, 1);
+  const positions = Array.from({ length: 40 }, (_, i) => (i < 18 ? i : i + 2));
+  const fit = fitOf(designOf(y, X, { order: throughTime(40, positions) }));
+  const grid = new Float64Array(42);
+  positions.forEach((position, i) => (grid[position] = fit.residuals[i]!));
+
+  it("count a missing period as zero among the correlations", () => {
+    const parts = [1, 2, 3].map((lag) => {
+      const product = Array.from(grid).reduce((sum, u, t) => sum + u * (grid[t - lag] ?? 0), 0);
+      return (product / fit.residualSumOfSquares) ** 2 / (40 - lag);
+    });
+    const { figure } = computedOf(ljungBox(fit, [3])[0]!);
+    expectDigits(figure.statistic, 40 * 42 * parts.reduce((sum, part) => sum + part, 0), 11);
+    expectDigits(figure.pValue, chiSquareTail(figure.statistic, 3), 14);
+  });
+
+  it("leave out of the ARCH test the rows whose predecessors are missing", () => {
+    const complete = positions.flatMap((position, i) =>
+      [1, 2].every((lag) => positions.includes(position - lag)) ? [i] : [],
+    );
+    const square = (i: number): number => fit.residuals[i]! ** 2;
+    const columns = [
+      Float64Array.from(complete, () => 1),
+      ...[1, 2].map((lag) => Float64Array.from(complete, (i) => square(i - lag))),
+    ];
+    const { explained, total } = explain(columns, Float64Array.from(complete, square));
+    const { figure } = computedOf(arch(fit, 2));
+    expect(complete).toHaveLength(36);
+    expectDigits(figure.statistic, (36 * explained) / total, 10);
+  });
+});
+
+describe("the Goldfeld-Quandt test", () => {
+  it("compares the regressions of the two halves", () => {
+    const fit = referenceFit("mtcars");
+    const { y, X } = reference("mtcars");
+    const order = y
+      .map((value, i) => ({ i, fitted: value - fit.residuals[i]! }))
+      .sort((one, other) => one.fitted - other.fitted)
+      .map(({ i }) => i);
+    const half = (rows: readonly number[]) =>
+      fitOf(
+        designOf(
+          rows.map((i) => y[i]!),
+          X.map((column) => rows.map((i) => column[i]!)),
+        ),
+      );
+    const [smaller, larger] = [half(order.slice(0, 16)), half(order.slice(16))];
+    const { figure } = computedOf(goldfeldQuandt(fit));
+    expectDigits(figure.statistic, (larger.sigma / smaller.sigma) ** 2, 10);
+    expectDigits(figure.pValue, fTail(figure.statistic, 12, 12), 13);
   });
 });

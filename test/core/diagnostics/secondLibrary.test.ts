@@ -2,6 +2,7 @@ import { readFileSync } from "node:fs";
 import { describe, expect, it } from "vitest";
 import { arch } from "../../../src/core/diagnostics/arch.ts";
 import { breuschGodfrey } from "../../../src/core/diagnostics/breuschGodfrey.ts";
+import { breuschPagan } from "../../../src/core/diagnostics/breuschPagan.ts";
 import { cusum } from "../../../src/core/diagnostics/cusum.ts";
 import { durbinWatson } from "../../../src/core/diagnostics/durbinWatson.ts";
 import { jarqueBera } from "../../../src/core/diagnostics/jarqueBera.ts";
@@ -53,6 +54,7 @@ describe.each(Object.keys(figures))("%s", (id) => {
 
   it("agrees on the spread, the shape and the curve", () => {
     expectFound(koenker(fit), spread["koenker"]!);
+    expectFound(breuschPagan(fit), spread["breusch-pagan"]!);
     // The second library squares the raw columns and solves by pseudo-inverse, which costs it digits.
     expectFound(whiteTest(fit, "squares and cross-products"), spread["white"]!, 6);
     expectFound(whiteFitted(fit), spread["white-fitted"]!, 6);

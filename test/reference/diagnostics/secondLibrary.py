@@ -47,6 +47,7 @@ def spread(fit):
     e, X = fit.resid, fit.model.exog
     return {
         "koenker": four(diagnostic.het_breuschpagan(e, X)),
+        "breusch-pagan": pair(diagnostic.het_breuschpagan(e, X, robust=False)),
         "white": four(diagnostic.het_white(e, X)),
         "white-fitted": four(diagnostic.het_breuschpagan(e, np.column_stack([np.ones(len(e)), fit.fittedvalues, fit.fittedvalues**2]))),
         "jarque-bera": pair(jarque_bera(e)),
