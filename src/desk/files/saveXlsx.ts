@@ -28,15 +28,33 @@ export async function toParts(book: BookData, usualFont: string): Promise<Parts>
     activeSheet: book.active,
     stringMode: "inline",
   });
-  const parts = changeParts(unpack(bytes), /^xl\/worksheets\/[^/]+\.xml$/, withErrorResults);
-  const drawn = changeParts(parts, chartParts, finishedChart);
-  const styled = changeParts(drawn, /^xl\/styles\.xml$/, (part) => withWholeFonts(part, usualFont));
-  return changeParts(styled, /^xl\/workbook\.xml$/, withResultsKept);
+  return finishes(usualFont).reduce((parts, [path, finish]) => changeParts(parts, path, finish), unpack(bytes));
 }
+
+/** What each kind of part still needs after the file library has written it. */
+const finishes = (usualFont: string): readonly (readonly [RegExp, (part: string) => string])[] => [
+  [/^xl\/worksheets\/[^/]+\.xml$/, withErrorResults],
+  [chartParts, finishedChart],
+  [/^xl\/styles\.xml$/, (part) => withWholeFonts(part, usualFont)],
+  [/^xl\/workbook\.xml$/, finishedWorkbook],
+  [/^docProps\/app\.xml$/, finishedProperties],
+];
 
 /** Excel's own mark since 2019: with another it would calculate everything on opening, and show #NAME? where the add-in is missing. */
 const calculatedBy = '<calcPr calcId="191029"/>';
-const withResultsKept = (workbookPart: string): string => workbookPart.replace(/<calcPr[^>]*\/>/, calculatedBy);
+
+/** The workbook part with saved results that stand, and with sheet names quoted in what is to be printed. */
+const finishedWorkbook = (part: string): string =>
+  part
+    .replace(/<calcPr[^>]*\/>/, calculatedBy)
+    .replace(
+      /(<definedName name="_xlnm\.Print_Area"[^>]*>)([^'<][^<]*?)(?=![^!<]*<)/g,
+      (_, start: string, sheet: string) => `${start}'${sheet.replaceAll("'", "''")}'`,
+    );
+
+/** Programs keep saved text results only of files from those they know; as other libraries do, the file names Excel. */
+const writtenAs = "<Application>Microsoft Excel</Application>";
+const finishedProperties = (part: string): string => part.replace(/<Application>[^<]*<\/Application>/, writtenAs);
 
 /** The file library writes the result of a failed formula as text; spreadsheets must know it for an error. */
 function withErrorResults(sheetPart: string): string {

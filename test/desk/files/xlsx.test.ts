@@ -106,6 +106,19 @@ describe("a workbook saved and opened again", () => {
   });
 });
 
+describe("what is to be printed", () => {
+  it.each([
+    ["Shops", "'Shops'!$A$1:$B$9"],
+    ["Repairs answer", "'Repairs answer'!$A$1:$B$9"],
+    ["Rye's & Hove's", "'Rye''s &amp; Hove''s'!$A$1:$B$9"],
+  ])("of the sheet %s is named with the sheet in quotes, as spreadsheets demand", async (name, area) => {
+    const sheet = { ...blankSheet(name, [[1]]), printArea: "A1:B9" };
+    const workbook = textOf(unpack(await saveXlsx(bookOf(sheet)))["xl/workbook.xml"]!);
+    expect(workbook.replaceAll("&apos;", "'")).toContain(`localSheetId="0">${area}</definedName>`);
+    expect((await reopenedSheet(sheet)).printArea).toBe("A1:B9");
+  });
+});
+
 describe("dates", () => {
   const zone = process.env["TZ"];
   afterEach(() => {
