@@ -16,7 +16,7 @@ const kindName = { classical: "classical", white: "White", "newey-west": "Newey-
 const lawNames = { t: "the t law", normal: "the normal law", "fixed-b": "the fixed-b law" } as const;
 
 /**
- * The choices in words, alike ones together: "classical", "White (HC0, HC1)", "Newey-West with 0 to 3 lags",
+ * The choices in words, alike ones together: "classical", "White", "White (HC0, HC1)", "Newey-West with 0 to 3 lags",
  * and with the law where only some of a kind's laws are meant.
  * @param some - the choices to name.
  * @param all - every choice there is, so that what all laws of a kind share is said without naming them.
@@ -53,6 +53,7 @@ function membersInWords(kind: ChoiceName["kind"], law: ChoiceName["law"], { some
   const name = kindName[kind];
   if (kind === "classical") return name;
   if (kind === "newey-west") return `${name} with ${inLags(lagRanges(meant, every))}`;
+  if (meant.length === every.length) return name;
   const versions = [...new Set(meant.map(({ version }) => version))];
   return `${name} (${versions.join(", ")})`;
 }

@@ -163,14 +163,14 @@ describe("choices in words", () => {
   const some = (keep: (choice: ChoiceName) => boolean): string[] => choicesInWords(all.filter(keep), all);
 
   it("joins laws, versions and neighbouring lags", () => {
-    expect(some(() => true)).toEqual(["classical", "White (HC0, HC3)", "Newey-West with 0 to 8 lags"]);
+    expect(some(() => true)).toEqual(["classical", "White", "Newey-West with 0 to 8 lags"]);
     expect(some(({ law, kind }) => kind === "classical" && law === "normal")).toEqual([
       "classical under the normal law",
     ]);
     expect(some(({ lags }) => lags !== null && lags !== 2)).toEqual(["Newey-West with 0 to 1, 4 to 8 lags"]);
     expect(some(({ lags }) => lags === 1)).toEqual(["Newey-West with 1 lag"]);
     expect(some(({ version, law }) => version === "HC3" || (version === "HC0" && law === "t"))).toEqual([
-      "White (HC0, HC3) under the t law",
+      "White under the t law",
       "White (HC3) under the normal law",
     ]);
     expect(some(() => false)).toEqual([]);
