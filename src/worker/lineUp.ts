@@ -1,35 +1,31 @@
-import type { Analyst } from "../app/analyst.ts";
 import type { Errand } from "../app/host.ts";
-import type { Answer } from "../core/answer/answer.ts";
-import type { Question } from "../core/answer/question.ts";
-import { type Result, failure } from "../core/problem/result.ts";
+import { failure } from "../core/problem/result.ts";
 import type { FromWorker, WorkerLine } from "./protocol.ts";
 import { type Seat, takeSeat } from "./seat.ts";
-
-export interface Hiring {
-  readonly hire: () => WorkerLine;
-  /** Who computes where a worker cannot start. */
-  readonly fallback: Analyst;
-}
+import type { Asked, Computed, TaskName } from "./tasks.ts";
 
 export interface Job {
   readonly id: number;
-  readonly question: Question;
+  readonly task: TaskName;
+  readonly asked: Asked<TaskName>;
   readonly errand: Errand;
-  readonly resolve: (result: Result<Answer> | Promise<Result<Answer>>) => void;
+  readonly resolve: (result: Computed<TaskName>) => void;
   readonly reject: (fault: Error) => void;
+  /** Does the job where no worker can start. */
+  readonly withoutWorker: () => void;
 }
 
 /** Jobs in the order they came, the one under way, and the worker in its place. */
-interface LineUp extends Hiring {
+interface LineUp {
+  readonly hire: () => WorkerLine;
   readonly waiting: Job[];
   running: Job | null;
   seat: Seat | null;
   startable: boolean;
 }
 
-export const lineUp = (hiring: Hiring): LineUp => ({
-  ...hiring,
+export const lineUp = (hire: () => WorkerLine): LineUp => ({
+  hire,
   waiting: [],
   running: null,
   seat: null,
@@ -59,7 +55,7 @@ function next(line: LineUp): void {
   line.running = job;
   line.seat ??= seatOrNull(line);
   if (line.seat === null) lose(line, new Error("No worker can be started."), false);
-  else line.seat.ask(job.id, "analyse", job.question);
+  else line.seat.ask(job.id, job.task, job.asked);
 }
 
 /** Browsers throw where a page may not start workers at all. */
@@ -88,7 +84,7 @@ function lose(line: LineUp, fault: Error, started: boolean): void {
   line.startable = started;
   settle(line, (job) => {
     if (started) job.reject(fault);
-    else job.resolve(line.fallback.analyse(job.question, job.errand));
+    else job.withoutWorker();
   });
 }
 

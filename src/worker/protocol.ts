@@ -1,6 +1,5 @@
-import type { Question } from "../core/answer/question.ts";
 import type { Source } from "../core/table/source.ts";
-import type { TaskName, Tasks } from "./tasks.ts";
+import type { Asked, Computed, TaskName } from "./tasks.ts";
 
 /**
  * Plain messages between the client and its worker. Sources go over once, under a number, and stay there for the next
@@ -14,13 +13,14 @@ export type ToWorker =
       readonly job: number;
       readonly task: TaskName;
       readonly source: number;
-      readonly question: Omit<Question, "source">;
+      /** All but the source itself. */
+      readonly asked: Omit<Asked<TaskName>, "source">;
     };
 
 export type FromWorker =
   | { readonly kind: "ready" }
   | { readonly kind: "progress"; readonly job: number; readonly what: string; readonly share: number }
-  | { readonly kind: "done"; readonly job: number; readonly result: ReturnType<Tasks[TaskName]> }
+  | { readonly kind: "done"; readonly job: number; readonly result: Computed<TaskName> }
   /** A fault of ours: what was thrown, for the details that can be copied. */
   | { readonly kind: "failed"; readonly job: number; readonly message: string; readonly stack: string };
 

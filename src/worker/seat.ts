@@ -1,11 +1,10 @@
-import type { Question } from "../core/answer/question.ts";
 import type { Source } from "../core/table/source.ts";
 import type { FromWorker, WorkerLine } from "./protocol.ts";
-import type { TaskName } from "./tasks.ts";
+import type { Asked, TaskName } from "./tasks.ts";
 
 /** One worker in its place: asked one thing at a time, and left for good when it must stop. */
 export interface Seat {
-  readonly ask: (job: number, task: TaskName, question: Question) => void;
+  readonly ask: (job: number, task: TaskName, asked: Asked<TaskName>) => void;
   readonly leave: () => void;
 }
 
@@ -42,8 +41,8 @@ export function takeSeat(hire: () => WorkerLine, ears: Ears): Seat {
   line.onmessageerror = () => lose("A message of the worker could not be read.");
   line.onerror = ({ message }) => lose(`The worker stopped: ${message ?? "no reason given"}`);
   const numberOf = keeper(line);
-  const ask: Seat["ask"] = (job, task, { source, ...question }) =>
-    line.postMessage({ kind: "compute", job, task, source: numberOf(source), question });
+  const ask: Seat["ask"] = (job, task, { source, ...asked }) =>
+    line.postMessage({ kind: "compute", job, task, source: numberOf(source), asked });
   return { ask, leave };
 }
 

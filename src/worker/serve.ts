@@ -7,11 +7,12 @@ type Compute = Extract<ToWorker, { kind: "compute" }>;
 /** Computes what is asked over the port, one question after the other, and says when it is ready. */
 export function serve(port: WorkerPort, tasks: Tasks): void {
   const sources = new Map<number, Source>();
-  const compute = ({ job, task, question }: Compute, source: Source | undefined): FromWorker => {
+  const compute = ({ job, task, asked }: Compute, source: Source | undefined): FromWorker => {
     const report = (what: string, share: number): void => port.postMessage({ kind: "progress", job, what, share });
     try {
       if (source === undefined) throw new Error("The worker was asked about data it does not hold.");
-      return { kind: "done", job, result: tasks[task]({ ...question, source }, report) };
+      // The client sends with each task what that task asks for.
+      return { kind: "done", job, result: tasks[task]({ ...asked, source } as never, report) };
     } catch (fault) {
       const { message, stack } = fault instanceof Error ? fault : new Error(String(fault));
       return { kind: "failed", job, message, stack: stack ?? "" };

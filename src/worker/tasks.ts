@@ -1,13 +1,23 @@
 import { analyse } from "../core/answer/analyse.ts";
 import type { Answer } from "../core/answer/answer.ts";
+import { type Finding, type Inquiry, inquire } from "../core/answer/inquire.ts";
 import type { Question, Report } from "../core/answer/question.ts";
 import type { Result } from "../core/problem/result.ts";
 
-/** What can be computed off the main thread: each task takes a question and says how far it has come. */
+/** What can be computed off the main thread: each task takes what is asked and says how far it has come. */
 export interface Tasks {
-  readonly analyse: (question: Question, report: Report) => Result<Answer>;
+  readonly analyse: (asked: Question, report: Report) => Result<Answer>;
+  readonly inquire: (asked: Question & { readonly inquiry: Inquiry }, report: Report) => Result<Finding>;
 }
 
 export type TaskName = keyof Tasks;
+export type Asked<Name extends TaskName> = Parameters<Tasks[Name]>[0];
+export type Computed<Name extends TaskName> = ReturnType<Tasks[Name]>;
 
-export const tasks: Tasks = { analyse };
+export const tasks: Tasks = {
+  analyse,
+  inquire: ({ inquiry, ...question }, report) => {
+    report("Fitting", 0);
+    return inquire(question, inquiry);
+  },
+};

@@ -19,4 +19,6 @@ const thread = parentPort;
 if (thread === null) throw new Error("These tasks run in a thread.");
 const port: WorkerPort = { postMessage: (message) => thread.postMessage(message), onmessage: null };
 thread.on("message", (data: ToWorker) => port.onmessage?.({ data }));
-serve(port, { analyse });
+const inquire: Tasks["inquire"] = ({ inquiry }) =>
+  success({ kind: "not-applicable", because: `asked: ${inquiry.kind}` });
+serve(port, { analyse, inquire });

@@ -28,7 +28,8 @@ const ask = (conduct: string, source = sourceOf(1, 2, 4)): Question => ({
 });
 
 const answerTitled = (title: string): Answer => ({ title }) as Answer;
-const inline = inlineAnalystOf({ analyse: () => success(answerTitled("in line")) });
+const noFinding = () => success({ kind: "not-applicable", because: "in line" } as const);
+const inline = inlineAnalystOf({ analyse: () => success(answerTitled("in line")), inquire: noFinding });
 const errand = (signal = new AbortController().signal, progress: (what: string) => void = () => undefined) => ({
   signal,
   progress: ({ what }: { readonly what: string }) => progress(what),
@@ -67,6 +68,16 @@ describe("the analysis in a worker", () => {
     expect(await analyse(ask("sum", a), errand())).toEqual(success({ title: "sum 1" }));
     expect(await analyse(ask("sum", b), errand())).toEqual(success({ title: "sum 2" }));
     expect(threads.sent.filter((kind) => kind === "keep")).toHaveLength(4);
+  });
+
+  it("answers an inquiry about the same data", async () => {
+    const { analyse, inquire } = analyst();
+    const source = sourceOf(3, 5, 9);
+    threads.sent.length = 0;
+    await analyse(ask("sum", source), errand());
+    const found = await inquire(ask("sum", source), { kind: "row by row" }, errand());
+    expect(found).toEqual(success({ kind: "not-applicable", because: "asked: row by row" }));
+    expect(threads.sent).toEqual(["keep", "compute", "compute"]);
   });
 
   it("stops a computation under way when its caller gives up, and goes on with the next", async () => {
@@ -123,8 +134,9 @@ describe("where no worker can start", () => {
     const hire = (): never => {
       throw new Error("not allowed here");
     };
-    const { analyse } = workerAnalyst({ hire, fallback: inline, seconds: 5 });
+    const { analyse, inquire } = workerAnalyst({ hire, fallback: inline, seconds: 5 });
     expect(await analyse(ask("sum"), errand())).toEqual(success({ title: "in line" }));
+    expect(await inquire(ask("sum"), { kind: "row by row" }, errand())).toEqual(noFinding());
   });
 
   it("computes in line when the script fails before it is ready, and does not try again", async () => {
@@ -154,6 +166,7 @@ describe("where no worker can start", () => {
         begun++;
         return success(answerTitled("in line"));
       },
+      inquire: noFinding,
     });
     const controller = new AbortController();
     controller.abort();
