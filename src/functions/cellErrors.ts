@@ -47,6 +47,7 @@ const signs = {
   "dependent-columns": "notAvailable",
   "perfect-fit": "notAvailable",
   "numbers-too-large": "invalidValue",
+  "zero-standard-error": "notAvailable",
   "errors-need-order": "notAvailable",
   "too-many-lags": "invalidValue",
   "unknown-setting": "invalidValue",

@@ -9,7 +9,8 @@ import type { Fit } from "../fit/fit.ts";
 import type { InferenceTable } from "../inference/inference.ts";
 import { inferenceOf } from "../inference/inferenceOf.ts";
 import { allDriversZero, jointTest } from "../inference/joint.ts";
-import { type Result, success } from "../problem/result.ts";
+import type { Problem } from "../problem/problem.ts";
+import { type Result, failure, success } from "../problem/result.ts";
 import type { AllStandardErrors, Answer, GroupedErrors } from "./answer.ts";
 import { againstOf } from "./drivers.ts";
 import type { Options } from "./options.ts";
@@ -40,6 +41,8 @@ export function allErrors(fit: Fit, setting: Setting): Result<AllErrors> {
   }
   const of: Lookup = (choice) => found.get(keyOf(choice)) ?? null;
   const inForce = inForceOf(fit, of, setting);
+  const zero = zeroError(fit, inForce);
+  if (zero !== null) return failure(zero);
   return success({
     standardErrors: standardErrorsFrom(fit, of, setting),
     inference: inferenceFrom(fit, inForce, setting),
@@ -97,6 +100,19 @@ function groupedFrom(order: RowOrder, of: Lookup): GroupedErrors | null {
     CR2: listed(version("CR2")),
     CR2DegreesOfFreedom: [...(version("CR2")?.degreesOfFreedom ?? [])],
   };
+}
+
+/** Below this share of the classical standard error another one is rounding error about zero. */
+const nothing = 1e-8;
+
+/** A standard error of zero would call any coefficient shown: that is no finding but a fault of the design. */
+function zeroError(fit: Fit, covariances: ByKind): Problem | null {
+  const classical = covariances.classical?.standardErrors ?? [];
+  for (const [errors, covariance] of Object.entries(covariances)) {
+    const at = covariance?.standardErrors.findIndex((error, index) => !(error > nothing * classical[index]!)) ?? -1;
+    if (at >= 0) return { code: "zero-standard-error", errors, term: fit.design.terms[at]?.name ?? "" };
+  }
+  return null;
 }
 
 type ByKind = Readonly<Record<ErrorsChoice["kind"], Covariance | null>>;

@@ -176,6 +176,10 @@ const sentences: { readonly [Code in Problem["code"]]: (problem: Extract<Problem
     `${capitalised(counted(lags, "lag"))} cannot be used with ${counted(rows, "row")}.`,
     "Choose fewer lags than rows.",
   ],
+  "zero-standard-error": ({ errors, term }) => [
+    `The ${errors} standard error of "${term}" comes out as zero: the rows that tell about it are fitted exactly, whatever they hold.`,
+    "Leave the driver out, or join its category with another.",
+  ],
   "errors-need-order": ({ errors, rows }) => [
     `${errors === "newey-west" ? "Newey-West standard errors need rows that run through time" : "Grouped standard errors need rows in groups"}, but here rows are ${rows === "time" ? "through time" : rows === "groups" ? "in groups" : "separate cases"}.`,
     "Say otherwise what the rows are to each other, or choose another kind of standard errors.",

@@ -81,6 +81,7 @@ export type FitProblem =
   | { readonly code: "perfect-fit"; readonly column: string }
   /** Or too small, where `value` is below one. */
   | { readonly code: "numbers-too-large"; readonly column: string; readonly cell: string; readonly value: number }
+  | { readonly code: "zero-standard-error"; readonly errors: string; readonly term: string }
   | { readonly code: "errors-need-order"; readonly errors: string; readonly rows: string }
   | { readonly code: "too-many-lags"; readonly lags: number; readonly rows: number };
 

@@ -158,6 +158,10 @@ const sentences: Sentences = {
     { code: "numbers-too-large", column: "Price", cell: "Months!C14", value: 1e200 },
     'Cell Months!C14 in column "Price" gives 1e+200, which is too large to calculate with. Correct the cell, or give the column in larger units.',
   ],
+  "zero-standard-error": [
+    { code: "zero-standard-error", errors: "white", term: "Region: North" },
+    'The white standard error of "Region: North" comes out as zero: the rows that tell about it are fitted exactly, whatever they hold. Leave the driver out, or join its category with another.',
+  ],
   "errors-need-order": [
     { code: "errors-need-order", errors: "newey-west", rows: "cases" },
     "Newey-West standard errors need rows that run through time, but here rows are separate cases. Say otherwise what the rows are to each other, or choose another kind of standard errors.",
