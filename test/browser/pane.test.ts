@@ -116,8 +116,8 @@ describe("the answer", () => {
     expect(await cases.getByRole("cell", { name: /in force/ }).count()).toBe(1);
     expect(await cases.getByRole("cell", { name: /in force/ }).innerText()).toContain("Newey-West");
     expect(await page.getByRole("definition").allInnerTexts()).toEqual([
-      expect.stringMatching(/^even: White's test, p = 0\.\d+, tested at 10 %$/),
-      expect.stringMatching(/^some: Breusch-Godfrey test, p under 0.0001, tested at 10 %$/),
+      expect.stringMatching(/^even: White's test, p\s=\s0\.\d+, tested at 10\s%$/),
+      expect.stringMatching(/^some: Breusch-Godfrey test, p under 0.0001, tested at 10\s%$/),
     ]);
   });
 
@@ -139,7 +139,7 @@ describe("the answer", () => {
     await button(page, /Change how they are chosen/).click();
     await page.getByLabel("Policy").selectOption({ label: "textbook: as handbooks teach it" });
     await page
-      .getByText(/tested at 5 %/)
+      .getByText(/tested at 5\s%/)
       .first()
       .waitFor();
     await page.getByLabel("Standard errors").selectOption({ label: "always White" });

@@ -77,6 +77,7 @@ describe.each(widths)("%i pixels wide", (width) => {
     await reach(page);
     for (const colour of colours) {
       await page.emulateMedia(colour);
+      await atRest(page);
       const found = { violations: await violationsOn(page), colour };
       expect(found).toEqual({ violations: [], colour });
     }
@@ -85,6 +86,14 @@ describe.each(widths)("%i pixels wide", (width) => {
     await page.close();
   });
 });
+
+/** Colours fade from one theme to the next; what never ends, such as a bar of progress, is not waited for. */
+const atRest = (page: Page): Promise<void> =>
+  page.evaluate(async () => {
+    await new Promise((resolve) => requestAnimationFrame(() => requestAnimationFrame(resolve)));
+    const ending = document.getAnimations().filter(({ effect }) => effect?.getTiming().iterations !== Infinity);
+    await Promise.allSettled(ending.map(({ finished }) => finished));
+  });
 
 async function violationsOn(page: Page): Promise<string[]> {
   await page.addScriptTag({ content: axe });
