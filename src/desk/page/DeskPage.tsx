@@ -47,8 +47,10 @@ export function DeskPage({ functions }: { readonly functions: FunctionsMetadata 
         goToPane={parts.goToPane}
       />
       <main className="grid" aria-label="Sheet" ref={parts.grid} />
-      <Splitter width={paneWidth} resize={setPaneWidth} />
-      <iframe className="pane" title="Footing" ref={parts.pane} />
+      <aside className="side" aria-label="Add-in">
+        <Splitter width={paneWidth} resize={setPaneWidth} />
+        <iframe className="pane" title="Footing" ref={parts.pane} />
+      </aside>
     </div>
   );
 }
