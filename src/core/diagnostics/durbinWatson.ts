@@ -4,12 +4,12 @@ import { normalCdf } from "../numeric/distributions.ts";
 import { earlierRows } from "../numeric/earlierRows.ts";
 import { quadraticFormTail } from "../numeric/quadraticFormTail.ts";
 import { basisRows, columnsOf } from "../numeric/rowSource.ts";
-import { symmetricEigen } from "../numeric/smallMatrix.ts";
 import { differenceMoments, residualDifferences } from "../numeric/successiveDifferences.ts";
+import { symmetricEigenvalues } from "../numeric/symmetricEigenvalues.ts";
 import { type Figure, type TestOutcome, computed, notApplicable } from "./outcome.ts";
 import { noTime, timeLineOf } from "./timeLine.ts";
 
-/** Up to so many rows the p-value is exact; the eigenvalues of more take too long, and the normal law is then near. */
+/** Up to so many rows the p-value is exact; the work grows as the cube of the rows, and the normal law is then near. */
 const mostForExact = 200;
 
 /**
@@ -45,8 +45,7 @@ const sumOfSteps = (residuals: Float64Array, linked: Uint8Array): number =>
 /** P(d < statistic) = P(sum of (statistic - v_i) z_i^2 > 0), v_i the n - k eigenvalues of A among the residuals. */
 function exactFigure(fit: Fit, linked: Uint8Array, statistic: number): Figure {
   const columns = columnsOf(basisRows(basisOf(fit)));
-  const { values } = symmetricEigen(residualDifferences(columns, linked));
-  const descending = values.toReversed();
+  const descending = symmetricEigenvalues(residualDifferences(columns, linked)).toReversed();
   const weights = Float64Array.from({ length: fit.degreesOfFreedom }, (_, i) => statistic - (descending[i] ?? 0));
   return { statistic, law: "exact", df: [], pValue: Math.min(1, quadraticFormTail(weights)) };
 }

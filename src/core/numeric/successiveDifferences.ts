@@ -62,11 +62,23 @@ export function residualDifferences(columns: readonly Float64Array[], linked: Ui
   const size = rows.length;
   const values = new Float64Array(size * size);
   rows.forEach((row, i) => {
-    rows.slice(0, i + 1).forEach((other, j) => {
-      const between = row === other ? 2 : row === other + 1 ? -1 : 0;
-      const inBasis = columns.reduce((sum, q) => sum + (q[row]! - q[row - 1]!) * (q[other]! - q[other - 1]!), 0);
-      values[i * size + j] = values[j * size + i] = between - inBasis;
-    });
+    values[i * size + i] = 2;
+    if (rows[i + 1] === row + 1) values[i * size + i + 1] = -1;
   });
-  return { size, values };
+  for (const q of columns) {
+    subtractSquare(
+      values,
+      Float64Array.from(rows, (row) => q[row]! - q[row - 1]!),
+    );
+  }
+  return mirrored(values, size);
+}
+
+/** v v' off the upper half. */
+function subtractSquare(values: Float64Array, v: Float64Array): void {
+  const size = v.length;
+  for (let i = 0; i < size; i++) {
+    const factor = v[i]!;
+    for (let j = i; j < size; j++) values[i * size + j]! -= factor * v[j]!;
+  }
 }
