@@ -1,47 +1,68 @@
-import type { Analyst } from "../app/analyst.ts";
+import type { Analyst, Inquirer } from "../app/analyst.ts";
 import { fingerprint, textFingerprint } from "../app/fingerprint.ts";
 import type { Answer } from "../core/answer/answer.ts";
+import type { Finding, Inquiry } from "../core/answer/inquire.ts";
 import { modelOf } from "../core/answer/modelOf.ts";
 import type { Question } from "../core/answer/question.ts";
 import { type Result, success } from "../core/problem/result.ts";
 import { fitCache } from "./fitCache.ts";
-import { readData } from "./readData.ts";
+import type { FunctionId } from "./functionTable.ts";
+import { type Called, inquiries } from "./inquiries.ts";
+import { type CalledData, readData } from "./readData.ts";
 import { readSettingsArgument } from "./readSettings.ts";
 import type { Answering } from "./register.ts";
 import { type CallValues, plainReplies, replies } from "./replies.ts";
 
-/** More regressions than a workbook has on its busiest sheet; an answer takes some 100 kB. */
+/** More regressions than a workbook has on its busiest sheet; an answer takes some 100 kB, a finding up to 1.5 MB. */
 const mostAnswers = 100;
+const mostFindings = 40;
 
 /** Answers calls; all that ask about the same cells with the same settings share one analysis. */
-export function answerer(analyst: Analyst): Answering {
-  const share = fitCache<Answer>(mostAnswers);
+export function answerer(analyst: Analyst & Inquirer): Answering {
+  const shareAnswer = fitCache<Answer>(mostAnswers);
+  const shareFinding = fitCache<Finding>(mostFindings);
+  const look = ({ question, key, signal }: Asked, inquiry: Inquiry): Promise<Result<Finding>> =>
+    shareFinding(`${key} ${JSON.stringify(inquiry)}`, signal, (stop) =>
+      analyst.inquire(question, inquiry, quietly(stop)),
+    );
   return async (id, values, signal) => {
-    if (isOverData(id)) {
-      const question = questionOf(values);
-      if (!question.ok) return question;
-      const key = await keyOf(question.value);
-      const answer = await share(key, signal, (stop) =>
-        analyst.analyse(question.value, { signal: stop, progress: () => undefined }),
-      );
-      return answer.ok ? replies[id](answer.value, values) : answer;
-    }
     if (isPlain(id)) return plainReplies[id](values);
-    throw new Error(`There is no function ${id}.`);
+    const asked = questionOf(values);
+    if (!asked.ok) return asked;
+    const { data, question } = asked.value;
+    const key = await keyOf(question);
+    const answer = await shareAnswer(key, signal, (stop) => analyst.analyse(question, quietly(stop)));
+    if (!answer.ok) return answer;
+    if (!isInquiry(id)) return replies[id](answer.value, values);
+    const called: Called = { answer: answer.value, data, values };
+    const inquiry = inquiries[id].ask(called);
+    if (!inquiry.ok) return inquiry;
+    const finding = await look({ question, key, signal }, inquiry.value);
+    return finding.ok ? inquiries[id].show(finding.value, called) : finding;
   };
 }
 
-const isOverData = (id: string): id is keyof typeof replies => Object.hasOwn(replies, id);
-const isPlain = (id: string): id is keyof typeof plainReplies => Object.hasOwn(plainReplies, id);
+interface Asked {
+  readonly question: Question;
+  readonly key: string;
+  readonly signal: AbortSignal;
+}
 
-function questionOf(values: CallValues): Result<Question> {
+/** Nobody watches a cell's progress. */
+const quietly = (signal: AbortSignal) => ({ signal, progress: () => undefined });
+
+const isPlain = (id: FunctionId): id is keyof typeof plainReplies => Object.hasOwn(plainReplies, id);
+const isInquiry = (id: FunctionId): id is keyof typeof inquiries => Object.hasOwn(inquiries, id);
+
+function questionOf(values: CallValues): Result<{ readonly question: Question; readonly data: CalledData }> {
   const settings = readSettingsArgument(values["settings"]);
   if (!settings.ok) return settings;
   const data = readData(values);
   if (!data.ok) return data;
   const model = modelOf(settings.value, data.value.parts);
   if (!model.ok) return model;
-  return success({ source: data.value.source, model: model.value, options: settings.value.options });
+  const question = { source: data.value.source, model: model.value, options: settings.value.options };
+  return success({ question, data: data.value });
 }
 
 /** The content of the cells, where they stand in the arguments, and everything that was chosen. */

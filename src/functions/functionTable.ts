@@ -126,6 +126,67 @@ export const functionTable = [
     gives: "Two columns, low and high, in the order of ANSWER.",
   },
   {
+    id: "COVARIANCE",
+    description: "The covariance of the coefficients.",
+    parameters: overData(kind),
+    gives: "A square, rows and columns in the order of ANSWER.",
+  },
+  {
+    id: "JOINT",
+    description: "A test that linear combinations of the coefficients have given values, all at once.",
+    parameters: [
+      outcome,
+      drivers,
+      {
+        name: "weights",
+        description:
+          "A row for each combination, one weight a coefficient in the order of ANSWER; the constant's may be left out.",
+        shape: "cells",
+        optional: false,
+      },
+      {
+        name: "equals",
+        description: "The value of each combination, or one for all; 0 when left out.",
+        shape: "cells",
+        optional: true,
+      },
+      kind,
+      settings,
+      key,
+    ],
+    gives: "Statistic, degrees of freedom and p-value, side by side.",
+  },
+  {
+    id: "PREDICT",
+    description: "What the regression expects of new rows, with the interval of the mean.",
+    parameters: [
+      outcome,
+      drivers,
+      {
+        name: "rows",
+        description: "New rows, one column a driver in the same order, with or without headings.",
+        shape: "cells",
+        optional: false,
+      },
+      kind,
+      settings,
+      key,
+    ],
+    gives: "Value, low and high for each row, blank where a driver is missing.",
+  },
+  {
+    id: "RESIDUALS",
+    description: "How far each row lies from what the regression expects of it.",
+    parameters: overData(),
+    gives: "One column beside the data, as tall as they are, blank where a row was left out.",
+  },
+  {
+    id: "FITTED",
+    description: "What the regression expects of each row.",
+    parameters: overData(),
+    gives: "One column beside the data, as tall as they are, blank where a row was left out.",
+  },
+  {
     id: "LAGS",
     description: "The number of lags that a rule gives for a number of rows.",
     parameters: [

@@ -8,8 +8,11 @@ import { type RawCells, isMissing, plainValue } from "./rawCells.ts";
 export function hasHeadings(outcome: RawCells, drivers: RawCells): boolean {
   const above = outcome[0]?.[0];
   if (!isMissing(above)) return isWord(above);
-  return (drivers[0] ?? []).every(isWord);
+  return isHeadings(drivers);
 }
+
+/** Whether a range begins with a row of words. */
+export const isHeadings = ([first = []]: RawCells): boolean => first.every(isWord);
 
 /**
  * Whether a range begins with numbers where the outcome has its heading: it was chosen without its headings, and its

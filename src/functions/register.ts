@@ -1,19 +1,19 @@
-import type { Analyst } from "../app/analyst.ts";
+import type { Analyst, Inquirer } from "../app/analyst.ts";
 import { withinLimits } from "../app/timeLimit.ts";
 import { answerer } from "./answerer.ts";
 import { type FunctionsRuntime, cellError, notAvailable, ownFault } from "./cellErrors.ts";
-import { type FunctionSpec, functionTable } from "./functionTable.ts";
+import { type FunctionId, type FunctionSpec, functionTable } from "./functionTable.ts";
 import { type Leaving, leave } from "./leave.ts";
 import type { CallValues, Reply } from "./replies.ts";
 
 /** How one call is computed: what to show for the function, from the values given, until the signal is raised. */
-export type Answering = (id: string, values: CallValues, signal: AbortSignal) => Promise<Reply>;
+export type Answering = (id: FunctionId, values: CallValues, signal: AbortSignal) => Promise<Reply>;
 
 /** A call that has no answer by then ends with an error: a promise that never settles shows #BUSY! for ever. */
 const secondsPerCall = 120;
 
 /** Gives Excel an implementation for every function of the table. */
-export function registerFunctions(runtime: FunctionsRuntime, analyst: Analyst): void {
+export function registerFunctions(runtime: FunctionsRuntime, analyst: Analyst & Inquirer): void {
   const answering = answerer(analyst);
   for (const spec of functionTable) runtime.associate(spec.id, implementation(spec, { runtime, answering }));
 }
@@ -24,7 +24,10 @@ interface Making {
 }
 
 /** Excel hands over one value a parameter and, last, the invocation. */
-function implementation({ id, parameters }: FunctionSpec, { runtime, answering }: Making) {
+function implementation(
+  { id, parameters }: FunctionSpec & { readonly id: FunctionId },
+  { runtime, answering }: Making,
+) {
   return async (...handed: unknown[]): Promise<Leaving> => {
     const invocation = handed.at(-1) as CustomFunctions.CancelableInvocation;
     const given = handed.slice(0, -1);

@@ -7,7 +7,7 @@ import type { TestOutcome } from "../core/diagnostics/outcome.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";
 import { nearestName } from "../core/problem/nearestName.ts";
 import type { FunctionId } from "./functionTable.ts";
-import { inferenceOfKind, pValuesAgainst } from "./kinds.ts";
+import { kindOfErrors, pValuesAgainst } from "./kinds.ts";
 import { isMissing } from "./rawCells.ts";
 import { written } from "./readSettings.ts";
 
@@ -26,18 +26,20 @@ export const replies = {
   EVIDENCE: (answer, { test }) => (isMissing(test) ? success(evidenceTable(answer)) : oneTest(answer, written(test))),
   COEFFICIENTS: (answer) => success(column(answer.coefficients)),
   ERRORS: (answer, { kind }) => {
-    const table = inferenceOfKind(answer, kind);
-    return table.ok ? success(column(table.value.standardErrors)) : table;
+    const found = kindOfErrors(answer, kind);
+    return found.ok ? success(column(found.value.table.standardErrors)) : found;
   },
   PVALUES: (answer, { kind, against }) => {
-    const table = inferenceOfKind(answer, kind);
-    if (!table.ok) return table;
-    const pValues = pValuesAgainst(answer, table.value, against);
+    const found = kindOfErrors(answer, kind);
+    if (!found.ok) return found;
+    const pValues = pValuesAgainst(answer, found.value.table, against);
     return pValues.ok ? success(column(pValues.value)) : pValues;
   },
   INTERVALS: (answer, { kind }) => {
-    const table = inferenceOfKind(answer, kind);
-    return table.ok ? success(table.value.low.map((low, row) => [low, table.value.high[row] ?? ""])) : table;
+    const found = kindOfErrors(answer, kind);
+    if (!found.ok) return found;
+    const { low, high } = found.value.table;
+    return success(low.map((from, row) => [from, high[row]!]));
   },
 } satisfies Partial<Record<FunctionId, (answer: Answer, values: CallValues) => Reply>>;
 
@@ -48,8 +50,8 @@ export const plainReplies = {
       ["setting", "values", "when left out", "meaning"],
       ...settingTable.map(({ name, values, standard, meaning }) => [name, values, standard, meaning]),
     ]),
-  LAGS: ({ rows, rule }) => lags(rows, isMissing(rule) ? "careful" : written(rule)),
-} satisfies Record<Exclude<FunctionId, keyof typeof replies>, (values: CallValues) => Reply>;
+  LAGS: ({ rows, rule }: CallValues) => lags(rows, isMissing(rule) ? "careful" : written(rule)),
+} satisfies Partial<Record<FunctionId, (values: CallValues) => Reply>>;
 
 const column = (values: readonly (string | number)[]): Grid => values.map((value) => [value]);
 

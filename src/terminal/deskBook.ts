@@ -1,4 +1,4 @@
-import type { Analyst } from "../app/analyst.ts";
+import type { Analyst, Inquirer } from "../app/analyst.ts";
 import type { BookData } from "../desk/book/bookData.ts";
 import { openDesk } from "../desk/client/openDesk.ts";
 import { functionsMetadata } from "../functions/metadata.ts";
@@ -8,7 +8,7 @@ import type { OpenBook } from "./answerCommand.ts";
 
 /** Opens a workbook in the desk without a screen, the add-in's functions in it, so that a live sheet has values when saved. */
 export const deskBook =
-  (analyst: Analyst) =>
+  (analyst: Analyst & Inquirer) =>
   async (book: BookData): Promise<OpenBook> => {
     const desk = await openDesk({ book, functions: functionsMetadata() });
     const { Excel: excel, Office: office, CustomFunctions: functions } = desk;

@@ -117,6 +117,8 @@ describe("any cells at all", () => {
           drivers: table.map((row) => row.slice(1)),
           key: key ? table.map((_, index) => [index]) : null,
           settings: chosen,
+          rows: table.slice(0, 4).map((row) => row.slice(1)),
+          weights: [(table[0] ?? []).slice(1).map((_, index) => index + 1)],
         };
         const values = spec.parameters.map(({ name }, index) => (name in data ? data[name] : options[index % 3]));
         const reply = await call(runtime, spec.id, ...values);

@@ -31,6 +31,7 @@ function deskWith(analyse: Analyst["analyse"]): Desk {
       asked.push(question);
       return analyse(question, errand);
     },
+    inquire: () => Promise.reject(new Error("not asked for")),
   });
   return { ...runtime, asked };
 }

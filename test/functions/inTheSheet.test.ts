@@ -23,6 +23,7 @@ async function open(cells: readonly (readonly BookCell[])[] = rows, blank: Blank
   const asked: Question[] = [];
   const opened = await openDeskHost(bookOf(sheetOf("Data", cells), sheetOf("Work", [])), { blank });
   registerFunctions(opened.desk.CustomFunctions, {
+    ...inlineAnalyst,
     analyse: (question, errand) => {
       asked.push(question);
       return inlineAnalyst.analyse(question, errand);
@@ -188,6 +189,59 @@ describe("functions typed into a sheet", () => {
     await type("=FOOTING.ANSWER(Data!A1:A41,Data!B1:C41)");
     expect(sheet.error("Work!A1")).toBe("#VALUE!");
     expect(sheet.message("Work!A1")).toContain("ow 10 of drivers, column 1");
+  });
+
+  it("RESIDUALS and FITTED stand beside the data, row by row", async () => {
+    const gaps = rows.map((row, index) => (index === 7 ? [row[0]!, null, row[2]!] : row));
+    const { desk: sheet, asked, type } = await open(gaps);
+    await type("=FOOTING.RESIDUALS(Data!A1:A41,Data!B1:C41)", "Data!E1");
+    await type("=FOOTING.FITTED(Data!A1:A41,Data!B1:C41)", "Data!F1");
+    expect(sheet.values("Data!E1:F1")).toEqual([["residuals", "fitted"]]);
+    expect(sheet.values("Data!E8:F8")).toEqual([["", ""]]);
+    const [constant = 0, price = 0, rain = 0] = expected(data.toSpliced(6, 1));
+    for (const [index, cells] of sheet.values("Data!A2:F41").entries()) {
+      if (index === 6) continue;
+      const [y, x1, x2] = data[index]!;
+      near(cells.slice(4), [y - (constant + price * x1 + rain * x2), constant + price * x1 + rain * x2]);
+    }
+    expect(asked).toHaveLength(1);
+  });
+
+  it("COVARIANCE, JOINT and PREDICT agree with the answer", async () => {
+    const { desk: sheet, type } = await open();
+    await type("=FOOTING.ANSWER(Data!A1:A41,Data!B1:C41)");
+    await type('=FOOTING.COVARIANCE(Data!A1:A41,Data!B1:C41,"white")', "Work!M1");
+    const [, ...table] = sheet.values("Work!A1:J4").map((row) => row.map(Number));
+    const covariance = sheet.values("Work!M1:O3").map((row) => row.map(Number));
+    near(
+      covariance.map((row, index) => Math.sqrt(row[index]!)),
+      table.map((row) => row[3]!),
+    );
+    sheet.edit("Data!H1", 1);
+    sheet.edit("Data!I1", 0);
+    await type('=FOOTING.JOINT(Data!A1:A41,Data!B1:C41,Data!H1:I1,-1.5,"classical")', "Work!A10");
+    const ratio = (table[1]![1]! + 1.5) / table[1]![2]!;
+    near(sheet.values("Work!A10:A10")[0]!, [ratio ** 2]);
+    expect(sheet.value("Work!B10")).toBe("1, 37");
+    sheet.edit("Data!H5", 12);
+    sheet.edit("Data!I5", 4);
+    await type("=FOOTING.PREDICT(Data!A1:A41,Data!B1:C41,Data!H5:I6)", "Work!A20");
+    near(sheet.values("Work!A20:A20")[0]!, [table[0]![1]! + 12 * table[1]![1]! + 4 * table[2]![1]!]);
+    const [value, low, high] = sheet.values("Work!A20:C20")[0]!.map(Number);
+    expect(low).toBeLessThan(value!);
+    expect(value! - low!).toBeCloseTo(high! - value!, 9);
+    expect(sheet.values("Work!A21:C21")).toEqual([["", "", ""]]);
+  });
+
+  it("JOINT and PREDICT say what their own arguments lack", async () => {
+    const { desk: sheet, type } = await open();
+    await type("=FOOTING.JOINT(Data!A1:A41,Data!B1:C41,Data!B2:B3)");
+    expect(sheet.error("Work!A1")).toBe("#VALUE!");
+    expect(sheet.message("Work!A1")).toContain("3 columns");
+    await type("=FOOTING.PREDICT(Data!A1:A41,Data!B1:C41,Data!B2:B3)");
+    expect(sheet.message("Work!A1")).toContain("Price, Rain");
+    await type('=FOOTING.COVARIANCE(Data!A1:A41,Data!B1:C41,"newey-west")');
+    expect(sheet.error("Work!A1")).toBe("#N/A");
   });
 
   it("SETTINGS spills the manual", async () => {
