@@ -53,6 +53,7 @@ describe("from cells to a result sheet", { timeout: 180_000 }, () => {
     await pane.getByText("Written to the sheet").waitFor({ state: "attached" });
     const before = await numbersOn(page);
     expect(Object.keys(before).length).toBeGreaterThan(50);
+    await page.getByRole("img", { name: "Chart: Residuals over fitted values" }).waitFor({ state: "attached" });
 
     await atSheet(page, (d) => d.edit("Months!B50", 700));
     const after = await numbersOn(page);
