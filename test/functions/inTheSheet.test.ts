@@ -5,7 +5,8 @@ import type { BlankArrival } from "../../src/desk/workbook/metadata.ts";
 import { registerFunctions } from "../../src/functions/register.ts";
 import { inlineAnalyst } from "../../src/worker/inlineAnalyst.ts";
 import type { Question } from "../../src/core/answer/question.ts";
-import { bookOf, openDeskHost, sheetOf } from "../support/deskHost.ts";
+import { bookOf, sheetOf } from "../support/deskBook.ts";
+import { openDeskHost } from "../support/deskHost.ts";
 
 /** Forty rows: repairs = 50 - 2 price + 0.5 rain and an error of no pattern that sums to nothing in particular. */
 const errors = [3, -2, 5, -4, 1, -3, 2, 4, -5, -1, 2, 3, -4, 1, -2, 5, -3, 0.5, -1.5, 2.5];

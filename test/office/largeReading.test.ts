@@ -1,6 +1,7 @@
 import { describe, expect, it } from "vitest";
 import type { BookCell } from "../../src/desk/book/bookData.ts";
-import { bookOf, errand, openDeskHost, sheetOf } from "../support/deskHost.ts";
+import { bookOf, sheetOf } from "../support/deskBook.ts";
+import { errand, openDeskHost } from "../support/deskHost.ts";
 
 describe("reading more than Excel gives at once", () => {
   it("takes chunks, says how far it came, and can be stopped between them", async () => {

@@ -1,5 +1,6 @@
 import { afterEach, beforeEach, describe, expect, it, vi } from "vitest";
-import { type DeskHost, bookOf, openDeskHost, sheetOf } from "../support/deskHost.ts";
+import { bookOf, sheetOf } from "../support/deskBook.ts";
+import { type DeskHost, openDeskHost } from "../support/deskHost.ts";
 
 const rows = Array.from({ length: 12 }, (_, row) => [row === 0 ? "x" : row, row === 0 ? "y" : row * 3]);
 

@@ -12,7 +12,8 @@ import type { NodeDesk } from "../../src/desk/client/openDesk.ts";
 import { registerFunctions } from "../../src/functions/register.ts";
 import { type SheetKind, planAnswer } from "../../src/sheet/answerSheet.ts";
 import { inlineAnalyst } from "../../src/worker/inlineAnalyst.ts";
-import { type DeskHost, bookOf, errand, openDeskHost, sheetOf } from "../support/deskHost.ts";
+import { bookOf, sheetOf } from "../support/deskBook.ts";
+import { type DeskHost, errand, openDeskHost } from "../support/deskHost.ts";
 
 const value = <T>(result: Result<T>): T => {
   if (!result.ok) throw new Error(JSON.stringify(result.problem));

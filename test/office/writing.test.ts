@@ -1,7 +1,8 @@
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import type { SheetData } from "../../src/desk/book/bookData.ts";
 import type { PlanCell, SheetPlan } from "../../src/sheet/plan.ts";
-import { type DeskHost, bookOf, errand, openDeskHost, sheetOf } from "../support/deskHost.ts";
+import { bookOf, sheetOf } from "../support/deskBook.ts";
+import { type DeskHost, errand, openDeskHost } from "../support/deskHost.ts";
 
 const text = (value: string): PlanCell => ({ kind: "text", text: value });
 const number = (value: number): PlanCell => ({ kind: "number", number: value });

@@ -1,5 +1,5 @@
 import type { Host } from "../../src/app/host.ts";
-import type { BookData, SheetData } from "../../src/desk/book/bookData.ts";
+import type { BookData } from "../../src/desk/book/bookData.ts";
 import { type NodeDesk, openDesk } from "../../src/desk/client/openDesk.ts";
 import { functionsMetadata } from "../../src/functions/metadata.ts";
 import { excelHost } from "../../src/office/excelHost.ts";
@@ -23,25 +23,6 @@ export async function openDeskHost(
   });
   return { desk, host };
 }
-
-export const sheetOf = (name: string, rows: SheetData["rows"], more: Partial<SheetData> = {}): SheetData => ({
-  name,
-  rows,
-  columnWidths: [],
-  merges: [],
-  frozenRows: 0,
-  hidden: false,
-  hiddenRows: [],
-  protected: false,
-  tables: [],
-  charts: [],
-  printArea: null,
-  onePageWide: false,
-  links: [],
-  ...more,
-});
-
-export const bookOf = (...sheets: SheetData[]): BookData => ({ sheets, names: [], active: 0 });
 
 export const errand = (
   signal = new AbortController().signal,
