@@ -40,13 +40,14 @@ export function openingSentence({ outcome, observations, terms, fit, rows }: Fac
 }
 
 function rowsInWords(rows: RowsSummary, observations: number): string {
+  const count = numberInWords(observations, 0);
   switch (rows.kind) {
     case "cases":
-      return `${observations} separate cases`;
+      return `${count} separate cases`;
     case "time":
-      return `${observations} ${rows.period.unit}s from ${rows.first} to ${rows.last}`;
+      return `${count} ${rows.period.unit}s from ${rows.first} to ${rows.last}`;
     case "groups":
-      return `${observations} rows in ${rows.groups} groups by ${rows.by}`;
+      return `${count} rows in ${numberInWords(rows.groups, 0)} groups by ${rows.by}`;
   }
 }
 
