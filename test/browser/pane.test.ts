@@ -131,6 +131,7 @@ describe("the answer", () => {
     await rain.getByRole("button", { name: /Figures/ }).click();
     const table = page.getByRole("table", { name: "Figures of Rainy days" });
     expect(await table.getByRole("row").count()).toBe(8);
+    await rain.getByText(/Over all \d+ choices of standard errors and law, p/).waitFor();
     expect(await table.getByRole("columnheader").allInnerTexts()).toEqual(["classical", "White", "Newey-West ●"]);
   });
 
@@ -192,6 +193,19 @@ describe("evidence", () => {
     await page.getByText(/Breusch and Pagan 1979, in the form of Koenker 1981\. It decided/).waitFor();
     const orders = page.getByRole("table", { name: "Breusch-Godfrey test by order" });
     expect(await orders.getByRole("rowheader").allInnerTexts()).toContain("12");
+    expect(await orders.getByRole("columnheader").count()).toBe(5);
+    const correlations = page.getByRole("table", { name: "Ljung-Box test by order" });
+    expect(await correlations.getByRole("columnheader").allInnerTexts()).toEqual(["order", "statistic", "p-value"]);
+  });
+
+  it("guards against what the tests do not ask, and jumps to the rows that weigh most", async () => {
+    await getAnswer(page);
+    await openTab(page, "Evidence");
+    await heading(page, /^Drivers that move together (nothing found|worth knowing|look into it)$/).waitFor();
+    const weighty = page.getByRole("listitem").filter({ hasText: /Cook's distance/ });
+    expect(await weighty.count()).toBe(5);
+    await weighty.first().getByRole("button").click();
+    expect(await page.evaluate(() => window.stage.host.gone[0])).toMatch(/^Months!B\d+$/);
   });
 
   it("describes its pictures and jumps to the rows that fit worst", async () => {

@@ -106,7 +106,7 @@ describe("figures of a driver", () => {
   });
 
   it("show p-values without their name", () => {
-    expect([pFigure(0.0341, 0.05), pFigure(0.00001, 0.05)]).toEqual(["0.034", "< 0.0001"]);
+    expect([pFigure(0.0341, 0.05), pFigure(0.00001, 0.05)]).toEqual(["0.034", "<\u00a00.0001"]);
   });
 });
 

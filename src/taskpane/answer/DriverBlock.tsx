@@ -6,6 +6,7 @@ import { useType } from "../look/type.ts";
 import { Disclosure } from "../parts/Disclosure.tsx";
 import { IntervalPicture } from "../pictures/IntervalPicture.tsx";
 import { DriverTable } from "./DriverTable.tsx";
+import { WhatWouldChange } from "./WhatWouldChange.tsx";
 import { FirmnessMark } from "./FirmnessMark.tsx";
 import { intervalsInWords, kindFigures, pInWords, writerFor } from "./driverFigures.ts";
 
@@ -65,6 +66,7 @@ export function DriverBlock({ answer, index }: { readonly answer: Answer; readon
         }
       >
         <DriverTable answer={answer} index={index} />
+        <WhatWouldChange answer={answer} index={index} />
       </Disclosure>
     </article>
   );

@@ -1,25 +1,38 @@
 import type { ReactNode } from "react";
-import { OutdatedNotice } from "../answer/OutdatedNotice.tsx";
 import { NoAnswer } from "../answer/NoAnswer.tsx";
+import { OutdatedNotice } from "../answer/OutdatedNotice.tsx";
 import { useType } from "../look/type.ts";
 import { SectionTitle } from "../parts/SectionTitle.tsx";
 import { usePane } from "../paneContext.ts";
+import { GuardList } from "./GuardList.tsx";
 import { Residuals } from "./Residuals.tsx";
 import { TestList } from "./TestList.tsx";
+import { groupTests } from "./testGroups.ts";
 
-/** What the answer rests on: every test with its reading, and the residuals to look at. */
+/** What the answer rests on: the tests that decided, what to know beside them, the residuals, every other test. */
 export function EvidenceSection(): ReactNode {
   const type = useType();
   const { answered } = usePane().state;
   if (answered === null) return <NoAnswer section="Evidence" />;
-  const { answer } = answered;
+  const { answer, address } = answered;
+  const groups = groupTests(answer);
+  const [deciding, further] = [groups.filter(({ decided }) => decided), groups.filter(({ decided }) => !decided)];
   return (
     <>
       <SectionTitle>Evidence on {answer.outcome}</SectionTitle>
       <OutdatedNotice />
-      <TestList answer={answer} />
+      {deciding.length > 0 && (
+        <>
+          <h2 className={type.head}>Tests that decided</h2>
+          <TestList groups={deciding} answer={answer} />
+        </>
+      )}
+      <h2 className={type.head}>Guards</h2>
+      <GuardList guards={answer.guards} />
       <h2 className={type.head}>Residuals</h2>
-      <Residuals answer={answer} address={answered.address} />
+      <Residuals answer={answer} address={address} />
+      <h2 className={type.head}>{deciding.length > 0 ? "Further tests" : "Tests"}</h2>
+      <TestList groups={further} answer={answer} />
     </>
   );
 }

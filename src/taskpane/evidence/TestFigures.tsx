@@ -56,14 +56,18 @@ const statistic = new Intl.NumberFormat("en-US", { maximumSignificantDigits: 4 }
 
 /** "8.412 against chi-square(3), p = 0.038". */
 const figureInWords = (figure: Figure, answer: Answer): string =>
-  `${statistic.format(figure.statistic)} against ${lawInWords(figure)}, ${pInWords(figure, answer)}`;
+  `${statistic.format(figure.statistic)} against ${lawPhrase(figure)}, ${pInWords(figure, answer)}`;
+
+const lawPhrase = (figure: Figure): string =>
+  figure.law === "exact" || figure.law === "limit" ? `its ${figure.law} distribution` : lawInWords(figure);
 
 const pInWords = ({ pValue }: Figure, { decision }: Answer): string => pValueInWords(pValue, decision.testLevel);
 
 /** One line an order; the one that decided in bold. */
 function OrderTable({ group, answer }: TestFiguresProps): ReactNode {
   const styles = useStyles();
-  const heads = ["statistic", "p-value", "F form", "p-value"];
+  const hasF = group.outcomes.some((outcome) => outcome.kind === "computed" && outcome.fForm !== null);
+  const heads = ["statistic", "p-value", ...(hasF ? ["F form", "p-value"] : [])];
   return (
     <table
       className={mergeClasses(styles.figures, styles.table)}
@@ -87,7 +91,7 @@ function OrderTable({ group, answer }: TestFiguresProps): ReactNode {
             <th scope="row" className={mergeClasses(styles.cell, styles.side)}>
               {outcome.order}
             </th>
-            <Figures outcome={outcome} answer={answer} />
+            <Figures outcome={outcome} answer={answer} columns={heads.length} />
           </tr>
         ))}
       </tbody>
@@ -95,11 +99,17 @@ function OrderTable({ group, answer }: TestFiguresProps): ReactNode {
   );
 }
 
-function Figures({ outcome, answer }: { readonly outcome: TestOutcome; readonly answer: Answer }): ReactNode {
+interface FiguresProps {
+  readonly outcome: TestOutcome;
+  readonly answer: Answer;
+  readonly columns: number;
+}
+
+function Figures({ outcome, answer, columns }: FiguresProps): ReactNode {
   const styles = useStyles();
   if (outcome.kind !== "computed") {
     return (
-      <td colSpan={4} className={styles.wide}>
+      <td colSpan={columns} className={styles.wide}>
         {outcome.because}
       </td>
     );
@@ -108,7 +118,7 @@ function Figures({ outcome, answer }: { readonly outcome: TestOutcome; readonly 
   const { figure, fForm } = outcome;
   const cells = [statistic.format(figure.statistic), bare(figure)];
   const fCells = fForm === null ? ["", ""] : [statistic.format(fForm.statistic), bare(fForm)];
-  return [...cells, ...fCells].map((words, index) => (
+  return [...cells, ...fCells].slice(0, columns).map((words, index) => (
     <td key={index} className={styles.cell}>
       {words}
     </td>

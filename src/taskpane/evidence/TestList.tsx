@@ -5,7 +5,7 @@ import type { TestOutcome } from "../../core/diagnostics/outcome.ts";
 import { testWords } from "../../core/diagnostics/words.ts";
 import { useType } from "../look/type.ts";
 import { TestFigures } from "./TestFigures.tsx";
-import { type TestGroup, groupTests, readingOfGroup } from "./testGroups.ts";
+import { type TestGroup, readingOfGroup } from "./testGroups.ts";
 
 const useStyles = makeStyles({
   list: { margin: 0, padding: 0, listStyleType: "none" },
@@ -22,12 +22,17 @@ const useStyles = makeStyles({
   reading: { margin: `0 0 ${tokens.spacingVerticalXS}`, fontSize: tokens.fontSizeBase300, lineHeight: "19px" },
 });
 
-/** Every test: its question, what it means here, its figures, where it comes from. Those that decided come first. */
-export function TestList({ answer }: { readonly answer: Answer }): ReactNode {
+interface TestListProps {
+  readonly groups: readonly TestGroup[];
+  readonly answer: Answer;
+}
+
+/** Tests, each with its question, what it means here, its figures, where it comes from. */
+export function TestList({ groups, answer }: TestListProps): ReactNode {
   const styles = useStyles();
   return (
     <ul className={styles.list}>
-      {groupTests(answer).map((group) => (
+      {groups.map((group) => (
         <li key={group.test} className={styles.test}>
           <Test group={group} answer={answer} />
         </li>
@@ -42,7 +47,7 @@ function Test({ group, answer }: { readonly group: TestGroup; readonly answer: A
   const { title, question, source } = testWords[group.test];
   return (
     <>
-      <h2 className={styles.question}>{question}</h2>
+      <h3 className={styles.question}>{question}</h3>
       <p className={styles.reading}>{readingOfGroup(group, answer)}</p>
       <TestFigures group={group} answer={answer} />
       <p className={type.remark}>

@@ -11,10 +11,10 @@ export interface TestGroup {
   readonly decided: boolean;
 }
 
-/** Tests by name, orders together; those that decided first, otherwise in the order of the answer. */
+/** Tests by name, orders together, in the order of the answer. */
 export function groupTests({ tests, decision }: Answer): readonly TestGroup[] {
   const names = [...new Set(tests.map(({ test }) => test))];
-  const groups = names.map((test): TestGroup => {
+  return names.map((test): TestGroup => {
     const outcomes = tests
       .filter((outcome) => outcome.test === test)
       .toSorted((a, b) => (a.order ?? 0) - (b.order ?? 0));
@@ -23,7 +23,6 @@ export function groupTests({ tests, decision }: Answer): readonly TestGroup[] {
     );
     return { test, outcomes, main: deciding ?? outcomes[0]!, decided: deciding !== undefined };
   });
-  return [...groups.filter(({ decided }) => decided), ...groups.filter(({ decided }) => !decided)];
 }
 
 /** What the test means here, in the words of its main outcome. */
