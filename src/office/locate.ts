@@ -1,7 +1,7 @@
 import type { DataPlace, WhereToRead } from "../app/host.ts";
 import { nearestName } from "../core/problem/nearestName.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";
-import { type SheetArea, addressOf, parseAddress } from "../core/table/address.ts";
+import { type SheetArea, addressOf, mostColumns, mostRows, parseAddress } from "../core/table/address.ts";
 import { type Rectangle, intersection, rectangleOf, sameArea, whereabouts } from "./areas.ts";
 import { listPlaces } from "./places.ts";
 import { selectedRange } from "./selection.ts";
@@ -71,7 +71,10 @@ async function locatePlace(context: Excel.RequestContext, place: DataPlace): Pro
   return settle(context, area);
 }
 
-/** One selected cell stands for the data around it: its table, or the cells that adjoin it. */
+/**
+ * One selected cell stands for the data around it: its table, or the cells that adjoin it. Where those are one column,
+ * as with a title or a note, nothing could be explained by anything: the cells in use on the sheet are meant.
+ */
 async function widened(range: Excel.Range): Promise<SheetArea> {
   const selected = { ...rectangleOf(range), sheet: range.worksheet.name };
   if (selected.rows * selected.columns > 1) return selected;
@@ -79,8 +82,11 @@ async function widened(range: Excel.Range): Promise<SheetArea> {
   if (table !== undefined) return { ...table.data, sheet: selected.sheet };
   const region = range.getSurroundingRegion().load(whereabouts);
   await range.context.sync();
-  return { ...rectangleOf(region), sheet: selected.sheet };
+  const adjoining = rectangleOf(region);
+  return { ...(adjoining.columns > 1 ? adjoining : wholeSheet), sheet: selected.sheet };
 }
+
+const wholeSheet: Rectangle = { row: 0, column: 0, rows: mostRows, columns: mostColumns };
 
 async function settle(context: Excel.RequestContext, area: SheetArea): Promise<Result<Located>> {
   const sheet = context.workbook.worksheets.getItem(area.sheet);

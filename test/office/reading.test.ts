@@ -92,11 +92,14 @@ describe("reading a workbook", () => {
     });
   });
 
+  it("takes a title for its sheet: one column has nothing to explain it by", async () => {
+    at.desk.select("Months!A1");
+    expect((await readOk({ kind: "selection" })).address).toBe("Months!A1:D9");
+  });
+
   it("widens one selected cell to the data around it, and no further", async () => {
     at.desk.select("Months!B5");
     expect((await readOk({ kind: "selection" })).address).toBe("Months!A3:D9");
-    at.desk.select("Months!A1");
-    expect((await readOk({ kind: "selection" })).address).toBe("Months!A1");
     at.desk.select("Months!B4:C6");
     expect((await readOk({ kind: "selection" })).address).toBe("Months!B4:C6");
   });
