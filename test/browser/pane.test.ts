@@ -266,7 +266,24 @@ describe("work and faults", () => {
     await button(page, "Use selection").click();
     await page.getByText("Footing made a mistake.").waitFor();
     expect(await page.getByLabel("Details of the fault").inputValue()).toContain("something broke");
+    await button(page, "Copy the details").click();
+    await page.getByText(/^(Copied\.|The details are selected)/).waitFor();
+    const selected = (): string =>
+      document.querySelector("textarea")?.value.slice(0, document.querySelector("textarea")?.selectionEnd) ?? "";
+    expect(await page.evaluate(selected)).toContain("something broke");
     await button(page, "Dismiss").click();
     await page.getByText("Footing made a mistake.").waitFor({ state: "detached" });
+  });
+
+  it("owns up when it cannot even be drawn", async () => {
+    await page.evaluate(() => {
+      const broken = { kind: "places found", places: null } as unknown as Parameters<
+        typeof window.stage.pane.store.dispatch
+      >[0];
+      window.stage.pane.store.dispatch(broken);
+    });
+    await page.getByText("Footing made a mistake.").waitFor();
+    expect(await page.getByLabel("Details of the fault").inputValue()).toContain("TypeError");
+    expect(faults.splice(0)).not.toEqual([]);
   });
 });

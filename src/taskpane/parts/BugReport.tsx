@@ -1,5 +1,5 @@
 import { Button, MessageBar, MessageBarBody, MessageBarTitle, makeStyles, tokens } from "@fluentui/react-components";
-import { type ReactNode, useRef } from "react";
+import { type ReactNode, useRef, useState } from "react";
 import { copyFrom } from "./copyText.ts";
 
 const useStyles = makeStyles({
@@ -31,12 +31,17 @@ export function BugReport({
 }): ReactNode {
   const styles = useStyles();
   const field = useRef<HTMLTextAreaElement>(null);
+  const [copied, setCopied] = useState("");
+  const copy = async (): Promise<void> => {
+    const done = await copyFrom(field.current);
+    setCopied(done ? "Copied." : "The details are selected: copy them with the keys.");
+  };
   return (
     <MessageBar intent="error" layout="multiline">
       <MessageBarBody className={styles.body}>
         <div>
-          <MessageBarTitle>Footing made a mistake.</MessageBarTitle> Your workbook is as it was. Please try again; if it
-          happens again, these details help to mend it.
+          <MessageBarTitle>Footing made a mistake.</MessageBarTitle> Please try again; if it happens again, these
+          details help to mend it.
         </div>
         <textarea
           ref={field}
@@ -48,7 +53,7 @@ export function BugReport({
           onFocus={({ currentTarget }) => currentTarget.select()}
         />
         <div>
-          <Button size="small" onClick={() => void copyFrom(field.current)}>
+          <Button size="small" onClick={() => void copy()}>
             Copy the details
           </Button>{" "}
           {onDismiss !== undefined && (
@@ -57,6 +62,7 @@ export function BugReport({
             </Button>
           )}
         </div>
+        <span role="status">{copied}</span>
       </MessageBarBody>
     </MessageBar>
   );

@@ -4,7 +4,6 @@ import { type ReactNode, useId, useState } from "react";
 export interface DisclosureProps {
   readonly label: ReactNode;
   readonly children: ReactNode;
-  readonly openAtFirst?: boolean;
 }
 
 const useStyles = makeStyles({
@@ -37,9 +36,9 @@ const useStyles = makeStyles({
 });
 
 /** Something more that opens under its own words. */
-export function Disclosure({ label, children, openAtFirst = false }: DisclosureProps): ReactNode {
+export function Disclosure({ label, children }: DisclosureProps): ReactNode {
   const styles = useStyles();
-  const [open, setOpen] = useState(openAtFirst);
+  const [open, setOpen] = useState(false);
   const id = useId();
   return (
     <div>
