@@ -10,6 +10,8 @@ export interface Threads {
   readonly hire: () => WorkerLine;
   readonly sent: ToWorker["kind"][];
   readonly hired: () => number;
+  /** Threads that have come to their end. */
+  readonly ended: () => number;
   readonly close: () => Promise<void>;
 }
 
@@ -19,16 +21,18 @@ export async function threadsOf(entry: string): Promise<Threads> {
   await build({ entryPoints: [entry], bundle: true, platform: "node", format: "esm", outfile: file });
   const workers: Worker[] = [];
   const sent: ToWorker["kind"][] = [];
+  let ended = 0;
   const hire = (): WorkerLine => {
     const worker = new Worker(file);
     workers.push(worker);
+    worker.on("exit", () => ended++);
     return lineTo(worker, sent);
   };
   const close = async (): Promise<void> => {
     await Promise.all(workers.map((worker) => worker.terminate()));
     rmSync(folder, { recursive: true });
   };
-  return { hire, sent, hired: () => workers.length, close };
+  return { hire, sent, hired: () => workers.length, ended: () => ended, close };
 }
 
 function lineTo(worker: Worker, sent: ToWorker["kind"][]): WorkerLine {

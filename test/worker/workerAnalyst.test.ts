@@ -1,4 +1,4 @@
-import { afterAll, beforeAll, describe, expect, it } from "vitest";
+import { afterAll, beforeAll, describe, expect, it, vi } from "vitest";
 import type { Answer } from "../../src/core/answer/answer.ts";
 import { defaultOptions } from "../../src/core/answer/options.ts";
 import type { Question } from "../../src/core/answer/question.ts";
@@ -84,6 +84,7 @@ describe("the analysis in a worker", () => {
     const { analyse } = analyst();
     const controller = new AbortController();
     const before = threads.hired();
+    const endedBefore = threads.ended();
     const slow = analyse(
       ask("slow"),
       errand(controller.signal, (what) => {
@@ -94,6 +95,7 @@ describe("the analysis in a worker", () => {
     expect(await slow).toEqual(failure({ code: "cancelled" }));
     expect(await waiting).toEqual(success({ title: "sum 7" }));
     expect(threads.hired()).toBe(before + 2);
+    await vi.waitFor(() => expect(threads.ended()).toBe(endedBefore + 1), 5000);
   });
 
   it("takes a question off the line without touching the one under way", async () => {
