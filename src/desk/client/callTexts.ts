@@ -1,6 +1,6 @@
 import type { CallResult } from "../excel/customFunctions.ts";
 import type { HostEvent } from "../excel/events.ts";
-import type { FunctionsMetadata } from "../workbook/metadata.ts";
+import { errorMark } from "../workbook/elementTexts.ts";
 import type { Call, CallOutcome } from "../workbook/pendingCalls.ts";
 import { callFlag, messageType, notice } from "./messages.ts";
 
@@ -10,8 +10,7 @@ const longestMessage = 8_000_000;
 const noticeText = (entries: string): string => `{"type":${messageType.notice},"message":{"entries":[${entries}]}}`;
 
 /** The calls as messages to the runtime. Arguments are JSON already, so that a range is spelled out once for many calls. */
-export function callTexts(calls: readonly Call[], metadata?: FunctionsMetadata): readonly string[] {
-  const errorsPass = metadata?.allowErrorForDataTypeAny === true ? callFlag.errorsPass : 0;
+export function callTexts(calls: readonly Call[]): readonly string[] {
   const messages: string[] = [];
   let entries: string[] = [];
   let length = 0;
@@ -20,7 +19,7 @@ export function callTexts(calls: readonly Call[], metadata?: FunctionsMetadata):
     [entries, length] = [[], 0];
   };
   for (const call of calls) {
-    const flags = errorsPass | (call.cancelable ? callFlag.cancelable : 0);
+    const flags = (carriesErrors(call) ? callFlag.errorsPass : 0) | (call.cancelable ? callFlag.cancelable : 0);
     const parts = [
       call.id,
       JSON.stringify(call.functionId),
@@ -37,6 +36,9 @@ export function callTexts(calls: readonly Call[], metadata?: FunctionsMetadata):
   send();
   return messages;
 }
+
+/** Only then need the runtime look through every element, which takes it longer than the call itself. */
+const carriesErrors = (call: Call): boolean => call.arguments.some((text) => text.includes(errorMark));
 
 export function cancelText(ids: readonly number[]): string {
   const entries = ids.map((invocationId) => ({

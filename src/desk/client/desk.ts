@@ -9,7 +9,7 @@ import type { Book } from "../workbook/book.ts";
 import type { Grid } from "../workbook/grid.ts";
 import type { BlankArrival, FunctionsMetadata } from "../workbook/metadata.ts";
 import { openBook } from "../workbook/openBook.ts";
-import { startCalls, type CallDoors } from "../workbook/pendingCalls.ts";
+import { startCalls, type Call, type CallDoors } from "../workbook/pendingCalls.ts";
 import { followChanges } from "../workbook/shifts.ts";
 import { snapshotOf } from "../workbook/snapshot.ts";
 import { growTo } from "../workbook/write.ts";
@@ -45,7 +45,8 @@ const standardNamespace = "FOOTING";
 
 /** Opens a workbook in a grid and answers the add-in at the other end of the line. */
 export function startDesk(grid: Grid, line: Transport, options: DeskOptions): Desk {
-  const functions = functionsOf(line, options, (results) => take(results));
+  const server = serveRequests(line);
+  const functions = functionsOf({ line, server, options }, (results) => take(results));
   const book = openBook(grid, options.book, (opened) => registerFunctions(opened, functions));
   const take = (results: Arrived): void => {
     for (const { fills } of results) growTo(book, fills);
@@ -56,7 +57,6 @@ export function startDesk(grid: Grid, line: Transport, options: DeskOptions): De
   };
   const calculation = watchCalculation(book);
   calculation.onFinished(functions.calls.settle);
-  const server = serveRequests(line);
   const host = hostOf(book, { calculation, functions, server, profile: options.profile ?? "desktop" });
   book.listeners.add((change) => followChanges(book, change));
   book.listeners.add((change) => raiseChanges(host, change));
@@ -68,7 +68,7 @@ export function startDesk(grid: Grid, line: Transport, options: DeskOptions): De
     host,
     switches: host.switches,
     arrival: functions.arrival,
-    settle: () => until(() => !calculation.busy() && functions.calls.waiting() === 0 && !server.busy()),
+    settle: () => until(() => !calculation.busy() && functions.calls.unanswered().length === 0 && !server.busy()),
     snapshot: () => snapshotOf(book),
     stop: () => {
       stopWatching();
@@ -79,12 +79,23 @@ export function startDesk(grid: Grid, line: Transport, options: DeskOptions): De
 
 type Arrived = Parameters<CallDoors["arrived"]>[0];
 
-function functionsOf(line: Transport, options: DeskOptions, arrived: CallDoors["arrived"]): AddInFunctions {
+interface Ends {
+  readonly line: Transport;
+  readonly server: Server;
+  readonly options: DeskOptions;
+}
+
+/** Calls wait until the add-in has started, as in Excel; one that starts anew is asked again what it never answered. */
+function functionsOf({ line, server, options }: Ends, arrived: CallDoors["arrived"]): AddInFunctions {
   const { functions = { functions: [] }, namespace = standardNamespace, blank = null } = options;
-  const calls = startCalls({
-    make: (asked) => callTexts(asked, functions).forEach(line.send),
-    cancel: (ids) => line.send(cancelText(ids)),
-    arrived,
+  let isReady = false;
+  const ask = (asked: readonly Call[]): void => {
+    if (isReady) callTexts(asked).forEach(line.send);
+  };
+  const calls = startCalls({ make: ask, cancel: (ids) => line.send(cancelText(ids)), arrived });
+  server.onReady(() => {
+    isReady = true;
+    ask(calls.unanswered());
   });
   return { namespace, metadata: functions, calls, arrival: { blank }, messages: new Map() };
 }

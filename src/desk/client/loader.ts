@@ -1,3 +1,4 @@
+import { messageType } from "./messages.ts";
 import { isSetSupported } from "./requirementSets.ts";
 import type { Transport } from "./transport.ts";
 
@@ -54,11 +55,22 @@ export function installLoader(globals: Globals, transport: Transport, surroundin
   const bridge: Bridge = { sendMessageToHost: transport.send };
   transport.receive((text) => bridge.onMessageFromHost?.(text));
   globals["_richApiNativeBridge"] = bridge;
-  globals["CustomFunctions"] = association();
-  globals["Office"] = office(surroundings);
+  const ready = once(() => transport.send(JSON.stringify({ type: messageType.ready })));
+  globals["CustomFunctions"] = association(ready);
+  globals["Office"] = office(surroundings, ready);
 }
 
-function office({ theme, platform, isSetSupported: supports = isSetSupported }: Surroundings): object {
+/** An add-in shows itself by its first word; what it says in the same breath belongs to it. */
+function once(work: () => void): () => void {
+  let due = true;
+  return () => {
+    if (due) setTimeout(work, 0);
+    due = false;
+  };
+}
+
+function office(surroundings: Surroundings, asked: () => void): object {
+  const { theme, platform, isSetSupported: supports = isSetSupported } = surroundings;
   const info: HostInfo = { host: "Excel", platform };
   const ready = Promise.resolve(info);
   return {
@@ -66,6 +78,7 @@ function office({ theme, platform, isSetSupported: supports = isSetSupported }: 
     PlatformType: { PC: "PC", OfficeOnline: "OfficeOnline" },
     EventType: {},
     onReady: async (callback?: (info: HostInfo) => unknown) => {
+      asked();
       const known = await ready;
       await callback?.(known);
       return known;
@@ -85,11 +98,12 @@ function office({ theme, platform, isSetSupported: supports = isSetSupported }: 
 }
 
 /** Functions by the ids of the metadata; the runtime looks them up without regard to case. */
-function association(): object {
+function association(added: () => void): object {
   const mappings: Record<string, unknown> = {};
   const listeners: (() => void)[] = [];
   const set = (id: string, work: unknown): void => {
     mappings[id.toUpperCase()] = work;
+    added();
     for (const listener of listeners) listener();
   };
   const associate = (first: string | Readonly<Record<string, unknown>>, work?: unknown): void => {

@@ -1,5 +1,5 @@
-/** Kinds of messages on the client's native bridge. */
-export const messageType = { request: 1, response: 2, notice: 3 } as const;
+/** Kinds of messages on the client's native bridge; the last is the loader's own. */
+export const messageType = { request: 1, response: 2, notice: 3, ready: 100 } as const;
 
 /** Categories and kinds within a notice. */
 export const notice = { functions: 1, events: 65_536, call: 1000, cancel: 1001 } as const;

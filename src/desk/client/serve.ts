@@ -8,6 +8,8 @@ import type { Transport } from "./transport.ts";
 const webLimit = 5 * 1024 * 1024;
 
 export interface Server {
+  /** Called when the add-in's runtime has started, and again when it has started anew. */
+  readonly onReady: (listener: () => void) => void;
   /** Begins to answer; what came before waits. */
   readonly answer: (host: Host) => void;
   /** Sends a notice, but never ahead of the answer to the request that brought it about. */
@@ -22,8 +24,10 @@ export function serveRequests(line: Transport): Server {
   let last: Promise<void> = Promise.resolve();
   const started = new Promise<Host>((resolve) => (begin = resolve));
   let working = 0;
+  let heardReady: () => void = () => undefined;
   line.receive((text) => {
     const request = JSON.parse(text) as BridgeRequest;
+    if (request.type === messageType.ready) heardReady();
     if (request.type !== messageType.request) return;
     working += 1;
     last = last.then(async () => {
@@ -33,6 +37,9 @@ export function serveRequests(line: Transport): Server {
     });
   });
   return {
+    onReady: (listener) => {
+      heardReady = listener;
+    },
     answer: begin,
     after: (text) => (working > 0 ? void notices.push(text) : line.send(text)),
     busy: () => working > 0,

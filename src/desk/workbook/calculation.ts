@@ -1,5 +1,7 @@
 import { ICommandService, type ICommandInfo, type IExecutionOptions } from "@univerjs/core";
 import {
+  FormulaExecutedStateType,
+  FormulaExecuteStageType,
   IActiveDirtyManagerService,
   SetFormulaCalculationNotificationMutation,
   SetFormulaCalculationStartMutation,
@@ -41,37 +43,75 @@ export interface Calculation {
 }
 
 interface Progress {
+  readonly book: Book;
+  readonly listeners: (() => void)[];
+  /** Runs of the engine that have begun and not ended. */
+  running: number;
+  /** The last stage of a run was reached; its results follow. */
+  ending: boolean;
   /** Changes that the engine has seen and not yet begun to calculate. */
-  waiting: boolean;
-  running: boolean;
+  waiting: ICommandInfo[];
+  /** Changes for which it asked the run under way to stop and begin anew. */
+  interrupting: ICommandInfo[];
 }
 
-/** The engine's word for a calculation that was interrupted to start anew. */
-const interrupted = 1;
-
 export function watchCalculation(book: Book): Calculation {
-  const progress: Progress = { waiting: false, running: false };
-  const listeners: (() => void)[] = [];
-  const dirt = book.grid.injector.get(IActiveDirtyManagerService);
-  const follow = book.grid.injector.get(ICommandService).onCommandExecuted((info, options) => {
-    if (info.id === SetFormulaCalculationStartMutation.id) Object.assign(progress, { waiting: false, running: true });
-    else if (info.id === SetFormulaCalculationStopMutation.id) progress.waiting = false;
-    else if (info.id === SetFormulaCalculationNotificationMutation.id) {
-      const state = endOf(info);
-      if (state === null || state === interrupted) return;
-      progress.running = false;
-      for (const listener of listeners) listener();
-    } else if (dirt.get(info.id) !== undefined && setsOff(info, options)) progress.waiting = true;
-  });
+  const progress: Progress = { book, listeners: [], running: 0, ending: false, waiting: [], interrupting: [] };
+  const follow = book.grid.injector
+    .get(ICommandService)
+    .onCommandExecuted((info, options) => follows(progress, info, options));
   return {
-    busy: () => progress.waiting || progress.running,
-    onFinished: (listener) => listeners.push(listener),
+    busy: () => progress.running > 0 || progress.waiting.length > 0,
+    onFinished: (listener) => progress.listeners.push(listener),
     stop: () => follow.dispose(),
   };
 }
 
-function endOf({ params }: Readonly<ICommandInfo>): number | null {
-  return (params as { readonly functionsExecutedState?: number } | undefined)?.functionsExecutedState ?? null;
+function follows(progress: Progress, info: Readonly<ICommandInfo>, options?: IExecutionOptions): void {
+  switch (info.id) {
+    case SetFormulaCalculationStartMutation.id:
+      progress.waiting = [];
+      break;
+    case SetFormulaCalculationStopMutation.id:
+      progress.interrupting.push(...progress.waiting);
+      progress.waiting = [];
+      break;
+    case SetFormulaCalculationNotificationMutation.id:
+      heed(progress, (info.params ?? {}));
+      break;
+    default: {
+      const dirt = progress.book.grid.injector.get(IActiveDirtyManagerService);
+      if (dirt.get(info.id) !== undefined && setsOff(info, options)) progress.waiting.push(info);
+    }
+  }
+}
+
+interface Notice {
+  readonly stageInfo?: { readonly stage: FormulaExecuteStageType };
+  readonly functionsExecutedState?: FormulaExecutedStateType;
+}
+
+/** Every run tells its first and its last stage once; what it ended in may be told twice, the first time too early. */
+function heed(progress: Progress, { stageInfo, functionsExecutedState: state }: Notice): void {
+  if (stageInfo?.stage === FormulaExecuteStageType.START) progress.running += 1;
+  if (stageInfo?.stage === FormulaExecuteStageType.CALCULATION_COMPLETED) progress.ending = true;
+  if (state === undefined) return;
+  if (state === FormulaExecutedStateType.STOP_EXECUTION) progress.interrupting = [];
+  if (!progress.ending) return;
+  progress.ending = false;
+  progress.running -= 1;
+  const whole = state === FormulaExecutedStateType.SUCCESS || state === FormulaExecutedStateType.NOT_EXECUTED;
+  if (!whole) return;
+  repeatInterruption(progress);
+  for (const listener of progress.listeners) listener();
+}
+
+/** Asked to stop when it was as good as done, the engine ends well and forgets that it was to begin anew. */
+function repeatInterruption(progress: Progress): void {
+  const dirt = progress.book.grid.injector.get(IActiveDirtyManagerService);
+  for (const info of progress.interrupting.splice(0)) {
+    startCalculation(progress.book, dirt.get(info.id)?.getDirtyData(info) ?? {});
+  }
 }
 
 /** The engine itself leaves its own results and mere formatting out of account. */

@@ -2,35 +2,53 @@ import type { ICellData, IStyleData } from "@univerjs/core";
 import { hasSheet, type Book } from "./book.ts";
 import { carryOut, command, styleTrigger } from "./grid.ts";
 
+type Cells = Record<number, Record<number, ICellData>>;
+
 /**
  * Changes that are gathered before they go to the grid, which looks through a sheet's every cell at each change:
  * the client cuts large blocks into hundreds of small ones.
  */
 export interface Draft {
-  readonly cells: Record<number, Record<number, ICellData>>;
-  /** Looks alone set no calculation off. */
-  changesValues: boolean;
+  /** Cells whose content changes, perhaps with their looks. */
+  readonly contents: Cells;
+  /** Cells whose looks alone change: sent as contents, they would lose the formula behind them. */
+  readonly looks: Cells;
+}
+
+/** The draft of one row, to put cells in. */
+export interface DraftRow {
+  readonly contents: Record<number, ICellData>;
+  readonly looks: Record<number, ICellData>;
+}
+
+export function draftRow(book: Book, sheet: string, row: number): DraftRow {
+  const { contents, looks } = draftOf(book, sheet);
+  return { contents: (contents[row] ??= {}), looks: (looks[row] ??= {}) };
 }
 
 function draftOf(book: Book, sheet: string): Draft {
   const known = book.drafts.get(sheet);
   if (known !== undefined) return known;
-  const draft: Draft = { cells: {}, changesValues: false };
+  const draft: Draft = { contents: {}, looks: {} };
   book.drafts.set(sheet, draft);
   return draft;
 }
 
-/** One row of a draft, to put cells in. */
-export function draftRow(book: Book, sheet: string, row: number): Record<number, ICellData> {
-  return (draftOf(book, sheet).cells[row] ??= {});
+/** What is gathered for a cell so far. */
+export const draftedAt = ({ contents, looks }: DraftRow, column: number): ICellData | undefined =>
+  contents[column] ?? looks[column];
+
+export function draftContent(row: DraftRow, column: number, content: ICellData): void {
+  row.contents[column] = overlay(draftedAt(row, column), content);
+  Reflect.deleteProperty(row.looks, column);
 }
 
-export function markValues(book: Book, sheet: string): void {
-  draftOf(book, sheet).changesValues = true;
+export function draftLook(row: DraftRow, column: number, style: IStyleData): void {
+  const part = row.contents[column] === undefined ? row.looks : row.contents;
+  part[column] = overlay(part[column], { s: style });
 }
 
-/** Lays a cell's change over what the draft already holds of it. */
-export function overlay(before: ICellData | undefined, change: ICellData): ICellData {
+function overlay(before: ICellData | undefined, change: ICellData): ICellData {
   if (before === undefined) return change;
   const style = mergedStyle(before.s, change.s);
   return { ...before, ...change, ...(style === null ? {} : { s: style }) };
@@ -51,9 +69,14 @@ export function flushDrafts(book: Book): void {
   if (book.drafts.size === 0) return;
   const drafts = [...book.drafts];
   book.drafts.clear();
-  for (const [sheet, { cells, changesValues }] of drafts) {
+  for (const [sheet, { contents, looks }] of drafts) {
     if (!hasSheet(book, sheet)) continue;
-    const trigger = changesValues ? {} : { trigger: styleTrigger };
-    carryOut(book.grid, command.setValues, { unitId: book.unit, subUnitId: sheet, cellValue: cells, ...trigger });
+    const shared = { unitId: book.unit, subUnitId: sheet };
+    if (holdsCells(contents)) carryOut(book.grid, command.setValues, { ...shared, cellValue: contents });
+    if (holdsCells(looks)) {
+      carryOut(book.grid, command.setValues, { ...shared, cellValue: looks, trigger: styleTrigger });
+    }
   }
 }
+
+const holdsCells = (cells: Cells): boolean => Object.values(cells).some((row) => Object.keys(row).length > 0);

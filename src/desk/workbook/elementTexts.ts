@@ -30,9 +30,11 @@ export function elementText(element: Element, type: string, rules: Rules): Text 
   }
 }
 
-/** The form in which the client's runtime recognises an error value. */
+/** By its type the client's runtime recognises an error value. */
+export const errorMark = "CustomFunctionError";
+
 function errorText(error: string, type: string, { errorsPass }: Rules): Text {
-  return errorsPass && type === "any" ? json({ type: "CustomFunctionError", code: error }) : { error };
+  return errorsPass && type === "any" ? json({ type: errorMark, code: error }) : { error };
 }
 
 function numberText(value: number | string | boolean | null): Text {

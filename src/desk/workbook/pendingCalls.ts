@@ -35,7 +35,8 @@ export interface Calls {
   readonly answer: (outcomes: readonly (readonly [id: number, outcome: CallOutcome])[]) => void;
   /** A calculation is over: what it asked for goes out, what it used or no longer asks for is dropped. */
   readonly settle: () => void;
-  readonly waiting: () => number;
+  /** Calls that have gone out and not come back. */
+  readonly unanswered: () => readonly Call[];
 }
 
 export interface CallDoors {
@@ -74,7 +75,10 @@ export function startCalls(doors: CallDoors): Calls {
     },
     answer: (outcomes) => answer(state, outcomes, doors),
     settle: () => settle(state, doors),
-    waiting: () => [...state.pending.values()].filter(({ outcome }) => outcome === null).length,
+    unanswered: () =>
+      [...state.pending.values()]
+        .filter(({ call, outcome }) => outcome === null && !state.unsent.includes(call))
+        .map(({ call }) => call),
   };
 }
 

@@ -1,7 +1,7 @@
 import type { ICellData, IStyleData } from "@univerjs/core";
 import type { Area } from "./areas.ts";
 import { workbookOf, type Book } from "./book.ts";
-import { draftRow, flushDrafts, overlay } from "./drafts.ts";
+import { draftLook, draftRow, flushDrafts } from "./drafts.ts";
 import { carryOut, command, styleTrigger } from "./grid.ts";
 
 export function styleAt(book: Book, cell: ICellData | undefined): IStyleData {
@@ -24,8 +24,7 @@ export function setStyles(book: Book, area: Area, styleOf: (row: number, column:
     const draft = draftRow(book, area.sheet, area.row + row);
     for (let column = 0; column < area.columns; column++) {
       const style = styleOf(row, column);
-      const at = area.column + column;
-      if (style !== null) draft[at] = overlay(draft[at], { s: style });
+      if (style !== null) draftLook(draft, area.column + column, style);
     }
   }
 }

@@ -1,7 +1,7 @@
 import type { ICellData } from "@univerjs/core";
 import type { Area } from "./areas.ts";
 import { worksheetOf, type Book } from "./book.ts";
-import { draftRow, markValues, overlay } from "./drafts.ts";
+import { draftContent, draftedAt, draftRow } from "./drafts.ts";
 import { carryOut, command } from "./grid.ts";
 import { formatAt } from "./styles.ts";
 import { asTyped } from "./typed.ts";
@@ -27,7 +27,6 @@ type Written = string | number | boolean | null;
 /** Writes cells as if typed; what is null in the block stays as it is. They reach the grid with the next flush. */
 export function writeCells(book: Book, area: Area, valueOf: (row: number, column: number) => Written): void {
   growTo(book, area);
-  markValues(book, area.sheet);
   const stored = worksheetOf(book, area.sheet).getCellMatrix().getMatrix();
   for (let row = 0; row < area.rows; row++) {
     const draft = draftRow(book, area.sheet, area.row + row);
@@ -35,7 +34,8 @@ export function writeCells(book: Book, area: Area, valueOf: (row: number, column
     for (let column = 0; column < area.columns; column++) {
       const value = valueOf(row, column);
       const at = area.column + column;
-      if (value !== null) draft[at] = overlay(draft[at], typedInto(book, value, draft[at] ?? cells?.[at] ?? undefined));
+      if (value === null) continue;
+      draftContent(draft, at, typedInto(book, value, draftedAt(draft, at) ?? cells?.[at] ?? undefined));
     }
   }
 }

@@ -97,6 +97,19 @@ describe("formulas", () => {
     expect(value).toEqual([[2], [20], [21]]);
   });
 
+  it("are not lost when their looks change together with another cell's content", async () => {
+    await set(desk, "Formulas!D1:D2", { formulas: [["=E1*2"], ["=SUM(E1:E2)"]] });
+    await desk.Excel.run(async (context) => {
+      const sheet = context.workbook.worksheets.getItem("Formulas");
+      sheet.getRange("D1:D2").format.font.bold = true;
+      sheet.getRange("F1").values = [["beside"]];
+      await context.sync();
+    });
+    await set(desk, "Formulas!E1:E2", { values: [[3], [4]] });
+    await desk.settle();
+    expect(desk.values("Formulas!D1:D2")).toEqual([[6], [7]]);
+  });
+
   it("answer #NAME? for a function nobody knows", async () => {
     await set(desk, "Formulas!B1", { formulas: [["=FOOTING.NOTHING(A1)"]] });
     expect(await load(desk, "Formulas!B1", "values")).toEqual([["#NAME?"]]);
