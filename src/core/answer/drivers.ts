@@ -52,9 +52,11 @@ function firmnessOf({ firm, flippedBy, pValues }: TermFirmness, shown: boolean):
   return { kind: "leaning", on: flippedBy, farthest: shown ? pValues.largest : pValues.smallest };
 }
 
-/** b0 of each term. */
+/** b0 of each term: the value given for the term by its name, or for the column it is made from. */
 export const againstOf = ({ design }: Fit, { against }: Options): number[] =>
-  design.terms.map(({ name }) => against[name] ?? 0);
+  design.terms.map(
+    ({ name, meaning }) => against[name] ?? (meaning.kind === "number" ? against[meaning.column] : 0) ?? 0,
+  );
 
 function agreeingKinds(inference: Answer["inference"]): string {
   if (inference.neweyWest !== null) return "all three kinds of standard error";

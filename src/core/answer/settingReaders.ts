@@ -36,12 +36,16 @@ export function readLevel(text: string): number | NotUnderstood {
   return inside ? share : { allowed: ["a number between 0 and 1, such as 0.05"] };
 }
 
-/** Parts between commas, without the blanks around them. */
-export const readList = (text: string): string[] =>
-  text
-    .split(",")
+/** Parts between separators, without the blanks around them; a separator inside double quotes separates nothing. */
+export const partsBetween = (text: string, separator: "," | ";"): string[] =>
+  (text.match(separator === "," ? /(?:"[^"]*"|[^",])+/g : /(?:"[^"]*"|[^";])+/g) ?? [])
     .map((part) => part.trim())
     .filter((part) => part !== "");
+
+const unquoted = (part: string): string => part.replace(/^"(.*)"$/s, "$1").trim();
+
+/** Headings between commas; one that holds a comma or an equals sign stands in double quotes. */
+export const readList = (text: string): string[] => partsBetween(text, ",").map(unquoted);
 
 const kernels: readonly Kernel[] = ["bartlett", "parzen", "quadratic spectral"];
 
@@ -74,9 +78,9 @@ export function readTransforms(
   text: string,
 ): { column: string; transform: Transform }[] | NotUnderstood {
   const looksBack = kind === "lag" || kind === "change" || kind === "growth rate";
-  return readList(text).map((part) => {
+  return partsBetween(text, ",").map((part) => {
     const found = looksBack ? /^(.*?)\s+by\s+(\d+)$/i.exec(part) : null;
-    const column = found?.[1] ?? part;
+    const column = unquoted(found?.[1] ?? part);
     const transform: Transform = looksBack ? { kind, periods: Number(found?.[2] ?? 1) } : { kind };
     return { column, transform };
   });
@@ -96,9 +100,10 @@ export function readDecimal(text: string): "." | "," | null | NotUnderstood {
 
 /** "Heading = value" parts as pairs; null where a part is not of that form. */
 function namedPairs(text: string): (readonly [string, string])[] | null {
-  const pairs = readList(text).map((part) => {
-    const found = /^(.+?)\s*=\s*(.+)$/.exec(part);
-    return found?.[1] === undefined || found[2] === undefined ? null : ([found[1], found[2]] as const);
+  const pairs = partsBetween(text, ",").map((part) => {
+    const found = /^("[^"]*"|[^"=]+?)\s*=\s*(.+)$/s.exec(part);
+    const [, name, value] = found ?? [];
+    return name === undefined || value === undefined ? null : ([unquoted(name), unquoted(value)] as const);
   });
   return pairs.every((pair) => pair !== null) ? pairs : null;
 }

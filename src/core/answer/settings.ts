@@ -1,5 +1,6 @@
 import { nearestName } from "../problem/nearestName.ts";
 import { type Result, failure, success } from "../problem/result.ts";
+import { partsBetween } from "./settingReaders.ts";
 import { isNotUnderstood, settingTable } from "./settingTable.ts";
 import { type Settings, defaultSettings } from "./settingValues.ts";
 
@@ -44,11 +45,11 @@ const inReadingOrder = (pairs: readonly (readonly [string, string])[]): (readonl
 /** Settings written as one text, "rows: time; lags: 4", as names and values. */
 export function settingPairs(text: string): Result<(readonly [string, string])[]> {
   const pairs: (readonly [string, string])[] = [];
-  for (const part of text.split(";").filter((piece) => piece.trim() !== "")) {
+  for (const part of partsBetween(text, ";")) {
     const mark = part.indexOf(":");
     if (mark < 0) {
       const names = settingTable.map(({ name }) => name);
-      return failure({ code: "unknown-setting", setting: part.trim(), nearest: nearestName(part, names) });
+      return failure({ code: "unknown-setting", setting: part, nearest: nearestName(part, names) });
     }
     pairs.push([part.slice(0, mark), part.slice(mark + 1)]);
   }

@@ -14,18 +14,23 @@ export function settingsSaid(model: Model, options: Options): SettingPair[] {
 
 function modelPairs(model: Model): SettingPair[] {
   const categories = model.drivers.filter(({ as }) => as === "category");
-  const bases = categories.flatMap(({ column, base }) => (base === null ? [] : [`${column} = ${base}`]));
+  const bases = categories.flatMap(({ column, base }) =>
+    base === null ? [] : [`${quoted(column)} = ${quoted(base)}`],
+  );
   const [decimal] = model.textNumbers.map((entry) => entry.decimal);
   return said([
     ["rows", model.rows.kind],
     ["constant", model.constant ? "" : "no"],
-    ["categories", categories.map(({ column }) => column).join(", ")],
+    ["categories", categories.map(({ column }) => quoted(column)).join(", ")],
     ["base", bases.join(", ")],
     ...transformPairs(model),
     ["calendar", model.calendar.join(", ")],
     ["text numbers", decimal === undefined ? "" : decimal === "." ? "point" : "comma"],
   ]);
 }
+
+/** A name that a list would take apart stands in double quotes; quotes of its own could not be told from them. */
+const quoted = (name: string): string => (/[,;=]|\sby\s+\d+$/i.test(name) ? `"${name.replaceAll('"', "")}"` : name);
 
 const said = (pairs: readonly SettingPair[]): SettingPair[] => pairs.filter(([, value]) => value !== "");
 
@@ -42,7 +47,7 @@ function transformPairs({ outcome, drivers }: Model): SettingPair[] {
 }
 
 const transformed = (column: string, transform: Transform): string =>
-  "periods" in transform && transform.periods !== 1 ? `${column} by ${transform.periods}` : column;
+  "periods" in transform && transform.periods !== 1 ? `${quoted(column)} by ${transform.periods}` : quoted(column);
 
 function optionPairs(options: Options): SettingPair[] {
   const differs = (key: keyof Options): boolean => options[key] !== defaultOptions[key];
@@ -62,7 +67,7 @@ function optionPairs(options: Options): SettingPair[] {
 
 const named = (values: Readonly<Record<string, string | number>>): string =>
   Object.entries(values)
-    .map(([name, value]) => `${name} = ${value}`)
+    .map(([name, value]) => `${quoted(name)} = ${quoted(String(value))}`)
     .join(", ");
 
 /** A rule for the number of lags in the words that the setting takes. */

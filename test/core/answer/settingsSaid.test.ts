@@ -7,7 +7,7 @@ import { settingsSaid } from "../../../src/core/answer/settingsSaid.ts";
 import type { LagRule } from "../../../src/core/covariance/choice.ts";
 import type { Model, Transform } from "../../../src/core/design/model.ts";
 
-const columns = ["Price index", "Advertising", "Region"] as const;
+const columns = ["Price index, net of tax = list", "Advertising", "Region; by 2"] as const;
 const periods = fc.integer({ min: 1, max: 12 });
 const transforms: fc.Arbitrary<Transform> = fc.oneof(
   fc.constant<Transform>({ kind: "none" }),
@@ -29,7 +29,7 @@ const lagRules: fc.Arbitrary<LagRule | null> = fc.oneof(
 const models: fc.Arbitrary<Model> = fc.record({
   outcome: fc.record({ column: fc.constant("Repairs"), transform: transforms }),
   drivers: fc
-    .tuple(transforms, transforms, fc.option(fc.constantFrom("North", "South")))
+    .tuple(transforms, transforms, fc.option(fc.constantFrom("North, by the sea", "South")))
     .map(([price, advertising, base]) => [
       { column: columns[0], as: "number" as const, base: null, transform: price },
       { column: columns[1], as: "number" as const, base: null, transform: advertising },
@@ -54,8 +54,8 @@ const options: fc.Arbitrary<Options> = fc.record({
   lags: lagRules,
   adjusted: fc.boolean(),
   level: fc.constantFrom(0.01, 0.05, 0.1),
-  against: fc.constantFrom({}, { "Price index": -1, Advertising: 0.25 }),
-  units: fc.constantFrom({}, { Repairs: "repairs a month" }),
+  against: fc.constantFrom({}, { [columns[0]]: -1, Advertising: 0.25 }),
+  units: fc.constantFrom({}, { Repairs: "repairs a month, all shops" }),
 });
 
 describe("settings as a report states them", () => {
