@@ -1,5 +1,6 @@
 import type { Covariance, ErrorsChoice, GroupedVersion } from "../covariance/choice.ts";
 import { covarianceOf } from "../covariance/covarianceOf.ts";
+import { vanishingTerm } from "../covariance/vanishing.ts";
 import { allWhite, whiteVersions } from "../covariance/white.ts";
 import { chosen } from "../decision/decide.ts";
 import type { Decision } from "../decision/decision.ts";
@@ -102,15 +103,13 @@ function groupedFrom(order: RowOrder, of: Lookup): GroupedErrors | null {
   };
 }
 
-/** Below this share of the classical standard error another one is rounding error about zero. */
-const nothing = 1e-8;
-
 /** A standard error of zero would call any coefficient shown: that is no finding but a fault of the design. */
 function zeroError(fit: Fit, covariances: ByKind): Problem | null {
-  const classical = covariances.classical?.standardErrors ?? [];
+  const { classical } = covariances;
+  if (classical === null) return null;
   for (const [errors, covariance] of Object.entries(covariances)) {
-    const at = covariance?.standardErrors.findIndex((error, index) => !(error > nothing * classical[index]!)) ?? -1;
-    if (at >= 0) return { code: "zero-standard-error", errors, term: fit.design.terms[at]?.name ?? "" };
+    const term = covariance === null ? null : vanishingTerm(covariance, classical);
+    if (term !== null) return { code: "zero-standard-error", errors, term: fit.design.terms[term]?.name ?? "" };
   }
   return null;
 }

@@ -22,6 +22,7 @@ export function fromMatrix(matrix: SquareMatrix, { choice, used }: { choice: Err
     used: { lags: null, bandwidth: null, version: null, fallback: null, ...used },
     matrix,
     degreesOfFreedom: null,
-    standardErrors: diagonal(matrix).map(Math.sqrt),
+    // A variance of zero can come out below it by rounding.
+    standardErrors: diagonal(matrix).map((variance) => Math.sqrt(Math.max(variance, 0))),
   };
 }

@@ -1,5 +1,7 @@
 import type { Covariance, ErrorsChoice, GroupedVersion, WhiteVersion } from "../covariance/choice.ts";
+import { classicalCovariance } from "../covariance/classical.ts";
 import { covarianceOf } from "../covariance/covarianceOf.ts";
+import { vanishingTerm } from "../covariance/vanishing.ts";
 import { whiteCovariances } from "../covariance/white.ts";
 import type { Fit } from "../fit/fit.ts";
 import type { Reference } from "../inference/reference.ts";
@@ -37,7 +39,9 @@ export function alternatives(fit: Fit, settings: AlternativeSettings): Result<Al
     if (!covariance.ok) return covariance;
     found.push(alternativeOf(fit, covariance.value, laws));
   }
-  return success([...found.slice(0, 1), ...plain, ...found.slice(1)]);
+  const classical = classicalCovariance(fit);
+  const all = [...found.slice(0, 1), ...plain, ...found.slice(1)];
+  return success(all.filter(({ covariance }) => vanishingTerm(covariance, classical) === null));
 }
 
 function alternativeOf(fit: Fit, covariance: Covariance, laws: readonly Reference[]): Alternative {

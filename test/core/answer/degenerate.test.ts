@@ -73,6 +73,11 @@ describe("designs at the edge", () => {
     });
   });
 
+  it("a variance that rounds below zero is no figure to act on", () => {
+    const columns = { Sales: [1000, 0, 0, 0], Price: [0, 0, 0.1631, 0], Fuel: [1000, 0, 0, 1000] };
+    expect(problemOf(ask(columns))).toMatchObject({ code: "zero-standard-error" });
+  });
+
   it("one row more than coefficients still answers, and says how little it is", () => {
     const answer = answerOf(ask({ Sales: [3, 5, 4, 8], Price: [1, 2, 4, 3], Fuel: [2, 1, 5, 4] }));
     expect(answer.fit.degreesOfFreedom).toBe(1);
