@@ -120,10 +120,14 @@ function hostOf(book: Book, { calculation, functions, server, profile }: Parts):
 }
 
 const pollMilliseconds = 5;
+/** Longer than any calculation of ours takes; a function that never answers must not hang a test or the terminal. */
+const patienceMilliseconds = 300_000;
 
 /** Looks twice, since the end of one thing may set off another a moment later. */
 async function until(quiet: () => boolean): Promise<void> {
+  const start = performance.now();
   for (let seen = 0; seen < 2; seen = quiet() ? seen + 1 : 0) {
+    if (performance.now() - start > patienceMilliseconds) throw new Error("The desk does not come to rest.");
     await new Promise((resolve) => setTimeout(resolve, pollMilliseconds));
   }
 }

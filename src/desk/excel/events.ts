@@ -1,5 +1,7 @@
 /** Numbers of the client's events. */
 export const eventKind = {
+  /** Workbook.onSelectionChanged, an older kind: the client registers for it with itself alone. */
+  workbookSelected: 2,
   changed: 10,
   activated: 11,
   deactivated: 12,
@@ -26,6 +28,8 @@ export interface Events {
   /** The request that registered is over. */
   readonly settle: () => void;
   readonly raise: (event: HostEvent) => void;
+  /** Sends an event that nobody registers for with the host. */
+  readonly broadcast: (event: HostEvent) => void;
   enabled: boolean;
 }
 
@@ -47,6 +51,9 @@ export function startEvents(deliver: (event: HostEvent) => void): Events {
     },
     raise(event) {
       if (this.enabled && heard.has(key(event.kind, event.target))) deliver(event);
+    },
+    broadcast(event) {
+      if (this.enabled) deliver(event);
     },
   };
 }

@@ -23,6 +23,7 @@ export function raiseChanges(host: Host, change: BookChange): void {
       break;
     case "selected":
       raise(eventKind.selected, { address: selectedAddress(host) });
+      host.events.broadcast({ kind: eventKind.workbookSelected, target: "", details: {} });
       break;
     case "activated":
       raise(eventKind.activated, {});

@@ -107,6 +107,44 @@ it("tells of calculated cells and of selections", async () => {
   await selected.off();
 });
 
+it("tells the workbook's own handler of selections, once it is registered", async () => {
+  let seen = 0;
+  desk.select("Watched!A1");
+  await desk.Excel.run(async (context) => {
+    context.workbook.onSelectionChanged.add(() => {
+      seen += 1;
+      return Promise.resolve();
+    });
+    await context.sync();
+  });
+  desk.select("Other!B2");
+  await desk.settle();
+  expect(seen).toBe(1);
+});
+
+it("tells of sheets that are shown and left, added and deleted", async () => {
+  const seen: string[] = [];
+  const told = (what: string) => (args: { readonly worksheetId: string }) => {
+    seen.push(`${what} ${args.worksheetId.replace(/^(?!sheet-).*/, "new")}`);
+    return Promise.resolve();
+  };
+  await desk.Excel.run(async (context) => {
+    const { worksheets } = context.workbook;
+    worksheets.getItem("Watched").activate();
+    worksheets.onActivated.add(told("shown"));
+    worksheets.onDeactivated.add(told("left"));
+    worksheets.onAdded.add(told("added"));
+    worksheets.onDeleted.add(told("deleted"));
+    await context.sync();
+    const added = worksheets.add("New");
+    worksheets.getItem("Other").activate();
+    added.delete();
+    await context.sync();
+  });
+  await desk.settle();
+  expect(seen.sort()).toEqual(["added new", "deleted new", "left sheet-1", "shown sheet-2"]);
+});
+
 it("tells the workbook's handlers of every sheet", async () => {
   const seen: string[] = [];
   await desk.Excel.run(async (context) => {
