@@ -98,9 +98,11 @@ describe("architecture", () => {
 
   it("catches only at the borders", () => {
     const borders = ["office", "functions", "worker", "desk", "terminal", "entries", "app", "taskpane"];
+    // Whether a page may run WebAssembly shows itself only when it is tried.
+    const elsewhere = ["core/numeric/vector/webAssembly.ts"];
     expect(
       files.filter((file) => /\bcatch\b\s*[({]/.test(textOf(file))).filter((file) => !borders.includes(roomOf(file))),
-    ).toEqual([]);
+    ).toEqual(elsewhere);
   });
 
   it("has no file without an idea of its own: no barrels, no leftover names", () => {

@@ -1,4 +1,6 @@
 import type { SquareMatrix } from "./matrix.ts";
+import { arena } from "./vector/arena.ts";
+import { place } from "./vector/place.ts";
 
 /** Rows of a block: with twenty columns it stays in the first-level caches. */
 export const basisBlockRows = 256;
@@ -32,44 +34,15 @@ export function visitBasis(basis: Basis, visit: (block: BasisBlock) => void): vo
 }
 
 /** Writes the rows that `block` names into its values. */
-export function fillBasis({ columns, triangle: { size, values: triangle } }: Basis, block: BasisBlock): void {
+export function fillBasis({ columns, triangle }: Basis, block: BasisBlock): void {
   const { values, first, rows } = block;
-  for (let j = 0; j < size; j++) {
-    const to = j * basisBlockRows;
-    values.set(columns[j]!.subarray(first, first + rows), to);
-    let i = 0;
-    for (; i + 3 < j; i += 4)
-      subtractFour(block, to, { from: i * basisBlockRows, triangle, entry: i * size + j, size });
-    for (; i < j; i++) subtractOne(block, to, { from: i * basisBlockRows, factor: triangle[i * size + j]! });
-    const divisor = triangle[j * size + j]!;
-    for (let t = to; t < to + rows; t++) values[t]! /= divisor;
-  }
-}
-
-function subtractOne(
-  { values, rows }: BasisBlock,
-  to: number,
-  { from, factor }: { from: number; factor: number },
-): void {
-  for (let t = 0; t < rows; t++) values[to + t]! -= factor * values[from + t]!;
-}
-
-interface FourEntries {
-  readonly from: number;
-  readonly triangle: Float64Array;
-  readonly entry: number;
-  readonly size: number;
-}
-
-function subtractFour({ values, rows }: BasisBlock, to: number, { from, triangle, entry, size }: FourEntries): void {
-  const r0 = triangle[entry]!;
-  const r1 = triangle[entry + size]!;
-  const r2 = triangle[entry + 2 * size]!;
-  const r3 = triangle[entry + 3 * size]!;
-  const q1 = from + basisBlockRows;
-  const q2 = q1 + basisBlockRows;
-  const q3 = q2 + basisBlockRows;
-  for (let t = 0; t < rows; t++) {
-    values[to + t]! -= r0 * values[from + t]! + r1 * values[q1 + t]! + r2 * values[q2 + t]! + r3 * values[q3 + t]!;
-  }
+  const { size } = triangle;
+  const start = size * size + (size % 2);
+  const space = arena.numbers(start + size * basisBlockRows);
+  space.set(triangle.values);
+  columns.forEach((column, j) => {
+    place(column.subarray(first, first + rows), space, start + j * basisBlockRows);
+  });
+  arena.kernels.substitute({ triangle: 0, block: start, size, rows, stride: basisBlockRows });
+  values.set(space.subarray(start, start + size * basisBlockRows));
 }

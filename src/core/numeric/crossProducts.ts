@@ -1,5 +1,7 @@
 import { type Basis, basisBlockRows, visitBasis } from "./basis.ts";
 import type { SquareMatrix } from "./matrix.ts";
+import { arena } from "./vector/arena.ts";
+import { place } from "./vector/place.ts";
 
 /**
  * sum of w_i q_i q_i' over the rows of the orthonormal basis Q, for several sets of weights in one pass.
@@ -10,83 +12,47 @@ import type { SquareMatrix } from "./matrix.ts";
 export function weightedCrossProducts(basis: Basis, weightings: readonly Float64Array[]): SquareMatrix[] {
   const size = basis.columns.length;
   const sums = weightings.map(() => new Float64Array(size * size));
-  const weighted = new Float64Array(size * basisBlockRows);
   visitBasis(basis, ({ values, first, rows }) => {
     weightings.forEach((weights, index) => {
-      const roots = weights.subarray(first, first + rows).map(Math.sqrt);
-      scaleRows({ values, rows, size }, roots, weighted);
-      addCrossProducts(sums[index]!, { values: weighted, rows, size });
+      const factors = weights.subarray(first, first + rows).map(Math.sqrt);
+      addCrossProducts(sums[index]!, { values, rows, size, factors });
     });
   });
-  return sums.map((values) => mirrored(values, size));
+  return sums.map((values) => ({ size, values }));
 }
 
-/** Rows of `size` columns: entry (i, j) is values[j * basisBlockRows + i]. */
+/** Rows of `size` columns: entry (i, j) is values[j * basisBlockRows + i], times factors[i] where there are factors. */
 interface RowBlock {
   readonly values: Float64Array;
   readonly rows: number;
   readonly size: number;
+  readonly factors?: Float64Array;
 }
 
-/** Each row of the block times its factor, into `to`. */
-function scaleRows({ values, rows, size }: RowBlock, factors: Float64Array, to: Float64Array): void {
+/** Adds the block's cross-products to `sums`, size by size. */
+export function addCrossProducts(sums: Float64Array, { values, rows, size, factors }: RowBlock): void {
+  const stride = basisBlockRows;
+  const at = size * size + (size % 2);
+  const space = arena.numbers(at + size * stride);
+  space.set(sums);
   for (let j = 0; j < size; j++) {
-    const start = j * basisBlockRows;
-    for (let i = 0; i < rows; i++) to[start + i] = values[start + i]! * factors[i]!;
+    place(values.subarray(j * stride, j * stride + rows), space, at + j * stride);
+    if (factors !== undefined) multiplyBy(factors, space, at + j * stride);
+  }
+  for (let b = 0; b < size; b += 2) {
+    const right = at + b * stride;
+    const paired = b + 1 < size;
+    const next = paired ? right + stride : right;
+    const count = paired ? b + 2 : b + 1;
+    arena.kernels.addProducts({ left: at, count, right, next, rows, stride, sums: b * size, nextSums: (b + 1) * size });
+  }
+  for (let i = 0; i < size; i++) {
+    for (let j = 0; j <= i; j++) sums[i * size + j] = sums[j * size + i] = space[i * size + j]!;
   }
 }
 
-/** Adds the block's cross-products to the upper half of `sums`, two columns against two at a time. */
-export function addCrossProducts(sums: Float64Array, block: RowBlock): void {
-  const { size } = block;
-  for (let a = 0; a < size; a += 2) {
-    for (let b = a; b < size; b += 2) {
-      if (b + 1 < size) addFourProducts(sums, block, { a, b });
-      else addLastColumn(sums, block, a);
-    }
-  }
-}
-
-/** Columns a, a + 1 against b, b + 1. For a = b one product falls below the diagonal, where it is not read. */
-function addFourProducts(
-  sums: Float64Array,
-  { values, rows, size }: RowBlock,
-  { a, b }: { a: number; b: number },
-): void {
-  const a0 = a * basisBlockRows;
-  const a1 = a0 + basisBlockRows;
-  const b0 = b * basisBlockRows;
-  const b1 = b0 + basisBlockRows;
-  let sum00 = 0;
-  let sum01 = 0;
-  let sum10 = 0;
-  let sum11 = 0;
-  for (let i = 0; i < rows; i++) {
-    const left0 = values[a0 + i]!;
-    const left1 = values[a1 + i]!;
-    const right0 = values[b0 + i]!;
-    const right1 = values[b1 + i]!;
-    sum00 += left0 * right0;
-    sum01 += left0 * right1;
-    sum10 += left1 * right0;
-    sum11 += left1 * right1;
-  }
-  const entry = a * size + b;
-  sums[entry]! += sum00;
-  sums[entry + 1]! += sum01;
-  sums[entry + size]! += sum10;
-  sums[entry + size + 1]! += sum11;
-}
-
-/** Columns a and a + 1 (where there is one) against the last of an odd number of columns. */
-function addLastColumn(sums: Float64Array, { values, rows, size }: RowBlock, a: number): void {
-  const last = (size - 1) * basisBlockRows;
-  for (let j = a; j < Math.min(a + 2, size); j++) {
-    const start = j * basisBlockRows;
-    let sum = 0;
-    for (let i = 0; i < rows; i++) sum += values[start + i]! * values[last + i]!;
-    sums[j * size + size - 1]! += sum;
-  }
+function multiplyBy(factors: Float64Array, space: Float64Array, at: number): void {
+  for (let i = 0; i < factors.length; i++) space[at + i]! *= factors[i]!;
 }
 
 /** The whole symmetric matrix from its upper half. */

@@ -1,5 +1,5 @@
 import { basisBlockRows } from "./basis.ts";
-import { addCrossProducts, mirrored } from "./crossProducts.ts";
+import { addCrossProducts } from "./crossProducts.ts";
 import type { SquareMatrix } from "./matrix.ts";
 import type { RowSource } from "./rowSource.ts";
 
@@ -26,7 +26,7 @@ export function movingWindowProducts(source: RowSource, positions: Float64Array,
     for (let j = 0; j < size; j++) runColumn({ ring, windows, moments }, j, count);
     addCrossProducts(sums, { values: windows.values, rows: count, size });
   }
-  return mirrored(sums, size);
+  return { size, values: sums };
 }
 
 /** Rows that have entered, kept until they have left: row i stands in slot i modulo `slots`; slot `slots` holds zeros. */

@@ -1,5 +1,7 @@
-import { type Basis, basisBlockRows, visitBasis } from "./basis.ts";
+import { type Basis, type BasisBlock, basisBlockRows, visitBasis } from "./basis.ts";
 import type { SquareMatrix } from "./matrix.ts";
+import { arena } from "./vector/arena.ts";
+import { place } from "./vector/place.ts";
 
 /**
  * The products q_a q_b, a <= b, of the columns of an orthonormal basis whose first column is the constant span the
@@ -11,15 +13,14 @@ const productIndex = (a: number, b: number): number => (b * (b + 1)) / 2 + a;
 
 /** The products as columns of n values, for designs small enough to hold them. */
 export function productColumns(basis: Basis): Float64Array<ArrayBuffer>[] {
-  const size = basis.columns.length;
   const rowCount = basis.columns[0]!.length;
-  const columns = Array.from({ length: productCount(size) }, () => new Float64Array(rowCount));
-  const block = blockOf(size);
-  visitBasis(basis, ({ values, first, rows }) => {
-    multiplyColumns(values, { ...block, rows, scale: rowCount });
+  const columns = Array.from({ length: productCount(basis.columns.length) }, () => new Float64Array(rowCount));
+  visitBasis(basis, (block) => {
+    const space = arena.numbers(spaceFor(basis.columns.length));
+    multiplyColumns(space, block, { size: basis.columns.length, products: 0, scale: rowCount });
     columns.forEach((column, index) => {
       const start = index * basisBlockRows;
-      column.set(block.products.subarray(start, start + rows), first);
+      column.set(space.subarray(start, start + block.rows), block.first);
     });
   });
   return columns;
@@ -35,119 +36,94 @@ export function productColumns(basis: Basis): Float64Array<ArrayBuffer>[] {
 export function productMoments(basis: Basis, y: Float64Array): SquareMatrix {
   const size = basis.columns.length;
   const count = productCount(size);
-  const block = blockOf(size);
-  const fourth = Array.from({ length: size }, (_, c) => new Float64Array(productCount(c + 1) * (size - c)));
-  const withY = new Float64Array(count + 1);
-  visitBasis(basis, ({ values, first, rows }) => {
-    multiplyColumns(values, { ...block, rows, scale: y.length });
-    block.products.set(y.subarray(first, first + rows), count * basisBlockRows);
-    for (let c = 0; c < size; c++) addFourthMoments(fourth[c]!, { ...block, rows, c });
-    for (let i = 0; i <= count; i++) withY[i]! += columnProduct(block.products, { i, j: count, rows });
+  const moments = new Float64Array(momentStart(size, size) + count + 1);
+  const products = moments.length + (moments.length % 2);
+  visitBasis(basis, (block) => {
+    const space = arena.numbers(products + spaceFor(size));
+    space.set(moments);
+    multiplyColumns(space, block, { size, products, scale: y.length });
+    place(y.subarray(block.first, block.first + block.rows), space, products + count * basisBlockRows);
+    addMoments({ size, products, rows: block.rows });
+    moments.set(space.subarray(0, moments.length));
   });
-  return assembled(fourth, withY);
+  return assembled(moments, size);
 }
+
+/** A column a product, one for y and, while they are formed, the block of the basis. */
+const spaceFor = (size: number): number => (productCount(size) + 1 + size) * basisBlockRows;
 
 interface ProductBlock {
   readonly size: number;
-  /** One column of basisBlockRows a product, and one more for y. */
-  readonly products: Float64Array;
+  /** Where the products stand in the arena. */
+  readonly products: number;
 }
-
-const blockOf = (size: number): ProductBlock => ({
-  size,
-  products: new Float64Array((productCount(size) + 1) * basisBlockRows),
-});
 
 /** Entries of Q are of the size 1 / sqrt(n): each product is multiplied by n. */
 function multiplyColumns(
-  values: Float64Array,
-  { size, products, rows, scale }: ProductBlock & { readonly rows: number; readonly scale: number },
+  space: Float64Array,
+  { values, rows }: BasisBlock,
+  { size, products, scale }: ProductBlock & { readonly scale: number },
 ): void {
+  const factors = products + (productCount(size) + 1) * basisBlockRows;
+  const root = Math.sqrt(scale);
+  for (let a = 0; a < size; a++) {
+    const start = a * basisBlockRows;
+    place(
+      values.subarray(start, start + rows).map((value) => value * root),
+      space,
+      factors + start,
+    );
+  }
   for (let b = 0; b < size; b++) {
     for (let a = 0; a <= b; a++) {
-      const [left, right, to] = [a * basisBlockRows, b * basisBlockRows, productIndex(a, b) * basisBlockRows];
-      for (let i = 0; i < rows; i++) products[to + i] = values[left + i]! * values[right + i]! * scale;
+      const [x, y] = [factors + a * basisBlockRows, factors + b * basisBlockRows];
+      arena.kernels.multiply({ x, y, product: products + productIndex(a, b) * basisBlockRows, rows });
     }
   }
 }
 
-interface Pass extends ProductBlock {
-  readonly rows: number;
-  readonly c: number;
+/** Where the moments with third index c begin: those of (a, b) against (c, d), d by d, and (a, b) within each. */
+function momentStart(size: number, c: number): number {
+  let start = 0;
+  for (let i = 0; i < c; i++) start += productCount(i + 1) * (size - i);
+  return start;
 }
 
-/** Moments of four indices a <= b <= c <= d: the products (a, b) against the products (c, d), two against two at a time. */
-function addFourthMoments(moments: Float64Array, pass: Pass): void {
-  const { size, c } = pass;
-  const left = productCount(c + 1);
-  for (let d = c; d < size; d += 2) {
-    const paired = d + 1 < size;
-    const right = productIndex(c, d) * basisBlockRows;
-    const next = paired ? productIndex(c, d + 1) * basisBlockRows : right;
-    addAgainstTwo(moments, pass, { left, right, next, entry: (d - c) * left, paired });
-  }
-}
-
-/** Two columns on the right, against which all on the left are taken. */
-interface Right {
-  readonly left: number;
-  readonly right: number;
-  readonly next: number;
-  readonly entry: number;
-  readonly paired: boolean;
-}
-
-function addAgainstTwo(
-  moments: Float64Array,
-  { products, rows }: Pass,
-  { left, right, next, entry, paired }: Right,
-): void {
-  for (let l = 0; l < left; l += 2) {
-    const x0 = l * basisBlockRows;
-    const x1 = l + 1 < left ? x0 + basisBlockRows : x0;
-    let s00 = 0;
-    let s10 = 0;
-    let s01 = 0;
-    let s11 = 0;
-    for (let i = 0; i < rows; i++) {
-      const p0 = products[x0 + i]!;
-      const p1 = products[x1 + i]!;
-      const r0 = products[right + i]!;
-      const r1 = products[next + i]!;
-      s00 += p0 * r0;
-      s10 += p1 * r0;
-      s01 += p0 * r1;
-      s11 += p1 * r1;
+/** Moments of four indices a <= b <= c <= d: the products (a, b) against the products (c, d), two of these at a time. */
+function addMoments({ size, products, rows }: ProductBlock & { readonly rows: number }): void {
+  const stride = basisBlockRows;
+  const columnAt = (index: number): number => products + index * stride;
+  let sums = 0;
+  for (let c = 0; c < size; c++) {
+    const count = productCount(c + 1);
+    for (let d = c; d < size; d += 2) {
+      const right = columnAt(productIndex(c, d));
+      const next = d + 1 < size ? columnAt(productIndex(c, d + 1)) : right;
+      arena.kernels.addProducts({ left: products, count, right, next, rows, stride, sums, nextSums: sums + count });
+      sums += next === right ? count : 2 * count;
     }
-    moments[entry + l]! += s00;
-    if (paired) moments[entry + left + l]! += s01;
-    if (x1 === x0) continue;
-    moments[entry + l + 1]! += s10;
-    if (paired) moments[entry + left + l + 1]! += s11;
   }
+  const y = columnAt(productCount(size));
+  const count = productCount(size) + 1;
+  arena.kernels.addProducts({ left: products, count, right: y, next: y, rows, stride, sums, nextSums: sums });
 }
 
-function columnProduct(products: Float64Array, { i, j, rows }: { i: number; j: number; rows: number }): number {
-  const [left, right] = [i * basisBlockRows, j * basisBlockRows];
-  let sum = 0;
-  for (let t = 0; t < rows; t++) sum += products[left + t]! * products[right + t]!;
-  return sum;
-}
-
-function assembled(fourth: readonly Float64Array[], withY: Float64Array): SquareMatrix {
-  const columns = fourth.length;
-  const size = withY.length;
+function assembled(moments: Float64Array, columns: number): SquareMatrix {
+  const count = productCount(columns);
+  const size = count + 1;
   const values = new Float64Array(size * size);
+  const starts = Array.from({ length: columns }, (_, c) => momentStart(columns, c));
   const pairs = Array.from({ length: columns }, (_, b) =>
     Array.from({ length: b + 1 }, (__, a) => [a, b] as const),
   ).flat();
   pairs.forEach((one, i) => {
     pairs.slice(0, i + 1).forEach((other, j) => {
       const [a, b, c, d] = [...one, ...other].sort((x, y) => x - y) as [number, number, number, number];
-      const entry = (d - c) * productCount(c + 1) + productIndex(a, b);
-      values[i * size + j] = values[j * size + i] = fourth[c]![entry]!;
+      const entry = starts[c]! + (d - c) * productCount(c + 1) + productIndex(a, b);
+      values[i * size + j] = values[j * size + i] = moments[entry]!;
     });
   });
-  withY.forEach((value, i) => (values[i * size + size - 1] = values[(size - 1) * size + i] = value));
+  const withY = moments.subarray(moments.length - size);
+  withY.forEach((value, i) => (values[i * size + count] = values[count * size + i] = value));
   return { size, values };
 }

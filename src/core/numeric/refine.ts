@@ -1,5 +1,7 @@
-import { addInnerProduct, settle, subtractMultiple, wide, type Wide } from "./doubleDouble.ts";
+import { settle, type Wide } from "./wide.ts";
 import type { SquareMatrix } from "./matrix.ts";
+import { arena } from "./vector/arena.ts";
+import { place } from "./vector/place.ts";
 import { solveTransposedTriangle, solveTriangle } from "./triangle.ts";
 
 /** Rows taken at a time. */
@@ -35,7 +37,7 @@ export function refine(equations: Equations, start: Float64Array): Refined {
     const { gradient } = residualPass(equations, b, "with gradient");
     const change = solveTriangle(triangle, solveTransposedTriangle(triangle, gradient));
     change.forEach((value, j) => (b.low[j]! += value));
-    settle(b, start.length);
+    settle(b);
     if (largestChange(change, b.high) * condition * Number.EPSILON * 10 < Number.EPSILON / 10) break;
   }
   const { residuals, rss } = residualPass(equations, b, "residuals");
@@ -57,26 +59,55 @@ interface Pass {
   readonly rss: number;
 }
 
+/** Places in the arena: y - X b in two words, the sums of two words each, and the columns. */
+interface Places {
+  readonly high: number;
+  readonly low: number;
+  readonly sums: number;
+  readonly columns: number;
+}
+
+const placesFor = (count: number): Places => ({
+  high: 0,
+  low: blockRows,
+  sums: 2 * blockRows,
+  columns: 2 * blockRows + 2 * (count + 1),
+});
+
 function residualPass({ columns, y }: Equations, b: Wide, wanted: "with gradient" | "residuals"): Pass {
   const residuals = new Float64Array(y.length);
-  const gradient = wide(columns.length);
-  const squares = wide(1);
-  const r = wide(blockRows);
+  const at = placesFor(columns.length);
+  const space = arena.numbers(at.columns + columns.length * blockRows);
+  space.fill(0, at.sums, at.columns);
   for (let first = 0; first < y.length; first += blockRows) {
     const last = Math.min(first + blockRows, y.length);
-    r.high.set(y.subarray(first, last));
-    r.low.fill(0);
-    columns.forEach((column, j) =>
-      subtractMultiple(r, column.subarray(first, last), { high: b.high[j]!, low: b.low[j]! }),
-    );
-    settle(r, last - first);
-    residuals.set(r.high.subarray(0, last - first), first);
-    if (wanted === "with gradient") {
-      columns.forEach((column, j) => addInnerProduct(gradient, j, { x: column.subarray(first, last), r }));
-    } else {
-      addInnerProduct(squares, 0, { x: r.high.subarray(0, last - first), r });
+    place(y.subarray(first, last), space, at.high);
+    columns.forEach((column, j) => {
+      place(column.subarray(first, last), space, at.columns + j * blockRows);
+    });
+    residualsInPlace(space, at, { b, rows: last - first });
+    residuals.set(space.subarray(at.high, at.high + last - first), first);
+    const { high, low } = at;
+    const x = (j: number): number => (wanted === "residuals" ? high : at.columns + j * blockRows);
+    const count = wanted === "residuals" ? 1 : columns.length;
+    for (let j = 0; j < count; j++) {
+      arena.kernels.addInnerProduct({ sum: at.sums + 2 * j, x: x(j), high, low, rows: last - first });
     }
   }
-  settle(gradient, columns.length);
-  return { gradient: Float64Array.from(gradient.high), residuals, rss: squares.high[0]! + squares.low[0]! };
+  const sums = columns.map((_, j) => space[at.sums + 2 * j]! + space[at.sums + 2 * j + 1]!);
+  return { gradient: Float64Array.from(sums), residuals, rss: sums[0] ?? 0 };
+}
+
+/** Takes X b from y and folds what it can of the low words into the high ones. */
+function residualsInPlace(
+  space: Float64Array,
+  { high, low, columns }: Places,
+  { b, rows }: { readonly b: Wide; readonly rows: number },
+): void {
+  space.fill(0, low, low + blockRows);
+  b.high.forEach((factor, j) => {
+    const x = columns + j * blockRows;
+    arena.kernels.subtractMultiple({ high, low, x, rows, factor, factorLow: b.low[j]! });
+  });
+  settle({ high: space.subarray(high, high + rows), low: space.subarray(low, low + rows) });
 }

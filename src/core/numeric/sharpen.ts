@@ -1,6 +1,8 @@
-import { addInnerProduct, settle, wide, type Wide } from "./doubleDouble.ts";
 import type { SquareMatrix } from "./matrix.ts";
 import { solveTransposedTriangle } from "./triangle.ts";
+import { arena } from "./vector/arena.ts";
+import { place } from "./vector/place.ts";
+import { settle, type Wide, wide } from "./wide.ts";
 
 const blockRows = 512;
 
@@ -25,34 +27,49 @@ export function sharpen(columns: readonly Float64Array[], triangle: SquareMatrix
 
 /** X'X - R'R, each to 32 digits before they are subtracted. */
 function crossProductError(columns: readonly Float64Array[], { size, values }: SquareMatrix): Float64Array {
-  const sums = wide(size * size);
-  addCrossProducts(sums, columns);
+  const ofColumns = wideCrossProducts(columns);
   const rowsOfTriangle = Array.from({ length: size }, (_, j) =>
     Float64Array.from({ length: size }, (_, i) => values[i * size + j]!),
   );
-  const ofTriangle = wide(size * size);
-  addCrossProducts(ofTriangle, rowsOfTriangle);
-  return sums.high.map((high, index) => high - ofTriangle.high[index]! + (sums.low[index]! - ofTriangle.low[index]!));
+  const ofTriangle = wideCrossProducts(rowsOfTriangle);
+  return ofColumns.high.map(
+    (high, index) => high - ofTriangle.high[index]! + (ofColumns.low[index]! - ofTriangle.low[index]!),
+  );
 }
 
-function addCrossProducts(sums: Wide, columns: readonly Float64Array[]): void {
-  const rowCount = columns[0]!.length;
+/** X'X, p by p, in two words. */
+function wideCrossProducts(columns: readonly Float64Array[]): Wide {
   const size = columns.length;
-  const r = wide(blockRows);
+  const rowCount = columns[0]!.length;
+  const [low, sums] = [0, blockRows];
+  const block = sums + 2 * size * size;
+  const space = arena.numbers(block + size * blockRows);
+  space.fill(0, low, block);
   for (let first = 0; first < rowCount; first += blockRows) {
-    const last = Math.min(first + blockRows, rowCount);
+    const rows = Math.min(blockRows, rowCount - first);
     columns.forEach((column, j) => {
-      r.high.set(column.subarray(first, last));
-      for (let i = 0; i <= j; i++) addInnerProduct(sums, i * size + j, { x: columns[i]!.subarray(first, last), r });
+      const high = block + j * blockRows;
+      place(column.subarray(first, first + rows), space, high);
+      for (let i = 0; i <= j; i++) {
+        const x = block + i * blockRows;
+        arena.kernels.addInnerProduct({ sum: sums + 2 * (i * size + j), x, high, low, rows });
+      }
     });
   }
-  settle(sums, size * size);
+  return bothHalves(space.subarray(sums, block), size);
+}
+
+function bothHalves(sums: Float64Array, size: number): Wide {
+  const whole = wide(size * size);
   for (let i = 0; i < size; i++) {
-    for (let j = 0; j < i; j++) {
-      sums.high[i * size + j] = sums.high[j * size + i]!;
-      sums.low[i * size + j] = sums.low[j * size + i]!;
+    for (let j = 0; j < size; j++) {
+      const from = 2 * (Math.min(i, j) * size + Math.max(i, j));
+      whole.high[i * size + j] = sums[from]!;
+      whole.low[i * size + j] = sums[from + 1]!;
     }
   }
+  settle(whole);
+  return whole;
 }
 
 /** R^-T M R^-1 for a symmetric M. */
