@@ -1,4 +1,5 @@
 import type { BookData, SheetData } from "../book/bookData.ts";
+import { functionsSheet } from "./functionsSheet.ts";
 import { handover } from "./handover.ts";
 import { columnSheet } from "./looks.ts";
 import { monthlyRepairs, type Month } from "./months.ts";
@@ -8,13 +9,13 @@ import { courierWeeks } from "./weeks.ts";
 
 /**
  * The workbook of Kestrel & Vane, a chain of bicycle-repair shops that does not exist: every figure is drawn
- * from seeded random numbers. Its sheets lie in the four cases of spread and follow-on; the last one is a
- * regression to review.
+ * from seeded random numbers. Its sheets lie in the four cases of spread and follow-on; then come a
+ * regression to review and the worksheet functions, each once.
  */
 export function demoBook(): BookData {
   const months = monthlyRepairs();
   return {
-    sheets: [monthsSheet(months), shopsSheet(), partsSheet(), weeksSheet(), handover(months)],
+    sheets: [monthsSheet(months), shopsSheet(), partsSheet(), weeksSheet(), handover(months), functionsSheet()],
     names: [{ name: "Purchase_lots", refersTo: "Parts!$A$4:$D$64" }],
     active: 0,
   };

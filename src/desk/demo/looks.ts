@@ -8,6 +8,7 @@ export const looks = {
   note: { italic: true, color: "#5b6770" },
   heading: { bold: true, fill: "#e3eef1", lineBelow: ink, horizontal: "right" },
   firstHeading: { bold: true, fill: "#e3eef1", lineBelow: ink },
+  input: { fill: "#fdf3d8" },
 } as const satisfies Record<string, CellStyle>;
 
 export interface DemoColumn {
