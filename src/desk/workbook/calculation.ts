@@ -77,7 +77,7 @@ function follows(progress: Progress, info: Readonly<ICommandInfo>, options?: IEx
       progress.waiting = [];
       break;
     case SetFormulaCalculationNotificationMutation.id:
-      heed(progress, (info.params ?? {}));
+      heed(progress, info.params ?? {});
       break;
     default: {
       const dirt = progress.book.grid.injector.get(IActiveDirtyManagerService);

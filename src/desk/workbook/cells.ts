@@ -34,16 +34,27 @@ export function cellsOf(book: Book, sheet: string): SheetCells {
 function isBlank(cell: ICellData | null | undefined): boolean {
   if (cell === undefined || cell === null) return true;
   if (isFormula(cell)) return false;
-  const value = cell.v ?? null;
+  const value = contentOf(cell);
   return value === null || (value === "" && !isForcedText(cell));
+}
+
+/** Text that is pasted with its looks is kept as a little document, which ends in a line break. */
+function contentOf({ v, p }: ICellData): string | number | boolean | null {
+  return v ?? p?.body?.dataStream.replace(/[\r\n]+$/, "") ?? null;
 }
 
 export function cellAt(cells: SheetCells, row: number, column: number): ICellData | undefined {
   const stored = cells.stored[row]?.[column] ?? undefined;
-  if (!isBlank(stored)) return stored;
-  const spilled = cells.spilled[row]?.[column] ?? undefined;
-  if (spilled === undefined || isBlank(spilled)) return stored;
-  return stored?.s === undefined ? spilled : { ...spilled, s: stored.s };
+  return isBlank(stored) ? resultOver(stored, cells.spilled[row]?.[column]) : stored;
+}
+
+/** What a formula elsewhere spills into an empty cell, in the cell's own looks. */
+function resultOver(stored: ICellData | undefined, spilled: Nullable<ICellData>): ICellData | undefined {
+  const value = spilled?.v ?? null;
+  if (value === null) return stored;
+  // An empty text that a formula spills is a text.
+  const t = value === "" ? CellValueType.FORCE_STRING : (spilled?.t ?? null);
+  return { v: value, t, ...(stored?.s === undefined ? {} : { s: stored.s }) };
 }
 
 export type CellValue = number | string | boolean;
@@ -69,8 +80,8 @@ export function formulaAt(book: Book, sheet: string, at: { row: number; column: 
 }
 
 export function valueOf(cell: ICellData | undefined): CellValue {
-  const value = cell?.v;
-  if (cell === undefined || value === undefined || value === null) return "";
+  const value = cell === undefined ? null : contentOf(cell);
+  if (cell === undefined || value === null) return "";
   if (cell.t === CellValueType.BOOLEAN) return value === 1 || value === true || value === "1" || value === "TRUE";
   return value;
 }

@@ -2,7 +2,7 @@ import { afterAll, beforeAll, beforeEach, describe, expect, it } from "vitest";
 import type { NodeDesk } from "../../../src/desk/client/openDesk.ts";
 import type { FunctionMetadata, FunctionsMetadata, ParameterMetadata } from "../../../src/desk/workbook/metadata.ts";
 import { bookOf, sheetOf } from "../../support/deskBook.ts";
-import { testDesk } from "../../support/desk.ts";
+import { load, testDesk } from "../../support/desk.ts";
 
 const matrix: ParameterMetadata = { name: "data", type: "any", dimensionality: "matrix" };
 const scalar = (type: string): ParameterMetadata => ({ name: "value", type, dimensionality: "scalar", optional: true });
@@ -195,6 +195,7 @@ describe("the result of a function", () => {
       [true, "#N/A", ""],
     ]);
     expect(desk.error("Out!D6")).toBe("#N/A");
+    expect(await load(desk, "Out!E6:F6", "valueTypes")).toEqual([["String", "Empty"]]);
   });
 
   it("is #SPILL! while something stands in the way", async () => {
