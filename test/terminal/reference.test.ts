@@ -25,6 +25,7 @@ interface Reference {
   readonly ratio: Readonly<Record<"classical" | "HC3", Readonly<Record<"t" | "p_t" | "p_normal", readonly number[]>>>>;
   readonly interval95: Readonly<Record<"classical" | "HC3", Readonly<Record<"low_t" | "high_t", readonly number[]>>>>;
   readonly newey_west?: readonly { lag: number; se: readonly number[]; se_adjusted: readonly number[] }[];
+  readonly influence_top5_by_cook: { readonly row: readonly number[]; readonly cook: readonly number[] };
   readonly tests: Readonly<Record<string, { statistic: number; p: number; df: number | readonly number[] }>>;
 }
 
@@ -44,8 +45,10 @@ interface Printed {
   readonly tests: {
     readonly koenker: Figure;
     readonly white: Figure & { readonly form: string };
+    readonly chow?: Figure;
     readonly "breusch-godfrey"?: readonly { order: number; chiSquare: Figure; f: Figure }[];
   };
+  readonly guards: { readonly rows: readonly { row: number; cell: string; cook: number }[] };
   readonly inference: Readonly<Record<"classical" | "white", Readonly<Record<string, readonly number[]>>>>;
 }
 
@@ -159,5 +162,20 @@ describe.each(["longley", "investment", "orange-juice-6-lags"])("%s through time
       expectAll([f.statistic, f.pValue], [expectedF.statistic, expectedF.p], `F ${order}`, Math.min(digits, 9.5));
     }
     expect(orders.some(({ order }) => order === 1)).toBe(true);
+  });
+
+  it("has R's Chow test at half of the rows, and knows influential rows by their cells", async () => {
+    const found = await printed(data, null);
+    const expected = data.tests["chow_at_half"]!;
+    expectAll(
+      [found.tests.chow!.statistic, found.tests.chow!.pValue],
+      [expected.statistic, expected.p],
+      "Chow",
+      digits - 1,
+    );
+    const [first] = found.guards.rows;
+    expect(first!.row).toBe(data.influence_top5_by_cook.row[0]! + 1);
+    expect(first!.cell).toBe(`data!A${first!.row}`);
+    expectAll([first!.cook], [data.influence_top5_by_cook.cook[0]!], "Cook", digits - 1);
   });
 });
