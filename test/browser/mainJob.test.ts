@@ -69,6 +69,25 @@ describe("from cells to a result sheet", { timeout: 180_000 }, () => {
     expect(await numbersOn(page)).not.toEqual(after);
   });
 
+  it("the charts stand over the cells beside the page and hide none of its text", async () => {
+    const { page, pane } = desk;
+    await page.setViewportSize({ width: 2600, height: 1000 });
+    await pane.getByLabel("Or type an address").fill("Months!A4:E100");
+    await pane.getByRole("button", { name: "Read it" }).click();
+    await pane.getByRole("button", { name: "Get the answer" }).click();
+    await pane.getByRole("button", { name: "Write to the workbook" }).click();
+    const chart = page.getByRole("img", { name: "Chart: Residuals over fitted values" });
+    await chart.waitFor();
+    const corner = await atSheet(page, (d) => {
+      const cells = d.book.grid.api.getActiveWorkbook()!.getActiveSheet();
+      const { x, y } = (cells.getRange("M15") as unknown as { getCellRect: () => DOMRect }).getCellRect();
+      return { x, y };
+    });
+    const drawn = (await chart.boundingBox())!;
+    expect(Math.abs(drawn.x - corner.x)).toBeLessThan(edge);
+    expect(Math.abs(drawn.y - corner.y)).toBeLessThan(edge);
+  });
+
   it("by keyboard alone", async () => {
     const { page, pane } = desk;
     await page.getByRole("button", { name: "To the pane" }).focus();
@@ -96,6 +115,9 @@ describe("from cells to a result sheet", { timeout: 180_000 }, () => {
     expect(await numbersOn(page)).not.toEqual(before);
   });
 });
+
+/** In pixels: the grid frames what floats over it. The headers, which a wrong place is off by, are 20 and 46. */
+const edge = 8;
 
 const mostStops = 60;
 

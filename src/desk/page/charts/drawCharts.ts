@@ -63,16 +63,18 @@ function putUp(book: Book, floating: Map<string, Floating>, { key, chart }: Want
   const before = floating.get(key);
   if (before?.place === place) return;
   before?.dispose();
-  const [startX, endX, startY, endY] = [left, left + width, top, top + height].map((points) => points * pixelsPerPoint);
-  const put = book.grid.api
-    .getActiveWorkbook()
-    ?.getActiveSheet()
-    .addFloatDomToPosition({
-      componentKey: component,
-      allowTransform: false,
-      initPosition: { startX: startX!, endX: endX!, startY: startY!, endY: endY! },
-      data: { id: key },
-    });
+  const sheet = book.grid.api.getActiveWorkbook()?.getActiveSheet();
+  if (!sheet) return;
+  // The grid counts from the corner of its headers, Excel from the corner of cell A1.
+  const { rowHeader, columnHeader } = sheet.getSheet().getConfig();
+  const [startX, endX] = [left, left + width].map((points) => rowHeader.width + points * pixelsPerPoint);
+  const [startY, endY] = [top, top + height].map((points) => columnHeader.height + points * pixelsPerPoint);
+  const put = sheet.addFloatDomToPosition({
+    componentKey: component,
+    allowTransform: false,
+    initPosition: { startX: startX!, endX: endX!, startY: startY!, endY: endY! },
+    data: { id: key },
+  });
   if (put) floating.set(key, { dispose: put.dispose, place });
 }
 
