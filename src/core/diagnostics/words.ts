@@ -86,14 +86,14 @@ export const testWords: Readonly<Record<TestName, TestWords>> = {
   reset: {
     title: "RESET test",
     question: "Is a curve missing: do the square and cube of the fitted value explain what is left?",
-    rejected: "The straight-line form misses a curve: try a logarithm, a square or another driver.",
+    rejected: "A curve seems to be missing: try a logarithm, a square or another driver.",
     notRejected: "No missing curve shows.",
     source: "Ramsey 1969",
   },
   "reset-robust": {
     title: "RESET test with the standard errors in force",
     question: "Is a curve missing, whatever the spread and follow-on of the errors?",
-    rejected: "The straight-line form misses a curve: try a logarithm, a square or another driver.",
+    rejected: "A curve seems to be missing: try a logarithm, a square or another driver.",
     notRejected: "No missing curve shows.",
     source: "Ramsey 1969, as a Wald test with a robust covariance",
   },
@@ -107,9 +107,10 @@ export const testWords: Readonly<Record<TestName, TestWords>> = {
   },
   chow: {
     title: "Chow test",
-    question: "Are the coefficients the same before and after the row named?",
-    rejected: "The coefficients differ before and after this row: one set of them does not describe the whole period.",
-    notRejected: "No difference before and after this row shows.",
+    question: "Are the coefficients the same in the first half of the period and in the second?",
+    rejected:
+      "The coefficients differ between the halves of the period: one set of them does not describe the whole of it.",
+    notRejected: "No difference between the halves of the period shows.",
     source: "Chow 1960",
   },
   "largest-chow": {
