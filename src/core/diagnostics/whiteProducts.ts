@@ -2,9 +2,10 @@ import type { Fit } from "../fit/fit.ts";
 import type { Basis } from "../numeric/basis.ts";
 import { explain, type Explained } from "../numeric/explain.ts";
 import { explainFromMoments } from "../numeric/explainFromMoments.ts";
-import { columnLengths, dependenceTolerance } from "../numeric/leastSquares.ts";
+import { dependenceTolerance } from "../numeric/leastSquares.ts";
 import { productColumns, productCount, productMoments } from "../numeric/productMoments.ts";
 import { mean, sumOfSquares } from "../numeric/sums.ts";
+import { columnLengths } from "../numeric/triangle.ts";
 import { triangularFactor } from "../numeric/triangularFactor.ts";
 import { constantAndDrivers, relativeSquares } from "./auxiliary.ts";
 

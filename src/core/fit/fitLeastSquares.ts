@@ -3,7 +3,8 @@ import { squaredRowLengths } from "../numeric/crossProducts.ts";
 import { type Dependency, type Solution, leastSquares } from "../numeric/leastSquares.ts";
 import type { SquareMatrix } from "../numeric/matrix.ts";
 import { timesTransposed } from "../numeric/smallMatrix.ts";
-import { extremes, mean, sumOfSquares } from "../numeric/sums.ts";
+import { mean, sumOfSquares } from "../numeric/sums.ts";
+import { columnLengths } from "../numeric/triangle.ts";
 import type { Problem } from "../problem/problem.ts";
 import { type Result, failure, success } from "../problem/result.ts";
 import type { Fit } from "./fit.ts";
@@ -31,10 +32,10 @@ export function fitLeastSquares(design: Design): Result<Fit> {
 function unfit({ terms, outcome, hasConstant, rowCount, leftOutCount, sourceRows }: Design): Problem | null {
   const needed = terms.length + 1;
   if (rowCount < needed) return { code: "too-few-rows", rows: rowCount, needed, leftOut: leftOutCount };
-  if (varies(outcome.values) === "never") return { code: "constant-outcome", column: outcome.name };
+  if (!varies(outcome.values)) return { code: "constant-outcome", column: outcome.name };
   const tiny = tooSmall([{ name: outcome.name, values: outcome.values }, ...terms], sourceRows);
   if (tiny !== null) return tiny;
-  const idle = terms.find(({ meaning, values }) => meaning.kind !== "constant" && varies(values) === "never");
+  const idle = terms.find(({ meaning, values }) => meaning.kind !== "constant" && !varies(values));
   return hasConstant && idle !== undefined ? { code: "constant-column", column: idle.name } : null;
 }
 
@@ -42,7 +43,9 @@ function unfit({ terms, outcome, hasConstant, rowCount, leftOutCount, sourceRows
 const smallest = 1e-140;
 
 function tooSmall(columns: readonly Pick<Term, "name" | "values">[], sourceRows: Int32Array): Problem | null {
-  const column = columns.find(({ values }) => largest(values) > 0 && largest(values) < smallest);
+  const column = columns.find(
+    ({ values }) => values.every((value) => Math.abs(value) < smallest) && values.some((value) => value !== 0),
+  );
   if (column === undefined) return null;
   const row = column.values.findIndex((value) => value !== 0);
   return {
@@ -53,10 +56,7 @@ function tooSmall(columns: readonly Pick<Term, "name" | "values">[], sourceRows:
   };
 }
 
-function varies(values: Float64Array): "never" | "somewhere" {
-  const { least, greatest } = extremes(values);
-  return least === greatest ? "never" : "somewhere";
-}
+const varies = (values: Float64Array): boolean => values.some((value) => value !== values[0]);
 
 const dependentColumns = (terms: readonly Term[], { column, madeOf }: Dependency): Problem => ({
   code: "dependent-columns",
@@ -66,21 +66,15 @@ const dependentColumns = (terms: readonly Term[], { column, madeOf }: Dependency
 
 /**
  * Whether the residuals are no more than the rounding of cells and formulas: their root mean square is below
- * `roundingShare` of the largest number that was added up.
+ * `roundingShare` of that of the largest numbers that were added up.
  */
-function reproduces({ terms, outcome, rowCount }: Design, { coefficients, rss }: Solution): boolean {
-  const sizes = terms.map(({ values }, j) => largest(values) * Math.abs(coefficients[j]!));
-  const scale = Math.max(largest(outcome.values), ...sizes);
-  return Math.sqrt(rss / rowCount) <= roundingShare * scale;
+function reproduces({ outcome }: Design, { coefficients, triangle, rss }: Solution): boolean {
+  const lengths = columnLengths(triangle).map((length, j) => length * Math.abs(coefficients[j]!));
+  return Math.sqrt(rss) <= roundingShare * Math.max(Math.sqrt(sumOfSquares(outcome.values)), ...lengths);
 }
 
 /** Sixteen units in the last place: a sheet keeps 15 to 17 digits, and a formula of a few terms loses one or two bits. */
 const roundingShare = 16 * Number.EPSILON;
-
-function largest(values: Float64Array): number {
-  const { least, greatest } = extremes(values);
-  return Math.max(-least, greatest);
-}
 
 function fitFrom(design: Design, solution: Solution): Fit {
   const { coefficients, residuals, triangle, inverseTriangle, rss } = solution;

@@ -66,10 +66,12 @@ export function squaredRowLengths(basis: Basis): Float64Array<ArrayBuffer> {
   const size = basis.columns.length;
   const lengths = new Float64Array(basis.columns[0]?.length ?? 0);
   visitBasis(basis, ({ values, first, rows }) => {
-    for (let j = 0; j < size; j++) {
-      const start = j * basisBlockRows;
-      for (let i = 0; i < rows; i++) lengths[first + i]! += values[start + i]! * values[start + i]!;
-    }
+    const sums = size * basisBlockRows;
+    const space = arena.numbers(sums + basisBlockRows);
+    space.set(values);
+    space.fill(0, sums, sums + basisBlockRows);
+    arena.kernels.addSquares({ block: 0, size, rows, stride: basisBlockRows, sums });
+    lengths.set(space.subarray(sums, sums + rows), first);
   });
   return lengths;
 }

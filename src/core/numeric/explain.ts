@@ -1,5 +1,6 @@
 import type { SquareMatrix } from "./matrix.ts";
-import { columnLengths, dependenceTolerance } from "./leastSquares.ts";
+import { dependenceTolerance } from "./leastSquares.ts";
+import { columnLengths } from "./triangle.ts";
 import { triangularFactor } from "./triangularFactor.ts";
 
 /** How much of y's sum of squares some columns explain. */

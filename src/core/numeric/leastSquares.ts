@@ -1,7 +1,7 @@
 import type { SquareMatrix } from "./matrix.ts";
 import { refine } from "./refine.ts";
 import { sharpen } from "./sharpen.ts";
-import { invertTriangle, leading, solveTriangle } from "./triangle.ts";
+import { columnLengths, invertTriangle, leading, solveTriangle } from "./triangle.ts";
 import { triangularFactor } from "./triangularFactor.ts";
 
 /** The least squares solution of y on the columns X. */
@@ -58,13 +58,6 @@ export function leastSquares(columns: readonly Float64Array[], y: Float64Array):
 
 const lastColumn = ({ size, values }: SquareMatrix): Float64Array =>
   Float64Array.from({ length: size - 1 }, (_, i) => values[i * size + size - 1]!);
-
-/** The lengths of the columns of X, from its triangle. */
-export function columnLengths({ size, values }: SquareMatrix): Float64Array<ArrayBuffer> {
-  return Float64Array.from({ length: size }, (_, j) =>
-    Math.hypot(...Array.from({ length: j + 1 }, (_, i) => values[i * size + j]!)),
-  );
-}
 
 function firstDependency(triangle: SquareMatrix): Dependency | null {
   const { size, values } = triangle;

@@ -43,3 +43,10 @@ export function leading({ size, values }: SquareMatrix, count: number): SquareMa
   for (let i = 0; i < count; i++) part.set(values.subarray(i * size, i * size + count), i * count);
   return { size: count, values: part };
 }
+
+/** The lengths of the columns of X, from its triangle. */
+export function columnLengths({ size, values }: SquareMatrix): Float64Array<ArrayBuffer> {
+  return Float64Array.from({ length: size }, (_, j) =>
+    Math.hypot(...Array.from({ length: j + 1 }, (_, i) => values[i * size + j]!)),
+  );
+}

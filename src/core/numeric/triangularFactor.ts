@@ -1,5 +1,6 @@
 import type { SquareMatrix } from "./matrix.ts";
 import { extremes } from "./sums.ts";
+import { columnLengths } from "./triangle.ts";
 import { arena } from "./vector/arena.ts";
 import { place } from "./vector/place.ts";
 
@@ -17,38 +18,40 @@ const blockRows = 512;
  *   Comput. 34, A206-A239.
  */
 export function triangularFactor(columns: readonly Float64Array[]): SquareMatrix {
+  const plain = factorOf(columns, new Float64Array(columns.length).fill(1));
+  const sound = columnLengths(plain).every((length, j) =>
+    length === 0 ? columns[j]!.every((value) => value === 0) : length > 1 / moderate && length < moderate,
+  );
+  if (sound) return plain;
+  return factorOf(columns, Float64Array.from(columns, scaleOf));
+}
+
+/** Columns of a length within these bounds can be squared and summed without leaving the range of doubles. */
+const moderate = 2 ** 400;
+
+function factorOf(columns: readonly Float64Array[], scales: Float64Array): SquareMatrix {
   const size = columns.length;
   const rowCount = columns[0]?.length ?? 0;
-  const scales = Float64Array.from(columns, scaleOf);
-  const triangle = new Float64Array(size * size);
   const block = even(size * size);
   const values = arena.numbers(block + size * blockRows);
-  values.fill(0, 0, triangle.length);
+  values.fill(0, 0, block);
   for (let first = 0; first < rowCount; first += blockRows) {
     const rows = Math.min(blockRows, rowCount - first);
     columns.forEach((column, j) => {
-      placeScaled(column.subarray(first, first + rows), scales[j]!, { values, at: block + j * blockRows });
+      const part = column.subarray(first, first + rows);
+      place(scales[j] === 1 ? part : part.map((value) => value * scales[j]!), values, block + j * blockRows);
     });
     arena.kernels.reflectRows({ triangle: 0, block, size, rows, stride: blockRows });
   }
-  triangle.set(values.subarray(0, triangle.length));
-  return { size, values: triangle.map((value, index) => value / scales[index % size]!) };
+  return { size, values: values.slice(0, size * size).map((value, index) => value / scales[index % size]!) };
 }
 
-/** Places in the arena are even. */
+/** Columns in the arena begin at even places. */
 const even = (length: number): number => length + (length % 2);
 
-/** Numbers of a size within these bounds can be squared and summed over any sheet. */
-const moderate = 2 ** 300;
-
-/** 1, or the power of two that brings the largest entry of a column of extreme size to between 1 and 2. */
+/** The power of two that brings the largest entry to between 1 and 2; 1 for a column of zeros. */
 function scaleOf(column: Float64Array): number {
   const { least, greatest } = extremes(column);
   const largest = Math.max(-least, greatest);
-  const extreme = largest > moderate || (largest > 0 && largest < 1 / moderate);
-  return extreme ? Math.pow(2, -Math.floor(Math.log2(largest))) : 1;
-}
-
-function placeScaled(column: Float64Array, scale: number, { values, at }: { values: Float64Array; at: number }): void {
-  place(scale === 1 ? column : column.map((value) => value * scale), values, at);
+  return largest === 0 ? 1 : Math.pow(2, -Math.floor(Math.log2(largest)));
 }

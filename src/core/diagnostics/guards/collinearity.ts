@@ -1,5 +1,5 @@
 import type { Fit } from "../../fit/fit.ts";
-import { columnLengths } from "../../numeric/leastSquares.ts";
+import { columnLengths } from "../../numeric/triangle.ts";
 import { type SingularValues, diagonal, singularValues } from "../../numeric/smallMatrix.ts";
 import { mean, sumOfSquares } from "../../numeric/sums.ts";
 

@@ -166,6 +166,18 @@ export function multiply(x: usize, y: usize, product: usize, rows: i32): void {
   for (let i: usize = 0; i < length; i += pair) v128.store(product + i, f64x2.mul(v128.load(x + i), v128.load(y + i)));
 }
 
+export function addSquares(block: usize, size: i32, rows: i32, stride: i32, sums: usize): void {
+  const step = <usize>stride << 3;
+  const length = bytes(rows);
+  for (let j = 0; j < size; j++) {
+    const x = block + <usize>j * step;
+    for (let i: usize = 0; i < length; i += pair) {
+      const value = v128.load(x + i);
+      v128.store(sums + i, f64x2.add(v128.load(sums + i), f64x2.mul(value, value)));
+    }
+  }
+}
+
 /** 2^27 + 1 splits a double into two halves of 26 bits. */
 const split: f64 = 134217729;
 

@@ -14,6 +14,8 @@ export interface Kernels {
   readonly addProducts: (at: LeftAndRight) => void;
   /** product_i = x_i y_i. */
   readonly multiply: (at: Factors) => void;
+  /** sums_i += sum of x_ij^2 over the columns of the block, row by row. */
+  readonly addSquares: (at: RowSums) => void;
   /** high + low -= x (factor + factorLow), exact but for the low word's rounding. */
   readonly subtractMultiple: (at: Multiple) => void;
   /** The two words at `sum` += x'(high + low), in double-double. */
@@ -44,6 +46,14 @@ export interface Factors {
   readonly y: number;
   readonly product: number;
   readonly rows: number;
+}
+
+export interface RowSums {
+  readonly block: number;
+  readonly size: number;
+  readonly rows: number;
+  readonly stride: number;
+  readonly sums: number;
 }
 
 /** A column x and a column of two words. */

@@ -1,4 +1,13 @@
-import type { Arena, Factors, InnerProduct, Kernels, LeftAndRight, Multiple, TriangleAndBlock } from "./kernels.ts";
+import type {
+  Arena,
+  Factors,
+  InnerProduct,
+  Kernels,
+  LeftAndRight,
+  Multiple,
+  RowSums,
+  TriangleAndBlock,
+} from "./kernels.ts";
 
 /** The kernels in plain JavaScript, for machines without vectors and to check the others by. */
 export function scalarArena(): Arena {
@@ -17,6 +26,7 @@ const scalarKernels = (arena: () => Float64Array): Kernels => ({
   substitute: (at) => substitute(arena(), at),
   addProducts: (at) => addProducts(arena(), at),
   multiply: (at) => multiply(arena(), at),
+  addSquares: (at) => addSquares(arena(), at),
   subtractMultiple: (at) => subtractMultiple(arena(), at),
   addInnerProduct: (at) => addInnerProduct(arena(), at),
 });
@@ -74,6 +84,13 @@ function addProducts(values: Float64Array, at: LeftAndRight): void {
 
 function multiply(values: Float64Array, { x, y, product, rows }: Factors): void {
   for (let i = 0; i < rows; i++) values[product + i] = values[x + i]! * values[y + i]!;
+}
+
+function addSquares(values: Float64Array, { block, size, rows, stride, sums }: RowSums): void {
+  for (let j = 0; j < size; j++) {
+    const x = block + j * stride;
+    for (let i = 0; i < rows; i++) values[sums + i]! += values[x + i]! ** 2;
+  }
 }
 
 /** 2^27 + 1 splits a double into two halves of 26 bits (Veltkamp; Dekker 1971, Numer. Math. 18, 224-242). */

@@ -55,6 +55,8 @@ const byIndex = (exports: Exports): Kernels => ({
     ),
   multiply: ({ x, y, product, rows }) =>
     exports.multiply(x * bytesPerNumber, y * bytesPerNumber, product * bytesPerNumber, rows),
+  addSquares: ({ block, size, rows, stride, sums }) =>
+    exports.addSquares(block * bytesPerNumber, size, rows, stride, sums * bytesPerNumber),
   subtractMultiple: ({ high, low, x, rows, factor, factorLow }) =>
     exports.subtractMultiple(high * bytesPerNumber, low * bytesPerNumber, x * bytesPerNumber, rows, factor, factorLow),
   addInnerProduct: ({ sum, x, high, low, rows }) =>

@@ -98,6 +98,13 @@ describe.each(shapes)("kernels on $rows rows of $size columns", ({ size, rows })
     );
   });
 
+  it("add squares alike", () => {
+    const start = joined(block(size, rows, stride), column(rows + (rows % 2)));
+    const results = both(start, (kernels) => kernels.addSquares({ block: 0, size, rows, stride, sums: size * stride }));
+    expectTwins(results);
+    expect(results[1][size * stride]).toBeGreaterThan(start[size * stride]!);
+  });
+
   it("carry two words alike, to the last digits of the low one", () => {
     const start = joined(block(1, rows, stride), new Float64Array(stride), block(1, rows, stride), new Float64Array(2));
     const [high, low, x, sum] = [0, stride, 2 * stride, 3 * stride];
