@@ -5,7 +5,10 @@ import { functionsRuntime } from "../support/functionsRuntime.ts";
 import { type Size, questionOf } from "./data.ts";
 
 const calls = 200;
-const overData = functionTable.filter(({ parameters }) => parameters[0]?.name === "outcome");
+/** The functions over data that need nothing else. */
+const overData = functionTable.filter(
+  ({ parameters: [outcome, , ...others] }) => outcome?.name === "outcome" && others.every(({ optional }) => optional),
+);
 
 /** A sheet with many formulas over one block: each run edits one cell, and all of them are calculated again. */
 export function functionsJob(size: Size): () => Promise<void> {

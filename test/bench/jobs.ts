@@ -43,7 +43,8 @@ function ofFit(work: (fit: Fit) => void): Job {
     size: null,
     prepare: (size) => {
       const fit = fitOf(size);
-      return () => work(fit);
+      // A copy remembers nothing: what is kept for a fit is kept for the object.
+      return () => work({ ...fit });
     },
   };
 }
