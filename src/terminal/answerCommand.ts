@@ -14,6 +14,7 @@ import { type BookFile, openBookFile } from "./bookFile.ts";
 import type { FileAccess } from "./fileAccess.ts";
 import { type Asked, questionOf } from "./question.ts";
 import { report } from "./report.ts";
+import { saveFault } from "./saveName.ts";
 
 /** A workbook opened in the desk, for as long as a command needs it. */
 export interface OpenBook {
@@ -35,6 +36,8 @@ const quiet: Errand = { signal: new AbortController().signal, progress: () => un
 
 /** Carries out `footing answer`. @returns what is printed on standard output. */
 export async function answerCommand(command: AnswerCommand, world: Surroundings): Promise<Result<string>> {
+  const fault = saveFault(command);
+  if (fault !== null) return failure(fault);
   const file = await openBookFile(command.book, world.files);
   if (!file.ok) return file;
   const opened = await world.openBook(file.value.book);

@@ -60,5 +60,5 @@ function leftOut({ leftOut: rows, leftOutCount }: Answer): string[] {
   const listed = rows.slice(0, mostListed).map(({ cell, because }) => `${cell} (${because})`);
   const more = leftOutCount - listed.length;
   const all = more > 0 ? [...listed, `${more} more`] : listed;
-  return [wrapped(`Rows left out: ${leftOutCount}: ${listInWords(all)}.`)];
+  return [wrapped(`${leftOutCount} ${leftOutCount === 1 ? "row" : "rows"} left out: ${listInWords(all)}.`)];
 }
