@@ -1,8 +1,11 @@
 import type { DataPlace, Errand, Host } from "../app/host.ts";
 import { nearestName } from "../core/problem/nearestName.ts";
+import type { Problem } from "../core/problem/problem.ts";
 import { type Result, failure } from "../core/problem/result.ts";
 import { plainHeading } from "../core/table/headingRow.ts";
+import { columnInWords } from "../core/table/headings.ts";
 import { type LocatedTable, readBlock } from "../core/table/locate.ts";
+import { rangeOf } from "../core/table/place.ts";
 
 /** The names the user gave, to be matched with headings. */
 export interface Wanted {
@@ -13,7 +16,7 @@ export interface Wanted {
 /**
  * Finds the sheet and the table that have the headings asked for.
  * @returns Problem "unknown-place" for a sheet that does not exist, "unknown-heading" with the nearest one,
- *   "ambiguous-heading" where several sheets have them all.
+ *   "ambiguous-heading" where several sheets have them all, "repeated-heading" where several columns have one.
  */
 export async function findTable(host: Host, wanted: Wanted, errand: Errand): Promise<Result<LocatedTable>> {
   const places = await host.listPlaces();
@@ -37,7 +40,10 @@ export async function findTable(host: Host, wanted: Wanted, errand: Errand): Pro
       sheets: fitting.map(({ place }) => place.name),
     });
   }
-  return fitting[0]?.table ?? nearMiss(tables, wanted);
+  const [only] = fitting;
+  if (only === undefined || !only.table.ok) return only?.table ?? nearMiss(tables, wanted);
+  const repeated = repeatedAmong(only.table.value, wanted.headings);
+  return repeated === null ? only.table : failure(repeated);
 }
 
 const noSuchSheet = (sheet: string | null, sheets: readonly DataPlace[]) =>
@@ -51,6 +57,19 @@ const noSuchSheet = (sheet: string | null, sheets: readonly DataPlace[]) =>
           sheets.map(({ name }) => name),
         ),
       } as const);
+
+/** A heading asked for that stands above several columns, of which the later ones have their place in their names. */
+function repeatedAmong({ source }: LocatedTable, headings: readonly string[]): Problem | null {
+  const { columns, rowCount } = source;
+  for (const heading of headings) {
+    const carriers = columns.filter(({ name, place }) =>
+      [heading, `${heading} (${columnInWords(place.column)})`].map(plainHeading).includes(plainHeading(name)),
+    );
+    if (carriers.length < 2) continue;
+    return { code: "repeated-heading", heading, cells: carriers.map(({ place }) => rangeOf(place, rowCount)) };
+  }
+  return null;
+}
 
 const namesOf = (table: LocatedTable): string[] => table.source.columns.map(({ name }) => name);
 

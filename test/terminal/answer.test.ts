@@ -166,6 +166,8 @@ describe("faults of the input", () => {
     ["no such flag", [...shops, "--polcy", "careful"], "unknown-setting"],
     ["no such value", [...shops, "--policy", "carefull"], "unknown-value"],
     ["Newey-West without time", [...shops, "--errors", "newey-west"], "errors-need-order"],
+    ["a copy over the workbook itself", [...months, "--save", "./demo.xlsx"], "unwritable-file"],
+    ["a copy that is no workbook", [...months, "--save", "kept.csv"], "unwritable-file"],
     [
       "ranges of unequal height",
       ["demo.xlsx", "--sheet", "Months", "--outcome", "B4:B100", "--drivers", "C4:C90"],
@@ -177,6 +179,15 @@ describe("faults of the input", () => {
     const { problem } = JSON.parse(ran.out) as { problem: { code: string; message: string } };
     expect(problem.code).toBe(code);
     expect(ran.err).toBe(`${problem.message}\n`);
+  });
+
+  it("a heading above two columns is not settled by guessing", async () => {
+    const files = shelf({ "fees.csv": "Sales,Fee,Fee\n3,1,9\n5,2,7\n4,4,6\n8,5,5\n9,8,3\n" });
+    const ran = await run(["fees.csv", "--outcome", "Sales", "--drivers", "fee"], files);
+    expect(ran.status).toBe(2);
+    expect(ran.err).toContain('"fee" stands above more than one column, in fees!B2:B6 and fees!C2:C6.');
+    const byPlace = await run(["fees.csv", "--outcome", "Sales", "--drivers", "Fee (column C)"], files);
+    expect(byPlace.status).toBe(0);
   });
 
   it("name the nearest word", async () => {
