@@ -11,7 +11,7 @@ export const cautionLine =
   "A statistical check, not financial, legal or audit advice; have a qualified person look before money or a filing depends on it.";
 
 /** In points: the title is larger than a standard row. */
-const titleHeight = 24;
+const titleHeight = 28;
 
 export const titleSection = (answer: Answer, { date, version }: SheetFacts): Section =>
   section(
