@@ -1,9 +1,10 @@
-import { LocaleType, LogLevel, mergeLocales, Univer, type PluginCtor } from "@univerjs/core";
+import { type Injector, LocaleType, LogLevel, mergeLocales, Univer, type PluginCtor } from "@univerjs/core";
 import { FUniver } from "@univerjs/core/facade";
 import { CalculationMode, UniverSheetsCorePreset } from "@univerjs/preset-sheets-core";
 import coreWords from "@univerjs/preset-sheets-core/locales/en-US";
 import { UniverSheetsDrawingPreset } from "@univerjs/preset-sheets-drawing";
 import drawingWords from "@univerjs/preset-sheets-drawing/locales/en-US";
+import { FormulaCalculationSessionController, TriggerCalculationController } from "@univerjs/sheets-formula";
 import { defaultTheme } from "@univerjs/themes";
 import "@univerjs/preset-sheets-core/lib/index.css";
 import "@univerjs/preset-sheets-drawing/lib/index.css";
@@ -19,7 +20,14 @@ export function startBrowserGrid(container: HTMLElement, dark: boolean): Grid {
     locales: { [LocaleType.EN_US]: mergeLocales(coreWords, drawingWords) },
   });
   for (const [plugin, options] of plugins(container)) univer.registerPlugin(plugin, options);
-  return { api: FUniver.newAPI(univer), injector: univer.__getInjector(), dispose: () => univer.dispose() };
+  const injector = univer.__getInjector();
+  return { api: FUniver.newAPI(univer), injector, awaken: () => awaken(injector), dispose: () => univer.dispose() };
+}
+
+/** Each begins to listen when it is first asked for. */
+function awaken(injector: Injector): void {
+  injector.get(TriggerCalculationController);
+  injector.get(FormulaCalculationSessionController);
 }
 
 type Chosen = readonly [PluginCtor, ConstructorParameters<PluginCtor>[0]?];

@@ -7,6 +7,8 @@ import type {} from "@univerjs/sheets/facade";
 export interface Grid {
   readonly api: FUniver;
   readonly injector: Injector;
+  /** Makes the formula engine of an opened workbook listen, where it would wait until the cells are drawn. */
+  readonly awaken: () => void;
   readonly dispose: () => void;
 }
 

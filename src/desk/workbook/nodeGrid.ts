@@ -26,6 +26,8 @@ export async function startNodeGrid(): Promise<Grid> {
   return {
     api: facade.FUniver.newAPI(univer),
     injector: univer.__getInjector(),
+    // Without a page it listens from the start.
+    awaken: () => undefined,
     dispose: () => univer.dispose(),
   };
 }

@@ -36,7 +36,10 @@ export function openBook(grid: Grid, data: BookData, prepare: (book: Book) => vo
   workbook.setActiveSheet(ids[data.active] ?? ids[0]!);
   prepare(book);
   const unsaved = data.sheets.flatMap((sheet, index) => unsavedFormulas(sheet, ids[index]!));
-  if (unsaved.length > 0) recalculate(book, unsaved);
+  if (unsaved.length > 0) {
+    grid.awaken();
+    recalculate(book, unsaved);
+  }
   return book;
 }
 
