@@ -1,3 +1,6 @@
+import { extremes } from "./sums.ts";
+import { arena } from "./vector/arena.ts";
+
 /** A pivot below this share of its column's largest value is rounding left over from the rotations, not a new direction. */
 const dependent = 1e-11;
 
@@ -29,47 +32,41 @@ export function recursiveResiduals(regression: Regression, walk: "forwards" | "b
   const k = columns.length;
   const residuals = new Float64Array(n);
   const ranks = new Int32Array(n);
-  const triangle = new Float64Array((k + 1) * (k + 1));
-  const row = new Float64Array(k + 1);
-  const floors = Float64Array.from(
-    columns,
-    (column) => dependent * column.reduce((most, x) => Math.max(most, Math.abs(x)), 0),
-  );
+  const at = placesFor(k);
+  const space = arena.numbers(at.raised + blockRows);
+  space.fill(0, at.triangle, at.floors);
+  columns.forEach((column, j) => (space[at.floors + j] = dependent * largest(column)));
   let rank = 0;
-  for (let step = 0; step < n; step++) {
-    const i = walk === "forwards" ? step : n - 1 - step;
-    for (let j = 0; j < k; j++) row[j] = columns[j]![i]!;
-    row[k] = outcome[i]!;
-    if (rotateIn(row, triangle, floors)) rank += 1;
-    else residuals[i] = row[k];
-    ranks[i] = rank;
+  for (let step = 0; step < n; step += blockRows) {
+    const rows = Math.min(blockRows, n - step);
+    const rowAt = (i: number): number => (walk === "forwards" ? step + i : n - 1 - step - i);
+    for (let i = 0; i < rows; i++) placeRow(regression, rowAt(i), space.subarray(at.block + i * (k + 1)));
+    arena.kernels.rotateRows({ ...at, size: k, rows });
+    for (let i = 0; i < rows; i++) {
+      if (space[at.raised + i] === 1) rank += 1;
+      else residuals[rowAt(i)] = space[at.block + i * (k + 1) + k]!;
+      ranks[rowAt(i)] = rank;
+    }
   }
   return { residuals, ranks };
 }
 
-/** Rotates a row into the triangle (row by row, outcome last). Returns whether it raised the rank; else its residual is left in the last place. */
-function rotateIn(row: Float64Array, triangle: Float64Array, floors: Float64Array): boolean {
-  const k = floors.length;
-  const width = k + 1;
-  for (let j = 0; j < k; j++) {
-    const x = row[j]!;
-    const start = j * width;
-    const pivot = triangle[start + j]!;
-    if (pivot === 0) {
-      if (Math.abs(x) <= floors[j]!) continue;
-      // A positive pivot keeps every cosine positive, and with them the sign of the residuals.
-      for (let l = j; l < width; l++) triangle[start + l] = x < 0 ? -row[l]! : row[l]!;
-      return true;
-    }
-    if (x === 0) continue;
-    const length = Math.sqrt(pivot * pivot + x * x);
-    const [c, s] = [pivot / length, x / length];
-    triangle[start + j] = length;
-    for (let l = j + 1; l < width; l++) {
-      const above = triangle[start + l]!;
-      triangle[start + l] = c * above + s * row[l]!;
-      row[l] = c * row[l]! - s * above;
-    }
-  }
-  return false;
+/** Rows rotated at a time. */
+const blockRows = 256;
+
+const placesFor = (k: number) => {
+  const floors = k * (k + 1);
+  const block = floors + k;
+  return { triangle: 0, floors, block, raised: block + blockRows * (k + 1) };
+};
+
+function largest(column: Float64Array): number {
+  const { least, greatest } = extremes(column);
+  return Math.max(greatest, -least);
+}
+
+/** The numbers of one row, its outcome last. */
+function placeRow({ columns, outcome }: Regression, row: number, to: Float64Array): void {
+  for (let j = 0; j < columns.length; j++) to[j] = columns[j]![row]!;
+  to[columns.length] = outcome[row]!;
 }

@@ -178,6 +178,54 @@ export function addSquares(block: usize, size: i32, rows: i32, stride: i32, sums
   }
 }
 
+export function rotateRows(triangle: usize, floors: usize, block: usize, size: i32, rows: i32, raised: usize): void {
+  const step = <usize>(size + 1) << 3;
+  for (let i = 0; i < rows; i++) {
+    const row = block + <usize>i * step;
+    store<f64>(raised + (<usize>i << 3), rotateRow(triangle, floors, row, size) ? 1 : 0);
+  }
+}
+
+function rotateRow(triangle: usize, floors: usize, row: usize, size: i32): bool {
+  const step = <usize>(size + 1) << 3;
+  for (let j = 0; j < size; j++) {
+    const here = <usize>j << 3;
+    const x = load<f64>(row + here);
+    const above = triangle + <usize>j * step;
+    const pivot = load<f64>(above + here);
+    if (pivot == 0) {
+      if (Math.abs(x) <= load<f64>(floors + here)) continue;
+      // A positive pivot keeps every cosine positive, and with them the sign of the residuals.
+      const sign: f64 = x < 0 ? -1 : 1;
+      for (let l = here; l < step; l += 8) store<f64>(above + l, sign * load<f64>(row + l));
+      return true;
+    }
+    if (x == 0) continue;
+    const length = Math.sqrt(pivot * pivot + x * x);
+    store<f64>(above + here, length);
+    rotatePair(above, row, here + 8, step, pivot / length, x / length);
+  }
+  return false;
+}
+
+function rotatePair(above: usize, row: usize, from: usize, until: usize, cosine: f64, sine: f64): void {
+  const c = f64x2.splat(cosine);
+  const s = f64x2.splat(sine);
+  let l = from;
+  for (; l + 8 < until; l += pair) {
+    const upper = v128.load(above + l);
+    const lower = v128.load(row + l);
+    v128.store(above + l, f64x2.add(f64x2.mul(c, upper), f64x2.mul(s, lower)));
+    v128.store(row + l, f64x2.sub(f64x2.mul(c, lower), f64x2.mul(s, upper)));
+  }
+  if (l < until) {
+    const upper = load<f64>(above + l);
+    const lower = load<f64>(row + l);
+    store<f64>(above + l, cosine * upper + sine * lower);
+    store<f64>(row + l, cosine * lower - sine * upper);
+  }
+}
+
 /** 2^27 + 1 splits a double into two halves of 26 bits. */
 const split: f64 = 134217729;
 

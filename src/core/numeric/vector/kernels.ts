@@ -16,6 +16,12 @@ export interface Kernels {
   readonly multiply: (at: Factors) => void;
   /** sums_i += sum of x_ij^2 over the columns of the block, row by row. */
   readonly addSquares: (at: RowSums) => void;
+  /**
+   * Rotates rows of `size` numbers and an outcome, which lie row by row, into the triangle above them, one after the
+   * other. raised_i is 1 where row i raised the rank; else what is left of its outcome is its recursive residual. A
+   * number that does not exceed its floor in size is no new direction.
+   */
+  readonly rotateRows: (at: Rotation) => void;
   /** high + low -= x (factor + factorLow), exact but for the low word's rounding. */
   readonly subtractMultiple: (at: Multiple) => void;
   /** The two words at `sum` += x'(high + low), in double-double. */
@@ -54,6 +60,16 @@ export interface RowSums {
   readonly rows: number;
   readonly stride: number;
   readonly sums: number;
+}
+
+export interface Rotation {
+  /** size rows of size + 1 numbers. */
+  readonly triangle: number;
+  readonly floors: number;
+  readonly block: number;
+  readonly size: number;
+  readonly rows: number;
+  readonly raised: number;
 }
 
 /** A column x and a column of two words. */

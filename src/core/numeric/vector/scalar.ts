@@ -5,6 +5,7 @@ import type {
   Kernels,
   LeftAndRight,
   Multiple,
+  Rotation,
   RowSums,
   TriangleAndBlock,
 } from "./kernels.ts";
@@ -27,6 +28,9 @@ const scalarKernels = (arena: () => Float64Array): Kernels => ({
   addProducts: (at) => addProducts(arena(), at),
   multiply: (at) => multiply(arena(), at),
   addSquares: (at) => addSquares(arena(), at),
+  rotateRows: (at) => {
+    for (let i = 0; i < at.rows; i++) arena()[at.raised + i] = rotateRow(arena(), at, i) ? 1 : 0;
+  },
   subtractMultiple: (at) => subtractMultiple(arena(), at),
   addInnerProduct: (at) => addInnerProduct(arena(), at),
 });
@@ -91,6 +95,32 @@ function addSquares(values: Float64Array, { block, size, rows, stride, sums }: R
     const x = block + j * stride;
     for (let i = 0; i < rows; i++) values[sums + i]! += values[x + i]! ** 2;
   }
+}
+
+/** Whether row i raised the rank; else its residual is left in its last place. */
+function rotateRow(values: Float64Array, { triangle, floors, block, size }: Rotation, i: number): boolean {
+  const width = size + 1;
+  const row = block + i * width;
+  for (let j = 0; j < size; j++) {
+    const x = values[row + j]!;
+    const above = triangle + j * width;
+    const pivot = values[above + j]!;
+    if (pivot === 0) {
+      if (Math.abs(x) <= values[floors + j]!) continue;
+      // A positive pivot keeps every cosine positive, and with them the sign of the residuals.
+      for (let l = j; l < width; l++) values[above + l] = Math.sign(x) * values[row + l]!;
+      return true;
+    }
+    if (x === 0) continue;
+    const length = Math.sqrt(pivot * pivot + x * x);
+    values[above + j] = length;
+    for (let l = j + 1; l < width; l++) {
+      const [upper, lower] = [values[above + l]!, values[row + l]!];
+      values[above + l] = (pivot / length) * upper + (x / length) * lower;
+      values[row + l] = (pivot / length) * lower - (x / length) * upper;
+    }
+  }
+  return false;
 }
 
 /** 2^27 + 1 splits a double into two halves of 26 bits (Veltkamp; Dekker 1971, Numer. Math. 18, 224-242). */

@@ -57,6 +57,15 @@ const byIndex = (exports: Exports): Kernels => ({
     exports.multiply(x * bytesPerNumber, y * bytesPerNumber, product * bytesPerNumber, rows),
   addSquares: ({ block, size, rows, stride, sums }) =>
     exports.addSquares(block * bytesPerNumber, size, rows, stride, sums * bytesPerNumber),
+  rotateRows: ({ triangle, floors, block, size, rows, raised }) =>
+    exports.rotateRows(
+      triangle * bytesPerNumber,
+      floors * bytesPerNumber,
+      block * bytesPerNumber,
+      size,
+      rows,
+      raised * bytesPerNumber,
+    ),
   subtractMultiple: ({ high, low, x, rows, factor, factorLow }) =>
     exports.subtractMultiple(high * bytesPerNumber, low * bytesPerNumber, x * bytesPerNumber, rows, factor, factorLow),
   addInnerProduct: ({ sum, x, high, low, rows }) =>

@@ -105,6 +105,27 @@ describe.each(shapes)("kernels on $rows rows of $size columns", ({ size, rows })
     expect(results[1][size * stride]).toBeGreaterThan(start[size * stride]!);
   });
 
+  it("rotate rows alike, a direction that comes late and one that never comes among them", () => {
+    const width = size + 1;
+    const [triangleAt, floors] = [0, size * width];
+    const at = { triangle: triangleAt, floors, block: floors + size, size, rows, raised: floors + size + rows * width };
+    const numbers = Array.from({ length: rows * width }, (_, index) => {
+      const [i, j] = [Math.floor(index / width), index % width];
+      if (j === 1 && i < rows / 2) return 0;
+      return j === 2 && size > 2 ? 0 : random.normal();
+    });
+    const start = joined(
+      new Float64Array(floors),
+      new Float64Array(size).fill(1e-11),
+      Float64Array.from(numbers),
+      column(rows),
+    );
+    const results = both(start, (kernels) => kernels.rotateRows(at));
+    expectTwins(results);
+    const raised = results[0].subarray(at.raised, at.raised + rows).reduce((sum, value) => sum + value, 0);
+    expect(raised).toBe(Math.min(rows, size > 2 ? size - 1 : size));
+  });
+
   it("carry two words alike, to the last digits of the low one", () => {
     const start = joined(block(1, rows, stride), new Float64Array(stride), block(1, rows, stride), new Float64Array(2));
     const [high, low, x, sum] = [0, stride, 2 * stride, 3 * stride];
