@@ -40,9 +40,11 @@ describe("the four cases", () => {
     expect(marked(cases, pointedAt)).toEqual(["even/none"]);
   });
 
-  it("mark nothing in force where standard errors go by group", () => {
-    const grouped = decisionOf({ spread: "even", followOn: "not asked" }, { kind: "grouped", version: "CR1" });
+  it("mark nothing where standard errors go by group: the tests are not asked", () => {
+    const notAsked = { spread: "not asked", followOn: "not asked" } as const;
+    const grouped = decisionOf(notAsked, { kind: "grouped", version: "CR1" });
     expect(marked(grouped, isInForce)).toEqual([]);
+    expect(marked(grouped, pointedAt)).toEqual([]);
   });
 });
 

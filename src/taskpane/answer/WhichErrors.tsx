@@ -53,7 +53,7 @@ export function WhichErrors({ answer }: { readonly answer: Answer }): ReactNode 
 function findingOf(decision: Decision, question: "spread" | "follow-on"): string {
   const found = question === "spread" ? decision.fourCase.spread : decision.fourCase.followOn;
   const test = settledBy(decision, question);
-  if (test === null) return found;
+  if (test === null || found === "not asked") return found;
   const p = pValueInWords(test.pValue, decision.testLevel);
   return `${found}: ${testWords[test.outcome.test].title}, ${p}, tested at ${Number((100 * decision.testLevel).toPrecision(6))} %`;
 }

@@ -19,10 +19,9 @@ export const caseCells: readonly CaseCell[] = [
   { spread: "uneven", followOn: "some", errors: "Newey-West" },
 ];
 
-/** Whether the tests point at a cell: questions that were not asked leave its side of the picture empty. */
+/** Whether the tests point at a cell: nowhere where spread was not asked, on the left where follow-on was not. */
 export const pointedAt = ({ fourCase }: Decision, cell: CaseCell): boolean =>
-  cell.spread === (fourCase.spread === "not asked" ? "uneven" : fourCase.spread) &&
-  cell.followOn === (fourCase.followOn === "not asked" ? "none" : fourCase.followOn);
+  cell.spread === fourCase.spread && cell.followOn === (fourCase.followOn === "not asked" ? "none" : fourCase.followOn);
 
 /** Whether the standard errors of a cell are the ones in force; Newey-West stands in two cells and is marked once. */
 export function isInForce(decision: Decision, cell: CaseCell): boolean {
