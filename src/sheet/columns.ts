@@ -9,7 +9,7 @@ export const chartDataColumn = 24;
 export const liveColumn = 40;
 
 /** Widths in characters: the names, ten columns of figures, a gutter, the charts' columns. */
-export const pageWidths: readonly number[] = [30, 28, 13, 14, 14, 12, 13, 14, 13, 13, 32, 2];
+export const pageWidths: readonly number[] = [30, 28, 16, 14, 16, 12, 13, 14, 13, 13, 32, 2];
 
 /** In points. */
 const lineHeight = 15;
