@@ -2,7 +2,7 @@ import type { Fit } from "../fit/fit.ts";
 import { fTail } from "../numeric/distributions.ts";
 import { explain } from "../numeric/explain.ts";
 import { isPerfect } from "../numeric/perfect.ts";
-import { ascendingRows, inOrder } from "../numeric/ordering.ts";
+import { inOrder, smallestRows } from "../numeric/ordering.ts";
 import { fittedValues } from "./auxiliary.ts";
 import { type TestOutcome, computed, notApplicable } from "./outcome.ts";
 
@@ -15,10 +15,9 @@ import { type TestOutcome, computed, notApplicable } from "./outcome.ts";
  * @see Goldfeld and Quandt (1965), J. American Stat. Association 60, 539-547.
  */
 export function goldfeldQuandt(fit: Fit): TestOutcome {
-  const rows = ascendingRows(fittedValues(fit));
-  const half = Math.floor(fit.rowCount / 2);
-  const [smaller, larger] = [rows.subarray(0, half), rows.subarray(half)].map((part) => varianceOn(fit, part));
-  if (smaller === undefined || larger === undefined || smaller.df < 1 || larger.df < 1) {
+  const halves = smallestRows(fittedValues(fit), Math.floor(fit.rowCount / 2));
+  const [smaller, larger] = [varianceOn(fit, halves[0]), varianceOn(fit, halves[1])];
+  if (smaller.df < 1 || larger.df < 1) {
     return notApplicable(
       "goldfeld-quandt",
       `half of the ${fit.rowCount} rows are too few for a regression of their own`,

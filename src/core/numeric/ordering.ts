@@ -37,3 +37,24 @@ export function pairNumbers(first: Int32Array, second: Int32Array): Int32Array<A
     return pair;
   });
 }
+
+/**
+ * The rows with the `count` smallest keys, and the others; both in the order of their rows. Of equal keys at the border
+ * the earlier rows count as smaller.
+ */
+export function smallestRows(
+  keys: Float64Array,
+  count: number,
+): readonly [Int32Array<ArrayBuffer>, Int32Array<ArrayBuffer>] {
+  const border = keys.toSorted()[count]!;
+  let atBorder = count - keys.reduce((below, key) => (key < border ? below + 1 : below), 0);
+  const smaller = new Int32Array(count);
+  const others = new Int32Array(keys.length - count);
+  let found = 0;
+  for (let row = 0; row < keys.length; row++) {
+    const key = keys[row]!;
+    if (key < border || (key === border && atBorder-- > 0)) smaller[found++] = row;
+    else others[row - found] = row;
+  }
+  return [smaller, others];
+}

@@ -1,7 +1,14 @@
 import { describe, expect, it } from "vitest";
 import { explain, explainWithin } from "../../../src/core/numeric/explain.ts";
 import { leastSquares } from "../../../src/core/numeric/leastSquares.ts";
-import { ascendingRows, inOrder, isAscending, pairNumbers, rowsAbove } from "../../../src/core/numeric/ordering.ts";
+import {
+  ascendingRows,
+  inOrder,
+  isAscending,
+  pairNumbers,
+  rowsAbove,
+  smallestRows,
+} from "../../../src/core/numeric/ordering.ts";
 import { randomFrom } from "../../../src/core/numeric/random.ts";
 import {
   bilinear,
@@ -104,6 +111,21 @@ describe("row orders", () => {
     expect([...inOrder(Float64Array.of(10, 11, 12, 13, 14), rows)]).toEqual([13, 11, 14, 10, 12]);
     expect([isAscending(Int32Array.of(0, 0, 4)), isAscending(Int32Array.of(0, 5, 4))]).toEqual([true, false]);
     expect(rowsAbove(Float64Array.of(1, 5, 2, 5), 2)).toEqual([1, 3]);
+  });
+
+  it("split at a count of the smallest, earlier rows first among equals", () => {
+    const keys = Float64Array.of(4, 1, 4, 9, 4, -2, 4);
+    const rows = (count: number): number[][] => smallestRows(keys, count).map((part) => [...part]);
+    expect(rows(0)).toEqual([[], [0, 1, 2, 3, 4, 5, 6]]);
+    expect(rows(2)).toEqual([
+      [1, 5],
+      [0, 2, 3, 4, 6],
+    ]);
+    expect(rows(4)).toEqual([
+      [0, 1, 2, 5],
+      [3, 4, 6],
+    ]);
+    expect(rows(6)).toEqual([[0, 1, 2, 4, 5, 6], [3]]);
   });
 
   it("number pairs as they come", () => {
