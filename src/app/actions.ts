@@ -22,5 +22,7 @@ export type Action =
     }
   | { readonly kind: "answered"; readonly answered: Omit<Answered, "outdated"> }
   | { readonly kind: "written"; readonly sheet: string; readonly as: SheetKind }
+  | { readonly kind: "recalculated"; readonly sheet: string }
+  | { readonly kind: "kept"; readonly sheet: string }
   | { readonly kind: "cell changed"; readonly cell: string }
   | { readonly kind: "said"; readonly text: string };

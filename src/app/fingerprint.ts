@@ -1,3 +1,4 @@
+import type { Question } from "../core/answer/question.ts";
 import { type CellColumn, cellKind } from "../core/table/cells.ts";
 import type { Column, Source } from "../core/table/source.ts";
 
@@ -10,6 +11,17 @@ export async function fingerprint(columns: Source["columns"]): Promise<string> {
   const digests = new Uint8Array(columns.length * digestBytes);
   for (const [index, column] of columns.entries()) digests.set(await digestOf(column), index * digestBytes);
   return hexadecimal(await sha256(digests));
+}
+
+/** The fingerprint of the data behind a question: whatever else stands in the table leaves it as it is. */
+export const fingerprintOf = (question: Question): Promise<string> => fingerprint(usedColumns(question));
+
+/** Outcome, drivers, then what orders or groups the rows. */
+function usedColumns({ source, model }: Question): readonly Column[] {
+  const { rows } = model;
+  const byRows = rows.kind === "cases" ? [] : rows.kind === "time" ? [rows.order] : [rows.by, rows.second, rows.order];
+  const names = new Set([model.outcome.column, ...model.drivers.map(({ column }) => column), ...byRows]);
+  return [...names].flatMap((name) => source.columns.filter((column) => column.name === name));
 }
 
 /** The part of a fingerprint that is shown: 16 digits tell any two data sets that one meets apart. */

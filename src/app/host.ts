@@ -43,6 +43,10 @@ export interface Host {
   readonly listPlaces: () => Promise<Result<readonly DataPlace[]>>;
   /** Writes to a new sheet, shows it, and answers with its name. */
   readonly write: (plan: SheetPlan, errand: Errand) => Promise<Result<{ readonly sheet: string }>>;
+  /** Calculates the formulas of the sheet in front again, and answers with its name. */
+  readonly recalculateSheet: () => Promise<Result<{ readonly sheet: string }>>;
+  /** Puts values in the place of the formulas of the sheet in front, if Footing wrote it and all values are there. */
+  readonly keepSheet: (errand: Errand) => Promise<Result<{ readonly sheet: string }>>;
   /** Selects and shows a cell or range. */
   readonly goTo: (address: string) => Promise<Result<null>>;
   /** Calls back when a cell inside one of the addresses changes; answers with a way to stop. */

@@ -6,6 +6,7 @@ import { createErrands } from "./errands.ts";
 import type { Host, WhereToRead } from "./host.ts";
 import { listPlaces, readData } from "./reading.ts";
 import { reduce } from "./reduce.ts";
+import { keepSheet, recalculateSheet } from "./sheetInFront.ts";
 import { type Store, createStore } from "./store.ts";
 import { type PaneState, emptyState } from "./state.ts";
 import { createWatch } from "./watching.ts";
@@ -28,6 +29,10 @@ export interface Commands {
   readonly write: (kind: SheetKind) => void;
   /** Reads the cells again, answers again, and writes a kept sheet again where one was left out of date. */
   readonly redo: () => void;
+  /** Has the functions of the sheet in front calculated again. */
+  readonly recalculate: () => void;
+  /** Turns the live sheet in front into a kept one. */
+  readonly keep: () => void;
   readonly goTo: (address: string) => void;
   readonly cancel: () => void;
 }
@@ -48,6 +53,8 @@ export function createPane({ host, analyst, edition, guard }: PaneParts): Pane {
     answer: () => guard(() => findAnswer(work)),
     write: (kind) => guard(() => writeSheet(work, kind)),
     redo: () => guard(() => redo(work)),
+    recalculate: () => guard(() => recalculateSheet(work)),
+    keep: () => guard(() => keepSheet(work)),
     goTo: (address) => guard(() => goToCell(work, address)),
     cancel: errands.cancel,
   };

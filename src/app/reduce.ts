@@ -1,6 +1,14 @@
 import type { Action } from "./actions.ts";
 import { type Setup, assignRole, changeColumn } from "./setup.ts";
-import { announce, answeredWords, changedWords, readWords, writtenWords } from "./spoken.ts";
+import {
+  announce,
+  answeredWords,
+  changedWords,
+  keptWords,
+  readWords,
+  recalculatedWords,
+  writtenWords,
+} from "./spoken.ts";
 import type { Outdated, PaneState, Section } from "./state.ts";
 
 /** The pane after something happened. Pure: what is asked of the spreadsheet is asked elsewhere. */
@@ -15,7 +23,12 @@ type Of<Kind extends Action["kind"]> = Extract<Action, { kind: Kind }>;
 const changes: { readonly [Kind in Action["kind"]]: (state: PaneState, action: Of<Kind>) => PaneState } = {
   shown: (state, { section }) => ({ ...state, section }),
   "places found": (state, { places }) => ({ ...state, places }),
-  started: (state, { on }) => ({ ...state, fault: null, busy: { with: on, progress: { what: "", share: null } } }),
+  started: (state, { on }) => ({
+    ...state,
+    fault: null,
+    sheetDone: "",
+    busy: { with: on, progress: { what: "", share: null } },
+  }),
   progressed: (state, { progress }) => (state.busy === null ? state : { ...state, busy: { ...state.busy, progress } }),
   cancelled: (state) => announce({ ...state, busy: null }, "Cancelled."),
   failed: (state, { fault }) => ({ ...state, busy: null, fault }),
@@ -34,9 +47,16 @@ const changes: { readonly [Kind in Action["kind"]]: (state: PaneState, action: O
     const written = { sheet, kind: as, outdated: false };
     return announce({ ...state, written, busy: null, fault: null }, writtenWords(written));
   },
+  recalculated: (state, { sheet }) => withSheetDone({ ...state, fault: null }, recalculatedWords(sheet)),
+  kept: ({ written, ...state }, { sheet }) => {
+    const now = written?.sheet === sheet ? { ...written, kind: "kept" as const } : written;
+    return withSheetDone({ ...state, written: now, busy: null }, keptWords(sheet));
+  },
   "cell changed": cellChanged,
   said: (state, { text }) => announce(state, text),
 };
+
+const withSheetDone = (state: PaneState, sheetDone: string): PaneState => announce({ ...state, sheetDone }, sheetDone);
 
 /** A changed set-up leaves the answer standing, but says that it belongs to the set-up before. */
 function withSetup(state: PaneState, change: (setup: Setup) => Setup): PaneState {
@@ -79,15 +99,15 @@ const arriveAt = (state: PaneState, section: Section): PaneState => ({
   arrivals: state.arrivals + 1,
 });
 
-/** A live sheet moves with the cells; what was read, an answer and a kept sheet do not. */
-function cellChanged(state: PaneState, { cell }: Of<"cell changed">): PaneState {
-  const { data, answered, written } = state;
+/** A live sheet moves with the cells, also after the first that changed; what was read, an answer and a kept sheet do not. */
+function cellChanged(before: PaneState, { cell }: Of<"cell changed">): PaneState {
+  const { data, answered, written } = before;
+  const state = written?.kind === "kept" ? { ...before, written: { ...written, outdated: true } } : before;
   if (data === null || data.changedCell !== null) return state;
   const next: PaneState = {
     ...state,
     data: { ...data, changedCell: cell },
     answered: answered === null ? null : { ...answered, outdated: { because: "cells", cell } },
-    written: written === null ? null : { ...written, outdated: written.kind === "kept" },
   };
   return answered === null ? next : announce(next, changedWords(cell));
 }

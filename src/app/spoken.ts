@@ -15,5 +15,10 @@ export const answeredWords = ({ verdict }: Answer): string => `The answer is rea
 
 export const changedWords = (cell: string): string => `${cell} has changed. The answer is out of date.`;
 
+export const recalculatedWords = (sheet: string): string =>
+  `The functions on the sheet ${sheet} are being calculated again.`;
+
+export const keptWords = (sheet: string): string => `The sheet ${sheet} is kept now: it holds values that stay.`;
+
 export const writtenWords = ({ sheet, kind }: Written): string =>
   `Written to the sheet ${sheet}, ${kind === "live" ? "as formulas that follow the cells" : "as values that stay"}.`;

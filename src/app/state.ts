@@ -10,7 +10,7 @@ export type Section = "data" | "answer" | "evidence";
 
 /** What is under way; one thing at a time. */
 export interface Busy {
-  readonly with: "reading" | "answering" | "writing";
+  readonly with: "reading" | "answering" | "writing" | "keeping";
   readonly progress: Progress;
 }
 
@@ -51,6 +51,8 @@ export interface PaneState {
   readonly setup: Setup | null;
   readonly answered: Answered | null;
   readonly written: Written | null;
+  /** What was done last with the sheet in front, as a sentence; empty where nothing was. */
+  readonly sheetDone: string;
   readonly busy: Busy | null;
   readonly fault: Fault | null;
   /** What a screen reader is told; counted, so that the same words can be said twice. */
@@ -65,6 +67,7 @@ export const emptyState: PaneState = {
   setup: null,
   answered: null,
   written: null,
+  sheetDone: "",
   busy: null,
   fault: null,
   said: { text: "", count: 0 },

@@ -1,7 +1,5 @@
-import type { Question } from "../core/answer/question.ts";
-import type { Column } from "../core/table/source.ts";
 import { type SheetKind, planAnswer } from "../sheet/answerSheet.ts";
-import { fingerprint } from "./fingerprint.ts";
+import { fingerprintOf } from "./fingerprint.ts";
 import { sheetFactsOf } from "./sheetFacts.ts";
 import type { Answered } from "./state.ts";
 import { type Work, fail } from "./work.ts";
@@ -27,17 +25,9 @@ export async function writeSheet(work: Work, kind: SheetKind): Promise<void> {
 const madeOf = async ({ question, headingRow }: Answered, { today, version }: Edition) => ({
   date: today(),
   version,
-  fingerprint: await fingerprint(usedColumns(question)),
+  fingerprint: await fingerprintOf(question),
   headingRow,
 });
-
-/** The columns an answer rests on, for the fingerprint: outcome, drivers, then what orders or groups the rows. */
-function usedColumns({ source, model }: Question): readonly Column[] {
-  const { rows } = model;
-  const byRows = rows.kind === "cases" ? [] : rows.kind === "time" ? [rows.order] : [rows.by, rows.second, rows.order];
-  const names = new Set([model.outcome.column, ...model.drivers.map(({ column }) => column), ...byRows]);
-  return [...names].flatMap((name) => source.columns.filter((column) => column.name === name));
-}
 
 /** Shows a cell or a range in the spreadsheet. */
 export async function goToCell(work: Work, address: string): Promise<void> {

@@ -61,6 +61,8 @@ const signs = {
   "chart-selected": "notAvailable",
   "other-workbook": "notAvailable",
   "sheet-protected": "notAvailable",
+  "not-a-result-sheet": "notAvailable",
+  "values-missing": "notAvailable",
   "workbook-protected": "notAvailable",
   "unknown-place": "notAvailable",
   "bad-address": "notAvailable",

@@ -2,6 +2,7 @@ import type { Host } from "../app/host.ts";
 import { success } from "../core/problem/result.ts";
 import { type ExcelClient, pageClient } from "./client.ts";
 import { goTo } from "./goTo.ts";
+import { keepSheet, recalculateSheet } from "./liveSheet.ts";
 import { locate } from "./locate.ts";
 import { listPlaces } from "./places.ts";
 import { readCells } from "./read.ts";
@@ -19,6 +20,8 @@ export function excelHost(client: ExcelClient = pageClient): Host {
       }),
     listPlaces: () => inExcel(client, async (context) => success(await persist(() => listPlaces(context)))),
     write: (plan, errand) => writePlan(client, plan, errand),
+    recalculateSheet: () => inExcel(client, recalculateSheet),
+    keepSheet: (errand) => inExcel(client, (context) => keepSheet(context, errand)),
     goTo: (address) => inExcel(client, (context) => goTo(context, address)),
     watch: (addresses, changed) => watch(client, addresses, changed),
   };

@@ -49,6 +49,7 @@ const doing: Readonly<Record<Busy["with"], string>> = {
   reading: "Reading the cells",
   answering: "Finding the answer",
   writing: "Writing the sheet",
+  keeping: "Putting values in the place of formulas",
 };
 
 function Working({ busy }: { readonly busy: Busy }): ReactNode {

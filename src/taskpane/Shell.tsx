@@ -5,6 +5,7 @@ import { ActionBar } from "./ActionBar.tsx";
 import { Announcer } from "./parts/Announcer.tsx";
 import { FaultNotice } from "./parts/FaultNotice.tsx";
 import { Tabs, tabId } from "./parts/Tabs.tsx";
+import { SheetTools } from "./SheetTools.tsx";
 import { AnswerSection } from "./answer/AnswerSection.tsx";
 import { DataSection } from "./data/DataSection.tsx";
 import { EvidenceSection } from "./evidence/EvidenceSection.tsx";
@@ -56,6 +57,7 @@ export function Shell(): ReactNode {
           {section === "data" && <DataSection />}
           {section === "answer" && <AnswerSection />}
           {section === "evidence" && <EvidenceSection />}
+          {section !== "evidence" && <SheetTools />}
         </div>
       </main>
       <ActionBar />

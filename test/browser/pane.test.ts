@@ -185,6 +185,58 @@ describe("the answer", () => {
   });
 });
 
+describe("the functions of the sheet in front", () => {
+  const openTools = (): Promise<void> => button(page, "Functions in the sheet in front").click();
+
+  it("are recalculated, and that is said and shown", async () => {
+    await openTools();
+    await button(page, "Recalculate this sheet's functions").click();
+    const tools = page.getByRole("region", { name: "Functions in the sheet" });
+    await tools.getByText("The functions on the sheet Months are being calculated again.").waitFor();
+    expect(await announced(page)).toBe("The functions on the sheet Months are being calculated again.");
+  });
+
+  it("give way to values: the live sheet just written is then a kept one", async () => {
+    await getAnswer(page);
+    await button(page, "Write to the workbook").click();
+    await page
+      .getByText("Written to")
+      .getByText(/, live\./)
+      .waitFor();
+    await openTools();
+    await button(page, "Turn into a kept sheet").click();
+    await page
+      .getByText("Written to")
+      .getByText(/, kept\./)
+      .waitFor();
+    expect(await announced(page)).toBe("The sheet Repairs answer is kept now: it holds values that stay.");
+  });
+
+  it("stay where values are missing; the cells are named and jump", async () => {
+    await page.evaluate(() => {
+      window.stage.host.refusals.keep = {
+        code: "values-missing",
+        cells: ["Answer!B9"],
+        values: ["#BUSY!"],
+        count: 1,
+      };
+    });
+    await openTools();
+    await button(page, "Turn into a kept sheet").click();
+    const alert = page.getByRole("alert");
+    await alert.getByText(/Cell Answer!B9 shows "#BUSY!" in place of a value/).waitFor();
+    await alert.getByRole("button", { name: "Answer!B9" }).click();
+    expect(await page.evaluate(() => window.stage.host.gone)).toEqual(["Answer!B9"]);
+  });
+
+  it("are explained where they show a sign in place of a value", async () => {
+    await openTools();
+    await button(page, "What #NAME?, #BUSY! and #SPILL! mean").click();
+    expect(await page.getByRole("term").allInnerTexts()).toEqual(["#NAME?", "#BUSY!", "#SPILL!"]);
+    expect(await page.getByRole("definition").count()).toBe(3);
+  });
+});
+
 describe("evidence", () => {
   it("gives every test with its question, reading and source", async () => {
     await getAnswer(page);

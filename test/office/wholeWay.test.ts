@@ -138,6 +138,22 @@ describe("from cells to a result sheet", () => {
     expect(errorsOn(opened.desk, live)).toEqual([]);
   });
 
+  it("live, then kept: the sheet looks the same and holds no formula", async () => {
+    const opened = await open(monthlyRows());
+    const made = await answerFrom(opened, "Data!B9");
+    const sheet = await writeAnswer(opened, made, "live");
+    const shown = (): unknown => opened.desk.values(`'${sheet}'!A1:BZ120`);
+    const before = shown();
+    expect(value(await opened.host.keepSheet(errand()))).toEqual({ sheet });
+    await opened.desk.settle();
+    expect(shown()).toEqual(before);
+    const kept = opened.desk.snapshot().sheets.find(({ name }) => name === sheet)!;
+    const cells = kept.rows.flat().filter((cell) => typeof cell === "object" && cell !== null && "formula" in cell);
+    expect(cells).toEqual([]);
+    expect(kept.charts).toHaveLength(2);
+    expectSame(shownFigures(opened.desk, sheet, made.answer), figuresOf(made.answer));
+  });
+
   it("separate cases: a heading that looks like a formula stays a heading all the way", async () => {
     const opened = await open(shopRows());
     const made = await answerFrom(opened, "Data!A1");

@@ -12,7 +12,7 @@ export interface FakeHost extends Host {
   readonly sheet: string;
   readonly places: DataPlace[];
   /** What the next call of each kind answers instead of what was asked. */
-  readonly refusals: Partial<Record<"read" | "write" | "goTo" | "watch", Problem>>;
+  readonly refusals: Partial<Record<"read" | "write" | "goTo" | "watch" | "recalculate" | "keep", Problem>>;
   /** Whether it carries on as if nothing had been cancelled. */
   heedless: boolean;
   /** Holds readings back until it is called. */
@@ -32,6 +32,7 @@ export function fakeHost(sheet: string, rows: Cell[][]): FakeHost {
     const problem = host.refusals[kind];
     return problem === undefined ? success(value) : failure(problem);
   };
+  const inFront = (): string => host.plans.at(-1)?.name ?? sheet;
   const host: FakeHost = {
     sheet,
     rows,
@@ -61,6 +62,8 @@ export function fakeHost(sheet: string, rows: Cell[][]): FakeHost {
         refused("write", { sheet: `${plan.name}${host.plans.length > 1 ? ` ${host.plans.length}` : ""}` }),
       );
     },
+    recalculateSheet: () => Promise.resolve(refused("recalculate", { sheet: inFront() })),
+    keepSheet: () => Promise.resolve(refused("keep", { sheet: inFront() })),
     goTo: (address) => {
       host.gone.push(address);
       return Promise.resolve(refused("goTo", null));

@@ -217,6 +217,11 @@ const sentences: { readonly [Code in Problem["code"]]: (problem: Extract<Problem
     "The workbook's structure is protected, so no sheet can be added.",
     "Lift the protection (Review, Protect Workbook) and try again.",
   ],
+  "not-a-result-sheet": ({ sheet }) => [`Footing did not write "${sheet}".`, "Show a live result sheet first."],
+  "values-missing": (missing) => [
+    `${theCells(missing)} ${missing.count === 1 ? "shows" : "show"} ${valuesOf(missing)} in place of a value.`,
+    "Wait until all values are there, or recalculate the sheet's functions, then try again.",
+  ],
   "unknown-place": ({ place, nearest }) => [
     `There is no sheet, table, name or range "${place}" in the workbook.`,
     suggestion(nearest, "Choose one from the list, or type an address such as Sheet1!A1:D97."),

@@ -107,6 +107,14 @@ export type HostProblem =
   | { readonly code: "other-workbook" }
   | { readonly code: "sheet-protected"; readonly sheet: string }
   | { readonly code: "workbook-protected" }
+  | { readonly code: "not-a-result-sheet"; readonly sheet: string }
+  /** Cells of a live sheet that show no value: "#BUSY!" or another error; ten at most are named. */
+  | {
+      readonly code: "values-missing";
+      readonly cells: readonly string[];
+      readonly values: readonly string[];
+      readonly count: number;
+    }
   | { readonly code: "unknown-place"; readonly place: string; readonly nearest: string | null }
   | { readonly code: "bad-address"; readonly address: string }
   | { readonly code: "too-much-for-excel"; readonly cells: number; readonly limit: number }

@@ -31,7 +31,7 @@ export const isOrAre = ({ count }: Cells): string => (count === 1 ? "is" : "are"
 export const holds = (spots: Spots): string => `${spots.count === 1 ? "holds" : "hold"} ${valuesOf(spots)}`;
 
 /** The distinct values, in quotation marks, and whether there are others. */
-export function valuesOf({ values, count }: Spots): string {
+export function valuesOf({ values, count }: Pick<Spots, "values" | "count">): string {
   const distinct = [...new Set(values)].slice(0, mostListed).map((value) => `"${shortened(value)}"`);
   return distinct.join(", ") + (count > values.length ? " and others" : "");
 }

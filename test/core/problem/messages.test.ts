@@ -218,6 +218,14 @@ const sentences: Sentences = {
     { code: "workbook-protected" },
     "The workbook's structure is protected, so no sheet can be added. Lift the protection (Review, Protect Workbook) and try again.",
   ],
+  "not-a-result-sheet": [
+    { code: "not-a-result-sheet", sheet: "Months" },
+    'Footing did not write "Months". Show a live result sheet first.',
+  ],
+  "values-missing": [
+    { code: "values-missing", cells: ["Answer!B9", "Answer!X4"], values: ["#BUSY!", "#BUSY!"], count: 2 },
+    'Cells Answer!B9 and Answer!X4 show "#BUSY!" in place of a value. Wait until all values are there, or recalculate the sheet\'s functions, then try again.',
+  ],
   "unknown-place": [
     { code: "unknown-place", place: "Mnths", nearest: "Months" },
     'There is no sheet, table, name or range "Mnths" in the workbook. Did you mean "Months"?',

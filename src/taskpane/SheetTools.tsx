@@ -1,0 +1,93 @@
+import { Button, makeStyles, mergeClasses, tokens } from "@fluentui/react-components";
+import type { ReactNode } from "react";
+import { Disclosure } from "./parts/Disclosure.tsx";
+import { useType } from "./look/type.ts";
+import { usePane } from "./paneContext.ts";
+
+const useStyles = makeStyles({
+  place: { marginTop: tokens.spacingVerticalL },
+  buttons: {
+    display: "flex",
+    flexWrap: "wrap",
+    gap: tokens.spacingHorizontalS,
+    margin: `${tokens.spacingVerticalXS} 0 ${tokens.spacingVerticalS}`,
+  },
+  signs: { margin: `${tokens.spacingVerticalXS} 0 0` },
+  sign: { fontWeight: tokens.fontWeightSemibold, fontSize: tokens.fontSizeBase200 },
+  meaning: { margin: `0 0 ${tokens.spacingVerticalS}` },
+});
+
+/** What can be done with the functions of the sheet in front, and what their signs mean. */
+export function SheetTools(): ReactNode {
+  const styles = useStyles();
+  const { state } = usePane();
+  return (
+    <section className={styles.place} aria-label="Functions in the sheet">
+      <Disclosure label="Functions in the sheet in front">
+        <Tools />
+      </Disclosure>
+      {state.sheetDone !== "" && <Done words={state.sheetDone} />}
+    </section>
+  );
+}
+
+function Tools(): ReactNode {
+  const styles = useStyles();
+  const type = useType();
+  const { state, commands } = usePane();
+  const busy = state.busy !== null;
+  return (
+    <>
+      <div className={styles.buttons}>
+        <Button size="small" disabledFocusable={busy} onClick={commands.recalculate}>
+          Recalculate this sheet's functions
+        </Button>
+        <Button size="small" disabledFocusable={busy} onClick={commands.keep}>
+          Turn into a kept sheet
+        </Button>
+      </div>
+      <p className={type.remark}>
+        A kept sheet holds values alone and needs no add-in where it is read. Formulas are replaced on sheets that
+        Footing wrote, and on no others.
+      </p>
+      <Disclosure label="What #NAME?, #BUSY! and #SPILL! mean">
+        <Signs />
+      </Disclosure>
+    </>
+  );
+}
+
+const signs: readonly (readonly [sign: string, meaning: string])[] = [
+  [
+    "#NAME?",
+    "The add-in is not loaded here. Open Footing once in this workbook, then recalculate; who has no add-in needs a kept sheet.",
+  ],
+  [
+    "#BUSY!",
+    "The function is still at work. The value comes by itself; if it stays away, recalculate this sheet's functions.",
+  ],
+  [
+    "#SPILL!",
+    "Something stands in the cells that the result needs. Empty the cells below and to the right of the formula, or move it.",
+  ],
+];
+
+function Signs(): ReactNode {
+  const styles = useStyles();
+  const type = useType();
+  return (
+    <dl className={styles.signs} aria-label="What the signs mean">
+      {signs.map(([sign, meaning]) => (
+        <div key={sign}>
+          <dt className={styles.sign}>{sign}</dt>
+          <dd className={mergeClasses(type.remark, styles.meaning)}>{meaning}</dd>
+        </div>
+      ))}
+    </dl>
+  );
+}
+
+function Done({ words }: { readonly words: string }): ReactNode {
+  const type = useType();
+  return <p className={type.remark}>{words}</p>;
+}
