@@ -1,5 +1,5 @@
 import type { Analyst } from "../app/analyst.ts";
-import { fingerprint } from "../app/fingerprint.ts";
+import { fingerprintOf } from "../app/fingerprint.ts";
 import type { Errand, Host } from "../app/host.ts";
 import { sheetFactsOf } from "../app/sheetFacts.ts";
 import type { Answer } from "../core/answer/answer.ts";
@@ -80,7 +80,7 @@ async function save({ opened, asked, answer, file, command }: Saving, world: Sur
   const made = {
     date: world.today(),
     version: world.version,
-    fingerprint: await fingerprint(question.source.columns),
+    fingerprint: await fingerprintOf(question),
     headingRow: table.headingRow,
   };
   const plan = planAnswer(answer, sheetFactsOf(question, made), command.live ? "live" : "kept");

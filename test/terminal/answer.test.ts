@@ -207,6 +207,21 @@ describe("--save", () => {
     expect(kept.value.sheets.at(-1)!.charts.map(({ series }) => series.length)).toEqual([1, 3]);
   });
 
+  it("the fingerprint is of the columns used, whatever stands beside them", async () => {
+    const rows = ["Sales,Fee", "3,1", "5,2", "4,4", "8,5", "9,8"];
+    const files = shelf({ "bare.csv": rows.join("\n"), "more.csv": rows.map((row, at) => `${row},x${at}`).join("\n") });
+    const line = ["--outcome", "Sales", "--drivers", "Fee", "--save", "out.xlsx"];
+    const prints: unknown[] = [];
+    for (const book of ["bare.csv", "more.csv"]) {
+      await run([book, ...line], files);
+      const opened = await openXlsx(files.files.get("out.xlsx")!);
+      if (!opened.ok) throw new Error(opened.because);
+      prints.push(/"([0-9a-f]{64})"/.exec(JSON.stringify(opened.value.sheets.at(-1)!.rows))?.[1]);
+    }
+    expect(prints[0]).toHaveLength(64);
+    expect(prints[1]).toBe(prints[0]);
+  });
+
   it("--live: the same figures as worksheet functions with their values", async () => {
     await run([...months, "--save", "kept.xlsx"], demo);
     await run([...months, "--live", "--save", "live.xlsx"], demo);
