@@ -8,7 +8,7 @@ import { watchChanges } from "../workbook/changes.ts";
 import type { Book } from "../workbook/book.ts";
 import type { Grid } from "../workbook/grid.ts";
 import type { BlankArrival, FunctionsMetadata } from "../workbook/metadata.ts";
-import { openBook } from "../workbook/openBook.ts";
+import { calculateUnsaved, openBook } from "../workbook/openBook.ts";
 import { startCalls, type Call, type CallDoors } from "../workbook/pendingCalls.ts";
 import { followChanges } from "../workbook/shifts.ts";
 import { snapshotOf } from "../workbook/snapshot.ts";
@@ -46,21 +46,16 @@ const standardNamespace = "FOOTING";
 /** Opens a workbook in a grid and answers the add-in at the other end of the line. */
 export function startDesk(grid: Grid, line: Transport, options: DeskOptions): Desk {
   const server = serveRequests(line);
-  const functions = functionsOf({ line, server, options }, (results) => take(results));
-  const book = openBook(grid, options.book, (opened) => registerFunctions(opened, functions));
-  const take = (results: Arrived): void => {
-    for (const { fills } of results) growTo(book, fills);
-    recalculate(
-      book,
-      results.map(({ cell }) => cell),
-    );
-  };
+  const book = openBook(grid, options.book);
   const calculation = watchCalculation(book);
+  const functions = functionsOf({ line, server, options }, (results) => takeIn(book, results));
+  registerFunctions(book, functions);
   calculation.onFinished(functions.calls.settle);
   const host = hostOf(book, { calculation, functions, server, profile: options.profile ?? "desktop" });
   book.listeners.add((change) => followChanges(book, change));
   book.listeners.add((change) => raiseChanges(host, change));
   const stopWatching = watchChanges(book);
+  calculateUnsaved(book, options.book);
   server.answer(host);
   return {
     ...hands(host, functions.messages),
@@ -75,6 +70,13 @@ export function startDesk(grid: Grid, line: Transport, options: DeskOptions): De
       calculation.stop();
     },
   };
+}
+
+/** Results have come: their cells are calculated again, on a sheet that is large enough for what they fill. */
+function takeIn(book: Book, results: Arrived): void {
+  for (const { fills } of results) growTo(book, fills);
+  const cells = results.map(({ cell }) => cell);
+  recalculate(book, cells);
 }
 
 type Arrived = Parameters<CallDoors["arrived"]>[0];

@@ -42,46 +42,70 @@ export interface Calculation {
   readonly stop: () => void;
 }
 
-interface Progress {
+/** What a run of the engine was told to take for changed. */
+interface Dirt {
+  readonly forceCalculation?: boolean;
+  readonly dirtyRanges?: readonly unknown[];
+}
+
+interface Run {
+  readonly dirt: Dirt;
+  /** Begun while another was at work, which changes beneath it what it is to calculate. */
+  readonly crossed: boolean;
+  stopped: boolean;
+}
+
+/**
+ * The engine begins a run while another is under way, and forgets what a stopped run was to calculate. So every run's
+ * task is written down here until a run that was neither stopped nor crossed has done it.
+ */
+interface Ledger {
   readonly book: Book;
   readonly listeners: (() => void)[];
-  /** Runs of the engine that have begun and not ended. */
-  running: number;
-  /** The last stage of a run was reached; its results follow. */
+  /** Runs that have begun and not ended; they end in the order in which they begin. */
+  readonly runs: Run[];
+  /** The last stage of the first run was reached; its results follow. */
   ending: boolean;
   /** Changes that the engine has seen and not yet begun to calculate. */
   waiting: ICommandInfo[];
   /** Changes for which it asked the run under way to stop and begin anew. */
   interrupting: ICommandInfo[];
+  /** Tasks of runs that did not do them. */
+  owed: Dirt[];
 }
 
 export function watchCalculation(book: Book): Calculation {
-  const progress: Progress = { book, listeners: [], running: 0, ending: false, waiting: [], interrupting: [] };
+  const ledger: Ledger = { book, listeners: [], runs: [], ending: false, waiting: [], interrupting: [], owed: [] };
   const follow = book.grid.injector
     .get(ICommandService)
-    .onCommandExecuted((info, options) => follows(progress, info, options));
+    .onCommandExecuted((info, options) => follows(ledger, info, options));
   return {
-    busy: () => progress.running > 0 || progress.waiting.length > 0,
-    onFinished: (listener) => progress.listeners.push(listener),
+    busy: () => ledger.runs.length + ledger.waiting.length + ledger.owed.length > 0,
+    onFinished: (listener) => ledger.listeners.push(listener),
     stop: () => follow.dispose(),
   };
 }
 
-function follows(progress: Progress, info: Readonly<ICommandInfo>, options?: IExecutionOptions): void {
+function follows(ledger: Ledger, info: Readonly<ICommandInfo>, options?: IExecutionOptions): void {
   switch (info.id) {
     case SetFormulaCalculationStartMutation.id:
-      progress.waiting = [];
+      ledger.runs.push({
+        dirt: (info.params ?? {}),
+        crossed: ledger.runs.some(({ stopped }) => !stopped),
+        stopped: false,
+      });
+      ledger.waiting = [];
       break;
     case SetFormulaCalculationStopMutation.id:
-      progress.interrupting.push(...progress.waiting);
-      progress.waiting = [];
+      ledger.interrupting.push(...ledger.waiting);
+      ledger.waiting = [];
       break;
     case SetFormulaCalculationNotificationMutation.id:
-      heed(progress, info.params ?? {});
+      heed(ledger, info.params ?? {});
       break;
     default: {
-      const dirt = progress.book.grid.injector.get(IActiveDirtyManagerService);
-      if (dirt.get(info.id) !== undefined && setsOff(info, options)) progress.waiting.push(info);
+      const dirt = ledger.book.grid.injector.get(IActiveDirtyManagerService);
+      if (dirt.get(info.id) !== undefined && setsOff(info, options)) ledger.waiting.push(info);
     }
   }
 }
@@ -91,26 +115,51 @@ interface Notice {
   readonly functionsExecutedState?: FormulaExecutedStateType;
 }
 
-/** Every run tells its first and its last stage once; what it ended in may be told twice, the first time too early. */
-function heed(progress: Progress, { stageInfo, functionsExecutedState: state }: Notice): void {
-  if (stageInfo?.stage === FormulaExecuteStageType.START) progress.running += 1;
-  if (stageInfo?.stage === FormulaExecuteStageType.CALCULATION_COMPLETED) progress.ending = true;
+/** A run tells its last stage once, and then what it ended in; that it was stopped it tells before, too. */
+function heed(ledger: Ledger, { stageInfo, functionsExecutedState: state }: Notice): void {
+  if (stageInfo?.stage === FormulaExecuteStageType.CALCULATION_COMPLETED) ledger.ending = true;
   if (state === undefined) return;
-  if (state === FormulaExecutedStateType.STOP_EXECUTION) progress.interrupting = [];
-  if (!progress.ending) return;
-  progress.ending = false;
-  progress.running -= 1;
+  if (ledger.ending) endRun(ledger, state);
+  else if (state === FormulaExecutedStateType.STOP_EXECUTION) {
+    const [run] = ledger.runs;
+    if (run !== undefined) run.stopped = true;
+    // The engine begins anew at once, with these.
+    ledger.interrupting = [];
+  }
+}
+
+function endRun(ledger: Ledger, state: FormulaExecutedStateType): void {
+  const run = ledger.runs.shift();
+  ledger.ending = false;
   const whole = state === FormulaExecutedStateType.SUCCESS || state === FormulaExecutedStateType.NOT_EXECUTED;
-  if (!whole) return;
-  repeatInterruption(progress);
-  for (const listener of progress.listeners) listener();
+  if (run !== undefined) {
+    if (whole && !run.stopped && !run.crossed) ledger.owed = ledger.owed.filter((dirt) => !covers(run.dirt, dirt));
+    else ledger.owed.push(run.dirt);
+  }
+  if (whole) {
+    repeatInterruption(ledger);
+    for (const listener of ledger.listeners) listener();
+  }
+  if (ledger.runs.length === 0 && ledger.waiting.length === 0) {
+    for (const dirt of ledger.owed.splice(0)) startCalculation(ledger.book, dirt);
+  }
+}
+
+/** Whether a run over the one takes in all that the other speaks of. */
+function covers(one: Dirt, other: Dirt): boolean {
+  if (one.forceCalculation === true) return true;
+  const ranges = new Set((one.dirtyRanges ?? []).map((range) => JSON.stringify(range)));
+  const rest = (dirt: Dirt): string =>
+    JSON.stringify({ ...dirt, dirtyRanges: null, rowData: null, maxIteration: null });
+  const same = rest(one) === rest(other);
+  return same && (other.dirtyRanges ?? []).every((range) => ranges.has(JSON.stringify(range)));
 }
 
 /** Asked to stop when it was as good as done, the engine ends well and forgets that it was to begin anew. */
-function repeatInterruption(progress: Progress): void {
-  const dirt = progress.book.grid.injector.get(IActiveDirtyManagerService);
-  for (const info of progress.interrupting.splice(0)) {
-    startCalculation(progress.book, dirt.get(info.id)?.getDirtyData(info) ?? {});
+function repeatInterruption(ledger: Ledger): void {
+  const dirt = ledger.book.grid.injector.get(IActiveDirtyManagerService);
+  for (const info of ledger.interrupting.splice(0)) {
+    startCalculation(ledger.book, dirt.get(info.id)?.getDirtyData(info) ?? {});
   }
 }
 

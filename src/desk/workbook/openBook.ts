@@ -12,11 +12,8 @@ import { isStyled, toGrid } from "./toGrid.ts";
 
 let opened = 0;
 
-/**
- * Opens a workbook in the grid. Saved values stand; only formulas without one are calculated.
- * @param prepare - what must be in place before the first formula is calculated, such as an add-in's functions.
- */
-export function openBook(grid: Grid, data: BookData, prepare: (book: Book) => void = () => undefined): Book {
+/** Opens a workbook in the grid with the values it was saved with; nothing is calculated yet. */
+export function openBook(grid: Grid, data: BookData): Book {
   opened += 1;
   const ids = data.sheets.map((_, index) => `sheet-${index + 1}`);
   const book: Book = {
@@ -34,13 +31,14 @@ export function openBook(grid: Grid, data: BookData, prepare: (book: Book) => vo
   const workbook = grid.api.createWorkbook(toGrid(book.unit, data, ids));
   data.sheets.forEach((sheet, index) => seedSpills(book, sheet, ids[index]!));
   workbook.setActiveSheet(ids[data.active] ?? ids[0]!);
-  prepare(book);
-  const unsaved = data.sheets.flatMap((sheet, index) => unsavedFormulas(sheet, ids[index]!));
-  if (unsaved.length > 0) {
-    grid.awaken();
-    recalculate(book, unsaved);
-  }
   return book;
+}
+
+/** Calculates the formulas that were saved without a value, once an add-in's functions are known. */
+export function calculateUnsaved(book: Book, data: BookData): void {
+  const ids = [...book.sheets.keys()];
+  const unsaved = data.sheets.flatMap((sheet, index) => unsavedFormulas(sheet, ids[index]!));
+  if (unsaved.length > 0) recalculate(book, unsaved);
 }
 
 function registerNames(book: Book, data: BookData): void {
