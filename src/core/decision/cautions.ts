@@ -16,7 +16,17 @@ const fewGroups = 42;
 
 const degreesOfFreedom = ({ sizes }: Evidence): number => sizes.rows - sizes.columns;
 
+/** With so few rows to spare neither the tests nor the standard errors have anything to go by. */
+const hardlyAny = 10;
+
 const cautions: readonly Caution[] = [
+  {
+    applies: (_, evidence) => degreesOfFreedom(evidence) < hardlyAny,
+    sentence: (evidence) => {
+      const spare = degreesOfFreedom(evidence);
+      return `There ${spare === 1 ? "is only 1 row" : `are only ${spare} rows`} more than coefficients: the tests can find next to nothing and the standard errors are themselves a guess.`;
+    },
+  },
   {
     applies: ({ fourCase, called }, evidence) =>
       fourCase.spread === "even" &&

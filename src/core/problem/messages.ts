@@ -44,7 +44,7 @@ const sentences: { readonly [Code in Problem["code"]]: (problem: Extract<Problem
   ],
   "text-numbers": (spots) => [
     `${theCells(spots)} in column "${spots.column}" ${holds(spots)}: ${spots.count === 1 ? "a number" : "numbers"} kept as text.`,
-    "Allow text to be read as numbers for this column, or turn the text into numbers in the sheet.",
+    "Allow text to be read as numbers for this column (the setting text numbers), or turn the text into numbers in the sheet.",
   ],
   "dates-as-text": (spots) => [
     `${theCells(spots)} in column "${spots.column}" ${holds(spots)}: ${spots.count === 1 ? "a date" : "dates"} kept as text.`,

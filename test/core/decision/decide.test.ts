@@ -183,6 +183,13 @@ describe("cautions", () => {
     expect(decided(evidence(clean, months(400), 400)).cautions).toEqual([]);
   });
 
+  it("say first how little is left where rows are hardly more than coefficients", () => {
+    const few = { ...evidence(clean, cases), sizes: { rows: 5, columns: 4, lags: 0 } };
+    expect(decided(few).cautions[0]).toContain("There is only 1 row more than coefficients");
+    const enough = { ...evidence(clean, cases), sizes: { rows: 14, columns: 4, lags: 0 } };
+    expect(decided(enough).cautions[0]).not.toContain("more than coefficients");
+  });
+
   it("count the groups where they are few", () => {
     expect(decided(evidence(clean, shops, 40)).cautions[0]).toContain("only 2 groups");
   });

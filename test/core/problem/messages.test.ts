@@ -31,7 +31,7 @@ const sentences: Sentences = {
   ],
   "text-numbers": [
     { code: "text-numbers", ...two, values: ["1,5", "2,5"] },
-    'Cells Months!C14 and Months!C15 in column "Price" hold "1,5", "2,5": numbers kept as text. Allow text to be read as numbers for this column, or turn the text into numbers in the sheet.',
+    'Cells Months!C14 and Months!C15 in column "Price" hold "1,5", "2,5": numbers kept as text. Allow text to be read as numbers for this column (the setting text numbers), or turn the text into numbers in the sheet.',
   ],
   "dates-as-text": [
     { code: "dates-as-text", ...one, values: ["3/4/2024"] },
