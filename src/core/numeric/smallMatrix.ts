@@ -1,11 +1,4 @@
-import {
-  CholeskyDecomposition,
-  EigenvalueDecomposition,
-  Matrix,
-  SingularValueDecomposition,
-  inverse,
-  solve,
-} from "ml-matrix";
+import { CholeskyDecomposition, EigenvalueDecomposition, Matrix, SingularValueDecomposition, inverse } from "ml-matrix";
 import type { SquareMatrix } from "./matrix.ts";
 
 /** Work on k by k matrices. Nothing here is meant for matrices with a row for each observation. */
@@ -67,10 +60,6 @@ export function bilinear(x: ArrayLike<number>, a: SquareMatrix, y: ArrayLike<num
 
 /** A^-1, by the LU decomposition; A must not be singular. */
 export const invert = (a: SquareMatrix): SquareMatrix => fromMatrix(inverse(toMatrix(a)));
-
-/** The x with A x = b, by the LU decomposition. */
-export const solveFor = (a: SquareMatrix, b: Float64Array): Float64Array<ArrayBuffer> =>
-  Float64Array.from(solve(toMatrix(a), Matrix.columnVector(b)).to1DArray());
 
 /** The lower triangle L with A = L L', or null where A is not positive definite. */
 export function choleskyFactor(a: SquareMatrix): SquareMatrix | null {
