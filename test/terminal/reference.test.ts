@@ -88,7 +88,7 @@ function expectAll(found: readonly number[] | undefined, expected: readonly numb
   });
 }
 
-/** Longley's columns are so nearly dependent that R itself carries fewer digits there, least at an end of an interval near zero; the fit's own test shows which is right. */
+/** Longley's columns are so nearly dependent that R itself carries fewer digits there, least at an end of an interval near zero; the covariances' own test, at 60 digits, shows which is right. */
 const digitsThatRReaches: Readonly<Record<string, number>> = { longley: 6.5 };
 
 describe.each(["longley", "school-scores-3", "investment", "orange-juice-6-lags", "cars"])("%s", (id) => {
