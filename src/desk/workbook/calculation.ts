@@ -90,7 +90,7 @@ function follows(ledger: Ledger, info: Readonly<ICommandInfo>, options?: IExecut
   switch (info.id) {
     case SetFormulaCalculationStartMutation.id:
       ledger.runs.push({
-        dirt: (info.params ?? {}),
+        dirt: info.params ?? {},
         crossed: ledger.runs.some(({ stopped }) => !stopped),
         stopped: false,
       });
