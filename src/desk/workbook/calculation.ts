@@ -3,6 +3,7 @@ import {
   FormulaExecutedStateType,
   FormulaExecuteStageType,
   IActiveDirtyManagerService,
+  IFormulaRuntimeService,
   SetFormulaCalculationNotificationMutation,
   SetFormulaCalculationStartMutation,
   SetFormulaCalculationStopMutation,
@@ -75,6 +76,9 @@ interface Ledger {
 }
 
 export function watchCalculation(book: Book): Calculation {
+  // A run that stops leaves a message channel open behind it, and an open channel keeps Node from ending. What a run
+  // should have stopped for is calculated after it instead.
+  book.grid.injector.get(IFormulaRuntimeService).isStopExecution = () => false;
   const ledger: Ledger = { book, listeners: [], runs: [], ending: false, waiting: [], interrupting: [], owed: [] };
   const follow = book.grid.injector
     .get(ICommandService)
