@@ -1,5 +1,5 @@
 import type { Fit } from "../fit/fit.ts";
-import { bandwidthOf } from "./bandwidth.ts";
+import { type DataRule, bandwidthOf } from "./bandwidth.ts";
 import type { LagRule } from "./choice.ts";
 import { lagWeights } from "./kernels.ts";
 import { timelineOf } from "./timeline.ts";
@@ -22,10 +22,14 @@ export function lagsOf(fit: Fit, rule: LagRule): number {
     case "cube root":
       return lagsForRows(timelineOf(fit).rows, rule.kind);
     case "newey-west 1994":
-      return Math.floor(bandwidthOf(fit, rule));
     case "andrews 1991":
-      return lagWeights(rule.kernel, bandwidthOf(fit, rule), timelineOf(fit).span).length - 1;
+      return lagsWithin(bandwidthOf(fit, rule), rule, timelineOf(fit).span);
   }
+}
+
+/** The number of lags that a bandwidth stands for. @param span - how many periods the longest sequence of rows spans. */
+export function lagsWithin(bandwidth: number, rule: DataRule, span: number): number {
+  return rule.kind === "andrews 1991" ? lagWeights(rule.kernel, bandwidth, span).length - 1 : Math.floor(bandwidth);
 }
 
 /** Rules that look at the number of rows alone. */

@@ -10,7 +10,7 @@ import { type Result, failure, success } from "../problem/result.ts";
 import { bandwidthFrom, looksAtScores } from "./bandwidth.ts";
 import type { Covariance, ErrorsChoice, LagRule } from "./choice.ts";
 import { lagWeights } from "./kernels.ts";
-import { lagsOf } from "./lags.ts";
+import { lagsOf, lagsWithin } from "./lags.ts";
 import { memory } from "./memory.ts";
 import { fromMeat } from "./sandwich.ts";
 import { type Scores, plainScores, prewhitenedScores } from "./scores.ts";
@@ -57,9 +57,11 @@ function longRun(fit: Fit, rule: LagRule, timeline: Timeline): LongRun {
   }
   const scores = rule.prewhiten ? prewhitenedScores(fit, timeline) : plainScores(fit, timeline);
   const bandwidth = bandwidthFrom(scores, fit, rule);
-  const weights = rule.kind === "andrews 1991" ? lagWeights(rule.kernel, bandwidth, timeline.span) : null;
-  const lags = weights === null ? Math.floor(bandwidth) : weights.length - 1;
-  const filtered = weights === null ? bartlettMeat(scores, lags) : kernelMeat(scores, weights);
+  const lags = lagsWithin(bandwidth, rule, timeline.span);
+  const filtered =
+    rule.kind === "andrews 1991"
+      ? kernelMeat(scores, lagWeights(rule.kernel, bandwidth, timeline.span))
+      : bartlettMeat(scores, lags);
   const meat = scores.recolouring === null ? filtered : sandwich(scores.recolouring, filtered);
   return { meat, used: { lags, bandwidth, fallback: scores.caution } };
 }

@@ -40,6 +40,22 @@ describe("two ways of grouping", () => {
     expectAllDigits(both.standardErrors, [...grouped(once, "CR1").standardErrors], 12);
   });
 
+  it("is left as it is where it is not indefinite, and says what was asked for and used", () => {
+    const both = grouped(orderedFit("grunfeld", "by year too"), "CR1");
+    expect(both.choice).toEqual({ kind: "grouped", version: "CR1" });
+    expect(both.used).toEqual({ lags: null, bandwidth: null, version: "CR1", fallback: null });
+    const once = grouped(orderedFit("grunfeld"), "CR2");
+    expect(once.choice).toEqual({ kind: "grouped", version: "CR2" });
+    expect(once.used).toEqual({ lags: null, bandwidth: null, version: "CR2", fallback: null });
+  });
+
+  it("keeps every version and way apart, whatever was asked for before", () => {
+    const asked = (fit: Fit, versions: readonly GroupedVersion[]): Record<string, number[]> =>
+      Object.fromEntries(versions.map((version) => [version, [...grouped(fit, version).standardErrors]]));
+    const forwards = asked(orderedFit("grunfeld", "by year too"), ["CR0", "CR1", "CR2"]);
+    expect(asked(orderedFit("grunfeld", "by year too"), ["CR2", "CR1", "CR0"])).toEqual(forwards);
+  });
+
   it("has the degrees of freedom of the fewer groups", () => {
     expect([...grouped(orderedFit("grunfeld", "by year too"), "CR1").degreesOfFreedom!]).toEqual([10, 10, 10]);
     expect([...grouped(orderedFit("grunfeld"), "CR0").degreesOfFreedom!]).toEqual([10, 10, 10]);
@@ -58,6 +74,7 @@ describe("two ways of grouping", () => {
     const covariance = grouped(fitOf(designOf(y, [x], { order })), "CR0");
     expect(covariance.used.fallback).toContain("indefinite");
     expect(covariance.standardErrors.every((value) => value >= 0)).toBe(true);
+    expect(Math.max(...covariance.standardErrors)).toBeGreaterThan(0.1);
   });
 });
 
@@ -70,6 +87,19 @@ describe("CR2", () => {
     expect(standardErrors.every(Number.isFinite)).toBe(true);
     expect(standardErrors[1]).toBeGreaterThan(0);
     expect(degreesOfFreedom!.every((df) => df >= 1 && df <= 3)).toBe(true);
+  });
+});
+
+describe("a coefficient that one group alone determines", () => {
+  it("has one degree of freedom under CR2, and no error to show", () => {
+    const groups = [0, 0, 0, 1, 1, 1, 2, 2, 2, 3, 3, 3];
+    const indicator = (holds: (group: number) => boolean): number[] => groups.map((group) => (holds(group) ? 1 : 0));
+    const columns = [indicator((group) => group === 0), indicator((group) => group > 0)];
+    const fit = fitOf(designOf(draws(12), columns, { constant: false, order: inGroups(groups) }));
+    const { degreesOfFreedom, standardErrors } = grouped(fit, "CR2");
+    expect(degreesOfFreedom![0]).toBe(1);
+    expect(standardErrors[0]).toBeLessThan(1e-12);
+    expect(degreesOfFreedom![1]).toBeCloseTo(2, 12);
   });
 });
 

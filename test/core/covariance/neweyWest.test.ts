@@ -151,7 +151,45 @@ describe("lag rules", () => {
   });
 });
 
+describe("lagsOf", () => {
+  it("gives what the covariance uses, whatever the rule", () => {
+    const fit = orderedFit("investment");
+    const rules: LagRule[] = [
+      { kind: "thumb" },
+      { kind: "careful" },
+      { kind: "cube root" },
+      ...[false, true].flatMap((prewhiten): LagRule[] => [
+        { kind: "newey-west 1994", prewhiten },
+        { kind: "andrews 1991", kernel: "bartlett", prewhiten },
+        { kind: "andrews 1991", kernel: "quadratic spectral", prewhiten },
+      ]),
+    ];
+    const used = rules.map((rule) => {
+      const covariance = covarianceOf(fit, neweyWest(rule));
+      return covariance.ok ? covariance.value.used.lags : null;
+    });
+    expect(rules.map((rule) => lagsOf(fit, rule))).toEqual(used);
+    expect(new Set(used).size).toBeGreaterThan(3);
+  });
+});
+
 describe("prewhitening", () => {
+  it("held at 0.97 multiplies what the filter leaves by 1 / 0.03", () => {
+    const n = 200;
+    const trending = draws(n).map((noise, t) => t + noise);
+    const fit = fitOf(designOf(trending, [new Array<number>(n).fill(1)], { constant: false, order: throughTime(n) }));
+    const covariance = covarianceOf(fit, neweyWest({ kind: "newey-west 1994", prewhiten: true }));
+    if (!covariance.ok) throw new Error(covariance.problem.code);
+    const { lags, fallback } = covariance.value.used;
+    expect(fallback).not.toBeNull();
+    const rest = [...fit.residuals.subarray(1)].map((u, i) => u - 0.97 * fit.residuals[i]!);
+    let sum = 0;
+    rest.forEach((left, t) =>
+      rest.forEach((right, s) => (sum += Math.max(0, 1 - Math.abs(t - s) / (lags! + 1)) * left * right)),
+    );
+    expect(covariance.value.standardErrors[0]! / (Math.sqrt(sum) / 0.03 / n)).toBeCloseTo(1, 10);
+  });
+
   it("is held back where the scores nearly have a unit root, and says so", () => {
     const covariance = covarianceOf(orderedFit("longley"), neweyWest({ kind: "newey-west 1994", prewhiten: true }));
     if (!covariance.ok) throw new Error(covariance.problem.code);

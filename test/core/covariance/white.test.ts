@@ -49,11 +49,27 @@ describe("a row that fits itself", () => {
   });
 });
 
+describe("the term that is named", () => {
+  it("is not the constant where a driver stands apart in one row alone", () => {
+    const fit = fitOf(designOf(y, [[2, 2, 2, 1, 2, 2, 2, 2]], { names: ["Shops"] }));
+    expect(whiteCovariance(fit, "HC2").used.fallback).toContain(
+      'row 4 of the data alone determines the coefficient of "Shops"',
+    );
+  });
+});
+
 describe("a leverage near one", () => {
   it("is not taken for one", () => {
     const fit = fitOf(designOf(y, [[1, 2, 3, 4, 5, 6, 7, 1e4]]));
     expect(fit.leverages[7]).toBeGreaterThan(0.999999);
     expect(whiteCovariance(fit, "HC3").used).toEqual({ lags: null, bandwidth: null, version: "HC3", fallback: null });
+  });
+});
+
+describe("classical", () => {
+  it("says what was asked for", () => {
+    const covariance = covarianceOf(fitOf(designOf(y, [x])), { kind: "classical" });
+    expect(covariance.ok && covariance.value.choice).toEqual({ kind: "classical" });
   });
 });
 

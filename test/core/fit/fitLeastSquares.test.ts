@@ -82,6 +82,26 @@ describe("what cannot be fitted", () => {
     ).toEqual({ code: "perfect-fit", column: "y" });
   });
 
+  it("a perfect fit by large terms that all but cancel", () => {
+    const random = randomFrom(6);
+    const a = Array.from({ length: 20 }, () => 1e9 * (1 + random.uniform()));
+    const b = a.map((value) => value - random.normal());
+    const y = a.map((value, i) => 3 * value - 3 * b[i]!);
+    expect(problemOf(y, [a, b])).toEqual({ code: "perfect-fit", column: "y" });
+  });
+
+  it("a column of zeros where there is no constant", () => {
+    const problem = problemOf(
+      [3, 1, 4, 1, 5],
+      [
+        [2, 7, 1, 8, 2],
+        [0, 0, 0, 0, 0],
+      ],
+      { constant: false },
+    );
+    expect(problem).toEqual({ code: "dependent-columns", column: "x2", madeOf: [] });
+  });
+
   it("but errors in the twelfth digit are errors", () => {
     const random = randomFrom(5);
     const x = Array.from({ length: 20 }, (_, i) => i);
