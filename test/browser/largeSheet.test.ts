@@ -27,6 +27,9 @@ function largeFile(): Buffer {
   return Buffer.from([["Cost", ...drivers].join(","), ...lines].join("\n"));
 }
 
+/** A busy machine takes its time to read 200,000 rows into the grid; that is not what is measured here. */
+const openingMilliseconds = 400_000;
+
 let suite: DeskSuite;
 let desk: DeskPage;
 beforeAll(async () => {
@@ -38,8 +41,8 @@ beforeAll(async () => {
   await desk.page.getByText("trips", { exact: true }).first().waitFor();
   await desk.pane.getByLabel("Or type an address").fill("trips!A1:G200001");
   await desk.pane.getByRole("button", { name: "Read it" }).click();
-  await desk.pane.getByText("200,000 rows").first().waitFor({ timeout: 120_000 });
-});
+  await desk.pane.getByText("200,000 rows").first().waitFor({ timeout: 300_000 });
+}, openingMilliseconds);
 afterAll(() => suite.close());
 
 const paneFrame = (): Frame => {
@@ -75,22 +78,26 @@ const provesItself = async (): Promise<number> => {
 const longestTask = (): Promise<number> =>
   paneFrame().evaluate(() => Math.max(0, ...(globalThis as unknown as { durations: number[] }).durations));
 
-it("shows progress and can be cancelled while 200,000 rows are answered", async () => {
-  const { pane } = desk;
-  await pane.getByRole("button", { name: "Get the answer" }).click();
-  await pane.getByRole("progressbar").waitFor();
-  await pane.getByRole("button", { name: "Cancel" }).click();
-  await pane.getByRole("progressbar").waitFor({ state: "detached" });
-  expect(await pane.getByText("Cost explained by").count()).toBe(0);
-});
+it(
+  "shows progress and can be cancelled while 200,000 rows are answered",
+  { timeout: openingMilliseconds },
+  async () => {
+    const { pane } = desk;
+    await pane.getByRole("button", { name: "Get the answer" }).click();
+    await pane.getByRole("progressbar").waitFor();
+    await pane.getByRole("button", { name: "Cancel" }).click();
+    await pane.getByRole("progressbar").waitFor({ state: "detached" });
+    expect(await pane.getByText("Cost explained by").count()).toBe(0);
+  },
+);
 
 // A busy machine can make one task long that is not: only the same finding three times over counts.
-it("keeps the pane responsive meanwhile", { retry: 2 }, async () => {
+it("keeps the pane responsive meanwhile", { retry: 2, timeout: openingMilliseconds }, async () => {
   const { pane } = desk;
   await pane.getByRole("tab", { name: "Data" }).click();
   await watchTasks();
   expect(await provesItself()).toBeGreaterThan(100);
   await pane.getByRole("button", { name: /Get the answer|Answer again/ }).click();
-  await pane.getByRole("heading", { name: /^Cost explained by/ }).waitFor({ timeout: 120_000 });
+  await pane.getByRole("heading", { name: /^Cost explained by/ }).waitFor({ timeout: 300_000 });
   expect(await longestTask()).toBeLessThan(longestTaskMilliseconds);
 });
