@@ -1,5 +1,5 @@
 import type { SquareMatrix } from "../numeric/matrix.ts";
-import { addOuterProduct, multiply, transposed } from "../numeric/smallMatrix.ts";
+import { addOuterProduct, multiply } from "../numeric/smallMatrix.ts";
 
 /** Gathers what Satterthwaite's degrees of freedom need, group by group. */
 export interface SatterthwaiteSums {
@@ -18,13 +18,13 @@ export interface SatterthwaiteSums {
  */
 export function satterthwaite(inverseTriangle: SquareMatrix): SatterthwaiteSums {
   const { size } = inverseTriangle;
-  const weights = transposed(inverseTriangle);
   const sums = Array.from({ length: size }, () => ({ trace: 0, own: 0, cross: new Float64Array(size * size) }));
   return {
     add: (within, adjustment) => {
-      const adjusted = multiply(adjustment, weights);
-      const seen = multiply(within, adjusted);
-      sums.forEach((sum, coefficient) => addGroup(sum, columnOf(adjusted, coefficient), columnOf(seen, coefficient)));
+      // Row l of these is (B_g z)' and t_g' of coefficient l.
+      const adjusted = multiply(inverseTriangle, adjustment);
+      const seen = multiply(adjusted, within);
+      sums.forEach((sum, l) => addGroup(sum, rowOf(adjusted, l), rowOf(seen, l)));
     },
     degreesOfFreedom: () => Float64Array.from(sums, degreesFrom),
   };
@@ -54,5 +54,5 @@ function degreesFrom({ trace, own, cross }: Sums): number {
 
 const innerProduct = (x: Float64Array, y: Float64Array): number => x.reduce((sum, value, i) => sum + value * y[i]!, 0);
 
-const columnOf = ({ size, values }: SquareMatrix, column: number): Float64Array =>
-  Float64Array.from({ length: size }, (_, i) => values[i * size + column]!);
+const rowOf = ({ size, values }: SquareMatrix, row: number): Float64Array =>
+  values.subarray(row * size, (row + 1) * size);

@@ -13,8 +13,18 @@ export const matrixOf = (rows: readonly (readonly number[])[]): SquareMatrix => 
 export const diagonal = ({ size, values }: SquareMatrix): Float64Array<ArrayBuffer> =>
   Float64Array.from({ length: size }, (_, i) => values[i * size + i]!);
 
-/** A B. */
-export const multiply = (a: SquareMatrix, b: SquareMatrix): SquareMatrix => fromMatrix(toMatrix(a).mmul(toMatrix(b)));
+/** A B; written out, because it is wanted for each of many groups. */
+export function multiply(a: SquareMatrix, b: SquareMatrix): SquareMatrix {
+  const { size } = a;
+  const values = new Float64Array(size * size);
+  for (let i = 0; i < size; i++) {
+    for (let m = 0; m < size; m++) {
+      const left = a.values[i * size + m]!;
+      for (let j = 0; j < size; j++) values[i * size + j]! += left * b.values[m * size + j]!;
+    }
+  }
+  return { size, values };
+}
 
 /** A B A'. */
 export function sandwich(a: SquareMatrix, b: SquareMatrix): SquareMatrix {
@@ -25,8 +35,6 @@ export function sandwich(a: SquareMatrix, b: SquareMatrix): SquareMatrix {
 
 /** A A'. */
 export const timesTransposed = (a: SquareMatrix): SquareMatrix => sandwich(a, identity(a.size));
-
-export const transposed = (a: SquareMatrix): SquareMatrix => fromMatrix(toMatrix(a).transpose());
 
 export const scaled = ({ size, values }: SquareMatrix, factor: number): SquareMatrix => ({
   size,
