@@ -1,5 +1,6 @@
 import { describe, expect, it } from "vitest";
 import type { ErrorsChoice, Kernel, LagRule } from "../../../src/core/covariance/choice.ts";
+import { bandwidthOf } from "../../../src/core/covariance/bandwidth.ts";
 import { covarianceOf } from "../../../src/core/covariance/covarianceOf.ts";
 import { lagWeights } from "../../../src/core/covariance/kernels.ts";
 import { lagsForRows, lagsOf } from "../../../src/core/covariance/lags.ts";
@@ -173,6 +174,19 @@ describe("lagsOf", () => {
   });
 });
 
+describe("automatic bandwidths", () => {
+  it("hold in units so large that fourth powers of the scores would not be numbers", () => {
+    const { design } = orderedFit("investment");
+    const large = (values: Float64Array): number[] => [...values].map((value) => value * 2 ** 400);
+    const [, ...drivers] = design.terms.map(({ values }) => large(values));
+    const blown = fitOf(designOf(large(design.outcome.values), drivers, { order: throughTime(19) }));
+    for (const kernel of ["bartlett", "parzen", "quadratic spectral"] as const) {
+      const rule = { kind: "andrews 1991", kernel, prewhiten: false } as const;
+      expectAllDigits([bandwidthOf(blown, rule)], [bandwidthOf(orderedFit("investment"), rule)], 12);
+    }
+  });
+});
+
 describe("prewhitening", () => {
   it("held at 0.97 multiplies what the filter leaves by 1 / 0.03", () => {
     const n = 200;
@@ -232,6 +246,13 @@ describe("kernels", () => {
     expect(lagWeights("parzen", 7.2, 5)).toHaveLength(5);
     expect(lagWeights("quadratic spectral", 2, 40)).toHaveLength(40);
     expect([...lagWeights("quadratic spectral", 0, 40)]).toEqual([1]);
+  });
+
+  it("keep all digits of the series near zero", () => {
+    const z = 0.009;
+    const [, weight] = lagWeights("quadratic spectral", (6 * Math.PI) / 5 / z, 2);
+    // 3 / z^2 (sin z / z - cos z) term by term.
+    expect(Math.abs(weight! - (1 - z ** 2 / 10 + z ** 4 / 280 - z ** 6 / 15120))).toBeLessThan(2e-16);
   });
 
   it("are continuous where the closed form gives way to its series", () => {

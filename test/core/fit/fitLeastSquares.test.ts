@@ -86,7 +86,7 @@ describe("what cannot be fitted", () => {
     const random = randomFrom(6);
     const a = Array.from({ length: 20 }, () => 1e9 * (1 + random.uniform()));
     const b = a.map((value) => value - random.normal());
-    const y = a.map((value, i) => 3 * value - 3 * b[i]!);
+    const y = a.map((value, i) => 3000 * value - 3000 * b[i]!);
     expect(problemOf(y, [a, b])).toEqual({ code: "perfect-fit", column: "y" });
   });
 
