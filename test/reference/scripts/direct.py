@@ -248,6 +248,10 @@ def main():
             years = [i % 20 for i in range(r.n)]
             results[name]["groups"] = in_groups(r, data["group"], years)
         print(name, file=sys.stderr)
+    with open("../nist/filip.json") as file:
+        filip = json.load(file)
+    r = Regression(matrix(filip["design_by_row"]), matrix(filip["y"]))
+    results["filip"] = {"coefficients": numbers(r.b), "classical": roots(r.a * r.rss / (r.n - r.k)), "white": white(r)}
     print(json.dumps({"source": "mpmath at 60 digits from the definitions, scripts/direct.py", "results": results}, indent=1))
 
 
