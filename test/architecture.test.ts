@@ -17,27 +17,9 @@ const mayImport: Readonly<Record<string, readonly string[]>> = {
   "core/diagnostics": upTo(6),
   "core/inference": upTo(6),
   "core/decision": [...upTo(6), "core/diagnostics", "core/inference"],
-  "core/robustness": [
-    ...upTo(6),
-    "core/diagnostics",
-    "core/inference",
-    "core/decision",
-  ],
-  "core/answer": [
-    ...upTo(6),
-    "core/diagnostics",
-    "core/inference",
-    "core/decision",
-    "core/robustness",
-  ],
-  "core/review": [
-    ...upTo(6),
-    "core/diagnostics",
-    "core/inference",
-    "core/decision",
-    "core/robustness",
-    "core/answer",
-  ],
+  "core/robustness": [...upTo(6), "core/diagnostics", "core/inference", "core/decision"],
+  "core/answer": [...upTo(6), "core/diagnostics", "core/inference", "core/decision", "core/robustness"],
+  "core/review": [...upTo(6), "core/diagnostics", "core/inference", "core/decision", "core/robustness", "core/answer"],
   sheet: ["core"],
   app: ["core", "sheet"],
   office: ["core", "sheet", "app"],
@@ -46,17 +28,7 @@ const mayImport: Readonly<Record<string, readonly string[]>> = {
   worker: ["core", "sheet", "app"],
   desk: ["core/table/address.ts"],
   terminal: ["core", "sheet", "app", "office", "functions", "worker", "desk"],
-  entries: [
-    "core",
-    "sheet",
-    "app",
-    "office",
-    "functions",
-    "taskpane",
-    "worker",
-    "desk",
-    "terminal",
-  ],
+  entries: ["core", "sheet", "app", "office", "functions", "taskpane", "worker", "desk", "terminal"],
 };
 
 function upTo(count: number): string[] {
@@ -75,30 +47,17 @@ const roomOf = (file: string): string =>
     .join("/");
 
 const specifiers = (file: string): string[] =>
-  [...textOf(file).matchAll(/(?:from|import)\s*\(?\s*"([^"]+)"/g)].map(
-    (match) => match[1] ?? "",
-  );
+  [...textOf(file).matchAll(/(?:from|import)\s*\(?\s*"([^"]+)"/g)].map((match) => match[1] ?? "");
 
 const targets = (file: string): string[] =>
   specifiers(file)
-    .filter(
-      (specifier) => specifier.startsWith(".") && !specifier.endsWith(".json"),
-    )
-    .map((specifier) =>
-      relative(src, normalize(join(src, dirname(file), specifier))).replaceAll(
-        "\\",
-        "/",
-      ),
-    );
+    .filter((specifier) => specifier.startsWith(".") && !specifier.endsWith(".json"))
+    .map((specifier) => relative(src, normalize(join(src, dirname(file), specifier))).replaceAll("\\", "/"));
 
 describe("architecture", () => {
   it("finds the rooms it speaks of", () => {
     expect(new Set(files.map(roomOf))).toEqual(
-      new Set(
-        Object.keys(mayImport).filter((room) =>
-          files.some((file) => roomOf(file) === room),
-        ),
-      ),
+      new Set(Object.keys(mayImport).filter((room) => files.some((file) => roomOf(file) === room))),
     );
     expect(files.length).toBeGreaterThan(100);
   });
@@ -108,10 +67,7 @@ describe("architecture", () => {
       targets(file)
         .filter((target) => roomOf(target) !== roomOf(file))
         .filter(
-          (target) =>
-            !(mayImport[roomOf(file)] ?? []).some(
-              (room) => target === room || target.startsWith(`${room}/`),
-            ),
+          (target) => !(mayImport[roomOf(file)] ?? []).some((room) => target === room || target.startsWith(`${room}/`)),
         )
         .map((target) => `${file} imports ${target}`),
     );
@@ -120,64 +76,36 @@ describe("architecture", () => {
 
   const only = (library: RegExp, rooms: readonly string[]): string[] =>
     files
-      .filter((file) =>
-        specifiers(file).some((specifier) => library.test(specifier)),
-      )
+      .filter((file) => specifiers(file).some((specifier) => library.test(specifier)))
       .filter((file) => !rooms.includes(roomOf(file)));
 
   it("keeps each library in its room", () => {
     expect(only(/^(ml-matrix|jstat)$/, ["core/numeric"])).toEqual([]);
-    expect(
-      only(/^(react|react-dom|@fluentui)/, ["taskpane", "entries", "desk"]),
-    ).toEqual([]);
+    expect(only(/^(react|react-dom|@fluentui)/, ["taskpane", "entries", "desk"])).toEqual([]);
     expect(only(/^(@univerjs|hucre)/, ["desk"])).toEqual([]);
     expect(only(/^node:/, ["desk", "terminal", "entries"])).toEqual([]);
   });
 
   it("names Excel's object model in the office room alone", () => {
-    const named = files.filter((file) =>
-      /\bExcel\.(run|Range|RequestContext|Worksheet)\b/.test(textOf(file)),
-    );
-    expect(
-      named.filter((file) => !["office", "desk"].includes(roomOf(file))),
-    ).toEqual([]);
+    const named = files.filter((file) => /\bExcel\.(run|Range|RequestContext|Worksheet)\b/.test(textOf(file)));
+    expect(named.filter((file) => !["office", "desk"].includes(roomOf(file)))).toEqual([]);
   });
 
   it("keeps core free of clock, console, chance and browser", () => {
-    const impure =
-      /\b(console|document|window|performance)\.|Date\.now|new Date\(\)|Math\.random|\bfetch\(|setTimeout/;
-    expect(
-      files.filter(
-        (file) => file.startsWith("core/") && impure.test(textOf(file)),
-      ),
-    ).toEqual([]);
+    const impure = /\b(console|document|window|performance)\.|Date\.now|new Date\(\)|Math\.random|\bfetch\(|setTimeout/;
+    expect(files.filter((file) => file.startsWith("core/") && impure.test(textOf(file)))).toEqual([]);
   });
 
   it("catches only at the borders", () => {
-    const borders = [
-      "office",
-      "functions",
-      "worker",
-      "desk",
-      "terminal",
-      "entries",
-      "app",
-      "taskpane",
-    ];
+    const borders = ["office", "functions", "worker", "desk", "terminal", "entries", "app", "taskpane"];
     // Whether a page may run WebAssembly shows itself only when it is tried.
     const elsewhere = ["core/numeric/vector/webAssembly.ts"];
     expect(
-      files
-        .filter((file) => /\bcatch\b\s*[({]/.test(textOf(file)))
-        .filter((file) => !borders.includes(roomOf(file))),
+      files.filter((file) => /\bcatch\b\s*[({]/.test(textOf(file))).filter((file) => !borders.includes(roomOf(file))),
     ).toEqual(elsewhere);
   });
 
   it("has no file without an idea of its own: no barrels, no leftover names", () => {
-    expect(
-      files.filter((file) =>
-        /(^|\/)(index|utils?|helpers?|common)\.tsx?$/.test(file),
-      ),
-    ).toEqual([]);
+    expect(files.filter((file) => /(^|\/)(index|utils?|helpers?|common)\.tsx?$/.test(file))).toEqual([]);
   });
 });

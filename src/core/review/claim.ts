@@ -29,8 +29,7 @@ export interface ClaimedLine {
 /** What a reported number says it is; `term` counts the drivers from 0 in the order they are claimed, null is the constant. */
 export type Quantity =
   | {
-      readonly kind:
-        "coefficient" | "standard-error" | "ratio" | "p-value" | "low" | "high";
+      readonly kind: "coefficient" | "standard-error" | "ratio" | "p-value" | "low" | "high";
       readonly term: number | null;
     }
   | {

@@ -1,9 +1,5 @@
 /** How much a finding matters, gravest first. */
-export const ranks = [
-  "changes the conclusion",
-  "changes a number",
-  "worth knowing",
-] as const;
+export const ranks = ["changes the conclusion", "changes a number", "worth knowing"] as const;
 export type Rank = (typeof ranks)[number];
 
 /** One thing a reviewer should know, in words for people and with cells to jump to. */
