@@ -3,7 +3,8 @@ import type { Comparison } from "./claimReview.ts";
 
 /** How a cell shows its number, so that another number can be shown in the same way. */
 export interface ShownDigits {
-  readonly percent: boolean;
+  /** The sign behind the number as the cell has it: "", "%" or " %". */
+  readonly percent: string;
   readonly scientific: boolean;
   /** Thousands apart by commas. */
   readonly grouped: boolean;
@@ -14,25 +15,29 @@ export interface ShownDigits {
 const mostDecimals = 15;
 
 export function digitsShown({ shown, halfUnit }: Pick<ReportedNumber, "shown" | "halfUnit">): ShownDigits {
-  const percent = shown.includes("%");
+  const percent = / ?%/.exec(shown)?.[0] ?? "";
   const scientific = /\dE[+-]?\d/i.test(shown);
   const grouped = /\d,\d{3}(?!\d)/.test(shown);
   const decimals = scientific
     ? (/\.(\d+)E/i.exec(shown)?.[1]?.length ?? 0)
-    : Math.round(-Math.log10(2 * halfUnit * (percent ? 100 : 1)));
+    : Math.round(-Math.log10(2 * halfUnit * (percent === "" ? 1 : 100)));
   return { percent, scientific, grouped, decimals: Math.max(0, Math.min(mostDecimals, decimals)) };
 }
 
-/** A number in the way in which a reported one is shown: 0.0416 beside "4.20 %" is "4.16 %". */
+/** A number in the way in which a reported one is shown: 0.0416 beside "4.20%" is "4.16%". */
 export function showWith({ percent, scientific, grouped, decimals }: ShownDigits, value: number): string {
-  if (scientific) return value.toExponential(decimals).replace(/e([+-])(\d)$/, "e$10$2").replace("e", "E");
-  const scaled = percent ? 100 * value : value;
+  if (scientific)
+    return value
+      .toExponential(decimals)
+      .replace(/e([+-])(\d)$/, "e$10$2")
+      .replace("e", "E");
+  const scaled = percent === "" ? value : 100 * value;
   const text = scaled.toLocaleString("en-US", {
     minimumFractionDigits: decimals,
     maximumFractionDigits: decimals,
     useGrouping: grouped,
   });
-  return (/^-0(\.0*)?$/.test(text) ? text.slice(1) : text) + (percent ? " %" : "");
+  return (/^-0(\.0*)?$/.test(text) ? text.slice(1) : text) + percent;
 }
 
 /** The digits that a recomputed number needs: those of the reported one, and more where the two would look alike. */
