@@ -27,9 +27,19 @@ export interface SheetData {
   readonly printArea: string | null;
   readonly onePageWide: boolean;
   readonly landscape?: boolean;
+  /** In points; absent leaves the usual ones. */
+  readonly margins?: PageMargins;
   readonly links: readonly { readonly cell: string; readonly target: string }[];
   /** Marks that add-ins set on a sheet. */
   readonly customProperties?: Readonly<Record<string, string>>;
+}
+
+/** Blank paper around the print, in points. */
+export interface PageMargins {
+  readonly left: number;
+  readonly right: number;
+  readonly top: number;
+  readonly bottom: number;
 }
 
 export type BookValue = number | string | boolean | null | { readonly error: string };
@@ -58,6 +68,8 @@ export interface CellStyle {
   readonly wrap?: boolean;
   readonly horizontal?: "left" | "right" | "center";
   readonly vertical?: "top" | "middle" | "bottom";
+  /** In steps of about three characters. */
+  readonly indent?: number;
   readonly lineAbove?: string;
   readonly lineBelow?: string;
 }
@@ -72,6 +84,8 @@ export interface BookChart {
   /** Ends of the axes; null or absent leaves the end to the program that draws. */
   readonly xRange?: AxisRange;
   readonly yRange?: AxisRange;
+  /** Whether the numbers of the upright axis are left out. */
+  readonly yHidden?: boolean;
   readonly legend?: boolean;
   /** Ranges as formulas write them: "'Repairs answer'!$H$4:$H$99". */
   readonly series: readonly {
@@ -84,6 +98,8 @@ export interface BookChart {
     readonly color?: string;
     /** In points. */
     readonly lineWeight?: number;
+    /** What stands to the right of each point: its value, or the name of the series. */
+    readonly label?: "value" | "name";
   }[];
 }
 

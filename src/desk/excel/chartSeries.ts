@@ -51,6 +51,7 @@ export const chartSeries: Family<OnSeries> = {
     ChartType: ({ chart, series }) => typeName(chart.kind, [series]),
     MarkerStyle: ({ series }) => (series.markers ? "Circle" : "None"),
     MarkerSize: ({ series }) => series.markerSize,
+    HasDataLabels: ({ series }) => series.label !== "none",
     MarkerBackgroundColor: ({ series }) => series.color,
     MarkerForegroundColor: ({ series }) => series.color,
     Smooth: () => false,
@@ -63,6 +64,8 @@ export const chartSeries: Family<OnSeries> = {
     },
     MarkerStyle: (state, host, value) => changeSeries(host, state, { markers: asText(value) !== "None" }),
     MarkerSize: (state, host, value) => changeSeries(host, state, { markerSize: asNumber(value) }),
+    // Labels show the value until they are told to show the name.
+    HasDataLabels: (state, host, value) => changeSeries(host, state, { label: asFlag(value) ? "value" : "none" }),
     MarkerBackgroundColor: (state, host, value) => changeSeries(host, state, { color: colorOf(value) }),
     MarkerForegroundColor: (state, host, value) => changeSeries(host, state, { color: colorOf(value) }),
     // Lines are drawn straight; a wish for curves is refused rather than passed over.
@@ -70,9 +73,11 @@ export const chartSeries: Family<OnSeries> = {
       if (asFlag(value)) throw fault("ApiNotFound", "Smooth lines.");
     },
   },
-  part: { Format: (state) => hold("ChartSeriesFormat", state) },
+  part: {
+    Format: (state) => hold("ChartSeriesFormat", state),
+    DataLabels: (state) => hold("ChartDataLabels", state),
+  },
   lacks: [
-    "HasDataLabels",
     "Filtered",
     "ShowShadow",
     "PlotOrder",
@@ -113,6 +118,45 @@ export const chartSeries: Family<OnSeries> = {
     SetXAxisValues: (state, host, args) => changeSeries(host, state, { x: sourceOf(host, args) }),
   },
 };
+
+/** Labels stand to the right of their points, and show one thing at a time. */
+export const chartDataLabels: Family<OnSeries> = {
+  read: {
+    Position: () => "Right",
+    ShowSeriesName: ({ series }) => series.label === "name",
+    ShowValue: ({ series }) => series.label === "value",
+  },
+  write: {
+    Position: (_state, _host, value) => {
+      if (asText(value) !== "Right") throw fault("ApiNotFound", `Labels ${asText(value)} of their points.`);
+    },
+    ShowSeriesName: (state, host, value) => relabel(host, state, { label: "name", on: asFlag(value) }),
+    ShowValue: (state, host, value) => relabel(host, state, { label: "value", on: asFlag(value) }),
+  },
+  lacks: [
+    "ShowBubbleSize",
+    "ShowCategoryName",
+    "ShowLegendKey",
+    "ShowPercentage",
+    "Separator",
+    "NumberFormat",
+    "LinkNumberFormat",
+    "HorizontalAlignment",
+    "VerticalAlignment",
+    "TextOrientation",
+    "AutoText",
+  ],
+};
+
+interface Relabelling {
+  readonly label: "value" | "name";
+  readonly on: boolean;
+}
+
+function relabel(host: Host, state: OnSeries, { label, on }: Relabelling): void {
+  if (on) changeSeries(host, state, { label });
+  else if (state.series.label === label) changeSeries(host, state, { label: "none" });
+}
 
 export const chartSeriesFormat: Family<OnSeries> = {
   part: {

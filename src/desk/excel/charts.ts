@@ -108,7 +108,17 @@ function* seriesFrom(host: Host, area: Area, type: ChartType): Generator<SeriesR
 
 export function newSeries(type: ChartType): SeriesRecord {
   const { line, markers } = chartTypes[type];
-  return { name: "", x: "", y: "", line, markers, color: "", lineWeight: standardLine, markerSize: standardMarker };
+  return {
+    name: "",
+    x: "",
+    y: "",
+    line,
+    markers,
+    color: "",
+    lineWeight: standardLine,
+    markerSize: standardMarker,
+    label: "none",
+  };
 }
 
 /** Changes a chart and has it drawn; on a protected sheet Excel changes none. */

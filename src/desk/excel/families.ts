@@ -1,6 +1,13 @@
 import { chartAxes, chartAxis, chartAxisTitle, chartGridlines, chartLegend, chartTitle } from "./chartParts.ts";
 import { chart, charts } from "./charts.ts";
-import { chartFill, chartLine, chartSeries, chartSeriesCollection, chartSeriesFormat } from "./chartSeries.ts";
+import {
+  chartDataLabels,
+  chartFill,
+  chartLine,
+  chartSeries,
+  chartSeriesCollection,
+  chartSeriesFormat,
+} from "./chartSeries.ts";
 import { customFunctions } from "./customFunctions.ts";
 import type { Family, States } from "./model.ts";
 import { namedItem, names } from "./names.ts";
@@ -62,6 +69,7 @@ export const families: { readonly [T in keyof States]: Family<States[T]> } = {
   ChartSeriesCollection: chartSeriesCollection,
   ChartSeries: chartSeries,
   ChartSeriesFormat: chartSeriesFormat,
+  ChartDataLabels: chartDataLabels,
   ChartLineFormat: chartLine,
   ChartFill: chartFill,
   CustomFunctions: customFunctions,

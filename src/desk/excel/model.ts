@@ -49,6 +49,7 @@ export interface States {
   ChartSeriesCollection: OnChart;
   ChartSeries: OnSeries;
   ChartSeriesFormat: OnSeries;
+  ChartDataLabels: OnSeries;
   ChartLineFormat: OnSeries;
   ChartFill: OnSeries;
   CustomFunctions: null;

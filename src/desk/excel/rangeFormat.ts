@@ -12,7 +12,7 @@ import { worksheetOf } from "../workbook/book.ts";
 import { cellAt, cellsOf } from "../workbook/cells.ts";
 import { pointsPerPixel, standardHeight, standardWidth } from "../workbook/sizes.ts";
 import { applyStyle, styleAt } from "../workbook/styles.ts";
-import { flag } from "../workbook/styleTables.ts";
+import { flag, indentPixels } from "../workbook/styleTables.ts";
 import { asFlag, asNumber, asText, oneOf } from "./arguments.ts";
 import { autofitColumns, autofitRows, setColumnWidth, setRowHeight } from "./autofit.ts";
 import { fault } from "./fault.ts";
@@ -91,9 +91,6 @@ export const rangeFormat: Family<Areas> = {
   },
   lacks: ["TextOrientation", "UseStandardHeight", "UseStandardWidth", "ReadingOrder", "ShrinkToFit", "AutoIndent"],
 };
-
-/** One step of indentation is about three characters wide, as in Excel. */
-const indentPixels = 9;
 
 const columnWidthOf = (host: Host, areas: Areas): number | null =>
   common(areas.map(({ sheet, column }) => worksheetOf(host.book, sheet).getColumnWidth(column) * pointsPerPixel));

@@ -1,7 +1,8 @@
+import type { PageMargins } from "../book/bookData.ts";
 import { localAddress } from "../workbook/areas.ts";
 import { recordOf, worksheetOf } from "../workbook/book.ts";
 import { freeze } from "../workbook/sheets.ts";
-import { asText, integerAt, oneOf, stateAt, textAt } from "./arguments.ts";
+import { asNumber, asText, integerAt, oneOf, stateAt, textAt } from "./arguments.ts";
 import { areaAt } from "./addresses.ts";
 import { fault } from "./fault.ts";
 import { ensureInFront } from "./guards.ts";
@@ -45,14 +46,37 @@ function missing(): never {
 const rangeAt = (host: Host, { sheet }: OnSheet, args: Arguments): Area =>
   typeof args[0] === "string" ? areaAt(host, args[0], sheet) : stateAt(args, 0, "Range");
 
+/** Of a page that says nothing, in points. */
+const usualMargins: PageMargins = { left: 50.4, right: 50.4, top: 54, bottom: 54 };
+
+const readMargin =
+  (side: keyof PageMargins) =>
+  ({ sheet }: OnSheet, { book }: Host): number =>
+    (recordOf(book, sheet).margins ?? usualMargins)[side];
+
+const writeMargin =
+  (side: keyof PageMargins) =>
+  ({ sheet }: OnSheet, { book }: Host, value: unknown): void => {
+    const record = recordOf(book, sheet);
+    record.margins = { ...(record.margins ?? usualMargins), [side]: asNumber(value) };
+  };
+
 const orientations = { Portrait: false, Landscape: true } as const;
 
 export const pageLayout: Family<OnSheet> = {
   read: {
     Orientation: ({ sheet }, { book }) => (recordOf(book, sheet).landscape ? "Landscape" : "Portrait"),
     Zoom: ({ sheet }, { book }) => (recordOf(book, sheet).onePageWide ? { horizontalFitToPages: 1 } : { scale: 100 }),
+    LeftMargin: readMargin("left"),
+    RightMargin: readMargin("right"),
+    TopMargin: readMargin("top"),
+    BottomMargin: readMargin("bottom"),
   },
   write: {
+    LeftMargin: writeMargin("left"),
+    RightMargin: writeMargin("right"),
+    TopMargin: writeMargin("top"),
+    BottomMargin: writeMargin("bottom"),
     Orientation: ({ sheet }, { book }, value) => {
       recordOf(book, sheet).landscape = orientations[oneOf(value, orientations)];
     },
@@ -78,10 +102,6 @@ export const pageLayout: Family<OnSheet> = {
     "CenterVertically",
     "PrintHeadings",
     "PrintGridlines",
-    "LeftMargin",
-    "RightMargin",
-    "TopMargin",
-    "BottomMargin",
     "HeaderMargin",
     "FooterMargin",
     "PrintComments",

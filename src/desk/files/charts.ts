@@ -23,7 +23,12 @@ export function toFileChart(chart: BookChart): SheetChart {
     legend: (chart.legend ?? chart.series.length > 1) ? "bottom" : false,
     axes: {
       x: { ...axis, title: chart.xTitle, scale: scaleOf(chart.xRange) },
-      y: { ...axis, title: chart.yTitle, scale: scaleOf(chart.yRange), gridlines: { major: true } },
+      y: {
+        ...axis,
+        title: chart.yTitle,
+        scale: scaleOf(chart.yRange),
+        ...(chart.yHidden === true ? { hidden: true } : { gridlines: { major: true } }),
+      },
     },
   };
 }
@@ -41,7 +46,8 @@ const fileKind = {
   columns: "column",
 } as const satisfies Record<BookChart["kind"], SheetChart["type"]>;
 
-function toFileSeries({ name, x, y, line, markers, color, lineWeight }: BookChart["series"][number]): FileSeries {
+function toFileSeries(series: BookChart["series"][number]): FileSeries {
+  const { name, x, y, line, markers, color, lineWeight, label } = series;
   const fill = color?.replace("#", "").toUpperCase();
   return {
     name,
@@ -49,9 +55,15 @@ function toFileSeries({ name, x, y, line, markers, color, lineWeight }: BookChar
     values: y,
     ...known({ color: fill }),
     marker: markers ? { symbol: "circle", size: markerSize, ...known({ fill, line: fill }) } : { symbol: "none" },
+    ...(label !== undefined && { dataLabels: labelled[label] }),
     ...(line && { stroke: { width: lineWeight ?? usualLineWidth } }),
   };
 }
+
+const labelled = {
+  value: { showValue: true, position: "r" },
+  name: { showSeriesName: true, position: "r" },
+} as const;
 
 /** A chart of the file as the desk draws it; null for kinds that the desk does not draw. */
 export function toBookChart(chart: FileChart, index: number): BookChart | null {
@@ -69,12 +81,12 @@ export function toBookChart(chart: FileChart, index: number): BookChart | null {
   };
 }
 
-type Axes = Pick<BookChart, "xTitle" | "yTitle" | "xRange" | "yRange">;
+type Axes = Pick<BookChart, "xTitle" | "yTitle" | "xRange" | "yRange" | "yHidden">;
 
 const axesOf = ({ x, y }: NonNullable<FileChart["axes"]> = {}): Axes => ({
   xTitle: x?.title ?? "",
   yTitle: y?.title ?? "",
-  ...known({ xRange: rangeOf(x?.scale), yRange: rangeOf(y?.scale) }),
+  ...known({ xRange: rangeOf(x?.scale), yRange: rangeOf(y?.scale), yHidden: y?.hidden === true || undefined }),
 });
 
 const rangeOf = (scale: { readonly min?: number; readonly max?: number } | undefined): AxisRange | undefined =>
@@ -121,8 +133,14 @@ function toBookSeries(series: FileSeriesInfo, index: number): BookChart["series"
       ...(line &&
         series.stroke?.width !== undefined &&
         series.stroke.width !== usualLineWidth && { lineWeight: series.stroke.width }),
+      ...known({ label: labelOf(series) }),
     },
   ];
+}
+
+function labelOf({ dataLabels }: FileSeriesInfo): "value" | "name" | undefined {
+  if (dataLabels?.showSeriesName === true) return "name";
+  return dataLabels?.showValue === true ? "value" : undefined;
 }
 
 export const chartParts = /^xl\/charts\/[^/]+\.xml$/;

@@ -2,6 +2,7 @@ import { cellRef, dateToSerial, rangeRef, readXlsx, type Cell, type CellValue, t
 import type { BookCell, BookData, BookValue, SheetData, StyledCell } from "../book/bookData.ts";
 import { chartParts, toBookChart, withoutEmptyLines } from "./charts.ts";
 import { readKept, type Kept } from "./keptParts.ts";
+import { inPoints } from "./margins.ts";
 import { changeParts, pack, partsMatching, unpack } from "./parts.ts";
 import { readable, unreadable, whyNoXlsx, type Reading } from "./reading.ts";
 import { toShown } from "./storedFormulas.ts";
@@ -73,10 +74,13 @@ function toSheet(sheet: Sheet, usual: UsualLooks): SheetData {
   };
 }
 
-const printingOf = (setup: Sheet["pageSetup"]): Pick<SheetData, "printArea" | "onePageWide" | "landscape"> => ({
+type Printing = Pick<SheetData, "printArea" | "onePageWide" | "landscape" | "margins">;
+
+const printingOf = (setup: Sheet["pageSetup"]): Printing => ({
   printArea: setup?.printArea?.replaceAll("$", "") ?? null,
   onePageWide: setup?.fitToPage === true && setup.fitToWidth !== 0,
   landscape: setup?.orientation === "landscape",
+  ...(setup?.margins !== undefined && { margins: inPoints(setup.margins) }),
 });
 
 /** In points; programs write it for every row, whether anyone asked for it or not. */

@@ -11,6 +11,7 @@ import type { BookCell, BookData, BookValue, SheetData, StyledCell } from "../bo
 import { chartParts, toFileChart, finishedChart } from "./charts.ts";
 import { standardFont, withWholeFonts } from "./fonts.ts";
 import { keptOf, withKept } from "./keptParts.ts";
+import { inInches } from "./margins.ts";
 import { changeParts, pack, unpack, type Parts } from "./parts.ts";
 import { toStored } from "./storedFormulas.ts";
 import { toFileStyle } from "./styles.ts";
@@ -82,6 +83,7 @@ function toFileSheet(sheet: SheetData): WriteSheet {
       ...(printArea !== null && { printArea: absolute(printArea) }),
       ...(sheet.landscape === true && { orientation: "landscape" }),
       ...(sheet.onePageWide && { fitToPage: true, fitToWidth: 1, fitToHeight: 0 }),
+      ...(sheet.margins !== undefined && { margins: inInches(sheet.margins) }),
     },
   };
 }

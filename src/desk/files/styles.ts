@@ -16,6 +16,7 @@ export function toFileStyle(style: CellStyle): FileStyle {
         wrapText: style.wrap,
         horizontal: style.horizontal,
         vertical: style.vertical && fileVertical[style.vertical],
+        indent: style.indent,
       }),
     ),
     numFmt: style.numberFormat,
@@ -78,11 +79,12 @@ function linesOf(border: FileStyle["border"], theme: readonly string[]): CellSty
   return known({ lineAbove: lineColor(border?.top), lineBelow: lineColor(border?.bottom) });
 }
 
-function placingOf({ wrapText, horizontal, vertical }: Part<"alignment"> = {}): CellStyle {
+function placingOf({ wrapText, horizontal, vertical, indent }: Part<"alignment"> = {}): CellStyle {
   return known({
     wrap: wrapText === true ? true : undefined,
     horizontal: horizontal === "left" || horizontal === "right" || horizontal === "center" ? horizontal : undefined,
     vertical: vertical === "top" ? vertical : vertical === "center" ? "middle" : undefined,
+    indent: indent === 0 ? undefined : indent,
   });
 }
 

@@ -50,7 +50,7 @@ export function toChartRecord(chart: BookChart, { sheet, index }: { sheet: Sheet
     height: lengthOf(place.row + place.rows, rowHeight) - top,
     legend: chart.legend ?? chart.series.length > 1,
     x: axisRecord(chart.xTitle, chart.xRange),
-    y: axisRecord(chart.yTitle, chart.yRange),
+    y: { ...axisRecord(chart.yTitle, chart.yRange), visible: chart.yHidden !== true },
     series: chart.series.map(toSeriesRecord),
   };
 }
@@ -75,6 +75,7 @@ function toSeriesRecord(series: BookChart["series"][number]): SeriesRecord {
     color: series.color ?? "",
     lineWeight: series.lineWeight ?? standardLine,
     markerSize: standardMarker,
+    label: series.label ?? "none",
   };
 }
 
@@ -92,6 +93,7 @@ export function toBookChart(chart: ChartRecord, { columnWidth, rowHeight }: Rule
     yTitle: chart.y.title.visible ? chart.y.title.text : "",
     ...(hasEnds(chart.x) ? { xRange: endsOf(chart.x) } : {}),
     ...(hasEnds(chart.y) ? { yRange: endsOf(chart.y) } : {}),
+    ...(chart.y.visible ? {} : { yHidden: true }),
     legend: chart.legend,
     series: chart.series.map(toBookSeries),
   };
@@ -109,5 +111,6 @@ function toBookSeries(series: SeriesRecord): BookChart["series"][number] {
     markers: series.markers,
     ...(series.color === "" ? {} : { color: series.color }),
     ...(series.lineWeight === standardLine ? {} : { lineWeight: series.lineWeight }),
+    ...(series.label === "none" ? {} : { label: series.label }),
   };
 }

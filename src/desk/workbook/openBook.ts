@@ -65,6 +65,7 @@ function toRecord(sheet: SheetData): SheetRecord {
     printArea: sheet.printArea,
     onePageWide: sheet.onePageWide,
     landscape: sheet.landscape ?? false,
+    margins: sheet.margins ?? null,
   };
 }
 

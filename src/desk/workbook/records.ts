@@ -1,3 +1,5 @@
+import type { PageMargins } from "../book/bookData.ts";
+
 /** What a workbook holds beside its cells. The grid knows nothing of these: they are ours to keep. */
 export interface SheetRecord {
   readonly tables: TableRecord[];
@@ -10,6 +12,7 @@ export interface SheetRecord {
   printArea: string | null;
   onePageWide: boolean;
   landscape: boolean;
+  margins: PageMargins | null;
 }
 
 export interface TableRecord {
@@ -60,6 +63,8 @@ export interface ChartAxisRecord {
   visible: boolean;
 }
 
+export type SeriesLabel = "none" | "value" | "name";
+
 export interface SeriesRecord {
   name: string;
   /** Ranges as formulas write them, "'My data'!$A$2:$A$9"; empty where none is given. */
@@ -72,6 +77,8 @@ export interface SeriesRecord {
   /** In points. */
   lineWeight: number;
   markerSize: number;
+  /** What stands beside each point. */
+  label: SeriesLabel;
 }
 
 export interface CustomXmlRecord {
@@ -89,5 +96,6 @@ export function emptySheetRecord(): SheetRecord {
     printArea: null,
     onePageWide: false,
     landscape: false,
+    margins: null,
   };
 }

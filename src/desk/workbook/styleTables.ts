@@ -16,6 +16,9 @@ const horizontal = {
 } as const;
 const vertical = { top: VerticalAlign.TOP, middle: VerticalAlign.MIDDLE, bottom: VerticalAlign.BOTTOM } as const;
 
+/** One step of indentation is about three characters wide, as in Excel. */
+export const indentPixels = 9;
+
 export const flag = (on: boolean): BooleanNumber => (on ? BooleanNumber.TRUE : BooleanNumber.FALSE);
 
 const line = (color: string) => ({ s: BorderStyleTypes.THIN, cl: { rgb: color } });
@@ -32,6 +35,7 @@ const toGrid: { readonly [K in keyof Style]: (value: Style[K]) => IStyleData } =
   wrap: (on) => ({ tb: on ? WrapStrategy.WRAP : WrapStrategy.OVERFLOW }),
   horizontal: (side) => ({ ht: horizontal[side] }),
   vertical: (side) => ({ vt: vertical[side] }),
+  indent: (steps) => ({ pd: { l: steps * indentPixels } }),
   lineAbove: (color) => ({ bd: { t: line(color) } }),
   lineBelow: (color) => ({ bd: { b: line(color) } }),
 };
@@ -46,6 +50,7 @@ const fromGrid: { readonly [K in keyof Style]: (style: IStyleData) => Nullable<S
   wrap: ({ tb }) => tb === WrapStrategy.WRAP || null,
   horizontal: ({ ht }) => named(horizontal, ht),
   vertical: ({ vt }) => named(vertical, vt),
+  indent: ({ pd }) => Math.round((pd?.l ?? 0) / indentPixels) || null,
   lineAbove: ({ bd }) => bd?.t?.cl.rgb,
   lineBelow: ({ bd }) => bd?.b?.cl.rgb,
 };

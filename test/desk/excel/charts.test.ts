@@ -40,6 +40,11 @@ it("builds a scatter chart from series of its own, placed by cells", async () =>
     chart.axes.valueAxis.title.text = "Residual";
     chart.axes.valueAxis.minimum = -5;
     chart.axes.valueAxis.maximum = 5;
+    chart.axes.valueAxis.visible = false;
+    line.hasDataLabels = true;
+    line.dataLabels.showSeriesName = true;
+    line.dataLabels.showValue = false;
+    line.dataLabels.position = "Right";
     chart.legend.visible = false;
     chart.name = "Residuals";
     chart.setPosition("E2", "J16");
@@ -54,6 +59,7 @@ it("builds a scatter chart from series of its own, placed by cells", async () =>
       xTitle: "Fitted",
       yTitle: "Residual",
       yRange: { minimum: -5, maximum: 5 },
+      yHidden: true,
       legend: false,
       series: [
         {
@@ -72,6 +78,7 @@ it("builds a scatter chart from series of its own, placed by cells", async () =>
           markers: false,
           color: "#ff0000",
           lineWeight: 1,
+          label: "name",
         },
       ],
     },

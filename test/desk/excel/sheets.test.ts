@@ -160,6 +160,7 @@ describe("sheets", () => {
       sheet.pageLayout.setPrintArea("A1:D20");
       sheet.pageLayout.zoom = { horizontalFitToPages: 1 };
       sheet.pageLayout.orientation = "Landscape";
+      sheet.pageLayout.leftMargin = 30;
       sheet.customProperties.add("model", "42");
       sheet.showGridlines = false;
     })();
@@ -168,6 +169,7 @@ describe("sheets", () => {
       printArea: "A1:D20",
       onePageWide: true,
       landscape: true,
+      margins: { left: 30, right: 50.4, top: 54, bottom: 54 },
       customProperties: { model: "42" },
     });
     const read = await desk.Excel.run(async (context) => {

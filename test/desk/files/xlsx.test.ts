@@ -48,6 +48,7 @@ describe("a workbook saved and opened again", () => {
       vertical: "middle",
       lineAbove: "#7a1f1f",
       lineBelow: "#123456",
+      indent: 1,
     } as const;
     const rows = [
       [
@@ -77,6 +78,7 @@ describe("a workbook saved and opened again", () => {
       printArea: "A1:F40",
       onePageWide: true,
       landscape: true,
+      margins: { left: 36, right: 36, top: 45, bottom: 54 },
       links: [
         { cell: "B1", target: "https://example.com/stock" },
         { cell: "A3", target: "'Rye Street'!B4" },
@@ -194,6 +196,7 @@ describe("charts", () => {
     yTitle: "Residual",
     xRange: { minimum: 0.5, maximum: null },
     yRange: { minimum: -4, maximum: 4.5 },
+    yHidden: true,
     legend: true,
     series: [
       { name: "Rows", x: "Data!$A$1:$A$3", y: "Data!$B$1:$B$3", line: false, markers: true },
@@ -206,6 +209,7 @@ describe("charts", () => {
         markers: false,
         color: "#0f4c5c",
         lineWeight: 1,
+        label: "name",
       },
       { name: "Both", x: "Data!$A$1:$A$3", y: "Data!$C$1:$C$3", line: true, markers: true },
     ],

@@ -11,7 +11,7 @@ const book: BookData = {
         [{ value: "Title", style: { bold: true, size: 14, color: "#1f2937", fill: "#f3f4f6" } }],
         ["y", "x", null, true, { error: "#N/A" }, ""],
         [
-          { value: 45293, style: { numberFormat: "yyyy-mm-dd", horizontal: "right", vertical: "top" } },
+          { value: 45293, style: { numberFormat: "yyyy-mm-dd", horizontal: "right", vertical: "top", indent: 2 } },
           { value: 2.5, style: { italic: true, wrap: true, lineAbove: "#111111", lineBelow: "#222222" } },
         ],
         [{ value: 3, formula: "=SEQUENCE(2)", spill: "A4:A5" }],
@@ -28,6 +28,7 @@ const book: BookData = {
         printArea: "A1:D20",
         onePageWide: true,
         landscape: true,
+        margins: { left: 30, right: 36, top: 40, bottom: 54 },
         links: [{ cell: "B2", target: "Other!A1" }],
         customProperties: { model: "7" },
         charts: [
@@ -39,6 +40,7 @@ const book: BookData = {
             xTitle: "x",
             yTitle: "",
             xRange: { minimum: 0, maximum: null },
+            yHidden: true,
             legend: false,
             series: [
               {
@@ -47,6 +49,7 @@ const book: BookData = {
                 y: "'Repairs answer'!$B$2:$B$3",
                 line: true,
                 markers: false,
+                label: "name",
               },
             ],
           },

@@ -105,6 +105,12 @@ function Drawn({ series, plot, columns }: DrawnProps): ReactNode {
         points.map(({ x, y }, index) => (
           <circle key={index} cx={plot.x(x)} cy={plot.y(y)} r={markerRadius} fill={color} />
         ))}
+      {series.label !== "none" &&
+        points.map(({ x, y }, index) => (
+          <text key={index} x={plot.x(x) + 2 * markerRadius} y={plot.y(y) + 4}>
+            {series.label === "name" ? series.name : y}
+          </text>
+        ))}
     </g>
   );
 }

@@ -26,6 +26,7 @@ export interface Series {
   readonly color: string;
   readonly line: boolean;
   readonly markers: boolean;
+  readonly label: SeriesRecord["label"];
   /** Neighbouring points are joined; null is a gap. */
   readonly points: readonly ({ readonly x: number; readonly y: number } | null)[];
 }
@@ -59,6 +60,7 @@ export function pictureOf(book: Book, sheet: string, chart: ChartRecord): Pictur
         points.map(({ y }) => y),
         ends,
       ),
+      ...(chart.y.visible ? {} : { ticks: [] }),
     },
     series,
   };
@@ -80,6 +82,7 @@ function seriesOf(book: Book, { sheet, kind, index }: Place, record: SeriesRecor
     color: record.color === "" ? colors[index % colors.length]! : record.color,
     line: record.line,
     markers: record.markers,
+    label: record.label,
     points: ys.map((y, i) => pointAt(xs.length === 0 ? i + 1 : xs[i], y)),
   };
 }
