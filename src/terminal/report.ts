@@ -1,3 +1,4 @@
+import { alignedLines } from "../core/answer/alignedLines.ts";
 import type { Answer } from "../core/answer/answer.ts";
 import { answerTable, choiceText, verdictLines } from "../core/answer/tables.ts";
 import { listInWords } from "../core/answer/wording.ts";
@@ -44,13 +45,7 @@ function table(answer: Answer): string[] {
   const cells = answerTable(answer).map((row) =>
     row.map((value) => (typeof value === "number" ? shown(value) : value)),
   );
-  const widths = (cells[0] ?? []).map((_, column) => Math.max(...cells.map((row) => (row[column] ?? "").length)));
-  return cells.map((row) =>
-    row
-      .map((value, column) => (column === 0 ? value.padEnd(widths[column] ?? 0) : value.padStart(widths[column] ?? 0)))
-      .join("  ")
-      .trimEnd(),
-  );
+  return alignedLines(cells);
 }
 
 const shown = (value: number): string => String(Number(value.toPrecision(5)));
