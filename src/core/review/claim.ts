@@ -45,6 +45,7 @@ export type Quantity =
         | "explained-sum-of-squares"
         | "residual-sum-of-squares";
     }
+  /** \`at\`: the drivers' values as they enter the regression, logarithms and squares taken. */
   | { readonly kind: "prediction"; readonly at: readonly number[] };
 
 export interface ReportedNumber {

@@ -44,6 +44,8 @@ export interface ClaimReview {
   readonly compared: readonly Comparison[];
   /** Null where the cells as claimed reproduce everything, or nothing that was tried does. */
   readonly explanation: Explanation | null;
+  /** Other changes that reproduce everything as well; the reported digits cannot tell them from the explanation. */
+  readonly alternatives: readonly Explanation[];
   /** What was tried, in words, where nothing fits. */
   readonly tried: readonly string[];
   /** Null where no standard error, ratio, p-value or bound was reported, or none of the kinds known reproduces them. */
