@@ -89,6 +89,7 @@ export const claimReviewFixture: ClaimReview = {
     cells: ["Months!B10:C10"],
     compared: comparisons(explained, [true, true, true, true]),
   },
+  alternatives: [],
   tried: [],
   errors: {
     kinds: ["classical", "White (HC1)"],
