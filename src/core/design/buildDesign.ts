@@ -1,4 +1,5 @@
 import { type Result, failure, success } from "../problem/result.ts";
+import { hiddenNotes } from "../table/hiddenRows.ts";
 import type { Source } from "../table/source.ts";
 import type { Design, Term } from "./design.ts";
 import { type Ingredient, gather } from "./ingredient.ts";
@@ -66,7 +67,7 @@ function designOf({ source, model, read, used, terms }: Parts): Result<Design> {
     sourceRows: used.rows,
     leftOut: used.leftOut,
     leftOutCount: used.leftOutCount,
-    notes: [...(source.notes ?? []), ...read.notes, ...baseNotes(terms)],
+    notes: [...(source.notes ?? []), ...hiddenNotes(source), ...read.notes, ...baseNotes(terms)],
   });
 }
 

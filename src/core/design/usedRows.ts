@@ -65,10 +65,13 @@ function inOrder({ sequence, groups }: RowFrame, rowCount: number): Int32Array<A
 const mostListed = 1000;
 
 function leftOutRows(source: Source, { outcome, ingredients }: Needs, usable: Uint8Array): readonly LeftOut[] {
+  const hidden = new Set(source.hidden?.leftOut === true ? source.hidden.rows : []);
   const listed: LeftOut[] = [];
   for (let row = 0; row < usable.length && listed.length < mostListed; row++) {
     if (usable[row] === 1) continue;
-    const lack = isBlankRow(source, row) ? blankRow(outcome.column, row) : firstLack(ingredients, row);
+    const lack = hidden.has(row)
+      ? lackOfRow(outcome.column, row, "the row is hidden")
+      : lackAt(source, { outcome, ingredients }, row);
     listed.push({ row: rowNumberOf(outcome.column.place, row), ...lack });
   }
   return listed;
@@ -77,7 +80,10 @@ function leftOutRows(source: Source, { outcome, ingredients }: Needs, usable: Ui
 const isBlankRow = ({ columns }: Source, row: number): boolean =>
   columns.every(({ cells }) => cells.kinds[row] === cellKind.blank);
 
-const blankRow = ({ place }: Column, row: number): Lack => ({ cell: cellOf(place, row), because: "the row is blank" });
+const lackAt = (source: Source, { outcome, ingredients }: Pick<Needs, "outcome" | "ingredients">, row: number): Lack =>
+  isBlankRow(source, row) ? lackOfRow(outcome.column, row, "the row is blank") : firstLack(ingredients, row);
+
+const lackOfRow = ({ place }: Column, row: number, because: string): Lack => ({ cell: cellOf(place, row), because });
 
 const firstLack = (ingredients: readonly Ingredient[], row: number): Lack =>
   ingredients.find(({ present }) => present[row] === 0)!.lackOf(row);

@@ -1,3 +1,4 @@
+import { storedSentences } from "./messagesStored.ts";
 import type { Problem } from "./problem.ts";
 import {
   asCell,
@@ -202,7 +203,6 @@ const sentences: { readonly [Code in Problem["code"]]: (problem: Extract<Problem
     "Close it in other programs or choose another name.",
   ],
   "cell-being-edited": () => ["A cell is being edited.", "Press Enter or Escape in the sheet, then try again."],
-  "nothing-selected": () => ["No cells are selected.", "Select your data in the sheet, headings included."],
   "several-areas-selected": ({ areas }) => [
     `${areas} separate areas are selected.`,
     "Select one block of cells; columns that are not needed can be left unused.",
@@ -244,5 +244,6 @@ const sentences: { readonly [Code in Problem["code"]]: (problem: Extract<Problem
     `The calculation was stopped after ${counted(seconds, "second")}.`,
     "Use fewer rows or columns, or work in the pane, which has no such limit.",
   ],
+  ...storedSentences,
   cancelled: () => ["The work was cancelled; nothing was written.", "Start again whenever you like."],
 };

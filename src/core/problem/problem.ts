@@ -3,7 +3,7 @@
  * `cells` are addresses as the user knows them ("Months!C14", or "row 13 of the drivers, column 2"
  * for arguments of a worksheet function); lists hold at most ten, `count` holds how many there are.
  */
-export type Problem = TableProblem | ModelProblem | FitProblem | SettingProblem | HostProblem;
+export type Problem = TableProblem | ModelProblem | FitProblem | SettingProblem | StoredProblem | HostProblem;
 
 export interface Spots {
   readonly column: string;
@@ -98,10 +98,27 @@ export type SettingProblem =
   | { readonly code: "unreadable-file"; readonly file: string; readonly because: string }
   | { readonly code: "unwritable-file"; readonly file: string; readonly because: string };
 
+/** What is wrong with what Footing keeps in the workbook itself. */
+export type StoredProblem =
+  | { readonly code: "stored-by-newer"; readonly version: number; readonly own: number }
+  | { readonly code: "stored-unreadable"; readonly part: string }
+  | { readonly code: "setup-gone"; readonly name: string }
+  | { readonly code: "setup-unnamed" }
+  | { readonly code: "setup-name-taken"; readonly name: string }
+  /** `setup` as words: "the set-up X" or "the sheet X"; `last` is where the data stood when it was stored. */
+  | { readonly code: "setup-data-gone"; readonly setup: string; readonly place: string; readonly last: string }
+  | {
+      readonly code: "cells-of-others";
+      readonly sheet: string;
+      readonly cells: readonly string[];
+      readonly count: number;
+    }
+  | { readonly code: "sheet-not-known"; readonly sheet: string }
+  | { readonly code: "too-few-setups"; readonly setups: number };
+
 /** What the spreadsheet itself refuses; only the office and desk rooms make these. */
 export type HostProblem =
   | { readonly code: "cell-being-edited" }
-  | { readonly code: "nothing-selected" }
   | { readonly code: "several-areas-selected"; readonly areas: number }
   | { readonly code: "chart-selected" }
   | { readonly code: "other-workbook" }

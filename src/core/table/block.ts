@@ -7,4 +7,6 @@ export interface CellBlock {
   readonly firstColumn: number;
   readonly rowCount: number;
   readonly columns: readonly CellColumn[];
+  /** Sheet rows of the block that are hidden or filtered away, where the host tells. */
+  readonly hiddenRows?: readonly number[];
 }

@@ -7,6 +7,7 @@ import type { CellColumn } from "./cells.ts";
 import { type Grid, gridOf, isBlankCell, nextFilled } from "./grid.ts";
 import { findHeadingRow, firstDataRow, isUnitsRow, plainHeading, rowOfHeadings, wordsOf } from "./headingRow.ts";
 import { columnInWords, distinctNames } from "./headings.ts";
+import { hiddenAmong } from "./hiddenRows.ts";
 import type { Column, Source } from "./source.ts";
 import { cellInWords } from "./spots.ts";
 
@@ -120,13 +121,15 @@ const emptyNotes = (read: Read): string[] =>
 
 function sourceOf(read: Read): Source {
   const { grid, first, last } = read;
-  const { sheet, firstRow, firstColumn, columns } = grid.block;
+  const { sheet, firstRow, firstColumn, columns, hiddenRows = [] } = grid.block;
   const kept = fullColumns(read);
   const names = distinctNames(
     kept.map((column) => ({ heading: headingOf(read, column), where: columnInWords(firstColumn + column) })),
   );
+  const hidden = hiddenAmong(hiddenRows, firstRow + first, last - first + 1);
   return {
     rowCount: last - first + 1,
+    ...(hidden !== null && { hidden }),
     columns: kept.map((column, i): Column => ({
       name: names[i]!,
       place: { kind: "sheet", sheet, column: firstColumn + column, firstRow: firstRow + first },

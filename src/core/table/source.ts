@@ -1,4 +1,5 @@
 import type { CellColumn } from "./cells.ts";
+import type { HiddenRows } from "./hiddenRows.ts";
 
 /** Where a column stands, so that a fault can name its cells. Rows and columns count from 0. */
 export type Place =
@@ -18,4 +19,6 @@ export interface Source {
   readonly rowCount: number;
   /** What was not read around the columns, or otherwise than expected, as sentences; they go with the answer. */
   readonly notes?: readonly string[];
+  /** Rows that the sheet does not show, where there are any and the host tells. */
+  readonly hidden?: HiddenRows;
 }

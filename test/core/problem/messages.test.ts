@@ -194,9 +194,43 @@ const sentences: Sentences = {
     { code: "cell-being-edited" },
     "A cell is being edited. Press Enter or Escape in the sheet, then try again.",
   ],
-  "nothing-selected": [
-    { code: "nothing-selected" },
-    "No cells are selected. Select your data in the sheet, headings included.",
+  "stored-by-newer": [
+    { code: "stored-by-newer", version: 3, own: 1 },
+    "This workbook holds set-ups that a newer Footing stored (format 3; this one reads format 1). They were left as they are. Update Footing to open them.",
+  ],
+  "stored-unreadable": [
+    { code: "stored-unreadable", part: "{A1}" },
+    "What this workbook keeps for Footing in the part {A1} cannot be read. It was left as it is. Store the set-ups again; they go into a part of their own.",
+  ],
+  "setup-gone": [
+    { code: "setup-gone", name: "By month" },
+    'There is no set-up "By month" in the workbook any more. Choose another, or store this one again.',
+  ],
+  "setup-unnamed": [{ code: "setup-unnamed" }, "The set-up has no name. Type a name for it."],
+  "setup-name-taken": [
+    { code: "setup-name-taken", name: "By month" },
+    'There is already a set-up "By month" in the workbook. Type another name, or remove that one first.',
+  ],
+  "setup-data-gone": [
+    {
+      code: "setup-data-gone",
+      setup: 'the set-up "By month"',
+      place: "the table Sales",
+      last: "Months!A1:D97",
+    },
+    'The data of the set-up "By month" are no longer found: the table Sales is gone from the workbook (its cells stood in Months!A1:D97 when it was stored). Choose the data again; what was chosen for columns of the same name is taken over.',
+  ],
+  "cells-of-others": [
+    { code: "cells-of-others", sheet: "Repairs answer", cells: ["'Repairs answer'!C4"], count: 1 },
+    "1 cell of the sheet \"Repairs answer\" that the result needs holds what Footing did not write: 'Repairs answer'!C4. Move or empty what stands there, or write the result to a new sheet. Nothing was changed.",
+  ],
+  "sheet-not-known": [
+    { code: "sheet-not-known", sheet: "Repairs answer" },
+    'Footing cannot tell its own cells from yours on the sheet "Repairs answer", so it does not write over them. Write the result to a new sheet.',
+  ],
+  "too-few-setups": [
+    { code: "too-few-setups", setups: 1 },
+    "A comparison needs two set-ups or more; one is chosen. Choose those to compare.",
   ],
   "several-areas-selected": [
     { code: "several-areas-selected", areas: 2 },
