@@ -1,6 +1,8 @@
 import type { Result } from "../core/problem/result.ts";
+import type { Book } from "../core/review/book.ts";
 import type { CellBlock } from "../core/table/block.ts";
 import type { SheetPlan } from "../sheet/plan.ts";
+import type { Keeper } from "./keeper.ts";
 
 /** A block of cells and where it was found. */
 export interface PlacedBlock extends CellBlock {
@@ -8,8 +10,6 @@ export interface PlacedBlock extends CellBlock {
   readonly address: string;
   /** The table the block is the range of, if any: for structured references. */
   readonly table: string | null;
-  /** Sheet rows (from 0) of the block that are hidden or filtered away, where the host tells. */
-  readonly hiddenRows?: readonly number[];
 }
 
 /** A place a user can choose data from. */
@@ -37,9 +37,11 @@ export interface Errand {
 }
 
 /** What the app needs of a spreadsheet. The office room answers it with Excel's API. */
-export interface Host {
+export interface Host extends Keeper {
   /** Reads in chunks; a selection of one cell widens to the data around it; whole columns stop at the used range. */
   readonly read: (where: WhereToRead, errand: Errand) => Promise<Result<PlacedBlock>>;
+  /** Reads every sheet for a review, with its formulas; the sheets that Footing wrote are left away. */
+  readonly readBook: (errand: Errand) => Promise<Result<Book>>;
   readonly listPlaces: () => Promise<Result<readonly DataPlace[]>>;
   /** Writes to a new sheet, shows it, and answers with its name. */
   readonly write: (plan: SheetPlan, errand: Errand) => Promise<Result<{ readonly sheet: string }>>;

@@ -5,7 +5,8 @@ import { isDateFormat } from "./dateFormats.ts";
 export interface ReadCells {
   readonly values: readonly (readonly unknown[])[];
   readonly valueTypes: readonly (readonly string[])[];
-  readonly numberFormat: readonly (readonly string[])[];
+  /** Null where they were not asked for: a column then goes on in the format of its last number. */
+  readonly numberFormat: readonly (readonly string[])[] | null;
 }
 
 export interface ColumnBuilder {
@@ -19,6 +20,7 @@ export function columnBuilder(rowCount: number): ColumnBuilder {
   const kinds = new Uint8Array(rowCount);
   const numbers = new Float64Array(rowCount);
   const known = new Map<string, number>();
+  let lastFormat = "General";
   const numberOf = (text: string): number => {
     const index = known.get(text) ?? known.size;
     known.set(text, index);
@@ -28,7 +30,9 @@ export function columnBuilder(rowCount: number): ColumnBuilder {
     put: ({ values, valueTypes, numberFormat }, column, firstRow) => {
       for (let row = 0; row < values.length; row++) {
         const value = values[row]![column];
-        const kind = kindOf(value, valueTypes[row]![column]!, numberFormat[row]![column]!);
+        const format = numberFormat?.[row]?.[column] ?? lastFormat;
+        if (typeof value === "number") lastFormat = format;
+        const kind = kindOf(value, valueTypes[row]![column]!, format);
         kinds[firstRow + row] = kind;
         const inWords = kind === cellKind.text || kind === cellKind.error;
         numbers[firstRow + row] = inWords ? numberOf(String(value)) : Number(value);

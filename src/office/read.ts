@@ -3,7 +3,7 @@ import { type Result, failure, success } from "../core/problem/result.ts";
 import { addressOf } from "../core/table/address.ts";
 import { type ColumnBuilder, type ReadCells, columnBuilder } from "./columnBuilder.ts";
 import { isTooMuchAtOnce } from "./faults.ts";
-import { hiddenRowsOf } from "./hiddenRows.ts";
+import { hiddenRowsOf } from "./hidden.ts";
 import type { Located } from "./locate.ts";
 import { persist } from "./session.ts";
 

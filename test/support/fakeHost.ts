@@ -1,6 +1,7 @@
 import type { DataPlace, Errand, Host, PlacedBlock, WhereToRead } from "../../src/app/host.ts";
 import { type Problem } from "../../src/core/problem/problem.ts";
 import { type Result, failure, success } from "../../src/core/problem/result.ts";
+import type { Book } from "../../src/core/review/book.ts";
 import { type Cell, toCellColumn } from "../../src/core/table/cells.ts";
 import { addressOf } from "../../src/core/table/address.ts";
 import type { SheetPlan } from "../../src/sheet/plan.ts";
@@ -11,6 +12,8 @@ export interface FakeHost extends Host {
   rows: Cell[][];
   readonly sheet: string;
   readonly places: DataPlace[];
+  /** What a review reads. */
+  book: Book;
   /** What the next call of each kind answers instead of what was asked. */
   readonly refusals: Partial<Record<"read" | "write" | "goTo" | "watch" | "recalculate" | "keep", Problem>>;
   /** Whether it carries on as if nothing had been cancelled. */
@@ -37,6 +40,7 @@ export function fakeHost(sheet: string, rows: Cell[][]): FakeHost {
     sheet,
     rows,
     places: [],
+    book: { sheets: [], names: [], calculation: "automatic" },
     refusals: {},
     heedless: false,
     hold: null,
@@ -55,6 +59,7 @@ export function fakeHost(sheet: string, rows: Cell[][]): FakeHost {
         ? failure({ code: "cancelled" })
         : refused("read", blockOf(host, where));
     },
+    readBook: () => Promise.resolve(refused("read", host.book)),
     listPlaces: () => Promise.resolve(success(host.places)),
     write: (plan) => {
       host.plans.push(plan);

@@ -4,6 +4,8 @@ export interface BookData {
   readonly names: readonly { readonly name: string; readonly refersTo: string }[];
   /** Index of the sheet shown first. */
   readonly active: number;
+  /** Set where formulas are calculated only when someone asks: their values may be older than the cells they read. */
+  readonly manualCalculation?: true;
   /** What add-ins keep in the workbook; their parts and settings travel with the file. */
   readonly customXml?: readonly { readonly id: string; readonly xml: string }[];
   readonly settings?: Readonly<Record<string, unknown>>;
@@ -21,6 +23,7 @@ export interface SheetData {
   readonly frozenRows: number;
   readonly hidden: boolean;
   readonly hiddenRows: readonly number[];
+  readonly hiddenColumns?: readonly number[];
   readonly protected: boolean;
   readonly tables: readonly { readonly name: string; readonly address: string }[];
   readonly charts: readonly BookChart[];

@@ -6,9 +6,11 @@ import { clearRange } from "./rangeClear.ts";
 import { hyperlinkOf, setHyperlink } from "./rangeLinks.ts";
 import { rangeParts } from "./rangeParts.ts";
 import {
+  columnsHidden,
   countOf,
   ensureSize,
   hasSpill,
+  hideColumns,
   hideRows,
   mergeRange,
   placeOf,
@@ -49,6 +51,7 @@ export const range: Family<Area> = {
     NumberFormatCategories: (area, host) => categoriesOf(host, area),
     HasSpill: (area, host) => hasSpill(host, area),
     RowHidden: (area, host) => rowsHidden(host, area),
+    ColumnHidden: (area, host) => columnsHidden(host, area),
     Hyperlink: (area, host) => hyperlinkOf(host, area),
     Left: (area, host) => placeOf(host, area).left,
     Top: (area, host) => placeOf(host, area).top,
@@ -64,6 +67,7 @@ export const range: Family<Area> = {
     NumberFormatLocal: (area, host, value) => setFormats(host, area, value),
     Hyperlink: (area, host, value) => setHyperlink(host, area, value),
     RowHidden: (area, host, value) => hideRows(host, area, asFlag(value)),
+    ColumnHidden: (area, host, value) => hideColumns(host, area, asFlag(value)),
   },
   part: rangeParts,
   call: {
@@ -78,5 +82,5 @@ export const range: Family<Area> = {
     // The client asks before it writes a large block in pieces: the whole must fit first.
     _ValidateArraySize: (area, host, args) => ensureSize(host, area, args),
   },
-  lacks: ["FormulasR1C1", "Hidden", "ColumnHidden", "Style", "LinkedDataTypeState", "SavedAsArray"],
+  lacks: ["FormulasR1C1", "Hidden", "Style", "LinkedDataTypeState", "SavedAsArray"],
 };

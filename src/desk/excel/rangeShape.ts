@@ -49,6 +49,19 @@ export function rowsHidden(host: Host, area: Area): boolean | null {
   return common(hidden);
 }
 
+export function columnsHidden(host: Host, { sheet, column, columns }: Area): boolean | null {
+  const worksheet = worksheetOf(host.book, sheet);
+  const count = Math.min(columns, worksheet.getColumnCount() - column);
+  return common(Array.from({ length: Math.max(1, count) }, (_, index) => !worksheet.getColVisible(column + index)));
+}
+
+export function hideColumns(host: Host, area: Area, hide: boolean): void {
+  ensureWritable(host, area.sheet);
+  const ranges = [toRange(withinGrid(host, area))];
+  const name = hide ? command.hideColumns : command.showColumns;
+  carryOut(host.book.grid, name, { unitId: host.book.unit, subUnitId: area.sheet, ranges });
+}
+
 export function hideRows(host: Host, area: Area, hide: boolean): void {
   ensureWritable(host, area.sheet);
   const ranges = [toRange(withinGrid(host, area))];

@@ -81,7 +81,7 @@ const kinds = { Recalculate: false, Full: true, FullRebuild: true } as const;
 
 export const application: Family<null> = {
   read: {
-    CalculationMode: () => "Automatic",
+    CalculationMode: (_state, { book }) => (book.manualCalculation ? "Manual" : "Automatic"),
     CalculationState: (_state, host) => (host.isCalculating() ? "Calculating" : "Done"),
     DecimalSeparator: () => ".",
     ThousandsSeparator: () => ",",

@@ -3,7 +3,7 @@ import type { BookCell, BookData, BookValue, SheetData, StyledCell } from "../bo
 import { chartParts, toBookChart, withoutEmptyLines } from "./charts.ts";
 import { readKept, type Kept } from "./keptParts.ts";
 import { inPoints } from "./margins.ts";
-import { changeParts, pack, partsMatching, unpack } from "./parts.ts";
+import { changeParts, pack, partsMatching, textOf, unpack } from "./parts.ts";
 import { readable, unreadable, whyNoXlsx, type Reading } from "./reading.ts";
 import { toShown } from "./storedFormulas.ts";
 import { toBookStyle, type UsualLooks } from "./styles.ts";
@@ -20,7 +20,8 @@ export async function openXlsx(bytes: Uint8Array): Promise<Reading<BookData>> {
   if (because !== null) return unreadable(because);
   const parsed = await parse(bytes);
   if (parsed === null) return unreadable("it is damaged, or no Excel workbook (.xlsx)");
-  return readable(withKept(toBook(parsed.workbook), parsed.kept));
+  const book = withKept(toBook(parsed.workbook), parsed.kept);
+  return readable(isCalculatedByHand(bytes) ? { ...book, manualCalculation: true } : book);
 }
 
 /** Whatever the library trips over in a file is the file's fault. */
@@ -30,6 +31,11 @@ async function parse(bytes: Uint8Array): Promise<{ readonly workbook: Workbook; 
   } catch {
     return null;
   }
+}
+
+function isCalculatedByHand(bytes: Uint8Array): boolean {
+  const [part] = Object.values(partsMatching(bytes, /^xl\/workbook\.xml$/));
+  return part !== undefined && /<(?:\w+:)?calcPr\b[^>]*\bcalcMode="manual"/.test(textOf(part));
 }
 
 /** The file library reads the width of a line that is not drawn: such lines are taken out before it looks. */
@@ -66,6 +72,7 @@ function toSheet(sheet: Sheet, usual: UsualLooks): SheetData {
     frozenRows: sheet.freezePane?.rows ?? 0,
     hidden: sheet.hidden === true || sheet.veryHidden === true,
     hiddenRows: [...(sheet.rowDefs ?? [])].filter(([, { hidden }]) => hidden === true).map(([row]) => row),
+    ...hiddenColumnsOf(columns),
     protected: sheet.protection?.sheet === true,
     tables: tables.flatMap(({ name: table, range }) => (range === undefined ? [] : [{ name: table, address: range }])),
     charts: charts.map(toBookChart).filter((chart) => chart !== null),
@@ -75,6 +82,11 @@ function toSheet(sheet: Sheet, usual: UsualLooks): SheetData {
 }
 
 type Printing = Pick<SheetData, "printArea" | "onePageWide" | "landscape" | "margins">;
+
+function hiddenColumnsOf(columns: NonNullable<Sheet["columns"]>): Pick<SheetData, "hiddenColumns"> {
+  const hidden = columns.flatMap((column, index) => (column.hidden === true ? [index] : []));
+  return hidden.length === 0 ? {} : { hiddenColumns: hidden };
+}
 
 const printingOf = (setup: Sheet["pageSetup"]): Printing => ({
   printArea: setup?.printArea?.replaceAll("$", "") ?? null,

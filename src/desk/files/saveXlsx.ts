@@ -3,6 +3,7 @@ import {
   writeXlsx,
   type Cell,
   type CellValue,
+  type ColumnDef,
   type RowDef,
   type TableDefinition,
   type WriteSheet,
@@ -29,25 +30,25 @@ export async function toParts(book: BookData, usualFont: string): Promise<Parts>
     activeSheet: book.active,
     stringMode: "inline",
   });
-  return finishes(usualFont).reduce((parts, [path, finish]) => changeParts(parts, path, finish), unpack(bytes));
+  return finishes(book, usualFont).reduce((parts, [path, finish]) => changeParts(parts, path, finish), unpack(bytes));
 }
 
 /** What each kind of part still needs after the file library has written it. */
-const finishes = (usualFont: string): readonly (readonly [RegExp, (part: string) => string])[] => [
+const finishes = (book: BookData, usualFont: string): readonly (readonly [RegExp, (part: string) => string])[] => [
   [/^xl\/worksheets\/[^/]+\.xml$/, withErrorResults],
   [chartParts, finishedChart],
   [/^xl\/styles\.xml$/, (part) => withWholeFonts(part, usualFont)],
-  [/^xl\/workbook\.xml$/, finishedWorkbook],
+  [/^xl\/workbook\.xml$/, (part) => finishedWorkbook(part, book)],
   [/^docProps\/app\.xml$/, finishedProperties],
 ];
 
 /** Excel's own mark since 2019: with another it would calculate everything on opening, and show #NAME? where the add-in is missing. */
-const calculatedBy = '<calcPr calcId="191029"/>';
+const calculatedBy = 'calcId="191029"';
 
 /** The workbook part with saved results that stand, and with sheet names quoted in what is to be printed. */
-const finishedWorkbook = (part: string): string =>
+const finishedWorkbook = (part: string, { manualCalculation }: BookData): string =>
   part
-    .replace(/<calcPr[^>]*\/>/, calculatedBy)
+    .replace(/<calcPr[^>]*\/>/, `<calcPr ${calculatedBy}${manualCalculation ? ' calcMode="manual"' : ""}/>`)
     .replace(
       /(<definedName name="_xlnm\.Print_Area"[^>]*>)([^'<][^<]*?)(?=![^!<]*<)/g,
       (_, start: string, sheet: string) => `${start}'${sheet.replaceAll("'", "''")}'`,
@@ -66,12 +67,12 @@ function withErrorResults(sheetPart: string): string {
 }
 
 function toFileSheet(sheet: SheetData): WriteSheet {
-  const { columnWidths, printArea } = sheet;
+  const { printArea } = sheet;
   return {
     name: sheet.name,
     rows: sheet.rows.map((row) => row.map((cell) => plain(valueOf(cell)))),
     cells: detailsOf(sheet),
-    columns: Array.from(columnWidths, (width) => (width === undefined ? {} : { width })),
+    columns: columnDefsOf(sheet),
     merges: sheet.merges.map(parseRange),
     rowDefs: rowDefsOf(sheet),
     hidden: sheet.hidden,
@@ -86,6 +87,15 @@ function toFileSheet(sheet: SheetData): WriteSheet {
       ...(sheet.margins !== undefined && { margins: inInches(sheet.margins) }),
     },
   };
+}
+
+function columnDefsOf({ columnWidths, hiddenColumns = [] }: SheetData): ColumnDef[] {
+  const count = Math.max(columnWidths.length, 1 + Math.max(-1, ...hiddenColumns));
+  const hidden = new Set(hiddenColumns);
+  return Array.from({ length: count }, (_, column) => {
+    const width = columnWidths[column];
+    return { ...(width !== undefined && { width }), ...(hidden.has(column) && { hidden: true }) };
+  });
 }
 
 function rowDefsOf({ rowHeights = [], hiddenRows }: SheetData): Map<number, RowDef> {

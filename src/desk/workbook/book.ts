@@ -11,6 +11,8 @@ export interface Book {
   readonly sheets: Map<string, SheetRecord>;
   readonly customXml: CustomXmlRecord[];
   readonly settings: Map<string, unknown>;
+  /** What the workbook says of itself; the desk calculates at once either way. */
+  readonly manualCalculation: boolean;
   /** Changes to cells on their way to the grid, by sheet. */
   readonly drafts: Map<string, Draft>;
   readonly listeners: Set<(change: BookChange) => void>;

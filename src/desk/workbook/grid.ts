@@ -26,6 +26,8 @@ export const command = {
   unmerge: "sheet.mutation.remove-worksheet-merge",
   hideRows: "sheet.mutation.set-row-hidden",
   showRows: "sheet.mutation.set-row-visible",
+  hideColumns: "sheet.mutation.set-col-hidden",
+  showColumns: "sheet.mutation.set-col-visible",
   hideSheet: "sheet.mutation.set-worksheet-hidden",
   order: "sheet.mutation.set-worksheet-order",
   rename: "sheet.mutation.set-worksheet-name",

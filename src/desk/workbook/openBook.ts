@@ -22,6 +22,7 @@ export function openBook(grid: Grid, data: BookData): Book {
     sheets: new Map(data.sheets.map((sheet, index) => [ids[index]!, toRecord(sheet)])),
     customXml: (data.customXml ?? []).map((part) => ({ ...part })),
     settings: new Map(Object.entries(data.settings ?? {})),
+    manualCalculation: data.manualCalculation ?? false,
     drafts: new Map(),
     listeners: new Set(),
   };

@@ -29,6 +29,7 @@ export function snapshotOf(book: Book): BookData {
     names: namesOf(book).map(({ name, refersTo }) => ({ name, refersTo })),
     active: Math.max(0, ids.indexOf(activeSheet(book))),
     ...(book.customXml.length === 0 ? {} : { customXml: book.customXml.map((part) => ({ ...part })) }),
+    ...(book.manualCalculation ? { manualCalculation: true as const } : {}),
     ...(book.settings.size === 0 ? {} : { settings: Object.fromEntries(book.settings) }),
   };
 }
@@ -62,11 +63,15 @@ function cellName(place: string): string {
   return `${columnLetters(column ?? 0)}${(row ?? 0) + 1}`;
 }
 
-function sizesOf(book: Book, sheet: string): Pick<SheetData, "columnWidths" | "rowHeights" | "hiddenRows"> {
+type Sizes = Pick<SheetData, "columnWidths" | "rowHeights" | "hiddenRows" | "hiddenColumns">;
+
+function sizesOf(book: Book, sheet: string): Sizes {
   const config = worksheetOf(book, sheet).getConfig();
   const columnWidths: (number | undefined)[] = [];
+  const hiddenColumns: number[] = [];
   for (const [column, data] of Object.entries(config.columnData as Record<string, Partial<IColumnData>>)) {
     if (data.w !== undefined) columnWidths[Number(column)] = charactersOf(data.w);
+    if (data.hd === BooleanNumber.TRUE) hiddenColumns.push(Number(column));
   }
   const rowHeights: (number | undefined)[] = [];
   const hiddenRows: number[] = [];
@@ -78,6 +83,7 @@ function sizesOf(book: Book, sheet: string): Pick<SheetData, "columnWidths" | "r
     columnWidths: Array.from(columnWidths),
     ...(rowHeights.length === 0 ? {} : { rowHeights: Array.from(rowHeights) }),
     hiddenRows,
+    ...(hiddenColumns.length === 0 ? {} : { hiddenColumns }),
   };
 }
 

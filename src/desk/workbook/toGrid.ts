@@ -2,6 +2,7 @@ import {
   BooleanNumber,
   CellValueType,
   type ICellData,
+  type IColumnData,
   type IRowData,
   type IWorkbookData,
   type IWorksheetData,
@@ -31,7 +32,8 @@ export function toGrid(id: string, data: BookData, sheetIds: readonly string[]):
 }
 
 function toWorksheet(sheet: SheetData, id: string): Partial<IWorksheetData> & { readonly id: string } {
-  const wide = sheet.rows.reduce((most, row) => Math.max(most, row.length), sheet.columnWidths.length);
+  const widths = Math.max(sheet.columnWidths.length, 1 + Math.max(-1, ...(sheet.hiddenColumns ?? [])));
+  const wide = sheet.rows.reduce((most, row) => Math.max(most, row.length), widths);
   return {
     id,
     name: sheet.name,
@@ -51,10 +53,11 @@ function toWorksheet(sheet: SheetData, id: string): Partial<IWorksheetData> & { 
   };
 }
 
-function toColumns(sheet: SheetData): Record<number, { w: number }> {
-  const columns: Record<number, { w: number }> = {};
+function toColumns(sheet: SheetData): Record<number, Partial<IColumnData>> {
+  const columns: Record<number, Partial<IColumnData>> = {};
+  for (const column of sheet.hiddenColumns ?? []) columns[column] = { hd: BooleanNumber.TRUE };
   sheet.columnWidths.forEach((width, column) => {
-    if (width !== undefined) columns[column] = { w: pixelsOf(width) };
+    if (width !== undefined) columns[column] = { ...columns[column], w: pixelsOf(width) };
   });
   return columns;
 }

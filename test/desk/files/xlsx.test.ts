@@ -22,6 +22,12 @@ async function sheetPart(sheet: SheetData): Promise<string> {
 }
 
 describe("a workbook saved and opened again", () => {
+  it("says that it is calculated only when someone asks", async () => {
+    const book = bookOf(blankSheet("Data", [[1]]));
+    expect(await reopened({ ...book, manualCalculation: true })).toMatchObject({ manualCalculation: true });
+    expect(await reopened(book)).not.toHaveProperty("manualCalculation");
+  });
+
   it("keeps values of every kind, to the last digit", async () => {
     const rows = [
       ["Repairs", 0.1 + 0.2, 1.7976931348623157e308, -5e-324],
@@ -73,6 +79,7 @@ describe("a workbook saved and opened again", () => {
       frozenRows: 2,
       hidden: false,
       hiddenRows: [3],
+      hiddenColumns: [1],
       protected: true,
       tables: [{ name: "Stock", address: "A2:B4" }],
       printArea: "A1:F40",
