@@ -27,6 +27,7 @@ const looks: Readonly<Record<PlanStyle, Look>> = {
   sentence: { color: ink, vertical: "Top" },
   "in force": { bold: true, color: ink, fill: "#DBEAFE" },
   caution: { color: "#78350F", fill: "#FEF3C7", vertical: "Top" },
+  "to fill in": { below: line },
 };
 
 export function dress(range: Excel.Range, style: PlanStyle): void {

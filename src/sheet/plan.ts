@@ -36,7 +36,17 @@ export interface PlanBlock {
   readonly cells: readonly (readonly PlanCell[])[];
 }
 
-export type PlanStyle = "title" | "heading" | "table heading" | "label" | "note" | "sentence" | "in force" | "caution";
+export type PlanStyle =
+  | "title"
+  | "heading"
+  | "table heading"
+  | "label"
+  | "note"
+  | "sentence"
+  | "in force"
+  | "caution"
+  /** A line for someone to write on. */
+  | "to fill in";
 
 export interface PlanFormat {
   readonly area: Area;

@@ -3,7 +3,7 @@ import { capitalised } from "../answer/wording.ts";
 import type { BookReview, ClaimReview, Consequence } from "./claimReview.ts";
 import type { Finding } from "./finding.ts";
 import { comparedRows } from "./reviewTables.ts";
-import { gravestFirst, originInWords, reviewLimits, summaryOf, titleOf } from "./reviewWords.ts";
+import { explanationsOf, gravestFirst, originInWords, reviewLimits, summaryOf, titleOf } from "./reviewWords.ts";
 
 /** A line of a review as plain text; those of tables stand in columns and are not to be wrapped. */
 export interface TextLine {
@@ -38,7 +38,7 @@ const alignedTable = (rows: readonly (readonly string[])[]): TextLine[] =>
   alignedLines(rows).map((words) => ({ kind: "table", words: `  ${words}` }));
 
 function claimLines(review: ClaimReview): TextLine[] {
-  const { claim, verdict, explanation, tried, errors, consequences, findings } = review;
+  const { claim, verdict, tried, errors, consequences, findings } = review;
   return [
     sentence(`${claim.place}: ${titleOf(claim)} (${originInWords(claim)})`),
     blank,
@@ -46,7 +46,7 @@ function claimLines(review: ClaimReview): TextLine[] {
     blank,
     ...part("Findings", gravestFirst(findings).flatMap(findingLines)),
     ...part("Reported and recomputed", alignedTable(comparedTexts(review))),
-    ...part("What explains the difference", explanation === null ? [] : [sentence(explanation.sentence)]),
+    ...part("What explains the difference", explanationsOf(review).map(sentence)),
     ...part("Tried, and does not explain the difference", tried.map(sentence)),
     ...part("Which standard errors", errors === null ? [] : [sentence(errors.sentence)]),
     ...part("What follows for each driver", consequences.map(consequenceLine)),

@@ -57,3 +57,9 @@ export function summaryOf(claims: readonly Pick<ClaimReview, "findings">[]): str
   const said = parts.filter(([count]) => count > 0).map(([count, words]) => `${count} ${words}`);
   return `${claims.length} ${claims.length === 1 ? "regression" : "regressions"} reviewed: ${listInWords(said)}.`;
 }
+
+/** What explains the difference, then what would explain it as well. */
+export const explanationsOf = ({ explanation, alternatives }: ClaimReview): readonly string[] => [
+  ...(explanation === null ? [] : [explanation.sentence]),
+  ...alternatives.map(({ sentence }) => `Or, which the reported digits cannot tell apart: ${sentence}`),
+];
