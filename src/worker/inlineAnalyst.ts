@@ -1,13 +1,15 @@
-import type { Analyst, Inquirer } from "../app/analyst.ts";
+import type { Analyst, Inquirer, Reviewer } from "../app/analyst.ts";
 import type { Errand } from "../app/host.ts";
 import type { Report } from "../core/answer/question.ts";
 import { type Result, failure } from "../core/problem/result.ts";
 import { type Tasks, tasks } from "./tasks.ts";
 
 /** Computes on the calling thread. */
-export const inlineAnalystOf = ({ analyse, inquire }: Tasks): Analyst & Inquirer => ({
+export const inlineAnalystOf = ({ analyse, inquire, listClaims, review }: Tasks): Analyst & Inquirer & Reviewer => ({
   analyse: (question, errand) => run(errand, (report) => analyse(question, report)),
   inquire: (question, inquiry, errand) => run(errand, (report) => inquire({ ...question, inquiry }, report)),
+  listClaims: (book, asked, errand) => run(errand, (report) => listClaims({ ...asked, book }, report)),
+  review: (claim, errand) => run(errand, (report) => review({ claim }, report)),
 });
 
 /** In Node, and in browsers where a worker cannot start. */

@@ -1,5 +1,5 @@
 import type { Source } from "../core/table/source.ts";
-import type { Asked, Computed, TaskName } from "./tasks.ts";
+import type { Computed, TaskName } from "./tasks.ts";
 
 /**
  * Plain messages between the client and its worker. Sources go over once, under a number, and stay there for the next
@@ -12,9 +12,10 @@ export type ToWorker =
       readonly kind: "compute";
       readonly job: number;
       readonly task: TaskName;
-      readonly source: number;
+      /** Null where the task asks about no source. */
+      readonly source: number | null;
       /** All but the source itself. */
-      readonly asked: Omit<Asked<TaskName>, "source">;
+      readonly asked: object;
     };
 
 export type FromWorker =

@@ -41,8 +41,12 @@ export function takeSeat(hire: () => WorkerLine, ears: Ears): Seat {
   line.onmessageerror = () => lose("A message of the worker could not be read.");
   line.onerror = ({ message }) => lose(`The worker stopped: ${message ?? "no reason given"}`);
   const numberOf = keeper(line);
-  const ask: Seat["ask"] = (job, task, { source, ...asked }) =>
-    line.postMessage({ kind: "compute", job, task, source: numberOf(source), asked });
+  const ask: Seat["ask"] = (job, task, whole) => {
+    if ("source" in whole) {
+      const { source, ...asked } = whole;
+      line.postMessage({ kind: "compute", job, task, source: numberOf(source), asked });
+    } else line.postMessage({ kind: "compute", job, task, source: null, asked: whole });
+  };
   return { ask, leave };
 }
 

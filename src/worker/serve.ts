@@ -7,12 +7,17 @@ type Compute = Extract<ToWorker, { kind: "compute" }>;
 /** Computes what is asked over the port, one question after the other, and says when it is ready. */
 export function serve(port: WorkerPort, tasks: Tasks): void {
   const sources = new Map<number, Source>();
-  const compute = ({ job, task, asked }: Compute, source: Source | undefined): FromWorker => {
+  const sourceOf = (number: number): Source => {
+    const source = sources.get(number);
+    if (source === undefined) throw new Error("The worker was asked about data it does not hold.");
+    return source;
+  };
+  const compute = ({ job, task, asked, source }: Compute): FromWorker => {
     const report = (what: string, share: number): void => port.postMessage({ kind: "progress", job, what, share });
     try {
-      if (source === undefined) throw new Error("The worker was asked about data it does not hold.");
+      const held = source === null ? {} : { source: sourceOf(source) };
       // The client sends with each task what that task asks for.
-      return { kind: "done", job, result: tasks[task]({ ...asked, source } as never, report) };
+      return { kind: "done", job, result: tasks[task]({ ...asked, ...held } as never, report) };
     } catch (fault) {
       const { message, stack } = fault instanceof Error ? fault : new Error(String(fault));
       return { kind: "failed", job, message, stack: stack ?? "" };
@@ -27,7 +32,7 @@ export function serve(port: WorkerPort, tasks: Tasks): void {
         sources.delete(data.source);
         return;
       case "compute":
-        port.postMessage(compute(data, sources.get(data.source)));
+        port.postMessage(compute(data));
     }
   };
   port.postMessage({ kind: "ready" });

@@ -1,4 +1,4 @@
-import type { Analyst, Inquirer } from "../app/analyst.ts";
+import type { Analyst, Inquirer, Reviewer } from "../app/analyst.ts";
 import type { Errand } from "../app/host.ts";
 import { withinLimits } from "../app/timeLimit.ts";
 import type { Result } from "../core/problem/result.ts";
@@ -8,7 +8,7 @@ import type { WorkerLine } from "./protocol.ts";
 export interface Hiring {
   readonly hire: () => WorkerLine;
   /** Who computes where a worker cannot start. */
-  readonly fallback: Analyst & Inquirer;
+  readonly fallback: Analyst & Inquirer & Reviewer;
   /** How long one piece of work may take, its wait in the line included. */
   readonly seconds: number;
 }
@@ -17,7 +17,7 @@ export interface Hiring {
  * Computes in a worker, one question after the other; a computation under way is cancelled by putting a new worker in
  * its place.
  */
-export function workerAnalyst({ hire, fallback, seconds }: Hiring): Analyst & Inquirer {
+export function workerAnalyst({ hire, fallback, seconds }: Hiring): Analyst & Inquirer & Reviewer {
   const line = lineUp(hire);
   let count = 0;
   const compute = <T>(
@@ -43,5 +43,11 @@ export function workerAnalyst({ hire, fallback, seconds }: Hiring): Analyst & In
       compute({ task: "inquire", asked: { ...question, inquiry } }, errand, (own) =>
         fallback.inquire(question, inquiry, own),
       ),
+    listClaims: (book, asked, errand) =>
+      compute({ task: "listClaims", asked: { ...asked, book } }, errand, (own) =>
+        fallback.listClaims(book, asked, own),
+      ),
+    review: (claim, errand) =>
+      compute({ task: "review", asked: { claim } }, errand, (own) => fallback.review(claim, own)),
   };
 }

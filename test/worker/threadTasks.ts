@@ -3,6 +3,7 @@ import { success } from "../../src/core/problem/result.ts";
 import type { ToWorker, WorkerPort } from "../../src/worker/protocol.ts";
 import { serve } from "../../src/worker/serve.ts";
 import type { Tasks } from "../../src/worker/tasks.ts";
+import { claimReviewFixture } from "../support/reviewFixture.ts";
 
 /** Stand-in tasks whose conduct the outcome's heading asks for; they run in a real thread. */
 const analyse = (({ source, model }, report) => {
@@ -21,4 +22,10 @@ const port: WorkerPort = { postMessage: (message) => thread.postMessage(message)
 thread.on("message", (data: ToWorker) => port.onmessage?.({ data }));
 const inquire: Tasks["inquire"] = ({ inquiry }) =>
   success({ kind: "not-applicable", because: `asked: ${inquiry.kind}` });
-serve(port, { analyse, inquire });
+const listClaims: Tasks["listClaims"] = ({ book, sheet }) =>
+  success({ claims: [], unread: [{ cell: `${sheet ?? ""}!A1`, why: book.calculation }], craft: [] });
+const review: Tasks["review"] = ({ claim }, report) => {
+  report("trying", 0.5);
+  return success({ ...claimReviewFixture, claim, verdict: "in the thread" });
+};
+serve(port, { analyse, inquire, listClaims, review });

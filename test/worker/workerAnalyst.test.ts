@@ -3,10 +3,12 @@ import type { Answer } from "../../src/core/answer/answer.ts";
 import { defaultOptions } from "../../src/core/answer/options.ts";
 import type { Question } from "../../src/core/answer/question.ts";
 import { failure, success } from "../../src/core/problem/result.ts";
+import type { Book } from "../../src/core/review/book.ts";
 import { toCellColumn } from "../../src/core/table/cells.ts";
 import type { Source } from "../../src/core/table/source.ts";
 import { inlineAnalystOf } from "../../src/worker/inlineAnalyst.ts";
 import { workerAnalyst } from "../../src/worker/workerAnalyst.ts";
+import { claimFixture, claimReviewFixture } from "../support/reviewFixture.ts";
 import { type Threads, threadsOf } from "../support/threadLine.ts";
 
 const sourceOf = (...numbers: number[]): Source => ({
@@ -27,9 +29,15 @@ const ask = (conduct: string, source = sourceOf(1, 2, 4)): Question => ({
   options: defaultOptions,
 });
 
+const emptyBook: Book = { sheets: [], names: [], calculation: "manual" };
+
 const answerTitled = (title: string): Answer => ({ title }) as Answer;
 const noFinding = () => success({ kind: "not-applicable", because: "in line" } as const);
-const inline = inlineAnalystOf({ analyse: () => success(answerTitled("in line")), inquire: noFinding });
+const noReview = {
+  listClaims: () => success({ claims: [], unread: [{ cell: "S!A1", why: "in line" }], craft: [] }),
+  review: () => success({ ...claimReviewFixture, verdict: "in line" }),
+};
+const inline = inlineAnalystOf({ analyse: () => success(answerTitled("in line")), inquire: noFinding, ...noReview });
 const errand = (signal = new AbortController().signal, progress: (what: string) => void = () => undefined) => ({
   signal,
   progress: ({ what }: { readonly what: string }) => progress(what),
@@ -78,6 +86,21 @@ describe("the analysis in a worker", () => {
     const found = await inquire(ask("sum", source), { kind: "row by row" }, errand());
     expect(found).toEqual(success({ kind: "not-applicable", because: "asked: row by row" }));
     expect(threads.sent).toEqual(["keep", "compute", "compute"]);
+  });
+
+  it("lists the regressions of a book and reviews one, without a source", async () => {
+    const { listClaims, review } = analyst();
+    const steps: string[] = [];
+    threads.sent.length = 0;
+    const listed = await listClaims(emptyBook, { pointed: null, sheet: "Handover" }, errand());
+    const reviewed = await review(
+      claimFixture,
+      errand(undefined, (what) => void steps.push(what)),
+    );
+    expect(listed).toEqual(success({ claims: [], unread: [{ cell: "Handover!A1", why: "manual" }], craft: [] }));
+    expect(reviewed).toEqual(success({ ...claimReviewFixture, verdict: "in the thread" }));
+    expect(steps).toEqual(["trying"]);
+    expect(threads.sent).toEqual(["compute", "compute"]);
   });
 
   it("stops a computation under way when its caller gives up, and goes on with the next", async () => {
@@ -136,9 +159,11 @@ describe("where no worker can start", () => {
     const hire = (): never => {
       throw new Error("not allowed here");
     };
-    const { analyse, inquire } = workerAnalyst({ hire, fallback: inline, seconds: 5 });
+    const { analyse, inquire, listClaims, review } = workerAnalyst({ hire, fallback: inline, seconds: 5 });
     expect(await analyse(ask("sum"), errand())).toEqual(success({ title: "in line" }));
     expect(await inquire(ask("sum"), { kind: "row by row" }, errand())).toEqual(noFinding());
+    expect(await listClaims(emptyBook, { pointed: null, sheet: null }, errand())).toEqual(noReview.listClaims());
+    expect(await review(claimFixture, errand())).toEqual(noReview.review());
   });
 
   it("computes in line when the script fails before it is ready, and does not try again", async () => {
@@ -169,6 +194,7 @@ describe("where no worker can start", () => {
         return success(answerTitled("in line"));
       },
       inquire: noFinding,
+      ...noReview,
     });
     const controller = new AbortController();
     controller.abort();
