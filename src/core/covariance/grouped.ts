@@ -1,18 +1,12 @@
 import type { RowOrder } from "../design/design.ts";
 import type { Fit } from "../fit/fit.ts";
-import { mirrored } from "../numeric/crossProducts.ts";
-import { type Runs, visitGroups } from "../numeric/groupMoments.ts";
+import { addScore, visitGroups } from "../numeric/groupParts.ts";
 import type { SquareMatrix } from "../numeric/matrix.ts";
 import { ascendingRows, inOrder, isAscending, pairNumbers } from "../numeric/ordering.ts";
 import { type RowSource, basisRows } from "../numeric/rowSource.ts";
-import {
-  addOuterProduct,
-  plus,
-  scaled,
-  symmetricEigen,
-  symmetricFunction,
-  timesVector,
-} from "../numeric/smallMatrix.ts";
+import { addOuterProduct, plus, scaled, symmetricFunction } from "../numeric/smallMatrix.ts";
+import { symmetricEigenvalues } from "../numeric/symmetricEigenvalues.ts";
+import { adjustingGroups, type BasisWeights } from "./adjustedGroup.ts";
 import { basisOf } from "./basisOf.ts";
 import type { Covariance, GroupedVersion } from "./choice.ts";
 import { memory } from "./memory.ts";
@@ -84,56 +78,67 @@ function oneWay(fit: Fit, version: GroupedVersion, { way, groups }: Grouping): O
 function plainSums(fit: Fit, groups: Int32Array): OneWay {
   const size = fit.columnCount;
   const sums = new Float64Array(size * size);
+  const score = new Float64Array(size);
   let groupCount = 0;
-  const { rows, runs } = inRuns(fit, groups);
-  visitGroups(rows, runs, ({ score }) => {
+  const { rows, residuals, groups: inTurn } = inRuns(fit, groups);
+  visitGroups(rows, inTurn, (part) => {
+    addScore(score, part, residuals);
+    if (!part.last) return;
     groupCount++;
     addOuterProduct(sums, score);
+    score.fill(0);
   });
   const degreesOfFreedom = new Float64Array(size).fill(groupCount - 1);
   return { meat: { size, values: sums }, groupCount, degreesOfFreedom };
 }
 
-/** The same with A_g before e_g, and Satterthwaite's degrees of freedom. */
-function adjustedSums(fit: Fit, groups: Int32Array): OneWay {
+/** The same with A_g before e_g, and Satterthwaite's degrees of freedom of the combinations. */
+function adjustedSums(fit: Fit, groups: Int32Array, weights = coefficientsOf(fit)): OneWay {
   const size = fit.columnCount;
   const sums = new Float64Array(size * size);
-  const approximation = satterthwaite(fit.inverseTriangle);
+  const approximation = satterthwaite(weights.count, size);
   let groupCount = 0;
-  const { rows, runs } = inRuns(fit, groups);
-  visitGroups(rows, runs, ({ score, gram }) => {
+  const { rows, residuals, groups: inTurn } = inRuns(fit, groups);
+  const adjust = adjustingGroups(size, residuals, weights);
+  visitGroups(rows, inTurn, (part) => {
+    const group = adjust(part);
+    if (group === null) return;
     groupCount++;
-    const within = mirrored(Float64Array.from(gram), size);
-    const adjustment = symmetricFunction(within, inverseRootOfRest);
-    approximation.add(within, adjustment);
-    addOuterProduct(sums, timesVector(adjustment, score));
+    approximation.add(group);
+    addOuterProduct(sums, group.score);
   });
   return { meat: { size, values: sums }, groupCount, degreesOfFreedom: approximation.degreesOfFreedom() };
 }
 
+/** Row l of R^-1 holds the weights of coefficient l in the basis. */
+const coefficientsOf = ({ inverseTriangle }: Fit): BasisWeights => ({
+  count: inverseTriangle.size,
+  values: inverseTriangle.values,
+});
+
+interface InRuns {
+  readonly rows: RowSource;
+  readonly residuals: Float64Array;
+  readonly groups: Int32Array;
+}
+
 /** The basis and the residuals in an order in which rows of one group stand together. */
-function inRuns(fit: Fit, groups: Int32Array): { readonly rows: RowSource; readonly runs: Runs } {
+function inRuns(fit: Fit, groups: Int32Array): InRuns {
   const { columns, triangle } = basisOf(fit);
-  if (isAscending(groups)) return { rows: basisRows({ columns, triangle }), runs: { factors: fit.residuals, groups } };
+  if (isAscending(groups)) return { rows: basisRows({ columns, triangle }), residuals: fit.residuals, groups };
   const order = ascendingRows(groups);
   const moved = columns.map((column) => inOrder(column, order));
   return {
     rows: basisRows({ columns: moved, triangle }),
-    runs: { factors: inOrder(fit.residuals, order), groups: order.map((row) => groups[row]!) },
+    residuals: inOrder(fit.residuals, order),
+    groups: order.map((row) => groups[row]!),
   };
 }
 
-/**
- * (1 - l)^(-1/2) for an eigenvalue l of Q_g'Q_g, which is one of H_gg too: because H_gg = Q_g Q_g', the root of
- * I - H_gg acts on X_g as this k by k function does on its coordinates. A group that alone determines a direction
- * has l = 1 there and a residual of zero.
- */
-const inverseRootOfRest = (eigenvalue: number): number => (1 - eigenvalue < 1e-10 ? 0 : 1 / Math.sqrt(1 - eigenvalue));
-
 /** Cameron, Gelbach and Miller (2011), p. 241: negative eigenvalues set to zero; here in the unit-free basis. */
 function notIndefinite(meat: SquareMatrix): { readonly meat: SquareMatrix; readonly fallback: string | null } {
-  const { values } = symmetricEigen(meat);
-  if (values.at(0)! >= -1e-12 * values.at(-1)!) return { meat, fallback: null };
+  const eigenvalues = symmetricEigenvalues(meat);
+  if (eigenvalues.at(0)! >= -1e-12 * eigenvalues.at(-1)!) return { meat, fallback: null };
   return {
     meat: symmetricFunction(meat, (eigenvalue) => Math.max(0, eigenvalue)),
     fallback: "The two-way covariance came out indefinite, so its negative part was set to zero.",

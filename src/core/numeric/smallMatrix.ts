@@ -13,19 +13,6 @@ export const matrixOf = (rows: readonly (readonly number[])[]): SquareMatrix => 
 export const diagonal = ({ size, values }: SquareMatrix): Float64Array<ArrayBuffer> =>
   Float64Array.from({ length: size }, (_, i) => values[i * size + i]!);
 
-/** A B; written out, because it is wanted for each of many groups. */
-export function multiply(a: SquareMatrix, b: SquareMatrix): SquareMatrix {
-  const { size } = a;
-  const values = new Float64Array(size * size);
-  for (let i = 0; i < size; i++) {
-    for (let m = 0; m < size; m++) {
-      const left = a.values[i * size + m]!;
-      for (let j = 0; j < size; j++) values[i * size + j]! += left * b.values[m * size + j]!;
-    }
-  }
-  return { size, values };
-}
-
 /** A B A'. */
 export function sandwich(a: SquareMatrix, b: SquareMatrix): SquareMatrix {
   const left = toMatrix(a);
@@ -76,12 +63,12 @@ export function choleskyFactor(a: SquareMatrix): SquareMatrix | null {
 }
 
 /** Eigenvalues of a symmetric matrix in ascending order, and their vectors as the columns of a matrix. */
-export interface Eigen {
+interface Eigen {
   readonly values: Float64Array<ArrayBuffer>;
   readonly vectors: SquareMatrix;
 }
 
-export function symmetricEigen(a: SquareMatrix): Eigen {
+function symmetricEigen(a: SquareMatrix): Eigen {
   const decomposition = new EigenvalueDecomposition(toMatrix(a), { assumeSymmetric: true });
   return {
     values: Float64Array.from(decomposition.realEigenvalues),

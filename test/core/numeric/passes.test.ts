@@ -2,7 +2,7 @@ import { describe, expect, it } from "vitest";
 import { visitBasis } from "../../../src/core/numeric/basis.ts";
 import { basisTimes, squaredRowLengths, weightedCrossProducts } from "../../../src/core/numeric/crossProducts.ts";
 import { filterColumns } from "../../../src/core/numeric/fourier.ts";
-import { visitGroups } from "../../../src/core/numeric/groupMoments.ts";
+import { addGram, addScore, copyRows, visitGroups } from "../../../src/core/numeric/groupParts.ts";
 import { movingWindowProducts } from "../../../src/core/numeric/movingWindows.ts";
 import { randomFrom } from "../../../src/core/numeric/random.ts";
 import { basisRows, columnsOf, storedRows, weightedRows } from "../../../src/core/numeric/rowSource.ts";
@@ -73,23 +73,34 @@ describe.each(shapes)("passes over $n rows of $k columns", ({ n, k }) => {
 
   it("groups add up their rows, wherever blocks end", () => {
     const groups = Int32Array.from({ length: n }, (_, i) => Math.floor(Math.sqrt(i)));
-    const visited: number[] = [];
-    visitGroups(basisRows(basis), { factors: weights, groups }, ({ group, score, gram }) => {
-      visited.push(group);
+    const ended: number[] = [];
+    const score = new Float64Array(k);
+    const gram = new Float64Array(k * k);
+    const copied = new Float64Array(n * k);
+    let count = 0;
+    visitGroups(basisRows(basis), groups, (part) => {
+      addScore(score, part, weights);
+      addGram(gram, part);
+      count = copyRows(copied, count, { part, size: k });
+      if (!part.last) return;
+      const group = groups[part.first + part.from]!;
       const rows = [...groups.keys()].filter((row) => groups[row] === group);
+      ended.push(group);
+      expect(count).toBe(rows.length);
       q.forEach((left, i) => {
-        expect(score[i]).toBeCloseTo(
-          rows.reduce((sum, row) => sum + left[row]! * weights[row]!, 0),
-          12,
-        );
-        for (let j = i; j < k; j++)
-          expect(gram[i * k + j]).toBeCloseTo(
-            rows.reduce((sum, row) => sum + left[row]! * q[j]![row]!, 0),
-            12,
-          );
+        rows.forEach((row, place) => expect(copied[place * k + i]).toBe(left[row]));
+        const total = rows.reduce((sum, row) => sum + left[row]! * weights[row]!, 0);
+        expect(score[i]).toBeCloseTo(total, 12);
+        q.forEach((right, j) => {
+          const product = rows.reduce((sum, row) => sum + left[row]! * right[row]!, 0);
+          expect(gram[i * k + j]).toBeCloseTo(product, 12);
+        });
       });
+      score.fill(0);
+      gram.fill(0);
+      count = 0;
     });
-    expect(visited).toEqual([...new Set(groups)]);
+    expect(ended).toEqual([...new Set(groups)]);
   });
 
   it.each([0, 3, 300])("moving windows of %i lags are the Bartlett sum", (lags) => {

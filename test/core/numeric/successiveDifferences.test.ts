@@ -1,10 +1,10 @@
 import { describe, expect, it } from "vitest";
 import { randomFrom } from "../../../src/core/numeric/random.ts";
 import { basisRows, columnsOf } from "../../../src/core/numeric/rowSource.ts";
-import { multiply, symmetricEigen } from "../../../src/core/numeric/smallMatrix.ts";
 import { differenceMoments, residualDifferences } from "../../../src/core/numeric/successiveDifferences.ts";
 import { triangularFactor } from "../../../src/core/numeric/triangularFactor.ts";
 import { expectDigits } from "../../support/digits.ts";
+import { eigenvaluesOf, product } from "../../support/smallMatrices.ts";
 
 /** Longer than a block, so that a difference crosses its border; one link missing there, one elsewhere. */
 const n = 300;
@@ -52,12 +52,12 @@ describe("moments of successive differences", () => {
       ),
     );
     const m = { size: count, values: Float64Array.from(project.flat()) };
-    const mam = multiply(multiply(m, { size: count, values: Float64Array.from(dense(count).flat()) }), m);
+    const mam = product(product(m, { size: count, values: Float64Array.from(dense(count).flat()) }), m);
     const symmetric = mam.values.map(
       (value, index) => (value + mam.values[(index % count) * count + Math.floor(index / count)]!) / 2,
     );
-    const expected = symmetricEigen({ size: count, values: symmetric }).values.toReversed();
-    const found = symmetricEigen(residualDifferences(some, linked.slice(0, count))).values.toReversed();
+    const expected = eigenvaluesOf({ size: count, values: symmetric }).toReversed();
+    const found = eigenvaluesOf(residualDifferences(some, linked.slice(0, count))).toReversed();
     found.forEach((value, i) => expect(Math.abs(value - expected[i]!)).toBeLessThan(1e-12));
     expect(found).toHaveLength(58);
   });
