@@ -1,3 +1,5 @@
+import { fileSentences } from "./messagesFiles.ts";
+import { reviewSentences } from "./messagesReview.ts";
 import { storedSentences } from "./messagesStored.ts";
 import type { Problem } from "./problem.ts";
 import {
@@ -194,14 +196,6 @@ const sentences: { readonly [Code in Problem["code"]]: (problem: Extract<Problem
     `${nearest === null ? "" : `Did you mean "${nearest}"? `}Possible: ${allowed.join(", ")}.`,
   ],
   "missing-option": ({ option }) => [`The option ${option} is missing.`, "Add it and its value."],
-  "unreadable-file": ({ file, because }) => [
-    `The file ${file} cannot be read: ${because}.`,
-    "Check its name and that it is an .xlsx or .csv file.",
-  ],
-  "unwritable-file": ({ file, because }) => [
-    `The file ${file} cannot be written: ${because}.`,
-    "Close it in other programs or choose another name.",
-  ],
   "cell-being-edited": () => ["A cell is being edited.", "Press Enter or Escape in the sheet, then try again."],
   "several-areas-selected": ({ areas }) => [
     `${areas} separate areas are selected.`,
@@ -244,6 +238,8 @@ const sentences: { readonly [Code in Problem["code"]]: (problem: Extract<Problem
     `The calculation was stopped after ${counted(seconds, "second")}.`,
     "Use fewer rows or columns, or work in the pane, which has no such limit.",
   ],
+  ...fileSentences,
+  ...reviewSentences,
   ...storedSentences,
   cancelled: () => ["The work was cancelled; nothing was written.", "Start again whenever you like."],
 };

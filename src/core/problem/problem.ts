@@ -3,7 +3,8 @@
  * `cells` are addresses as the user knows them ("Months!C14", or "row 13 of the drivers, column 2"
  * for arguments of a worksheet function); lists hold at most ten, `count` holds how many there are.
  */
-export type Problem = TableProblem | ModelProblem | FitProblem | SettingProblem | StoredProblem | HostProblem;
+export type Problem =
+  TableProblem | ModelProblem | FitProblem | SettingProblem | StoredProblem | FileProblem | ReviewProblem | HostProblem;
 
 export interface Spots {
   readonly column: string;
@@ -94,9 +95,19 @@ export type SettingProblem =
       readonly allowed: readonly string[];
       readonly nearest: string | null;
     }
-  | { readonly code: "missing-option"; readonly option: string }
+  | { readonly code: "missing-option"; readonly option: string };
+
+export type FileProblem =
   | { readonly code: "unreadable-file"; readonly file: string; readonly because: string }
-  | { readonly code: "unwritable-file"; readonly file: string; readonly because: string };
+  | { readonly code: "unwritable-file"; readonly file: string; readonly because: string }
+  /** A file of values alone, which is to be searched for formulas. */
+  | { readonly code: "no-formulas"; readonly file: string };
+
+/** What stops a review of someone else's regression. */
+export type ReviewProblem =
+  /** The cells pointed at report no regression that can be read. */
+  | { readonly code: "no-report"; readonly where: string }
+  | { readonly code: "nothing-to-review"; readonly where: string };
 
 /** What is wrong with what Footing keeps in the workbook itself. */
 export type StoredProblem =

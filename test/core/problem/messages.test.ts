@@ -190,6 +190,18 @@ const sentences: Sentences = {
     { code: "unwritable-file", file: "out.xlsx", because: "it is open elsewhere" },
     "The file out.xlsx cannot be written: it is open elsewhere. Close it in other programs or choose another name.",
   ],
+  "no-formulas": [
+    { code: "no-formulas", file: "book.csv" },
+    "The file book.csv holds values alone, so there are no formulas in it to review. Give the workbook (.xlsx) that it was made from, or point at the typed results with --reported, --outcome and --drivers.",
+  ],
+  "no-report": [
+    { code: "no-report", where: "Handover!A1:A2" },
+    "No reported regression can be read from Handover!A1:A2. Choose the whole block with its headings (coefficient, standard error, t ratio, p-value) and the drivers' names beside the figures, or a cell with a formula such as LINEST or SLOPE.",
+  ],
+  "nothing-to-review": [
+    { code: "nothing-to-review", where: "book.xlsx" },
+    "No regression was found in book.xlsx: no formula such as LINEST, SLOPE or RSQ, and no block of figures under headings such as coefficient and standard error. If results are typed in, point at their cells and say which columns are the outcome and the drivers.",
+  ],
   "cell-being-edited": [
     { code: "cell-being-edited" },
     "A cell is being edited. Press Enter or Escape in the sheet, then try again.",
