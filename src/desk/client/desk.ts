@@ -12,6 +12,7 @@ import { calculateUnsaved, openBook } from "../workbook/openBook.ts";
 import { startCalls, type Call, type CallDoors } from "../workbook/pendingCalls.ts";
 import { followChanges } from "../workbook/shifts.ts";
 import { snapshotOf } from "../workbook/snapshot.ts";
+import { spellTables } from "../workbook/spellTables.ts";
 import { growTo } from "../workbook/write.ts";
 import { callTexts, cancelText, eventText, outcomeOf } from "./callTexts.ts";
 import { hands, type Hands } from "./hands.ts";
@@ -50,6 +51,7 @@ export function startDesk(grid: Grid, line: Transport, options: DeskOptions): De
   const calculation = watchCalculation(book);
   const functions = functionsOf({ line, server, options }, (results) => takeIn(book, results));
   registerFunctions(book, functions);
+  spellTables(book);
   calculation.onFinished(functions.calls.settle);
   const host = hostOf(book, { calculation, functions, server, profile: options.profile ?? "desktop" });
   book.listeners.add((change) => followChanges(book, change));

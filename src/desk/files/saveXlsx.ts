@@ -121,7 +121,11 @@ function detailsOf(sheet: SheetData): Map<string, Partial<Cell>> {
   const details = new Map<string, Partial<Cell>>();
   sheet.rows.forEach((row, r) =>
     row.forEach((cell, c) => {
-      if (typeof cell === "object" && cell !== null) details.set(`${r},${c}`, detailOf(cell));
+      if (typeof cell === "object" && cell !== null)
+        details.set(
+          `${r},${c}`,
+          detailOf(cell, () => tableAt(sheet, r, c)),
+        );
     }),
   );
   for (const { cell, target } of sheet.links) {
@@ -135,13 +139,21 @@ function detailsOf(sheet: SheetData): Map<string, Partial<Cell>> {
 const linkTo = (target: string): NonNullable<Cell["hyperlink"]> =>
   /^[a-z]+:\/\/|^mailto:/i.test(target) ? { target } : { target: "", location: target };
 
-function detailOf(cell: StyledCell | { readonly error: string }): Partial<Cell> {
+function tableAt({ tables }: SheetData, row: number, column: number): string {
+  const holds = tables.find(({ address }) => {
+    const { startRow, startCol, endRow, endCol } = parseRange(address);
+    return row >= startRow && row <= endRow && column >= startCol && column <= endCol;
+  });
+  return holds?.name ?? "";
+}
+
+function detailOf(cell: StyledCell | { readonly error: string }, inTable: () => string): Partial<Cell> {
   if (!isStyled(cell)) return { value: cell.error, type: "error" };
   const value = plain(cell.value);
   return {
     value,
     ...(cell.style !== undefined && { style: toFileStyle(cell.style) }),
-    ...(cell.formula === undefined ? { type: typeOf(cell.value) } : formulaOf(cell)),
+    ...(cell.formula === undefined ? { type: typeOf(cell.value) } : formulaOf(cell, inTable())),
   };
 }
 
@@ -152,11 +164,11 @@ function typeOf(value: BookValue): Cell["type"] {
 }
 
 /** A formula that spills is marked as a dynamic array: without the mark Excel would show one cell of it, with "@". */
-function formulaOf({ value, formula = "", spill }: StyledCell): Partial<Cell> {
+function formulaOf({ value, formula = "", spill }: StyledCell, inTable: string): Partial<Cell> {
   const result = plain(value);
   return {
     type: "formula",
-    formula: toStored(formula),
+    formula: toStored(formula, inTable),
     ...(result !== null && { formulaResult: result }),
     ...(spill !== undefined && { formulaDynamic: true, formulaType: "array", formulaRef: spill }),
   };

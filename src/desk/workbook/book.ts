@@ -29,6 +29,8 @@ export type BookChange =
       readonly columns: number;
       /** Rows or columns that came or went, where the change was of that kind. */
       readonly shift?: "RowInserted" | "RowDeleted" | "ColumnInserted" | "ColumnDeleted";
+      /** Cells that the grid itself wrote anew because others moved. */
+      readonly moved?: true;
     }
   | { readonly kind: "selected"; readonly sheet: string }
   /** Before is the sheet shown until then, or the name it had. */

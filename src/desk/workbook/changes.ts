@@ -20,6 +20,9 @@ const shifts = {
   [command.removeColumns]: "ColumnDeleted",
 } as const;
 
+/** The grid's commands that move cells. */
+const movingCommand = /\.(?:insert|remove|delete|move)-/;
+
 /** A selection still being dragged is none yet. */
 const dragging = [0, 1];
 
@@ -78,7 +81,8 @@ function announceValues(book: Book, params: Params, options?: IExecutionOptions)
   const area = writtenArea(params.subUnitId ?? "", params.cellValue);
   if (area === null) return;
   const byFormula = (options as { readonly fromFormula?: boolean } | undefined)?.fromFormula === true;
-  announce(book, { kind: byFormula ? "calculated" : "edited", ...area });
+  const moved = movingCommand.test(params.trigger ?? "") ? ({ moved: true } as const) : {};
+  announce(book, { kind: byFormula ? "calculated" : "edited", ...area, ...moved });
 }
 
 function writtenArea(sheet: string, cells: NonNullable<Params["cellValue"]>): Area | null {

@@ -1,6 +1,7 @@
 import { addressOf, parseAddress } from "../../core/table/address.ts";
 import { absoluteAddress, intersectionOf, type Area } from "./areas.ts";
 import { nameOf, recordOf, sheetIds, sheetNamed, type Book, type BookChange } from "./book.ts";
+import { usedWithin } from "./cells.ts";
 import type { LinkRecord, SeriesRecord, SheetRecord } from "./records.ts";
 import { announceTable, areaOfTable } from "./tables.ts";
 
@@ -18,8 +19,11 @@ export function followChanges(book: Book, change: BookChange): void {
   if (change.kind === "deleted") book.sheets.delete(change.sheet);
   if (change.kind === "renamed") renameInCharts(book, change.before, change.sheet);
   if (change.kind !== "edited") return;
-  if (change.shift === undefined) refreshHeadings(book, change);
-  else shiftRecords(book, change.sheet, shiftOf(change, change.shift));
+  if (change.shift !== undefined) shiftRecords(book, change.sheet, shiftOf(change, change.shift));
+  else {
+    refreshHeadings(book, change);
+    if (change.moved !== true) takeInRows(book, change);
+  }
 }
 
 /** A new heading is a new name of its column in formulas. */
@@ -30,6 +34,29 @@ function refreshHeadings(book: Book, change: Edit): void {
     if (intersectionOf(headings, change) !== null) announceTable(book, placed);
   }
 }
+
+/**
+ * What is entered right below a table belongs to it, where nothing else stands in the same rows: the table grows, and
+ * what speaks of it is calculated anew.
+ */
+function takeInRows(book: Book, change: Edit): void {
+  for (const table of recordOf(book, change.sheet).tables) {
+    const { row, column, rows, columns } = change;
+    const isWithin = column >= table.column && column + columns <= table.column + table.columns;
+    if (row !== table.row + table.rows || !isWithin) continue;
+    const used = usedWithin(
+      book,
+      { sheet: change.sheet, row, column: table.column, rows, columns: table.columns },
+      true,
+    );
+    if (used === null || intersectionOf(used, change) === null || !sameColumns(used, change)) continue;
+    table.rows += rows;
+    announceTable(book, { sheet: change.sheet, table });
+  }
+}
+
+const sameColumns = (used: Area, change: Edit): boolean =>
+  used.column >= change.column && used.column + used.columns <= change.column + change.columns;
 
 function shiftOf({ row, column, rows, columns }: Edit, kind: NonNullable<Edit["shift"]>): Shift {
   const sign = kind.endsWith("Inserted") ? 1 : -1;

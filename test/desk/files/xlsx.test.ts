@@ -163,6 +163,7 @@ describe("formulas", () => {
     },
     { formula: "=SUM(SORT(B1#))", value: 6, stored: "<f>SUM(_xlfn._xlws.SORT(_xlfn.ANCHORARRAY(B1)))</f>" },
     { formula: "='T.TEST(x'!A1&\"A1#\"", value: "", stored: "<f>'T.TEST(x'!A1&amp;\"A1#\"</f>" },
+    { formula: "=SUM(T[T.TEST(x) A1'#])", value: 6, stored: "<f>SUM(T[T.TEST(x) A1'#])</f>" },
     { formula: "=1/0", value: { error: "#DIV/0!" }, stored: ' t="e"><f>1/0</f><v>#DIV/0!</v>' },
     { formula: '=NA()&""', value: { error: "#N/A" }, stored: ' t="e"><f>NA()&amp;""</f><v>#N/A</v>' },
     { formula: "=1=1", value: true, stored: ' t="b"><f>1=1</f><v>1</v>' },
