@@ -143,5 +143,5 @@ export const answerFixture: Answer = {
   leftOutCount: 0,
   notes: [],
   options: defaultOptions,
-  points: { fitted: [1, 2], residuals: [0.5, -0.5], rows: [2, 3], thinned: false },
+  points: { fitted: [1, 2], residuals: [0.5, -0.5], rows: [2, 3], periods: [1, 2], thinned: false },
 };

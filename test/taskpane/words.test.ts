@@ -128,7 +128,13 @@ describe("tests by name", () => {
 });
 
 describe("residuals in words", () => {
-  const points = { fitted: [10, 30, 20, 40], residuals: [1, -3, 2, 4], rows: [5, 3, 4, 2], thinned: false };
+  const points = {
+    fitted: [10, 30, 20, 40],
+    residuals: [1, -3, 2, 4],
+    rows: [5, 3, 4, 2],
+    periods: [4, 2, 3, 1],
+    thinned: false,
+  };
 
   it("tell the range and the spread at either end", () => {
     expect(overFittedInWords(points)).toContain("from -3 to 4");

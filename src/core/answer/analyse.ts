@@ -19,7 +19,7 @@ import { type RowPlaces, rowPlacesOf } from "./rowPlaces.ts";
 import { rowsSummary } from "./rowsSummary.ts";
 import { decidingTests, furtherTests } from "./runTests.ts";
 import { choiceSentence, openingSentence } from "./verdict.ts";
-import { listInWords } from "./wording.ts";
+import { driversInWords } from "./wording.ts";
 
 /**
  * The whole chain: columns to design, fit, tests, decision, standard errors of every kind, inference, verdict.
@@ -115,7 +115,7 @@ const sentences = (drivers: Answer["drivers"]): string[] =>
 
 function titleOf({ outcome, terms }: Design): string {
   const drivers = terms.filter(({ meaning }) => meaning.kind !== "constant").map(({ name }) => name);
-  return `${outcome.name} explained by ${listInWords(drivers)}`;
+  return `${outcome.name} explained by ${driversInWords(drivers)}`;
 }
 
 const figuresOf = (fit: Fit): FitFigures => ({

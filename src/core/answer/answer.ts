@@ -128,5 +128,7 @@ export interface ResidualPoints {
   readonly residuals: readonly number[];
   /** Sheet row (from 1) of each point. */
   readonly rows: readonly number[];
+  /** The period of each point, the first row used counting 1; null where rows do not run through time. */
+  readonly periods: readonly number[] | null;
   readonly thinned: boolean;
 }

@@ -6,12 +6,28 @@ import type { Transform } from "../design/model.ts";
  * something a reader can picture (an amount of the outcome, or per cent of it).
  */
 export interface Effect {
-  /** "One more rainy day", "1 % more Price", "Region North, compared with South," */
+  /** "One more rainy day", "Price higher by 1", "1 % more Price", "Region North, compared with South," */
   readonly step: string;
   /** Turns a coefficient, or an end of its interval, into the amount that is spoken of. */
   readonly amount: (coefficient: number) => number;
-  /** "fewer repairs a month", "less in Repairs", "% less Repairs": the words behind the amount. */
-  readonly words: { readonly up: string; readonly down: string };
+  readonly words: EffectWords;
+}
+
+/** What is said around the amounts, which come as texts without a sign. */
+export interface EffectWords {
+  readonly up: Direction;
+  readonly down: Direction;
+  /** From one end of an interval to the other, each with its direction: "from 4.1 fewer to 1.6 more repairs a month". */
+  readonly span: (from: string, to: string) => string;
+}
+
+export interface Direction {
+  /** "3.1 fewer repairs a month", "Repairs lower by 3.1", "2.3 % less Repairs" */
+  readonly say: (amount: string) => string;
+  /** "3.1 fewer", "3.1 lower", "2.3 % less" */
+  readonly short: (amount: string) => string;
+  /** The nearer end of an interval, which leaves the direction to the farther one: "3.1", "2.3 %" */
+  readonly near: (amount: string) => string;
 }
 
 export interface EffectSubject {
@@ -32,33 +48,42 @@ export function effectOf(subject: EffectSubject): Effect {
 function outcomeSide({ outcome, units }: EffectSubject): Pick<Effect, "amount" | "words"> {
   const { column, transform } = outcome;
   const unit = units[column];
+  const asItIs = (change: number): number => change;
   switch (transform.kind) {
     case "logarithm":
-      return {
-        amount: (change) => 100 * Math.expm1(change),
-        words: { up: `% more ${column}`, down: `% less ${column}` },
-      };
+      return { amount: (change) => 100 * Math.expm1(change), words: counted(column, ["% more", "% less"]) };
     case "growth rate":
       return {
-        amount: (change) => change,
-        words: { up: `percentage points more growth of ${column}`, down: `percentage points less growth of ${column}` },
+        amount: asItIs,
+        words: counted(`growth of ${column}`, ["percentage points more", "percentage points less"]),
       };
     case "none":
-      return {
-        amount: (change) => change,
-        words:
-          unit === undefined
-            ? { up: `more in ${column}`, down: `less in ${column}` }
-            : { up: `more ${unit}`, down: `fewer ${unit}` },
-      };
+      return { amount: asItIs, words: unit === undefined ? measured(column) : counted(unit, ["more", "fewer"]) };
     case "change":
     case "lag":
     case "square":
-      return {
-        amount: (change) => change,
-        words: { up: `more in the ${transform.kind} of ${column}`, down: `less in the ${transform.kind} of ${column}` },
-      };
+      return { amount: asItIs, words: measured(`the ${transform.kind} of ${column}`) };
   }
+}
+
+/** Amounts of something that has a name: "3.1 fewer repairs a month". */
+function counted(what: string, [more, less]: readonly [string, string]): EffectWords {
+  const direction = (word: string): Direction => ({
+    say: (amount) => `${amount} ${word} ${what}`,
+    short: (amount) => `${amount} ${word}`,
+    near: (amount) => (word.startsWith("%") ? `${amount} %` : amount),
+  });
+  return { up: direction(more), down: direction(less), span: (from, to) => `from ${from} to ${to} ${what}` };
+}
+
+/** Amounts of a column whose unit is not known: "Repairs lower by 3.1". */
+function measured(what: string): EffectWords {
+  const direction = (word: string): Direction => ({
+    say: (amount) => `${what} ${word} by ${amount}`,
+    short: (amount) => `${amount} ${word}`,
+    near: (amount) => amount,
+  });
+  return { up: direction("higher"), down: direction("lower"), span: (from, to) => `${what} from ${from} to ${to}` };
 }
 
 function stepOf(meaning: TermMeaning, units: EffectSubject["units"]): string {
@@ -78,18 +103,19 @@ function stepOf(meaning: TermMeaning, units: EffectSubject["units"]): string {
 }
 
 function numberStep(column: string, transform: Transform, unit: string | undefined): string {
-  const oneMore = unit === undefined ? `One more in ${column}` : `One more ${unit}`;
   switch (transform.kind) {
     case "none":
-      return oneMore;
+      return unit === undefined ? `${column} higher by 1` : `One more ${unit}`;
     case "logarithm":
       return `1 % more ${column}`;
     case "square":
-      return `One more in the square of ${column}`;
-    case "lag":
-      return `${oneMore} ${transform.periods === 1 ? "one period" : `${transform.periods} periods`} earlier`;
+      return `The square of ${column} higher by 1`;
+    case "lag": {
+      const earlier = `${transform.periods === 1 ? "one period" : `${transform.periods} periods`} earlier`;
+      return unit === undefined ? `${column} higher by 1 ${earlier}` : `One more ${unit} ${earlier}`;
+    }
     case "change":
-      return `One more in the change of ${column}`;
+      return `The change of ${column} higher by 1`;
     case "growth rate":
       return `One percentage point more growth of ${column}`;
   }

@@ -10,10 +10,12 @@ export function residualPoints({ design, residuals, rowCount }: Fit, places: Row
   const step = Math.ceil(rowCount / mostPoints);
   const picked = Array.from({ length: Math.ceil(rowCount / step) }, (_, index) => index * step);
   const { values } = design.outcome;
+  const { order } = design;
   return {
     fitted: picked.map((row) => values[row]! - residuals[row]!),
     residuals: picked.map((row) => residuals[row]!),
     rows: picked.map(places.number),
+    periods: order.kind === "time" ? picked.map((row) => order.positions[row]! + 1) : null,
     thinned: step > 1,
   };
 }

@@ -1,11 +1,12 @@
 import type { Decision } from "../decision/decision.ts";
 import type { ErrorsChoice } from "../covariance/choice.ts";
 import type { Answer, DriverAnswer, RowsSummary } from "./answer.ts";
-import { type Effect } from "./effects.ts";
+import type { Effect } from "./effects.ts";
 import {
   capitalised,
   confidenceInWords,
   decimalsFor,
+  driversInWords,
   listInWords,
   numberInWords,
   pValueInWords,
@@ -36,7 +37,7 @@ export function openingSentence({ outcome, observations, terms, fit, rows }: Fac
     ? `R-squared about zero is ${share} (there is no constant)`
     : `together they account for ${share} of the variation in ${outcome}`;
   const subject = drivers.length === 1 ? measure.replace("together they account", "it accounts") : measure;
-  return `${outcome} explained by ${listInWords(drivers)}, ${rowsInWords(rows, observations)}: ${subject}.`;
+  return `${outcome} explained by ${driversInWords(drivers)}, ${rowsInWords(rows, observations)}: ${subject}.`;
 }
 
 function rowsInWords(rows: RowsSummary, observations: number): string {
@@ -84,21 +85,18 @@ function aboutZero(spoken: Spoken, differs: boolean): string {
   const { amount, words } = effect;
   const [low, high] = [amount(driver.low), amount(driver.high)];
   const decimals = decimalsFor((high - low) / 2);
-  const text = (value: number): string => withUnit(numberInWords(Math.abs(value), decimals), words.up);
+  const text = (value: number): string => numberInWords(Math.abs(value), decimals);
   const direction = driver.coefficient > 0 ? words.up : words.down;
   if (differs) {
     const [near, far] = driver.coefficient > 0 ? [low, high] : [high, low];
-    return `${effect.step} goes with ${text(amount(driver.coefficient))} ${bare(direction)} (between ${text(near)} and ${text(far)} ${comparative(direction)}, ${confidenceInWords(level)}).`;
+    const between = `between ${direction.near(text(near))} and ${direction.short(text(far))}`;
+    return `${effect.step} goes with ${direction.say(text(amount(driver.coefficient)))} (${between}, ${confidenceInWords(level)}).`;
   }
   const p = pValueInWords(driver.pValue, level);
-  return `${driver.term}: no effect can be shown (${p}); from ${text(low)} ${comparative(low < 0 ? words.down : words.up)} to ${text(high)} ${bare(high < 0 ? words.down : words.up)} is compatible with the data (${confidenceInWords(level)}).`;
+  const end = (value: number): string => (value < 0 ? words.down : words.up).short(text(value));
+  const span = words.span(end(low), end(high));
+  return `${driver.term}: no effect can be shown (${p}); ${span} is compatible with the data (${confidenceInWords(level)}).`;
 }
-
-/** Per cent signs stand beside their number: "2.3 % less Repairs". */
-const withUnit = (number: string, words: string): string => (words.startsWith("% ") ? `${number} %` : number);
-const bare = (words: string): string => words.replace(/^% /, "");
-const comparative = (words: string): string =>
-  /(more|less|fewer|percentage points more|percentage points less)/.exec(words)?.[0] ?? "";
 
 function aboutValue({ driver, level }: Spoken, differs: boolean): string {
   const decimals = decimalsFor((driver.high - driver.low) / 2);

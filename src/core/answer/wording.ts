@@ -37,6 +37,16 @@ export function listInWords(words: readonly string[]): string {
   return words.length < 2 ? last : `${words.slice(0, -1).join(", ")} and ${last}`;
 }
 
+/** So many names are listed; of more, the first three and how many follow. */
+const mostNamed = 4;
+const namedOfMany = 3;
+
+/** The drivers in a title or a first sentence: "Price, Advertising and Rainy days", "Price, Advertising, Rainy days and 17 more". */
+export const driversInWords = (names: readonly string[]): string =>
+  names.length <= mostNamed
+    ? listInWords(names)
+    : listInWords([...names.slice(0, namedOfMany), `${names.length - namedOfMany} more`]);
+
 export const confidenceInWords = (level: number): string => `${Number((100 * (1 - level)).toPrecision(6))} %`;
 
 /** A share of variation, "62 %"; a fit that leaves something over is never called 100 %. */

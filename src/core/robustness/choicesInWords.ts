@@ -13,11 +13,11 @@ export interface ChoiceName {
 
 const kinds: readonly ErrorsChoice["kind"][] = ["classical", "white", "newey-west", "grouped"];
 const kindName = { classical: "classical", white: "White", "newey-west": "Newey-West", grouped: "grouped" } as const;
-const lawNames = { t: "the t law", normal: "the normal law", "fixed-b": "the fixed-b law" } as const;
+const lawNames = { t: "the t", normal: "the normal", "fixed-b": "the fixed-b" } as const;
 
 /**
  * The choices in words, alike ones together: "classical", "White", "White (HC0, HC1)", "Newey-West with 0 to 3 lags",
- * and with the law where only some of a kind's laws are meant.
+ * and with the distribution where only some of a kind's are meant.
  * @param some - the choices to name.
  * @param all - every choice there is, so that what all laws of a kind share is said without naming them.
  */
@@ -30,7 +30,9 @@ export function choicesInWords(some: readonly ChoiceName[], all: readonly Choice
       if (members !== null) byMembers.set(members, [...(byMembers.get(members) ?? []), law]);
     }
     return [...byMembers].map(([members, under]) =>
-      under.length === laws.length ? members : `${members} under ${under.map((law) => lawNames[law]).join(" and ")}`,
+      under.length === laws.length
+        ? members
+        : `${members} read against ${under.map((law) => lawNames[law]).join(" or ")} distribution`,
     );
   });
 }
@@ -60,7 +62,7 @@ function membersInWords(kind: ChoiceName["kind"], law: ChoiceName["law"], { some
 
 const inLags = (ranges: string): string => (ranges === "1" ? "1 lag" : `${ranges} lags`);
 
-/** "0 to 3, 7", where the lags named stand next to one another on the ladder. */
+/** "0 to 3 or 7", where the lags named stand next to one another on the ladder. */
 function lagRanges(meant: readonly ChoiceName[], every: readonly ChoiceName[]): string {
   const ladder = every.map(({ lags }) => lags);
   const named = new Set(meant.map(({ lags }) => lags));
@@ -70,5 +72,6 @@ function lagRanges(meant: readonly ChoiceName[], every: readonly ChoiceName[]): 
     if (rung > 0 && named.has(ladder[rung - 1]!)) ranges.at(-1)![1] = lags;
     else ranges.push([lags]);
   });
-  return ranges.map((range) => range.join(" to ")).join(", ");
+  const words = ranges.map((range) => range.join(" to "));
+  return words.length < 2 ? words.join("") : `${words.slice(0, -1).join(", ")} or ${words.at(-1)!}`;
 }

@@ -71,7 +71,7 @@ describe("what a coefficient goes with, in words", () => {
     [
       "without units",
       { meaning: numberOf("Price"), figures: [2.26, 0.4, 4.1, 0.018] },
-      "One more in Price goes with 2.3 more in Repairs (between 0.4 and 4.1 more, 95 %).",
+      "Price higher by 1 goes with Repairs higher by 2.3 (between 0.4 and 4.1 higher, 95 %).",
     ],
     [
       "both in logarithms",
@@ -85,17 +85,17 @@ describe("what a coefficient goes with, in words", () => {
     [
       "outcome in logarithms",
       { meaning: numberOf("Price"), figures: [0.05, 0.02, 0.08, 0.001], outcome: repairs({ kind: "logarithm" }) },
-      "One more in Price goes with 5.1 % more Repairs (between 2.0 % and 8.3 % more, 95 %).",
+      "Price higher by 1 goes with 5.1 % more Repairs (between 2.0 % and 8.3 % more, 95 %).",
     ],
     [
       "a category",
       { meaning: { kind: "level", column: "Region", level: "North", base: "South" }, figures: [12, 8, 16, 0.0002] },
-      "Region North, compared with South, goes with 12.0 more in Repairs (between 8.0 and 16.0 more, 95 %).",
+      "Region North, compared with South, goes with Repairs higher by 12.0 (between 8.0 and 16.0 higher, 95 %).",
     ],
     [
       "a trend",
       { meaning: { kind: "trend", unit: "month" }, figures: [0.5, 0.1, 0.9, 0.02] },
-      "Each further month goes with 0.50 more in Repairs (between 0.10 and 0.90 more, 95 %).",
+      "Each further month goes with Repairs higher by 0.50 (between 0.10 and 0.90 higher, 95 %).",
     ],
     [
       "a growth rate of the outcome",
@@ -104,16 +104,30 @@ describe("what a coefficient goes with, in words", () => {
         figures: [1.5, 0.5, 2.5, 0.004],
         outcome: repairs({ kind: "growth rate", periods: 1 }),
       },
-      "One more in Price goes with 1.5 percentage points more growth of Repairs (between 0.5 and 2.5 percentage points more, 95 %).",
+      "Price higher by 1 goes with 1.5 percentage points more growth of Repairs (between 0.5 and 2.5 percentage points more, 95 %).",
     ],
   ])("%s", (_, about, sentence) => {
     expect(said(about)).toContain(sentence);
   });
 
+  it.each([
+    [{ Repairs: "repairs a month" }, none, 1, "from 4.1 fewer to 1.6 more repairs a month is compatible"],
+    [{}, { kind: "logarithm" }, 0.01, "from 4.0 % less to 1.6 % more Repairs is compatible"],
+    [{}, { kind: "change", periods: 1 }, 1, "the change of Repairs from 4.1 lower to 1.6 higher is compatible"],
+  ] as const)("says what remains possible in the outcome's own terms", (units, transform, scale, words) => {
+    const sentence = said({
+      meaning: numberOf("Price"),
+      figures: [-1.2 * scale, -4.1 * scale, 1.6 * scale, 0.36],
+      outcome: repairs(transform),
+      units,
+    });
+    expect(sentence).toContain(words);
+  });
+
   it("says that nothing can be shown, and what remains possible", () => {
     const sentence = said({ meaning: numberOf("Price"), figures: [-1.2, -4.1, 1.6, 0.36] });
     expect(sentence).toContain(
-      "Price: no effect can be shown (p = 0.36); from 4.1 less to 1.6 more in Repairs is compatible with the data (95 %).",
+      "Price: no effect can be shown (p = 0.36); Repairs from 4.1 lower to 1.6 higher is compatible with the data (95 %).",
     );
   });
 

@@ -2,6 +2,7 @@ import { describe, expect, it } from "vitest";
 import {
   confidenceInWords,
   decimalsFor,
+  driversInWords,
   listInWords,
   numberInWords,
   pValueInWords,
@@ -62,4 +63,11 @@ describe("shares, lists and levels", () => {
     expect(listInWords(["Price", "Fuel", "Rainy days"])).toBe("Price, Fuel and Rainy days");
     expect([0.05, 0.1, 0.001].map(confidenceInWords)).toEqual(["95 %", "90 %", "99.9 %"]);
   });
+});
+
+it("names up to four drivers, and of more the first three", () => {
+  const names = Array.from({ length: 20 }, (_, index) => `D${index + 1}`);
+  expect(driversInWords(names.slice(0, 4))).toBe("D1, D2, D3 and D4");
+  expect(driversInWords(names.slice(0, 5))).toBe("D1, D2, D3 and 2 more");
+  expect(driversInWords(names)).toBe("D1, D2, D3 and 17 more");
 });

@@ -74,7 +74,7 @@ describe("firmness", () => {
     if (!result.ok) throw new Error(result.problem.code);
     // 2.05 standard errors: not enough for t with 16 degrees of freedom, enough for the normal law.
     expect(result.value.terms[1]!.firm).toBe(false);
-    expect(result.value.terms[1]!.flippedBy).toContain("classical under the normal law");
+    expect(result.value.terms[1]!.flippedBy).toContain("classical read against the normal distribution");
   });
 
   it("takes groups with their own degrees of freedom and no lags", () => {
@@ -165,13 +165,13 @@ describe("choices in words", () => {
   it("joins laws, versions and neighbouring lags", () => {
     expect(some(() => true)).toEqual(["classical", "White", "Newey-West with 0 to 8 lags"]);
     expect(some(({ law, kind }) => kind === "classical" && law === "normal")).toEqual([
-      "classical under the normal law",
+      "classical read against the normal distribution",
     ]);
-    expect(some(({ lags }) => lags !== null && lags !== 2)).toEqual(["Newey-West with 0 to 1, 4 to 8 lags"]);
+    expect(some(({ lags }) => lags !== null && lags !== 2)).toEqual(["Newey-West with 0 to 1 or 4 to 8 lags"]);
     expect(some(({ lags }) => lags === 1)).toEqual(["Newey-West with 1 lag"]);
     expect(some(({ version, law }) => version === "HC3" || (version === "HC0" && law === "t"))).toEqual([
-      "White under the t law",
-      "White (HC3) under the normal law",
+      "White read against the t distribution",
+      "White (HC3) read against the normal distribution",
     ]);
     expect(some(() => false)).toEqual([]);
   });
