@@ -9,7 +9,10 @@ import { reduce } from "./reduce.ts";
 import { keepSheet, recalculateSheet } from "./sheetInFront.ts";
 import { type Store, createStore } from "./store.ts";
 import { type PaneState, emptyState } from "./state.ts";
-import { createWatch } from "./watching.ts";
+import { checkSheets } from "./stored/checking.ts";
+import { redoSheet, redoWith } from "./stored/redoing.ts";
+import { openSetup, removeSetup, renameSetup, storeSetup, type Renaming } from "./stored/setups.ts";
+import { createSourcesWatch, createWatch } from "./watching.ts";
 import { type Edition, goToCell, writeSheet } from "./writing.ts";
 import type { Work } from "./work.ts";
 
@@ -27,8 +30,16 @@ export interface Commands {
   readonly read: (where: WhereToRead) => void;
   readonly answer: () => void;
   readonly write: (kind: SheetKind) => void;
-  /** Reads the cells again, answers again, and writes a kept sheet again where one was left out of date. */
+  /** Reads the cells again, answers again, and writes a kept sheet in place of itself where one was left out of date. */
   readonly redo: () => void;
+  /** Writes a kept sheet in place of itself, from its own set-up and its data as they stand now. */
+  readonly redoSheet: (sheet: string) => void;
+  /** Finds the workbook's result sheets and which of them are out of date. */
+  readonly checkSheets: () => void;
+  readonly storeSetup: (name: string) => void;
+  readonly openSetup: (name: string) => void;
+  readonly renameSetup: (renaming: Renaming) => void;
+  readonly removeSetup: (name: string) => void;
   /** Has the functions of the sheet in front calculated again. */
   readonly recalculate: () => void;
   /** Turns the live sheet in front into a kept one. */
@@ -46,13 +57,27 @@ export interface Pane {
 export function createPane({ host, analyst, edition, guard }: PaneParts): Pane {
   const store = createStore(reduce, emptyState);
   const errands = createErrands(store.dispatch);
-  const work: Work = { host, analyst, store, errands, watch: createWatch(host, store.dispatch), edition };
+  const work: Work = {
+    host,
+    analyst,
+    store,
+    errands,
+    watch: createWatch(host, store.dispatch),
+    watchSources: createSourcesWatch(host, store.dispatch),
+    edition,
+  };
   const commands: Commands = {
-    open: () => guard(() => listPlaces(work)),
+    open: () => guard(() => open(work)),
     read: (where) => guard(() => readData(work, where)),
     answer: () => guard(() => findAnswer(work)),
     write: (kind) => guard(() => writeSheet(work, kind)),
     redo: () => guard(() => redo(work)),
+    redoSheet: (sheet) => guard(() => redoSheet(work, sheet)),
+    checkSheets: () => guard(() => checkSheets(work)),
+    storeSetup: (name) => guard(() => storeSetup(work, name)),
+    openSetup: (name) => guard(() => openSetup(work, name)),
+    renameSetup: (renaming) => guard(() => renameSetup(work, renaming)),
+    removeSetup: (name) => guard(() => removeSetup(work, name)),
     recalculate: () => guard(() => recalculateSheet(work)),
     keep: () => guard(() => keepSheet(work)),
     goTo: (address) => guard(() => goToCell(work, address)),
@@ -61,8 +86,13 @@ export function createPane({ host, analyst, edition, guard }: PaneParts): Pane {
   return { store, commands };
 }
 
+async function open(work: Work): Promise<void> {
+  await listPlaces(work);
+  await checkSheets(work);
+}
+
 async function redo(work: Work): Promise<void> {
   await findAnswer(work);
   const { written, answered } = work.store.get();
-  if (written?.outdated === true && answered?.outdated === null) await writeSheet(work, written.kind);
+  if (written?.outdated === true && answered?.outdated === null) await redoWith(work, written.sheet, answered);
 }

@@ -11,19 +11,10 @@ export function proposeSetup(columns: readonly ColumnDescription[]): Setup {
     rows: proposed.rowsAre,
     rowsGuessed: true,
     constant: true,
+    visibleOnly: false,
     calendar: [],
     options: defaultOptions,
   };
-}
-
-/** The set-up for data read anew: what was chosen for columns that are still there stays, the rest is guessed. */
-export function carrySetup(before: Setup, columns: readonly ColumnDescription[]): Setup {
-  const fresh = proposeSetup(columns);
-  const carried = fresh.columns.map(
-    (guess) => before.columns.find(({ column }) => column === guess.column) ?? { ...guess, role: "unused" as const },
-  );
-  const known = carried.some(({ role }) => role === "outcome");
-  return known ? { ...before, columns: carried } : fresh;
 }
 
 const columnSetup = (column: ColumnDescription, proposed: ProposedRoles): ColumnSetup => ({

@@ -1,6 +1,7 @@
 import type { Question } from "../core/answer/question.ts";
 import type { DriverChoice, Model, RowsAre } from "../core/design/model.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";
+import { withoutHidden } from "../core/table/hiddenRows.ts";
 import type { Source } from "../core/table/source.ts";
 import { type ColumnSetup, type Setup, columnWithRole } from "./setup.ts";
 
@@ -23,7 +24,12 @@ export function questionOf(source: Source, setup: Setup): Result<Question> {
     constant: setup.constant,
     textNumbers: textNumbersOf([outcome, ...drivers]),
   };
-  return success({ source, model, options: { ...setup.options, units: unitsOf(setup), against: againstOf(drivers) } });
+  const asked = setup.visibleOnly ? withoutHidden(source) : source;
+  return success({
+    source: asked,
+    model,
+    options: { ...setup.options, units: unitsOf(setup), against: againstOf(drivers) },
+  });
 }
 
 /** null where rows stand in groups and no column says which. */

@@ -1,4 +1,5 @@
 import type { Action } from "./actions.ts";
+import { takeOver } from "./carrying.ts";
 import { type Setup, assignRole, changeColumn } from "./setup.ts";
 import {
   announce,
@@ -9,6 +10,7 @@ import {
   recalculatedWords,
   writtenWords,
 } from "./spoken.ts";
+import { storedChanges } from "./stored/reduceStored.ts";
 import type { Outdated, PaneState, Section } from "./state.ts";
 
 /** The pane after something happened. Pure: what is asked of the spreadsheet is asked elsewhere. */
@@ -21,6 +23,7 @@ export function reduce(state: PaneState, action: Action): PaneState {
 type Of<Kind extends Action["kind"]> = Extract<Action, { kind: Kind }>;
 
 const changes: { readonly [Kind in Action["kind"]]: (state: PaneState, action: Of<Kind>) => PaneState } = {
+  ...storedChanges,
   shown: (state, { section }) => ({ ...state, section }),
   "places found": (state, { places }) => ({ ...state, places }),
   started: (state, { on }) => ({
@@ -41,6 +44,7 @@ const changes: { readonly [Kind in Action["kind"]]: (state: PaneState, action: O
       ...change,
       rowsGuessed: change.rows === undefined && setup.rowsGuessed,
     })),
+  "lost settled": lostSettled,
   read,
   answered,
   written: (state, { sheet, as }) => {
@@ -68,10 +72,16 @@ function withSetup(state: PaneState, change: (setup: Setup) => Setup): PaneState
   return { ...state, setup, fault: null, answered: answered === null ? null : { ...answered, outdated } };
 }
 
+/** What was chosen for a lost column goes to the one that takes its place. */
+function lostSettled(state: PaneState, { lost, by }: Of<"lost settled">): PaneState {
+  const rest = { ...state, lost: state.lost.filter((one) => one !== lost) };
+  return by === null ? rest : withSetup(rest, (setup) => takeOver(setup, lost, by));
+}
+
 /** New data leave nothing of the old; the same cells read again leave the answer, which says if it is out of date. */
-function read(state: PaneState, { data, setup }: Of<"read">): PaneState {
+function read(state: PaneState, { data, setup, lost, opened }: Of<"read">): PaneState {
   const same = state.data?.address === data.address;
-  const next = { ...state, data, setup, busy: null, fault: null };
+  const next = { ...state, data, setup, lost, opened, waiting: null, busy: null, fault: null };
   return announce(same ? next : arriveAt({ ...next, answered: null, written: null }, "data"), readWords(data));
 }
 

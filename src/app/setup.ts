@@ -28,6 +28,8 @@ export interface Setup {
   readonly rows: RowsAre["kind"];
   readonly rowsGuessed: boolean;
   readonly constant: boolean;
+  /** Whether rows that are hidden or filtered away are left out. */
+  readonly visibleOnly: boolean;
   readonly calendar: readonly CalendarDriver[];
   /** Units and tested values stand with their columns. */
   readonly options: Omit<Options, "units" | "against">;

@@ -2,15 +2,19 @@ import type { Answer } from "../core/answer/answer.ts";
 import type { Question } from "../core/answer/question.ts";
 import type { Problem } from "../core/problem/problem.ts";
 import type { SheetKind } from "../sheet/answerSheet.ts";
+import type { LostColumn } from "./carrying.ts";
 import type { DataInHand } from "./dataInHand.ts";
 import type { DataPlace, Progress } from "./host.ts";
 import type { Setup } from "./setup.ts";
+import type { SheetStatus } from "./stored/sheetStatus.ts";
+import { type StoredBook, type StoredSetup, emptyBook } from "./stored/storedBook.ts";
+import type { TableInHand } from "./tableInHand.ts";
 
 export type Section = "data" | "answer" | "evidence";
 
 /** What is under way; one thing at a time. */
 export interface Busy {
-  readonly with: "reading" | "answering" | "writing" | "keeping";
+  readonly with: "reading" | "answering" | "writing" | "keeping" | "redoing" | "comparing";
   readonly progress: Progress;
 }
 
@@ -26,6 +30,8 @@ export interface Answered {
   readonly address: string;
   /** The sheet row of its headings, from 0. */
   readonly headingRow: number | null;
+  /** The table that its data are, if they are one. */
+  readonly table: TableInHand | null;
   readonly outdated: Outdated | null;
 }
 
@@ -49,6 +55,16 @@ export interface PaneState {
   readonly places: readonly DataPlace[];
   readonly data: DataInHand | null;
   readonly setup: Setup | null;
+  /** Columns that the set-up used and that are no longer found. */
+  readonly lost: readonly LostColumn[];
+  /** What the workbook keeps for Footing, and parts of it that are left alone, with the reason. */
+  readonly kept: { readonly book: StoredBook; readonly leftAlone: readonly Problem[] };
+  /** The name of the stored set-up in hand, null where it has none. */
+  readonly opened: string | null;
+  /** A stored set-up whose data are gone: it is for the data that are chosen next. */
+  readonly waiting: StoredSetup | null;
+  /** The result sheets of the workbook. */
+  readonly sheets: readonly SheetStatus[];
   readonly answered: Answered | null;
   readonly written: Written | null;
   /** What was done last with the sheet in front, as a sentence; empty where nothing was. */
@@ -65,6 +81,11 @@ export const emptyState: PaneState = {
   places: [],
   data: null,
   setup: null,
+  lost: [],
+  kept: { book: emptyBook, leftAlone: [] },
+  opened: null,
+  waiting: null,
+  sheets: [],
   answered: null,
   written: null,
   sheetDone: "",

@@ -5,7 +5,7 @@ import type { Errands } from "./errands.ts";
 import type { Host } from "./host.ts";
 import type { PaneState } from "./state.ts";
 import type { Store } from "./store.ts";
-import type { Watch } from "./watching.ts";
+import type { Watch, WatchSources } from "./watching.ts";
 import type { Edition } from "./writing.ts";
 
 /** What the pane's use cases work with. */
@@ -15,6 +15,7 @@ export interface Work {
   readonly store: Store<PaneState, Action>;
   readonly errands: Errands;
   readonly watch: Watch;
+  readonly watchSources: WatchSources;
   readonly edition: Edition;
 }
 

@@ -2,6 +2,7 @@ import { type SheetKind, planAnswer } from "../sheet/answerSheet.ts";
 import { fingerprintOf } from "./fingerprint.ts";
 import { sheetFactsOf } from "./sheetFacts.ts";
 import type { Answered } from "./state.ts";
+import { recordSheet } from "./stored/recording.ts";
 import { type Work, fail } from "./work.ts";
 
 /** What a result sheet says of its making: the day in words, and the version. */
@@ -11,22 +12,33 @@ export interface Edition {
 }
 
 /** Writes the answer shown to a new sheet. */
-export async function writeSheet(work: Work, kind: SheetKind): Promise<void> {
+export async function writeSheet(work: Work, wanted: SheetKind): Promise<void> {
   const { answered } = work.store.get();
   if (answered === null) return;
+  const kind = canBeLive(answered) ? wanted : "kept";
   const errand = work.errands.start("writing");
   const facts = sheetFactsOf(answered.question, await madeOf(answered, work.edition));
-  const written = await work.host.write(planAnswer(answered.answer, facts, kind), errand);
+  const plan = planAnswer(answered.answer, facts, kind);
+  const written = await work.host.write(plan, errand);
   if (errand.signal.aborted) return;
-  if (written.ok) work.store.dispatch({ kind: "written", sheet: written.value.sheet, as: kind });
-  else fail(work, written.problem);
+  if (!written.ok) {
+    fail(work, written.problem);
+    return;
+  }
+  const { sheet } = written.value;
+  work.store.dispatch({ kind: "written", sheet, as: kind });
+  await recordSheet(work, { sheet, kind, plan, answered });
 }
 
-const madeOf = async ({ question, headingRow }: Answered, { today, version }: Edition) => ({
+/** Worksheet functions see every row of their ranges: an answer without the hidden ones is written as values. */
+export const canBeLive = ({ question }: Answered): boolean => question.source.hidden?.leftOut !== true;
+
+export const madeOf = async ({ question, headingRow, table }: Answered, { today, version }: Edition) => ({
   date: today(),
   version,
   fingerprint: await fingerprintOf(question),
   headingRow,
+  table,
 });
 
 /** Shows a cell or a range in the spreadsheet. */

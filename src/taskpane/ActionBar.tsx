@@ -1,6 +1,7 @@
 import { Button, ProgressBar, Select, makeStyles, tokens } from "@fluentui/react-components";
 import { type ReactNode, useState } from "react";
 import type { Busy } from "../app/state.ts";
+import { canBeLive } from "../app/writing.ts";
 import type { SheetKind } from "../sheet/answerSheet.ts";
 import { CellLink } from "./parts/CellLink.tsx";
 import { usePane } from "./paneContext.ts";
@@ -50,6 +51,8 @@ const doing: Readonly<Record<Busy["with"], string>> = {
   answering: "Finding the answer",
   writing: "Writing the sheet",
   keeping: "Putting values in the place of formulas",
+  redoing: "Redoing the sheet",
+  comparing: "Comparing the set-ups",
 };
 
 function Working({ busy }: { readonly busy: Busy }): ReactNode {
@@ -76,8 +79,10 @@ function Working({ busy }: { readonly busy: Busy }): ReactNode {
 function WriteBar(): ReactNode {
   const styles = useStyles();
   const { state, commands } = usePane();
-  const [kind, setKind] = useState<SheetKind>("live");
-  const { written } = state;
+  const [wanted, setKind] = useState<SheetKind>("live");
+  const { written, answered } = state;
+  const onlyKept = answered !== null && !canBeLive(answered);
+  const kind = onlyKept ? "kept" : wanted;
   return (
     <footer className={styles.bar}>
       <div className={styles.line}>
@@ -90,12 +95,13 @@ function WriteBar(): ReactNode {
           value={kind}
           onChange={(_, { value }) => setKind(value === "kept" ? "kept" : "live")}
         >
-          <option value="live">live</option>
+          {!onlyKept && <option value="live">live</option>}
           <option value="kept">kept</option>
         </Select>
       </div>
       <span className={styles.hint}>
         {kind === "live" ? "Live: formulas that follow the cells." : "Kept: values that stay as they are."}
+        {onlyKept && " Functions cannot see which rows are hidden."}
       </span>
       {written !== null && (
         <span>

@@ -26,6 +26,7 @@ const setup: Setup = {
   rows: "cases",
   rowsGuessed: true,
   constant: true,
+  visibleOnly: false,
   calendar: [],
   options: defaultOptions,
 };

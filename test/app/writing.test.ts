@@ -84,8 +84,9 @@ describe("writing", () => {
     pane.commands.redo();
     await settled();
     expect(questions).toHaveLength(2);
-    expect(host.plans).toHaveLength(2);
-    expect(state().written).toMatchObject({ sheet: `${host.plans[0]?.name ?? ""} 2`, outdated: false });
+    expect(host.plans).toHaveLength(1);
+    expect(host.keeper.rewrites.map(({ over }) => over.sheet)).toEqual([host.plans[0]?.name]);
+    expect(state().written).toMatchObject({ sheet: host.plans[0]?.name, outdated: false });
   });
 
   it("forgets answer and sheet when other data are read", async () => {

@@ -4,10 +4,13 @@ import { type Result, failure, success } from "../../src/core/problem/result.ts"
 import type { Book } from "../../src/core/review/book.ts";
 import { type Cell, toCellColumn } from "../../src/core/table/cells.ts";
 import { addressOf } from "../../src/core/table/address.ts";
+import { namePrefix } from "../../src/app/keeper.ts";
 import type { SheetPlan } from "../../src/sheet/plan.ts";
+import { type FakeKeeper, fakeKeeper } from "./fakeKeeper.ts";
 
 /** A spreadsheet of one sheet, in memory, that does as it is told: for the pane's own tests. */
 export interface FakeHost extends Host {
+  readonly keeper: FakeKeeper;
   /** Row by row, headings first. */
   rows: Cell[][];
   readonly sheet: string;
@@ -29,14 +32,16 @@ export interface FakeHost extends Host {
 }
 
 export function fakeHost(sheet: string, rows: Cell[][]): FakeHost {
-  let watched: readonly string[] = [];
-  let tell: (address: string) => void = () => undefined;
+  const watches = new Set<{ readonly addresses: readonly string[]; readonly tell: (address: string) => void }>();
   const refused = <T>(kind: keyof FakeHost["refusals"], value: T): Result<T> => {
     const problem = host.refusals[kind];
     return problem === undefined ? success(value) : failure(problem);
   };
   const inFront = (): string => host.plans.at(-1)?.name ?? sheet;
+  const keeper = fakeKeeper();
   const host: FakeHost = {
+    ...keeper,
+    keeper,
     sheet,
     rows,
     places: [],
@@ -46,15 +51,18 @@ export function fakeHost(sheet: string, rows: Cell[][]): FakeHost {
     hold: null,
     plans: [],
     gone: [],
-    watched: () => watched,
+    watched: () => [...watches].flatMap(({ addresses }) => addresses),
     listeners: [],
     change: (row, column, cell) => {
       host.rows = host.rows.map((cells, r) => cells.map((old, c) => (r === row && c === column ? cell : old)));
-      if (watched.length > 0) tell(addressOf({ sheet, row, column, rows: 1, columns: 1 }));
+      const cellName = addressOf({ sheet, row, column, rows: 1, columns: 1 });
+      for (const { tell } of watches) tell(cellName);
     },
     read: async (where: WhereToRead, errand: Errand) => {
       errand.progress({ what: "Reading the cells", share: 0.25 });
       await host.hold?.();
+      if (where.kind === "place" && where.place.name.startsWith(namePrefix) && !keeper.names.has(where.place.name))
+        return failure({ code: "unknown-place", place: where.place.name, nearest: null });
       return errand.signal.aborted && !host.heedless
         ? failure({ code: "cancelled" })
         : refused("read", blockOf(host, where));
@@ -63,9 +71,9 @@ export function fakeHost(sheet: string, rows: Cell[][]): FakeHost {
     listPlaces: () => Promise.resolve(success(host.places)),
     write: (plan) => {
       host.plans.push(plan);
-      return Promise.resolve(
-        refused("write", { sheet: `${plan.name}${host.plans.length > 1 ? ` ${host.plans.length}` : ""}` }),
-      );
+      const name = `${plan.name}${host.plans.length > 1 ? ` ${host.plans.length}` : ""}`;
+      if (host.refusals.write === undefined) keeper.tags.set(name, null);
+      return Promise.resolve(refused("write", { sheet: name }));
     },
     recalculateSheet: () => Promise.resolve(refused("recalculate", { sheet: inFront() })),
     keepSheet: () => Promise.resolve(refused("keep", { sheet: inFront() })),
@@ -74,11 +82,11 @@ export function fakeHost(sheet: string, rows: Cell[][]): FakeHost {
       return Promise.resolve(refused("goTo", null));
     },
     watch: (addresses, changed) => {
-      watched = addresses;
-      tell = changed;
+      const own = { addresses, tell: changed };
+      watches.add(own);
       host.listeners.push(changed);
       const stop = (): Promise<void> => {
-        watched = [];
+        watches.delete(own);
         return Promise.resolve();
       };
       return Promise.resolve(refused("watch", stop));

@@ -2,11 +2,12 @@ import type { ReactNode } from "react";
 import { useType } from "../look/type.ts";
 import { Disclosure } from "../parts/Disclosure.tsx";
 import { SectionTitle } from "../parts/SectionTitle.tsx";
-import { counted } from "../parts/rowWords.ts";
 import { usePane } from "../paneContext.ts";
 import { Calendar } from "./Calendar.tsx";
 import { ChangedNotice } from "./ChangedNotice.tsx";
 import { ColumnList } from "./ColumnList.tsx";
+import { HiddenRows } from "./HiddenRows.tsx";
+import { LostColumns } from "./LostColumns.tsx";
 import { PlaceChooser } from "./PlaceChooser.tsx";
 import { RowsAre } from "./RowsAre.tsx";
 import { WhatIsUsed } from "./WhatIsUsed.tsx";
@@ -17,13 +18,12 @@ export function DataSection(): ReactNode {
   const type = useType();
   const { data, setup } = usePane().state;
   if (data === null || setup === null) return <FirstRun />;
-  const { address, source, notes, hiddenRows } = data;
+  const { address, source, notes } = data;
   return (
     <>
       <SectionTitle>{address}</SectionTitle>
       <p className={type.remark}>
         {source.rowCount.toLocaleString("en-US")} rows, {source.columns.length} columns
-        {hiddenRows > 0 && `; ${counted(hiddenRows, "hidden row")} among them`}
       </p>
       {notes.map((note) => (
         <p key={note} className={type.remark}>
@@ -31,6 +31,7 @@ export function DataSection(): ReactNode {
         </p>
       ))}
       <ChangedNotice />
+      <LostColumns />
       <Disclosure key={address} label="Choose other data">
         <PlaceChooser />
       </Disclosure>
@@ -38,6 +39,7 @@ export function DataSection(): ReactNode {
       <ColumnList />
       <h2 className={type.head}>Rows are</h2>
       <RowsAre />
+      <HiddenRows />
       <WhatIsUsed />
       <Calendar />
       <WayToAnswer />

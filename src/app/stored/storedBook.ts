@@ -1,0 +1,45 @@
+import type { SheetKind } from "../../sheet/answerSheet.ts";
+import type { WrittenBlock } from "../../sheet/written.ts";
+import type { Setup } from "../setup.ts";
+
+/**
+ * Where data are found again: by the name of their table, or by a name of the workbook for their cells. Both move with
+ * inserted rows and columns and outlive a renamed sheet, which no address does; and both can be seen and mended by hand.
+ */
+export interface Anchor {
+  readonly kind: "table" | "name";
+  readonly name: string;
+}
+
+/** Data that a set-up or a sheet goes back to. */
+export interface Origin {
+  readonly anchor: Anchor;
+  /** Where they stood when this was stored, for the user to know. */
+  readonly address: string;
+}
+
+/** A set-up kept in the workbook under a name. */
+export interface StoredSetup extends Origin {
+  readonly name: string;
+  readonly setup: Setup;
+}
+
+/** What is known of a result sheet: what it was made from, and what stands in its cells. */
+export interface SheetRecord extends Origin {
+  /** Stands on the sheet itself, so that the sheet may be renamed. */
+  readonly id: string;
+  readonly kind: SheetKind;
+  readonly setup: Setup;
+  /** Of the data when it was written. */
+  readonly fingerprint: string;
+  /** null where it cannot be told: on a live sheet. */
+  readonly written: readonly WrittenBlock[] | null;
+}
+
+/** Everything that Footing keeps in a workbook. */
+export interface StoredBook {
+  readonly setups: readonly StoredSetup[];
+  readonly sheets: readonly SheetRecord[];
+}
+
+export const emptyBook: StoredBook = { setups: [], sheets: [] };
