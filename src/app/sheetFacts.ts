@@ -3,6 +3,7 @@ import { type SettingPair, settingsSaid } from "../core/answer/settingsSaid.ts";
 import { type SheetArea, columnLetters, quoteSheet } from "../core/table/address.ts";
 import type { Column, Source } from "../core/table/source.ts";
 import type { SheetFacts } from "../sheet/howMadeSection.ts";
+import { type TableInHand, columnsOfTable } from "./tableInHand.ts";
 
 export interface Made {
   /** "1 December 2026" */
@@ -11,29 +12,38 @@ export interface Made {
   readonly fingerprint: string;
   /** The sheet row of the headings, from 0; null where the data have none. */
   readonly headingRow: number | null;
+  /** The table that they are, if they are one. */
+  readonly table: TableInHand | null;
 }
 
 /** What a result sheet says of where its figures come from, and the ranges that a live sheet's functions read. */
 export function sheetFactsOf({ source, model, options }: Question, made: Made): SheetFacts {
   const columnOf = (name: string): Column | undefined => source.columns.find((column) => column.name === name);
-  const areaOf = (names: readonly string[]): string =>
-    areaText(
-      names.map(columnOf).filter((column) => column !== undefined),
-      { source, made },
-    );
-  const drivers = model.drivers.map(({ column }) => column);
   const { rows } = model;
   const key = rows.kind === "time" ? rows.order : rows.kind === "groups" ? rows.by : null;
+  const drivers = model.drivers.map(({ column }) => column);
+  const rangesBy = (textOf: (area: SheetArea) => string): SheetFacts["ranges"] => {
+    const areaOf = (names: readonly string[]): string => {
+      const area = spanOf(
+        names.map(columnOf).filter((column) => column !== undefined),
+        { source, made },
+      );
+      return area === null ? "" : textOf(area);
+    };
+    return {
+      outcome: areaOf([model.outcome.column]),
+      drivers: areaOf(drivers),
+      key: key === null ? null : areaOf([key]),
+    };
+  };
+  const { table } = made;
   return {
     date: made.date,
     version: made.version,
     fingerprint: made.fingerprint,
-    ranges: {
-      outcome: areaOf([model.outcome.column]),
-      drivers: areaOf(drivers),
-      key: key === null ? null : areaOf([key]),
-    },
-    settings: [...settingsSaid(model, options), ...columnsSetting(drivers.map(columnOf))],
+    ranges: rangesBy(addressText),
+    table: table === null ? null : { name: table.name, columns: rangesBy((area) => textInTable(table, area)) },
+    settings: [...settingsSaid(model, options), ...columnsSetting(drivers.map(columnOf)), ...hiddenSetting(source)],
   };
 }
 
@@ -42,15 +52,17 @@ interface Context {
   readonly made: Made;
 }
 
-/** The smallest rectangle that holds the columns, headings included: "Months!$C$3:$E$99". */
-function areaText(columns: readonly Column[], context: Context): string {
-  const area = spanOf(columns, context);
-  if (area === null) return "";
+/** "Months!$C$3:$E$99" */
+function addressText(area: SheetArea): string {
   const corner = (row: number, column: number): string => `$${columnLetters(column)}$${row + 1}`;
   const last = corner(area.row + area.rows - 1, area.column + area.columns - 1);
   return `${quoteSheet(area.sheet)}!${corner(area.row, area.column)}:${last}`;
 }
 
+const textInTable = (table: TableInHand, { column, columns }: SheetArea): string =>
+  columnsOfTable(table, column, column + columns - 1);
+
+/** The smallest rectangle that holds the columns, headings included. */
 function spanOf(columns: readonly Column[], { source, made }: Context): SheetArea | null {
   const places = columns.flatMap(({ place }) => (place.kind === "sheet" ? [place] : []));
   const [first] = places;
@@ -65,6 +77,10 @@ function spanOf(columns: readonly Column[], { source, made }: Context): SheetAre
     columns: Math.max(...numbers) - Math.min(...numbers) + 1,
   };
 }
+
+/** Worksheet functions know no such setting: they see every row, so that it stands on kept sheets alone. */
+const hiddenSetting = ({ hidden }: Source): SettingPair[] =>
+  hidden?.leftOut === true ? [["hidden rows", "left out"]] : [];
 
 /** Where the drivers' rectangle holds other columns too, or another order, the setting that picks them by number. */
 function columnsSetting(drivers: readonly (Column | undefined)[]): SettingPair[] {

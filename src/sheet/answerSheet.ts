@@ -57,7 +57,8 @@ const partsOf = (answer: Answer, facts: SheetFacts, figures: Figures) => [
 
 /** The functions of a live sheet read the settings that stand on it; where they stand is known once it is laid out. */
 function liveWithSettings(answer: Answer, facts: SheetFacts): Figures {
-  const figuresWith = (settings: string): Figures => liveFigures(answer, { ...facts.ranges, settings });
+  const figuresWith = (settings: string): Figures =>
+    liveFigures(answer, { ...(facts.table?.columns ?? facts.ranges), settings });
   const { starts } = stack(partsOf(answer, facts, figuresWith("$A$1")));
   return figuresWith(settingsArea(answer, facts, starts[part.howMade] ?? 0));
 }

@@ -2,6 +2,7 @@ import type { Answer } from "../core/answer/answer.ts";
 import { type Grid, answerTable, choiceText, evidenceTable, verdictLines } from "../core/answer/tables.ts";
 import { columnLetters } from "../core/table/address.ts";
 import { liveColumn } from "./columns.ts";
+import type { SourceRanges } from "./howMadeSection.ts";
 import type { PlanBlock, PlanCell, PlanFormat } from "./plan.ts";
 import { cellOf, formula, text } from "./section.ts";
 
@@ -47,10 +48,7 @@ const valueAt = (grid: Grid, row: number, column: number): PlanCell => {
 };
 
 /** The ranges and the settings range that a live sheet's functions read. */
-export interface LiveSources {
-  readonly outcome: string;
-  readonly drivers: string;
-  readonly key: string | null;
+export interface LiveSources extends SourceRanges {
   readonly settings: string;
 }
 

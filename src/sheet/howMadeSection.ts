@@ -12,9 +12,17 @@ export interface SheetFacts {
   /** SHA-256 of the data used, in hexadecimal. */
   readonly fingerprint: string;
   /** Ranges with their headings, "Months!$B$3:$B$99". */
-  readonly ranges: { readonly outcome: string; readonly drivers: string; readonly key: string | null };
+  readonly ranges: SourceRanges;
+  /** The table that the ranges are of, if any, and its columns as formulas speak of them, so that they follow it as it grows. */
+  readonly table: { readonly name: string; readonly columns: SourceRanges } | null;
   /** Settings by name: those that differ from the defaults, and those the columns call for. */
   readonly settings: readonly (readonly [string, string])[];
+}
+
+export interface SourceRanges {
+  readonly outcome: string;
+  readonly drivers: string;
+  readonly key: string | null;
 }
 
 const mostRowsListed = 50;
@@ -50,11 +58,12 @@ export function settingsArea(answer: Answer, facts: SheetFacts, startRow: number
   return `$${columnLetters(0)}$${first + 1}:$${columnLetters(1)}$${last}`;
 }
 
-function madeRows(answer: Answer, { ranges, fingerprint, version }: SheetFacts): PlanCell[][] {
+function madeRows(answer: Answer, { ranges, table, fingerprint, version }: SheetFacts): PlanCell[][] {
   const lines: readonly (readonly [string, string | number])[] = [
     ["Outcome", ranges.outcome],
     ["Drivers", ranges.drivers],
     ...(ranges.key === null ? [] : [["Time or group of each row", ranges.key] as const]),
+    ...(table === null ? [] : [["Table of these ranges", table.name] as const]),
     ["Rows used, when made", answer.observations],
     ["Rows left out, when made", answer.leftOutCount],
     ...answer.notes.map((note) => ["Done to the data", note] as const),

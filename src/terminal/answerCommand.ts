@@ -82,6 +82,7 @@ async function save({ opened, asked, answer, file, command }: Saving, world: Sur
     version: world.version,
     fingerprint: await fingerprintOf(question),
     headingRow: table.headingRow,
+    table: table.table,
   };
   const plan = planAnswer(answer, sheetFactsOf(question, made), command.live ? "live" : "kept");
   const written = await opened.host.write(plan, quiet);

@@ -1,14 +1,14 @@
 import type { Errand, Host } from "../app/host.ts";
+import { type FoundData, readPlaced } from "../app/tableInHand.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";
 import { type SheetArea, addressOf, localAddressOf, parseAddress } from "../core/table/address.ts";
-import { type LocatedTable, readBlock } from "../core/table/locate.ts";
 import { rangesFault } from "../core/table/ranges.ts";
 import type { AnswerCommand } from "./arguments.ts";
 import { findTable, ownName } from "./findTable.ts";
 
 /** The columns a command speaks of, by their own names in the table they were found in. */
 export interface ColumnsAsked {
-  readonly table: LocatedTable;
+  readonly table: FoundData;
   readonly outcome: string;
   readonly drivers: readonly string[];
   readonly order: string | null;
@@ -60,7 +60,7 @@ async function byRange(host: Host, command: AnswerCommand, errand: Errand): Prom
   const address = rectangle.sheet === "" ? localAddressOf(rectangle) : addressOf(rectangle);
   const block = await host.read({ kind: "address", address }, errand);
   if (!block.ok) return block;
-  const located = readBlock(block.value);
+  const located = readPlaced(block.value);
   if (!located.ok) return located;
   return success(named(located.value, command, places));
 }
@@ -77,7 +77,7 @@ function around(ranges: readonly SheetArea[]): SheetArea {
   return { sheet, row, rows, column: first, columns: end - first };
 }
 
-function named(table: LocatedTable, command: AnswerCommand, ranges: readonly SheetArea[]): ColumnsAsked {
+function named(table: FoundData, command: AnswerCommand, ranges: readonly SheetArea[]): ColumnsAsked {
   const namesIn = ({ column, columns }: SheetArea): string[] =>
     table.source.columns.flatMap(({ name, place }) =>
       place.column >= column && place.column < column + columns ? [name] : [],

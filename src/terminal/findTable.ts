@@ -1,10 +1,10 @@
 import type { DataPlace, Errand, Host } from "../app/host.ts";
+import { type FoundData, readPlaced } from "../app/tableInHand.ts";
 import { nearestName } from "../core/problem/nearestName.ts";
 import type { Problem } from "../core/problem/problem.ts";
 import { type Result, failure } from "../core/problem/result.ts";
 import { plainHeading } from "../core/table/headingRow.ts";
 import { columnInWords } from "../core/table/headings.ts";
-import { type LocatedTable, readBlock } from "../core/table/locate.ts";
 import { rangeOf } from "../core/table/place.ts";
 
 /** The names the user gave, to be matched with headings. */
@@ -18,7 +18,7 @@ export interface Wanted {
  * @returns Problem "unknown-place" for a sheet that does not exist, "unknown-heading" with the nearest one,
  *   "ambiguous-heading" where several sheets have them all, "repeated-heading" where several columns have one.
  */
-export async function findTable(host: Host, wanted: Wanted, errand: Errand): Promise<Result<LocatedTable>> {
+export async function findTable(host: Host, wanted: Wanted, errand: Errand): Promise<Result<FoundData>> {
   const places = await host.listPlaces();
   if (!places.ok) return places;
   const sheets = places.value.filter(({ kind }) => kind === "sheet");
@@ -26,11 +26,11 @@ export async function findTable(host: Host, wanted: Wanted, errand: Errand): Pro
     ({ name }) => wanted.sheet === null || plainHeading(name) === plainHeading(wanted.sheet),
   );
   if (chosen.length === 0) return failure(noSuchSheet(wanted.sheet, sheets));
-  const tables: { readonly place: DataPlace; readonly table: Result<LocatedTable> }[] = [];
+  const tables: { readonly place: DataPlace; readonly table: Result<FoundData> }[] = [];
   for (const place of chosen) {
     const block = await host.read({ kind: "place", place }, errand);
     if (!block.ok) return block;
-    tables.push({ place, table: readBlock(block.value, wanted.headings) });
+    tables.push({ place, table: readPlaced(block.value, wanted.headings) });
   }
   const fitting = tables.filter(({ table }) => table.ok && missingFrom(table.value, wanted.headings) === undefined);
   if (fitting.length > 1) {
@@ -59,7 +59,7 @@ const noSuchSheet = (sheet: string | null, sheets: readonly DataPlace[]) =>
       } as const);
 
 /** A heading asked for that stands above several columns, of which the later ones have their place in their names. */
-function repeatedAmong({ source }: LocatedTable, headings: readonly string[]): Problem | null {
+function repeatedAmong({ source }: FoundData, headings: readonly string[]): Problem | null {
   const { columns, rowCount } = source;
   for (const heading of headings) {
     const carriers = columns.filter(({ name, place }) =>
@@ -71,17 +71,17 @@ function repeatedAmong({ source }: LocatedTable, headings: readonly string[]): P
   return null;
 }
 
-const namesOf = (table: LocatedTable): string[] => table.source.columns.map(({ name }) => name);
+const namesOf = (table: FoundData): string[] => table.source.columns.map(({ name }) => name);
 
-const missingFrom = (table: LocatedTable, headings: readonly string[]): string | undefined =>
+const missingFrom = (table: FoundData, headings: readonly string[]): string | undefined =>
   headings.find((heading) => !namesOf(table).some((name) => plainHeading(name) === plainHeading(heading)));
 
 /** Where no sheet has all the headings: the fault of the sheet that has most of them. */
 function nearMiss(
-  tables: readonly { readonly place: DataPlace; readonly table: Result<LocatedTable> }[],
+  tables: readonly { readonly place: DataPlace; readonly table: Result<FoundData> }[],
   { headings }: Wanted,
-): Result<LocatedTable> {
-  const foundIn = (table: Result<LocatedTable>): number =>
+): Result<FoundData> {
+  const foundIn = (table: Result<FoundData>): number =>
     table.ok ? headings.filter((heading) => missingFrom(table.value, [heading]) === undefined).length : -1;
   const ranked = tables.map(({ place, table }) => ({ place, table, found: foundIn(table) }));
   const [best] = ranked.toSorted((a, b) => b.found - a.found);
@@ -92,5 +92,5 @@ function nearMiss(
 }
 
 /** The column's own name for a heading given in another case or spacing. */
-export const ownName = (table: LocatedTable, heading: string): string =>
+export const ownName = (table: FoundData, heading: string): string =>
   namesOf(table).find((name) => plainHeading(name) === plainHeading(heading)) ?? heading;

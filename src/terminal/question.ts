@@ -1,16 +1,16 @@
 import type { Errand, Host } from "../app/host.ts";
+import type { FoundData } from "../app/tableInHand.ts";
 import { modelOf } from "../core/answer/modelOf.ts";
 import type { Question } from "../core/answer/question.ts";
 import { readSettings } from "../core/answer/settings.ts";
 import { type Result, success } from "../core/problem/result.ts";
-import type { LocatedTable } from "../core/table/locate.ts";
 import type { AnswerCommand } from "./arguments.ts";
 import { columnsAsked } from "./columnsAsked.ts";
 
 /** A question and the table that it was found in. */
 export interface Asked {
   readonly question: Question;
-  readonly table: LocatedTable;
+  readonly table: FoundData;
 }
 
 /** Reads the table that a command speaks of, and turns its words into a question. */

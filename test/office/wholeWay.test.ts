@@ -7,7 +7,7 @@ import { sheetFactsOf } from "../../src/app/sheetFacts.ts";
 import type { Answer } from "../../src/core/answer/answer.ts";
 import { answerTable } from "../../src/core/answer/tables.ts";
 import type { Result } from "../../src/core/problem/result.ts";
-import type { BookCell } from "../../src/desk/book/bookData.ts";
+import type { BookCell, SheetData } from "../../src/desk/book/bookData.ts";
 import type { NodeDesk } from "../../src/desk/client/openDesk.ts";
 import { registerFunctions } from "../../src/functions/register.ts";
 import { type SheetKind, planAnswer } from "../../src/sheet/answerSheet.ts";
@@ -49,8 +49,8 @@ const shopRows = (): BookCell[][] => [
 let at: DeskHost | null = null;
 afterEach(() => at?.desk.close());
 
-async function open(rows: BookCell[][]): Promise<DeskHost> {
-  const opened = await openDeskHost(bookOf(sheetOf("Data", rows)));
+async function open(rows: BookCell[][], more: Partial<SheetData> = {}): Promise<DeskHost> {
+  const opened = await openDeskHost(bookOf(sheetOf("Data", rows, more)));
   registerFunctions(opened.desk.CustomFunctions, inlineAnalyst);
   at = opened;
   return opened;
@@ -71,6 +71,7 @@ async function writeAnswer({ desk, host }: DeskHost, made: Awaited<ReturnType<ty
     version: "1.2.3",
     fingerprint: await fingerprint(made.data.source.columns),
     headingRow: made.data.headingRow,
+    table: made.data.table,
   });
   const { sheet } = value(await host.write(planAnswer(made.answer, facts, kind), errand()));
   await desk.settle();
@@ -136,6 +137,29 @@ describe("from cells to a result sheet", () => {
     expectSame(shownFigures(opened.desk, live, after.answer), figuresOf(after.answer));
     expectSame(shownFigures(opened.desk, kept, before.answer), figuresOf(before.answer));
     expect(errorsOn(opened.desk, live)).toEqual([]);
+  });
+
+  it("live, over a table: a row added to the table is carried through, and the formulas name its columns", async () => {
+    const [, ...shops] = shopRows();
+    const rows = [["Takings", "Staff [hours]", "Footfall's #"], ...shops];
+    const opened = await open(rows, { tables: [{ name: "Shops", address: "A1:C51" }] });
+    const before = await answerFrom(opened, "Data!A1");
+    const live = await writeAnswer(opened, before, "live");
+    expectSame(shownFigures(opened.desk, live, before.answer), figuresOf(before.answer));
+    const columns = "Shops[[#Headers],[#Data],[Takings]],Shops[[#Headers],[#Data],[Staff '[hours']]:[Footfall''s '#]]";
+    const written = opened.desk.snapshot().sheets.find(({ name }) => name === live)!;
+    expect(JSON.stringify(written.rows)).toContain(JSON.stringify(`=FOOTING.ANSWER(${columns},$`).slice(1, -1));
+    for (const [cell, typed] of [
+      ["A52", 999],
+      ["B52", 71],
+      ["C52", 120],
+    ] as const)
+      opened.desk.edit(`Data!${cell}`, typed);
+    await opened.desk.settle();
+    const after = await answerFrom(opened, "Data!A1");
+    expect(after.answer.observations).toBe(51);
+    expect(after.answer.coefficients[1]).not.toBeCloseTo(before.answer.coefficients[1]!, 3);
+    expectSame(shownFigures(opened.desk, live, after.answer), figuresOf(after.answer));
   });
 
   it("live, then kept: the sheet looks the same and holds no formula", async () => {

@@ -48,7 +48,7 @@ function answered(asked: Question): Answer {
   return answer.value;
 }
 
-const made = { date: "1 December 2026", version: "0.0.0", fingerprint: "ab".repeat(32), headingRow: 2 };
+const made = { date: "1 December 2026", version: "0.0.0", fingerprint: "ab".repeat(32), headingRow: 2, table: null };
 
 const planOf = (kind: "live" | "kept", leftOut: readonly number[] = []): SheetPlan => {
   const asked = question(leftOut);
