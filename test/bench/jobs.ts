@@ -20,11 +20,19 @@ export interface Job {
 }
 
 const neweyWest: ErrorsChoice = { kind: "newey-west", lags: { kind: "careful" }, adjusted: true };
+const prewhitened: ErrorsChoice = {
+  kind: "newey-west",
+  lags: { kind: "newey-west 1994", prewhiten: true },
+  adjusted: true,
+};
 
 export const jobs: Readonly<Record<string, Job>> = {
   fit: ofFit(({ design }) => must(fitLeastSquares(design))),
   white: ofFit((fit) => must(covarianceOf(fit, { kind: "white", version: "HC3" }))),
   "newey-west": ofFit((fit) => must(covarianceOf(fit, neweyWest))),
+  // Groups of ten rows: a group for every ten rows is the most that this size is likely to meet.
+  grouped: ofFit((fit) => must(covarianceOf(inTens(fit), { kind: "grouped", version: "CR2" }))),
+  prewhitened: ofFit((fit) => must(covarianceOf(fit, prewhitened))),
   koenker: ofFit((fit) => computed(koenker(fit))),
   "white-test": ofFit((fit) => computed(whiteTest(fit))),
   "breusch-godfrey": ofFit((fit) => breuschGodfreyOrders(fit, [2]).forEach(computed)),
@@ -47,6 +55,13 @@ function ofFit(work: (fit: Fit) => void): Job {
       return () => work({ ...fit });
     },
   };
+}
+
+function inTens(fit: Fit): Fit {
+  const groups = Int32Array.from({ length: fit.rowCount }, (_, row) => Math.floor(row / 10));
+  const labels = Array.from({ length: Math.ceil(fit.rowCount / 10) }, (_, group) => String(group));
+  const order = { kind: "groups", by: "Ten", groups, labels, second: null, positions: null } as const;
+  return { ...fit, design: { ...fit.design, order } };
 }
 
 function must(result: { readonly ok: boolean }): void {

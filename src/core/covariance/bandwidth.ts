@@ -1,8 +1,8 @@
 import type { Fit } from "../fit/fit.ts";
 import { plusCombination } from "../numeric/combination.ts";
 import { leastSquares } from "../numeric/leastSquares.ts";
-import { inOrder } from "../numeric/ordering.ts";
-import { type RowSource, columnsOf } from "../numeric/rowSource.ts";
+import { rowsOf } from "../numeric/ordering.ts";
+import { columnsOf, combinedRows } from "../numeric/rowSource.ts";
 import { extremes } from "../numeric/sums.ts";
 import { laggedProducts, onGrid, rowsWithPredecessor } from "../numeric/timeGrid.ts";
 import type { Kernel, LagRule } from "./choice.ts";
@@ -41,8 +41,10 @@ export function bandwidthFrom(scores: Scores, fit: Fit, rule: DataRule): number 
  */
 function neweyWest1994(fit: Fit, { source, positions }: Scores, c: number): number {
   const most = Math.floor(c * (fit.rowCount / 100) ** (2 / 9));
-  const [sum] = rawScores(fit, source, "added up");
-  const [g0 = 0, ...others] = laggedProducts(onGrid(sum!, positions(most)), most);
+  const weights = rawWeights(fit);
+  const added = weights[0]!.map((_, i) => weights.reduce((total, weight) => total + weight[i]!, 0));
+  const { values } = relative(combinedRows(source, added));
+  const [g0 = 0, ...others] = laggedProducts(onGrid(values, positions(most)), most);
   const s0 = others.reduce((total, g) => total + 2 * g, g0);
   const s1 = others.reduce((total, g, index) => total + 2 * (index + 1) * g, 0);
   return 1.1447 * ((s1 / s0) ** 2 * fit.rowCount) ** (1 / 3);
@@ -62,7 +64,12 @@ const andrewsConstant: Readonly<Record<Kernel, { readonly factor: number; readon
 function andrews1991(fit: Fit, { source, positions }: Scores, kernel: Kernel): number {
   const { factor, q } = andrewsConstant[kernel];
   const later = rowsWithPredecessor(positions(1));
-  const models = rawScores(fit, source, "each").map((column) => firstOrder(column, later));
+  const columns = columnsOf(source);
+  const zeros = new Float64Array(source.rowCount);
+  const raw = rawWeights(fit).map((weight) => firstOrder(plusCombination(zeros, columns, weight), later));
+  const largest = raw.reduce((most, { scale }) => Math.max(most, scale), Number.MIN_VALUE);
+  // The unit that all share makes no difference, and fourth powers of it stay in range.
+  const models = raw.map(({ rho, variance, scale }) => ({ rho, variance: variance * (scale / largest) ** 2 }));
   const bottom = models.reduce((sum, { rho, variance }) => sum + variance ** 2 / (1 - rho) ** 4, 0);
   const top = models.reduce((sum, { rho, variance }) => {
     const curvature = q === 1 ? (1 - rho) ** 6 * (1 + rho) ** 2 : (1 - rho) ** 8;
@@ -73,7 +80,10 @@ function andrews1991(fit: Fit, { source, positions }: Scores, kernel: Kernel): n
 
 interface FirstOrder {
   readonly rho: number;
+  /** In squares of the scale. */
   readonly variance: number;
+  /** The size of the largest score. */
+  readonly scale: number;
 }
 
 /** A larger root makes the bandwidth all noise (Andrews and Monahan 1992, p. 957). */
@@ -81,34 +91,31 @@ const largestRoot = 0.97;
 
 /** z_t = a + rho z_(t-1) + v_t over the rows whose predecessor is there. */
 function firstOrder(column: Float64Array, later: Int32Array): FirstOrder {
-  const now = inOrder(column, later);
-  const before = inOrder(
-    column,
+  const { values, scale } = relative(column);
+  const now = rowsOf(values, later);
+  const before = rowsOf(
+    values,
     later.map((row) => row - 1),
   );
   const solution = leastSquares([new Float64Array(later.length).fill(1), before], now);
-  if (solution.kind === "dependent") return { rho: 0, variance: 0 };
+  if (solution.kind === "dependent") return { rho: 0, variance: 0, scale };
   const rho = Math.max(-largestRoot, Math.min(largestRoot, solution.coefficients[1]!));
-  return { rho, variance: solution.rss / later.length };
+  return { rho, variance: solution.rss / later.length, scale };
 }
 
-/** The scores e_t x_t of every term but the constant, in their own units: x_t = R'q_t. */
-function rawScores({ design, triangle }: Fit, source: RowSource, how: "each" | "added up"): Float64Array[] {
-  const columns = columnsOf(source);
+/**
+ * The scores e_t x_t of each term but the constant, in their own units, as weights of the scores in the basis:
+ * x_t = R'q_t.
+ */
+function rawWeights({ design, triangle: { size, values } }: Fit): Float64Array[] {
   const drivers = design.terms.flatMap(({ meaning }, j) => (meaning.kind === "constant" ? [] : [j]));
   const counted = drivers.length === 0 ? [0] : drivers;
-  const { size, values } = triangle;
-  const weights = counted.map((j) => Float64Array.from({ length: size }, (_, i) => values[i * size + j]!));
-  const total = Float64Array.from({ length: size }, (_, i) => weights.reduce((sum, weight) => sum + weight[i]!, 0));
-  const zeros = new Float64Array(source.rowCount);
-  return relative((how === "each" ? weights : [total]).map((weight) => plusCombination(zeros, columns, weight)));
+  return counted.map((j) => Float64Array.from({ length: size }, (_, i) => values[i * size + j]!));
 }
 
-/** All in parts of the largest entry: no rule depends on the unit that they share, and fourth powers stay in range. */
-function relative(columns: readonly Float64Array[]): Float64Array[] {
-  const largest = columns.reduce((most, column) => {
-    const { least, greatest } = extremes(column);
-    return Math.max(most, greatest, -least);
-  }, 0);
-  return columns.map((column) => (largest === 0 ? column : column.map((value) => value / largest)));
+/** In parts of the largest entry: no rule depends on the unit, and fourth powers stay in range. */
+function relative(column: Float64Array): { readonly values: Float64Array; readonly scale: number } {
+  const { least, greatest } = extremes(column);
+  const scale = Math.max(greatest, -least);
+  return { values: scale === 0 ? column : column.map((value) => value / scale), scale };
 }

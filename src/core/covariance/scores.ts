@@ -1,7 +1,7 @@
 import type { Fit } from "../fit/fit.ts";
-import { plusCombination } from "../numeric/combination.ts";
+import { keepRows, takeLessEarlier } from "../numeric/lessEarlier.ts";
 import type { SquareMatrix } from "../numeric/matrix.ts";
-import { inOrder } from "../numeric/ordering.ts";
+import { inOrder, rowsOf } from "../numeric/ordering.ts";
 import { type RowSource, columnsOf, storedRows, weightedRows } from "../numeric/rowSource.ts";
 import { identity, invert, plus, scaled, spectralRadius } from "../numeric/smallMatrix.ts";
 import { rowsWithPredecessor, separated } from "../numeric/timeGrid.ts";
@@ -39,31 +39,27 @@ export function plainScores(fit: Fit, { positions, groups }: Timeline): Scores {
 export function prewhitenedScores(fit: Fit, timeline: Timeline): Scores {
   const plain = plainScores(fit, timeline);
   const later = rowsWithPredecessor(plain.positions(1));
-  const earlier = later.map((row) => row - 1);
   const columns = columnsOf(plain.source);
-  const now = columns.map((column) => inOrder(column, later));
-  const before = columns.map((column) => inOrder(column, earlier));
-  const { transition, caution } = heldBelowOne(autoregression(before, now));
-  const { size, values } = transition;
-  const rows = now.map((column, j) =>
-    plusCombination(
-      column,
-      before,
-      values.subarray(j * size, (j + 1) * size).map((a) => -a),
-    ),
-  );
+  const { transition, caution } = heldBelowOne(autoregression(columns, later));
+  takeLessEarlier(columns, transition);
   return {
-    source: storedRows(rows),
+    source: storedRows(keepRows(columns, later)),
     positions: (reach) => inOrder(plain.positions(reach), later),
-    recolouring: invert(plus(identity(size), scaled(transition, -1))),
+    recolouring: invert(plus(identity(transition.size), scaled(transition, -1))),
     caution,
   };
 }
 
 /** A, row j holding how the j-th score follows from all scores one period before. */
-function autoregression(before: readonly Float64Array[], now: readonly Float64Array[]): SquareMatrix {
-  const size = now.length;
-  const factor = triangularFactor([...before, ...now]);
+function autoregression(columns: readonly Float64Array[], later: Int32Array): SquareMatrix {
+  const size = columns.length;
+  const before = columns.map((column) =>
+    rowsOf(
+      column,
+      later.map((row) => row - 1),
+    ),
+  );
+  const factor = triangularFactor([...before, ...columns.map((column) => rowsOf(column, later))]);
   const inverse = invertTriangle(leading(factor, size));
   const values = new Float64Array(size * size);
   for (let j = 0; j < size; j++) {

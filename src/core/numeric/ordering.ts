@@ -13,6 +13,12 @@ export function inOrder(values: Float64Array, rows: Int32Array): Float64Array<Ar
   return ordered;
 }
 
+/** The same for ascending rows that may be read but not written: where they stand together, the column's own memory. */
+export function rowsOf(values: Float64Array, rows: Int32Array): Float64Array {
+  const [first = 0, last = -1] = [rows[0], rows.at(-1)];
+  return last - first + 1 === rows.length ? values.subarray(first, last + 1) : inOrder(values, rows);
+}
+
 /** The numbers of the rows whose entry is above a bound, ascending. */
 export function rowsAbove(values: Float64Array, bound: number): number[] {
   const rows: number[] = [];

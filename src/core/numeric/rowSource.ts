@@ -7,6 +7,8 @@ export interface RowSource {
   readonly rowCount: number;
   /** Writes the rows that the block names into its values, column by column. */
   readonly fill: (block: BasisBlock) => void;
+  /** The rows as columns where they stand ready. */
+  readonly stored?: readonly Float64Array<ArrayBuffer>[];
 }
 
 /** q_i: the rows of the basis, formed when they are asked for. */
@@ -29,7 +31,8 @@ export const weightedRows = (basis: Basis, factors: Float64Array): RowSource => 
 });
 
 /** Rows that stand ready in columns. */
-export const storedRows = (columns: readonly Float64Array[]): RowSource => ({
+export const storedRows = (columns: readonly Float64Array<ArrayBuffer>[]): RowSource => ({
+  stored: columns,
   size: columns.length,
   rowCount: columns[0]?.length ?? 0,
   fill: ({ values, first, rows }) => {
@@ -37,8 +40,9 @@ export const storedRows = (columns: readonly Float64Array[]): RowSource => ({
   },
 });
 
-/** The whole of a source as k columns, for work that needs all rows at once. */
-export function columnsOf(source: RowSource): Float64Array<ArrayBuffer>[] {
+/** The whole of a source as k columns, for work that needs all rows at once; not to be written where they are stored. */
+export function columnsOf(source: RowSource): readonly Float64Array<ArrayBuffer>[] {
+  if (source.stored !== undefined) return source.stored;
   const columns = Array.from({ length: source.size }, () => new Float64Array(source.rowCount));
   visitRows(source, ({ values, first, rows }) => {
     columns.forEach((column, j) => {
@@ -46,6 +50,18 @@ export function columnsOf(source: RowSource): Float64Array<ArrayBuffer>[] {
     });
   });
   return columns;
+}
+
+/** The sum of the numbers of each row, each times its weight. */
+export function combinedRows(source: RowSource, weights: Float64Array): Float64Array<ArrayBuffer> {
+  const sums = new Float64Array(source.rowCount);
+  visitRows(source, ({ values, first, rows }) => {
+    weights.forEach((weight, j) => {
+      const start = j * basisBlockRows;
+      for (let i = 0; i < rows; i++) sums[first + i]! += weight * values[start + i]!;
+    });
+  });
+  return sums;
 }
 
 /** Calls `visit` on each block in order; the block's values are overwritten after each call. */

@@ -21,8 +21,9 @@ export function rowsWithPredecessor(positions: Float64Array): Int32Array<ArrayBu
   return Int32Array.from(rows);
 }
 
-/** The values on a grid with a place for every period, zeros where there is no row. */
-export function onGrid(values: Float64Array, positions: Float64Array): Float64Array<ArrayBuffer> {
+/** The values on a grid with a place for every period, zeros where there is no row; themselves where none is missing. */
+export function onGrid(values: Float64Array, positions: Float64Array): Float64Array {
+  if (positions.at(-1) === positions.length - 1) return values;
   const grid = new Float64Array((positions.at(-1) ?? -1) + 1);
   for (let i = 0; i < values.length; i++) grid[positions[i]!] = values[i]!;
   return grid;

@@ -3,9 +3,11 @@ import { visitBasis } from "../../../src/core/numeric/basis.ts";
 import { basisTimes, squaredRowLengths, weightedCrossProducts } from "../../../src/core/numeric/crossProducts.ts";
 import { filterColumns } from "../../../src/core/numeric/fourier.ts";
 import { addGram, addScore, copyRows, visitGroups } from "../../../src/core/numeric/groupParts.ts";
+import { keepRows, takeLessEarlier } from "../../../src/core/numeric/lessEarlier.ts";
 import { movingWindowProducts } from "../../../src/core/numeric/movingWindows.ts";
+import { rowsOf } from "../../../src/core/numeric/ordering.ts";
 import { randomFrom } from "../../../src/core/numeric/random.ts";
-import { basisRows, columnsOf, storedRows, weightedRows } from "../../../src/core/numeric/rowSource.ts";
+import { basisRows, columnsOf, combinedRows, storedRows, weightedRows } from "../../../src/core/numeric/rowSource.ts";
 import { triangularFactor } from "../../../src/core/numeric/triangularFactor.ts";
 
 const random = randomFrom(3);
@@ -136,9 +138,50 @@ describe("moving windows", () => {
     const late = small.map((value, i) => (i < 10 ? 0 : value));
     const positions = Float64Array.from({ length: n }, (_, i) => i);
     // The late column's windows are zero as long as the spike is in those of the first.
-    const crossed = (first: Float64Array): number =>
+    const crossed = (first: Float64Array<ArrayBuffer>): number =>
       movingWindowProducts(storedRows([first, late]), positions, 6).values[1]!;
     expect(Math.abs(crossed(spiked) / crossed(small) - 1)).toBeLessThan(1e-13);
+  });
+});
+
+describe("rows less what follows from the row before", () => {
+  it.each([1, 2, 256, 257, 258, 700])("are x_t - A x_(t-1), %i rows", (n) => {
+    const columns = [column(n), column(n), column(n)];
+    const original = columns.map((values) => values.slice());
+    const transition = { size: 3, values: column(9) };
+    takeLessEarlier(columns, transition);
+    columns.forEach((values, j) => {
+      values.forEach((value, t) => {
+        const from = (m: number): number => (t === 0 ? 0 : transition.values[3 * j + m]! * original[m]![t - 1]!);
+        expect(value).toBeCloseTo(original[j]![t]! - from(0) - from(1) - from(2), 12);
+      });
+    });
+  });
+
+  it("are moved together where some are left out", () => {
+    const kept = keepRows([Float64Array.of(5, 6, 7, 8, 9), Float64Array.of(1, 2, 3, 4, 0)], Int32Array.of(1, 3, 4));
+    expect(kept.map((values) => [...values])).toEqual([
+      [6, 8, 9],
+      [2, 4, 0],
+    ]);
+  });
+
+  it("read rows in place where they stand together", () => {
+    const values = Float64Array.of(5, 6, 7, 8, 9);
+    expect([...rowsOf(values, Int32Array.of(1, 2, 3))]).toEqual([6, 7, 8]);
+    expect(rowsOf(values, Int32Array.of(1, 2, 3)).buffer).toBe(values.buffer);
+    expect([...rowsOf(values, Int32Array.of(1, 2, 4))]).toEqual([6, 7, 9]);
+    expect([...rowsOf(values, new Int32Array(0))]).toEqual([]);
+  });
+
+  it("combine as weights say, from rows that stand ready and from those formed on the way", () => {
+    const columns = [column(300), column(300)];
+    const basis = { columns, triangle: triangularFactor(columns) };
+    const weights = Float64Array.of(2, -3);
+    const expected = columnsOf(basisRows(basis)).map((values) => [...values]);
+    const found = combinedRows(basisRows(basis), weights);
+    found.forEach((value, i) => expect(value).toBeCloseTo(2 * expected[0]![i]! - 3 * expected[1]![i]!, 13));
+    expect([...combinedRows(storedRows(columnsOf(basisRows(basis))), weights)]).toEqual([...found]);
   });
 });
 
