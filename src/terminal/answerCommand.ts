@@ -1,12 +1,10 @@
-import type { Analyst } from "../app/analyst.ts";
+import type { Analyst, Reviewer } from "../app/analyst.ts";
 import { fingerprintOf } from "../app/fingerprint.ts";
 import type { Errand, Host } from "../app/host.ts";
 import { sheetFactsOf } from "../app/sheetFacts.ts";
 import type { Answer } from "../core/answer/answer.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";
 import type { BookData } from "../desk/book/bookData.ts";
-import { addSheets } from "../desk/files/addSheets.ts";
-import { saveXlsx } from "../desk/files/saveXlsx.ts";
 import { planAnswer } from "../sheet/answerSheet.ts";
 import type { AnswerCommand } from "./arguments.ts";
 import { answerJson } from "./answerJson.ts";
@@ -14,6 +12,7 @@ import { type BookFile, openBookFile } from "./bookFile.ts";
 import type { FileAccess } from "./fileAccess.ts";
 import { type Asked, questionOf } from "./question.ts";
 import { report } from "./report.ts";
+import { saveCopy } from "./saveCopy.ts";
 import { saveFault } from "./saveName.ts";
 
 /** A workbook opened in the desk, for as long as a command needs it. */
@@ -27,12 +26,12 @@ export interface OpenBook {
 export interface Surroundings {
   readonly files: FileAccess;
   readonly openBook: (book: BookData) => Promise<OpenBook>;
-  readonly analyst: Analyst;
+  readonly analyst: Analyst & Reviewer;
   readonly today: () => string;
   readonly version: string;
 }
 
-const quiet: Errand = { signal: new AbortController().signal, progress: () => undefined };
+export const quiet: Errand = { signal: new AbortController().signal, progress: () => undefined };
 
 /** Carries out `footing answer`. @returns what is printed on standard output. */
 export async function answerCommand(command: AnswerCommand, world: Surroundings): Promise<Result<string>> {
@@ -87,21 +86,6 @@ async function save({ opened, asked, answer, file, command }: Saving, world: Sur
   const plan = planAnswer(answer, sheetFactsOf(question, made), command.live ? "live" : "kept");
   const written = await opened.host.write(plan, quiet);
   if (!written.ok) return written;
-  const book = await opened.snapshot();
   const { sheet } = written.value;
-  const bytes = await copyWith(book, file, sheet);
-  if (!bytes.ok) return failure({ code: "unreadable-file", file: command.book, because: bytes.because });
-  const stored = await world.files.write(command.save ?? "", bytes.value);
-  return stored.ok
-    ? success(sheet)
-    : failure({ code: "unwritable-file", file: command.save ?? "", because: stored.because });
-}
-
-/** A copy of an .xlsx file keeps all that is in it; a .csv file becomes a workbook. */
-async function copyWith(book: BookData, { original }: BookFile, sheet: string): ReturnType<typeof addSheets> {
-  if (original === null) return { ok: true, value: await saveXlsx(book) };
-  return addSheets(
-    original,
-    book.sheets.filter(({ name }) => name === sheet),
-  );
+  return saveCopy({ opened, file, sheet, from: command.book, to: command.save ?? "" }, world.files);
 }

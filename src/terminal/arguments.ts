@@ -1,7 +1,6 @@
-import { parseArgs } from "node:util";
 import { settingTable } from "../core/answer/settingTable.ts";
-import { nearestName } from "../core/problem/nearestName.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";
+import { type FlagTable, type Flags, readFlags } from "./flags.ts";
 
 /** What `footing answer` was asked. Headings and ranges stay as typed: the book says which they are. */
 export interface AnswerCommand {
@@ -24,7 +23,8 @@ const saidOtherwise = ["constant"];
 
 const settingFlags = settingTable.map(({ name }) => name).filter((name) => !saidOtherwise.includes(name));
 
-const ownFlags = {
+const flagTable: FlagTable = {
+  ...Object.fromEntries(settingFlags.map((name) => [flagOf(name), { type: "string" as const }])),
   sheet: { type: "string" },
   outcome: { type: "string" },
   drivers: { type: "string", multiple: true },
@@ -35,54 +35,25 @@ const ownFlags = {
   live: { type: "boolean" },
   json: { type: "boolean" },
   help: { type: "boolean" },
-} as const;
+};
 
-const flagNames: readonly string[] = [...Object.keys(ownFlags), ...settingFlags.map(flagOf)];
-
-type Values = Readonly<Record<string, string | boolean | readonly (string | boolean)[] | undefined>>;
+/** What stands where no book is given. */
+export const bookOption = "BOOK, the workbook to read (.xlsx or .csv)";
 
 /**
  * Reads the words after `footing answer`.
  * @returns Problem "unknown-setting" for a flag that does not exist, "missing-option" where one must be given.
  */
 export function readAnswerCommand(words: readonly string[]): Result<AnswerCommand> {
-  const unknown = words.find((word) => word.startsWith("--") && !flagNames.includes(bareFlag(word)));
-  if (unknown !== undefined) {
-    return failure({
-      code: "unknown-setting",
-      setting: unknown,
-      nearest: dashed(nearestName(bareFlag(unknown), flagNames)),
-    });
-  }
-  const settingOptions = Object.fromEntries(settingFlags.map((name) => [flagOf(name), { type: "string" as const }]));
-  const { values, positionals } = parseArgs({
-    args: [...words],
-    options: { ...settingOptions, ...ownFlags },
-    allowPositionals: true,
-    strict: false,
-  });
-  return commandFrom(values, positionals);
-}
-
-const bareFlag = (word: string): string => word.replace(/^--/, "").replace(/=.*$/s, "");
-const dashed = (name: string | null): string | null => (name === null ? null : `--${name}`);
-
-function commandFrom(values: Values, positionals: readonly string[]): Result<AnswerCommand> {
-  const text = (name: string): string | null => {
-    const value = values[name];
-    return typeof value === "string" ? value : null;
-  };
+  const read = readFlags(words, flagTable);
+  if (!read.ok) return read;
+  const { text, texts, has, positionals } = read.value;
   const [book] = positionals;
   const outcome = text("outcome");
-  const drivers = texts(values["drivers"]);
-  if (book === undefined)
-    return failure({ code: "missing-option", option: "BOOK, the workbook to read (.xlsx or .csv)" });
+  const drivers = texts("drivers");
+  if (book === undefined) return failure({ code: "missing-option", option: bookOption });
   if (outcome === null) return failure({ code: "missing-option", option: "--outcome" });
   if (drivers.length === 0) return failure({ code: "missing-option", option: "--drivers" });
-  const valueless = [...Object.keys(ownFlags), ...settingFlags.map(flagOf)].find(
-    (name) => needsValue(name) && values[name] === true,
-  );
-  if (valueless !== undefined) return failure({ code: "missing-option", option: `a value after --${valueless}` });
   return success({
     book,
     sheet: text("sheet"),
@@ -90,25 +61,19 @@ function commandFrom(values: Values, positionals: readonly string[]): Result<Ans
     drivers,
     order: text("order"),
     groups: text("groups"),
-    settings: settingsFrom(values, text),
+    settings: settingsFrom(read.value),
     save: text("save"),
-    live: values["live"] === true,
-    json: values["json"] === true,
+    live: has("live"),
+    json: has("json"),
   });
 }
 
-const needsValue = (name: string): boolean =>
-  !(name in ownFlags) || ownFlags[name as keyof typeof ownFlags].type === "string";
-
-const texts = (value: Values[string]): string[] =>
-  Array.isArray(value) ? value.filter((item): item is string => typeof item === "string") : [];
-
 /** Settings given as flags. */
-function settingsFrom(values: Values, text: (name: string) => string | null): (readonly [string, string])[] {
+function settingsFrom({ text, has }: Flags): (readonly [string, string])[] {
   const given = settingFlags.flatMap((name) => {
     const value = text(flagOf(name));
     return value === null ? [] : [[name, value] as const];
   });
-  const constant = values["no-constant"] === true ? [["constant", "no"] as const] : [];
+  const constant = has("no-constant") ? [["constant", "no"] as const] : [];
   return [...given, ...constant];
 }

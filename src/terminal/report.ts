@@ -3,6 +3,7 @@ import type { Answer } from "../core/answer/answer.ts";
 import { answerTable, choiceText, verdictLines } from "../core/answer/tables.ts";
 import { listInWords } from "../core/answer/wording.ts";
 import { cautionLine } from "../sheet/plainWordsSection.ts";
+import { wrapped } from "./wrapped.ts";
 
 const mostListed = 10;
 
@@ -25,19 +26,6 @@ export function report(answer: Answer, closing: readonly string[]): string {
   ]
     .filter((line, index, lines) => line !== "" || lines[index - 1] !== "")
     .join("\n");
-}
-
-const lineLength = 100;
-
-/** Sentences wrapped at words. */
-function wrapped(sentence: string): string {
-  const lines: string[] = [];
-  for (const word of sentence.split(" ")) {
-    const last = lines.at(-1);
-    if (last !== undefined && last.length + word.length < lineLength) lines[lines.length - 1] = `${last} ${word}`;
-    else lines.push(word);
-  }
-  return lines.join("\n  ");
 }
 
 /** Drivers in columns, numbers to five significant digits. */

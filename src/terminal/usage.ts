@@ -1,4 +1,5 @@
 import { settingTable } from "../core/answer/settingTable.ts";
+import { reviewLimits } from "../core/review/reviewWords.ts";
 
 const settingLine = ({ name, values, standard, meaning }: (typeof settingTable)[number]): string =>
   `  --${name.replaceAll(" ", "-")}\n      ${meaning}\n      Takes: ${values}. Without it: ${standard}.`;
@@ -25,6 +26,21 @@ ${settingTable
   .map(settingLine)
   .join("\n")}
 
-Exit status: 0 done, 2 a fault in the input (the sentence says what and where), 1 a fault of the program.
+footing review BOOK [options]
+
+Finds every regression that a workbook reports, in formulas or typed in, fits it again to the cells it names,
+explains what differs, says which standard errors were taken and whether the evidence allows them, and what the
+conclusions should have been.
+${reviewLimits.replace(". ", ".\n")}
+
+  --sheet S            the sheet whose reports are meant; without it all sheets
+  --reported RANGE     the cells that report one regression, headings included, such as Handover!A4:D10
+  --outcome H          with --reported: the left-hand variable, where it cannot be told
+  --drivers H,H,...    with --reported: the right-hand variables, in the order of the report
+  --save OUT.xlsx      write the review sheet into a copy of the workbook
+  --json               print everything in full precision as JSON
+
+Exit status: 0 done, 3 done and a finding changes a conclusion (review), 2 a fault in the input (the sentence
+says what and where; a book without any regression is one), 1 a fault of the program.
 A statistical check, not financial, legal or audit advice; have a qualified person look before money or a filing depends on it.
 `;

@@ -26,12 +26,20 @@ export function shelf(contents: Readonly<Record<string, string | Uint8Array>>): 
   };
 }
 
-/** Runs a command line over files in memory, with the real desk and the real analysis. */
-export const terminal = (words: readonly string[], files: FileAccess): Promise<Ran> =>
+/** Runs a command line over files in memory, with the real desk and the analysis given. */
+export const terminalWith = (
+  words: readonly string[],
+  files: FileAccess,
+  analyst: typeof inlineAnalyst,
+): Promise<Ran> =>
   runTerminal(words, {
     files,
     openBook: deskBook(inlineAnalyst),
-    analyst: inlineAnalyst,
+    analyst,
     today: () => "1 December 2026",
     version: "0.0.0",
   });
+
+/** The same with the real analysis. */
+export const terminal = (words: readonly string[], files: FileAccess): Promise<Ran> =>
+  terminalWith(words, files, inlineAnalyst);
