@@ -8,7 +8,8 @@ interface Look {
   readonly size?: number;
   readonly color?: string;
   readonly fill?: string;
-  /** Colour of a thin line below. */
+  /** Colour of a thin line above, and of one below. */
+  readonly above?: string;
   readonly below?: string;
   readonly vertical?: "Top" | "Center";
 }
@@ -20,7 +21,7 @@ const line = "#9CA3AF";
 /** Text on its fill keeps a contrast of 7 to 1 or more. */
 const looks: Readonly<Record<PlanStyle, Look>> = {
   title: { bold: true, size: 16, color: ink },
-  heading: { bold: true, size: 12, color: ink, below: line },
+  heading: { bold: true, size: 12, color: ink, above: line },
   "table heading": { bold: true, color: ink, fill: "#F3F4F6", below: line, vertical: "Top" },
   label: { color: quiet, vertical: "Top" },
   note: { italic: true, color: quiet, vertical: "Top" },
@@ -31,7 +32,7 @@ const looks: Readonly<Record<PlanStyle, Look>> = {
 };
 
 export function dress(range: Excel.Range, style: PlanStyle): void {
-  const { bold, italic, size, color, fill, below, vertical } = looks[style];
+  const { bold, italic, size, color, fill, above, below, vertical } = looks[style];
   const { font } = range.format;
   if (bold !== undefined) font.bold = bold;
   if (italic !== undefined) font.italic = italic;
@@ -39,8 +40,12 @@ export function dress(range: Excel.Range, style: PlanStyle): void {
   if (color !== undefined) font.color = color;
   if (fill !== undefined) range.format.fill.color = fill;
   if (vertical !== undefined) range.format.verticalAlignment = vertical;
-  if (below === undefined) return;
-  const edge = range.format.borders.getItem("EdgeBottom");
-  edge.style = "Continuous";
-  edge.color = below;
+  if (above !== undefined) rule(range, "EdgeTop", above);
+  if (below !== undefined) rule(range, "EdgeBottom", below);
+}
+
+function rule(range: Excel.Range, edge: "EdgeTop" | "EdgeBottom", color: string): void {
+  const border = range.format.borders.getItem(edge);
+  border.style = "Continuous";
+  border.color = color;
 }

@@ -55,7 +55,7 @@ interface Filling {
   readonly errand: Errand;
 }
 
-async function fill(sheet: Excel.Worksheet, plan: SheetPlan, { name, errand }: Filling): Promise<Written> {
+export async function fill(sheet: Excel.Worksheet, plan: SheetPlan, { name, errand }: Filling): Promise<Written> {
   const { context } = sheet;
   const steps = [
     () => writeBlocks(sheet, plan.blocks),
@@ -81,12 +81,22 @@ async function fill(sheet: Excel.Worksheet, plan: SheetPlan, { name, errand }: F
   return success({ sheet: name });
 }
 
+/** Blank paper around the print, in points: half an inch, and two fifths above and below, which every printer can leave. */
+const margin = { side: 36, end: 28.8 } as const;
+
 /** Excel refuses page settings on machines without a printer; the sheet is whole without them. */
-async function layOutPage(sheet: Excel.Worksheet, { printArea }: SheetPlan): Promise<void> {
+async function layOutPage(sheet: Excel.Worksheet, { printArea, pageBreaks = [] }: SheetPlan): Promise<void> {
   try {
     if (printArea !== null) sheet.pageLayout.setPrintArea(rangeAt(sheet, printArea));
     sheet.pageLayout.orientation = "Landscape";
     sheet.pageLayout.zoom = { horizontalFitToPages: 1 };
+    sheet.pageLayout.leftMargin = margin.side;
+    sheet.pageLayout.rightMargin = margin.side;
+    sheet.pageLayout.topMargin = margin.end;
+    sheet.pageLayout.bottomMargin = margin.end;
+    for (const row of pageBreaks) {
+      sheet.horizontalPageBreaks.add(rangeAt(sheet, { row, column: 0, rows: 1, columns: 1 }));
+    }
     await sheet.context.sync();
   } catch (fault) {
     if (!isExcelFault(fault)) throw fault;

@@ -1,3 +1,4 @@
+import { pointsOf } from "../sheet/columns.ts";
 import type { Area, PlanBlock, PlanCell, PlanFormat, PlanLink, SheetPlan } from "../sheet/plan.ts";
 import { dress } from "./styles.ts";
 
@@ -65,22 +66,20 @@ function entered(cell: NonNullable<PlanCell>): string | number {
 }
 
 export function applyFormats(sheet: Excel.Worksheet, formats: readonly PlanFormat[]): void {
-  for (const { area, style, numberFormat, wrap, align, merge, rowHeight } of formats) {
+  for (const { area, style, numberFormat, wrap, align, indent, merge, rowHeight } of formats) {
     const range = rangeAt(sheet, area);
     // One format for all cells is given bare, which the library's types do not say.
     if (numberFormat !== undefined) Object.assign(range, { numberFormat });
     if (style !== undefined) dress(range, style);
     if (wrap !== undefined) range.format.wrapText = wrap;
     if (align !== undefined) range.format.horizontalAlignment = alignments[align];
+    if (indent !== undefined) range.format.indentLevel = indent;
     if (merge === true) range.merge(false);
     if (rowHeight !== undefined) range.format.rowHeight = rowHeight;
   }
 }
 
 const alignments = { left: "Left", right: "Right", center: "Center" } as const;
-
-/** A character of the normal font is 7 pixels wide, with 5 around the text; Excel's API counts in points of 4/3 pixels. */
-const pointsOf = (characters: number): number => (characters * 7 + 5) * 0.75;
 
 export function setWidths(sheet: Excel.Worksheet, widths: SheetPlan["columnWidths"]): void {
   for (const [column, characters] of widths.entries()) {

@@ -1,20 +1,21 @@
 import type { Answer } from "../core/answer/answer.ts";
-import { chartRows, residualChart, intervalChart } from "./charts.ts";
-import { chartColumn, chartColumns, page, pageWidths } from "./columns.ts";
+import { chartsAt, chartsSection } from "./chartsSection.ts";
+import { page, pageWidths } from "./columns.ts";
 import { driversSection } from "./driversSection.ts";
 import { evidenceSection } from "./evidenceSection.ts";
 import { type Figures, keptFigures, liveFigures } from "./figures.ts";
 import { fourCasesSection } from "./fourCasesSection.ts";
 import { guardsSection } from "./guardsSection.ts";
 import { type SheetFacts, howMadeSection, settingsArea } from "./howMadeSection.ts";
+import { pageBreaksOf } from "./pageBreaks.ts";
 import type { SheetPlan } from "./plan.ts";
 import { titleSection, verdictSection } from "./plainWordsSection.ts";
 import { rectangle, stack } from "./section.ts";
 
 export type SheetKind = "live" | "kept";
 
-/** Order of the parts on the page; charts stand beside the parts named here. */
-const part = { title: 0, verdict: 1, fourCases: 2, drivers: 3, evidence: 4, guards: 5, howMade: 6 } as const;
+/** The place, in the order of the parts on the page, of those that others look for. */
+const part = { charts: 4, evidence: 5, howMade: 7 } as const;
 
 /**
  * Lays an answer out on a sheet that someone who was not there can read and redo.
@@ -24,11 +25,9 @@ const part = { title: 0, verdict: 1, fourCases: 2, drivers: 3, evidence: 4, guar
  */
 export function planAnswer(answer: Answer, facts: SheetFacts, kind: SheetKind): SheetPlan {
   const figures = kind === "kept" ? keptFigures(answer) : liveWithSettings(answer, facts);
-  const { rows, formats, links, starts } = stack(partsOf(answer, facts, figures));
-  const charts = [
-    residualChart(answer, starts[part.fourCases] ?? 0),
-    intervalChart(answer, (starts[part.fourCases] ?? 0) + chartRows + 1),
-  ];
+  const parts = partsOf(answer, facts, figures);
+  const { rows, formats, links, starts } = stack(parts);
+  const charts = chartsAt(answer, starts[part.charts]!);
   return {
     name: sheetName(answer.outcome),
     blocks: [
@@ -41,7 +40,12 @@ export function planAnswer(answer: Answer, facts: SheetFacts, kind: SheetKind): 
     columnWidths: pageWidths,
     frozenRows: 1,
     charts: charts.map(({ chart }) => chart),
-    printArea: { row: 0, column: 0, rows: rows.length, columns: chartColumn + chartColumns },
+    // One blank row follows each part.
+    pageBreaks: pageBreaksOf(
+      parts.map((one, index) => ({ rows: one.rows.length + 1, whole: index !== part.evidence })),
+      formats,
+    ),
+    printArea: { row: 0, column: 0, rows: rows.length, columns: page.columns },
   };
 }
 
@@ -50,6 +54,7 @@ const partsOf = (answer: Answer, facts: SheetFacts, figures: Figures) => [
   verdictSection(answer, figures),
   fourCasesSection(answer, figures),
   driversSection(answer, figures),
+  chartsSection(answer, figures.blocks.length > 0),
   evidenceSection(answer, figures),
   guardsSection(answer),
   howMadeSection(answer, facts),

@@ -1,23 +1,30 @@
 /**
- * The columns of a result sheet, counted from 0. The page a reader sees runs from `first` to `last`, charts stand
- * beside it, the numbers behind the charts and the spilled results of a live sheet further right, under their own headings.
+ * The columns of a result sheet, counted from 0. The page that is read and printed runs from `first` to `last`, charts
+ * included; the numbers behind the charts and the spilled results of a live sheet stand further right, under their own
+ * headings.
  */
 export const page = { first: 0, last: 10, columns: 11 } as const;
-export const chartColumn = 12;
-export const chartColumns = 9;
-export const chartDataColumn = 24;
+export const chartDataColumn = 13;
 export const liveColumn = 40;
 
-/** Widths in characters: the names, ten columns of figures, a gutter, the charts' columns. */
-export const pageWidths: readonly number[] = [30, 28, 16, 14, 16, 12, 13, 14, 13, 13, 32, 2];
+/** Widths in characters: the names, nine columns of figures, the words at the end; then a gutter. */
+export const pageWidths: readonly number[] = [28, 14, 13, 13, 14, 12, 11, 13, 12, 12, 34, 3];
 
-/** In points. */
-const lineHeight = 15;
+/** A character of the normal font is 7 pixels wide, with 5 around the text; a point is 4/3 pixels. */
+export const pointsOf = (characters: number): number => (characters * 7 + 5) * 0.75;
+
+/** Of a standard row, in points. */
+export const lineHeight = 15;
 /** A column's width counts digits; letters are narrower on the average. A margin is left, since fonts differ. */
 const digitsALetter = 0.95;
 
-/** Height in points of a text wrapped over the columns from `first` on, by default over the whole page. */
-export function sentenceHeight(sentence: string, first: number = page.first): number {
-  const characters = pageWidths.slice(first, page.last + 1).reduce((sum, width) => sum + width, 0);
-  return lineHeight * Math.max(1, Math.ceil((sentence.length * digitsALetter) / characters));
-}
+/** Height in points of a text wrapped over so many characters. */
+export const textHeight = (text: string, characters: number): number =>
+  lineHeight * Math.max(1, Math.ceil((text.length * digitsALetter) / characters));
+
+/** Height in points of a text wrapped over the columns from `first` to `last`, by default over the whole page. */
+export const wrappedHeight = (text: string, first: number = page.first, last: number = page.last): number =>
+  textHeight(
+    text,
+    pageWidths.slice(first, last + 1).reduce((sum, width) => sum + width, 0),
+  );

@@ -1,47 +1,111 @@
 import type { Answer } from "../core/answer/answer.ts";
 import { evidenceTable } from "../core/answer/tables.ts";
-import { page, sentenceHeight } from "./columns.ts";
+import { page, wrappedHeight } from "./columns.ts";
 import type { Figures } from "./figures.ts";
 import { figureFormat, numberHeadingFormat, pValueFormat } from "./numberFormats.ts";
 import { headingFormat } from "./plainWordsSection.ts";
-import type { PlanFormat } from "./plan.ts";
+import type { PlanCell, PlanFormat } from "./plan.ts";
 import { type Section, section, text } from "./section.ts";
 
-/** Columns of the evidence table that hold statistics, p-values and the reading, which runs to the page's end. */
-const statistics = [2, 5];
-const pValues = [4, 7];
-const reading = 8;
+type Row = readonly (string | number)[];
+
+/** Where each column of the evidence table stands on the page, and how far it runs. */
+const places = [
+  { first: 0, last: 0 },
+  { first: 1, last: 2 },
+  { first: 3, last: 3 },
+  { first: 4, last: 4 },
+  { first: 5, last: 5 },
+  { first: 6, last: 6 },
+  { first: 7, last: 7 },
+  { first: 8, last: 8 },
+  { first: 9, last: 10 },
+] as const;
+
+/** Columns of the table that hold statistics, p-values and words. */
+const statistics = [2, 5] as const;
+const pValues = [4, 7] as const;
+const laws = [3, 6] as const;
+const words = [0, 1, 8] as const;
 
 /** All tests with their readings, then the fit as a whole. */
 export function evidenceSection(answer: Answer, figures: Figures): Section {
   const [headings = [], ...body] = evidenceTable(answer);
-  const rows = body.map((row, index) => row.map((_, column) => figures.evidence(index + 1, column)));
-  const cell = (row: number, column: number, numberFormat: string): PlanFormat => ({
-    area: { row, column, rows: 1, columns: 1 },
-    numberFormat,
-    align: "right",
-  });
-  const figureFormats = body.flatMap((row, index) => [
-    ...statistics.map((at) => cell(index + 2, at, figureFormat(row[at]))),
-    ...pValues.map((at) => cell(index + 2, at, pValueFormat)),
-  ]);
-  const readings = body.map((row, index): PlanFormat => ({
-    area: { row: index + 2, column: reading, rows: 1, columns: page.columns - reading },
-    merge: true,
-    wrap: true,
-    align: "left",
-    rowHeight: sentenceHeight(String(row[reading] ?? ""), reading),
-  }));
+  const count = body.findIndex(isFitRow);
+  const tests = body.slice(0, count);
+  const fit = body.slice(count);
+  const fitRow = tests.length + 2;
   return section(
-    [[text("Evidence")], headings.map((heading) => text(String(heading))), ...rows],
     [
-      headingFormat(0),
-      { area: { row: 1, column: 0, rows: 1, columns: page.columns }, style: "table heading" },
-      ...[...statistics, ...pValues].map((at) => cell(1, at, numberHeadingFormat)),
-      { area: { row: 2, column: 0, rows: body.length, columns: page.columns }, style: "sentence" },
-      { area: { row: 2, column: 0, rows: body.length, columns: 1 }, style: "label" },
-      ...figureFormats,
-      ...readings,
+      [text("Evidence")],
+      placed(headings.map((heading) => text(String(heading)))),
+      ...tests.map((row, index) => placed(row.map((_, column) => figures.evidence(index + 1, column)))),
+      [text("The fit as a whole")],
+      ...fit.map((_, index) => [figures.evidence(count + index + 1, 0), figures.evidence(count + index + 1, 2)]),
     ],
+    [headingFormat(0), ...headingFormats, ...testFormats(tests), ...fitFormats(fit, fitRow)],
   );
 }
+
+/** Rows about the fit as a whole have one figure and nothing beside it. */
+const isFitRow = (row: Row): boolean => row.every((value, column) => column === 0 || column === 2 || value === "");
+
+/** The cells of a row of the table on the columns of the page. */
+function placed(cells: readonly PlanCell[]): PlanCell[] {
+  const row = Array.from({ length: page.columns }, (): PlanCell => null);
+  cells.forEach((cell, column) => {
+    row[places[column]!.first] = cell;
+  });
+  return row;
+}
+
+const cellFormat = (row: number, column: number, format: Omit<PlanFormat, "area">): PlanFormat => {
+  const { first, last } = places[column]!;
+  const columns = last - first + 1;
+  return { area: { row, column: first, rows: 1, columns }, ...format, ...(columns > 1 ? { merge: true } : {}) };
+};
+
+/** Words that stand right of a figure keep their distance from it. */
+const apart = { align: "left", indent: 1 } as const;
+const figure = (numberFormat: string) => ({ numberFormat, align: "right" }) as const;
+
+const headingFormats: readonly PlanFormat[] = [
+  { area: { row: 1, column: 0, rows: 1, columns: page.columns }, style: "table heading" },
+  ...[...statistics, ...pValues].map((column) => cellFormat(1, column, figure(numberHeadingFormat))),
+  ...laws.map((column) => cellFormat(1, column, apart)),
+  cellFormat(1, 1, {}),
+  cellFormat(1, 8, apart),
+];
+
+const testFormats = (tests: readonly Row[]): PlanFormat[] => [
+  { area: { row: 2, column: 0, rows: tests.length, columns: page.columns }, style: "sentence" },
+  { area: { row: 2, column: 0, rows: tests.length, columns: 1 }, style: "label" },
+  ...tests.flatMap((row, index) => rowFormats(row, index + 2)),
+];
+
+const rowFormats = (row: Row, at: number): PlanFormat[] => [
+  ...statistics.map((column) => cellFormat(at, column, figure(figureFormat(row[column])))),
+  ...pValues.map((column) => cellFormat(at, column, figure(pValueFormat))),
+  ...laws.map((column) => cellFormat(at, column, apart)),
+  cellFormat(at, 0, { wrap: true }),
+  cellFormat(at, 1, { wrap: true, align: "left" }),
+  cellFormat(at, 8, { ...apart, wrap: true, rowHeight: heightOf(row) }),
+];
+
+/** The tallest of the texts in a row. */
+const heightOf = (row: Row): number =>
+  Math.max(
+    ...words.map((column) => {
+      const { first, last } = places[column];
+      return wrappedHeight(String(row[column] ?? ""), first, last);
+    }),
+  );
+
+const fitFormats = (fit: readonly Row[], row: number): PlanFormat[] => [
+  { area: { row, column: 0, rows: 1, columns: 2 }, style: "table heading" },
+  { area: { row: row + 1, column: 0, rows: fit.length, columns: 1 }, style: "label" },
+  ...fit.map((values, index): PlanFormat => ({
+    area: { row: row + 1 + index, column: 1, rows: 1, columns: 1 },
+    ...figure(figureFormat(values[2])),
+  })),
+];

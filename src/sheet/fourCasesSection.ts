@@ -1,4 +1,5 @@
 import type { Answer } from "../core/answer/answer.ts";
+import { page, wrappedHeight } from "./columns.ts";
 import type { Figures } from "./figures.ts";
 import { pValueFormat } from "./numberFormats.ts";
 import { headingFormat } from "./plainWordsSection.ts";
@@ -22,7 +23,14 @@ export function fourCasesSection(answer: Answer, figures: Figures): Section {
   ];
   const table = decided.length === 0 ? [] : caseTable(answer, figures);
   const inForce: PlanCell[] = [text("In force"), figures.choice()];
-  const rows = [...table, ...decided, inForce, [text("Policy"), text(answer.decision.policy)], ...overrideRow(answer)];
+  const override = answer.decision.override;
+  const rows = [
+    ...table,
+    ...decided,
+    inForce,
+    [text("Policy"), text(answer.decision.policy)],
+    ...overrideRow(override),
+  ];
   return section(
     [[text(heading)], ...rows],
     [
@@ -34,9 +42,18 @@ export function fourCasesSection(answer: Answer, figures: Figures): Section {
         numberFormat: pValueFormat,
         align: "left",
       },
+      ...(override === null ? [] : [reasonFormat(rows.length, override)]),
     ],
   );
 }
+
+const reasonFormat = (row: number, reason: string): PlanFormat => ({
+  area: { row, column: 1, rows: 1, columns: page.columns - 1 },
+  merge: true,
+  wrap: true,
+  align: "left",
+  rowHeight: wrappedHeight(reason, 1),
+});
 
 const tableHeading: PlanFormat = { area: { row: 1, column: 0, rows: 1, columns: 7 }, style: "table heading" };
 
@@ -58,5 +75,5 @@ const decidedRow = (label: string, row: number, figures: Figures): PlanCell[] =>
   figures.evidence(row, question.level),
 ];
 
-const overrideRow = ({ decision }: Answer): PlanCell[][] =>
-  decision.override === null ? [] : [[text("Fixed by hand, reason"), text(decision.override)]];
+const overrideRow = (reason: string | null): PlanCell[][] =>
+  reason === null ? [] : [[text("Fixed by hand, reason"), text(reason)]];

@@ -1,5 +1,5 @@
 import type { Answer } from "../core/answer/answer.ts";
-import { page, sentenceHeight } from "./columns.ts";
+import { page, wrappedHeight } from "./columns.ts";
 import { formatFor, numberHeadingFormat } from "./numberFormats.ts";
 import { headingFormat } from "./plainWordsSection.ts";
 import type { PlanCell, PlanFormat, PlanLink } from "./plan.ts";
@@ -48,7 +48,7 @@ function sentenceRows({ guards }: Answer): { rows: PlanCell[][]; formats: PlanFo
         style: "sentence",
         merge: true,
         wrap: true,
-        rowHeight: sentenceHeight(sentence, 1),
+        rowHeight: wrappedHeight(sentence, 1),
       },
     ]),
   };
@@ -68,7 +68,13 @@ function tableFormats(row: number, count: number): PlanFormat[] {
   const figures = { column: 1, columns: rowHeadings.length - 1 };
   return [
     { area: { row, column: 0, rows: 1, columns: rowHeadings.length }, style: "table heading" },
-    { area: { row, rows: 1, ...figures }, align: "right", numberFormat: numberHeadingFormat },
+    {
+      area: { row, rows: 1, ...figures },
+      align: "right",
+      numberFormat: numberHeadingFormat,
+      wrap: true,
+      rowHeight: 30,
+    },
     { area: { row: row + 1, rows: count, ...figures }, align: "right", numberFormat: formatFor([1]) },
   ];
 }

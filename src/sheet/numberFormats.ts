@@ -13,8 +13,8 @@ export function formatFor(values: readonly number[]): string {
   return decimals === 0 ? `#,##0${room}` : `#,##0.${"0".repeat(decimals)}${room}`;
 }
 
-/** p-values: the cell holds every digit, the format says "under 0.0001" where four decimals would show zeros. */
-export const pValueFormat = `[<0.0001]"under 0.0001"${room};0.0000${room}`;
+/** p-values: the cell holds every digit, the format says "< 0.0001" where four decimals would show zeros. */
+export const pValueFormat = `[<0.0001]"< 0.0001"${room};0.0000${room}`;
 
 export const ratioFormat = `0.00${room}`;
 const countFormat = `#,##0${room}`;

@@ -1,6 +1,6 @@
 import type { Answer } from "../core/answer/answer.ts";
 import { verdictLines } from "../core/answer/tables.ts";
-import { page, sentenceHeight } from "./columns.ts";
+import { page, wrappedHeight } from "./columns.ts";
 import type { Figures } from "./figures.ts";
 import type { SheetFacts } from "./howMadeSection.ts";
 import type { PlanFormat } from "./plan.ts";
@@ -10,13 +10,23 @@ import { type Section, section, text } from "./section.ts";
 export const cautionLine =
   "A statistical check, not financial, legal or audit advice; have a qualified person look before money or a filing depends on it.";
 
-/** In points: the title is larger than a standard row. */
+/** In points: the title is larger than a standard row, and its letters wider than those that columns are measured in. */
 const titleHeight = 28;
+const titleLetters = 105;
 
 export const titleSection = (answer: Answer, { date, version }: SheetFacts): Section =>
   section(
     [[text(answer.title)], [text(`${date}. Made with Footing ${version}.`)], [text(cautionLine)]],
-    [{ ...acrossPage(0, "title"), rowHeight: titleHeight }, acrossPage(1, "note"), acrossPage(2, "caution")],
+    [
+      {
+        ...acrossPage(0, "title"),
+        merge: true,
+        wrap: true,
+        rowHeight: titleHeight * Math.ceil(answer.title.length / titleLetters),
+      },
+      acrossPage(1, "note"),
+      acrossPage(2, "caution"),
+    ],
   );
 
 const acrossPage = (row: number, style: NonNullable<PlanFormat["style"]>, rows = 1): PlanFormat => ({
@@ -36,7 +46,7 @@ export function verdictSection(answer: Answer, figures: Figures): Section {
     ...acrossPage(line + 1, "sentence"),
     merge: true,
     wrap: true,
-    rowHeight: sentenceHeight(lines[line] ?? ""),
+    rowHeight: wrappedHeight(lines[line] ?? ""),
   }));
   return section([[text("In plain words")], ...rows], [acrossPage(0, "heading"), ...formats]);
 }

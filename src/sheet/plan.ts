@@ -12,6 +12,8 @@ export interface SheetPlan {
   readonly charts: readonly ChartPlan[];
   /** What is printed, one page wide and lying; null prints all. */
   readonly printArea: Area | null;
+  /** Rows that a new page begins with, so that what belongs together is not parted. */
+  readonly pageBreaks?: readonly number[];
 }
 
 export interface Area {
@@ -54,6 +56,8 @@ export interface PlanFormat {
   readonly numberFormat?: string;
   readonly wrap?: boolean;
   readonly align?: "left" | "right" | "center";
+  /** Blank before a text that stands left, in steps of about three characters. */
+  readonly indent?: number;
   /** Cells joined into one, for sentences that run over several columns. */
   readonly merge?: boolean;
   /** Height of each row in points, for wrapped sentences. */
@@ -68,17 +72,33 @@ export interface PlanLink {
   readonly target: string;
 }
 
+export interface AxisEnds {
+  readonly minimum: number;
+  readonly maximum: number;
+}
+
+/** What a series is on the page: the data, what is in force, what stands beside it, or a line to measure by. */
+export type SeriesLook = "data" | "in force" | "beside" | "mark";
+
 export interface ChartPlan {
   readonly title: string;
   readonly kind: "scatter" | "lines";
   readonly place: Area;
   readonly xTitle: string;
   readonly yTitle: string;
+  /** Ends of the axes; absent leaves them to the host. */
+  readonly xRange?: AxisEnds;
+  readonly yRange?: AxisEnds;
+  /** Whether the upright axis goes without numbers, because it counts nothing. */
+  readonly yHidden?: boolean;
+  readonly legend: boolean;
   /** Areas on the same sheet; x and y of a series are columns of equal height. */
   readonly series: readonly {
     readonly name: string;
     readonly x: Area;
     readonly y: Area;
-    readonly drawn: "points" | "line";
+    /** A name is written to the right of each point, in its place. */
+    readonly drawn: "points" | "line" | "name";
+    readonly look: SeriesLook;
   }[];
 }

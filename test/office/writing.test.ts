@@ -43,11 +43,13 @@ const plan: SheetPlan = {
   formats: [
     { area: { row: 0, column: 0, rows: 1, columns: 3 }, style: "title", merge: true, wrap: true, rowHeight: 40 },
     { area: { row: 1, column: 1, rows: 2, columns: 2 }, numberFormat: "0.000", align: "right" },
+    { area: { row: 2, column: 2, rows: 1, columns: 1 }, indent: 1 },
     { area: { row: 1, column: 0, rows: 1, columns: 3 }, style: "in force" },
     { area: { row: 2, column: 0, rows: 1, columns: 3 }, style: "table heading" },
   ],
   links: [{ row: 3, column: 0, text: "Data!A3", target: "Data!A3" }],
   columnWidths: [24, 12, 12],
+  pageBreaks: [9],
   frozenRows: 1,
   charts: [
     {
@@ -56,18 +58,30 @@ const plan: SheetPlan = {
       place: { row: 1, column: 8, rows: 14, columns: 6 },
       xTitle: "Fitted",
       yTitle: "Residual",
+      xRange: { minimum: -10, maximum: 5 },
+      yHidden: true,
+      legend: true,
       series: [
         {
           name: "Residuals",
           x: { row: 5, column: 4, rows: 4, columns: 1 },
           y: { row: 5, column: 5, rows: 4, columns: 1 },
           drawn: "points",
+          look: "data",
         },
         {
           name: "Zero",
           x: { row: 5, column: 4, rows: 2, columns: 1 },
           y: { row: 7, column: 5, rows: 2, columns: 1 },
           drawn: "line",
+          look: "mark",
+        },
+        {
+          name: "Rain",
+          x: { row: 5, column: 4, rows: 1, columns: 1 },
+          y: { row: 6, column: 5, rows: 1, columns: 1 },
+          drawn: "name",
+          look: "mark",
         },
       ],
     },
@@ -116,15 +130,19 @@ describe("writing a plan", () => {
     };
     expect(styleAt(0, 0)).toMatchObject({ bold: true, size: 16, wrap: true });
     expect(styleAt(1, 1)).toMatchObject({ bold: true, fill: "#dbeafe", numberFormat: "0.000", horizontal: "right" });
-    expect(styleAt(2, 2)).toMatchObject({ fill: "#f3f4f6", numberFormat: "0.000" });
+    expect(styleAt(2, 2)).toMatchObject({ fill: "#f3f4f6", numberFormat: "0.000", indent: 1 });
     expect(styleAt(2, 0)?.lineBelow).toBeDefined();
     expect(sheet.merges).toEqual(["A1:C1"]);
     expect(sheet.columnWidths.slice(0, 3).map((width) => Math.round(width ?? 0))).toEqual([24, 12, 12]);
   });
 
   it("lays out page, links and what stays in view", () => {
-    expect(sheet).toMatchObject({ frozenRows: 1, printArea: "A1:N18", onePageWide: true });
+    expect(sheet).toMatchObject({ frozenRows: 1, printArea: "A1:N18", onePageWide: true, pageBreaks: [9] });
     expect(sheet.links).toEqual([{ cell: "A4", target: "Data!A3" }]);
+  });
+
+  it("leaves half an inch of paper at the sides", () => {
+    expect(sheet.margins).toMatchObject({ left: 36, right: 36 });
   });
 
   it("draws the charts with their own series alone", () => {
@@ -133,6 +151,9 @@ describe("writing a plan", () => {
       title: "Residuals over fitted values",
       xTitle: "Fitted",
       yTitle: "Residual",
+      xRange: { minimum: -10, maximum: 5 },
+      yHidden: true,
+      legend: true,
       series: [
         {
           name: "Residuals",
@@ -142,6 +163,7 @@ describe("writing a plan", () => {
           markers: true,
         },
         { name: "Zero", x: "'Repairs answer'!$E$6:$E$7", y: "'Repairs answer'!$F$8:$F$9", line: true, markers: false },
+        { name: "Rain", line: false, markers: false, label: "name" },
       ],
     });
   });

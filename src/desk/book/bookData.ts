@@ -30,6 +30,8 @@ export interface SheetData {
   readonly printArea: string | null;
   readonly onePageWide: boolean;
   readonly landscape?: boolean;
+  /** Rows, counted from 0, that a new page begins with. */
+  readonly pageBreaks?: readonly number[];
   /** In points; absent leaves the usual ones. */
   readonly margins?: PageMargins;
   readonly links: readonly { readonly cell: string; readonly target: string }[];

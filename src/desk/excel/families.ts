@@ -15,6 +15,7 @@ import { range } from "./range.ts";
 import { rangeAreas, rangeCollection, rangeView } from "./rangeAreas.ts";
 import { rangeBorder, rangeBorders, rangeFill, rangeFont, rangeFormat } from "./rangeFormat.ts";
 import { customXmlPart, customXmlParts, oneSetting, scopedXmlParts, settings } from "./settings.ts";
+import { pageBreak, pageBreaks } from "./pageBreaks.ts";
 import { customProperties, customProperty, freezePanes, pageLayout } from "./sheetParts.ts";
 import { tableColumn, tableColumns } from "./tableColumns.ts";
 import { scopedTables, table, tableCollection } from "./tables.ts";
@@ -35,6 +36,8 @@ export const families: { readonly [T in keyof States]: Family<States[T]> } = {
   WorksheetProtection: worksheetProtection,
   WorksheetFreezePanes: freezePanes,
   PageLayout: pageLayout,
+  PageBreakCollection: pageBreaks,
+  PageBreak: pageBreak,
   WorksheetCustomPropertyCollection: customProperties,
   WorksheetCustomProperty: customProperty,
   Range: range,

@@ -15,6 +15,8 @@ export interface States {
   WorksheetProtection: OnSheet;
   WorksheetFreezePanes: OnSheet;
   PageLayout: OnSheet;
+  PageBreakCollection: OnSheet;
+  PageBreak: OnBreak;
   WorksheetCustomPropertyCollection: OnSheet;
   WorksheetCustomProperty: OnSheet & { readonly key: string };
   Range: Area;
@@ -57,6 +59,9 @@ export interface States {
 
 export interface OnSheet {
   readonly sheet: string;
+}
+export interface OnBreak extends OnSheet {
+  readonly row: number;
 }
 export interface OnTable {
   readonly id: string;

@@ -58,6 +58,7 @@ export const worksheet: Family<OnSheet> = {
     Protection: (state) => hold("WorksheetProtection", state),
     FreezePanes: (state) => hold("WorksheetFreezePanes", state),
     PageLayout: (state) => hold("PageLayout", state),
+    HorizontalPageBreaks: (state) => hold("PageBreakCollection", state),
     CustomProperties: (state) => hold("WorksheetCustomPropertyCollection", state),
   },
   call: {

@@ -147,14 +147,20 @@ export const chartParts = /^xl\/charts\/[^/]+\.xml$/;
 
 /**
  * The chart part with what the file library has no words for: series that are points alone (spreadsheets join
- * the points of a series that says nothing), and axis and grid lines, which some programs leave out unless told.
+ * the points of a series that says nothing, and some in curves), and axis and grid lines, which some programs leave out unless told.
  */
 export function finishedChart(part: string): string {
   return part
-    .replace(/<c:ser>.*?<\/c:ser>/gs, withoutLine)
+    .replace(/<c:ser>.*?<\/c:ser>/gs, (series) => straight(withoutLine(series)))
     .replaceAll("<c:majorGridlines/>", `<c:majorGridlines>${lineOf("D5DBE1")}</c:majorGridlines>`)
     .replaceAll("<c:crossAx ", `${lineOf("7B8794")}<c:crossAx `);
 }
+
+/** Some programs round the corners of a line through points unless told not to. */
+const straight = (series: string): string =>
+  series.includes("<c:xVal>") && !series.includes("<c:smooth")
+    ? series.replace("</c:ser>", '<c:smooth val="0"/></c:ser>')
+    : series;
 
 function withoutLine(series: string): string {
   const [before = "", after = ""] = series.split("<c:marker>");

@@ -77,6 +77,7 @@ function toSheet(sheet: Sheet, usual: UsualLooks): SheetData {
     tables: tables.flatMap(({ name: table, range }) => (range === undefined ? [] : [{ name: table, address: range }])),
     charts: charts.map(toBookChart).filter((chart) => chart !== null),
     ...printingOf(sheet.pageSetup),
+    ...((sheet.rowBreaks ?? []).length > 0 && { pageBreaks: sheet.rowBreaks!.map((last) => last + 1) }),
     links: linksOf(sheet),
   };
 }

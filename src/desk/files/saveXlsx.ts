@@ -80,6 +80,7 @@ function toFileSheet(sheet: SheetData): WriteSheet {
     charts: sheet.charts.map(toFileChart),
     ...(sheet.frozenRows > 0 && { freezePane: { rows: sheet.frozenRows } }),
     ...(sheet.protected && { protection: { sheet: true } }),
+    ...(sheet.pageBreaks !== undefined && { rowBreaks: sheet.pageBreaks.map(rowBefore) }),
     pageSetup: {
       ...(printArea !== null && { printArea: absolute(printArea) }),
       ...(sheet.landscape === true && { orientation: "landscape" }),
@@ -97,6 +98,9 @@ function columnDefsOf({ columnWidths, hiddenColumns = [] }: SheetData): ColumnDe
     return { ...(width !== undefined && { width }), ...(hidden.has(column) && { hidden: true }) };
   });
 }
+
+/** The file library names the last row of a page. */
+const rowBefore = (row: number): number => row - 1;
 
 function rowDefsOf({ rowHeights = [], hiddenRows }: SheetData): Map<number, RowDef> {
   const rowDefs = new Map<number, RowDef>();

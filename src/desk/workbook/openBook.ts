@@ -67,6 +67,7 @@ function toRecord(sheet: SheetData): SheetRecord {
     onePageWide: sheet.onePageWide,
     landscape: sheet.landscape ?? false,
     margins: sheet.margins ?? null,
+    pageBreaks: [...(sheet.pageBreaks ?? [])],
   };
 }
 

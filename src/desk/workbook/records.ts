@@ -13,6 +13,8 @@ export interface SheetRecord {
   onePageWide: boolean;
   landscape: boolean;
   margins: PageMargins | null;
+  /** Rows, counted from 0, that a new page begins with. */
+  readonly pageBreaks: number[];
 }
 
 export interface TableRecord {
@@ -97,5 +99,6 @@ export function emptySheetRecord(): SheetRecord {
     onePageWide: false,
     landscape: false,
     margins: null,
+    pageBreaks: [],
   };
 }

@@ -52,6 +52,7 @@ function sheetData(book: Book, sheet: string): SheetData {
     printArea: record.printArea,
     onePageWide: record.onePageWide,
     ...(record.landscape ? { landscape: true } : {}),
+    ...(record.pageBreaks.length === 0 ? {} : { pageBreaks: [...record.pageBreaks] }),
     ...(record.margins === null ? {} : { margins: record.margins }),
     links: [...record.links].map(([place, { target }]) => ({ cell: cellName(place), target })),
     ...(customProperties.size === 0 ? {} : { customProperties: Object.fromEntries(customProperties) }),

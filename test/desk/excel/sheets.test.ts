@@ -161,6 +161,8 @@ describe("sheets", () => {
       sheet.pageLayout.zoom = { horizontalFitToPages: 1 };
       sheet.pageLayout.orientation = "Landscape";
       sheet.pageLayout.leftMargin = 30;
+      sheet.horizontalPageBreaks.add("A12");
+      sheet.horizontalPageBreaks.add("A5");
       sheet.customProperties.add("model", "42");
       sheet.showGridlines = false;
     })();
@@ -169,6 +171,7 @@ describe("sheets", () => {
       printArea: "A1:D20",
       onePageWide: true,
       landscape: true,
+      pageBreaks: [4, 11],
       margins: { left: 30, right: 50.4, top: 54, bottom: 54 },
       customProperties: { model: "42" },
     });

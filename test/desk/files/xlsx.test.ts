@@ -85,6 +85,7 @@ describe("a workbook saved and opened again", () => {
       printArea: "A1:F40",
       onePageWide: true,
       landscape: true,
+      pageBreaks: [12, 30],
       margins: { left: 36, right: 36, top: 45, bottom: 54 },
       links: [
         { cell: "B1", target: "https://example.com/stock" },
@@ -116,6 +117,12 @@ describe("a workbook saved and opened again", () => {
 });
 
 describe("what is to be printed", () => {
+  it("breaks after the row that ends a page, which spreadsheets count from 1", async () => {
+    const sheet = { ...blankSheet("Shops", [[1]]), pageBreaks: [7] };
+    const part = textOf(unpack(await saveXlsx(bookOf(sheet)))["xl/worksheets/sheet1.xml"]!);
+    expect(part).toMatch(/<brk id="7" /);
+  });
+
   it.each([
     ["Shops", "'Shops'!$A$1:$B$9"],
     ["Repairs answer", "'Repairs answer'!$A$1:$B$9"],

@@ -28,6 +28,7 @@ const book: BookData = {
         printArea: "A1:D20",
         onePageWide: true,
         landscape: true,
+        pageBreaks: [8],
         margins: { left: 30, right: 36, top: 40, bottom: 54 },
         links: [{ cell: "B2", target: "Other!A1" }],
         customProperties: { model: "7" },
