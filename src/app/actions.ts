@@ -2,6 +2,7 @@ import type { SheetKind } from "../sheet/answerSheet.ts";
 import type { LostColumn } from "./carrying.ts";
 import type { DataInHand } from "./dataInHand.ts";
 import type { DataPlace, Progress } from "./host.ts";
+import type { ReviewAction } from "./review/actions.ts";
 import type { ColumnDetails, Role, Setup } from "./setup.ts";
 import type { Answered, Busy, Fault, Section } from "./state.ts";
 import type { StoredAction } from "./stored/actions.ts";
@@ -9,6 +10,7 @@ import type { StoredAction } from "./stored/actions.ts";
 /** Everything that can happen to the pane. */
 export type Action =
   | StoredAction
+  | ReviewAction
   | { readonly kind: "shown"; readonly section: Section }
   | { readonly kind: "places found"; readonly places: readonly DataPlace[] }
   | { readonly kind: "started"; readonly on: Busy["with"] }

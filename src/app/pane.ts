@@ -1,11 +1,12 @@
 import type { SheetKind } from "../sheet/answerSheet.ts";
 import type { Action } from "./actions.ts";
-import type { Analyst } from "./analyst.ts";
+import type { Analyst, Reviewer } from "./analyst.ts";
 import { findAnswer } from "./answering.ts";
 import { createErrands } from "./errands.ts";
 import type { Host, WhereToRead } from "./host.ts";
 import { listPlaces, readData } from "./reading.ts";
 import { reduce } from "./reduce.ts";
+import { type ReviewCommands, reviewCommands } from "./review/commands.ts";
 import { keepSheet, recalculateSheet } from "./sheetInFront.ts";
 import { type Store, createStore } from "./store.ts";
 import { type PaneState, emptyState } from "./state.ts";
@@ -18,7 +19,7 @@ import type { Work } from "./work.ts";
 
 export interface PaneParts {
   readonly host: Host;
-  readonly analyst: Analyst;
+  readonly analyst: Analyst & Reviewer;
   readonly edition: Edition;
   /** Runs work and tells the pane of a fault of ours: the entry's one place to catch. */
   readonly guard: (work: () => Promise<void>) => void;
@@ -40,6 +41,7 @@ export interface Commands {
   readonly openSetup: (name: string) => void;
   readonly renameSetup: (renaming: Renaming) => void;
   readonly removeSetup: (name: string) => void;
+  readonly review: ReviewCommands;
   /** Has the functions of the sheet in front calculated again. */
   readonly recalculate: () => void;
   /** Turns the live sheet in front into a kept one. */
@@ -78,6 +80,7 @@ export function createPane({ host, analyst, edition, guard }: PaneParts): Pane {
     openSetup: (name) => guard(() => openSetup(work, name)),
     renameSetup: (renaming) => guard(() => renameSetup(work, renaming)),
     removeSetup: (name) => guard(() => removeSetup(work, name)),
+    review: reviewCommands(work, guard),
     recalculate: () => guard(() => recalculateSheet(work)),
     keep: () => guard(() => keepSheet(work)),
     goTo: (address) => guard(() => goToCell(work, address)),

@@ -1,5 +1,6 @@
 import type { Action } from "./actions.ts";
 import { takeOver } from "./carrying.ts";
+import { reviewChanges } from "./review/reduceReview.ts";
 import { type Setup, assignRole, changeColumn } from "./setup.ts";
 import {
   announce,
@@ -24,6 +25,7 @@ type Of<Kind extends Action["kind"]> = Extract<Action, { kind: Kind }>;
 
 const changes: { readonly [Kind in Action["kind"]]: (state: PaneState, action: Of<Kind>) => PaneState } = {
   ...storedChanges,
+  ...reviewChanges,
   shown: (state, { section }) => ({ ...state, section }),
   "places found": (state, { places }) => ({ ...state, places }),
   started: (state, { on }) => ({

@@ -5,16 +5,17 @@ import type { SheetKind } from "../sheet/answerSheet.ts";
 import type { LostColumn } from "./carrying.ts";
 import type { DataInHand } from "./dataInHand.ts";
 import type { DataPlace, Progress } from "./host.ts";
+import { type Pointing, type ReviewInHand, emptyPointing } from "./review/reviewState.ts";
 import type { Setup } from "./setup.ts";
 import type { SheetStatus } from "./stored/sheetStatus.ts";
 import { type StoredBook, type StoredSetup, emptyBook } from "./stored/storedBook.ts";
 import type { TableInHand } from "./tableInHand.ts";
 
-export type Section = "data" | "answer" | "evidence";
+export type Section = "data" | "answer" | "evidence" | "review";
 
 /** What is under way; one thing at a time. */
 export interface Busy {
-  readonly with: "reading" | "answering" | "writing" | "keeping" | "redoing" | "comparing";
+  readonly with: "reading" | "answering" | "writing" | "keeping" | "redoing" | "comparing" | "reviewing";
   readonly progress: Progress;
 }
 
@@ -67,6 +68,9 @@ export interface PaneState {
   readonly sheets: readonly SheetStatus[];
   readonly answered: Answered | null;
   readonly written: Written | null;
+  /** The regressions that someone else built, as they were found last. */
+  readonly review: ReviewInHand | null;
+  readonly pointing: Pointing;
   /** What was done last with the sheet in front, as a sentence; empty where nothing was. */
   readonly sheetDone: string;
   readonly busy: Busy | null;
@@ -88,6 +92,8 @@ export const emptyState: PaneState = {
   sheets: [],
   answered: null,
   written: null,
+  review: null,
+  pointing: emptyPointing,
   sheetDone: "",
   busy: null,
   fault: null,

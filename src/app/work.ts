@@ -1,6 +1,6 @@
 import type { Problem } from "../core/problem/problem.ts";
 import type { Action } from "./actions.ts";
-import type { Analyst } from "./analyst.ts";
+import type { Analyst, Reviewer } from "./analyst.ts";
 import type { Errands } from "./errands.ts";
 import type { Host } from "./host.ts";
 import type { PaneState } from "./state.ts";
@@ -11,7 +11,7 @@ import type { Edition } from "./writing.ts";
 /** What the pane's use cases work with. */
 export interface Work {
   readonly host: Host;
-  readonly analyst: Analyst;
+  readonly analyst: Analyst & Reviewer;
   readonly store: Store<PaneState, Action>;
   readonly errands: Errands;
   readonly watch: Watch;

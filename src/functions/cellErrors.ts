@@ -58,6 +58,7 @@ const signs = {
   "no-formulas": "notAvailable",
   "no-report": "notAvailable",
   "nothing-to-review": "notAvailable",
+  "regression-not-in-columns": "notAvailable",
   "stored-by-newer": "notAvailable",
   "stored-unreadable": "notAvailable",
   "setup-gone": "notAvailable",

@@ -53,6 +53,7 @@ const doing: Readonly<Record<Busy["with"], string>> = {
   keeping: "Putting values in the place of formulas",
   redoing: "Redoing the sheet",
   comparing: "Comparing the set-ups",
+  reviewing: "Reviewing",
 };
 
 function Working({ busy }: { readonly busy: Busy }): ReactNode {

@@ -14,4 +14,8 @@ export const reviewSentences: {
     `No regression was found in ${where}: no formula such as LINEST, SLOPE or RSQ, and no block of figures under headings such as coefficient and standard error.`,
     "If results are typed in, point at their cells and say which columns are the outcome and the drivers.",
   ],
+  "regression-not-in-columns": ({ title }) => [
+    `The data of the regression (${title}) lie in rows or on several sheets, and answers are made from columns of one sheet.`,
+    "Bring outcome and drivers into columns side by side, then choose them in the section Data.",
+  ],
 };

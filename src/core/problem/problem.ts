@@ -107,7 +107,9 @@ export type FileProblem =
 export type ReviewProblem =
   /** The cells pointed at report no regression that can be read. */
   | { readonly code: "no-report"; readonly where: string }
-  | { readonly code: "nothing-to-review"; readonly where: string };
+  | { readonly code: "nothing-to-review"; readonly where: string }
+  /** Its data lie across, or on several sheets. */
+  | { readonly code: "regression-not-in-columns"; readonly title: string };
 
 /** What is wrong with what Footing keeps in the workbook itself. */
 export type StoredProblem =

@@ -19,7 +19,8 @@ const forms: Readonly<Record<ClaimedForm, string>> = {
   cube: "the cube of ",
 };
 
-const lineInWords = ({ name, form }: ClaimedLine): string => `${forms[form]}${name}`;
+/** "Price index", "the logarithm of Advertising" */
+export const lineInWords = ({ name, form }: ClaimedLine): string => `${forms[form]}${name}`;
 
 /** Where the reported numbers come from: "typed numbers", "a formula with LINEST". */
 export const originInWords = ({ origin }: Claim): string =>

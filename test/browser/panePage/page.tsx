@@ -2,10 +2,12 @@ import { createRoot } from "react-dom/client";
 import { detailsOf } from "../../../src/app/faultDetails.ts";
 import { type Pane, createPane } from "../../../src/app/pane.ts";
 import type { Problem } from "../../../src/core/problem/problem.ts";
-import { failure } from "../../../src/core/problem/result.ts";
+import { failure, success } from "../../../src/core/problem/result.ts";
+import type { BookClaims } from "../../../src/core/review/claimsOf.ts";
 import { PaneApp } from "../../../src/taskpane/PaneApp.tsx";
 import { inlineAnalyst } from "../../../src/worker/inlineAnalyst.ts";
 import { type FakeHost, fakeHost } from "../../support/fakeHost.ts";
+import { bookReviewFixture } from "../../support/reviewFixture.ts";
 import { repairMonths } from "../../support/repairs.ts";
 
 /** What a test can reach of the page beside what a person can. */
@@ -16,6 +18,8 @@ export interface PaneStage {
   hold: "next" | (() => void) | null;
   /** What the next answers are instead. */
   refusal: Problem | null;
+  /** What is found when regressions are looked for. */
+  listed: BookClaims;
   hostIsDark: boolean | null;
 }
 
@@ -54,6 +58,13 @@ const pane = createPane({
       const { refusal } = window.stage;
       return refusal === null ? inlineAnalyst.analyse(question, errand) : failure(refusal);
     },
+    listClaims: () => Promise.resolve(success(window.stage.listed)),
+    review: async (claim, errand) => {
+      errand.progress({ what: "Trying what explains the numbers", share: 0.5 });
+      if (window.stage.hold === "next") await new Promise<void>((resolve) => (window.stage.hold = resolve));
+      const found = bookReviewFixture.claims.find((review) => review.claim === claim);
+      return found === undefined ? failure({ code: "cancelled" }) : success(found);
+    },
   },
   edition: { today: () => "1 December 2026", version: "0.1.0" },
   guard: (work) =>
@@ -62,5 +73,7 @@ const pane = createPane({
     ),
 });
 
-window.stage = { host, pane, hold: null, refusal: null, hostIsDark: null };
+const { claims, unread, craft } = bookReviewFixture;
+const listed: BookClaims = { claims: claims.map(({ claim }) => claim), unread, craft };
+window.stage = { host, pane, hold: null, refusal: null, listed, hostIsDark: null };
 createRoot(document.getElementById("pane")!).render(<PaneApp pane={pane} hostIsDark={() => window.stage.hostIsDark} />);

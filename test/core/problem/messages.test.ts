@@ -202,6 +202,10 @@ const sentences: Sentences = {
     { code: "nothing-to-review", where: "book.xlsx" },
     "No regression was found in book.xlsx: no formula such as LINEST, SLOPE or RSQ, and no block of figures under headings such as coefficient and standard error. If results are typed in, point at their cells and say which columns are the outcome and the drivers.",
   ],
+  "regression-not-in-columns": [
+    { code: "regression-not-in-columns", title: "Repairs explained by Price" },
+    "The data of the regression (Repairs explained by Price) lie in rows or on several sheets, and answers are made from columns of one sheet. Bring outcome and drivers into columns side by side, then choose them in the section Data.",
+  ],
   "cell-being-edited": [
     { code: "cell-being-edited" },
     "A cell is being edited. Press Enter or Escape in the sheet, then try again.",
