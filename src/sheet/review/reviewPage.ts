@@ -1,3 +1,4 @@
+import { textHeight } from "../columns.ts";
 import type { PlanCell, PlanFormat, PlanLink } from "../plan.ts";
 import { type Section, section, text } from "../section.ts";
 
@@ -8,16 +9,12 @@ export const reviewColumns = reviewWidths.length;
 /** Where the words of a line stand that has its label in the first column. */
 const wordsColumn = 1;
 
-/** In points. */
-const lineHeight = 15;
-/** A column's width counts digits; letters are narrower on the average. A margin is left, since fonts differ. */
-const digitsALetter = 0.95;
-
 /** Height in points of a text over the columns from `first` to `last`. */
-export function heightOver(words: string, first: number, last = reviewColumns - 1): number {
-  const characters = reviewWidths.slice(first, last + 1).reduce((sum, width) => sum + width, 0);
-  return lineHeight * Math.max(1, Math.ceil((words.length * digitsALetter) / characters));
-}
+export const heightOver = (words: string, first: number, last = reviewColumns - 1): number =>
+  textHeight(
+    words,
+    reviewWidths.slice(first, last + 1).reduce((sum, width) => sum + width, 0),
+  );
 
 export const acrossReview = (row: number, style: NonNullable<PlanFormat["style"]>): PlanFormat => ({
   area: { row, column: 0, rows: 1, columns: reviewColumns },
