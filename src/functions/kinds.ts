@@ -2,8 +2,9 @@ import type { Answer } from "../core/answer/answer.ts";
 import { readErrors } from "../core/answer/settingReaders.ts";
 import { isNotUnderstood } from "../core/answer/settingTable.ts";
 import type { ErrorsChoice } from "../core/covariance/choice.ts";
+import { whiteErrors } from "../core/decision/wish.ts";
 import type { InferenceTable } from "../core/inference/inference.ts";
-import { pValueOf } from "../core/inference/ratioLaw.ts";
+import { lawAt, pValueOf } from "../core/inference/ratioLaw.ts";
 import { nearestName } from "../core/problem/nearestName.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";
 import { isMissing, plainValue, rawCells } from "./rawCells.ts";
@@ -44,7 +45,7 @@ function choiceOf(kind: ErrorsChoice["kind"], { options, lags }: Answer): Errors
     case "classical":
       return { kind };
     case "white":
-      return { kind, version: options.whiteVersion };
+      return whiteErrors(options.whiteVersion);
     case "newey-west":
       return { kind, lags: { kind: "given", lags: lags ?? 0 }, adjusted: options.adjusted };
     case "grouped":
@@ -66,7 +67,7 @@ export function pValuesAgainst(
   if (!values.ok) return values;
   return success(
     coefficients.map((coefficient, row) =>
-      pValueOf((coefficient - values.value[row]!) / table.standardErrors[row]!, table.reference),
+      pValueOf((coefficient - values.value[row]!) / table.standardErrors[row]!, lawAt(table, row)),
     ),
   );
 }

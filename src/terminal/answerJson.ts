@@ -25,7 +25,7 @@ const standardErrorsJson = (errors: Answer["standardErrors"]): object => ({
   grouped: errors.grouped ?? { notApplicable: "Rows are not in groups." },
 });
 
-function choiceJson({ decision, lags }: Answer): object {
+function choiceJson({ decision, lags, inference }: Answer): object {
   const { errors, reference } = decision.inForce;
   return {
     policy: decision.policy,
@@ -34,6 +34,7 @@ function choiceJson({ decision, lags }: Answer): object {
     version: "version" in errors ? errors.version : null,
     lags: errors.kind === "newey-west" ? lags : null,
     reference,
+    degreesOfFreedom: inference.inForce.degreesOfFreedom ?? null,
     because: decision.because,
     fourCase: decision.fourCase,
     override: decision.override,

@@ -5,6 +5,7 @@ import { allWhite, whiteVersions } from "../covariance/white.ts";
 import { chosen } from "../decision/decide.ts";
 import type { Decision } from "../decision/decision.ts";
 import type { Sizes } from "../decision/policies.ts";
+import { whiteErrors } from "../decision/wish.ts";
 import type { RowOrder } from "../design/design.ts";
 import type { Fit } from "../fit/fit.ts";
 import type { InferenceTable } from "../inference/inference.ts";
@@ -55,7 +56,7 @@ type Lookup = (choice: ErrorsChoice) => Covariance | null;
 
 const keyOf = (choice: ErrorsChoice): string =>
   "version" in choice
-    ? `${choice.kind} ${choice.version}`
+    ? `${choice.kind} ${choice.version} ${"degrees" in choice ? choice.degrees : ""}`
     : choice.kind === "newey-west"
       ? `${choice.kind} ${choice.adjusted}`
       : choice.kind;
@@ -68,11 +69,12 @@ const neweyWest = (lags: number, adjusted: boolean): ErrorsChoice => ({
 
 const groupedVersions: readonly GroupedVersion[] = ["CR0", "CR1", "CR2"];
 
-function choicesFor(order: RowOrder, { lags }: Setting): ErrorsChoice[] {
+function choicesFor(order: RowOrder, { lags, options }: Setting): ErrorsChoice[] {
+  const white = whiteErrors(options.whiteVersion);
   const time = lags === null ? [] : [neweyWest(lags, true), neweyWest(lags, false)];
   const grouped =
     order.kind === "groups" ? groupedVersions.map((version): ErrorsChoice => ({ kind: "grouped", version })) : [];
-  return [{ kind: "classical" }, ...time, ...grouped];
+  return [{ kind: "classical" }, ...(white.degrees === undefined ? [] : [white]), ...time, ...grouped];
 }
 
 const listed = (covariance: Covariance | null): number[] => [...(covariance?.standardErrors ?? [])];
@@ -82,7 +84,7 @@ function standardErrorsFrom(fit: Fit, of: Lookup, { lags, options }: Setting): A
   return {
     classical: listed(of({ kind: "classical" })),
     white: Object.fromEntries(white),
-    whiteFallback: of({ kind: "white", version: options.whiteVersion })?.used.fallback ?? null,
+    whiteFallback: of(whiteErrors(options.whiteVersion))?.used.fallback ?? null,
     neweyWest:
       lags === null
         ? null

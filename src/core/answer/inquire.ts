@@ -69,19 +69,15 @@ export function inquire({ source, model }: Omit<Question, "options">, inquiry: I
   }
 }
 
-/** Rows that lack a driver take part as zeros and are left blank after. */
+/** Rows that lack a driver are left blank. */
 function predicted(
   from: Parameters<typeof predict>[0],
   rows: NewRows,
   settings: PredictionSettings,
 ): readonly (Prediction | null)[] {
-  const blank = new Float64Array(from.fit.columnCount);
-  const found = predict(
-    from,
-    rows.map((row) => row ?? blank),
-    settings,
-  );
-  return found.rows.map((prediction, row) => (rows[row] === null ? null : prediction));
+  const whole = rows.filter((row) => row !== null);
+  const found = predict(from, whole, settings).rows[Symbol.iterator]();
+  return rows.map((row) => (row === null ? null : (found.next().value ?? null)));
 }
 
 /** Brings residuals and fitted values back from design order to the rows of the source. */

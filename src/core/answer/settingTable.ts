@@ -1,3 +1,4 @@
+import { whiteWishes } from "../decision/wish.ts";
 import type { NotUnderstood, Settings } from "./settingValues.ts";
 import {
   readCalendar,
@@ -92,10 +93,11 @@ export const settingTable: readonly SettingSpec[] = [
   },
   {
     name: "white version",
-    values: "HC0, HC1, HC2, HC3, HC4, HC4m, HC5",
+    values: whiteWishes.join(", "),
     standard: "HC3",
-    meaning: "How squared residuals are weighted in White's standard errors.",
-    read: option("whiteVersion", readOneOf("HC0", "HC1", "HC2", "HC3", "HC4", "HC4m", "HC5")),
+    meaning:
+      "How squared residuals are weighted in White's standard errors; bell-mccaffrey gives each coefficient t degrees of freedom of its own.",
+    read: option("whiteVersion", readOneOf(...whiteWishes)),
   },
   {
     name: "grouped version",

@@ -1,5 +1,6 @@
 import type { Figure, TestOutcome } from "../diagnostics/outcome.ts";
 import { testWords } from "../diagnostics/words.ts";
+import type { InferenceTable } from "../inference/inference.ts";
 import type { Reference } from "../inference/reference.ts";
 import type { Answer, DriverAnswer } from "./answer.ts";
 import { errorsInWords } from "./verdict.ts";
@@ -141,6 +142,15 @@ export function lawInWords({ law, df }: Figure): string {
   return df.length === 0 ? law : `${law}(${shown.join(", ")})`;
 }
 
+/** The law of a table's ratios, one for all or each its own: "t(41)", "t(8.12) to t(41), each coefficient its own". */
+export function lawsInWords({ reference, degreesOfFreedom }: InferenceTable): string {
+  if (reference.law !== "t" || degreesOfFreedom === undefined) return referenceInWords(reference);
+  const [least, most] = [Math.min(...degreesOfFreedom), Math.max(...degreesOfFreedom)];
+  const fewest = referenceInWords({ law: "t", degreesOfFreedom: least });
+  if (most === least) return fewest;
+  return `${fewest} to ${referenceInWords({ law: "t", degreesOfFreedom: most })}, each coefficient its own`;
+}
+
 /** The law of the ratios: "t(92)", "normal", "fixed-b (b = 0.135, t(92))". */
 export function referenceInWords(reference: Reference): string {
   switch (reference.law) {
@@ -154,9 +164,9 @@ export function referenceInWords(reference: Reference): string {
 }
 
 /** "Newey-West (12 lags), ratio against fixed-b (b = 0.135, t(92))". */
-export function choiceText({ decision, lags }: Answer): string {
-  const { errors, reference } = decision.inForce;
-  return `${capitalised(errorsInWords(errors, lags))}, ratio against ${referenceInWords(reference)}`;
+export function choiceText({ decision, lags, inference }: Answer): string {
+  const { errors } = decision.inForce;
+  return `${capitalised(errorsInWords(errors, lags))}, ratio against ${lawsInWords(inference.inForce)}`;
 }
 
 /** The verdict, a sentence a line. */

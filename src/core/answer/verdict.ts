@@ -21,7 +21,9 @@ export function errorsInWords(errors: ErrorsChoice, lags: number | null): string
     case "classical":
       return "classical";
     case "white":
-      return `White (${errors.version})`;
+      return errors.degrees === undefined
+        ? `White (${errors.version})`
+        : `White (${errors.version}, degrees of freedom of Bell and McCaffrey)`;
     case "newey-west":
       return `Newey-West (${lags ?? 0} ${lags === 1 ? "lag" : "lags"})`;
     case "grouped":

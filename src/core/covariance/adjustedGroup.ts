@@ -1,19 +1,13 @@
 import { addGram, addScore, copyRows, type GroupPart } from "../numeric/groupParts.ts";
 import { inverseRootOfRest, rootRoom } from "../numeric/inverseRoot.ts";
 import { times, timesRows } from "../numeric/smallProducts.ts";
+import type { BasisWeights } from "./basisWeights.ts";
 import type { GroupShare } from "./satterthwaite.ts";
 
 /** What CR2 makes of one group; overwritten for the next. */
 export interface AdjustedGroup extends GroupShare {
   /** Q_g'A_g e_g, k values. */
   readonly score: Float64Array;
-}
-
-/** m combinations of the coefficients by their weights z in the basis Q, row by row. */
-export interface BasisWeights {
-  readonly count: number;
-  /** m by k. */
-  readonly values: Float64Array;
 }
 
 /**

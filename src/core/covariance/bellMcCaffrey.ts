@@ -2,23 +2,26 @@ import type { Fit } from "../fit/fit.ts";
 import { basisTimes, weightedCrossProducts } from "../numeric/crossProducts.ts";
 import { sum, sumOfSquares } from "../numeric/sums.ts";
 import { basisOf } from "./basisOf.ts";
+import { eachCoefficient } from "./basisWeights.ts";
 import { selfFittingRows } from "./leverageOfOne.ts";
 
 /**
- * Degrees of freedom of each coefficient's HC2 variance under equal errors: the variance is e'De with
- * d_i = c_i^2 / (1 - h_i), c = X (X'X)^-1 l, so that by Satterthwaite they are (tr MD)^2 / tr(MDMD) with M = I - H:
+ * Degrees of freedom of the HC2 variance of combinations of the coefficients under equal errors: the variance is e'De with
+ * d_i = c_i^2 / (1 - h_i), c = X (X'X)^-1 l = Q z, so that by Satterthwaite they are (tr MD)^2 / tr(MDMD) with M = I - H:
  * (sum c_i^2)^2 / (sum d_i^2 (1 - 2 h_i) + |Q'DQ|^2).
  * @param fit - least squares fit of n rows on k columns.
- * @returns k values from 1 to n - k, or null where a row has a leverage of one and HC2 does not exist.
+ * @param weights - of the combinations in the basis; each coefficient by itself where none are given.
+ * @returns one value a combination from 1 to n - k, or null where a row has a leverage of one and HC2 does not exist.
  * @see Bell and McCaffrey (2002), Survey Methodology 28, 169-181; Imbens and Kolesar (2016), Rev. Econ. Stat. 98, 701-712.
  */
-export function bellMcCaffreyDegrees(fit: Fit): Float64Array<ArrayBuffer> | null {
+export function bellMcCaffreyDegrees(fit: Fit, weights = eachCoefficient(fit)): Float64Array<ArrayBuffer> | null {
   if (selfFittingRows(fit).length > 0) return null;
-  const { size, values } = fit.inverseTriangle;
-  return Float64Array.from({ length: size }, (_, l) => degreesOf(fit, values.subarray(l * size, (l + 1) * size)));
+  const size = fit.columnCount;
+  const { count, values } = weights;
+  return Float64Array.from({ length: count }, (_, l) => degreesOf(fit, values.subarray(l * size, (l + 1) * size)));
 }
 
-/** @param z - row l of R^-1: the weights of coefficient l in the basis Q. */
+/** @param z - the weights of a combination in the basis Q. */
 function degreesOf(fit: Fit, z: Float64Array): number {
   const { leverages } = fit;
   const basis = basisOf(fit);

@@ -16,7 +16,8 @@ export type LagRule =
 /** One kind of standard errors, as asked for. */
 export type ErrorsChoice =
   | { readonly kind: "classical" }
-  | { readonly kind: "white"; readonly version: WhiteVersion }
+  /** With degrees of freedom by coefficient, HC2's are those of Bell and McCaffrey. */
+  | { readonly kind: "white"; readonly version: WhiteVersion; readonly degrees?: "bell-mccaffrey" }
   | { readonly kind: "newey-west"; readonly lags: LagRule; readonly adjusted: boolean }
   | { readonly kind: "grouped"; readonly version: GroupedVersion };
 
@@ -33,7 +34,7 @@ export interface Covariance {
     readonly fallback: string | null;
   };
   readonly matrix: SquareMatrix;
-  /** For each coefficient the t law's degrees of freedom that go with it: with groups only, null otherwise. */
+  /** For each coefficient the t law's degrees of freedom that go with it, where the kind has its own; else null. */
   readonly degreesOfFreedom: Float64Array<ArrayBuffer> | null;
   readonly standardErrors: Float64Array<ArrayBuffer>;
 }

@@ -1,6 +1,7 @@
 import type { Fit } from "../fit/fit.ts";
 import { type Result, failure, success } from "../problem/result.ts";
 import type { Covariance, ErrorsChoice } from "./choice.ts";
+import { bellMcCaffreyDegrees } from "./bellMcCaffrey.ts";
 import { classicalCovariance } from "./classical.ts";
 import { groupedCovariance } from "./grouped.ts";
 import { neweyWestCovariance } from "./neweyWest.ts";
@@ -15,7 +16,7 @@ export function covarianceOf(fit: Fit, choice: ErrorsChoice): Result<Covariance>
     case "classical":
       return success(classicalCovariance(fit));
     case "white":
-      return success(whiteCovariance(fit, choice.version));
+      return success(withDegrees(fit, choice));
     case "newey-west":
       return neweyWestCovariance(fit, choice);
     case "grouped": {
@@ -24,4 +25,11 @@ export function covarianceOf(fit: Fit, choice: ErrorsChoice): Result<Covariance>
       return success(groupedCovariance(fit, { version: choice.version, order }));
     }
   }
+}
+
+/** Where a leverage of one leaves HC2 undefined, neither has HC1 in its place degrees of freedom of its own. */
+function withDegrees(fit: Fit, choice: Extract<ErrorsChoice, { kind: "white" }>): Covariance {
+  const covariance = whiteCovariance(fit, choice.version);
+  if (choice.degrees === undefined) return covariance;
+  return { ...covariance, choice, degreesOfFreedom: bellMcCaffreyDegrees(fit) };
 }

@@ -6,8 +6,9 @@ import { ascendingRows, inOrder, isAscending, pairNumbers } from "../numeric/ord
 import { type RowSource, basisRows } from "../numeric/rowSource.ts";
 import { addOuterProduct, plus, scaled, symmetricFunction } from "../numeric/smallMatrix.ts";
 import { symmetricEigenvalues } from "../numeric/symmetricEigenvalues.ts";
-import { adjustingGroups, type BasisWeights } from "./adjustedGroup.ts";
+import { adjustingGroups } from "./adjustedGroup.ts";
 import { basisOf } from "./basisOf.ts";
+import { type BasisWeights, eachCoefficient } from "./basisWeights.ts";
 import type { Covariance, GroupedVersion } from "./choice.ts";
 import { memory } from "./memory.ts";
 import { fromMeat } from "./sandwich.ts";
@@ -48,6 +49,10 @@ export function groupedCovariance(
     degreesOfFreedom: new Float64Array(fit.columnCount).fill(fewer),
   };
 }
+
+/** Satterthwaite's degrees of freedom of combinations of the coefficients under CR2 with one grouping. */
+export const adjustedDegrees = (fit: Fit, groups: Int32Array, weights: BasisWeights): Float64Array<ArrayBuffer> =>
+  adjustedSums(fit, groups, weights).degreesOfFreedom;
 
 interface OneWay {
   /** In the basis Q. */
@@ -93,7 +98,7 @@ function plainSums(fit: Fit, groups: Int32Array): OneWay {
 }
 
 /** The same with A_g before e_g, and Satterthwaite's degrees of freedom of the combinations. */
-function adjustedSums(fit: Fit, groups: Int32Array, weights = coefficientsOf(fit)): OneWay {
+function adjustedSums(fit: Fit, groups: Int32Array, weights = eachCoefficient(fit)): OneWay {
   const size = fit.columnCount;
   const sums = new Float64Array(size * size);
   const approximation = satterthwaite(weights.count, size);
@@ -109,12 +114,6 @@ function adjustedSums(fit: Fit, groups: Int32Array, weights = coefficientsOf(fit
   });
   return { meat: { size, values: sums }, groupCount, degreesOfFreedom: approximation.degreesOfFreedom() };
 }
-
-/** Row l of R^-1 holds the weights of coefficient l in the basis. */
-const coefficientsOf = ({ inverseTriangle }: Fit): BasisWeights => ({
-  count: inverseTriangle.size,
-  values: inverseTriangle.values,
-});
 
 interface InRuns {
   readonly rows: RowSource;

@@ -7,7 +7,7 @@ import { cautionsOf } from "./cautions.ts";
 import type { Decision, FourCase } from "./decision.ts";
 import type { Evidence } from "./evidence.ts";
 import { rulesOf, student } from "./policies.ts";
-import type { ErrorsWish } from "./wish.ts";
+import { type ErrorsWish, whiteErrors } from "./wish.ts";
 
 type Consulted = Decision["restsOn"][number];
 type Chosen = Decision["called"];
@@ -94,8 +94,10 @@ export function chosen(
   switch (kind) {
     case "classical":
       return { errors: { kind }, reference: student(sizes) };
-    case "white":
-      return { errors: { kind, version: wish.whiteVersion }, reference: whiteReference(sizes) };
+    case "white": {
+      const errors = whiteErrors(wish.whiteVersion);
+      return { errors, reference: errors.degrees === undefined ? whiteReference(sizes) : student(sizes) };
+    }
     case "newey-west":
       return {
         errors: { kind, lags: { kind: "given", lags: sizes.lags }, adjusted: wish.adjusted },

@@ -25,7 +25,7 @@ export function resetRobust(fit: Fit, choice: ErrorsChoice): TestOutcome {
   const curved = fitLeastSquares(withTerms(fit.design, powers));
   if (!curved.ok)
     return notApplicable("reset-robust", `${fit.rowCount} rows are too few for ${powers.length} more columns`);
-  const covariance = covarianceOf(curved.value, choice);
+  const covariance = covarianceOf(curved.value, withoutDegrees(choice));
   if (!covariance.ok)
     return notApplicable("reset-robust", "its standard errors cannot be had for the regression with the powers");
   const df = powers.length;
@@ -48,6 +48,10 @@ export function resetRobust(fit: Fit, choice: ErrorsChoice): TestOutcome {
     details: {},
   });
 }
+
+/** The Wald statistic needs the covariance alone: degrees of freedom by coefficient would be work for nothing. */
+const withoutDegrees = (choice: ErrorsChoice): ErrorsChoice =>
+  choice.kind === "white" ? { kind: choice.kind, version: choice.version } : choice;
 
 /** The powers that the terms, and the square before the cube, do not make up. */
 function independentPowers(fit: Fit): Float64Array<ArrayBuffer>[] {

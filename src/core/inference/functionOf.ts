@@ -1,7 +1,8 @@
 import type { Covariance } from "../covariance/choice.ts";
+import { degreesOfCombinations } from "../covariance/degreesOfCombinations.ts";
 import type { Fit } from "../fit/fit.ts";
 import { bilinear } from "../numeric/smallMatrix.ts";
-import { type Side, criticalValue, sidedPValueOf } from "./ratioLaw.ts";
+import { type Side, criticalValue, lawAt, sidedPValueOf } from "./ratioLaw.ts";
 import type { Reference } from "./reference.ts";
 
 /** offset + sum of weight_j b_j. */
@@ -67,14 +68,16 @@ const valueOf = ({ coefficients }: Fit, { offset, weights }: Combination): numbe
   weights.reduce((sum, weight, j) => sum + weight * coefficients[j]!, offset);
 
 function estimateOf(
-  { covariance, settings }: Estimation,
+  { fit, covariance, settings }: Estimation,
   { value, gradient }: { readonly value: number; readonly gradient: readonly number[] },
 ): Estimate {
   const { reference, against, side, level } = settings;
+  const degreesOfFreedom = degreesOfCombinations(fit, covariance, [gradient]);
+  const law = lawAt({ reference, ...(degreesOfFreedom && { degreesOfFreedom }) }, 0);
   const standardError = Math.sqrt(bilinear(gradient, covariance.matrix, gradient));
   const ratio = (value - against) / standardError;
-  const reach = criticalValue(level, reference) * standardError;
-  const pValue = sidedPValueOf(ratio, reference, side);
+  const reach = criticalValue(level, law) * standardError;
+  const pValue = sidedPValueOf(ratio, law, side);
   return { value, standardError, ratio, pValue, low: value - reach, high: value + reach, caution: null };
 }
 

@@ -2,7 +2,7 @@ import type { Covariance } from "../covariance/choice.ts";
 import type { Fit } from "../fit/fit.ts";
 import { normalTwoSided, tTwoSided } from "../numeric/distributions.ts";
 import type { InferenceTable } from "./inference.ts";
-import { criticalValue, pValueOf } from "./ratioLaw.ts";
+import { criticalValue, lawAt, pValueOf } from "./ratioLaw.ts";
 import type { Reference } from "./reference.ts";
 
 export interface InferenceSettings {
@@ -26,7 +26,7 @@ export function inferenceOf(fit: Fit, covariance: Covariance, settings: Inferenc
   const coefficients = [...fit.coefficients];
   const standardErrors = [...covariance.standardErrors];
   const ratio = coefficients.map((b, j) => (b - against[j]!) / standardErrors[j]!);
-  const laws = coefficients.map((_, j) => lawOf(reference, degreesOfFreedom?.[j]));
+  const laws = coefficients.map((_, j) => lawAt(settings, j));
   const reach = laws.map((law, j) => criticalValue(level, law) * standardErrors[j]!);
   return {
     reference,
@@ -40,6 +40,3 @@ export function inferenceOf(fit: Fit, covariance: Covariance, settings: Inferenc
     high: coefficients.map((b, j) => b + reach[j]!),
   };
 }
-
-const lawOf = (reference: Reference, degreesOfFreedom: number | undefined): Reference =>
-  reference.law === "t" && degreesOfFreedom !== undefined ? { law: "t", degreesOfFreedom } : reference;

@@ -1,7 +1,8 @@
 import type { Covariance } from "../covariance/choice.ts";
+import { degreesOfCombinations } from "../covariance/degreesOfCombinations.ts";
 import type { Fit } from "../fit/fit.ts";
 import { bilinear } from "../numeric/smallMatrix.ts";
-import { criticalValue } from "./ratioLaw.ts";
+import { criticalValue, lawAt } from "./ratioLaw.ts";
 import type { Reference } from "./reference.ts";
 
 export interface PredictionSettings {
@@ -42,19 +43,29 @@ export function predict(
   rows: readonly ArrayLike<number>[],
   settings: PredictionSettings,
 ): Predictions {
-  const reach = criticalValue(settings.level, settings.reference);
+  const { level, reference } = settings;
+  const degreesOfFreedom = degreesOfCombinations(fit, covariance, rows);
+  const laws = { reference, ...(degreesOfFreedom && { degreesOfFreedom }) };
+  const singleReach = criticalValue(level, reference);
   const farthest = fit.leverages.reduce((most, h) => Math.max(most, h), 0);
   const noSingle = whyNoSingle(settings.spread);
-  const predicted = rows.map((x): Prediction => {
+  const predicted = rows.map((x, row): Prediction => {
+    const reach = criticalValue(level, lawAt(laws, row));
     const value = fit.coefficients.reduce((sum, b, j) => sum + b * x[j]!, 0);
     const variance = bilinear(x, covariance.matrix, x);
     const standardError = Math.sqrt(variance);
-    const around = (deviation: number): { low: number; high: number } => ({
-      low: value - reach * deviation,
-      high: value + reach * deviation,
+    const around = (distance: number): { low: number; high: number } => ({
+      low: value - distance,
+      high: value + distance,
     });
-    const single = noSingle === null ? around(Math.sqrt(fit.sigma ** 2 + variance)) : null;
-    return { value, standardError, ...around(standardError), single, beyond: bilinear(x, fit.bread, x) > farthest };
+    const single = noSingle === null ? around(singleReach * Math.sqrt(fit.sigma ** 2 + variance)) : null;
+    return {
+      value,
+      standardError,
+      ...around(reach * standardError),
+      single,
+      beyond: bilinear(x, fit.bread, x) > farthest,
+    };
   });
   return { rows: predicted, noSingle };
 }

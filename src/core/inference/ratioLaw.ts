@@ -6,6 +6,18 @@ import type { Reference } from "./reference.ts";
 /** Which side of the null value counts as evidence against it. */
 export type Side = "both" | "above" | "below";
 
+/** A law for several ratios, and where each has t degrees of freedom of its own, those. */
+export interface Laws {
+  readonly reference: Reference;
+  readonly degreesOfFreedom?: ArrayLike<number>;
+}
+
+/** The law of one of the ratios: degrees of freedom of its own take the place of a t reference's. */
+export function lawAt({ reference, degreesOfFreedom }: Laws, place: number): Reference {
+  const own = degreesOfFreedom?.[place];
+  return reference.law === "t" && own !== undefined ? { law: "t", degreesOfFreedom: own } : reference;
+}
+
 /**
  * Two-sided p-value of a ratio, P(|T| > |ratio|) under the reference law.
  * Under "fixed-b" it is the level at which the ratio is just critical: p < level if and only if

@@ -1,7 +1,8 @@
 import { Field, Select } from "@fluentui/react-components";
 import type { ReactNode } from "react";
 import type { Setup } from "../../app/setup.ts";
-import type { LagRule, WhiteVersion } from "../../core/covariance/choice.ts";
+import type { LagRule } from "../../core/covariance/choice.ts";
+import { whiteWishes } from "../../core/decision/wish.ts";
 import { usePane } from "../paneContext.ts";
 import { NumberField } from "../parts/NumberField.tsx";
 
@@ -9,8 +10,6 @@ export interface KindSettingsProps {
   readonly setup: Setup;
   readonly change: (options: Partial<Setup["options"]>) => void;
 }
-
-const versions: readonly WhiteVersion[] = ["HC0", "HC1", "HC2", "HC3", "HC4", "HC4m", "HC5"];
 
 /** How White and Newey-West are made in detail. */
 export function KindSettings({ setup, change }: KindSettingsProps): ReactNode {
@@ -20,9 +19,11 @@ export function KindSettings({ setup, change }: KindSettingsProps): ReactNode {
         <Select
           size="small"
           value={setup.options.whiteVersion}
-          onChange={(_, { value }) => change({ whiteVersion: versions.find((version) => version === value) ?? "HC3" })}
+          onChange={(_, { value }) =>
+            change({ whiteVersion: whiteWishes.find((version) => version === value) ?? "HC3" })
+          }
         >
-          {versions.map((version) => (
+          {whiteWishes.map((version) => (
             <option key={version}>{version}</option>
           ))}
         </Select>

@@ -3,6 +3,7 @@ import { confidenceInWords, decimalsFor, numberInWords, pValueInWords } from "..
 import type { ErrorsChoice } from "../../core/covariance/choice.ts";
 import type { InferenceTable } from "../../core/inference/inference.ts";
 import { referenceInWords } from "../../core/answer/tables.ts";
+import { lawAt } from "../../core/inference/ratioLaw.ts";
 
 /** One kind of standard errors beside the others, for one term. */
 export interface KindFigures {
@@ -40,7 +41,7 @@ const figuresAt = (table: InferenceTable, index: number) => ({
   pValueNormal: table.pValueNormal[index]!,
   low: table.low[index]!,
   high: table.high[index]!,
-  reference: referenceInWords(table.reference),
+  reference: referenceInWords(lawAt(table, index)),
 });
 
 /** Figures of one term are all written to what the standard error in force supports. */

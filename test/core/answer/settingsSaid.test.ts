@@ -49,7 +49,7 @@ const options: fc.Arbitrary<Options> = fc.record({
   fixed: fc.option(
     fc.record({ errors: fc.constantFrom("classical", "white"), reason: fc.option(fc.constant("agreed in March")) }),
   ),
-  whiteVersion: fc.constantFrom("HC0", "HC3", "HC4m"),
+  whiteVersion: fc.constantFrom("HC0", "HC2 bell-mccaffrey", "HC3", "HC4m"),
   groupedVersion: fc.constantFrom("CR0", "CR1", "CR2"),
   lags: lagRules,
   adjusted: fc.boolean(),

@@ -1,4 +1,5 @@
 import type { Fit } from "../../fit/fit.ts";
+import { rowsAbove } from "../../numeric/ordering.ts";
 import type { Influence, InfluentialRow } from "./influence.ts";
 import { type Guard, namesInWords } from "./guard.ts";
 
@@ -7,6 +8,7 @@ const oneStandardError = 1;
 /** Level at which the row farthest out among n is called an outlier. */
 const outlierLevel = 0.05;
 const mostRows = 5;
+const highLeverage = 0.5;
 
 /**
  * Which rows matter more than a row should, in words.
@@ -25,6 +27,7 @@ export function influenceGuard(
   const sentences = [
     ...selfFitting(measures, rowName),
     ...rows.slice(0, mostRows).flatMap((row) => movedBy(fit, row, rowName)),
+    ...farOut(fit, measures, rowName),
     ...farOff,
   ];
   if (sentences.length === 0) {
@@ -43,6 +46,20 @@ function selfFitting({ selfFitting: rows }: Influence, rowName: (row: number) =>
   const more = rows.length > mostRows ? ` and ${rows.length - mostRows} more` : "";
   return [
     `The fit passes through ${shown}${more} whatever the outcome there: a driver of its own gives the row no say about the others.`,
+  ];
+}
+
+/**
+ * A row that makes up more than half of its own fitted value (Huber 1981, Robust Statistics, 7.2, from memory, would
+ * avoid such rows): there White's standard errors are themselves uncertain, and small degrees of freedom say so.
+ */
+function farOut(fit: Fit, { selfFitting: alone }: Influence, rowName: (row: number) => string): string[] {
+  const rows = rowsAbove(fit.leverages, highLeverage).filter((row) => !alone.includes(row));
+  if (rows.length === 0 || fit.design.order.kind !== "cases") return [];
+  const most = Math.max(...rows.map((row) => fit.leverages[row]!));
+  const shown = namesInWords(rows.slice(0, mostRows).map(rowName));
+  return [
+    `The drivers of ${shown}${rows.length > mostRows ? ` and ${rows.length - mostRows} more` : ""} lie so far out that a row there makes up to ${Math.floor(100 * most)} % of its own fitted value. White's standard errors are uncertain then; the white version "HC2 bell-mccaffrey" allows for it.`,
   ];
 }
 

@@ -3,9 +3,10 @@ import { describe, expect, it } from "vitest";
 import { influence, mostInfluential } from "../../../../src/core/diagnostics/guards/influence.ts";
 import { influenceGuard } from "../../../../src/core/diagnostics/guards/influenceGuard.ts";
 import { tTwoSided } from "../../../../src/core/numeric/distributions.ts";
+import type { Fit } from "../../../../src/core/fit/fit.ts";
 import { randomFrom } from "../../../../src/core/numeric/random.ts";
 import { expectDigits } from "../../../support/digits.ts";
-import { designOf, fitOf, reference, referenceFit, referenceIds } from "../../../support/referenceFit.ts";
+import { designOf, fitOf, reference, referenceFit, referenceIds, throughTime } from "../../../support/referenceFit.ts";
 
 interface Found {
   readonly outside: readonly number[];
@@ -74,6 +75,29 @@ describe("influence", () => {
     expect(finding).toBe("worth knowing");
     expect(sentences[0]).toBe(
       "The fit passes through row 13 whatever the outcome there: a driver of its own gives the row no say about the others.",
+    );
+  });
+
+  it("offers degrees of freedom by coefficient where a row lies far out, and cases alone can take them", () => {
+    const one = x.map((value, i) => (i === 4 ? 40 : i === 20 ? -30 : value));
+    const offerOf = (fit: Fit): string | undefined => {
+      const measures = influence(fit)!;
+      const { sentences } = influenceGuard({ fit, measures, rows: mostInfluential(fit, measures, 3) }, rowName);
+      return sentences.find((sentence) => sentence.includes("bell-mccaffrey"));
+    };
+    const fit = fitOf(designOf(y, [one]));
+    expect(fit.leverages[20]).toBeLessThan(0.5);
+    expect(offerOf(fit)).toBe(
+      `The drivers of row 6 lie so far out that a row there makes up to ${Math.floor(100 * fit.leverages[4]!)} % of its own fitted value. White's standard errors are uncertain then; the white version "HC2 bell-mccaffrey" allows for it.`,
+    );
+    const inTime = fitOf(designOf(y, [one], { order: throughTime(30) }));
+    expect(offerOf(inTime)).toBeUndefined();
+    // Six columns that each stand on two rows, the first of them almost alone.
+    const pairs = [0, 1, 2, 3, 4, 5].map((pair) =>
+      y.map((_, i) => (i === 2 * pair ? 1 : i === 2 * pair + 1 ? 0.3 : 0)),
+    );
+    expect(offerOf(fitOf(designOf(y, pairs)))).toMatch(
+      /^The drivers of row 2, row 4, row 6, row 8 and row 10 and 1 more lie so far out/,
     );
   });
 
