@@ -2,6 +2,7 @@ import type { SheetKind } from "../sheet/answerSheet.ts";
 import type { Action } from "./actions.ts";
 import type { Analyst, Reviewer } from "./analyst.ts";
 import { findAnswer } from "./answering.ts";
+import { compareSetups, writeComparison } from "./comparing.ts";
 import { createErrands } from "./errands.ts";
 import type { Host, WhereToRead } from "./host.ts";
 import { listPlaces, readData } from "./reading.ts";
@@ -41,6 +42,9 @@ export interface Commands {
   readonly openSetup: (name: string) => void;
   readonly renameSetup: (renaming: Renaming) => void;
   readonly removeSetup: (name: string) => void;
+  /** Answers stored set-ups side by side. */
+  readonly compare: (names: readonly string[]) => void;
+  readonly writeComparison: () => void;
   readonly review: ReviewCommands;
   /** Has the functions of the sheet in front calculated again. */
   readonly recalculate: () => void;
@@ -65,7 +69,8 @@ export function createPane({ host, analyst, edition, guard }: PaneParts): Pane {
     store,
     errands,
     watch: createWatch(host, store.dispatch),
-    watchSources: createSourcesWatch(host, store.dispatch),
+    watchSources: createSourcesWatch(host, store.dispatch, (sheet) => ({ kind: "source changed", sheet })),
+    watchCompared: createSourcesWatch(host, store.dispatch, () => ({ kind: "compared cells changed" })),
     edition,
   };
   const commands: Commands = {
@@ -79,6 +84,8 @@ export function createPane({ host, analyst, edition, guard }: PaneParts): Pane {
     storeSetup: (name) => guard(() => storeSetup(work, name)),
     openSetup: (name) => guard(() => openSetup(work, name)),
     renameSetup: (renaming) => guard(() => renameSetup(work, renaming)),
+    compare: (names) => guard(() => compareSetups(work, names)),
+    writeComparison: () => guard(() => writeComparison(work)),
     removeSetup: (name) => guard(() => removeSetup(work, name)),
     review: reviewCommands(work, guard),
     recalculate: () => guard(() => recalculateSheet(work)),

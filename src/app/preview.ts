@@ -28,7 +28,7 @@ export function previewOf(source: Source, setup: Setup): Result<Preview> | null 
   if (source.rowCount > mostRows) return null;
   const question = questionOf(source, setup);
   if (!question.ok) return question;
-  const design = buildDesign(source, question.value.model);
+  const design = buildDesign(question.value.source, question.value.model);
   if (!design.ok) return design;
   const { rowCount, leftOut, leftOutCount, notes } = design.value;
   return success({ used: rowCount, rows: rowsSummary(design.value), leftOut, leftOutCount, notes });

@@ -93,6 +93,7 @@ function answered(state: PaneState, { answered }: Of<"answered">): PaneState {
     ...state,
     busy: null,
     fault: null,
+    comparison: null,
     answered: { ...answered, outdated: outdatedAlready(state, answered) },
     written: written === null ? null : { ...written, outdated: written.kind === "kept" },
   };

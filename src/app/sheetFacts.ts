@@ -79,7 +79,7 @@ function spanOf(columns: readonly Column[], { source, made }: Context): SheetAre
 }
 
 /** Worksheet functions know no such setting: they see every row, so that it stands on kept sheets alone. */
-const hiddenSetting = ({ hidden }: Source): SettingPair[] =>
+export const hiddenSetting = ({ hidden }: Source): SettingPair[] =>
   hidden?.leftOut === true ? [["hidden rows", "left out"]] : [];
 
 /** Where the drivers' rectangle holds other columns too, or another order, the setting that picks them by number. */

@@ -3,6 +3,7 @@ import type { Question } from "../core/answer/question.ts";
 import type { Problem } from "../core/problem/problem.ts";
 import type { SheetKind } from "../sheet/answerSheet.ts";
 import type { LostColumn } from "./carrying.ts";
+import type { Comparison } from "./comparing.ts";
 import type { DataInHand } from "./dataInHand.ts";
 import type { DataPlace, Progress } from "./host.ts";
 import { type Pointing, type ReviewInHand, emptyPointing } from "./review/reviewState.ts";
@@ -66,6 +67,8 @@ export interface PaneState {
   readonly waiting: StoredSetup | null;
   /** The result sheets of the workbook. */
   readonly sheets: readonly SheetStatus[];
+  /** Stored set-ups side by side, shown in place of the answer. */
+  readonly comparison: Comparison | null;
   readonly answered: Answered | null;
   readonly written: Written | null;
   /** The regressions that someone else built, as they were found last. */
@@ -90,6 +93,7 @@ export const emptyState: PaneState = {
   opened: null,
   waiting: null,
   sheets: [],
+  comparison: null,
   answered: null,
   written: null,
   review: null,

@@ -20,18 +20,25 @@ export function createWatch(host: Host, dispatch: (action: Action) => void): Wat
   };
 }
 
-/** The data that kept sheets were made from. */
+/** The data that kept sheets, or the models of a comparison, were made from. */
 export type WatchSources = (sources: readonly { readonly address: string; readonly sheet: string }[]) => Promise<void>;
 
-/** Looks after what kept sheets were made from, in place of what was looked after before. */
-export function createSourcesWatch(host: Host, dispatch: (action: Action) => void): WatchSources {
+/**
+ * Looks after what several things were made from, in place of what was looked after before.
+ * @param changed - what happens to one of them when a cell of its data changes.
+ */
+export function createSourcesWatch(
+  host: Host,
+  dispatch: (action: Action) => void,
+  changed: (sheet: string) => Action,
+): WatchSources {
   let stops: (() => Promise<void>)[] = [];
   return async (sources) => {
     const before = stops;
     stops = [];
     for (const stop of before) await stop();
     for (const { address, sheet } of sources) {
-      const watching = await host.watch([address], () => dispatch({ kind: "source changed", sheet }));
+      const watching = await host.watch([address], () => dispatch(changed(sheet)));
       if (watching.ok) stops.push(watching.value);
       else dispatch({ kind: "failed", fault: { kind: "problem", problem: watching.problem } });
     }

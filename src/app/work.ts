@@ -16,6 +16,7 @@ export interface Work {
   readonly errands: Errands;
   readonly watch: Watch;
   readonly watchSources: WatchSources;
+  readonly watchCompared: WatchSources;
   readonly edition: Edition;
 }
 

@@ -3,6 +3,7 @@ import { type ReactNode, useState } from "react";
 import type { Busy } from "../app/state.ts";
 import { canBeLive } from "../app/writing.ts";
 import type { SheetKind } from "../sheet/answerSheet.ts";
+import { CompareBar } from "./compare/CompareBar.tsx";
 import { CellLink } from "./parts/CellLink.tsx";
 import { usePane } from "./paneContext.ts";
 
@@ -28,9 +29,11 @@ const useStyles = makeStyles({
 
 /** What can be done next, or how far the work under way has come. */
 export function ActionBar(): ReactNode {
+  const styles = useStyles();
   const { state } = usePane();
   if (state.busy !== null) return <Working busy={state.busy} />;
   if (state.section === "data") return state.data === null ? null : <AskBar />;
+  if (state.section === "answer" && state.comparison !== null) return <CompareBar className={styles.bar} />;
   return state.answered === null ? null : <WriteBar />;
 }
 

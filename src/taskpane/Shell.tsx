@@ -7,6 +7,7 @@ import { FaultNotice } from "./parts/FaultNotice.tsx";
 import { Tabs, tabId } from "./parts/Tabs.tsx";
 import { SheetTools } from "./SheetTools.tsx";
 import { AnswerSection } from "./answer/AnswerSection.tsx";
+import { CompareSection } from "./compare/CompareSection.tsx";
 import { DataSection } from "./data/DataSection.tsx";
 import { EvidenceSection } from "./evidence/EvidenceSection.tsx";
 import { useKeptFocus } from "./look/useKeptFocus.ts";
@@ -55,7 +56,8 @@ export function Shell(): ReactNode {
         <div role="tabpanel" id="section" aria-labelledby={tabId(section)}>
           <FaultNotice />
           {section === "data" && <DataSection />}
-          {section === "answer" && <AnswerSection />}
+          {section === "answer" &&
+            (state.comparison === null ? <AnswerSection /> : <CompareSection comparison={state.comparison} />)}
           {section === "evidence" && <EvidenceSection />}
           {section !== "evidence" && <SheetTools />}
         </div>

@@ -11,6 +11,8 @@ import { type FakeKeeper, fakeKeeper } from "./fakeKeeper.ts";
 /** A spreadsheet of one sheet, in memory, that does as it is told: for the pane's own tests. */
 export interface FakeHost extends Host {
   readonly keeper: FakeKeeper;
+  /** Rows of the sheet (from 0) that it does not show. */
+  hiddenRows: readonly number[];
   /** Row by row, headings first. */
   rows: Cell[][];
   readonly sheet: string;
@@ -42,6 +44,7 @@ export function fakeHost(sheet: string, rows: Cell[][]): FakeHost {
   const host: FakeHost = {
     ...keeper,
     keeper,
+    hiddenRows: [],
     sheet,
     rows,
     places: [],
@@ -95,7 +98,7 @@ export function fakeHost(sheet: string, rows: Cell[][]): FakeHost {
   return host;
 }
 
-function blockOf({ sheet, rows }: FakeHost, where: WhereToRead): PlacedBlock {
+function blockOf({ sheet, rows, hiddenRows }: FakeHost, where: WhereToRead): PlacedBlock {
   const columns = Math.max(...rows.map((cells) => cells.length));
   const address =
     where.kind === "address" ? where.address : addressOf({ sheet, row: 0, column: 0, rows: rows.length, columns });
@@ -104,6 +107,7 @@ function blockOf({ sheet, rows }: FakeHost, where: WhereToRead): PlacedBlock {
     firstRow: 0,
     firstColumn: 0,
     rowCount: rows.length,
+    hiddenRows,
     columns: Array.from({ length: columns }, (_, column) => toCellColumn(rows.map((cells) => cells[column] ?? null))),
     address,
     table: where.kind === "place" && where.place.kind === "table" ? where.place.name : null,

@@ -1,4 +1,5 @@
 import type { Problem } from "../../core/problem/problem.ts";
+import type { ComparedModel } from "../../sheet/comparison.ts";
 import type { LostColumn } from "../carrying.ts";
 import type { DataInHand } from "../dataInHand.ts";
 import type { Setup } from "../setup.ts";
@@ -26,4 +27,8 @@ export type StoredAction =
   | { readonly kind: "sheets found"; readonly sheets: readonly SheetStatus[] }
   | { readonly kind: "sheet checked"; readonly sheet: string; readonly standing: Standing }
   | { readonly kind: "source changed"; readonly sheet: string }
-  | { readonly kind: "sheet redone"; readonly sheet: string };
+  | { readonly kind: "sheet redone"; readonly sheet: string }
+  | { readonly kind: "compared"; readonly models: readonly ComparedModel[] }
+  | { readonly kind: "compared cells changed" }
+  | { readonly kind: "comparison written"; readonly sheet: string }
+  | { readonly kind: "comparison closed" };

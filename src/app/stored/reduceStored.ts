@@ -1,8 +1,9 @@
 import { announce } from "../spoken.ts";
-import type { PaneState } from "../state.ts";
+import { comparabilityOf } from "../../sheet/comparison.ts";
+import type { PaneState, Section } from "../state.ts";
 import type { StoredAction } from "./actions.ts";
-import { sameName } from "./setups.ts";
 import type { SheetStatus, Standing } from "./sheetStatus.ts";
+import { sameName } from "./storedBook.ts";
 
 type Of<Kind extends StoredAction["kind"]> = Extract<StoredAction, { kind: Kind }>;
 
@@ -34,11 +35,37 @@ export const storedChanges: {
   "sheets found": (state, { sheets }) => ({ ...state, sheets: sheets.map((one) => asBefore(one, state.sheets)) }),
   "sheet checked": (state, { sheet, standing }) => withStanding(state, sheet, standing),
   "source changed": sourceChanged,
+  compared: (state, { models }) =>
+    announce(
+      { ...arriveAt(state, "answer"), comparison: { models, outdated: false }, busy: null, fault: null },
+      `${models.length} set-ups are compared. ${comparabilityOf(models)[0] ?? ""}`,
+    ),
+  "compared cells changed": (state) =>
+    state.comparison === null || state.comparison.outdated
+      ? state
+      : announce({ ...state, comparison: { ...state.comparison, outdated: true } }, "The comparison is out of date."),
+  "comparison written": (state, { sheet }) =>
+    announce(
+      withSheetNamed({ ...state, busy: null, fault: null }, sheet),
+      `The comparison is written to the sheet ${sheet}.`,
+    ),
+  "comparison closed": (state) => ({ ...arriveAt(state, "answer"), comparison: null }),
   "sheet redone": (state, { sheet }) => {
     const written = state.written?.sheet === sheet ? { ...state.written, outdated: false } : state.written;
     return announce({ ...state, written, busy: null, fault: null }, `The sheet ${sheet} is written anew.`);
   },
 };
+
+const arriveAt = (state: PaneState, section: Section): PaneState => ({
+  ...state,
+  section,
+  arrivals: state.arrivals + 1,
+});
+
+const withSheetNamed = (state: PaneState, sheet: string): PaneState => ({
+  ...state,
+  sheets: [...state.sheets, { sheet, record: null, standing: { kind: "not known" } }],
+});
 
 const isOpen = ({ opened }: PaneState, name: string): boolean => opened !== null && sameName(opened, name);
 

@@ -3,10 +3,7 @@ import { bringSetup } from "../carrying.ts";
 import { type Work, fail } from "../work.ts";
 import { anchorOf, isUsed, readOrigin } from "./anchors.ts";
 import { changeKept, failIfNot } from "./keeping.ts";
-import type { StoredBook, StoredSetup } from "./storedBook.ts";
-
-/** Names differ without regard to case and outer blanks. */
-export const sameName = (a: string, b: string): boolean => a.trim().toLowerCase() === b.trim().toLowerCase();
+import { type StoredBook, type StoredSetup, sameName } from "./storedBook.ts";
 
 const named = ({ setups }: StoredBook, name: string): StoredSetup | undefined =>
   setups.find((setup) => sameName(setup.name, name));

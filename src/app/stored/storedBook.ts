@@ -43,3 +43,6 @@ export interface StoredBook {
 }
 
 export const emptyBook: StoredBook = { setups: [], sheets: [] };
+
+/** Names of set-ups differ without regard to case and outer blanks. */
+export const sameName = (a: string, b: string): boolean => a.trim().toLowerCase() === b.trim().toLowerCase();

@@ -3,6 +3,7 @@ import { useType } from "../look/type.ts";
 import { Disclosure } from "../parts/Disclosure.tsx";
 import { SectionTitle } from "../parts/SectionTitle.tsx";
 import { usePane } from "../paneContext.ts";
+import { KeptHere } from "../setups/KeptHere.tsx";
 import { Calendar } from "./Calendar.tsx";
 import { ChangedNotice } from "./ChangedNotice.tsx";
 import { ColumnList } from "./ColumnList.tsx";
@@ -43,6 +44,7 @@ export function DataSection(): ReactNode {
       <WhatIsUsed />
       <Calendar />
       <WayToAnswer />
+      <KeptHere />
     </>
   );
 }
@@ -58,6 +60,7 @@ function FirstRun(): ReactNode {
       </p>
       <p className={type.remark}>Select the columns with their headings, or one cell among them.</p>
       <PlaceChooser />
+      <KeptHere />
       <p className={type.footnote}>All of it is computed on this computer. Nothing is sent anywhere.</p>
     </>
   );

@@ -1,0 +1,83 @@
+import type { ReactNode } from "react";
+import type { DriverAnswer } from "../../core/answer/answer.ts";
+import { confidenceInWords, decimalsFor, numberInWords } from "../../core/answer/wording.ts";
+import { type ComparedDriver, type ComparedModel, comparedDrivers } from "../../sheet/comparison.ts";
+import { FirmnessMark } from "../answer/FirmnessMark.tsx";
+import { pFigure } from "../parts/pFigure.ts";
+import { useTableLook } from "./tableLook.ts";
+
+export interface ModelsProps {
+  readonly models: readonly ComparedModel[];
+}
+
+/** Each driver with its figures under every model. */
+export function DriversCompared({ models }: ModelsProps): ReactNode {
+  const look = useTableLook();
+  return (
+    <div className={look.box} tabIndex={0} role="region" aria-label="Drivers in rows, models in columns">
+      <table className={look.table} aria-label="Drivers of the models">
+        <thead>
+          <tr>
+            <td />
+            {models.map(({ name }) => (
+              <th key={name} scope="col" className={look.model}>
+                {name}
+              </th>
+            ))}
+          </tr>
+        </thead>
+        {comparedDrivers(models).map((driver) => (
+          <Driver key={driver.term} driver={driver} models={models} />
+        ))}
+      </table>
+    </div>
+  );
+}
+
+type Line = readonly [label: string, figure: (driver: DriverAnswer, model: ComparedModel) => ReactNode];
+
+const lines = (confidence: string): readonly Line[] => [
+  ["coefficient", (driver) => <strong>{written(driver, driver.coefficient)}</strong>],
+  ["standard error", (driver) => written(driver, driver.standardError)],
+  [`${confidence} interval`, (driver) => `${written(driver, driver.low)} to ${written(driver, driver.high)}`],
+  ["p-value", (driver, { answer }) => pFigure(driver.pValue, answer.options.level)],
+  ["firm or leaning", (driver) => <Firmness driver={driver} />],
+];
+
+/** To what the standard error in force supports. */
+function written({ low, high }: DriverAnswer, value: number): string {
+  return numberInWords(value, decimalsFor((high - low) / 2)).replace("-", "\u2212");
+}
+
+const Firmness = ({ driver }: { readonly driver: DriverAnswer }): ReactNode => (
+  <>
+    <FirmnessMark firmness={driver.firmness} /> {driver.firmness.kind}
+  </>
+);
+
+function Driver({ driver, models }: ModelsProps & { readonly driver: ComparedDriver }): ReactNode {
+  const look = useTableLook();
+  const levels = new Set(models.map(({ answer }) => confidenceInWords(answer.options.level)));
+  const confidence = levels.size === 1 ? [...levels][0]! : "";
+  return (
+    <tbody>
+      <tr>
+        <th scope="rowgroup" colSpan={models.length + 1} className={look.driver}>
+          {driver.term}
+        </th>
+      </tr>
+      {lines(confidence).map(([label, figure], index) => (
+        <tr key={label}>
+          <th scope="row" className={look.label}>
+            {label.trim()}
+          </th>
+          {driver.in.map((found, place) => (
+            <td key={models[place]!.name} className={look.cell}>
+              {found === null ? (index === 0 ? "not in it" : "") : figure(found, models[place]!)}
+            </td>
+          ))}
+        </tr>
+      ))}
+    </tbody>
+  );
+}
