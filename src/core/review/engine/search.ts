@@ -1,0 +1,137 @@
+import type { Candidate, Changes, Kept } from "./candidate.ts";
+import type { Change } from "./change.ts";
+import { type Evidence, evidenceOf, fewestTelling, mostByChance } from "./evidence.ts";
+import { lineChanges } from "./lineChanges.ts";
+import { manyRowChanges } from "./manyRowChanges.ts";
+import { modelChanges } from "./modelChanges.ts";
+import { looksAlone, looksInPairs } from "./looks.ts";
+import { type RowFacts, fewRowChanges } from "./rowChanges.ts";
+import { underSameErrors } from "./sameErrors.ts";
+import { type Sieve, sieveOf } from "./sieve.ts";
+import { type Bench, type Trial, agreesThroughout, trial } from "./trial.ts";
+import { completeRows } from "./rowList.ts";
+import { lineValues } from "./lineValues.ts";
+
+/** Changes under which every reported number comes out, and which are worth believing. */
+export interface Found {
+  readonly changes: readonly Change[];
+  readonly trial: Trial;
+  readonly evidence: Evidence;
+}
+
+/** What a search came to. */
+export interface Searched {
+  /** Cheapest first; empty where nothing that was tried explains the report. */
+  readonly found: readonly Found[];
+  /** How many changes were looked at, alone and in pairs. */
+  readonly looked: number;
+  /** How many fit the numbers shown, but would by chance as well. */
+  readonly untelling: number;
+  /** The sorts of changes that were tried. */
+  readonly tried: readonly Change[];
+  readonly inPairs: boolean;
+}
+
+/** How far the search has come, from 0 to 1. */
+export interface SearchStep {
+  readonly step: string;
+  readonly share: number;
+}
+
+/** Survivors of one stage that are fitted in full, the most telling first. */
+const mostFitted = 60;
+
+/**
+ * Looks for a small change of data or model that reproduces every reported number: each alone, then each with each,
+ * few before many; stops after the first stage in which one is found, so that others of the same cost are told too.
+ * A generator, so that whoever runs it can show how far it is and stop it between steps.
+ * @param claimed - the trial of the regression as claimed; null where it cannot be fitted.
+ */
+export function* search(bench: Bench, claimed: Trial | null): Generator<SearchStep, Searched> {
+  const changes = changesOf(bench);
+  const { reported } = bench.claim;
+  const asClaimed = reported.map((_, index) => claimed?.compared[index]?.recomputed ?? null);
+  const sieve = sieveOf(bench.frame, { reported, asClaimed });
+  const stages = [looksAlone(bench, changes, sieve), looksInPairs(bench, changes, sieve)].flat();
+  let untelling = 0;
+  for (const [index, { step, inPairs, looks }] of stages.entries()) {
+    const kept = yield* keptOf(looks, { step, from: index / stages.length, width: 1 / stages.length });
+    const judged = judge(kept, { bench, claimed, sieve });
+    untelling += judged.untelling;
+    if (judged.found.length > 0 || index === stages.length - 1) {
+      const tried = [...changes.few, ...changes.many];
+      return { found: judged.found, looked: sieve.looked(), untelling, tried, inPairs };
+    }
+  }
+  return { found: [], looked: 0, untelling, tried: [], inPairs: false };
+}
+
+function changesOf({ frame, claim, claimed }: Bench): Changes {
+  const lines = frame.lines.slice(0, frame.driverCount + 1);
+  const complete = completeRows(lines.map((line, index) => lineValues(line, claimed.lines[index]!, frame)));
+  const facts: RowFacts = {
+    frame,
+    complete,
+    missing: missingRows(claim, complete.subarray(frame.first, frame.first + frame.count)),
+  };
+  const few = [...fewRowChanges(facts), ...modelChanges(frame, claim), ...lineChanges(frame)];
+  return { few, many: manyRowChanges(facts) };
+}
+
+/** How many rows the report says it used, less those the claimed cells have. */
+function missingRows({ reported, drivers, constant }: Bench["claim"], complete: Uint8Array): number | null {
+  const have = complete.reduce((sum, byte) => sum + byte, 0);
+  const columns = drivers.length + (constant ? 1 : 0);
+  for (const { quantity, value } of reported) {
+    if (quantity.kind === "observations") return Math.round(value) - have;
+    if (quantity.kind === "degrees-of-freedom") return Math.round(value) + columns - have;
+  }
+  return null;
+}
+
+/** The looks of a stage one after another; the generator pauses wherever they do. */
+function* keptOf(
+  looks: Generator<number, Kept>,
+  { step, from, width }: { readonly step: string; readonly from: number; readonly width: number },
+): Generator<SearchStep, Kept> {
+  for (;;) {
+    const next = looks.next();
+    if (next.done === true) return next.value;
+    yield { step, share: from + width * next.value };
+  }
+}
+
+interface Judging {
+  readonly bench: Bench;
+  readonly claimed: Trial | null;
+  readonly sieve: Sieve;
+}
+
+/** Fits what may be worth believing, and keeps what reproduces everything and is. */
+function judge(kept: Kept, { bench, claimed, sieve }: Judging): Pick<Searched, "found" | "untelling"> {
+  const looked = sieve.looked();
+  const worthIt = ({ survivor }: Candidate): boolean => survivor.chance * looked < mostByChance;
+  const hopeful = kept.candidates.filter(worthIt);
+  const fitted = hopeful.toSorted((a, b) => a.survivor.chance - b.survivor.chance).slice(0, mostFitted);
+  const found: Found[] = [];
+  let untelling = kept.untelling + kept.candidates.length - hopeful.length;
+  for (const { changes, survivor } of hopeful.filter((one) => fitted.includes(one))) {
+    const tried = trial(bench, survivor.recipe);
+    if (tried === null || !agreesThroughout(tried)) continue;
+    const evidence = evidenceFor(tried, bench, claimed);
+    if (evidence.telling >= fewestTelling && evidence.chance * looked < mostByChance)
+      found.push({ changes, trial: tried, evidence });
+    else untelling++;
+  }
+  return { found, untelling };
+}
+
+function evidenceFor({ compared, errorsTried, used }: Trial, bench: Bench, claimed: Trial | null): Evidence {
+  const base = claimed === null ? null : underSameErrors(bench, claimed, used);
+  const moved = compared.map(({ reported, recomputed }, index) => ({
+    reported,
+    found: recomputed ?? 0,
+    asClaimed: base?.[index] ?? null,
+  }));
+  return evidenceOf(moved, errorsTried);
+}

@@ -1,0 +1,128 @@
+import type { Fit } from "../../fit/fit.ts";
+import type { Claim } from "../claim.ts";
+import type { Comparison } from "../claimReview.ts";
+import { agrees } from "./agreement.ts";
+import { type ErrorKind, groupedKinds, plainKinds, timeKinds } from "./errorKinds.ts";
+import { type ErrorsUsed, type ReportedError, errorValue, matchesOf } from "./errorMatch.ts";
+import type { Frame } from "./frame.ts";
+import type { Ordering } from "./orderings.ts";
+import { isErrorQuantity, plainQuantity, plainValue } from "./quantities.ts";
+import type { Recipe } from "./recipe.ts";
+import { refit } from "./refit.ts";
+
+/** What stays the same while a claim is reviewed. */
+export interface Bench {
+  readonly claim: Claim;
+  readonly frame: Frame;
+  /** The regression exactly as claimed. */
+  readonly claimed: Recipe;
+  /** Lines beside the data that may be the time or the groups of the rows. */
+  readonly orderings: Ordering;
+}
+
+/** A recipe fitted in full and held against every reported number. */
+export interface Trial {
+  readonly recipe: Recipe;
+  readonly fit: Fit;
+  readonly compared: readonly Comparison[];
+  /** How the figures that rest on standard errors came out; classical where no kind fits; null where none is reported. */
+  readonly used: ErrorsUsed | null;
+  /** How many kinds were looked at until one fitted. */
+  readonly errorsTried: number;
+  readonly plainAgree: boolean;
+  readonly errorsAgree: boolean;
+}
+
+export const agreesThroughout = ({ plainAgree, errorsAgree }: Trial): boolean => plainAgree && errorsAgree;
+
+export const reportedErrors = ({ reported }: Claim): ReportedError[] =>
+  reported.filter((number): number is ReportedError => isErrorQuantity(number.quantity));
+
+/** @returns null where the recipe cannot be fitted at all. */
+export function trial(bench: Bench, recipe: Recipe): Trial | null {
+  const fitted = refit(bench.frame, recipe, { kind: "cases" });
+  return fitted?.ok === true ? trialOf(bench, recipe, fitted.value) : null;
+}
+
+export function trialOf(bench: Bench, recipe: Recipe, fit: Fit): Trial {
+  const errors = reportedErrors(bench.claim);
+  const plainAgree = bench.claim.reported.every((number) => {
+    const quantity = plainQuantity(number.quantity);
+    if (quantity === null) return true;
+    const found = plainValue(quantity, fit, recipe.model);
+    return found !== null && agrees(number, found);
+  });
+  const match = errors.length === 0 ? null : firstMatch(bench, { recipe, fit, errors, wide: plainAgree });
+  const used = match?.used ?? null;
+  return {
+    recipe,
+    fit,
+    compared: comparisons(bench.claim, { recipe, fit, used }),
+    used,
+    errorsTried: match?.tried ?? 0,
+    plainAgree,
+    errorsAgree: errors.length === 0 || match?.fits === true,
+  };
+}
+
+interface Matching {
+  readonly recipe: Recipe;
+  readonly fit: Fit;
+  readonly errors: readonly ReportedError[];
+  /** Whether all kinds are looked at, or the classical ones alone. */
+  readonly wide: boolean;
+}
+
+/** The first kind that gives all reported figures; the classical one where none does. */
+function firstMatch(bench: Bench, { recipe, fit, errors, wide }: Matching) {
+  const fitted = { coefficients: fit.coefficients, model: recipe.model };
+  let tried = 0;
+  let classical: ErrorKind | null = null;
+  for (const kind of wide ? allKinds(bench, recipe, fit) : plainKinds(fit)) {
+    tried++;
+    classical ??= kind;
+    const used = matchesOf(kind, errors, fitted)[0];
+    if (used !== undefined) return { used, tried, fits: true };
+  }
+  if (classical === null) return null;
+  return { used: { kind: classical, law: classical.laws[0]!, level: 0.05 }, tried, fits: false };
+}
+
+/** Every kind of standard errors that the sheet allows to be tried, simplest first. */
+export function* allKinds({ frame, orderings }: Bench, recipe: Recipe, fit: Fit): Generator<ErrorKind> {
+  yield* plainKinds(fit);
+  yield* timeKinds(fit, "");
+  for (const line of orderings.times) {
+    const ordered = refit(frame, recipe, { kind: "time", by: line });
+    if (ordered?.ok === true && !runsOn(ordered.value)) yield* timeKinds(ordered.value, `, rows by ${line.name}`);
+  }
+  for (const line of orderings.groups) {
+    const grouped = refit(frame, recipe, { kind: "groups", by: line });
+    if (grouped?.ok === true) yield* groupedKinds(grouped.value, line.name);
+  }
+}
+
+/** Whether the rows by time are the rows as they stand, one period each. */
+function runsOn({ design: { order, sourceRows } }: Fit): boolean {
+  const consecutive = (rows: Int32Array): boolean => rows.every((row, at) => at === 0 || row === rows[at - 1]! + 1);
+  return order.kind === "time" && consecutive(order.positions) && consecutive(sourceRows);
+}
+
+interface Compared {
+  readonly recipe: Recipe;
+  readonly fit: Fit;
+  readonly used: ErrorsUsed | null;
+}
+
+/** Every reported number beside what a fit gives for it. */
+export function comparisons({ reported }: Claim, { recipe: { model }, fit, used }: Compared): Comparison[] {
+  return reported.map((number) => {
+    const plain = plainQuantity(number.quantity);
+    const error = isErrorQuantity(number.quantity) ? number.quantity : null;
+    const byErrors = (): number | null =>
+      error === null || used === null ? null : errorValue(error, { coefficients: fit.coefficients, model }, used);
+    const recomputed = plain === null ? byErrors() : plainValue(plain, fit, model);
+    const finite = recomputed !== null && Number.isFinite(recomputed) ? recomputed : null;
+    return { reported: number, recomputed: finite, agrees: finite !== null && agrees(number, finite) };
+  });
+}
