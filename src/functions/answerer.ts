@@ -5,10 +5,12 @@ import type { Finding, Inquiry } from "../core/answer/inquire.ts";
 import { modelOf } from "../core/answer/modelOf.ts";
 import type { Question } from "../core/answer/question.ts";
 import { type Result, success } from "../core/problem/result.ts";
+import type { Source } from "../core/table/source.ts";
 import { fitCache } from "./fitCache.ts";
 import type { FunctionId } from "./functionTable.ts";
 import { type Called, inquiries } from "./inquiries.ts";
-import { type CalledData, readData } from "./readData.ts";
+import { onceFor, readOnce } from "./once.ts";
+import { type CalledData, type readData } from "./readData.ts";
 import { readSettingsArgument } from "./readSettings.ts";
 import type { Answering } from "./register.ts";
 import { type CallValues, plainReplies, replies } from "./replies.ts";
@@ -21,16 +23,18 @@ const mostFindings = 40;
 export function answerer(analyst: Analyst & Inquirer): Answering {
   const shareAnswer = fitCache<Answer>(mostAnswers);
   const shareFinding = fitCache<Finding>(mostFindings);
+  const read = readOnce();
+  const print = onceFor((columns: Source["columns"]) => fingerprint(columns));
   const look = ({ question, key, signal }: Asked, inquiry: Inquiry): Promise<Result<Finding>> =>
     shareFinding(`${key} ${JSON.stringify(inquiry)}`, signal, (stop) =>
       analyst.inquire(question, inquiry, quietly(stop)),
     );
   return async (id, values, signal) => {
     if (isPlain(id)) return plainReplies[id](values);
-    const asked = questionOf(values);
+    const asked = questionOf(values, read);
     if (!asked.ok) return asked;
     const { data, question } = asked.value;
-    const key = await keyOf(question);
+    const key = await keyOf(question, print);
     const answer = await shareAnswer(key, signal, (stop) => analyst.analyse(question, quietly(stop)));
     if (!answer.ok) return answer;
     if (!isInquiry(id)) return replies[id](answer.value, values);
@@ -54,10 +58,13 @@ const quietly = (signal: AbortSignal) => ({ signal, progress: () => undefined })
 const isPlain = (id: FunctionId): id is keyof typeof plainReplies => Object.hasOwn(plainReplies, id);
 const isInquiry = (id: FunctionId): id is keyof typeof inquiries => Object.hasOwn(inquiries, id);
 
-function questionOf(values: CallValues): Result<{ readonly question: Question; readonly data: CalledData }> {
+function questionOf(
+  values: CallValues,
+  read: typeof readData,
+): Result<{ readonly question: Question; readonly data: CalledData }> {
   const settings = readSettingsArgument(values["settings"]);
   if (!settings.ok) return settings;
-  const data = readData(values);
+  const data = read(values);
   if (!data.ok) return data;
   const model = modelOf(settings.value, data.value.parts);
   if (!model.ok) return model;
@@ -66,7 +73,7 @@ function questionOf(values: CallValues): Result<{ readonly question: Question; r
 }
 
 /** The content of the cells, where they stand in the arguments, and everything that was chosen. */
-async function keyOf({ source, model, options }: Question): Promise<string> {
+async function keyOf({ source, model, options }: Question, print: typeof fingerprint): Promise<string> {
   const places = source.columns.map(({ place }) => place);
-  return textFingerprint(JSON.stringify([await fingerprint(source.columns), places, model, options]));
+  return textFingerprint(JSON.stringify([await print(source.columns), places, model, options]));
 }

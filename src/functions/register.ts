@@ -37,13 +37,18 @@ function implementation(
     invocation.onCanceled = () => caller.abort();
     const reply = await replyTo({ signal: caller.signal, seconds: secondsPerCall }, (signal) =>
       answering(id, values, signal),
-    ).catch((fault: unknown) => {
-      refuse(ownFault(runtime, fault));
-    });
+    )
+      .catch((fault: unknown) => refuse(ownFault(runtime, fault)))
+      .finally(() => {
+        invocation.onCanceled = nothingToCancel;
+      });
     if (reply.ok) return leave(runtime, reply.value);
     return refuse("problem" in reply ? cellError(runtime, reply.problem) : notAvailable(runtime, reply.notApplicable));
   };
 }
+
+/** The runtime keeps the invocation of every call for ever, and with it whatever this callback can reach: the call's cells. */
+const nothingToCancel = (): void => undefined;
 
 /** Ends a call with the error of its cell. */
 function refuse(error: CustomFunctions.Error): never {

@@ -2,43 +2,59 @@ import type { CallResult } from "../excel/customFunctions.ts";
 import type { HostEvent } from "../excel/events.ts";
 import { errorMark } from "../workbook/elementTexts.ts";
 import type { Call, CallOutcome } from "../workbook/pendingCalls.ts";
-import { callFlag, messageType, notice } from "./messages.ts";
+import { callFlag, messageType, notice, type TravellingCall } from "./messages.ts";
 
 /** Longest message in characters; more calls go in further ones. */
 const longestMessage = 8_000_000;
 
 const noticeText = (entries: string): string => `{"type":${messageType.notice},"message":{"entries":[${entries}]}}`;
 
-/** The calls as messages to the runtime. Arguments are JSON already, so that a range is spelled out once for many calls. */
+/** The calls as messages to the runtime. Arguments are JSON already; each stands in its message once. */
 export function callTexts(calls: readonly Call[]): readonly string[] {
   const messages: string[] = [];
-  let entries: string[] = [];
-  let length = 0;
-  const send = (): void => {
-    if (entries.length > 0) messages.push(noticeText(entries.join(",")));
-    [entries, length] = [[], 0];
-  };
+  let message = emptyMessage();
   for (const call of calls) {
-    const flags = (carriesErrors(call) ? callFlag.errorsPass : 0) | (call.cancelable ? callFlag.cancelable : 0);
-    const parts = [
-      call.id,
-      JSON.stringify(call.functionId),
-      `[${call.arguments.join(",")}]`,
-      JSON.stringify(call.address),
-      flags,
-      JSON.stringify(call.parameterAddresses),
-    ];
-    const entry = `{"messageCategory":${notice.functions},"messageType":${notice.call},"message":[${parts.join(",")}]}`;
-    if (length + entry.length > longestMessage) send();
-    entries.push(entry);
-    length += entry.length;
+    const added = call.arguments.reduce((sum, text) => sum + (message.places.has(text) ? 0 : text.length), 0);
+    if (message.calls.length > 0 && message.length + added > longestMessage) {
+      messages.push(textOf(message));
+      message = emptyMessage();
+    }
+    add(message, call);
   }
-  send();
+  if (message.calls.length > 0) messages.push(textOf(message));
   return messages;
 }
 
-/** Only then need the runtime look through every element, which takes it longer than the call itself. */
-const carriesErrors = (call: Call): boolean => call.arguments.some((text) => text.includes(errorMark));
+interface Message {
+  /** The values in JSON, each with its place. */
+  readonly places: Map<string, number>;
+  readonly calls: TravellingCall[];
+  /** Values that hold errors: only then need the runtime look through every element, which takes it longer than the call. */
+  readonly erroneous: Set<number>;
+  length: number;
+}
+
+const emptyMessage = (): Message => ({ places: new Map(), calls: [], erroneous: new Set(), length: 0 });
+
+function add(message: Message, { id, functionId, cancelable, address, parameterAddresses, ...call }: Call): void {
+  const values = call.arguments.map((text) => placeOf(message, text));
+  const carriesErrors = values.some((place) => message.erroneous.has(place));
+  const flags = (carriesErrors ? callFlag.errorsPass : 0) | (cancelable ? callFlag.cancelable : 0);
+  message.calls.push([id, functionId, values, address, flags, parameterAddresses]);
+}
+
+function placeOf(message: Message, text: string): number {
+  const known = message.places.get(text);
+  if (known !== undefined) return known;
+  const place = message.places.size;
+  message.places.set(text, place);
+  message.length += text.length;
+  if (text.includes(errorMark)) message.erroneous.add(place);
+  return place;
+}
+
+const textOf = ({ places, calls }: Message): string =>
+  `{"type":${messageType.calls},"calls":${JSON.stringify(calls)},"values":[${[...places.keys()].join(",")}]}`;
 
 export function cancelText(ids: readonly number[]): string {
   const entries = ids.map((invocationId) => ({

@@ -13,6 +13,7 @@ import { startCalls, type Call, type CallDoors } from "../workbook/pendingCalls.
 import { followChanges } from "../workbook/shifts.ts";
 import { snapshotOf } from "../workbook/snapshot.ts";
 import { spellTables } from "../workbook/spellTables.ts";
+import { forgetRuns } from "../workbook/forgetRuns.ts";
 import { growTo } from "../workbook/write.ts";
 import { callTexts, cancelText, eventText, outcomeOf } from "./callTexts.ts";
 import { hands, type Hands } from "./hands.ts";
@@ -52,6 +53,7 @@ export function startDesk(grid: Grid, line: Transport, options: DeskOptions): De
   const functions = functionsOf({ line, server, options }, (results) => takeIn(book, results));
   registerFunctions(book, functions);
   spellTables(book);
+  forgetRuns(grid);
   calculation.onFinished(functions.calls.settle);
   const host = hostOf(book, { calculation, functions, server, profile: options.profile ?? "desktop" });
   book.listeners.add((change) => followChanges(book, change));

@@ -1,3 +1,4 @@
+import { deliverCalls, holdsCalls } from "./deliverCalls.ts";
 import { messageType } from "./messages.ts";
 import { isSetSupported } from "./requirementSets.ts";
 import type { Transport } from "./transport.ts";
@@ -53,12 +54,19 @@ export type Globals = Record<string, unknown>;
  */
 export function installLoader(globals: Globals, transport: Transport, surroundings: Surroundings): void {
   const bridge: Bridge = { sendMessageToHost: transport.send };
-  transport.receive((text) => bridge.onMessageFromHost?.(text));
+  transport.receive((text) => {
+    if (holdsCalls(text)) deliverCalls(text, distributorOf(globals));
+    else bridge.onMessageFromHost?.(text);
+  });
   globals["_richApiNativeBridge"] = bridge;
   const ready = once(() => transport.send(JSON.stringify({ type: messageType.ready })));
   globals["CustomFunctions"] = association(ready);
   globals["Office"] = office(surroundings, ready);
 }
+
+/** There once the library has run, which is before the add-in says that it is ready for calls. */
+const distributorOf = (globals: Globals): Parameters<typeof deliverCalls>[1] =>
+  (globals["OfficeExtension"] as { HostBridge: { instance: Parameters<typeof deliverCalls>[1] } }).HostBridge.instance;
 
 /** An add-in shows itself by its first word; what it says in the same breath belongs to it. */
 function once(work: () => void): () => void {
