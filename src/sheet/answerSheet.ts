@@ -1,6 +1,6 @@
 import type { Answer } from "../core/answer/answer.ts";
 import { chartsAt, chartsSection } from "./chartsSection.ts";
-import { page, pageWidths } from "./columns.ts";
+import { lineHeight, page, pageWidths } from "./columns.ts";
 import { driversSection } from "./driversSection.ts";
 import { evidenceSection } from "./evidenceSection.ts";
 import { type Figures, keptFigures, liveFigures } from "./figures.ts";
@@ -8,7 +8,7 @@ import { fourCasesSection } from "./fourCasesSection.ts";
 import { guardsSection } from "./guardsSection.ts";
 import { type SheetFacts, howMadeSection, settingsArea } from "./howMadeSection.ts";
 import { pageBreaksOf } from "./pageBreaks.ts";
-import type { SheetPlan } from "./plan.ts";
+import type { PlanFormat, SheetPlan } from "./plan.ts";
 import { titleSection, verdictSection } from "./plainWordsSection.ts";
 import { rectangle, stack } from "./section.ts";
 
@@ -35,7 +35,7 @@ export function planAnswer(answer: Answer, facts: SheetFacts, kind: SheetKind): 
       ...charts.flatMap(({ blocks }) => blocks),
       ...figures.blocks,
     ],
-    formats: [...formats, ...figures.formats, ...charts.flatMap((chart) => chart.formats)],
+    formats: [evenRows(rows.length), ...formats, ...figures.formats, ...charts.flatMap((chart) => chart.formats)],
     links,
     columnWidths: pageWidths,
     frozenRows: 1,
@@ -49,12 +49,18 @@ export function planAnswer(answer: Answer, facts: SheetFacts, kind: SheetKind): 
   };
 }
 
+/** Every row has its height, also those that nothing else says it of. */
+const evenRows = (rows: number): PlanFormat => ({
+  area: { row: 0, column: 0, rows, columns: page.columns },
+  rowHeight: lineHeight,
+});
+
 const partsOf = (answer: Answer, facts: SheetFacts, figures: Figures) => [
   titleSection(answer, facts),
   verdictSection(answer, figures),
   fourCasesSection(answer, figures),
   driversSection(answer, figures),
-  chartsSection(answer, figures.blocks.length > 0),
+  chartsSection(answer),
   evidenceSection(answer, figures),
   guardsSection(answer),
   howMadeSection(answer, facts),

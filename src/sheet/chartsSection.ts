@@ -21,9 +21,9 @@ function heightOf({ drivers }: Answer): number {
 }
 
 /** The heading over the charts and the rows they lie on; the charts themselves are placed by `chartsAt`. */
-export function chartsSection(answer: Answer, live: boolean): Section {
+export function chartsSection(answer: Answer): Section {
   const blank = Array.from({ length: heightOf(answer) }, () => []);
-  return section([[text(live ? "Pictures, when this sheet was made" : "Pictures")], ...blank], [headingFormat(0)]);
+  return section([[text("Pictures, when this sheet was made")], ...blank], [headingFormat(0)]);
 }
 
 /** The last columns of the intervals and of the charts beside them. */

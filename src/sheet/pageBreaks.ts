@@ -8,31 +8,43 @@ export interface Stretch {
   readonly whole: boolean;
 }
 
-/** Height of the print to its width on a lying A4 page within the margins; Letter leaves more. */
-const paper = (595 - 58) / (842 - 72);
+/** Height of the print to its width on a lying page within the margins: A4, Letter. */
+const shapes = [(595 - 58) / (842 - 72), (612 - 58) / (792 - 72)];
+/** Width of a digit to that of the usual font's: programs without it take a wider one, and print all smaller. */
+const digits = [1, 1.29];
+const papers = shapes.flatMap((shape) => digits.map((digit) => shape * digit));
 
 /**
- * The rows that a new page begins with: one that is whole and would run over the page's end begins the next, and a long
- * table does not begin with its last few lines at the foot of a page.
+ * The rows that a new page begins with: what is whole and would run over the page's end on any paper begins the next,
+ * and a long table does not begin with its last few lines at the foot of a page.
  */
 export function pageBreaksOf(stretches: readonly Stretch[], formats: readonly PlanFormat[]): number[] {
   const heights = heightsOf(formats);
-  const full = paper * pageWidths.slice(0, page.columns).reduce((sum, width) => sum + pointsOf(width), 0);
+  const width = sum(pageWidths.slice(0, page.columns).map(pointsOf));
   const breaks: number[] = [];
   let row = 0;
-  let used = 0;
+  let sheets = papers.map((shape) => ({ full: shape * width, used: 0 }));
   for (const { rows, whole } of stretches) {
     const lines = Array.from({ length: rows }, (_, index) => heights.get(row + index) ?? lineHeight);
     const needed = sum(whole ? lines : lines.slice(0, fewestLines));
-    if (used > 0 && used + needed > full && needed <= full) {
+    if (sheets.some(({ full, used }) => used > 0 && used + needed > full && needed <= full)) {
       breaks.push(row);
-      used = 0;
+      sheets = sheets.map(({ full }) => ({ full, used: 0 }));
     }
-    for (const line of lines) used = used + line > full ? line : used + line;
+    sheets = sheets.map(({ full, used }) => ({ full, used: usedAfter(lines, { full, used }) }));
     row += rows;
   }
   return breaks;
 }
+
+interface Paper {
+  readonly full: number;
+  readonly used: number;
+}
+
+/** How far down the last page the lines end; programs begin another page where one is full. */
+const usedAfter = (lines: readonly number[], { full, used }: Paper): number =>
+  lines.reduce((sofar, line) => (sofar + line > full ? line : sofar + line), used);
 
 /** Of a table that may be parted, this many lines stand together at least. */
 const fewestLines = 8;

@@ -80,7 +80,7 @@ async function writeAnswer({ desk, host }: DeskHost, made: Awaited<ReturnType<ty
 
 /** The drivers' table as it stands on a result sheet: the row of each term, its numbers alone. */
 function shownFigures(desk: NodeDesk, sheet: string, { terms }: Answer): number[][] {
-  const cells = desk.values(`'${sheet}'!A1:N80`);
+  const cells = desk.values(`'${sheet}'!A1:K80`);
   return terms.map((term) => {
     const row = cells.find((line) => line[0] === term);
     if (row === undefined) throw new Error(`no row of ${term}`);
@@ -174,7 +174,7 @@ describe("from cells to a result sheet", () => {
     const kept = opened.desk.snapshot().sheets.find(({ name }) => name === sheet)!;
     const cells = kept.rows.flat().filter((cell) => typeof cell === "object" && cell !== null && "formula" in cell);
     expect(cells).toEqual([]);
-    expect(kept.charts).toHaveLength(2);
+    expect(kept.charts).toHaveLength(3);
     expectSame(shownFigures(opened.desk, sheet, made.answer), figuresOf(made.answer));
   });
 

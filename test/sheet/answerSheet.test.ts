@@ -89,7 +89,7 @@ describe.each(["kept", "live"] as const)("a %s sheet", (kind) => {
       "In plain words",
       "Which standard errors, and why",
       "Drivers",
-      kind === "live" ? "Pictures, when this sheet was made" : "Pictures",
+      "Pictures, when this sheet was made",
       "Evidence",
       "Guards, when this sheet was made",
       "How this was made",

@@ -152,7 +152,7 @@ describe("workbooks that another program saved", () => {
     const drivers = "GNP.deflator,GNP,Unemployed,Armed.Forces,Population,Year";
     const line = ["longley.xlsx", "--outcome", "Employed", "--drivers", drivers, "--order", "year"];
     const ran = await run(line, files);
-    expect(ran.out).toContain("16 years\n  from 1947 to 1962");
+    expect(ran.out).toMatch(/16\s+years\s+from\s+1947\s+to\s+1962/);
   });
 });
 
@@ -204,7 +204,7 @@ describe("--save", () => {
     if (!kept.ok) throw new Error(kept.because);
     const names = kept.value.sheets.map(({ name }) => name);
     expect(names).toEqual([...demoBook().sheets.map(({ name }) => name), "Repairs answer"]);
-    expect(kept.value.sheets.at(-1)!.charts.map(({ series }) => series.length)).toEqual([1, 3]);
+    expect(kept.value.sheets.at(-1)!.charts.map(({ series }) => series.length)).toEqual([7, 1, 1]);
   });
 
   it("the fingerprint is of the columns used, whatever stands beside them", async () => {
