@@ -6,6 +6,7 @@ import type { SheetKind } from "../sheet/answerSheet.ts";
 import { CompareBar } from "./compare/CompareBar.tsx";
 import { CellLink } from "./parts/CellLink.tsx";
 import { usePane } from "./paneContext.ts";
+import { ReviewBar } from "./review/ReviewBar.tsx";
 
 const useStyles = makeStyles({
   bar: {
@@ -32,6 +33,9 @@ export function ActionBar(): ReactNode {
   const styles = useStyles();
   const { state } = usePane();
   if (state.busy !== null) return <Working busy={state.busy} />;
+  if (state.section === "review") {
+    return state.review === null ? null : <ReviewBar review={state.review} className={styles.bar} />;
+  }
   if (state.section === "data") return state.data === null ? null : <AskBar />;
   if (state.section === "answer" && state.comparison !== null) return <CompareBar className={styles.bar} />;
   return state.answered === null ? null : <WriteBar />;

@@ -12,6 +12,7 @@ import { DataSection } from "./data/DataSection.tsx";
 import { EvidenceSection } from "./evidence/EvidenceSection.tsx";
 import { useKeptFocus } from "./look/useKeptFocus.ts";
 import { usePane } from "./paneContext.ts";
+import { ReviewSection } from "./review/ReviewSection.tsx";
 
 /** Below this height nothing may stand fixed, or zoomed pages would hide what has the focus. */
 const tooLow = "@media (max-height: 280px)";
@@ -32,6 +33,7 @@ const sections: readonly (readonly [Section, string])[] = [
   ["data", "Data"],
   ["answer", "Answer"],
   ["evidence", "Evidence"],
+  ["review", "Review"],
 ];
 
 /** Tabs above, one section that scrolls, what can be done next below. */
@@ -59,7 +61,8 @@ export function Shell(): ReactNode {
           {section === "answer" &&
             (state.comparison === null ? <AnswerSection /> : <CompareSection comparison={state.comparison} />)}
           {section === "evidence" && <EvidenceSection />}
-          {section !== "evidence" && <SheetTools />}
+          {section === "review" && <ReviewSection />}
+          {(section === "data" || section === "answer") && <SheetTools />}
         </div>
       </main>
       <ActionBar />
