@@ -7,7 +7,7 @@ const byOrder: readonly string[] = ["breusch-godfrey", "ljung-box", "arch"];
 /** An answer as the object that `--json` prints: full double precision, stable keys. */
 export function answerJson(answer: Answer): object {
   const { observations, outcome, terms, coefficients, fit, inference, joint, drivers } = answer;
-  const { guards, firmness } = answer;
+  const { guards, firmness, estimates } = answer;
   const { verdict, rows, leftOut, leftOutCount, notes } = answer;
   return {
     ...{ observations, outcome, terms, coefficients },
@@ -15,7 +15,7 @@ export function answerJson(answer: Answer): object {
     fit,
     tests: testsJson(answer.tests),
     choice: choiceJson(answer),
-    ...{ inference, joint, guards, firmness, drivers, verdict, rows, leftOut, leftOutCount, notes },
+    ...{ inference, joint, estimates, guards, firmness, drivers, verdict, rows, leftOut, leftOutCount, notes },
   };
 }
 

@@ -105,7 +105,9 @@ export const answerFixture: Answer = {
     white: jointly(19.25, 0.00066),
     neweyWest: jointly(17.75, 0.0014),
     grouped: null,
+    asked: null,
   },
+  estimates: [],
   firmness: {
     choices: [],
     terms: terms.map((term, row) => ({

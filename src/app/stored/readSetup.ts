@@ -1,7 +1,8 @@
 import type { LagRule } from "../../core/covariance/choice.ts";
+import { whiteWishes } from "../../core/decision/wish.ts";
 import type { Transform } from "../../core/design/model.ts";
 import type { ColumnSetup, Setup } from "../setup.ts";
-import { type Reader, eitherOf, flag, listOf, number, objectOf, oneOf, orNull, text } from "./readers.ts";
+import { type Reader, eitherOf, flag, listOf, number, objectOf, oneOf, orNull, since, text } from "./readers.ts";
 
 const transform: Reader<Transform> = eitherOf<Transform>(
   objectOf({ kind: oneOf("none", "logarithm", "square") }),
@@ -34,11 +35,13 @@ const column: Reader<ColumnSetup> = objectOf<ColumnSetup>({
 const options: Reader<Setup["options"]> = objectOf<Setup["options"]>({
   policy: oneOf("careful", "textbook", "always-robust"),
   fixed: orNull(objectOf({ errors: oneOf("classical", "white", "newey-west", "grouped"), reason: orNull(text) })),
-  whiteVersion: oneOf("HC0", "HC1", "HC2", "HC3", "HC4", "HC4m", "HC5"),
+  whiteVersion: oneOf(...whiteWishes),
   groupedVersion: oneOf("CR0", "CR1", "CR2"),
   lags: orNull(lagRule),
   adjusted: flag,
   level: number,
+  estimates: since(listOf(text), []),
+  jointTest: since(listOf(text), []),
 });
 
 /** A set-up as it was stored; whatever is not as a set-up should be makes it none. */

@@ -10,10 +10,11 @@ import type { RowOrder } from "../design/design.ts";
 import type { Fit } from "../fit/fit.ts";
 import type { InferenceTable } from "../inference/inference.ts";
 import { inferenceOf } from "../inference/inferenceOf.ts";
-import { allDriversZero, jointTest } from "../inference/joint.ts";
+import { type Restrictions, allDriversZero, jointTest } from "../inference/joint.ts";
 import type { Problem } from "../problem/problem.ts";
 import { type Result, failure, success } from "../problem/result.ts";
 import type { AllStandardErrors, Answer, GroupedErrors } from "./answer.ts";
+import { askedEstimates, askedRestrictions } from "./asked.ts";
 import { againstOf } from "./drivers.ts";
 import type { Options } from "./options.ts";
 
@@ -28,6 +29,7 @@ interface AllErrors {
   readonly standardErrors: AllStandardErrors;
   readonly inference: Answer["inference"];
   readonly joint: Answer["joint"];
+  readonly estimates: Answer["estimates"];
 }
 
 /** Every kind of standard errors that what rows are allows, and the inference that follows from each. */
@@ -45,11 +47,14 @@ export function allErrors(fit: Fit, setting: Setting): Result<AllErrors> {
   const inForce = inForceOf(fit, of, setting);
   const zero = zeroError(fit, inForce);
   if (zero !== null) return failure(zero);
-  return success({
-    standardErrors: standardErrorsFrom(fit, of, setting),
-    inference: inferenceFrom(fit, inForce, setting),
-    joint: jointFrom(fit, inForce),
-  });
+  const inference = inferenceFrom(fit, inForce, setting);
+  const joint = jointFrom(fit, inForce, setting);
+  if (!joint.ok) return joint;
+  const covariance = inForce[setting.decision.inForce.errors.kind]!;
+  const estimates = askedEstimates(fit, { covariance, reference: inference.inForce.reference }, setting.options);
+  if (!estimates.ok) return estimates;
+  const standardErrors = standardErrorsFrom(fit, of, setting);
+  return success({ standardErrors, inference, joint: joint.value, estimates: estimates.value });
 }
 
 type Lookup = (choice: ErrorsChoice) => Covariance | null;
@@ -146,8 +151,17 @@ function inferenceFrom(fit: Fit, covariances: ByKind, { decision, options, sizes
   return { classical, white, neweyWest: table("newey-west"), grouped: table("grouped"), inForce };
 }
 
-function jointFrom(fit: Fit, covariances: ByKind): Answer["joint"] {
-  const restrictions = allDriversZero(fit);
+function jointFrom(fit: Fit, covariances: ByKind, { decision, options }: Setting): Result<Answer["joint"]> {
+  const restrictions = askedRestrictions(fit, options);
+  if (!restrictions.ok) return restrictions;
+  const all = jointByKind(fit, covariances, allDriversZero(fit));
+  if (restrictions.value === null) return success({ ...all, asked: null });
+  const { texts, ...wanted } = restrictions.value;
+  const inForce = jointTest(fit, covariances[decision.inForce.errors.kind]!, wanted);
+  return success({ ...all, asked: { texts, ...jointByKind(fit, covariances, wanted), inForce } });
+}
+
+function jointByKind(fit: Fit, covariances: ByKind, restrictions: Restrictions): Omit<Answer["joint"], "asked"> {
   const test = (covariance: Covariance | null) =>
     covariance === null ? null : jointTest(fit, covariance, restrictions);
   const [classical, white] = [test(covariances.classical), test(covariances.white)];

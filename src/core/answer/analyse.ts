@@ -10,6 +10,7 @@ import { type Result, success } from "../problem/result.ts";
 import { type Firmness, firmness } from "../robustness/firmness.ts";
 import { allErrors } from "./allErrors.ts";
 import type { Answer, FitFigures } from "./answer.ts";
+import { estimateSentence, jointSentence } from "./askedWords.ts";
 import { againstOf, driverAnswers } from "./drivers.ts";
 import { guardsOf } from "./guards.ts";
 import type { Options } from "./options.ts";
@@ -50,7 +51,7 @@ function answerFrom(fit: Fit, { source, options }: Question, report: Report): Re
   report("Standard errors", 0.55);
   const errors = allErrors(fit, { decision, options, lags, sizes });
   if (!errors.ok) return errors;
-  const { standardErrors, inference, joint } = errors.value;
+  const { standardErrors, inference, joint, estimates } = errors.value;
   report("The other tests", 0.7);
   const tests = [...deciding, ...furtherTests(fit, decision.inForce.errors, testOrder)];
   report("How firm it is", 0.85);
@@ -67,6 +68,7 @@ function answerFrom(fit: Fit, { source, options }: Question, report: Report): Re
     standardErrors,
     inference,
     joint,
+    estimates,
     firmness: placed(firm.value, places),
     guards,
   };
@@ -75,7 +77,7 @@ function answerFrom(fit: Fit, { source, options }: Question, report: Report): Re
 
 type Found = Pick<
   Answer,
-  "decision" | "lags" | "tests" | "standardErrors" | "inference" | "joint" | "firmness" | "guards"
+  "decision" | "lags" | "tests" | "standardErrors" | "inference" | "joint" | "estimates" | "firmness" | "guards"
 >;
 
 /** Each coefficient's most telling row by its place in the sheet. */
@@ -97,7 +99,9 @@ function spoken(fit: Fit, found: Found, { options, places }: { options: Options;
     rows: rowsSummary(design),
     options,
   };
-  const verdict = [openingSentence(said), choiceSentence(said), ...sentences(drivers), ...found.decision.cautions];
+  const asked = askedSentences(found, options.level);
+  const opening = [openingSentence(said), choiceSentence(said)];
+  const verdict = [...opening, ...sentences(drivers), ...asked, ...found.decision.cautions];
   const { leftOut, leftOutCount, notes } = design;
   return {
     ...said,
@@ -112,6 +116,11 @@ function spoken(fit: Fit, found: Found, { options, places }: { options: Options;
 
 const sentences = (drivers: Answer["drivers"]): string[] =>
   drivers.flatMap(({ sentence }) => (sentence === null ? [] : [sentence]));
+
+const askedSentences = ({ estimates, joint }: Found, level: number): string[] => [
+  ...estimates.map((estimate) => estimateSentence(estimate, level)),
+  ...(joint.asked === null ? [] : [jointSentence(joint.asked, level)]),
+];
 
 function titleOf({ outcome, terms }: Design): string {
   const drivers = terms.filter(({ meaning }) => meaning.kind !== "constant").map(({ name }) => name);

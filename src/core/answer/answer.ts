@@ -5,6 +5,7 @@ import type { TestOutcome } from "../diagnostics/outcome.ts";
 import type { InferenceTable } from "../inference/inference.ts";
 import type { JointOutcome } from "../inference/joint.ts";
 import type { ChoiceTable, TermFirmness } from "../robustness/firmness.ts";
+import type { AskedEstimate } from "./asked.ts";
 import type { Guards } from "./guards.ts";
 import type { Options } from "./options.ts";
 
@@ -36,7 +37,11 @@ export interface Answer {
     readonly white: JointOutcome;
     readonly neweyWest: JointOutcome | null;
     readonly grouped: JointOutcome | null;
+    /** Restrictions that were asked for; null where none were. */
+    readonly asked: AskedJoint | null;
   };
+  /** Numbers made of the coefficients that were asked for, under the standard errors in force. */
+  readonly estimates: readonly AskedEstimate[];
   /** Every choice of standard errors side by side, and what each conclusion hangs on. */
   readonly firmness: {
     readonly choices: readonly ChoiceTable[];
@@ -53,6 +58,16 @@ export interface Answer {
   readonly notes: readonly string[];
   readonly options: Options;
   readonly points: ResidualPoints;
+}
+
+/** A test of the restrictions asked for, under each kind of standard errors. */
+export interface AskedJoint {
+  readonly texts: readonly string[];
+  readonly classical: JointOutcome;
+  readonly white: JointOutcome;
+  readonly neweyWest: JointOutcome | null;
+  readonly grouped: JointOutcome | null;
+  readonly inForce: JointOutcome;
 }
 
 export interface AllStandardErrors {

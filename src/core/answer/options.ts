@@ -8,6 +8,10 @@ export interface Options extends ErrorsWish {
   readonly against: Readonly<Record<string, number>>;
   /** Words for one unit by column: "repairs a month", "rainy day". */
   readonly units: Readonly<Record<string, string>>;
+  /** Numbers made of the coefficients: "Price + Rain", "Price / (1 - Lagged) = 2", "Price > 0". */
+  readonly estimates: readonly string[];
+  /** Restrictions on the coefficients that are tested at once: "Price = 0", "Rain = Fuel". */
+  readonly jointTest: readonly string[];
 }
 
 export const defaultOptions: Options = {
@@ -20,4 +24,6 @@ export const defaultOptions: Options = {
   level: 0.05,
   against: {},
   units: {},
+  estimates: [],
+  jointTest: [],
 };

@@ -47,6 +47,9 @@ const unquoted = (part: string): string => part.replace(/^"(.*)"$/s, "$1").trim(
 /** Headings between commas; one that holds a comma or an equals sign stands in double quotes. */
 export const readList = (text: string): string[] => partsBetween(text, ",").map(unquoted);
 
+/** Arithmetic between commas, left as it is written: which names it may use is known once the columns are. */
+export const readExpressions = (text: string): string[] => partsBetween(text, ",");
+
 const kernels: readonly Kernel[] = ["bartlett", "parzen", "quadratic spectral"];
 
 const simpleRules = ["careful", "thumb", "cube root"] as const;

@@ -4,6 +4,7 @@ import {
   readCalendar,
   readDecimal,
   readErrors,
+  readExpressions,
   readLags,
   readLevel,
   readList,
@@ -210,6 +211,21 @@ export const settingTable: readonly SettingSpec[] = [
     standard: "0",
     meaning: "The value each driver is tested against.",
     read: option("against", readNamedNumbers),
+  },
+  {
+    name: "estimates",
+    values: "sums of coefficients or a quotient of two, separated by commas",
+    standard: "none",
+    meaning:
+      "Numbers made of the coefficients, each held against a value: Price + Rain, Price / (1 - Lagged) = 2, or one-sided Price > 0.",
+    read: option("estimates", readExpressions),
+  },
+  {
+    name: "joint test",
+    values: "Price = 0, Rain = Fuel",
+    standard: "none",
+    meaning: "Equations of the coefficients that are tested all at once.",
+    read: option("jointTest", readExpressions),
   },
   {
     name: "units",

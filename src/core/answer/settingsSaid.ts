@@ -61,6 +61,8 @@ function optionPairs(options: Options): SettingPair[] {
     ["small-sample factor", options.adjusted ? "" : "no"],
     ["level", differs("level") ? String(options.level) : ""],
     ["against", named(options.against)],
+    ["estimates", options.estimates.join(", ")],
+    ["joint test", options.jointTest.join(", ")],
     ["units", named(options.units)],
   ]);
 }

@@ -55,6 +55,8 @@ const options: fc.Arbitrary<Options> = fc.record({
   adjusted: fc.boolean(),
   level: fc.constantFrom(0.01, 0.05, 0.1),
   against: fc.constantFrom({}, { [columns[0]]: -1, Advertising: 0.25 }),
+  estimates: fc.constantFrom([], ["Advertising > 1", '"Price, new" / (1 - Advertising) = 2']),
+  jointTest: fc.constantFrom([], ["Advertising = 0", '"Price, new" = 2 * Advertising']),
   units: fc.constantFrom({}, { Repairs: "repairs a month, all shops" }),
 });
 
