@@ -4,6 +4,8 @@ import type { Book } from "./book.ts";
 import type { Claim } from "./claim.ts";
 import type { BookReview } from "./claimReview.ts";
 import type { Finding } from "./finding.ts";
+import { type FormulaCell, readFormulas } from "./found/formulaCells.ts";
+import { claimOf, gathered } from "./found/gatherClaims.ts";
 
 /** Cells that someone points at as the report of a regression, and what they say of its data. */
 export interface Pointed {
@@ -37,6 +39,16 @@ export interface BookClaims {
  *   pointing there is always an answer, empty where the book reports no regression.
  */
 export function claimsOf(book: Book, asked: Asked, report: Report): Result<BookClaims> {
-  report(asked.sheet ?? "All sheets", book.sheets.length === 0 ? 1 : 0);
-  return success({ claims: [], unread: [], craft: [] });
+  const claims: Claim[] = [];
+  const unread: BookReview["unread"][number][] = [];
+  const cells: FormulaCell[] = [];
+  for (const [index, sheet] of book.sheets.entries()) {
+    report("Looking for regressions", index / book.sheets.length);
+    if (asked.sheet !== null && asked.sheet.toLowerCase() !== sheet.sheet.toLowerCase()) continue;
+    const read = readFormulas(sheet, book);
+    cells.push(...read.cells);
+    unread.push(...read.unread);
+  }
+  claims.push(...gathered(cells, book).map(claimOf).filter((claim) => claim !== null));
+  return success({ claims, unread, craft: [] });
 }

@@ -30,11 +30,17 @@ export const isRegressionFormula = (formula: string): boolean => regression.test
 
 export const isTotalFormula = (formula: string): boolean => totals.test(formula);
 
-/** Tells the formulas that can bear on a regression: they call one, or a name that stands for one, or make a total. */
+/** Tells the formulas that can bear on a regression: those that show one, and those that make a total. */
 export function isTelling(names: readonly BookName[]): (formula: string) => boolean {
+  const shows = showsRegression(names);
+  return (formula) => shows(formula) || isTotalFormula(formula);
+}
+
+/** Tells the formulas that call a regression function, or a name that stands for one. */
+export function showsRegression(names: readonly BookName[]): (formula: string) => boolean {
   const standing = names.filter(({ refersTo }) => isRegressionFormula(refersTo)).map(({ name }) => name);
   const named = standing.length === 0 ? null : new RegExp(mentioned(standing), "iu");
-  return (formula) => isRegressionFormula(formula) || isTotalFormula(formula) || named?.test(formula) === true;
+  return (formula) => isRegressionFormula(formula) || named?.test(formula) === true;
 }
 
 const mentioned = (names: readonly string[]): string =>

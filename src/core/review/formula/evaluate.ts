@@ -1,0 +1,109 @@
+import { numberAt, sheetNamed } from "../cellsOfBook.ts";
+import { combined, quantityIn, scaled } from "./arithmetic.ts";
+import { type Meant, type Scope, placeOf, standsFor } from "./places.ts";
+import { type Regression, regressionOf } from "./regression.ts";
+import { valuesOfCalls } from "./regressionValues.ts";
+import { type RegressionFunction, regressionFunctions } from "./telling.ts";
+import type { Formula } from "./tree.ts";
+import { type Value, cornerOf, each, known, unknown } from "./values.ts";
+import { valueFunctions } from "./valueFunctions.ts";
+import { whyUnread } from "./whyUnread.ts";
+
+/** What was met on the way through a formula. */
+export interface Met {
+  readonly regressions: { readonly name: RegressionFunction; readonly regression: Regression }[];
+  /** Why regressions in it could not be read. */
+  readonly unread: string[];
+}
+
+export const nothingMet = (): Met => ({ regressions: [], unread: [] });
+
+/** What a formula shows, in terms of the regressions in it. */
+export function evaluate(formula: Formula, scope: Scope, met: Met): Value {
+  switch (formula.kind) {
+    case "number":
+      return known(formula.value);
+    case "percent":
+      return scaled(evaluate(formula.of, scope, met), 0.01);
+    case "prefix": {
+      const of = evaluate(formula.of, scope, met);
+      if (formula.sign === "@") return cornerOf(of);
+      return formula.sign === "-" ? each(of, (one) => scaled(one, -1)) : of;
+    }
+    case "operation":
+      return operated(formula, scope, met);
+    case "array":
+      return { kind: "block", rows: formula.rows.map((row) => row.map((one) => evaluate(one, scope, met))) };
+    case "call":
+      return called(formula, scope, met);
+    case "name":
+    case "cells":
+    case "structured":
+      return atPlace(formula, scope, met);
+    default:
+      return unknown(whyUnread.goesIntoArithmetic);
+  }
+}
+
+function operated({ sign, left, right }: Extract<Formula, { kind: "operation" }>, scope: Scope, met: Met): Value {
+  return combined(sign, evaluate(left, scope, met), evaluate(right, scope, met));
+}
+
+/** A name may stand for a formula; cells stand for the number in them. */
+function atPlace(formula: Formula, scope: Scope, met: Met): Value {
+  const place = placeOf(formula, scope);
+  if (place === null || !place.ok) {
+    const meant = formula.kind === "name" ? standsFor(formula, scope) : null;
+    return meant?.ok === true
+      ? evaluate(meant.value.formula, meant.value.scope, met)
+      : unknown(whyUnread.goesIntoArithmetic);
+  }
+  const { sheet: name, row, column, rows, columns } = place.value;
+  const sheet = sheetNamed(scope.book, name);
+  const number = sheet === null || rows * columns !== 1 ? null : numberAt({ sheet, row, column });
+  return number === null ? unknown(whyUnread.goesIntoArithmetic) : known(number);
+}
+
+type Call = Extract<Formula, { kind: "call" }>;
+
+const isRegressionFunction = (name: string): name is RegressionFunction => Object.hasOwn(regressionFunctions, name);
+
+function called(call: Call, scope: Scope, met: Met): Value {
+  const { name, arguments: given } = call;
+  if (isRegressionFunction(name)) return regressed(name, given, { scope, met });
+  if (name === "LET") return letIn(given, scope, met);
+  const values = given.map((one) => (one.kind === "missing" ? undefined : evaluate(one, scope, met)));
+  const value = valueFunctions[name]?.(values);
+  return value ?? unknown(whyUnread.goesInto(name));
+}
+
+interface Way {
+  readonly scope: Scope;
+  readonly met: Met;
+}
+
+function regressed(name: RegressionFunction, given: readonly Formula[], { scope, met }: Way): Value {
+  const regression = regressionOf(name, given, scope);
+  if (!regression.ok) {
+    met.unread.push(regression.why);
+    return unknown(regression.why);
+  }
+  met.regressions.push({ name, regression: regression.value });
+  return valuesOfCalls[name](regression.value, { given, scope });
+}
+
+/** LET(name, meaning, ..., result): each name may speak of those before it. */
+function letIn(given: readonly Formula[], scope: Scope, met: Met): Value {
+  const names = new Map<string, Meant>(scope.given);
+  for (let index = 0; index + 1 < given.length; index += 2) {
+    const [name, meaning] = [given[index]!, given[index + 1]!];
+    if (name.kind !== "name") return unknown(whyUnread.notAFormula);
+    names.set(name.name.toLowerCase(), { formula: meaning, scope: { ...scope, given: new Map(names) } });
+  }
+  const result = given.at(-1);
+  return result === undefined ? unknown(whyUnread.notAFormula) : evaluate(result, { ...scope, given: names }, met);
+}
+
+/** The quantity in each cell of a result, as far as it is one; a result that fills one cell shows its corner. */
+export const quantitiesIn = (value: Value) =>
+  (value.kind === "block" ? value.rows : [[value]]).map((row) => row.map(quantityIn));
