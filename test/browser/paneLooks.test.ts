@@ -27,6 +27,8 @@ const colours = [
 const open = (page: Page, ...names: (string | RegExp)[]): Promise<void> =>
   names.reduce((before, name) => before.then(() => button(page, name).first().click()), Promise.resolve());
 
+const listRegressions = "List the regressions in this workbook";
+
 /** Every state of the pane, as a person comes to it. */
 const states: Readonly<Record<string, (page: Page) => Promise<void>>> = {
   empty: () => Promise.resolve(),
@@ -56,6 +58,31 @@ const states: Readonly<Record<string, (page: Page) => Promise<void>>> = {
   evidence: async (page) => {
     await getAnswer(page);
     await openTab(page, "Evidence");
+  },
+  "a review to begin": async (page) => {
+    await openTab(page, "Review");
+    await open(page, "Say where typed results come from");
+  },
+  reviewing: async (page) => {
+    await openTab(page, "Review");
+    await page.evaluate(() => (window.stage.hold = "next"));
+    await open(page, listRegressions);
+    await page.getByText(/explains the numbers, 25 %/).waitFor();
+  },
+  "regressions found": async (page) => {
+    await openTab(page, "Review");
+    await open(page, listRegressions, "Write all 2 reviews to a sheet", "Review something else");
+    await button(page, "Repairs review").waitFor();
+  },
+  "a regression reviewed": async (page) => {
+    await openTab(page, "Review");
+    await open(page, listRegressions, /Changes the conclusion/, "As text", "Copy as text");
+  },
+  "no regression found": async (page) => {
+    await openTab(page, "Review");
+    await page.evaluate(() => (window.stage.listed = { ...window.stage.listed, claims: [] }));
+    await open(page, listRegressions);
+    await page.getByText("none of them could be read").waitFor();
   },
   "a fault to mend": async (page) => {
     await useSelection(page);

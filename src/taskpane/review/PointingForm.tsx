@@ -63,7 +63,7 @@ function PointingLine({ field, label, placeholder }: PointingLineProps): ReactNo
       />
       <Button
         size="small"
-        aria-label={`Take the selected cells: ${label}`}
+        aria-label={`Selection for: ${label}`}
         disabledFocusable={state.busy !== null}
         onClick={() => commands.review.point(field)}
       >

@@ -1,0 +1,133 @@
+import type { Browser, Page } from "playwright-core";
+import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from "vitest";
+import { claimReviewFixture, gravest, slight, smaller } from "../support/reviewFixture.ts";
+import { openPane } from "./panePage/openPane.ts";
+import { announced, button, focused, heading, openTab } from "./panePage/steps.ts";
+import { launchBrowser } from "./support/browser.ts";
+
+let browser: Browser;
+let page: Page;
+
+beforeAll(async () => {
+  browser = await launchBrowser();
+});
+afterAll(() => browser.close());
+beforeEach(async () => {
+  page = await openPane(browser, { width: 320 });
+  await openTab(page, "Review");
+});
+afterEach(() => page.close());
+
+const list = () => button(page, "List the regressions in this workbook").click();
+const gone = (): Promise<string[]> => page.evaluate(() => [...window.stage.host.gone]);
+
+async function openGravest(): Promise<void> {
+  await list();
+  await heading(page, "2 regressions found").waitFor();
+  await button(page, /^Repairs explained by Price index ?Changes the conclusion/).click();
+  await heading(page, "Findings").waitFor();
+}
+
+describe("the section Review", () => {
+  it("says what a review can and cannot show before it begins", async () => {
+    await heading(page, "Check a regression that someone else built").waitFor();
+    await page.getByText("It does not show why the work was done so, nor that anything was meant").waitFor();
+  });
+
+  it("lists regressions with their place and how they came out, says so aloud, and moves the focus there", async () => {
+    await list();
+    await button(page, /Handover!A4:C6, typed numbers/).waitFor();
+    await button(page, /Nothing found ?Sums!D2, a formula with SLOPE/).waitFor();
+    await expect.poll(() => announced(page)).toContain("2 regressions reviewed");
+    expect(await focused(page)).toBe("H1 2 regressions found");
+    await page.getByText("It reads its range with OFFSET.").waitFor();
+  });
+
+  it("shows one with its verdict, its findings gravest first, and the numbers side by side", async () => {
+    await openGravest();
+    expect(await focused(page)).toBe("H1 Repairs explained by Price index");
+    await page.getByText(claimReviewFixture.verdict).first().waitFor();
+    const text = await page.getByRole("main").innerText();
+    const places = [gravest, smaller, slight].map(({ what }) => text.indexOf(what));
+    expect(places).toEqual(places.toSorted((one, other) => one - other));
+    const table = page.getByRole("table", { name: "Reported and recomputed" });
+    const lines = (await table.innerText()).replaceAll(/\s+/g, " ");
+    expect(lines).toContain("reported recomputed as explained");
+    expect(lines).toContain("coefficient of Price index B6 differs -1.234 -1.312 -1.234");
+    expect(lines).toContain("R-squared B8 agrees 62% 62% 62%");
+  });
+
+  it("jumps to the cells of a finding, of a number and of the report", async () => {
+    await openGravest();
+    await button(page, "Months!C10").click();
+    await button(page, "B8").click();
+    await button(page, "Handover!A4:C6").click();
+    expect(await gone()).toEqual(["Months!C10", "Handover!B8", "Handover!A4:C6"]);
+  });
+
+  it("writes what is shown, and says where", async () => {
+    await openGravest();
+    await button(page, "Write to a review sheet").click();
+    await button(page, "Repairs review").click();
+    expect(await gone()).toEqual(["'Repairs review'!A1"]);
+    await button(page, "All 2 regressions").click();
+    await button(page, "Write all 2 reviews to a sheet").click();
+    await button(page, "Repairs review 2").waitFor();
+  });
+
+  it("gives the text for a letter", async () => {
+    await openGravest();
+    await button(page, "As text").click();
+    const text = await page.getByLabel("The review as text").inputValue();
+    expect(text).toContain(claimReviewFixture.verdict);
+    expect(text).not.toContain("Sums!D2");
+    await button(page, "Copy as text").click();
+    await page.getByText(/^(Copied\.|The text is selected: copy it with the keys\.)$/).waitFor();
+  });
+
+  it("opens the data of a regression in the section Data", async () => {
+    await openGravest();
+    await button(page, "Open the data and answer it yourself").click();
+    await heading(page, "Months!A4:C10").waitFor();
+    const selected = page.getByRole("tab", { selected: true });
+    expect(await selected.innerText()).toBe("Data");
+    expect(await focused(page)).toBe("H1 Months!A4:C10");
+  });
+
+  it("shows how far it has come, can be cancelled, and goes on with what is left", async () => {
+    await page.evaluate(() => (window.stage.hold = "next"));
+    await list();
+    await page.getByText("Handover!A4:C6: Trying what explains the numbers, 25 %").waitFor();
+    await button(page, "Cancel").click();
+    await page.getByText("2 regressions not reviewed yet.").waitFor();
+    await page.evaluate(() => (window.stage.hold = null));
+    await button(page, "Go on").click();
+    await page
+      .getByText(/^2 regressions reviewed/)
+      .first()
+      .waitFor();
+  });
+
+  it("says what to do where nothing is found", async () => {
+    await page.evaluate(() => (window.stage.listed = { claims: [], unread: [], craft: [] }));
+    await list();
+    await heading(page, "No regression was found").waitFor();
+    await page.getByText("If results are typed in, select them and say where they come from.").waitFor();
+    expect(await announced(page)).toBe("No regression was found.");
+  });
+
+  it("takes the selection as a report, and keeps it where more has to be said", async () => {
+    await page.evaluate(() => (window.stage.host.refusals.read = { code: "no-report", where: "Months!A1:F97" }));
+    await button(page, "Review the selected cells").click();
+    await page.getByRole("alert").getByText("No reported regression can be read from Months!A1:F97.").waitFor();
+    await page.evaluate(() => delete window.stage.host.refusals.read);
+    await button(page, "Review the selected cells").click();
+    await heading(page, "2 regressions found").waitFor();
+    await button(page, "Review something else").click();
+    expect(await page.getByRole("textbox", { name: "Cells that report it" }).inputValue()).toBe("Months!A1:F97");
+    await button(page, "Selection for: Outcome: heading or cells").click();
+    expect(await page.getByRole("textbox", { name: "Outcome: heading or cells" }).inputValue()).toBe("Months!A1:F97");
+    await button(page, "Review these results").press("Enter");
+    await expect.poll(() => announced(page)).toContain("2 regressions reviewed");
+  });
+});
