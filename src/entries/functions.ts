@@ -9,5 +9,8 @@ const hire = (): WorkerLine =>
 /** Functions have a worker of their own, so that a long analysis in the pane does not hold up the cells. */
 const analyst = workerAnalyst({ hire, fallback: inlineAnalyst, seconds: 600 });
 
+/** Missing where Excel's script could not be loaded: there is nobody to call the functions then, and the pane says so. */
+const runtime = (globalThis as { readonly CustomFunctions?: typeof CustomFunctions }).CustomFunctions;
+
 // At module load: Excel looks for the functions before the page says that it is ready.
-registerFunctions(CustomFunctions, analyst);
+if (runtime !== undefined) registerFunctions(runtime, analyst);

@@ -34,4 +34,15 @@ describe("the built pane in a browser of its own, with Excel's real loader", () 
     expect(faults).toEqual([]);
     await page.close();
   });
+
+  it("says so too, and throws nothing, where that loader is blocked", async () => {
+    const page = await browser.newPage();
+    const faults: string[] = [];
+    page.on("pageerror", (error) => faults.push(error.message));
+    await page.route(`${vendor}**`, (route) => route.abort());
+    await page.goto(`${site.address}/taskpane.html`);
+    await page.getByText(/inside Excel/).waitFor({ timeout: 30_000 });
+    expect(faults).toEqual([]);
+    await page.close();
+  });
 });

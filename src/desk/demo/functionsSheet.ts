@@ -9,6 +9,8 @@ interface Sample {
   /** Written for the sheet row, counted from 1, at which the sample stands. */
   readonly formula: (row: number) => string;
   readonly rows: number;
+  /** The columns of the result that hold p-values, counted from 0. */
+  readonly pValues?: readonly number[];
   /** Cells that the formula reads, from the same row on. */
   readonly reads?: readonly (readonly BookCell[])[];
 }
@@ -31,6 +33,7 @@ const samples: readonly Sample[] = [
     shows: "The whole answer: a row for each driver, with the three standard errors and the one in force.",
     formula: () => `=FOOTING.ANSWER(${data},,${months})`,
     rows: 5,
+    pValues: [7],
   },
   {
     name: "VERDICT",
@@ -49,6 +52,7 @@ const samples: readonly Sample[] = [
     shows: "The tests that led to that choice, each with its reading.",
     formula: () => `=FOOTING.EVIDENCE(${data},,,${months})`,
     rows: 45,
+    pValues: [4, 7],
   },
   {
     name: "COEFFICIENTS",
@@ -67,6 +71,7 @@ const samples: readonly Sample[] = [
     shows: "How easily chance alone would bring about such coefficients, if the drivers did nothing.",
     formula: () => `=FOOTING.PVALUES(${data},,,,${months})`,
     rows: 4,
+    pValues: [0],
   },
   {
     name: "INTERVALS",
@@ -87,6 +92,7 @@ const samples: readonly Sample[] = [
       "Whether price and rain together do nothing: statistic, degrees of freedom, p-value. The weights stand beside.",
     formula: (row) => `=FOOTING.JOINT(${data},$H$${row}:$J$${row + 1},,,,${months})`,
     rows: 2,
+    pValues: [2],
     reads: [[1, 0, 0].map(input), [0, 0, 1].map(input)],
   },
   {
@@ -128,8 +134,11 @@ const column = { result: 2, reads: 7 } as const;
 /** The column after the last that a result reaches. */
 const widest = 13;
 
-/** Of every cell that a result may fill: enough digits for a p-value. */
+/** Of every cell that a result may fill. */
 const figures: CellStyle = { numberFormat: "#,##0.0###", vertical: "top" };
+
+/** The cell holds every digit; four decimals would show a small p-value as zero. */
+const pValue: CellStyle = { numberFormat: '[<0.0001]"under 0.0001";0.0000', vertical: "top" };
 
 /** Every worksheet function once, with what it shows; the values are the add-in's to find when the book is opened. */
 export function functionsSheet(): SheetData {
@@ -145,17 +154,22 @@ export function functionsSheet(): SheetData {
 }
 
 /** The sample in its first row, then as many rows as its result may take, and one that sets it apart from the next. */
-function rowsOf({ name, shows, formula, rows, reads = [] }: Sample, row: number): BookCell[][] {
+function rowsOf({ name, shows, formula, rows, pValues = [], reads = [] }: Sample, row: number): BookCell[][] {
+  const lookOf = (place: number): CellStyle => (pValues.includes(place - column.result) ? pValue : figures);
   const first: BookCell[] = [
     { value: name, style: { ...looks.firstHeading, vertical: "top" } },
     { value: shows, style: { wrap: true, vertical: "top" } },
-    { value: null, formula: formula(row), style: figures },
+    { value: null, formula: formula(row), style: lookOf(column.result) },
   ];
   const lines = Array.from({ length: rows }, (_, index): BookCell[] => {
     const before = index === 0 ? first : Array<BookCell>(column.result).fill(null);
     const beside = reads[index] ?? [];
     const width = beside.length > 0 ? column.reads : widest;
-    return [...before, ...Array<BookCell>(width - before.length).fill({ value: null, style: figures }), ...beside];
+    const room = Array.from({ length: width - before.length }, (__, place): BookCell => ({
+      value: null,
+      style: lookOf(before.length + place),
+    }));
+    return [...before, ...room, ...beside];
   });
   return [...lines, []];
 }
