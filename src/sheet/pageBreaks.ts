@@ -17,10 +17,15 @@ const papers = shapes.flatMap((shape) => digits.map((digit) => shape * digit));
 /**
  * The rows that a new page begins with: what is whole and would run over the page's end on any paper begins the next,
  * and a long table does not begin with its last few lines at the foot of a page.
+ * @param widths - of the columns that are printed, in characters; those of a result sheet where none are given.
  */
-export function pageBreaksOf(stretches: readonly Stretch[], formats: readonly PlanFormat[]): number[] {
+export function pageBreaksOf(
+  stretches: readonly Stretch[],
+  formats: readonly PlanFormat[],
+  widths: readonly number[] = pageWidths.slice(0, page.columns),
+): number[] {
   const heights = heightsOf(formats);
-  const width = sum(pageWidths.slice(0, page.columns).map(pointsOf));
+  const width = sum(widths.map(pointsOf));
   const breaks: number[] = [];
   let row = 0;
   let sheets = papers.map((shape) => ({ full: shape * width, used: 0 }));

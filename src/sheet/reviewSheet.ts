@@ -1,8 +1,10 @@
 import { listInWords } from "../core/answer/wording.ts";
 import type { BookReview } from "../core/review/claimReview.ts";
 import { summaryOf, titleOf } from "../core/review/reviewWords.ts";
+import { lineHeight } from "./columns.ts";
+import { pageBreaksOf } from "./pageBreaks.ts";
 import { cautionLine } from "./plainWordsSection.ts";
-import type { SheetPlan } from "./plan.ts";
+import type { PlanFormat, SheetPlan } from "./plan.ts";
 import { claimSections } from "./review/claimSections.ts";
 import { findingsSection } from "./review/findingsSection.ts";
 import { type ReviewFacts, howMadeSection, signOffSection, unreadSection } from "./review/madeSections.ts";
@@ -15,18 +17,34 @@ import { type Section, rectangle, section, stack, text } from "./section.ts";
  * @param facts - date, version, the fingerprint of each regression's data.
  */
 export function planReview(review: BookReview, facts: ReviewFacts): SheetPlan {
-  const { rows, formats, links } = stack(partsOf(review, facts));
+  const parts = partsOf(review, facts);
+  const { rows, formats, links } = stack(parts);
   return {
     name: sheetName(review),
     blocks: [{ row: 0, column: 0, cells: rectangle(rows, reviewColumns) }],
-    formats,
+    formats: [evenRows(rows.length), ...formats],
     links,
     columnWidths: reviewWidths,
     frozenRows: 1,
     charts: [],
+    // One blank row follows each part.
+    pageBreaks: pageBreaksOf(
+      parts.map((part) => ({ rows: part.rows.length + 1, whole: part.rows.length <= mostWhole })),
+      formats,
+      reviewWidths,
+    ),
     printArea: { row: 0, column: 0, rows: rows.length, columns: reviewColumns },
   };
 }
+
+/** Longer parts than these are tables and lists, which may be parted. */
+const mostWhole = 20;
+
+/** Every row has its height, also those that nothing else says it of. */
+const evenRows = (rows: number): PlanFormat => ({
+  area: { row: 0, column: 0, rows, columns: reviewColumns },
+  rowHeight: lineHeight,
+});
 
 function partsOf(review: BookReview, facts: ReviewFacts): Section[] {
   const { claims, craft, unread } = review;

@@ -24,11 +24,14 @@ export function claimSections(review: ClaimReview): Section[] {
 
 /** Which regression it is, and a link to its report. */
 function placeSection({ claim }: ClaimReview): Section {
-  const words = `${titleOf(claim)}: ${originInWords(claim)} at`;
+  const title = titleOf(claim);
   return section(
-    [[text(words)], []],
-    [{ ...acrossReview(0, "in force"), merge: true, wrap: true, rowHeight: heightOver(words, 0) }],
-    linkTo(1, 0, claim.place),
+    [[text(title)], [text(`Reported by ${originInWords(claim)} at`)]],
+    [
+      { ...acrossReview(0, "in force"), merge: true, wrap: true, rowHeight: heightOver(title, 0) },
+      { area: { row: 1, column: 0, rows: 1, columns: 1 }, style: "label" },
+    ],
+    linkTo(1, 1, claim.place),
   );
 }
 

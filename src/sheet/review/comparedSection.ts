@@ -30,6 +30,7 @@ export function comparedSection(review: ClaimReview): Section {
       { area: figureArea(1, 1), align: "right", numberFormat: numberHeadingFormat },
       { area: { row: 2, column: 0, rows: Math.max(1, lines.length), columns: 1 }, style: "label" },
       { area: figureArea(2, Math.max(1, lines.length)), align: "right" },
+      { area: { row: 1, column: reviewColumns - 1, rows: lines.length + 1, columns: 1 }, align: "left", indent: 1 },
       ...lines.flatMap(({ formats }, index) => formats.map((format) => atRow(format, index + 2))),
     ],
     compared.flatMap(({ reported }, index) => linkTo(index + 2, 1, reported.cell)),
