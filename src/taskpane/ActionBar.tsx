@@ -4,6 +4,7 @@ import type { Busy } from "../app/state.ts";
 import { canBeLive } from "../app/writing.ts";
 import type { SheetKind } from "../sheet/answerSheet.ts";
 import { CompareBar } from "./compare/CompareBar.tsx";
+import { HelpLink } from "./help/HelpLink.tsx";
 import { CellLink } from "./parts/CellLink.tsx";
 import { usePane } from "./paneContext.ts";
 import { ReviewBar } from "./review/ReviewBar.tsx";
@@ -109,7 +110,7 @@ function WriteBar(): ReactNode {
       </div>
       <span className={styles.hint}>
         {kind === "live" ? "Live: formulas that follow the cells." : "Kept: values that stay as they are."}
-        {onlyKept && " Functions cannot see which rows are hidden."}
+        {onlyKept && " Functions cannot see which rows are hidden."} <HelpLink about="live and kept" />
       </span>
       {written !== null && (
         <span>

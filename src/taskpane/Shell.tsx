@@ -10,6 +10,8 @@ import { AnswerSection } from "./answer/AnswerSection.tsx";
 import { CompareSection } from "./compare/CompareSection.tsx";
 import { DataSection } from "./data/DataSection.tsx";
 import { EvidenceSection } from "./evidence/EvidenceSection.tsx";
+import { HelpProvider } from "./help/HelpProvider.tsx";
+import { HelpRoom } from "./help/HelpRoom.tsx";
 import { useKeptFocus } from "./look/useKeptFocus.ts";
 import { usePane } from "./paneContext.ts";
 import { ReviewSection } from "./review/ReviewSection.tsx";
@@ -36,6 +38,8 @@ const sections: readonly (readonly [Section, string])[] = [
   ["review", "Review"],
 ];
 
+const nameOf = (section: Section): string => sections.find(([name]) => name === section)![1];
+
 /** Tabs above, one section that scrolls, what can be done next below. */
 export function Shell(): ReactNode {
   const styles = useStyles();
@@ -44,29 +48,33 @@ export function Shell(): ReactNode {
   useKeptFocus(shell, state.arrivals);
   const { section } = state;
   return (
-    <div ref={shell} className={styles.shell}>
-      <header>
-        <Tabs
-          label="Sections"
-          tabs={sections}
-          selected={section}
-          panel="section"
-          onSelect={(name) => dispatch({ kind: "shown", section: name })}
-        />
-      </header>
-      <main className={styles.main} key={section}>
-        <div role="tabpanel" id="section" aria-labelledby={tabId(section)}>
-          <FaultNotice />
-          {section === "data" && <DataSection />}
-          {section === "answer" &&
-            (state.comparison === null ? <AnswerSection /> : <CompareSection comparison={state.comparison} />)}
-          {section === "evidence" && <EvidenceSection />}
-          {section === "review" && <ReviewSection />}
-          {(section === "data" || section === "answer") && <SheetTools />}
-        </div>
-      </main>
-      <ActionBar />
-      <Announcer said={state.said} />
-    </div>
+    <HelpProvider section={section}>
+      <div ref={shell} className={styles.shell}>
+        <header>
+          <Tabs
+            label="Sections"
+            tabs={sections}
+            selected={section}
+            panel="section"
+            onSelect={(name) => dispatch({ kind: "shown", section: name })}
+          />
+        </header>
+        <main className={styles.main} key={section}>
+          <div role="tabpanel" id="section" aria-labelledby={tabId(section)}>
+            <HelpRoom backTo={nameOf(section)}>
+              <FaultNotice />
+              {section === "data" && <DataSection />}
+              {section === "answer" &&
+                (state.comparison === null ? <AnswerSection /> : <CompareSection comparison={state.comparison} />)}
+              {section === "evidence" && <EvidenceSection />}
+              {section === "review" && <ReviewSection />}
+              {(section === "data" || section === "answer") && <SheetTools />}
+            </HelpRoom>
+          </div>
+        </main>
+        <ActionBar />
+        <Announcer said={state.said} />
+      </div>
+    </HelpProvider>
   );
 }

@@ -2,6 +2,7 @@ import type { ReactNode } from "react";
 import { SectionTitle } from "../parts/SectionTitle.tsx";
 import { useType } from "../look/type.ts";
 import { usePane } from "../paneContext.ts";
+import { HelpHead } from "../help/HelpHead.tsx";
 import { Choice } from "./Choice.tsx";
 import { DriverList } from "./DriverList.tsx";
 import { NoAnswer } from "./NoAnswer.tsx";
@@ -21,10 +22,12 @@ export function AnswerSection(): ReactNode {
       <SectionTitle>{answer.title}</SectionTitle>
       <OutdatedNotice />
       <Verdict answer={answer} />
-      <h2 className={type.head}>Which standard errors</h2>
+      <HelpHead about="four cases">Which standard errors</HelpHead>
       <WhichErrors answer={answer} />
       <Choice />
-      <h2 className={type.head}>Drivers</h2>
+      <HelpHead about="three kinds" asks="Why three kinds?">
+        Drivers
+      </HelpHead>
       <DriverList answer={answer} />
       <h2 className={type.head}>Rows</h2>
       <RowsUsed answer={answer} />

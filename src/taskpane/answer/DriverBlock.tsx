@@ -6,6 +6,7 @@ import { useType } from "../look/type.ts";
 import { Disclosure } from "../parts/Disclosure.tsx";
 import { IntervalPicture } from "../pictures/IntervalPicture.tsx";
 import { DriverTable } from "./DriverTable.tsx";
+import { HowItCame } from "./HowItCame.tsx";
 import { WhatWouldChange } from "./WhatWouldChange.tsx";
 import { FirmnessMark } from "./FirmnessMark.tsx";
 import { intervalsInWords, kindFigures, pInWords, writerFor } from "./driverFigures.ts";
@@ -66,6 +67,7 @@ export function DriverBlock({ answer, index }: { readonly answer: Answer; readon
         }
       >
         <DriverTable answer={answer} index={index} />
+        <HowItCame answer={answer} index={index} />
         <WhatWouldChange answer={answer} index={index} />
       </Disclosure>
     </article>

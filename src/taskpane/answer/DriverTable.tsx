@@ -2,7 +2,7 @@ import { makeStyles, mergeClasses, tokens } from "@fluentui/react-components";
 import type { ReactNode } from "react";
 import type { Answer } from "../../core/answer/answer.ts";
 import { numberInWords } from "../../core/answer/wording.ts";
-import { type KindFigures, kindFigures, writerFor } from "./driverFigures.ts";
+import { type KindFigures, kindFigures, standardErrorInWords, writerFor } from "./driverFigures.ts";
 import { pFigure } from "../parts/pFigure.ts";
 
 const useStyles = makeStyles({
@@ -73,7 +73,7 @@ function linesFor(answer: Answer, index: number): readonly Line[] {
   const write = writerFor(answer.drivers[index]!);
   const bare = (pValue: number): string => pFigure(pValue, answer.options.level);
   return [
-    ["standard error", ({ standardError }) => numberInWords(standardError, decimalsBeyond(standardError))],
+    ["standard error", ({ standardError }) => standardErrorInWords(standardError)],
     ["ratio", ({ ratio }) => numberInWords(ratio, ratioDecimals).replace("-", "−")],
     ["p-value", ({ pValue }) => bare(pValue)],
     ["with the normal", ({ pValueNormal }) => bare(pValueNormal)],
@@ -82,6 +82,3 @@ function linesFor(answer: Answer, index: number): readonly Line[] {
     ["compared with", ({ reference }) => reference],
   ];
 }
-
-/** Three significant digits. */
-const decimalsBeyond = (value: number): number => (value > 0 ? Math.max(0, 2 - Math.floor(Math.log10(value))) : 2);

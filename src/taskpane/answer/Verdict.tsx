@@ -1,6 +1,7 @@
 import { makeStyles, tokens } from "@fluentui/react-components";
 import type { ReactNode } from "react";
 import type { Answer } from "../../core/answer/answer.ts";
+import { HelpLink } from "../help/HelpLink.tsx";
 import { useType } from "../look/type.ts";
 import { keepTogether } from "../parts/keepTogether.ts";
 import { FirmnessMark } from "./FirmnessMark.tsx";
@@ -30,6 +31,7 @@ export function Verdict({ answer }: { readonly answer: Answer }): ReactNode {
         )}
       </ul>
       <p className={type.body}>{opening}</p>
+      <HelpLink about="firm" asks="What does firm mean?" />
     </section>
   );
 }

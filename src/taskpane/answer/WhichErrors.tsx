@@ -4,6 +4,7 @@ import type { Answer } from "../../core/answer/answer.ts";
 import { pValueInWords } from "../../core/answer/wording.ts";
 import type { Decision } from "../../core/decision/decision.ts";
 import { testWords } from "../../core/diagnostics/words.ts";
+import { HelpLink } from "../help/HelpLink.tsx";
 import { useType } from "../look/type.ts";
 import { keepTogether } from "../parts/keepTogether.ts";
 import { FourCases } from "../pictures/FourCases.tsx";
@@ -45,6 +46,7 @@ export function WhichErrors({ answer }: { readonly answer: Answer }): ReactNode 
           </li>
         ))}
       </ul>
+      <HelpLink about="what tests miss" asks="What can the tests miss?" />
     </>
   );
 }

@@ -50,6 +50,10 @@ export function writerFor({ low, high }: Pick<KindFigures, "low" | "high">): (va
   return (value) => numberInWords(value, decimals).replace("-", "−");
 }
 
+/** Three significant digits. */
+export const standardErrorInWords = (value: number): string =>
+  numberInWords(value, value > 0 ? Math.max(0, 2 - Math.floor(Math.log10(value))) : 2);
+
 /** What the picture of the intervals shows, for those who do not see it. */
 export function intervalsInWords(answer: Answer, index: number): string {
   const kinds = kindFigures(answer, index);

@@ -1,5 +1,6 @@
 import type { ReactNode } from "react";
 import type { LeftOut } from "../../core/design/design.ts";
+import { HelpLink } from "../help/HelpLink.tsx";
 import { CellList } from "./CellList.tsx";
 import { Disclosure } from "./Disclosure.tsx";
 import { counted } from "./rowWords.ts";
@@ -21,6 +22,7 @@ export function LeftOutList({ leftOut, count }: LeftOutListProps): ReactNode {
         items={listed.map(({ cell, because }) => ({ address: cell, words: because }))}
         more={count - listed.length}
       />
+      <HelpLink about="left-out rows" asks="Why are rows left out?" />
     </Disclosure>
   );
 }
