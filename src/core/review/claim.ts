@@ -76,4 +76,6 @@ export interface Claim {
   readonly reported: readonly ReportedNumber[];
   /** The other columns beside the data: they can be the time or the groups of the rows. */
   readonly others: readonly ClaimedLine[];
+  /** What had to be taken for granted to read a report of typed numbers, as full sentences. */
+  readonly assumed?: readonly string[];
 }
