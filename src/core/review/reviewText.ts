@@ -16,7 +16,7 @@ export function reviewText({ claims, unread, craft }: BookReview): readonly Text
   const whole = claims.length > 1 ? [sentence(summaryOf(claims)), blank] : [];
   return [
     ...whole,
-    ...claims.flatMap((review) => [...claimLines(review), blank]),
+    ...claims.flatMap(claimLines),
     ...part("Sheet craft", gravestFirst(craft).flatMap(findingLines)),
     ...part(
       "Formulas that could not be read",
@@ -77,5 +77,5 @@ export function comparedTexts(review: ClaimReview): readonly (readonly string[])
 
 const consequenceLine = ({ driver, asReported, asItShouldBe, changes }: Consequence): TextLine =>
   sentence(
-    `${driver}: as reported, ${asReported}; as it should be, ${asItShouldBe}. ${changes ? "This changes the conclusion." : "The conclusion stays."}`,
+    `${driver}: as reported, ${asReported}; as it should be, ${asItShouldBe}.${changes ? " This changes the conclusion." : ""}`,
   );

@@ -48,7 +48,7 @@ function consequencesSection(consequences: readonly Consequence[]): Section {
     ["Driver", "As reported", "As it should be", "What that means"],
     ...consequences.map(({ driver, asReported, asItShouldBe, changes }) => [
       ...[driver, asReported, asItShouldBe],
-      changes ? "The conclusion changes." : "The conclusion stays.",
+      changes ? "The conclusion changes." : "No conclusion changes.",
     ]),
   ];
   return section(

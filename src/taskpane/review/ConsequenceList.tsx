@@ -32,8 +32,12 @@ export function ConsequenceList({ consequences }: { readonly consequences: reado
             <span className={styles.quiet}>As reported:</span> {keepTogether(asReported)}
             <br />
             <span className={styles.quiet}>As it should be:</span> {keepTogether(asItShouldBe)}
-            <br />
-            {changes ? "The conclusion changes." : "The conclusion stays."}
+            {changes && (
+              <>
+                <br />
+                The conclusion changes.
+              </>
+            )}
           </dd>
         </div>
       ))}

@@ -20,6 +20,7 @@ describe("a number shown in the way of a reported one", () => {
     ["thousands together", "12345.6", 0.05, 9876.54, "9876.5"],
     ["powers of ten", "1.23E-05", 5e-8, 0.000045678, "4.57E-05"],
     ["tens", "1230", 5, 4567, "4567"],
+    ["as many as are written, though more are meant", "0.25", 5e-12, 0.25, "0.25"],
     ["nothing below zero", "0.00", 0.005, -0.001, "0.00"],
   ])("%s", (_, shown, halfUnit, value, expected) => {
     expect(showWith(digitsShown({ shown, halfUnit }), value)).toBe(expected);
