@@ -9,6 +9,8 @@ import type { Fit } from "../../src/core/fit/fit.ts";
 import { fitLeastSquares } from "../../src/core/fit/fitLeastSquares.ts";
 import { type Size, fitOf, questionOf } from "./data.ts";
 import { functionsJob } from "./functionsJob.ts";
+import { reviewJob } from "./reviewJob.ts";
+import { wholeColumnsJob } from "./wholeColumnsJob.ts";
 
 /** What is timed, once its data stand ready. */
 export type Run = () => void | Promise<void>;
@@ -43,7 +45,11 @@ export const jobs: Readonly<Record<string, Job>> = {
       return () => must(analyse(question, () => undefined));
     },
   },
+  review: { size: { rows: 10_000, drivers: 6 }, prepare: reviewJob(["observations"]) },
+  "review-rows-unsaid": { size: { rows: 10_000, drivers: 6 }, prepare: reviewJob([]) },
   functions: { size: { rows: 10_000, drivers: 5 }, prepare: functionsJob },
+  "whole-columns": { size: { rows: 50_000, drivers: 5 }, prepare: wholeColumnsJob(null) },
+  "whole-columns-0": { size: { rows: 50_000, drivers: 5 }, prepare: wholeColumnsJob(0) },
 };
 
 function ofFit(work: (fit: Fit) => void): Job {
