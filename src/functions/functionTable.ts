@@ -158,7 +158,8 @@ export const functionTable = [
   },
   {
     id: "PREDICT",
-    description: "What the regression expects of new rows, with the interval of the mean.",
+    description:
+      "What the regression expects of new rows, with the interval of the mean or, by the setting predict for, of a single row.",
     parameters: [
       outcome,
       drivers,

@@ -55,11 +55,18 @@ export const inquiries = {
       const settings = { reference: table.reference, level: answer.options.level, spread };
       return success({ kind: "predictions", errors, settings, rows: rows.value });
     },
-    show: (finding, { values, data }) => {
+    show: (finding, { values, data, answer }) => {
       if (finding.kind !== "predictions") return unexpected(finding);
+      const { predictFor } = answer.options;
+      if (predictFor === "single row" && finding.noSingle !== null) {
+        return { ok: false, notApplicable: finding.noSingle };
+      }
       const rows = readNewRows(values["rows"], data.parts.drivers);
       const headed = rows.ok && rows.value.columns.some(({ place }) => place.firstRow === 1);
-      return success([...(headed ? [["value", "low", "high"]] : []), ...finding.rows.map(predictionCells)]);
+      return success([
+        ...(headed ? [["value", "low", "high"]] : []),
+        ...finding.rows.map((row) => predictionCells(row, predictFor)),
+      ]);
     },
   },
 } satisfies Partial<Record<FunctionId, Asking>>;
@@ -88,8 +95,11 @@ function columnOf(of: "residuals" | "fitted", finding: Finding, { data }: Called
   return success(headed ? [[of], ...rows] : rows);
 }
 
-const predictionCells = (prediction: Prediction | null): Grid[number] =>
-  prediction === null ? ["", "", ""] : [prediction.value, prediction.low, prediction.high];
+function predictionCells(prediction: Prediction | null, predictFor: Answer["options"]["predictFor"]): Grid[number] {
+  if (prediction === null) return ["", "", ""];
+  const { low, high } = predictFor === "mean" ? prediction : (prediction.single ?? prediction);
+  return [prediction.value, low, high];
+}
 
 function jointFigures(outcome: Extract<Finding, { kind: "joint test" }>["outcome"]): Reply {
   if (outcome.kind === "not-applicable")

@@ -1,6 +1,6 @@
 import type { Answer } from "../core/answer/answer.ts";
 import { readErrors } from "../core/answer/settingReaders.ts";
-import { isNotUnderstood } from "../core/answer/settingTable.ts";
+import { isNotUnderstood } from "../core/answer/settingSpec.ts";
 import type { ErrorsChoice } from "../core/covariance/choice.ts";
 import { whiteErrors } from "../core/decision/wish.ts";
 import type { InferenceTable } from "../core/inference/inference.ts";

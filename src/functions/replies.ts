@@ -1,7 +1,8 @@
 import type { Answer } from "../core/answer/answer.ts";
 import { type Grid, answerTable, choiceText, evidenceTable, verdictLines } from "../core/answer/tables.ts";
 import { readOneOf } from "../core/answer/settingReaders.ts";
-import { isNotUnderstood, settingTable } from "../core/answer/settingTable.ts";
+import { isNotUnderstood } from "../core/answer/settingSpec.ts";
+import { settingTable } from "../core/answer/settingTable.ts";
 import { lagsForRows } from "../core/covariance/lags.ts";
 import type { TestOutcome } from "../core/diagnostics/outcome.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";

@@ -107,7 +107,7 @@ export function orderedFit(id: string, second: "one way" | "by year too" = "one 
     group!.map((label) => labels.indexOf(label)),
     years,
   );
-  const byYear = { groups: Int32Array.from(years), labels: years.slice(0, panelYears[id]).map(String) };
+  const byYear = { groups: Int32Array.from(years), labels: years.slice(0, panelYears[id]).map(String), by: "Year" };
   const both = order.kind === "groups" && second === "by year too" ? { ...order, second: byYear } : order;
   return fitOf(designOf(y, X, { names: drivers, order: both }));
 }

@@ -3,6 +3,7 @@ import { describeColumn } from "../../src/core/table/describe.ts";
 import type { Cell } from "../../src/core/table/cells.ts";
 import type { ColumnSetup } from "../../src/app/setup.ts";
 import { holdsInWords, unusableCells } from "../../src/taskpane/data/columnWords.ts";
+import { derivationInWords } from "../../src/taskpane/answer/derivation.ts";
 import { intervalsInWords, kindFigures, writerFor } from "../../src/taskpane/answer/driverFigures.ts";
 import { groupTests, readingOfGroup } from "../../src/taskpane/evidence/testGroups.ts";
 import { largestResiduals, overFittedInWords, overRowsInWords } from "../../src/taskpane/evidence/residualWords.ts";
@@ -76,7 +77,9 @@ describe("rows in words", () => {
     } as const;
     expect(rowsInWords(rows)).toBe("monthly from May 2020 to June 2022, 3 gaps: July 2020, 2 more");
     expect(rowsInWords({ ...rows, gaps: 0, gapLabels: [] })).toBe("monthly from May 2020 to June 2022, no gaps");
-    expect(rowsInWords({ kind: "groups", by: "Shop", groups: 7 })).toBe("in 7 groups by Shop");
+    const inShops = { kind: "groups", by: "Shop", groups: 7 } as const;
+    expect(rowsInWords({ ...inShops, second: null })).toBe("in 7 groups by Shop");
+    expect(rowsInWords({ ...inShops, second: { by: "Year", groups: 9 } })).toBe("in 7 groups by Shop and 9 by Year");
   });
 });
 
@@ -107,6 +110,20 @@ describe("figures of a driver", () => {
 
   it("show p-values without their name", () => {
     expect([pFigure(0.0341, 0.05), pFigure(0.00001, 0.05)]).toEqual(["0.034", "<\u00a00.0001"]);
+  });
+});
+
+describe("how a figure came about", () => {
+  it("goes from rows to ratio, p-value, level and interval", () => {
+    const driver = { ...answerFixture.drivers[1]!, coefficient: -2.5, standardError: 1.25, ratio: -2, against: 0 };
+    const drivers = [answerFixture.drivers[0]!, { ...driver, pValue: 0.0625, low: -7, high: 2 }];
+    const steps = derivationInWords({ ...answerFixture, drivers }, 1);
+    expect(steps[0]).toMatch(/^\d+ rows, \d+ coefficients: \d+ degrees of freedom\.$/);
+    expect(steps[1]).toMatch(
+      /^The coefficient −2\.5, less the tested value 0, divided by its Newey-West .* standard error 1\.25, is the ratio −2\.00\.$/,
+    );
+    expect(steps[2]).toContain("p = 0.063. That is not below the level 0.05: an effect is not shown.");
+    expect(steps[3]).toBe("The 95 % interval from −7.0 to 2.0 comes from the same distribution.");
   });
 });
 

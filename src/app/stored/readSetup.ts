@@ -40,6 +40,8 @@ const options: Reader<Setup["options"]> = objectOf<Setup["options"]>({
   lags: orNull(lagRule),
   adjusted: flag,
   level: number,
+  breakAfter: since(orNull(number), null),
+  predictFor: since(oneOf("mean", "single row"), "mean"),
   estimates: since(listOf(text), []),
   jointTest: since(listOf(text), []),
 });

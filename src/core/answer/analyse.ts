@@ -53,7 +53,10 @@ function answerFrom(fit: Fit, { source, options }: Question, report: Report): Re
   if (!errors.ok) return errors;
   const { standardErrors, inference, joint, estimates } = errors.value;
   report("The other tests", 0.7);
-  const tests = [...deciding, ...furtherTests(fit, decision.inForce.errors, testOrder)];
+  const tests = [
+    ...deciding,
+    ...furtherTests(fit, decision.inForce.errors, { testOrder, breakAfter: options.breakAfter }),
+  ];
   report("How firm it is", 0.85);
   const against = againstOf(fit, options);
   const { adjusted, level } = options;

@@ -135,7 +135,13 @@ export type RowsSummary =
       readonly gaps: number;
       readonly gapLabels: readonly string[];
     }
-  | { readonly kind: "groups"; readonly by: string; readonly groups: number };
+  | {
+      readonly kind: "groups";
+      readonly by: string;
+      readonly groups: number;
+      /** The groups that cross them, where there are any. */
+      readonly second: { readonly by: string; readonly groups: number } | null;
+    };
 
 /** Points for the pictures: at most 2,000, evenly thinned where there are more rows. */
 export interface ResidualPoints {

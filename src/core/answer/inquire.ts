@@ -35,7 +35,7 @@ export type Finding =
   | { readonly kind: "covariance"; readonly rows: readonly (readonly number[])[] }
   | { readonly kind: "joint test"; readonly outcome: JointOutcome }
   /** null for a new row that lacks a driver. */
-  | { readonly kind: "predictions"; readonly rows: readonly (Prediction | null)[] }
+  | { readonly kind: "predictions"; readonly rows: readonly (Prediction | null)[]; readonly noSingle: string | null }
   | { readonly kind: "not-applicable"; readonly because: string };
 
 /**
@@ -64,7 +64,7 @@ export function inquire({ source, model }: Omit<Question, "options">, inquiry: I
       const read = readNewRows(inquiry.rows, fit.design, model);
       if (!read.ok) return read;
       if (read.value.kind === "not-applicable") return success(read.value);
-      return success({ kind: "predictions", rows: predicted({ fit, covariance }, read.value.rows, inquiry.settings) });
+      return success({ kind: "predictions", ...predicted({ fit, covariance }, read.value.rows, inquiry.settings) });
     }
   }
 }
@@ -74,10 +74,14 @@ function predicted(
   from: Parameters<typeof predict>[0],
   rows: NewRows,
   settings: PredictionSettings,
-): readonly (Prediction | null)[] {
+): { readonly rows: readonly (Prediction | null)[]; readonly noSingle: string | null } {
   const whole = rows.filter((row) => row !== null);
-  const found = predict(from, whole, settings).rows[Symbol.iterator]();
-  return rows.map((row) => (row === null ? null : (found.next().value ?? null)));
+  const found = predict(from, whole, settings);
+  const inTurn = found.rows[Symbol.iterator]();
+  return {
+    rows: rows.map((row) => (row === null ? null : (inTurn.next().value ?? null))),
+    noSingle: found.noSingle,
+  };
 }
 
 /** Brings residuals and fitted values back from design order to the rows of the source. */

@@ -26,8 +26,9 @@ export function modelOf(settings: Settings, parts: Parts): Result<Model> {
   if (rows === null) return failure({ code: "no-group-column" });
   const named = [
     ...settings.categories,
+    ...settings.dates,
     ...Object.keys(settings.bases),
-    ...settings.transforms.map(({ column }) => column),
+    ...[...settings.transforms, ...settings.added].map(({ column }) => column),
   ];
   const known = [parts.outcome, ...chosen.value];
   const stranger = named.find((name) => find(known, name) === undefined);
@@ -36,7 +37,10 @@ export function modelOf(settings: Settings, parts: Parts): Result<Model> {
     settings.transforms.find((entry) => same(entry.column, column))?.transform ?? { kind: "none" };
   return success({
     outcome: { column: parts.outcome, transform: transformOf(parts.outcome) },
-    drivers: chosen.value.map((column) => driver(column, settings, transformOf(column))),
+    drivers: [
+      ...chosen.value.map((column) => driver(column, settings, transformOf(column))),
+      ...settings.added.map((entry) => added(find(known, entry.column) ?? entry.column, entry.transform)),
+    ],
     calendar: settings.calendar,
     rows,
     constant: settings.constant,
@@ -72,8 +76,11 @@ function chooseDrivers(asked: readonly string[], drivers: readonly string[]): Re
 function driver(column: string, settings: Settings, transform: Transform): DriverChoice {
   const base = Object.entries(settings.bases).find(([name]) => same(name, column))?.[1] ?? null;
   const category = base !== null || find(settings.categories, column) !== undefined;
-  return { column, as: category ? "category" : "number", base, transform };
+  const date = find(settings.dates, column) !== undefined;
+  return { column, as: category ? "category" : date ? "date" : "number", base, transform };
 }
+
+const added = (column: string, transform: Transform): DriverChoice => ({ column, as: "number", base: null, transform });
 
 /** null where rows are to be in groups and no column says which. */
 function rowsOf(settings: Settings, { key, keyIs, order }: Parts): RowsAre | null {
@@ -84,6 +91,6 @@ function rowsOf(settings: Settings, { key, keyIs, order }: Parts): RowsAre | nul
     case "time":
       return { kind: "time", order: key };
     case "groups":
-      return key === null ? null : { kind: "groups", by: key, second: null, order };
+      return key === null ? null : { kind: "groups", by: key, second: settings.secondGroups, order };
   }
 }

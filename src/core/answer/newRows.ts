@@ -1,5 +1,5 @@
 import type { Design, Term } from "../design/design.ts";
-import type { Model } from "../design/model.ts";
+import type { Model, Transform } from "../design/model.ts";
 import { type Transformed, transformed } from "../design/transforms.ts";
 import { type Result, failure, success } from "../problem/result.ts";
 import { type LevelCells, readLevelCells } from "../table/levelCells.ts";
@@ -59,12 +59,11 @@ function valuesOf({ meaning }: Term, { source, design, model }: Context): Result
     return failure({ code: "unknown-heading", heading: meaning.column, nearest: null, where: "the new rows" });
   }
   if (meaning.kind === "level") return levelValues(column, meaning, knownLevels(design, meaning.column));
-  return numberValues(column, model);
+  return numberValues(column, meaning.transform, model);
 }
 
 /** null for a transform that looks back in time. */
-function numberValues(column: Column, { drivers, textNumbers }: Model): Result<Values> | null {
-  const transform = drivers.find((driver) => driver.column === column.name)?.transform ?? { kind: "none" };
+function numberValues(column: Column, transform: Transform, { textNumbers }: Model): Result<Values> | null {
   if ("periods" in transform) return null;
   const decimal = textNumbers.find((leave) => leave.column === column.name)?.decimal ?? null;
   const numbers = readNumberCells(column, decimal);

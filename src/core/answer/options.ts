@@ -8,6 +8,10 @@ export interface Options extends ErrorsWish {
   readonly against: Readonly<Record<string, number>>;
   /** Words for one unit by column: "repairs a month", "rainy day". */
   readonly units: Readonly<Record<string, string>>;
+  /** After how many rows, in time, Chow's test parts them; null for half of them. */
+  readonly breakAfter: number | null;
+  /** Whether the interval of a prediction is for the mean of many rows like it, or for one. */
+  readonly predictFor: "mean" | "single row";
   /** Numbers made of the coefficients: "Price + Rain", "Price / (1 - Lagged) = 2", "Price > 0". */
   readonly estimates: readonly string[];
   /** Restrictions on the coefficients that are tested at once: "Price = 0", "Rain = Fuel". */
@@ -24,6 +28,8 @@ export const defaultOptions: Options = {
   level: 0.05,
   against: {},
   units: {},
+  breakAfter: null,
+  predictFor: "mean",
   estimates: [],
   jointTest: [],
 };

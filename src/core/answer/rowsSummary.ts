@@ -11,6 +11,11 @@ export function rowsSummary({ order }: Design): RowsSummary {
       return { kind: "time", period, first: labels.first, last: labels.last, gaps, gapLabels };
     }
     case "groups":
-      return { kind: "groups", by: order.by, groups: order.labels.length };
+      return {
+        kind: "groups",
+        by: order.by,
+        groups: order.labels.length,
+        second: order.second === null ? null : { by: order.second.by, groups: order.second.labels.length },
+      };
   }
 }

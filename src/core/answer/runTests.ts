@@ -39,25 +39,30 @@ export function decidingTests(fit: Fit, testOrder: number, report: Report): Test
 }
 
 /** The tests that are shown beside those: on spread, follow-on, curve, shape and breaks. */
-export function furtherTests(fit: Fit, inForce: ErrorsChoice, testOrder: number): TestOutcome[] {
+export function furtherTests(fit: Fit, inForce: ErrorsChoice, asked: Asked): TestOutcome[] {
   const spread = [breuschPagan(fit), whiteFitted(fit), goldfeldQuandt(fit)];
   const shape = [reset(fit), resetRobust(fit, inForce), jarqueBera(fit)];
-  return [...spread, ...throughTime(fit, testOrder), ...shape];
+  return [...spread, ...throughTime(fit, asked), ...shape];
+}
+
+interface Asked {
+  readonly testOrder: number;
+  /** After how many rows a break is looked for; null for half of them. */
+  readonly breakAfter: number | null;
 }
 
 /** Tests that need rows in time; where they are not, each says so once. */
-function throughTime(fit: Fit, testOrder: number): TestOutcome[] {
+function throughTime(fit: Fit, { testOrder, breakAfter }: Asked): TestOutcome[] {
   if (fit.design.order.kind !== "time") {
     const names = ["durbin-watson", "ljung-box", "arch", "chow", "largest-chow", "cusum", "cusum-recursive"] as const;
     return names.map((name) => notApplicable(name, noTime));
   }
   const orders = ordersUpTo(testOrder);
-  const half = Math.floor(fit.rowCount / 2);
   return [
     durbinWatson(fit),
     ...ljungBox(fit, orders),
     ...orders.map((order) => arch(fit, order)),
-    chow(fit, half),
+    chow(fit, breakAfter ?? Math.floor(fit.rowCount / 2)),
     largestChow(fit),
     cusum(fit),
     cusumRecursive(fit),

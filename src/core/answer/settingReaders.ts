@@ -30,6 +30,10 @@ export function readYesNo(text: string): boolean | NotUnderstood {
   return ["no", "false", "0", "off"].includes(word) ? false : { allowed: ["yes", "no"] };
 }
 
+export function readCount(text: string): number | NotUnderstood {
+  return /^[1-9]\d*$/.test(text.trim()) ? Number(text) : { allowed: ["a whole number, 1 or more"] };
+}
+
 export function readLevel(text: string): number | NotUnderstood {
   const share = text.trim().endsWith("%") ? Number(text.trim().slice(0, -1)) / 100 : Number(text);
   const inside = share > 0 && share < 1 && text.trim() !== "";
@@ -75,11 +79,10 @@ export function readLags(text: string): LagRule | NotUnderstood {
   return kernel === undefined ? { allowed: lagWords } : { kind: "andrews 1991", kernel, prewhiten };
 }
 
+type TransformKind = Exclude<Transform["kind"], "none">;
+
 /** "Price by 2, Advertising" for the transforms that look back; plain headings for the others. */
-export function readTransforms(
-  kind: Exclude<Transform["kind"], "none">,
-  text: string,
-): { column: string; transform: Transform }[] | NotUnderstood {
+export function transformsOf(kind: TransformKind, text: string): { column: string; transform: Transform }[] {
   const looksBack = kind === "lag" || kind === "change" || kind === "growth rate";
   return partsBetween(text, ",").map((part) => {
     const found = looksBack ? /^(.*?)\s+by\s+(\d+)$/i.exec(part) : null;
@@ -88,6 +91,24 @@ export function readTransforms(
     return { column, transform };
   });
 }
+
+const named = /^(logarithm|square|lag|change|growth\s+rate)\s+of\s+(.+)$/is;
+
+/** "square of Price, lag of Repairs by 2": one further driver each. */
+export function readAdded(text: string): { column: string; transform: Transform }[] | NotUnderstood {
+  const added: { column: string; transform: Transform }[] = [];
+  for (const part of partsBetween(text, ",")) {
+    const [, kind, column] = named.exec(part) ?? [];
+    const [transform] = column === undefined ? [] : transformsOf(kindOf(kind), column);
+    if (transform === undefined) return { allowed: addedWords };
+    added.push(transform);
+  }
+  return added;
+}
+
+const addedWords = ["logarithm", "square", "lag", "change", "growth rate"].map((kind) => `${kind} of Heading`);
+
+const kindOf = (kind = ""): TransformKind => kind.toLowerCase().replaceAll(/\s+/g, " ") as TransformKind;
 
 export function readCalendar(text: string): CalendarDriver[] | NotUnderstood {
   const known: readonly CalendarDriver[] = ["trend", "month indicators", "quarter indicators"];

@@ -1,55 +1,18 @@
 import { whiteWishes } from "../decision/wish.ts";
-import type { NotUnderstood, Settings } from "./settingValues.ts";
+import { columnSettings } from "./columnSettings.ts";
 import {
-  readCalendar,
-  readDecimal,
+  readCount,
   readErrors,
   readExpressions,
   readLags,
   readLevel,
-  readList,
   readNamedNumbers,
   readNamedTexts,
   readOneOf,
   readText,
-  readTransforms,
   readYesNo,
 } from "./settingReaders.ts";
-
-/** One setting: its name, what it takes, what holds when it is not given, and what it does. */
-export interface SettingSpec {
-  readonly name: string;
-  readonly values: string;
-  readonly standard: string;
-  readonly meaning: string;
-  readonly read: (text: string, settings: Settings) => Settings | NotUnderstood;
-}
-
-const option =
-  <K extends keyof Settings["options"]>(key: K, read: (text: string) => Settings["options"][K] | NotUnderstood) =>
-  (text: string, settings: Settings): Settings | NotUnderstood => {
-    const value = read(text);
-    return isNotUnderstood(value) ? value : { ...settings, options: { ...settings.options, [key]: value } };
-  };
-
-const plain =
-  <K extends keyof Settings>(key: K, read: (text: string) => Settings[K] | NotUnderstood) =>
-  (text: string, settings: Settings): Settings | NotUnderstood => {
-    const value = read(text);
-    return isNotUnderstood(value) ? value : { ...settings, [key]: value };
-  };
-
-export const isNotUnderstood = (value: unknown): value is NotUnderstood =>
-  typeof value === "object" && value !== null && "allowed" in value;
-
-const transformed =
-  (kind: "logarithm" | "square" | "lag" | "change" | "growth rate") =>
-  (text: string, settings: Settings): Settings | NotUnderstood => {
-    const transforms = readTransforms(kind, text);
-    return isNotUnderstood(transforms)
-      ? transforms
-      : { ...settings, transforms: [...settings.transforms, ...transforms] };
-  };
+import { type SettingSpec, isNotUnderstood, option, plain } from "./settingSpec.ts";
 
 /** Every setting, in the order a reader wants them: the manual, the worksheet functions and the terminal all read this. */
 export const settingTable: readonly SettingSpec[] = [
@@ -128,89 +91,28 @@ export const settingTable: readonly SettingSpec[] = [
     meaning: "The level at which an effect is called shown; intervals are at 1 less the level.",
     read: option("level", readLevel),
   },
-  {
-    name: "constant",
-    values: "yes, no",
-    standard: "yes",
-    meaning: "Whether the regression has a constant.",
-    read: plain("constant", readYesNo),
-  },
-  {
-    name: "columns",
-    values: "headings or numbers, separated by commas",
-    standard: "all columns of the drivers",
-    meaning: "Which columns of the drivers are used.",
-    read: plain("columns", readList),
-  },
-  {
-    name: "categories",
-    values: "headings, separated by commas",
-    standard: "none",
-    meaning: "Drivers whose values are names of categories, one indicator for each category but one.",
-    read: plain("categories", readList),
-  },
-  {
-    name: "base",
-    values: "Heading = category, separated by commas",
-    standard: "the most frequent category",
-    meaning: "The category the others are compared with.",
-    read: plain("bases", readNamedTexts),
-  },
-  {
-    name: "logarithm",
-    values: "headings",
-    standard: "none",
-    meaning: "Columns taken in natural logarithms.",
-    read: transformed("logarithm"),
-  },
-  {
-    name: "square",
-    values: "headings",
-    standard: "none",
-    meaning: "Drivers that are squared.",
-    read: transformed("square"),
-  },
-  {
-    name: "lag",
-    values: "headings, or Heading by 2",
-    standard: "none",
-    meaning: "Drivers taken from one period (or the number given) earlier, by time and not by row.",
-    read: transformed("lag"),
-  },
-  {
-    name: "change",
-    values: "headings, or Heading by 12",
-    standard: "none",
-    meaning: "Columns taken as the change from one period (or the number given) earlier.",
-    read: transformed("change"),
-  },
-  {
-    name: "growth rate",
-    values: "headings, or Heading by 12",
-    standard: "none",
-    meaning: "Columns taken as the growth from one period (or the number given) earlier, in per cent.",
-    read: transformed("growth rate"),
-  },
-  {
-    name: "calendar",
-    values: "trend, month indicators, quarter indicators",
-    standard: "none",
-    meaning: "Drivers made from the time column.",
-    read: plain("calendar", readCalendar),
-  },
-  {
-    name: "text numbers",
-    values: "no, point, comma",
-    standard: "no",
-    meaning: "Whether text that is plainly a number is read as one, and its decimal mark.",
-    read: plain("textNumbers", readDecimal),
-  },
+  ...columnSettings,
   {
     name: "against",
     values: "Heading = number, separated by commas",
     standard: "0",
     meaning: "The value each driver is tested against.",
     read: option("against", readNamedNumbers),
+  },
+  {
+    name: "break after",
+    values: "a number of rows",
+    standard: "half of the rows",
+    meaning: "After how many rows, in time, Chow's test parts them: the break that is asked about.",
+    read: option("breakAfter", readCount),
+  },
+  {
+    name: "predict for",
+    values: "mean, single row",
+    standard: "mean",
+    meaning:
+      "Whether the interval of a prediction is for the mean of many such rows, or for one (under even spread alone).",
+    read: option("predictFor", readOneOf("mean", "single row")),
   },
   {
     name: "estimates",

@@ -14,11 +14,16 @@ export interface Settings {
   /** Headings or numbers of the driver columns used; empty for all. */
   readonly columns: readonly string[];
   readonly categories: readonly string[];
+  readonly dates: readonly string[];
   readonly bases: Readonly<Record<string, string>>;
   readonly transforms: readonly { readonly column: string; readonly transform: Transform }[];
+  /** Drivers beside the columns as they stand. */
+  readonly added: readonly { readonly column: string; readonly transform: Transform }[];
   readonly calendar: readonly CalendarDriver[];
   /** The decimal mark of text that may be read as numbers; null where it may not. */
   readonly textNumbers: "." | "," | null;
+  /** The heading of a column of groups that cross the first; null where there is none. */
+  readonly secondGroups: string | null;
   readonly options: Options;
 }
 
@@ -27,9 +32,12 @@ export const defaultSettings: Settings = {
   constant: true,
   columns: [],
   categories: [],
+  dates: [],
   bases: {},
   transforms: [],
+  added: [],
   calendar: [],
   textNumbers: null,
+  secondGroups: null,
   options: defaultOptions,
 };

@@ -1,7 +1,8 @@
 import { nearestName } from "../problem/nearestName.ts";
 import { type Result, failure, success } from "../problem/result.ts";
 import { partsBetween } from "./settingReaders.ts";
-import { isNotUnderstood, settingTable } from "./settingTable.ts";
+import { isNotUnderstood } from "./settingSpec.ts";
+import { settingTable } from "./settingTable.ts";
 import { type Settings, defaultSettings } from "./settingValues.ts";
 
 const plainName = (name: string): string =>

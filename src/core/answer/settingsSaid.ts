@@ -1,5 +1,6 @@
 import type { LagRule } from "../covariance/choice.ts";
-import type { Model, Transform } from "../design/model.ts";
+import { sameColumn } from "../design/columns.ts";
+import type { DriverChoice, Model, Transform } from "../design/model.ts";
 import { type Options, defaultOptions } from "./options.ts";
 
 export type SettingPair = readonly [string, string];
@@ -13,7 +14,8 @@ export function settingsSaid(model: Model, options: Options): SettingPair[] {
 }
 
 function modelPairs(model: Model): SettingPair[] {
-  const categories = model.drivers.filter(({ as }) => as === "category");
+  const [plain, added] = plainAndAdded(model);
+  const categories = plain.filter(({ as }) => as === "category");
   const bases = categories.flatMap(({ column, base }) =>
     base === null ? [] : [`${quoted(column)} = ${quoted(base)}`],
   );
@@ -21,13 +23,31 @@ function modelPairs(model: Model): SettingPair[] {
   return said([
     ["rows", model.rows.kind],
     ["constant", model.constant ? "" : "no"],
-    ["categories", categories.map(({ column }) => quoted(column)).join(", ")],
+    ["categories", listed(categories)],
+    ["dates", listed(plain.filter(({ as }) => as === "date"))],
     ["base", bases.join(", ")],
-    ...transformPairs(model),
+    ...transformPairs({ ...model, drivers: plain }),
+    ["add", added.map(addedInWords).join(", ")],
     ["calendar", model.calendar.join(", ")],
     ["text numbers", decimal === undefined ? "" : decimal === "." ? "point" : "comma"],
+    ["second groups", (model.rows.kind === "groups" ? model.rows.second : null) ?? ""],
   ]);
 }
+
+/** The first driver made of a column stands for the column; what else is made of it, or of the outcome, is added. */
+function plainAndAdded({ outcome, drivers }: Model): readonly [DriverChoice[], DriverChoice[]] {
+  const isAdded = ({ column }: DriverChoice, place: number): boolean =>
+    sameColumn(column, outcome.column) || drivers.slice(0, place).some((earlier) => sameColumn(earlier.column, column));
+  return [
+    drivers.filter((driver, place) => !isAdded(driver, place)),
+    drivers.filter((driver, place) => isAdded(driver, place)),
+  ];
+}
+
+const addedInWords = ({ column, transform }: DriverChoice): string =>
+  `${transform.kind} of ${transformed(column, transform)}`;
+
+const listed = (drivers: readonly DriverChoice[]): string => drivers.map(({ column }) => quoted(column)).join(", ");
 
 /** A name that a list would take apart stands in double quotes; quotes of its own could not be told from them. */
 const quoted = (name: string): string => (/[,;=]|\sby\s+\d+$/i.test(name) ? `"${name.replaceAll('"', "")}"` : name);
@@ -50,17 +70,21 @@ const transformed = (column: string, transform: Transform): string =>
   "periods" in transform && transform.periods !== 1 ? `${quoted(column)} by ${transform.periods}` : quoted(column);
 
 function optionPairs(options: Options): SettingPair[] {
-  const differs = (key: keyof Options): boolean => options[key] !== defaultOptions[key];
+  const whereOwn = (
+    key: "policy" | "whiteVersion" | "groupedVersion" | "level" | "breakAfter" | "predictFor",
+  ): string => (options[key] === defaultOptions[key] ? "" : String(options[key]));
   return said([
-    ["policy", differs("policy") ? options.policy : ""],
+    ["policy", whereOwn("policy")],
     ["errors", options.fixed?.errors ?? ""],
     ["reason", options.fixed?.reason ?? ""],
-    ["white version", differs("whiteVersion") ? options.whiteVersion : ""],
-    ["grouped version", differs("groupedVersion") ? options.groupedVersion : ""],
+    ["white version", whereOwn("whiteVersion")],
+    ["grouped version", whereOwn("groupedVersion")],
     ["lags", options.lags === null ? "" : lagsInWords(options.lags)],
     ["small-sample factor", options.adjusted ? "" : "no"],
-    ["level", differs("level") ? String(options.level) : ""],
+    ["level", whereOwn("level")],
     ["against", named(options.against)],
+    ["break after", whereOwn("breakAfter")],
+    ["predict for", whereOwn("predictFor")],
     ["estimates", options.estimates.join(", ")],
     ["joint test", options.jointTest.join(", ")],
     ["units", named(options.units)],

@@ -50,7 +50,9 @@ function rowsInWords(rows: RowsSummary, observations: number): string {
     case "time":
       return `${count} ${rows.period.unit}s from ${rows.first} to ${rows.last}`;
     case "groups":
-      return `${count} rows in ${numberInWords(rows.groups, 0)} groups by ${rows.by}`;
+      return `${count} rows in ${[rows, ...(rows.second === null ? [] : [rows.second])]
+        .map(({ groups, by }) => `${numberInWords(groups, 0)} groups by ${by}`)
+        .join(" and ")}`;
   }
 }
 

@@ -1,11 +1,15 @@
 import type { RowOrder } from "../design/design.ts";
+import { groupingsOf } from "../design/groupings.ts";
 import type { Decision } from "./decision.ts";
 
 type Settled = Pick<Decision, "policy" | "fourCase" | "called">;
 
 /** Why these standard errors are called for, as a clause that can follow "because". */
 export function becauseOf({ policy, fourCase, called }: Settled, order: RowOrder): string {
-  if (order.kind === "groups") return `rows of one ${order.by} may share what the drivers leave unexplained`;
+  if (order.kind === "groups") {
+    const ways = groupingsOf(order).map(({ by }) => `of one ${by}`);
+    return `rows ${ways.join(" or ")} may share what the drivers leave unexplained`;
+  }
   if (policy === "always-robust") return "the policy takes robust standard errors whatever the tests say";
   switch (called.errors.kind) {
     case "newey-west":

@@ -1,3 +1,4 @@
+import { fewestGroups } from "../design/groupings.ts";
 import type { Decision } from "./decision.ts";
 import type { Evidence } from "./evidence.ts";
 
@@ -49,9 +50,9 @@ const cautions: readonly Caution[] = [
       "Whether errors follow on is not asked: rows are separate cases, so their order in the sheet means nothing. If they run through time, say so and ask again.",
   },
   {
-    applies: (_, { order }) => order.kind === "groups" && order.labels.length < fewGroups,
+    applies: (_, { order }) => order.kind === "groups" && fewestGroups(order) < fewGroups,
     sentence: ({ order }) =>
-      `There are only ${order.kind === "groups" ? order.labels.length : 0} groups: the standard errors by group are then too small more often than not.`,
+      `There are only ${order.kind === "groups" ? fewestGroups(order) : 0} groups: the standard errors by group are then too small more often than not.`,
   },
   {
     applies: ({ called, inForce }) => called.errors.kind !== inForce.errors.kind,

@@ -1,5 +1,6 @@
 import type { ErrorsChoice } from "../covariance/choice.ts";
 import type { RowOrder } from "../design/design.ts";
+import { fewestGroups } from "../design/groupings.ts";
 import type { Reference } from "../inference/reference.ts";
 import { type Result, failure, success } from "../problem/result.ts";
 import { becauseOf } from "./because.ts";
@@ -108,8 +109,8 @@ export function chosen(
   }
 }
 
-/** t with one degree of freedom fewer than there are groups (common practice for CR1). */
+/** t with one degree of freedom fewer than there are groups, of two ways the fewer (common practice for CR1). */
 const groupedReference = (order: RowOrder): Reference => ({
   law: "t",
-  degreesOfFreedom: order.kind === "groups" ? order.labels.length - 1 : 1,
+  degreesOfFreedom: order.kind === "groups" ? fewestGroups(order) - 1 : 1,
 });

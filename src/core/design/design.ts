@@ -49,7 +49,11 @@ export type RowOrder =
       readonly groups: Int32Array<ArrayBuffer>;
       readonly labels: readonly string[];
       /** The second way of grouping, for two-way clustering. */
-      readonly second: { readonly groups: Int32Array<ArrayBuffer>; readonly labels: readonly string[] } | null;
+      readonly second: {
+        readonly groups: Int32Array<ArrayBuffer>;
+        readonly labels: readonly string[];
+        readonly by: string;
+      } | null;
       readonly positions: Int32Array<ArrayBuffer> | null;
       readonly by: string;
     };

@@ -43,7 +43,7 @@ function groupOrder({ groups, second, timeline }: GroupFrame, rows: Int32Array<A
   return success({
     kind: "groups",
     ...by,
-    second: across,
+    second: across === null || second === null ? null : { ...across, by: second.column.name },
     positions: timeline === null ? null : fromZero(timeline.positions, rows),
     by: groups.column.name,
   });

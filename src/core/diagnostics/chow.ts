@@ -18,6 +18,8 @@ import { noTime } from "./timeLine.ts";
 export function chow(fit: Fit, firstRows: number): TestOutcome {
   const { design, rowCount, columnCount } = fit;
   if (design.order.kind !== "time") return notApplicable("chow", noTime);
+  if (firstRows >= rowCount)
+    return notApplicable("chow", `there are only ${rowCount} rows, so none comes after row ${firstRows}`);
   const [before, after] = [part(fit, 0, firstRows), part(fit, firstRows, rowCount)];
   const residual = before.residual + after.residual;
   const df = [before.rank + after.rank - columnCount, rowCount - before.rank - after.rank] as const;

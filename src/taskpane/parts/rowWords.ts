@@ -10,7 +10,9 @@ export function rowsInWords(rows: RowsSummary): string {
     case "cases":
       return "each a separate case";
     case "groups":
-      return `in ${rows.groups} groups by ${rows.by}`;
+      return rows.second === null
+        ? `in ${rows.groups} groups by ${rows.by}`
+        : `in ${rows.groups} groups by ${rows.by} and ${rows.second.groups} by ${rows.second.by}`;
     case "time": {
       const gaps = rows.gaps === 0 ? "no gaps" : `${counted(rows.gaps, "gap")}: ${gapList(rows)}`;
       return `${rows.period.name} from ${rows.first} to ${rows.last}, ${gaps}`;

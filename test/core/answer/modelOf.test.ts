@@ -53,6 +53,27 @@ describe("settings and columns make a model", () => {
     ]);
   });
 
+  it("reads dates as time, adds further drivers behind those that stand for their columns, and crosses groups", () => {
+    const added = [
+      { column: "price", transform: { kind: "square" as const } },
+      { column: "repairs", transform: { kind: "lag" as const, periods: 1 } },
+    ];
+    const settings = { dates: ["fuel"], added, secondGroups: "Month" };
+    const result = model(settings, { key: "Shop", keyIs: "groups", order: "Month" });
+    expect(result.ok && result.value.drivers.map(({ column, as, transform }) => [column, as, transform.kind])).toEqual([
+      ["Price", "number", "none"],
+      ["Fuel", "date", "none"],
+      ["Region", "number", "none"],
+      ["Price", "number", "square"],
+      ["Repairs", "number", "lag"],
+    ]);
+    expect(result.ok && result.value.rows).toEqual({ kind: "groups", by: "Shop", second: "Month", order: "Month" });
+    expect(model({ dates: ["Openned"] })).toMatchObject({ problem: { code: "unknown-heading", heading: "Openned" } });
+    expect(model({ added: [{ column: "Prise", transform: { kind: "square" } }] })).toMatchObject({
+      problem: { code: "unknown-heading", heading: "Prise", nearest: "Price" },
+    });
+  });
+
   it("names the nearest column where a setting speaks of one that plays no part", () => {
     expect(model({ categories: ["Regoin"] })).toMatchObject({
       ok: false,

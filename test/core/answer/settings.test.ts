@@ -49,6 +49,29 @@ describe("settings as text", () => {
     expect(value("errors: by tests; reason: none needed").options.fixed).toBeNull();
   });
 
+  it("read what is added beside the columns", () => {
+    expect(value('add: square of Price, Lag of "Fuel, net" by 2, growth  rate of Takings by 12').added).toEqual([
+      { column: "Price", transform: { kind: "square" } },
+      { column: "Fuel, net", transform: { kind: "lag", periods: 2 } },
+      { column: "Takings", transform: { kind: "growth rate", periods: 12 } },
+    ]);
+    for (const text of ["root of Price", "square Price", "square of Price, Fuel"]) {
+      expect(read(`add: ${text}`)).toMatchObject({ ok: false, problem: { code: "unknown-value", setting: "add" } });
+    }
+  });
+
+  it("read what is asked beyond the drivers", () => {
+    const { options, dates, secondGroups } = value(
+      'break after: 12; predict for: Single-Row; estimates: Price > 1, "A, b" / 2; joint test: Price = 0, Fuel = 1; dates: Opened; second groups: Year',
+    );
+    expect(options).toMatchObject({ breakAfter: 12, predictFor: "single row", jointTest: ["Price = 0", "Fuel = 1"] });
+    expect(options.estimates).toEqual(["Price > 1", '"A, b" / 2']);
+    expect([dates, secondGroups]).toEqual([["Opened"], "Year"]);
+    for (const count of ["0", "1.5", "-3", "half", ""]) {
+      expect(read(`break after: ${count}`)).toMatchObject({ ok: false, problem: { setting: "break after" } });
+    }
+  });
+
   it("read lists, transforms and named values", () => {
     const settings = value(
       "columns: Price, 3; lag: Price by 2, Fuel; logarithm: Takings; base: Region = North; against: Price = -1.5; units: Repairs = repairs a month; level: 10 %; constant: no; text numbers: comma; small-sample factor: no",

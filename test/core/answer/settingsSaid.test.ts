@@ -5,9 +5,15 @@ import { type Options, defaultOptions } from "../../../src/core/answer/options.t
 import { readSettings } from "../../../src/core/answer/settings.ts";
 import { settingsSaid } from "../../../src/core/answer/settingsSaid.ts";
 import type { LagRule } from "../../../src/core/covariance/choice.ts";
-import type { Model, Transform } from "../../../src/core/design/model.ts";
+import type { DriverChoice, Model, Transform } from "../../../src/core/design/model.ts";
 
-const columns = ["Price index, net of tax = list", "Advertising", "Region; by 2"] as const;
+const columns = ["Price index, net of tax = list", "Advertising", "Region; by 2", "Opened"] as const;
+/** Beside those that stand for their columns; no transform here is one of theirs. */
+const addedDrivers: DriverChoice[] = [
+  { column: "Repairs", as: "number", base: null, transform: { kind: "lag", periods: 13 } },
+  { column: columns[0], as: "number", base: null, transform: { kind: "growth rate", periods: 14 } },
+  { column: columns[1], as: "number", base: null, transform: { kind: "lag", periods: 15 } },
+];
 const periods = fc.integer({ min: 1, max: 12 });
 const transforms: fc.Arbitrary<Transform> = fc.oneof(
   fc.constant<Transform>({ kind: "none" }),
@@ -29,17 +35,20 @@ const lagRules: fc.Arbitrary<LagRule | null> = fc.oneof(
 const models: fc.Arbitrary<Model> = fc.record({
   outcome: fc.record({ column: fc.constant("Repairs"), transform: transforms }),
   drivers: fc
-    .tuple(transforms, transforms, fc.option(fc.constantFrom("North, by the sea", "South")))
-    .map(([price, advertising, base]) => [
+    .tuple(transforms, transforms, fc.option(fc.constantFrom("North, by the sea", "South")), fc.subarray(addedDrivers))
+    .map(([price, advertising, base, added]) => [
       { column: columns[0], as: "number" as const, base: null, transform: price },
       { column: columns[1], as: "number" as const, base: null, transform: advertising },
       { column: columns[2], as: "category" as const, base, transform: { kind: "none" as const } },
+      { column: columns[3], as: "date" as const, base: null, transform: { kind: "none" as const } },
+      ...added,
     ]),
   calendar: fc.subarray(["trend" as const, "month indicators" as const]),
   rows: fc.constantFrom(
     { kind: "cases" as const },
     { kind: "time" as const, order: "Month" },
     { kind: "groups" as const, by: "Month", second: null, order: null },
+    { kind: "groups" as const, by: "Month", second: "Shop", order: null },
   ),
   constant: fc.boolean(),
   textNumbers: fc.constant([]),
@@ -55,6 +64,8 @@ const options: fc.Arbitrary<Options> = fc.record({
   adjusted: fc.boolean(),
   level: fc.constantFrom(0.01, 0.05, 0.1),
   against: fc.constantFrom({}, { [columns[0]]: -1, Advertising: 0.25 }),
+  breakAfter: fc.constantFrom(null, 7),
+  predictFor: fc.constantFrom("mean", "single row"),
   estimates: fc.constantFrom([], ["Advertising > 1", '"Price, new" / (1 - Advertising) = 2']),
   jointTest: fc.constantFrom([], ["Advertising = 0", '"Price, new" = 2 * Advertising']),
   units: fc.constantFrom({}, { Repairs: "repairs a month, all shops" }),

@@ -35,7 +35,7 @@ describe("two ways of grouping", () => {
     const once = orderedFit("grunfeld");
     const { order } = once.design;
     if (order.kind !== "groups") throw new Error(order.kind);
-    const twice: RowOrder = { ...order, second: { groups: order.groups, labels: order.labels } };
+    const twice: RowOrder = { ...order, second: { groups: order.groups, labels: order.labels, by: order.by } };
     const both = grouped({ ...once, design: { ...once.design, order: twice } }, "CR1");
     expectAllDigits(both.standardErrors, [...grouped(once, "CR1").standardErrors], 12);
   });
@@ -69,7 +69,7 @@ describe("two ways of grouping", () => {
     const x = [1, 2, 3, 4, 4, 3, 2, 1.5];
     const order: RowOrder = {
       ...inGroups(first),
-      second: { groups: Int32Array.from(second), labels: ["0", "1", "2", "3"] },
+      second: { groups: Int32Array.from(second), labels: ["0", "1", "2", "3"], by: "Year" },
     } as RowOrder;
     const covariance = grouped(fitOf(designOf(y, [x], { order })), "CR0");
     expect(covariance.used.fallback).toContain("indefinite");

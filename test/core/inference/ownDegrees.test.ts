@@ -118,7 +118,11 @@ describe("degrees of freedom that no combination has for itself", () => {
       4, 4,
     ]);
     expect(degreesOfCombinations(fit, covarianceFor(fit, { kind: "classical" }), weights)).toBeNull();
-    const second = { groups: Int32Array.from({ length: n }, (_, i) => i % 8), labels: "abcdefgh".split("") };
+    const second = {
+      groups: Int32Array.from({ length: n }, (_, i) => i % 8),
+      labels: "abcdefgh".split(""),
+      by: "Year",
+    };
     const crossed = fitWith([a, b], { ...inEights, second } as RowOrder);
     expect([...degreesOfCombinations(crossed, covarianceFor(crossed, cr2), weights)!]).toEqual([4, 4]);
   });

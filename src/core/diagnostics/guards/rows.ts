@@ -1,4 +1,5 @@
 import type { RowOrder } from "../../design/design.ts";
+import { type Grouped, fewestGroups, groupingsOf } from "../../design/groupings.ts";
 import { type Guard, namesInWords } from "./guard.ts";
 
 /** With fewer groups the figures for groups are too optimistic (Cameron and Miller 2015, J. Human Resources 50, 317-372). */
@@ -36,26 +37,25 @@ function gapsGuard({ gaps, gapLabels, period, labels }: Extract<RowOrder, { kind
   };
 }
 
-function groupsGuard({ groups, labels, by }: Extract<RowOrder, { kind: "groups" }>): Guard {
-  const sizes = new Float64Array(labels.length);
-  for (const group of groups) sizes[group]! += 1;
-  const largest = sizes.indexOf(Math.max(...sizes));
-  const share = sizes[largest]! / groups.length;
-  const few = labels.length < fewGroups;
-  const sentences = [
-    ...(few
-      ? [`There are only ${labels.length} groups by ${by}: standard errors by group are then often too small.`]
-      : []),
-    ...(share > largeShare
-      ? [
-          `"${labels[largest]}" holds ${Math.round(100 * share)} % of the rows, so that there are fewer groups than it seems.`,
-        ]
-      : []),
-  ];
+function groupsGuard(order: Extract<RowOrder, { kind: "groups" }>): Guard {
+  const sentences = groupingsOf(order).flatMap(groupFaults);
+  const few = fewestGroups(order) < fewGroups;
   if (sentences.length > 0) return { guard: "groups", finding: few ? "look into it" : "worth knowing", sentences };
   return {
     guard: "groups",
     finding: "nothing found",
-    sentences: [`There are ${labels.length} groups by ${by}, none of them very large.`],
+    sentences: groupingsOf(order).map(
+      ({ labels, by }) => `There are ${labels.length} groups by ${by}, none of them very large.`,
+    ),
   };
+}
+
+function groupFaults({ groups, labels, by }: Grouped): string[] {
+  const sizes = new Float64Array(labels.length);
+  for (const group of groups) sizes[group]! += 1;
+  const largest = sizes.indexOf(Math.max(...sizes));
+  const share = sizes[largest]! / groups.length;
+  const few = `There are only ${labels.length} groups by ${by}: standard errors by group are then often too small.`;
+  const large = `"${labels[largest]}" holds ${Math.round(100 * share)} % of the rows, so that there are fewer groups than it seems.`;
+  return [...(labels.length < fewGroups ? [few] : []), ...(share > largeShare ? [large] : [])];
 }
