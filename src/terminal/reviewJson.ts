@@ -14,7 +14,7 @@ export const reviewJson = (review: BookReview): object => ({
 });
 
 function claimJson({ claim, answer, compared, explanation, alternatives, ...said }: ClaimReview): object {
-  const { place, origin, outcome, drivers, constant } = claim;
+  const { place, origin, outcome, drivers, constant, assumed = [] } = claim;
   const comparisonJson = ({ reported, recomputed, agrees }: Comparison): object => ({
     number: quantityInWords(reported.quantity, namesOfDrivers(claim)),
     quantity: reported.quantity,
@@ -31,7 +31,7 @@ function claimJson({ claim, answer, compared, explanation, alternatives, ...said
   });
   return {
     ...{ place, origin, title: titleOf(claim), verdict: said.verdict },
-    ...{ outcome: lineJson(outcome), drivers: drivers.map(lineJson), constant },
+    ...{ outcome: lineJson(outcome), drivers: drivers.map(lineJson), constant, assumed },
     findings: gravestFirst(said.findings),
     numbers: compared.map(comparisonJson),
     explanation: explanation === null ? null : explanationJson(explanation),

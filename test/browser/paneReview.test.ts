@@ -57,6 +57,15 @@ describe("the section Review", () => {
     expect(lines).toContain("R-squared B8 agrees 62% 62% 62%");
   });
 
+  it("says what had to be taken for granted, and leads to what a review can show", async () => {
+    await openGravest();
+    await page.getByText("The outcome is taken to be Repairs").waitFor();
+    await button(page, /^What a review can show/).click();
+    await heading(page, "What a review can and cannot show").waitFor();
+    await button(page, "Back to Review").click();
+    await heading(page, "Findings").waitFor();
+  });
+
   it("jumps to the cells of a finding, of a number and of the report", async () => {
     await openGravest();
     await button(page, "Months!C10").click();

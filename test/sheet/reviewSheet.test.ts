@@ -29,6 +29,7 @@ describe("a sheet of one review", () => {
     const parts = [
       "Review: Repairs explained by Price index",
       "Verdict on the work",
+      "Taken for granted",
       "Findings",
       "Reported and recomputed",
       "What explains the difference",

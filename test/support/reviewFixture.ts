@@ -38,6 +38,7 @@ export const claimFixture: Claim = {
     reported({ kind: "observations" }, "B9", [5, "5", 0.5]),
   ],
   others: [line("Month", 0, 44_000)],
+  assumed: ["The outcome is taken to be Repairs, which the title names."],
 };
 
 const recomputed = [-1.3119, 0.3317, 0.6177, 6];

@@ -44,6 +44,7 @@ function claimLines(review: ClaimReview): TextLine[] {
     blank,
     sentence(verdict),
     blank,
+    ...part("Taken for granted", (claim.assumed ?? []).map(sentence)),
     ...part("Findings", gravestFirst(findings).flatMap(findingLines)),
     ...part("Reported and recomputed", alignedTable(comparedTexts(review))),
     ...part("What explains the difference", explanationsOf(review).map(sentence)),

@@ -10,9 +10,11 @@ import { acrossReview, heightOver, linkTo, reviewColumns, sentencesSection } fro
 export function claimSections(review: ClaimReview): Section[] {
   const { verdict, findings, tried, errors, consequences } = review;
   const explanations = explanationsOf(review);
+  const { assumed = [] } = review.claim;
   return [
     placeSection(review),
     sentencesSection("Verdict on the work", [verdict]),
+    ...(assumed.length === 0 ? [] : [sentencesSection("Taken for granted", assumed)]),
     findingsSection("Findings", findings, "Nothing was found against the work."),
     comparedSection(review),
     ...(explanations.length === 0 ? [] : [sentencesSection("What explains the difference", explanations)]),

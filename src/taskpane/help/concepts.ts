@@ -1,5 +1,6 @@
 import { firm, leftOutRows, liveAndKept, testsMiss } from "./aboutAnswers.ts";
 import { fourCases, groups, referenceDistribution, threeKinds } from "./aboutErrors.ts";
+import { reviews } from "./aboutReview.ts";
 import type { HelpPage } from "./helpPage.ts";
 
 /** Every page of help by its concept, in the order in which the questions arise. */
@@ -12,6 +13,7 @@ export const helpPages = {
   firm,
   "what tests miss": testsMiss,
   "live and kept": liveAndKept,
+  reviews,
 } as const satisfies Record<string, HelpPage>;
 
 export type Concept = keyof typeof helpPages;

@@ -1,8 +1,8 @@
 import { type ReactNode } from "react";
-import { reviewLimits } from "../../core/review/reviewWords.ts";
 import { useType } from "../look/type.ts";
 import { SectionTitle } from "../parts/SectionTitle.tsx";
 import { ReviewChoices } from "./ReviewChoices.tsx";
+import { ReviewLimits } from "./ReviewLimits.tsx";
 
 /** What a review is, and the ways to begin one. */
 export function ReviewStart(): ReactNode {
@@ -15,7 +15,7 @@ export function ReviewStart(): ReactNode {
         whether the evidence allows them, and what the conclusions should have been.
       </p>
       <ReviewChoices />
-      <p className={type.footnote}>{reviewLimits}</p>
+      <ReviewLimits />
     </>
   );
 }

@@ -1,7 +1,7 @@
 import type { ReactNode } from "react";
 import { type ReviewInHand, reviewShown } from "../../app/review/reviewState.ts";
 import type { ClaimReview } from "../../core/review/claimReview.ts";
-import { explanationsOf, reviewLimits } from "../../core/review/reviewWords.ts";
+import { explanationsOf } from "../../core/review/reviewWords.ts";
 import { useType } from "../look/type.ts";
 import { Disclosure } from "../parts/Disclosure.tsx";
 import { keepTogether } from "../parts/keepTogether.ts";
@@ -9,6 +9,7 @@ import { ComparedTable } from "./ComparedTable.tsx";
 import { ConsequenceList } from "./ConsequenceList.tsx";
 import { FindingList } from "./FindingList.tsx";
 import { ReviewAsText } from "./ReviewAsText.tsx";
+import { ReviewLimits } from "./ReviewLimits.tsx";
 import { UnreadList } from "./UnreadList.tsx";
 
 interface ReviewedWordsProps {
@@ -50,7 +51,7 @@ export function ReviewedWords({ review, regression }: ReviewedWordsProps): React
       <Disclosure label="As text">
         <ReviewAsText review={review} />
       </Disclosure>
-      <p className={type.footnote}>{reviewLimits}</p>
+      <ReviewLimits />
     </>
   );
 }

@@ -41,6 +41,10 @@ describe("a review as text", () => {
     expect(lines).toContain("coefficient of Price index | Sums!D2 | 2.50 | 2.50 | agrees");
   });
 
+  it("says what had to be taken for granted", () => {
+    expect(text).toContain("Taken for granted:\nThe outcome is taken to be Repairs, which the title names.");
+  });
+
   it("says what explains it, which standard errors were taken, and what follows", () => {
     expect(text).toContain("The last row (Months!B10:C10) was left off.");
     expect(text).toContain("The errors follow on, so these may not be used.");
