@@ -33,7 +33,8 @@ export type Action =
       readonly kind: "setup changed";
       readonly change: Partial<Pick<Setup, "rows" | "constant" | "visibleOnly" | "calendar" | "options">>;
     }
-  | { readonly kind: "answered"; readonly answered: Omit<Answered, "outdated"> }
+  | { readonly kind: "answered"; readonly answered: Omit<Answered, "outdated" | "memo"> }
+  | { readonly kind: "memo made"; readonly text: string }
   | { readonly kind: "written"; readonly sheet: string; readonly as: SheetKind }
   | { readonly kind: "recalculated"; readonly sheet: string }
   | { readonly kind: "kept"; readonly sheet: string }

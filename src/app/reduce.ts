@@ -58,6 +58,10 @@ const changes: { readonly [Kind in Action["kind"]]: (state: PaneState, action: O
     const now = written?.sheet === sheet ? { ...written, kind: "kept" as const } : written;
     return withSheetDone({ ...state, written: now, busy: null }, keptWords(sheet));
   },
+  "memo made": ({ answered, ...state }, { text }) => ({
+    ...state,
+    answered: answered === null ? null : { ...answered, memo: text },
+  }),
   "cell changed": cellChanged,
   said: (state, { text }) => announce(state, text),
 };
@@ -94,7 +98,7 @@ function answered(state: PaneState, { answered }: Of<"answered">): PaneState {
     busy: null,
     fault: null,
     comparison: null,
-    answered: { ...answered, outdated: outdatedAlready(state, answered) },
+    answered: { ...answered, memo: null, outdated: outdatedAlready(state, answered) },
     written: written === null ? null : { ...written, outdated: written.kind === "kept" },
   };
   return announce(state.section === "data" ? arriveAt(next, "answer") : next, answeredWords(answered.answer));

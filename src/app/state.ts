@@ -35,6 +35,8 @@ export interface Answered {
   /** The table that its data are, if they are one. */
   readonly table: TableInHand | null;
   readonly outdated: Outdated | null;
+  /** The answer as plain text, once it was asked for. */
+  readonly memo: string | null;
 }
 
 /** A result sheet written from this pane. */

@@ -1,7 +1,8 @@
 import { describe, expect, it } from "vitest";
 import type { ErrorsChoice } from "../../src/core/covariance/choice.ts";
 import type { Decision, FourCase } from "../../src/core/decision/decision.ts";
-import { caseCells, isInForce, pointedAt, settledBy } from "../../src/taskpane/pictures/caseGrid.ts";
+import { settledBy } from "../../src/core/answer/findings.ts";
+import { caseCells, isInForce, pointedAt } from "../../src/taskpane/pictures/caseGrid.ts";
 import { answerFixture } from "../support/answerFixture.ts";
 
 const classical: ErrorsChoice = { kind: "classical" };

@@ -37,7 +37,7 @@ async function answerAgain(
   const answer = await work.analyst.analyse(question, by.errand);
   if (!answer.ok) return answer;
   const { address, headingRow, table } = data;
-  return success({ answer: answer.value, question, setup, address, headingRow, table, outdated: null });
+  return success({ answer: answer.value, question, setup, address, headingRow, table, outdated: null, memo: null });
 }
 
 /** Writes the answer shown in the place of an earlier one. */

@@ -1,14 +1,11 @@
 import { makeStyles, tokens } from "@fluentui/react-components";
 import type { ReactNode } from "react";
 import type { Answer } from "../../core/answer/answer.ts";
-import { pValueInWords } from "../../core/answer/wording.ts";
-import type { Decision } from "../../core/decision/decision.ts";
-import { testWords } from "../../core/diagnostics/words.ts";
+import { findingInWords } from "../../core/answer/findings.ts";
 import { HelpLink } from "../help/HelpLink.tsx";
 import { useType } from "../look/type.ts";
 import { keepTogether } from "../parts/keepTogether.ts";
 import { FourCases } from "../pictures/FourCases.tsx";
-import { settledBy } from "../pictures/caseGrid.ts";
 
 const useStyles = makeStyles({
   reasons: {
@@ -35,9 +32,9 @@ export function WhichErrors({ answer }: { readonly answer: Answer }): ReactNode 
       <FourCases decision={decision} />
       <dl className={styles.reasons}>
         <dt className={styles.question}>Spread</dt>
-        <dd className={styles.finding}>{keepTogether(findingOf(decision, "spread"))}</dd>
+        <dd className={styles.finding}>{keepTogether(findingInWords(decision, "spread"))}</dd>
         <dt className={styles.question}>Follow-on</dt>
-        <dd className={styles.finding}>{keepTogether(findingOf(decision, "follow-on"))}</dd>
+        <dd className={styles.finding}>{keepTogether(findingInWords(decision, "follow-on"))}</dd>
       </dl>
       <ul className={styles.cautions}>
         {decision.cautions.map((caution) => (
@@ -49,13 +46,4 @@ export function WhichErrors({ answer }: { readonly answer: Answer }): ReactNode 
       <HelpLink about="what tests miss" asks="What can the tests miss?" />
     </>
   );
-}
-
-/** "uneven: Koenker's test, p = 0.0031, tested at 10 %". */
-function findingOf(decision: Decision, question: "spread" | "follow-on"): string {
-  const found = question === "spread" ? decision.fourCase.spread : decision.fourCase.followOn;
-  const test = settledBy(decision, question);
-  if (test === null || found === "not asked") return found;
-  const p = pValueInWords(test.pValue, decision.testLevel);
-  return `${found}: ${testWords[test.outcome.test].title}, ${p}, tested at ${Number((100 * decision.testLevel).toPrecision(6))} %`;
 }

@@ -1,6 +1,5 @@
 import type { ErrorsChoice } from "../../core/covariance/choice.ts";
 import type { Decision } from "../../core/decision/decision.ts";
-import type { TestName } from "../../core/diagnostics/outcome.ts";
 
 export const spreads = ["even", "uneven"] as const;
 export const followOns = ["none", "some"] as const;
@@ -40,16 +39,3 @@ const kindOf = ({ errors }: CaseCell): ErrorsChoice["kind"] => {
       return "newey-west";
   }
 };
-
-const followOnTests: readonly TestName[] = ["breusch-godfrey"];
-
-/** The test that settled a question: the one with the smallest p-value among those looked at. */
-export function settledBy(decision: Decision, question: "spread" | "follow-on"): Decision["restsOn"][number] | null {
-  const asked = decision.restsOn.filter(
-    ({ outcome }) => followOnTests.includes(outcome.test) === (question === "follow-on"),
-  );
-  return asked.reduce<(typeof asked)[number] | null>(
-    (least, test) => (least === null || test.pValue < least.pValue ? test : least),
-    null,
-  );
-}
