@@ -40,10 +40,10 @@ export const isCalculatedAt = ({ sheet, row, column }: CellPlace): boolean =>
 
 /** The number format of a cell; null where it was not read. */
 export function formatAt({ sheet, row, column }: CellPlace): string | null {
-  const window = sheet.formats.find(({ firstRow, rowCount }) => row >= firstRow && row < firstRow + rowCount);
+  const stretch = sheet.formats.find(({ firstRow, rowCount }) => row >= firstRow && row < firstRow + rowCount);
   const across = column - sheet.firstColumn;
-  if (window === undefined || across < 0 || across >= sheet.columns.length) return null;
-  return window.formats[window.indices[(row - window.firstRow) * sheet.columns.length + across]!] ?? null;
+  if (stretch === undefined || across < 0 || across >= sheet.columns.length) return null;
+  return stretch.formats[stretch.indices[(row - stretch.firstRow) * sheet.columns.length + across]!] ?? null;
 }
 
 /** "Handover!B4" */

@@ -1,11 +1,18 @@
 import type { Report } from "../answer/question.ts";
-import { type Result, success } from "../problem/result.ts";
+import { type Result, failure, success } from "../problem/result.ts";
+import { type SheetArea, addressOf } from "../table/address.ts";
 import type { Book } from "./book.ts";
+import type { CellPlace } from "./cellsOfBook.ts";
 import type { Claim } from "./claim.ts";
 import type { BookReview } from "./claimReview.ts";
 import type { Finding } from "./finding.ts";
 import { type FormulaCell, readFormulas } from "./found/formulaCells.ts";
-import { claimOf, gathered } from "./found/gatherClaims.ts";
+import { type Gathered, claimOf, gathered } from "./found/gatherClaims.ts";
+import { groupBehind, withBlock } from "./typed/attachBlock.ts";
+import { dataTables } from "./typed/dataTables.ts";
+import { areaCalled, givenData } from "./typed/pointedAt.ts";
+import { type ReportBlock, reportBlocks } from "./typed/reportBlocks.ts";
+import { type GivenData, typedClaim } from "./typed/typedClaim.ts";
 
 /** Cells that someone points at as the report of a regression, and what they say of its data. */
 export interface Pointed {
@@ -33,22 +40,87 @@ export interface BookClaims {
 }
 
 /**
- * Finds the regressions in a workbook: formulas, and blocks of typed numbers with headings that say what they are.
+ * Finds the regressions in a workbook: formulas, and blocks of numbers with headings that say what they are.
  * @param report - is told after each sheet how far the search has come.
  * @returns Problem "bad-address", "unknown-place", "unknown-heading" or "no-report" for what was pointed at; without
  *   pointing there is always an answer, empty where the book reports no regression.
  */
 export function claimsOf(book: Book, asked: Asked, report: Report): Result<BookClaims> {
-  const claims: Claim[] = [];
-  const unread: BookReview["unread"][number][] = [];
+  const { pointed } = asked;
+  const area = pointed === null ? success(null) : areaCalled(book, pointed.reported);
+  if (!area.ok) return area;
+  const given = pointed === null ? success(nothingGiven) : givenData(book, pointed);
+  if (!given.ok) return given;
+  const place = area.value;
+  const onSheet = place?.sheet ?? asked.sheet;
+  const found = regressionsIn(book, onSheet, report);
+  const here = place === null ? found : touching(found, place);
+  if (place !== null && here.groups.length + here.blocks.length === 0) {
+    return failure({ code: "no-report", where: addressOf(place) });
+  }
+  const { claims, unread } = claimsFrom(here, book, given.value);
+  const missed = place === null ? [...found.unread, ...unread] : unread;
+  return success({ claims, unread: missed, craft: [] });
+}
+
+const nothingGiven: GivenData = { outcome: null, drivers: null };
+
+interface Found {
+  readonly groups: readonly Gathered[];
+  readonly blocks: readonly ReportBlock[];
+  readonly unread: BookClaims["unread"];
+}
+
+function regressionsIn(book: Book, onSheet: string | null, report: Report): Found {
   const cells: FormulaCell[] = [];
+  const blocks: ReportBlock[] = [];
+  const unread: BookClaims["unread"][number][] = [];
   for (const [index, sheet] of book.sheets.entries()) {
     report("Looking for regressions", index / book.sheets.length);
-    if (asked.sheet !== null && asked.sheet.toLowerCase() !== sheet.sheet.toLowerCase()) continue;
+    if (onSheet !== null && onSheet.toLowerCase() !== sheet.sheet.toLowerCase()) continue;
     const read = readFormulas(sheet, book);
     cells.push(...read.cells);
     unread.push(...read.unread);
+    blocks.push(...reportBlocks(sheet));
   }
-  claims.push(...gathered(cells, book).map(claimOf).filter((claim) => claim !== null));
-  return success({ claims, unread, craft: [] });
+  return { groups: gathered(cells, book), blocks, unread };
+}
+
+/** What has a cell inside an area. */
+function touching({ groups, blocks, unread }: Found, area: SheetArea): Found {
+  const isIn = ({ sheet, row, column }: CellPlace): boolean =>
+    sheet.sheet === area.sheet && overlaps(area, { row, column, rows: 1, columns: 1 });
+  return {
+    groups: groups.filter(({ cells }) => cells.some(({ place }) => isIn(place))),
+    blocks: blocks.filter((block) => block.sheet.sheet === area.sheet && overlaps(area, block.area)),
+    unread,
+  };
+}
+
+type Rectangle = Omit<SheetArea, "sheet">;
+
+const overlaps = (one: Rectangle, other: Rectangle): boolean =>
+  one.row < other.row + other.rows &&
+  other.row < one.row + one.rows &&
+  one.column < other.column + other.columns &&
+  other.column < one.column + one.columns;
+
+/** Blocks over formulas go with those; the others speak of data that are given, or found by their names. */
+function claimsFrom({ groups, blocks }: Found, book: Book, given: GivenData): Omit<BookClaims, "craft"> {
+  const unread: BookClaims["unread"][number][] = [];
+  const behind = new Map(blocks.map((block) => [block, groupBehind(block, groups)]));
+  const claims = groups.flatMap((group): Claim[] => {
+    const claim = claimOf(group);
+    if (claim === null) return [];
+    const own = blocks.filter((block) => behind.get(block) === group);
+    return [own.reduce((sum, block) => withBlock(sum, group, block), claim)];
+  });
+  const alone = blocks.filter((block) => behind.get(block) === null);
+  const tables = alone.length === 0 ? [] : dataTables(book);
+  for (const block of alone) {
+    const claim = typedClaim(block, tables, given);
+    if (claim.ok) claims.push(claim.value);
+    else unread.push({ cell: addressOf(block.area), why: claim.why });
+  }
+  return { claims, unread };
 }

@@ -1,0 +1,58 @@
+import { cellKind } from "../../table/cells.ts";
+import { cellInWords } from "../../table/spots.ts";
+import type { BookSheet } from "../book.ts";
+import { type CellPlace, wordsAt } from "../cellsOfBook.ts";
+import { type SummaryWord, type TermWord, summaryWordIn, termWordIn, wordWithNumber } from "./reportWords.ts";
+
+/** A cell whose text says what the numbers beside or below it are. */
+export interface Label {
+  readonly place: CellPlace;
+  /** Under such a word stand numbers of each driver; null where the text is no such word. */
+  readonly term: TermWord | null;
+  /** Beside such a word stands a number of the whole regression. */
+  readonly summary: SummaryWord | null;
+  /** Numbers that stand in the text itself, with their words. */
+  readonly inText: ReturnType<typeof wordWithNumber>;
+}
+
+/** The labels of a sheet, column by column; each different text of a column is looked at once. */
+export function labelsOf(sheet: BookSheet): readonly Label[] {
+  return sheet.columns.flatMap((cells, index) => {
+    const readings = cells.texts.map(readingOf);
+    if (!readings.some((reading) => reading !== null)) return [];
+    const found: Label[] = [];
+    for (let row = 0; row < cells.kinds.length; row++) {
+      const reading = cells.kinds[row] === cellKind.text ? readings[cells.numbers[row]!]! : null;
+      if (reading === null) continue;
+      const place = { sheet, row: sheet.firstRow + row, column: sheet.firstColumn + index };
+      found.push({ place, ...reading });
+    }
+    return found;
+  });
+}
+
+function readingOf(text: string): Omit<Label, "place"> | null {
+  const [term, summary, inText] = [termWordIn(text), summaryWordIn(text), wordWithNumber(text)];
+  return term === null && summary === null && inText.length === 0 ? null : { term, summary, inText };
+}
+
+/** The texts that stand in some rows of a sheet. */
+export function textsBetween(sheet: BookSheet, firstRow: number, lastRow: number): string[] {
+  const from = Math.max(firstRow, sheet.firstRow);
+  const to = Math.min(lastRow, sheet.firstRow + sheet.rowCount - 1);
+  const texts: string[] = [];
+  for (let row = from; row <= to; row++) {
+    for (const [index, cells] of sheet.columns.entries()) {
+      if (cells.kinds[row - sheet.firstRow] !== cellKind.text) continue;
+      texts.push(cellInWords(cells, row - sheet.firstRow));
+      if (index > mostColumnsRead) break;
+    }
+  }
+  return texts;
+}
+
+/** Beyond these stand data, not titles. */
+const mostColumnsRead = 40;
+
+export const textAt = (sheet: BookSheet, row: number, column: number): string =>
+  row < 0 || column < 0 ? "" : wordsAt({ sheet, row, column });

@@ -1,0 +1,30 @@
+import type { Outcome } from "./guessOutcome.ts";
+
+/** What had to be taken for granted to read a report of typed numbers. */
+export const assumptions = {
+  data: (range: string) => `The data were taken from ${range}, whose headings fit the names of the drivers.`,
+  name: (name: string, heading: string) => `"${name}" was read as the column "${heading}".`,
+  noConstant: "No constant is reported; the regression was taken to have one all the same.",
+  outcome: (name: string, because: Outcome["because"]) => `The outcome was taken to be "${name}", ${reasons[because]}.`,
+} as const;
+
+const reasons: Readonly<Record<Outcome["because"], string>> = {
+  named: "which the report names as such",
+  "spoken of": "of which the report speaks",
+  "only one": "the only other column of numbers there",
+  nearest: "whose regression comes nearest to the coefficients reported",
+};
+
+/** Why the data behind a report of typed numbers were not found. */
+export const whyNoData = {
+  noColumns: (names: readonly string[]) =>
+    `It reports ${inQuotes(names)}, but no sheet has columns with such headings; point at the data.`,
+  missing: (names: readonly string[], sheet: string) =>
+    `No column on sheet "${sheet}" fits ${inQuotes(names)}, though others of its drivers stand there; point at the data.`,
+  noOutcome: (sheet: string) =>
+    `Sheet "${sheet}" has the drivers, but no other column of numbers that they could explain; point at the outcome.`,
+  fewDrivers: (reported: number, given: number) =>
+    `It reports ${reported} ${reported === 1 ? "driver" : "drivers"}, but the data given for it are ${given} columns.`,
+} as const;
+
+const inQuotes = (names: readonly string[]): string => names.map((name) => `"${name}"`).join(", ");
