@@ -71,6 +71,7 @@ export function createPane({ host, analyst, edition, guard }: PaneParts): Pane {
     watch: createWatch(host, store.dispatch),
     watchSources: createSourcesWatch(host, store.dispatch, (sheet) => ({ kind: "source changed", sheet })),
     watchCompared: createSourcesWatch(host, store.dispatch, () => ({ kind: "compared cells changed" })),
+    watchReviewed: createWatch(host, store.dispatch, (cell) => ({ kind: "reviewed cell changed", cell })),
     edition,
   };
   const commands: Commands = {

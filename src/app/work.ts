@@ -17,6 +17,8 @@ export interface Work {
   readonly watch: Watch;
   readonly watchSources: WatchSources;
   readonly watchCompared: WatchSources;
+  /** Looks after the cells of what was reviewed. */
+  readonly watchReviewed: Watch;
   readonly edition: Edition;
 }
 

@@ -9,6 +9,7 @@ export type ReviewAction =
   | { readonly kind: "regressions found"; readonly asked: Asked; readonly found: BookClaims }
   | { readonly kind: "regression reviewed"; readonly index: number; readonly review: ClaimReview }
   | { readonly kind: "review finished" }
+  | { readonly kind: "reviewed cell changed"; readonly cell: string }
   /** Null shows the list. */
   | { readonly kind: "regression opened"; readonly index: number | null }
   | { readonly kind: "pointing changed"; readonly pointing: Partial<Pointing> }

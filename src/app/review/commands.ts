@@ -1,6 +1,6 @@
 import type { Claim } from "../../core/review/claim.ts";
 import type { Work } from "../work.ts";
-import { pointAtSelection, reviewBook, reviewPointed, reviewRest, reviewSelection } from "./reviewing.ts";
+import { pointAtSelection, reviewAgain, reviewBook, reviewPointed, reviewRest, reviewSelection } from "./reviewing.ts";
 import type { Pointing } from "./reviewState.ts";
 import { takeOverRegression } from "./takeOver.ts";
 import { writeReview } from "./writeReview.ts";
@@ -13,6 +13,8 @@ export interface ReviewCommands {
   readonly selection: () => void;
   /** Reviews what is pointed at, with what is said of its data. */
   readonly pointed: () => void;
+  /** The same again, as the cells stand now. */
+  readonly again: () => void;
   /** Goes on with those that are not reviewed yet. */
   readonly rest: () => void;
   /** Puts the address of the selected cells into a field. */
@@ -26,6 +28,7 @@ export const reviewCommands = (work: Work, guard: (task: () => Promise<void>) =>
   book: () => guard(() => reviewBook(work)),
   selection: () => guard(() => reviewSelection(work)),
   pointed: () => guard(() => reviewPointed(work)),
+  again: () => guard(() => reviewAgain(work)),
   rest: () => guard(() => reviewRest(work)),
   point: (field) => guard(() => pointAtSelection(work, field)),
   write: () => guard(() => writeReview(work)),

@@ -18,6 +18,13 @@ export const reviewChanges: {
       ...inHand,
       regressions: inHand.regressions.map((regression, at) => (at === index ? { ...regression, review } : regression)),
     })),
+  "reviewed cell changed": (state, { cell }) =>
+    state.review === null || state.review.changedCell !== null
+      ? state
+      : announce(
+          withReview(state, (inHand) => ({ ...inHand, changedCell: cell })),
+          `${cell} has changed. The review is out of date.`,
+        ),
   "review finished": (state) => announce({ ...state, busy: null }, finishedWords(state.review)),
   "regression opened": (state, { index }) => arrived(withReview(state, (inHand) => ({ ...inHand, open: index }))),
   "pointing changed": (state, { pointing }) => ({ ...state, pointing: { ...state.pointing, ...pointing } }),

@@ -1,5 +1,6 @@
 import type { Claim } from "../../core/review/claim.ts";
 import type { BookReview, ClaimReview } from "../../core/review/claimReview.ts";
+import { rangeOfLine } from "../../core/review/reviewWords.ts";
 import { addressOf, localAddressOf, parseAddress } from "../../core/table/address.ts";
 import type { Asked, BookClaims, Pointed } from "../../core/review/claimsOf.ts";
 
@@ -15,6 +16,8 @@ export interface ReviewInHand extends Omit<BookClaims, "claims"> {
   readonly regressions: readonly FoundRegression[];
   /** Which of them is shown in full, from 0; null shows the list. */
   readonly open: number | null;
+  /** The first cell that has changed since, null as long as none has. */
+  readonly changedCell: string | null;
   /** The sheet that was written last, null where none was. */
   readonly written: string | null;
 }
@@ -58,8 +61,17 @@ export const takeInHand = (asked: Asked, { claims, ...rest }: BookClaims): Revie
   asked,
   regressions: claims.map((claim) => ({ claim, review: null })),
   open: claims.length === 1 ? 0 : null,
+  changedCell: null,
   written: null,
 });
+
+/** The cells that a review rests on, those around the claimed ones too: the reports, and the lines of the data. */
+export function cellsReviewed({ regressions }: ReviewInHand): readonly string[] {
+  const claims = regressions.map(({ claim }) => claim);
+  const lines = claims.flatMap(({ outcome, drivers }) => [outcome, ...drivers]);
+  const whole = lines.map((line) => rangeOfLine({ ...line, from: line.first, count: line.cells.kinds.length }));
+  return [...new Set([...claims.map(({ place }) => place), ...whole])];
+}
 
 const reviewedOf = (regressions: readonly FoundRegression[]): readonly ClaimReview[] =>
   regressions.flatMap(({ review }) => (review === null ? [] : [review]));

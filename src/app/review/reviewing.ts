@@ -3,7 +3,7 @@ import type { Errand } from "../host.ts";
 import { type Work, fail } from "../work.ts";
 import { findRegressions } from "./findRegressions.ts";
 import { reviewEach } from "./reviewEach.ts";
-import { type Pointing, pointedFrom } from "./reviewState.ts";
+import { type Pointing, cellsReviewed, pointedFrom } from "./reviewState.ts";
 
 /** Lists every regression of the workbook and reviews one after the other. */
 export const reviewBook = (work: Work): Promise<void> => review(work, { pointed: null, sheet: null });
@@ -28,6 +28,12 @@ export async function reviewPointed(work: Work): Promise<void> {
   await review(work, { pointed, sheet: null });
 }
 
+/** Reviews the same again, as the cells stand now. */
+export async function reviewAgain(work: Work): Promise<void> {
+  const { review: inHand } = work.store.get();
+  if (inHand !== null) await review(work, inHand.asked);
+}
+
 /** Reviews what is still to be reviewed, after a round that was cut short. */
 export async function reviewRest(work: Work): Promise<void> {
   await finish(work, work.errands.start("reviewing"));
@@ -42,6 +48,8 @@ async function review(work: Work, asked: Asked): Promise<void> {
     return;
   }
   work.store.dispatch({ kind: "regressions found", asked, found: found.value });
+  const inHand = work.store.get().review;
+  if (inHand !== null) await work.watchReviewed(cellsReviewed(inHand));
   await finish(work, errand);
 }
 

@@ -11,6 +11,7 @@ import { usePane } from "../paneContext.ts";
 import { PlacesSaid } from "./PlacesSaid.tsx";
 import { ReviewChoices } from "./ReviewChoices.tsx";
 import { ReviewedWords } from "./ReviewedWords.tsx";
+import { ReviewOutdated } from "./ReviewOutdated.tsx";
 import { StillToReview } from "./StillToReview.tsx";
 
 const useStyles = makeStyles({
@@ -42,6 +43,7 @@ export function RegressionDetails({ review, regression }: RegressionDetailsProps
         </Button>
       )}
       <SectionTitle>{titleOf(claim)}</SectionTitle>
+      <ReviewOutdated review={review} />
       <p className={type.remark}>
         Reported at <CellLink address={claim.place} />: {originInWords(claim)}.
       </p>

@@ -11,6 +11,7 @@ import { usePane } from "../paneContext.ts";
 import { FindingList } from "./FindingList.tsx";
 import { RankMark } from "./RankMark.tsx";
 import { ReviewChoices } from "./ReviewChoices.tsx";
+import { ReviewOutdated } from "./ReviewOutdated.tsx";
 import { StillToReview } from "./StillToReview.tsx";
 import { UnreadList } from "./UnreadList.tsx";
 
@@ -56,6 +57,7 @@ export function RegressionList({ review }: { readonly review: ReviewInHand }): R
   return (
     <>
       <SectionTitle>{counted(regressions.length, "regression")} found</SectionTitle>
+      <ReviewOutdated review={review} />
       {reviews.length > 0 && <p className={type.body}>{summaryOf(reviews)}</p>}
       <StillToReview review={review} />
       <ul className={styles.list}>

@@ -94,6 +94,19 @@ describe("reviewing a workbook", () => {
   });
 });
 
+describe("cells that change after a review", () => {
+  it("make it out of date, once, until it is made again", async () => {
+    await run(bench.pane.commands.review.book);
+    expect(bench.host.watched()).toEqual(["Handover!A4:C6", "Months!B1:B10", "Months!C1:C10"]);
+    bench.host.change(5, 1, 77);
+    bench.host.change(6, 1, 78);
+    expect(bench.state().review?.changedCell).toBe("Months!B6");
+    expect(bench.said()).toBe("Months!B6 has changed. The review is out of date.");
+    await run(bench.pane.commands.review.again);
+    expect(bench.state().review).toMatchObject({ changedCell: null, regressions: [{ review: claimReviewFixture }] });
+  });
+});
+
 describe("pointing at a report", () => {
   it("asks about the selected cells, and keeps their address where more has to be said", async () => {
     const asked: unknown[] = [];
