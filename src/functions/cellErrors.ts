@@ -80,6 +80,7 @@ const signs = {
   "bad-address": "notAvailable",
   "too-much-for-excel": "notAvailable",
   "excel-too-old": "notAvailable",
+  "read-only": "notAvailable",
   "excel-busy": "notAvailable",
   "excel-refused": "notAvailable",
   "time-limit": "notAvailable",

@@ -57,6 +57,8 @@ export function problemOf(fault: unknown): HostProblem | null {
     case "ApiNotFound":
     case "ApiNotAvailable":
       return { code: "excel-too-old", missing: place || fault.message };
+    case "AccessDenied":
+      return { code: "read-only" };
     default:
       return { code: "excel-refused", detail: [fault.code, fault.message, place].filter(Boolean).join(", ") };
   }

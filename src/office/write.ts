@@ -23,7 +23,7 @@ export function writePlan(client: ExcelClient, plan: SheetPlan, errand: Errand):
     const taken = worksheets.items.map((sheet) => sheet.name);
     const name = freeSheetName(plan.name, taken);
     const sheet = worksheets.add(name);
-    sheet.customProperties.add(sheetMark.key, sheetMark.value);
+    if (plan.holds !== "data") sheet.customProperties.add(sheetMark.key, sheetMark.value);
     await inFront(() => context.sync());
     return finishOrTakeAway(sheet, () => fill(sheet, plan, { name, errand }));
   });
@@ -94,6 +94,7 @@ async function layOutPage(sheet: Excel.Worksheet, { printArea, pageBreaks = [] }
     sheet.pageLayout.rightMargin = margin.side;
     sheet.pageLayout.topMargin = margin.end;
     sheet.pageLayout.bottomMargin = margin.end;
+    sheet.horizontalPageBreaks.removePageBreaks();
     for (const row of pageBreaks) {
       sheet.horizontalPageBreaks.add(rangeAt(sheet, { row, column: 0, rows: 1, columns: 1 }));
     }

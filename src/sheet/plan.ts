@@ -2,6 +2,8 @@
 export interface SheetPlan {
   /** The wanted name; the host makes it unique ("Repairs answer", "Repairs answer 2"). */
   readonly name: string;
+  /** What stands on it where that is no result: data of the workbook from then on, like any others. */
+  readonly holds?: "data";
   readonly blocks: readonly PlanBlock[];
   readonly formats: readonly PlanFormat[];
   readonly links: readonly PlanLink[];

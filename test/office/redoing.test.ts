@@ -34,7 +34,8 @@ async function freshSheet() {
   return sheetData(`${sheet} 2`);
 }
 
-const content = ({ rows, merges, links }: ReturnType<typeof sheetData>) => ({
+const content = ({ rows, merges, links, pageBreaks }: ReturnType<typeof sheetData>) => ({
+  pageBreaks,
   rows: rows.map((row) => row.filter((cell) => cell !== null)),
   merges: merges.toSorted(),
   links,

@@ -22,7 +22,7 @@ describe("what Excel refuses", () => {
     ["ActivityLimitReached", { code: "excel-busy" }],
     ["RequestAborted", { code: "excel-busy" }],
     ["ApiNotFound", { code: "excel-too-old", missing: "Range.values" }],
-    ["AccessDenied", { code: "excel-refused", detail: "AccessDenied, as Excel says it, Range.values" }],
+    ["AccessDenied", { code: "read-only" }],
     ["GeneralException", { code: "excel-refused", detail: "GeneralException, as Excel says it, Range.values" }],
     ["SomethingNew", { code: "excel-refused", detail: "SomethingNew, as Excel says it, Range.values" }],
   ])("%s becomes a problem that the user can mend", async (code, problem) => {

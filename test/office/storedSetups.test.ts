@@ -129,6 +129,18 @@ describe("a set-up in the workbook", { timeout: 120_000 }, () => {
   });
 });
 
+it("puts sample data on a new sheet of their own, and reads them", { timeout: 120_000 }, async () => {
+  await at.carryOut(at.pane.commands.insertSample);
+  await at.carryOut(at.pane.commands.insertSample);
+  expect(at.state().data?.address).toBe("'Sample months 2'!A4:E100");
+  expect(at.state().setup?.columns.map(({ role }) => role)).toEqual(["time", "outcome", "driver", "driver", "driver"]);
+  const rows = (name: string) => at.desk.values(`'${name}'!A5:E100`);
+  expect(rows("Sample months 2")).toEqual(rows("Sample months"));
+  expect(rows("Sample months")).toEqual(at.desk.values("Months!A5:E100"));
+  await at.carryOut(at.pane.commands.checkSheets);
+  expect(at.state().sheets).toEqual([]);
+});
+
 describe("parts that are not ours to change", { timeout: 120_000 }, () => {
   const add = (xml: string): Promise<void> =>
     at.desk.Excel.run(async (context) => {

@@ -1,12 +1,18 @@
-import type { StoredProblem } from "./problem.ts";
+import type { HostProblem, StoredProblem } from "./problem.ts";
 import { capitalised, counted, listed } from "./spots.ts";
 
 type Sentence = readonly [whatAndWhere: string, whatToDo: string];
 
+type Spoken = StoredProblem | Extract<HostProblem, { code: "read-only" }>;
+
 /** The sentences about what Footing keeps in a workbook: set-ups, and what it knows of its result sheets. */
 export const storedSentences: {
-  readonly [Code in StoredProblem["code"]]: (problem: Extract<StoredProblem, { code: Code }>) => Sentence;
+  readonly [Code in Spoken["code"]]: (problem: Extract<Spoken, { code: Code }>) => Sentence;
 } = {
+  "read-only": () => [
+    "Excel does not let this workbook be changed: it is open for reading only, or that part of it is protected.",
+    "Ask for the right to edit it, lift the protection, or work in a copy.",
+  ],
   "stored-by-newer": ({ version, own }) => [
     `This workbook holds set-ups that a newer Footing stored (format ${version}; this one reads format ${own}).`,
     "They were left as they are. Update Footing to open them.",

@@ -149,6 +149,7 @@ export type HostProblem =
   | { readonly code: "bad-address"; readonly address: string }
   | { readonly code: "too-much-for-excel"; readonly cells: number; readonly limit: number }
   | { readonly code: "excel-too-old"; readonly missing: string }
+  | { readonly code: "read-only" }
   | { readonly code: "excel-busy" }
   | { readonly code: "excel-refused"; readonly detail: string }
   | { readonly code: "time-limit"; readonly seconds: number }

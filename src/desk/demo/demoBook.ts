@@ -2,7 +2,7 @@ import type { BookData, SheetData } from "../book/bookData.ts";
 import { functionsSheet } from "./functionsSheet.ts";
 import { handover } from "./handover.ts";
 import { columnSheet } from "./looks.ts";
-import { monthlyRepairs, type Month } from "./months.ts";
+import { monthlyRepairs, type Month } from "../../sheet/sample/months.ts";
 import { purchaseLots } from "./parts.ts";
 import { shops } from "./shops.ts";
 import { courierWeeks } from "./weeks.ts";

@@ -1,8 +1,8 @@
 import { blankSheet } from "../book/blankSheet.ts";
 import type { BookCell, SheetData } from "../book/bookData.ts";
-import { roundTo } from "./draws.ts";
+import { roundTo } from "../../sheet/sample/draws.ts";
 import { heightsUnder, looks, titleRows } from "./looks.ts";
-import type { Month } from "./months.ts";
+import type { Month } from "../../sheet/sample/months.ts";
 import { ordinaryFit } from "./ordinaryFit.ts";
 
 const above = ["What drives our repairs?", "Regression of repairs on price, advertising and rain. Data: sheet Months."];

@@ -1,4 +1,4 @@
-import { drawsFrom, roundTo } from "./draws.ts";
+import { drawsFrom, roundTo } from "../../sheet/sample/draws.ts";
 
 export interface Shop {
   readonly shop: string;

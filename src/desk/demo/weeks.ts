@@ -1,4 +1,4 @@
-import { carriedOver, drawsFrom, roundTo } from "./draws.ts";
+import { carriedOver, drawsFrom, roundTo } from "../../sheet/sample/draws.ts";
 
 export interface Week {
   /** Its Monday, as a serial number. */

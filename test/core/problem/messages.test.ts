@@ -210,6 +210,10 @@ const sentences: Sentences = {
     { code: "cell-being-edited" },
     "A cell is being edited. Press Enter or Escape in the sheet, then try again.",
   ],
+  "read-only": [
+    { code: "read-only" },
+    "Excel does not let this workbook be changed: it is open for reading only, or that part of it is protected. Ask for the right to edit it, lift the protection, or work in a copy.",
+  ],
   "stored-by-newer": [
     { code: "stored-by-newer", version: 3, own: 1 },
     "This workbook holds set-ups that a newer Footing stored (format 3; this one reads format 1). They were left as they are. Update Footing to open them.",

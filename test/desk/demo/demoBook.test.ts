@@ -1,7 +1,7 @@
 import { describe, expect, it } from "vitest";
 import type { BookCell, BookValue, SheetData } from "../../../src/desk/book/bookData.ts";
 import { demoBook } from "../../../src/desk/demo/demoBook.ts";
-import { monthlyRepairs } from "../../../src/desk/demo/months.ts";
+import { monthlyRepairs } from "../../../src/sheet/sample/months.ts";
 import { ordinaryFit } from "../../../src/desk/demo/ordinaryFit.ts";
 
 const book = demoBook();
