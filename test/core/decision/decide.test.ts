@@ -94,6 +94,39 @@ describe("the four cases", () => {
     });
   });
 
+  it("asks no question of groups, and counts them for the law", () => {
+    const four: RowOrder = { ...shops, groups: Int32Array.of(0, 1, 2, 3), labels: ["N", "E", "S", "W"] };
+    const decision = decided(evidence(both, four, 40));
+    expect(decision.fourCase).toEqual({ spread: "not asked", followOn: "not asked" });
+    expect(decision.called.reference).toEqual({ law: "t", degreesOfFreedom: 3 });
+    const years = { groups: Int32Array.of(0, 1, 0, 1), labels: ["2019", "2020"], by: "Year" };
+    expect(decided(evidence(both, { ...four, second: years }, 40)).called.reference).toEqual({
+      law: "t",
+      degreesOfFreedom: 1,
+    });
+  });
+
+  it("asks about follow-on at the order that decides alone", () => {
+    const orders = [test("breusch-godfrey", 0.001, 0.001, 1), test("breusch-godfrey", 0.5, 0.52, 12)];
+    const decision = decided(evidence([...clean.slice(0, 2), ...orders, test("arch", 0.001, 0.001, 12)], months(96)));
+    expect(decision.fourCase.followOn).toBe("none");
+    expect(decision.restsOn.map(({ outcome }) => [outcome.test, outcome.order])).toEqual([
+      ["koenker", null],
+      ["white", null],
+      ["breusch-godfrey", 12],
+    ]);
+  });
+
+  it("takes a p-value at the level itself for no rejection", () => {
+    const border = [test("koenker", 0.1, 0.1), test("white", 0.5, 0.5), test("breusch-godfrey", 0.1, 0.1, 12)];
+    expect(decided(evidence(border, months(96))).fourCase).toEqual({ spread: "even", followOn: "none" });
+  });
+
+  it("takes Newey-West with the lags found, and its factor as wished", () => {
+    const errors = { kind: "newey-west", lags: { kind: "given", lags: 12 }, adjusted: false };
+    expect(decided(evidence(following, months(96)), { adjusted: false }).called.errors).toEqual(errors);
+  });
+
   it("takes robust errors where the spread could not be tested", () => {
     const decision = decided(
       evidence([notApplicable("koenker", "no constant"), notApplicable("white", "no constant")], cases),
@@ -152,6 +185,30 @@ describe("a kind fixed by hand", () => {
     expect(decided(evidence(clean, cases), { fixed: { errors: "white", reason: null } }).override).toBe("none given");
   });
 
+  it("may be any kind that rows allow, under the law of its kind", () => {
+    const inForce = (order: RowOrder, errors: "classical" | "white" | "newey-west" | "grouped") =>
+      decided(evidence(clean, order), { fixed: { errors, reason: null } }).inForce;
+    expect(inForce(months(96), "newey-west").errors.kind).toBe("newey-west");
+    expect(inForce(shops, "grouped").errors.kind).toBe("grouped");
+    expect(inForce(shops, "classical")).toEqual({
+      errors: { kind: "classical" },
+      reference: { law: "t", degreesOfFreedom: 92 },
+    });
+    expect(decide(evidence(clean, months(96)), { ...wish, fixed: { errors: "grouped", reason: null } })).toEqual({
+      ok: false,
+      problem: { code: "errors-need-order", errors: "grouped", rows: "time" },
+    });
+    expect(decided(evidence(clean, cases)).override).toBeNull();
+  });
+
+  it("may be HC2 with degrees of freedom of its own, which is a t in every policy", () => {
+    const asked = { policy: "textbook", whiteVersion: "HC2 bell-mccaffrey" } as const;
+    expect(decided(evidence(uneven, cases), asked).called).toEqual({
+      errors: { kind: "white", version: "HC2", degrees: "bell-mccaffrey" },
+      reference: { law: "t", degreesOfFreedom: 92 },
+    });
+  });
+
   it("is refused where rows do not allow it", () => {
     const refused = decide(evidence(clean, cases), { ...wish, fixed: { errors: "newey-west", reason: null } });
     expect(refused).toEqual({ ok: false, problem: { code: "errors-need-order", errors: "newey-west", rows: "cases" } });
@@ -161,6 +218,7 @@ describe("a kind fixed by hand", () => {
 describe("the order of autocorrelation looked for", () => {
   it.each([
     [months(96), 96, 12],
+    [months(80), 80, 12],
     [months(79), 79, 2],
     [months(71), 71, 2],
     [months(24, 4), 24, 4],
