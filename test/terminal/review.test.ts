@@ -7,6 +7,7 @@ import { openXlsx } from "../../src/desk/files/openXlsx.ts";
 import { saveXlsx } from "../../src/desk/files/saveXlsx.ts";
 import { inlineAnalyst } from "../../src/worker/inlineAnalyst.ts";
 import { answerFixture } from "../support/answerFixture.ts";
+import { digitsOf } from "../support/digits.ts";
 import { bookReviewFixture, claimReviewFixture, smaller, soundReviewFixture } from "../support/reviewFixture.ts";
 import { type Shelf, shelf, terminalWith } from "../support/terminal.ts";
 
@@ -164,5 +165,48 @@ describe("faults of the input", () => {
     const ran = await terminalWith(["reviw", "book.xlsx"], book, inlineAnalyst);
     expect(ran.status).toBe(2);
     expect(ran.err).toContain('Did you mean "review"?');
+  });
+});
+
+describe("the demo's handed-over regression", () => {
+  it("is found, explained by the row left off, and judged by the standard errors that the evidence calls for", async () => {
+    const ran = await terminalWith(["review", "book.xlsx", "--sheet", "Handover", "--json"], book, inlineAnalyst);
+    expect(ran.status).toBe(3);
+    const { regressions } = JSON.parse(ran.out) as { regressions: Record<string, unknown>[] };
+    expect(regressions).toHaveLength(1);
+    const [handed] = regressions as [
+      {
+        explanation: { cells: string[]; numbers: { agrees: boolean }[] };
+        errors: { kinds: string[]; allowed: boolean };
+        consequences: { driver: string; changes: boolean }[];
+        numbers: { number: string; recomputed: number }[];
+      },
+    ];
+    expect(handed.explanation.cells).toEqual(["Months!B100:E100"]);
+    expect(handed.explanation.numbers.map(({ agrees }) => agrees)).toEqual(handed.numbers.map(() => true));
+    expect(handed.errors).toMatchObject({ kinds: ["classical"], allowed: false });
+    const changed = handed.consequences.filter(({ changes }) => changes).map(({ driver }) => driver);
+    expect(changed).toEqual(["Price index"]);
+    // The same numbers by the other door: what `footing answer` makes of all rows.
+    const line = ["--outcome", "Repairs", "--drivers", "Price index,Advertising,Rainy days", "--order", "Month"];
+    const answered = await terminalWith(["answer", "book.xlsx", ...line, "--json"], book, inlineAnalyst);
+    const { coefficients } = JSON.parse(answered.out) as { coefficients: number[] };
+    const recomputed = handed.numbers.filter(({ number }) => /^(constant|coefficient)/.test(number));
+    recomputed.forEach((number, index) =>
+      expect(digitsOf(number.recomputed, coefficients[index]!)).toBeGreaterThan(11),
+    );
+    expect(recomputed).toHaveLength(4);
+  });
+
+  it("is the same where it is pointed at", async () => {
+    const pointed = ["--reported", "Handover!A4:D8", "--outcome", "Repairs"];
+    const drivers = ["--drivers", "Price index,Advertising,Rainy days"];
+    const ran = await terminalWith(["review", "book.xlsx", ...pointed, ...drivers], book, inlineAnalyst);
+    expect([ran.status, ran.err]).toEqual([3, ""]);
+    expect(ran.out.replaceAll(/\s+/g, " ")).toContain("The last row (Months!B100:E100) was left off.");
+    const wrong = ["--reported", "Handover!A4:D8", "--outcome", "Repiars", ...drivers];
+    const faulty = await terminalWith(["review", "book.xlsx", ...wrong], book, inlineAnalyst);
+    expect(faulty.status).toBe(2);
+    expect(faulty.err).toContain("Repiars");
   });
 });

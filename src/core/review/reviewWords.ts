@@ -47,6 +47,8 @@ export const changesConclusion = ({ claims, craft }: BookReview): boolean =>
 
 /** How many regressions were reviewed, and how they came out, in a sentence. */
 export function summaryOf(claims: readonly Pick<ClaimReview, "findings">[]): string {
+  const [only] = claims;
+  if (only !== undefined && claims.length === 1) return singleSummary(gravestRank(only.findings));
   const having = (rank: Rank): number => claims.filter(({ findings }) => gravestRank(findings) === rank).length;
   const [conclusions, numbers] = [having("changes the conclusion"), having("changes a number")];
   const rest = claims.length - conclusions - numbers;
@@ -58,6 +60,11 @@ export function summaryOf(claims: readonly Pick<ClaimReview, "findings">[]): str
   const said = parts.filter(([count]) => count > 0).map(([count, words]) => `${count} ${words}`);
   return `${claims.length} ${claims.length === 1 ? "regression" : "regressions"} reviewed: ${listInWords(said)}.`;
 }
+
+const singleSummary = (rank: Rank | null): string =>
+  rank === "changes the conclusion" || rank === "changes a number"
+    ? `A finding ${rank}.`
+    : "Nothing was found that changes the conclusion or a number.";
 
 /** What explains the difference, then what would explain it as well. */
 export const explanationsOf = ({ explanation, alternatives }: ClaimReview): readonly string[] => [

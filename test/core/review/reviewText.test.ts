@@ -72,7 +72,9 @@ describe("words about a review", () => {
   it("count regressions by their gravest finding", () => {
     const numbers = { findings: [slight, smaller] };
     expect(gravestRank(numbers.findings)).toBe("changes a number");
-    expect(summaryOf([soundReviewFixture])).toBe("1 regression reviewed: 1 has nothing that would change it.");
+    expect(summaryOf([soundReviewFixture])).toBe("Nothing was found that changes the conclusion or a number.");
+    expect(summaryOf([numbers])).toBe("A finding changes a number.");
+    expect(summaryOf([claimReviewFixture])).toBe("A finding changes the conclusion.");
     expect(summaryOf([numbers, numbers, { findings: [slight] }])).toBe(
       "3 regressions reviewed: 2 have some that change numbers and 1 has nothing that would change it.",
     );
