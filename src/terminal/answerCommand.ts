@@ -1,4 +1,4 @@
-import type { Analyst, Reviewer } from "../app/analyst.ts";
+import type { Analyst, Inquirer, Reviewer } from "../app/analyst.ts";
 import { fingerprintOf } from "../app/fingerprint.ts";
 import type { Errand, Host } from "../app/host.ts";
 import { sheetFactsOf } from "../app/sheetFacts.ts";
@@ -10,6 +10,7 @@ import type { AnswerCommand } from "./arguments.ts";
 import { answerJson } from "./answerJson.ts";
 import { type BookFile, openBookFile } from "./bookFile.ts";
 import type { FileAccess } from "./fileAccess.ts";
+import { type Predicted, predictionLines, predictionsOf } from "./predictions.ts";
 import { type Asked, questionOf } from "./question.ts";
 import { report } from "./report.ts";
 import { saveCopy } from "./saveCopy.ts";
@@ -26,7 +27,7 @@ export interface OpenBook {
 export interface Surroundings {
   readonly files: FileAccess;
   readonly openBook: (book: BookData) => Promise<OpenBook>;
-  readonly analyst: Analyst & Reviewer;
+  readonly analyst: Analyst & Inquirer & Reviewer;
   readonly today: () => string;
   readonly version: string;
 }
@@ -43,12 +44,28 @@ export async function answerCommand(command: AnswerCommand, world: Surroundings)
   const answered = await answerIn(opened, command, world);
   if (!answered.ok) return answered;
   const { asked, answer } = answered.value;
+  const predicted = await predictionsFor(answered.value, command, { ...world, host: opened.host });
+  if (!predicted.ok) return predicted;
   const saved =
     command.save === null ? success(null) : await save({ opened, asked, answer, file: file.value, command }, world);
   opened.close();
   if (!saved.ok) return saved;
   const savedAs = saved.value === null ? [] : [`Sheet "${saved.value}" is in ${command.save ?? ""}.`];
-  return success(command.json ? JSON.stringify(answerJson(answer), null, 2) : report(answer, savedAs));
+  const lines = predicted.value === null ? [] : predictionLines(predicted.value);
+  return success(
+    command.json
+      ? JSON.stringify(answerJson(answer, predicted.value), null, 2)
+      : report(answer, [...lines, ...savedAs]),
+  );
+}
+
+async function predictionsFor(
+  { asked, answer }: Answered,
+  { predict, sheet }: AnswerCommand,
+  { host, analyst }: { readonly host: Host; readonly analyst: Inquirer },
+): Promise<Result<Predicted | null>> {
+  if (predict === null) return success(null);
+  return predictionsOf({ place: predict, sheet, asked, answer }, { host, analyst, errand: quiet });
 }
 
 interface Answered {

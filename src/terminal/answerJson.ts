@@ -1,11 +1,12 @@
 import type { Answer } from "../core/answer/answer.ts";
+import type { Predicted } from "./predictions.ts";
 import type { TestOutcome } from "../core/diagnostics/outcome.ts";
 
 /** Tests that stand as one entry an order. */
 const byOrder: readonly string[] = ["breusch-godfrey", "ljung-box", "arch"];
 
 /** An answer as the object that `--json` prints: full double precision, stable keys. */
-export function answerJson(answer: Answer): object {
+export function answerJson(answer: Answer, predicted: Predicted | null = null): object {
   const { observations, outcome, terms, coefficients, fit, inference, joint, drivers } = answer;
   const { guards, firmness, estimates } = answer;
   const { verdict, rows, leftOut, leftOutCount, notes } = answer;
@@ -16,6 +17,7 @@ export function answerJson(answer: Answer): object {
     tests: testsJson(answer.tests),
     choice: choiceJson(answer),
     ...{ inference, joint, estimates, guards, firmness, drivers, verdict, rows, leftOut, leftOutCount, notes },
+    ...(predicted === null ? {} : { predictions: predicted }),
   };
 }
 

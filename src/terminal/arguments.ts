@@ -11,6 +11,8 @@ export interface AnswerCommand {
   readonly order: string | null;
   readonly groups: string | null;
   readonly settings: readonly (readonly [string, string])[];
+  /** A sheet or range of new rows to be predicted. */
+  readonly predict: string | null;
   readonly save: string | null;
   readonly live: boolean;
   readonly json: boolean;
@@ -31,6 +33,7 @@ const flagTable: FlagTable = {
   order: { type: "string" },
   groups: { type: "string" },
   "no-constant": { type: "boolean" },
+  predict: { type: "string" },
   save: { type: "string" },
   live: { type: "boolean" },
   json: { type: "boolean" },
@@ -62,6 +65,7 @@ export function readAnswerCommand(words: readonly string[]): Result<AnswerComman
     order: text("order"),
     groups: text("groups"),
     settings: settingsFrom(read.value),
+    predict: text("predict"),
     save: text("save"),
     live: has("live"),
     json: has("json"),

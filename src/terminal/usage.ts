@@ -16,6 +16,7 @@ calls for, and prints the verdict. H is a heading, or a range such as B3:B99.
   --order H            the column that puts rows in time
   --groups H           the column that says which group a row belongs to
   --no-constant        fit without a constant
+  --predict RANGE      new rows to predict, headings included, such as Plans!A1:C5, or the sheet that has them
   --save OUT.xlsx      write the result sheet into a copy of the workbook
   --live               with --save: figures as worksheet functions instead of values
   --json               print everything in full precision as JSON
