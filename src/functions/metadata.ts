@@ -19,8 +19,11 @@ const functionMetadata = ({ id, description, parameters, gives }: FunctionSpec) 
   helpUrl: `${address}/help.html#${id.toLowerCase()}`,
   parameters: parameters.map(parameterMetadata),
   result: { dimensionality: "matrix" as const },
-  options: { cancelable: true },
+  /** By their addresses zeros are told from blank cells on versions of Excel that hand both over alike. */
+  options: { cancelable: true, ...(parameters.some(isOverData) && { requiresParameterAddresses: true }) },
 });
+
+const isOverData = ({ name }: ParameterSpec): boolean => name === "outcome";
 
 const parameterMetadata = ({ name, description, shape, optional }: ParameterSpec) => ({
   name,

@@ -1,9 +1,11 @@
 import type { Analyst, Inquirer } from "../app/analyst.ts";
 import { withinLimits } from "../app/timeLimit.ts";
+import { success } from "../core/problem/result.ts";
 import { answerer } from "./answerer.ts";
 import { type FunctionsRuntime, cellError, notAvailable, ownFault } from "./cellErrors.ts";
 import { type FunctionId, type FunctionSpec, functionTable } from "./functionTable.ts";
 import { type Leaving, leave } from "./leave.ts";
+import type { BlankGuard } from "./blankGuard.ts";
 import type { CallValues, Reply } from "./replies.ts";
 
 /** How one call is computed: what to show for the function, from the values given, until the signal is raised. */
@@ -13,31 +15,42 @@ export type Answering = (id: FunctionId, values: CallValues, signal: AbortSignal
 const secondsPerCall = 120;
 
 /** Gives Excel an implementation for every function of the table. */
-export function registerFunctions(runtime: FunctionsRuntime, analyst: Analyst & Inquirer): void {
+export function registerFunctions(
+  runtime: FunctionsRuntime,
+  analyst: Analyst & Inquirer,
+  guard: BlankGuard = asTheyArrive,
+): void {
   const answering = answerer(analyst);
-  for (const spec of functionTable) runtime.associate(spec.id, implementation(spec, { runtime, answering }));
+  for (const spec of functionTable) runtime.associate(spec.id, implementation(spec, { runtime, answering, guard }));
 }
+
+/** Without a sheet at hand. */
+const asTheyArrive: BlankGuard = ({ values }) => Promise.resolve(success(values));
 
 interface Making {
   readonly runtime: FunctionsRuntime;
   readonly answering: Answering;
+  readonly guard: BlankGuard;
 }
 
 /** Excel hands over one value a parameter and, last, the invocation. */
 function implementation(
   { id, parameters }: FunctionSpec & { readonly id: FunctionId },
-  { runtime, answering }: Making,
+  { runtime, answering, guard }: Making,
 ) {
   return async (...handed: unknown[]): Promise<Leaving> => {
     const invocation = handed.at(-1) as CustomFunctions.CancelableInvocation;
     const given = handed.slice(0, -1);
-    const values = Object.fromEntries(parameters.map(({ name }, index) => [name, given[index] ?? null]));
+    const byName = <T>(list: readonly T[]) =>
+      Object.fromEntries(parameters.map(({ name }, i) => [name, list[i] ?? null]));
+    const call = { values: byName(given), addresses: byName(invocation.parameterAddresses ?? []) };
     if (isPreview(invocation)) return leave(runtime, [["Shown once the formula is entered"]]);
     const caller = new AbortController();
     invocation.onCanceled = () => caller.abort();
-    const reply = await replyTo({ signal: caller.signal, seconds: secondsPerCall }, (signal) =>
-      answering(id, values, signal),
-    )
+    const reply = await replyTo({ signal: caller.signal, seconds: secondsPerCall }, async (signal) => {
+      const values = await guard(call, signal);
+      return values.ok ? answering(id, values.value, signal) : values;
+    })
       .catch((fault: unknown) => refuse(ownFault(runtime, fault)))
       .finally(() => {
         invocation.onCanceled = nothingToCancel;
