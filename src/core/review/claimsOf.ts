@@ -5,6 +5,7 @@ import type { Book } from "./book.ts";
 import type { CellPlace } from "./cellsOfBook.ts";
 import type { Claim } from "./claim.ts";
 import type { BookReview } from "./claimReview.ts";
+import { type Ground, craftOf } from "./craft/craftOf.ts";
 import type { Finding } from "./finding.ts";
 import { type FormulaCell, readFormulas } from "./found/formulaCells.ts";
 import { type Gathered, claimOf, gathered } from "./found/gatherClaims.ts";
@@ -58,9 +59,11 @@ export function claimsOf(book: Book, asked: Asked, report: Report): Result<BookC
   if (place !== null && here.groups.length + here.blocks.length === 0) {
     return failure({ code: "no-report", where: addressOf(place) });
   }
-  const { claims, unread } = claimsFrom(here, book, given.value);
+  report("Looking at how the sheets are made", 0.9);
+  const { claims, unread, blocks } = claimsFrom(here, book, given.value);
   const missed = place === null ? [...found.unread, ...unread] : unread;
-  return success({ claims, unread: missed, craft: [] });
+  const craft = craftOf({ book, claims, groups: here.groups, blocks, unread: missed });
+  return success({ claims, unread: missed, craft });
 }
 
 const nothingGiven: GivenData = { outcome: null, drivers: null };
@@ -76,7 +79,7 @@ function regressionsIn(book: Book, onSheet: string | null, report: Report): Foun
   const blocks: ReportBlock[] = [];
   const unread: BookClaims["unread"][number][] = [];
   for (const [index, sheet] of book.sheets.entries()) {
-    report("Looking for regressions", index / book.sheets.length);
+    report("Looking for regressions", (0.9 * index) / book.sheets.length);
     if (onSheet !== null && onSheet.toLowerCase() !== sheet.sheet.toLowerCase()) continue;
     const read = readFormulas(sheet, book);
     cells.push(...read.cells);
@@ -106,7 +109,7 @@ const overlaps = (one: Rectangle, other: Rectangle): boolean =>
   other.column < one.column + one.columns;
 
 /** Blocks over formulas go with those; the others speak of data that are given, or found by their names. */
-function claimsFrom({ groups, blocks }: Found, book: Book, given: GivenData): Omit<BookClaims, "craft"> {
+function claimsFrom({ groups, blocks }: Found, book: Book, given: GivenData): Omit<Ground, "book" | "groups"> {
   const unread: BookClaims["unread"][number][] = [];
   const behind = new Map(blocks.map((block) => [block, groupBehind(block, groups)]));
   const claims = groups.flatMap((group): Claim[] => {
@@ -116,11 +119,17 @@ function claimsFrom({ groups, blocks }: Found, book: Book, given: GivenData): Om
     return [own.reduce((sum, block) => withBlock(sum, group, block), claim)];
   });
   const alone = blocks.filter((block) => behind.get(block) === null);
-  const tables = alone.length === 0 ? [] : dataTables(book);
+  const tables =
+    alone.length === 0
+      ? []
+      : dataTables(
+          book,
+          blocks.map(({ area }) => area),
+        );
   for (const block of alone) {
     const claim = typedClaim(block, tables, given);
     if (claim.ok) claims.push(claim.value);
     else unread.push({ cell: addressOf(block.area), why: claim.why });
   }
-  return { claims, unread };
+  return { claims, unread, blocks: blocks.map((block) => ({ block, group: behind.get(block) ?? null })) };
 }

@@ -1,3 +1,8 @@
+const unequalRanges = "The ranges are not equally long";
+
+/** Whether a formula was left unread because its ranges do not fit one another. */
+export const saysUnequal = (why: string): boolean => why.startsWith(unequalRanges);
+
 /** Why a formula that looks like a regression could not be read: every sentence about it. */
 export const whyUnread = {
   notAFormula: "The formula could not be taken apart.",
@@ -21,7 +26,7 @@ export const whyUnread = {
   wideOutcome: (cells: string) => `The outcome is a block of several columns (${cells}).`,
   noDrivers: "No drivers are given, so that the row numbers 1, 2, 3 and so on take their place.",
   unequal: (first: Ranged, second: Ranged) =>
-    `The ranges are not equally long: ${first.count} cells in ${first.cells}, ${second.count} in ${second.cells}.`,
+    `${unequalRanges}: ${first.count} cells in ${first.cells}, ${second.count} in ${second.cells}.`,
   oneDriver: (name: string, cells: string) => `${name} takes one driver, but ${cells} holds several.`,
   computedConstant: "Whether there is a constant is worked out at calculation.",
   fewArguments: (name: string) => `${name} has too few arguments.`,

@@ -1,3 +1,4 @@
+import type { SheetArea } from "../../table/address.ts";
 import { readBlock, rowsOf } from "../../table/locate.ts";
 import type { Source } from "../../table/source.ts";
 import type { Book, BookSheet, BookTable } from "../book.ts";
@@ -18,12 +19,21 @@ export interface DataColumn {
   readonly source: Source["columns"][number];
 }
 
-/** The tables of a book and, where a sheet has none, what stands under its headings. */
-export const dataTables = (book: Book): readonly DataTable[] =>
+/** The tables of a book, and what stands under the headings of each sheet; no report is its own data. */
+export const dataTables = (book: Book, reports: readonly SheetArea[]): readonly DataTable[] =>
   book.sheets.flatMap((sheet) => {
     const tables = sheet.tables.filter(({ headings }) => headings).flatMap((table) => tableOf(sheet, table));
-    return [...tables, ...underHeadings(sheet)];
+    const here = reports.filter((area) => area.sheet === sheet.sheet);
+    return [...tables, ...underHeadings(sheet)].map((table) => without(here, table));
   });
+
+function without(reports: readonly SheetArea[], table: DataTable): DataTable {
+  const reaches = ({ row, rows }: SheetArea): boolean =>
+    row < table.firstRow + table.rowCount && table.firstRow <= row + rows;
+  const isReport = ({ column }: DataColumn): boolean =>
+    reports.some((area) => reaches(area) && column >= area.column && column < area.column + area.columns);
+  return { ...table, columns: table.columns.filter((column) => !isReport(column)) };
+}
 
 function underHeadings(sheet: BookSheet): DataTable[] {
   const located = readBlock(sheet);

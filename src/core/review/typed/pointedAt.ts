@@ -42,7 +42,7 @@ interface Said {
 /** Headings and addresses as lines of data. Problem "unknown-heading", beside those of an address. */
 export function givenData(book: Book, { outcome, drivers }: Said): Result<GivenData> {
   const words = [...(outcome === null ? [] : [outcome]), ...(drivers ?? [])];
-  const tables = dataTables(book);
+  const tables = dataTables(book, []);
   const headings = words.filter((word) => isHeading(tables, word) || !isPlace(book, word));
   const matched = headings.length === 0 ? null : bestTable(headings, tables, () => false);
   const found: DataLine[][] = [];
