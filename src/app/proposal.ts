@@ -24,6 +24,7 @@ const columnSetup = (column: ColumnDescription, proposed: ProposedRoles): Column
   as: asOf(column),
   base: null,
   transform: { kind: "none" },
+  also: { kind: "none" },
   unit: "",
   against: 0,
   textNumbers: null,

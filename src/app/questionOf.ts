@@ -18,7 +18,7 @@ export function questionOf(source: Source, setup: Setup): Result<Question> {
   if (rows === null) return failure({ code: "no-group-column" });
   const model: Model = {
     outcome: { column: outcome.column, transform: outcome.transform },
-    drivers: drivers.map(driverChoice),
+    drivers: [...drivers.flatMap(driverChoices), ...(outcome.also.kind === "lag" ? alsoOf(outcome) : [])],
     calendar: setup.calendar,
     rows,
     constant: setup.constant,
@@ -42,12 +42,19 @@ function rowsOf(setup: Setup): RowsAre | null {
       return { kind: "time", order };
     case "groups": {
       const by = columnWithRole(setup, "group");
-      return by === null ? null : { kind: "groups", by, second: null, order };
+      return by === null ? null : { kind: "groups", by, second: columnWithRole(setup, "second group"), order };
     }
   }
 }
 
-const driverChoice = ({ column, as, base, transform }: ColumnSetup): DriverChoice => ({ column, as, base, transform });
+const driverChoices = (setup: ColumnSetup): DriverChoice[] => {
+  const { column, as, base, transform } = setup;
+  return [{ column, as, base, transform }, ...(as === "number" ? alsoOf(setup) : [])];
+};
+
+/** What else enters of a column; nothing where that is not asked for. */
+const alsoOf = ({ column, also }: ColumnSetup): DriverChoice[] =>
+  also.kind === "none" ? [] : [{ column, as: "number", base: null, transform: also }];
 
 const textNumbersOf = (columns: readonly ColumnSetup[]): Model["textNumbers"] =>
   columns.flatMap(({ column, textNumbers }) => (textNumbers === null ? [] : [{ column, decimal: textNumbers }]));
@@ -55,5 +62,8 @@ const textNumbersOf = (columns: readonly ColumnSetup[]): Model["textNumbers"] =>
 const unitsOf = ({ columns }: Setup): Record<string, string> =>
   Object.fromEntries(columns.flatMap(({ column, unit }) => (unit.trim() === "" ? [] : [[column, unit.trim()]])));
 
+/** A value is for one coefficient: where a column enters in two forms it would be for neither. */
 const againstOf = (drivers: readonly ColumnSetup[]): Record<string, number> =>
-  Object.fromEntries(drivers.flatMap(({ column, against }) => (against === 0 ? [] : [[column, against]])));
+  Object.fromEntries(
+    drivers.flatMap(({ column, against, also }) => (against === 0 || also.kind !== "none" ? [] : [[column, against]])),
+  );

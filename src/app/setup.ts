@@ -2,7 +2,7 @@ import type { Options } from "../core/answer/options.ts";
 import type { CalendarDriver, DriverChoice, RowsAre, Transform } from "../core/design/model.ts";
 import type { DecimalMark } from "../core/table/textNumbers.ts";
 
-export type Role = "outcome" | "driver" | "time" | "group" | "unused";
+export type Role = "outcome" | "driver" | "time" | "group" | "second group" | "unused";
 
 /** What the user, or a guess, makes of one column. */
 export interface ColumnSetup {
@@ -14,6 +14,8 @@ export interface ColumnSetup {
   /** The category the others are compared with; null takes the most frequent. */
   readonly base: string | null;
   readonly transform: Transform;
+  /** What else enters of a column of numbers, as a driver of its own: its square for a curve, its earlier values. */
+  readonly also: Transform;
   /** Words for one unit, "repairs a month"; empty for none. */
   readonly unit: string;
   /** The value the driver is tested against. */
@@ -37,7 +39,7 @@ export interface Setup {
 
 /** The part of a column's set-up that is changed without touching any other column. */
 export type ColumnDetails = Partial<
-  Pick<ColumnSetup, "as" | "base" | "transform" | "unit" | "against" | "textNumbers">
+  Pick<ColumnSetup, "as" | "base" | "transform" | "also" | "unit" | "against" | "textNumbers">
 >;
 
 export const changeColumn = (setup: Setup, column: string, details: ColumnDetails): Setup => ({
@@ -46,7 +48,7 @@ export const changeColumn = (setup: Setup, column: string, details: ColumnDetail
 });
 
 /** Roles that one column alone can have. */
-const single: readonly Role[] = ["outcome", "time", "group"];
+const single: readonly Role[] = ["outcome", "time", "group", "second group"];
 
 /**
  * Gives a column a role. Where one column alone can have it, the column that had it takes the role that becomes free,
@@ -67,7 +69,7 @@ export function assignRole(setup: Setup, column: string, role: Role): Setup {
 const freed = (left: Role, taken: Role): Role => (taken === "outcome" && left === "driver" ? "driver" : "unused");
 
 function rowsToldBy(role: Role, { rows, rowsGuessed }: Setup): Pick<Setup, "rows" | "rowsGuessed"> {
-  if (role === "group") return { rows: "groups", rowsGuessed: false };
+  if (role === "group" || role === "second group") return { rows: "groups", rowsGuessed: false };
   if (role === "time" && rows === "cases") return { rows: "time", rowsGuessed: false };
   return { rows, rowsGuessed };
 }

@@ -21,7 +21,10 @@ export function sheetFactsOf({ source, model, options }: Question, made: Made): 
   const columnOf = (name: string): Column | undefined => source.columns.find((column) => column.name === name);
   const { rows } = model;
   const key = rows.kind === "time" ? rows.order : rows.kind === "groups" ? rows.by : null;
-  const drivers = model.drivers.map(({ column }) => column);
+  const drivers = plainDrivers(model);
+  // Functions find the second groups among the columns of the drivers.
+  const second = rows.kind === "groups" && rows.second !== null ? [rows.second] : [];
+  const beside = [...drivers, ...second];
   const rangesBy = (textOf: (area: SheetArea) => string): SheetFacts["ranges"] => {
     const areaOf = (names: readonly string[]): string => {
       const area = spanOf(
@@ -32,7 +35,7 @@ export function sheetFactsOf({ source, model, options }: Question, made: Made): 
     };
     return {
       outcome: areaOf([model.outcome.column]),
-      drivers: areaOf(drivers),
+      drivers: areaOf(beside),
       key: key === null ? null : areaOf([key]),
     };
   };
@@ -43,7 +46,11 @@ export function sheetFactsOf({ source, model, options }: Question, made: Made): 
     fingerprint: made.fingerprint,
     ranges: rangesBy(addressText),
     table: table === null ? null : { name: table.name, columns: rangesBy((area) => textInTable(table, area)) },
-    settings: [...settingsSaid(model, options), ...columnsSetting(drivers.map(columnOf)), ...hiddenSetting(source)],
+    settings: [
+      ...settingsSaid(model, options),
+      ...columnsSetting(drivers.map(columnOf), beside.map(columnOf)),
+      ...hiddenSetting(source),
+    ],
   };
 }
 
@@ -82,10 +89,21 @@ function spanOf(columns: readonly Column[], { source, made }: Context): SheetAre
 export const hiddenSetting = ({ hidden }: Source): SettingPair[] =>
   hidden?.leftOut === true ? [["hidden rows", "left out"]] : [];
 
+type Columns = readonly (Column | undefined)[];
+
+const placesOf = (columns: Columns): number[] =>
+  columns.flatMap((column) => (column?.place.kind === "sheet" ? [column.place.column] : []));
+
+/** Each column that drivers are made of, once; earlier values of the outcome are made of the outcome's own. */
+const plainDrivers = ({ outcome, drivers }: Question["model"]): string[] => [
+  ...new Set(drivers.map(({ column }) => column).filter((column) => column !== outcome.column)),
+];
+
 /** Where the drivers' rectangle holds other columns too, or another order, the setting that picks them by number. */
-function columnsSetting(drivers: readonly (Column | undefined)[]): SettingPair[] {
-  const places = drivers.flatMap((driver) => (driver?.place.kind === "sheet" ? [driver.place.column] : []));
-  const first = Math.min(...places);
-  const side = places.every((column, index) => column === first + index);
+function columnsSetting(drivers: Columns, rectangle: Columns): SettingPair[] {
+  const places = placesOf(drivers);
+  const all = placesOf(rectangle);
+  const first = Math.min(...all);
+  const side = all.length === places.length && places.every((column, index) => column === first + index);
   return side ? [] : [["columns", places.map((column) => column - first + 1).join(", ")]];
 }

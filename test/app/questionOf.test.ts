@@ -9,7 +9,7 @@ import { repairMonths } from "../support/repairs.ts";
 
 const rows = repairMonths(24).map((cells, row) => [...cells, row === 0 ? "Shop" : ["North", "South"][row % 2]!]);
 const data = must(
-  takeInHand({
+  await takeInHand({
     sheet: "Months",
     firstRow: 0,
     firstColumn: 0,
@@ -51,6 +51,35 @@ describe("the question that a set-up asks", () => {
     expect(question.options.units).toEqual({ Repairs: "repairs a month" });
     expect(question.options.against).toEqual({ "Price index": -2 });
     expect(question.model.textNumbers).toEqual([{ column: "Price index", decimal: "," }]);
+  });
+
+  it("lets a driver enter in two forms, and the outcome as its earlier values", () => {
+    const square = changeColumn(setup, "Price index", { also: { kind: "square" }, against: 4 });
+    const both = changeColumn(square, "Repairs", { also: { kind: "lag", periods: 1 } });
+    const { model, options } = must(ask(both));
+    expect(model.drivers.map(({ column, transform }) => [column, transform.kind])).toEqual([
+      ["Price index", "none"],
+      ["Price index", "square"],
+      ["Advertising", "none"],
+      ["Rainy days", "none"],
+      ["Repairs", "lag"],
+    ]);
+    expect(options.against).toEqual({});
+  });
+
+  it("takes of the outcome its earlier values alone, whatever was chosen while it was a driver", () => {
+    const left = changeColumn(setup, "Repairs", { also: { kind: "square" } });
+    expect(must(ask(left)).model.drivers.map(({ column }) => column)).not.toContain("Repairs");
+  });
+
+  it("has groups that cross the first ones", () => {
+    const grouped = assignRole(assignRole(setup, "Shop", "group"), "Rainy days", "second group");
+    expect(must(ask(grouped)).model.rows).toEqual({
+      kind: "groups",
+      by: "Shop",
+      second: "Rainy days",
+      order: "Month",
+    });
   });
 
   it("tests nothing against a value given before a column ceased to be a driver", () => {

@@ -16,6 +16,7 @@ const column = (name: string, role: Role): ColumnSetup => ({
   as: "number",
   base: null,
   transform: { kind: "none" },
+  also: { kind: "none" },
   unit: "",
   against: 0,
   textNumbers: null,

@@ -36,6 +36,7 @@ describe("cells that cannot be used", () => {
     as: "number",
     base: null,
     transform: { kind: "none" },
+    also: { kind: "none" },
     unit: "",
     against: 0,
     textNumbers: null,

@@ -22,11 +22,12 @@ const lagRule: Reader<LagRule> = eitherOf<LagRule>(
 
 const column: Reader<ColumnSetup> = objectOf<ColumnSetup>({
   column: text,
-  role: oneOf("outcome", "driver", "time", "group", "unused"),
+  role: oneOf("outcome", "driver", "time", "group", "second group", "unused"),
   guessed: flag,
   as: oneOf("number", "category", "date"),
   base: orNull(text),
   transform,
+  also: since(transform, { kind: "none" }),
   unit: text,
   against: number,
   textNumbers: orNull(oneOf(".", ",")),

@@ -28,7 +28,8 @@ export function chow(fit: Fit, firstRows: number): TestOutcome {
   }
   const statistic = (before.explained + after.explained) / df[0] / (residual / df[1]);
   const figure = { statistic, law: "F", df, pValue: fTail(statistic, ...df) } as const;
-  return computed({ test: "chow", form: null, order: null, figure, fForm: null, details: { firstRows } });
+  const form = `first ${firstRows} rows, then the rest`;
+  return computed({ test: "chow", form, order: null, figure, fForm: null, details: { firstRows } });
 }
 
 /** What the terms explain of the whole fit's residuals within a stretch of rows: RSS less the stretch's own. */

@@ -107,10 +107,10 @@ export const testWords: Readonly<Record<TestName, TestWords>> = {
   },
   chow: {
     title: "Chow test",
-    question: "Are the coefficients the same in the first half of the period and in the second?",
+    question: "Are the coefficients the same before the break that is asked about and after it?",
     rejected:
-      "The coefficients differ between the halves of the period: one set of them does not describe the whole of it.",
-    notRejected: "No difference between the halves of the period shows.",
+      "The coefficients differ before and after the break asked about: one set of them does not describe the whole period.",
+    notRejected: "No difference before and after the break asked about shows.",
     source: "Chow 1960",
   },
   "largest-chow": {

@@ -1,8 +1,9 @@
 import { Field, Select } from "@fluentui/react-components";
 import type { ReactNode } from "react";
 import type { Setup } from "../../app/setup.ts";
-import type { LagRule } from "../../core/covariance/choice.ts";
+import type { GroupedVersion, LagRule } from "../../core/covariance/choice.ts";
 import { whiteWishes } from "../../core/decision/wish.ts";
+import { HelpLink } from "../help/HelpLink.tsx";
 import { usePane } from "../paneContext.ts";
 import { NumberField } from "../parts/NumberField.tsx";
 
@@ -28,10 +29,38 @@ export function KindSettings({ setup, change }: KindSettingsProps): ReactNode {
           ))}
         </Select>
       </Field>
+      {setup.rows === "groups" && <Grouped setup={setup} change={change} />}
       {setup.rows === "time" && <Lags setup={setup} change={change} />}
     </>
   );
 }
+
+const groupedVersions: readonly (readonly [GroupedVersion, string])[] = [
+  ["CR0", "CR0: as it comes"],
+  ["CR1", "CR1: corrected for the number of groups"],
+  ["CR2", "CR2: each group corrected by itself"],
+];
+
+const Grouped = ({ setup, change }: KindSettingsProps): ReactNode => (
+  <>
+    <Field label="Version by group" size="small">
+      <Select
+        size="small"
+        value={setup.options.groupedVersion}
+        onChange={(_, { value }) =>
+          change({ groupedVersion: groupedVersions.find(([version]) => version === value)?.[0] ?? "CR1" })
+        }
+      >
+        {groupedVersions.map(([version, words]) => (
+          <option key={version} value={version}>
+            {words}
+          </option>
+        ))}
+      </Select>
+    </Field>
+    <HelpLink about="groups" />
+  </>
+);
 
 type Rule = readonly [name: string, rule: LagRule | null, words: string];
 

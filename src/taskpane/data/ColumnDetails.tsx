@@ -9,7 +9,7 @@ import type { ColumnRowProps } from "./ColumnRow.tsx";
 import { NumberField } from "../parts/NumberField.tsx";
 import { ReadAs } from "./ReadAs.tsx";
 import { TextNumbers } from "./TextNumbers.tsx";
-import { Transforms } from "./Transforms.tsx";
+import { AlsoEnters, Transforms } from "./Transforms.tsx";
 import { unusableCells } from "./columnWords.ts";
 
 const useStyles = makeStyles({
@@ -21,13 +21,14 @@ export function ColumnDetails({ column, setup }: ColumnRowProps): ReactNode {
   const styles = useStyles();
   const isDriver = setup.role === "driver";
   const isNumber = setup.role === "outcome" || (isDriver && setup.as === "number");
-  const isPlain = setup.transform.kind === "none";
+  const isPlain = setup.transform.kind === "none" && setup.also.kind === "none";
   return (
     <div className={styles.details}>
       <Unusable column={column} setup={setup} />
       <TextNumbers column={column} setup={setup} />
       {isDriver && <ReadAs column={column} setup={setup} />}
       {isNumber && <Transforms setup={setup} />}
+      {isNumber && <AlsoEnters setup={setup} />}
       {isNumber && <Unit setup={setup} />}
       {isDriver && isNumber && isPlain && <Against setup={setup} />}
     </div>

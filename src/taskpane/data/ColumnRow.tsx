@@ -109,6 +109,7 @@ const roles: readonly (readonly [Role, string])[] = [
   ["driver", "driver"],
   ["time", "time"],
   ["group", "group"],
+  ["second group", "second group"],
   ["unused", "not used"],
 ];
 

@@ -50,6 +50,12 @@ function meaningOf(setup: Setup): string {
     case "groups":
       return group === null
         ? "Give one column the role group: rows with the same value there belong together."
-        : `Rows with the same ${group} belong together${time === null ? "" : `, in the order of ${time}`}.`;
+        : `Rows with the same ${group} belong together${second(setup)}${time === null ? "" : `, in the order of ${time}`}.`;
   }
+}
+
+/** Groups that cross the first ones. */
+function second(setup: Setup): string {
+  const column = columnWithRole(setup, "second group");
+  return column === null ? "" : `, and so do rows with the same ${column}`;
 }

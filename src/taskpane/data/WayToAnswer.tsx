@@ -3,6 +3,7 @@ import type { ReactNode } from "react";
 import { confidenceInWords } from "../../core/answer/wording.ts";
 import { Disclosure } from "../parts/Disclosure.tsx";
 import { usePane } from "../paneContext.ts";
+import { BreakAsked } from "./BreakAsked.tsx";
 import { NumberField } from "../parts/NumberField.tsx";
 
 const useStyles = makeStyles({
@@ -33,6 +34,7 @@ export function WayToAnswer(): ReactNode {
             checked={constant}
             onChange={(_, { checked }) => dispatch({ kind: "setup changed", change: { constant: checked } })}
           />
+          <BreakAsked />
         </div>
       </Disclosure>
     </div>
