@@ -1,6 +1,7 @@
 import type { Answer } from "../core/answer/answer.ts";
 import type { Predicted } from "./predictions.ts";
-import type { TestOutcome } from "../core/diagnostics/outcome.ts";
+import { criticalValueOf } from "../core/diagnostics/criticalValue.ts";
+import type { Figure, TestOutcome } from "../core/diagnostics/outcome.ts";
 
 /** Tests that stand as one entry an order. */
 const byOrder: readonly string[] = ["breusch-godfrey", "ljung-box", "arch"];
@@ -14,7 +15,7 @@ export function answerJson(answer: Answer, predicted: Predicted | null = null): 
     ...{ observations, outcome, terms, coefficients },
     standardErrors: standardErrorsJson(answer.standardErrors),
     fit,
-    tests: testsJson(answer.tests),
+    tests: testsJson(answer.tests, answer.decision.testLevel),
     choice: choiceJson(answer),
     ...{ inference, joint, estimates, guards, firmness, drivers, verdict, rows, leftOut, leftOutCount, notes },
     ...(predicted === null ? {} : { predictions: predicted }),
@@ -45,23 +46,26 @@ function choiceJson({ decision, lags, inference }: Answer): object {
 }
 
 /** Tests by name; a list where each order has an entry of its own. */
-function testsJson(tests: readonly TestOutcome[]): Record<string, unknown> {
+function testsJson(tests: readonly TestOutcome[], level: number): Record<string, unknown> {
+  const json = (outcome: TestOutcome): object => outcomeJson(outcome, level);
   const names = [...new Set(tests.map(({ test }) => test))];
   return Object.fromEntries(
     names.map((name) => {
       const outcomes = tests.filter(({ test }) => test === name);
       const [first] = outcomes;
       const listed = byOrder.includes(name) && first?.order !== null;
-      return [name, listed ? outcomes.map(outcomeJson) : first && outcomeJson(first)];
+      return [name, listed ? outcomes.map(json) : first && json(first)];
     }),
   );
 }
 
-function outcomeJson(outcome: TestOutcome): object {
+function outcomeJson(outcome: TestOutcome, level: number): object {
   if (outcome.kind === "not-applicable") {
     return { ...(outcome.order === null ? {} : { order: outcome.order }), notApplicable: outcome.because };
   }
-  const { figure, fForm, form, order, details } = outcome;
+  const { form, order, details } = outcome;
+  const figure = withCritical(outcome.figure, level);
+  const fForm = outcome.fForm === null ? null : withCritical(outcome.fForm, level);
   if (outcome.test === "breusch-godfrey") return { order, chiSquare: figure, f: fForm };
   if (outcome.test === "durbin-watson") {
     return { statistic: figure.statistic, pValuePositive: figure.pValue, method: form, ...details };
@@ -73,4 +77,10 @@ function outcomeJson(outcome: TestOutcome): object {
     ...(fForm === null ? {} : { f: fForm }),
     ...details,
   };
+}
+
+/** The point that the statistic must pass to reject at the level of the tests, where its law has one in closed form. */
+function withCritical(figure: Figure, level: number): Figure & { readonly criticalValue?: number } {
+  const criticalValue = criticalValueOf(figure, level);
+  return criticalValue === null ? figure : { ...figure, criticalValue };
 }

@@ -3,7 +3,7 @@ import { defaultOptions } from "../../src/core/answer/options.ts";
 import { buildDesign } from "../../src/core/design/buildDesign.ts";
 import type { Fit } from "../../src/core/fit/fit.ts";
 import { fitLeastSquares } from "../../src/core/fit/fitLeastSquares.ts";
-import { randomFrom } from "../../src/core/numeric/random.ts";
+import { randomFrom } from "../support/random.ts";
 import { cellKind } from "../../src/core/table/cells.ts";
 import type { Column } from "../../src/core/table/source.ts";
 

@@ -1,7 +1,7 @@
 import { parseArgs } from "node:util";
 import type { CDPSession, Page } from "playwright-core";
 import { localAddressOf } from "../../src/core/table/address.ts";
-import { randomFrom } from "../../src/core/numeric/random.ts";
+import { randomFrom } from "../support/random.ts";
 import { startDeskSuite } from "../browser/support/deskPage.ts";
 
 /**

@@ -1,4 +1,4 @@
-import type { Random } from "../../src/core/numeric/random.ts";
+import type { Random } from "../support/random.ts";
 
 /** How the rows of one cell are drawn. The outcome is the errors alone: every slope is truly zero. */
 export interface Cell {

@@ -11,7 +11,7 @@ import { type TestOutcome, computed } from "../../src/core/diagnostics/outcome.t
 import { whiteTest } from "../../src/core/diagnostics/white.ts";
 import type { Fit } from "../../src/core/fit/fit.ts";
 import { inferenceOf } from "../../src/core/inference/inferenceOf.ts";
-import { type Random, randomFrom } from "../../src/core/numeric/random.ts";
+import { type Random, randomFrom } from "../support/random.ts";
 import { designOf, fitOf, throughTime } from "../support/referenceFit.ts";
 import { must } from "../support/sheet.ts";
 import type { Cell } from "./cells.ts";

@@ -1,5 +1,5 @@
 import fc from "fast-check";
-import { randomFrom, type Random } from "../../src/core/numeric/random.ts";
+import { randomFrom, type Random } from "./random.ts";
 
 /** A regression's plain numbers. */
 export interface Numbers {

@@ -33,20 +33,11 @@ export function tTail(t: number, df: number): number {
   return t >= 0 ? tTwoSided(t, df) / 2 : 1 - tTwoSided(t, df) / 2;
 }
 
-/** P(T <= t). */
-export const tCdf = (t: number, df: number): number => tTail(-t, df);
-
 /** P(F > f). */
 export const fTail = (f: number, df1: number, df2: number): number => fSides(f, df1, df2).upper;
 
-/** P(F <= f). */
-export const fCdf = (f: number, df1: number, df2: number): number => fSides(f, df1, df2).lower;
-
 /** P(X > x), X chi-square. */
 export const chiSquareTail = (x: number, df: number): number => incompleteGamma(df / 2, x / 2).upper;
-
-/** P(X <= x), X chi-square. */
-export const chiSquareCdf = (x: number, df: number): number => incompleteGamma(df / 2, x / 2).lower;
 
 /** The z with P(Z <= z) = p, for p in (0, 1). */
 export function normalQuantile(p: number): number {

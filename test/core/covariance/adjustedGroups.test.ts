@@ -2,7 +2,7 @@ import { describe, expect, it } from "vitest";
 import { covarianceOf } from "../../../src/core/covariance/covarianceOf.ts";
 import type { Fit } from "../../../src/core/fit/fit.ts";
 import type { SquareMatrix } from "../../../src/core/numeric/matrix.ts";
-import { randomFrom } from "../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../support/random.ts";
 import { symmetricFunction } from "../../../src/core/numeric/smallMatrix.ts";
 import { expectAllDigits } from "../../support/referenceErrors.ts";
 import { designOf, fitOf, inGroups } from "../../support/referenceFit.ts";

@@ -3,7 +3,7 @@ import { covarianceOf } from "../../../src/core/covariance/covarianceOf.ts";
 import type { Covariance, GroupedVersion } from "../../../src/core/covariance/choice.ts";
 import type { RowOrder } from "../../../src/core/design/design.ts";
 import type { Fit } from "../../../src/core/fit/fit.ts";
-import { randomFrom } from "../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../support/random.ts";
 import { errorsOf, expectAllDigits, orderedFit } from "../../support/referenceErrors.ts";
 import { designOf, fitOf, inGroups } from "../../support/referenceFit.ts";
 

@@ -6,7 +6,7 @@ import { lagWeights } from "../../../src/core/covariance/kernels.ts";
 import { lagsForRows, lagsOf } from "../../../src/core/covariance/lags.ts";
 import type { RowOrder } from "../../../src/core/design/design.ts";
 import type { Fit } from "../../../src/core/fit/fit.ts";
-import { randomFrom } from "../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../support/random.ts";
 import { designOf, fitOf, inGroups, throughTime } from "../../support/referenceFit.ts";
 import { errorsOf, expectAllDigits, orderedFit } from "../../support/referenceErrors.ts";
 

@@ -19,7 +19,7 @@ import { testWords } from "../../../src/core/diagnostics/words.ts";
 import { whiteFitted, whiteTest } from "../../../src/core/diagnostics/white.ts";
 import type { Fit } from "../../../src/core/fit/fit.ts";
 import { fitLeastSquares } from "../../../src/core/fit/fitLeastSquares.ts";
-import { randomFrom } from "../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../support/random.ts";
 import { expectDigits } from "../../support/digits.ts";
 import { designOf, fitOf, referenceFit, throughTime } from "../../support/referenceFit.ts";
 

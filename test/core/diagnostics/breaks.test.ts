@@ -7,7 +7,7 @@ import { crossingProbability, cusumRecursive } from "../../../src/core/diagnosti
 import { largestChow, largestChowPValue } from "../../../src/core/diagnostics/largestChow.ts";
 import type { TestOutcome } from "../../../src/core/diagnostics/outcome.ts";
 import { explain } from "../../../src/core/numeric/explain.ts";
-import { randomFrom } from "../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../support/random.ts";
 import { recursiveResiduals } from "../../../src/core/numeric/recursiveResiduals.ts";
 import { expectDigits } from "../../support/digits.ts";
 import { designOf, fitOf, reference, referenceFit, throughTime } from "../../support/referenceFit.ts";

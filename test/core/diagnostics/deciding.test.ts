@@ -9,7 +9,7 @@ import type { TestOutcome } from "../../../src/core/diagnostics/outcome.ts";
 import { whiteTest } from "../../../src/core/diagnostics/white.ts";
 import { chiSquareTail, fTail } from "../../../src/core/numeric/distributions.ts";
 import { explain } from "../../../src/core/numeric/explain.ts";
-import { randomFrom } from "../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../support/random.ts";
 import { expectDigits } from "../../support/digits.ts";
 import { designOf, fitOf, inGroups, reference, referenceFit, throughTime } from "../../support/referenceFit.ts";
 

@@ -4,7 +4,7 @@ import { durbinWatson } from "../../../src/core/diagnostics/durbinWatson.ts";
 import type { TestOutcome } from "../../../src/core/diagnostics/outcome.ts";
 import { fTail } from "../../../src/core/numeric/distributions.ts";
 import { quadraticFormTail } from "../../../src/core/numeric/quadraticFormTail.ts";
-import { randomFrom } from "../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../support/random.ts";
 import { expectDigits } from "../../support/digits.ts";
 import { designOf, fitOf, inGroups, referenceFit, throughTime } from "../../support/referenceFit.ts";
 

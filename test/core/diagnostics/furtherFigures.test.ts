@@ -15,7 +15,7 @@ import { resetRobust } from "../../../src/core/diagnostics/resetRobust.ts";
 import type { Term } from "../../../src/core/design/design.ts";
 import { fitLeastSquares } from "../../../src/core/fit/fitLeastSquares.ts";
 import { chiSquareTail, fTail, tTwoSided } from "../../../src/core/numeric/distributions.ts";
-import { randomFrom } from "../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../support/random.ts";
 import { expectDigits } from "../../support/digits.ts";
 import { designOf, fitOf, referenceFit, throughTime } from "../../support/referenceFit.ts";
 

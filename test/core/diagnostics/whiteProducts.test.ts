@@ -4,7 +4,7 @@ import { whiteTest } from "../../../src/core/diagnostics/white.ts";
 import { explainByProducts } from "../../../src/core/diagnostics/whiteProducts.ts";
 import type { Fit } from "../../../src/core/fit/fit.ts";
 import { type Explained, explain } from "../../../src/core/numeric/explain.ts";
-import { randomFrom } from "../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../support/random.ts";
 import { expectDigits } from "../../support/digits.ts";
 import { designOf, fitOf } from "../../support/referenceFit.ts";
 

@@ -1,7 +1,7 @@
 import { describe, expect, it } from "vitest";
 import type { Term } from "../../../src/core/design/design.ts";
 import { fitLeastSquares } from "../../../src/core/fit/fitLeastSquares.ts";
-import { randomFrom } from "../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../support/random.ts";
 import type { Problem } from "../../../src/core/problem/problem.ts";
 import { expectDigits } from "../../support/digits.ts";
 import { designOf, fitOf, reference, referenceFit } from "../../support/referenceFit.ts";

@@ -9,7 +9,7 @@ import { inferenceOf } from "../../../src/core/inference/inferenceOf.ts";
 import { predict } from "../../../src/core/inference/predict.ts";
 import { criticalValue } from "../../../src/core/inference/ratioLaw.ts";
 import { tTwoSided } from "../../../src/core/numeric/distributions.ts";
-import { randomFrom } from "../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../support/random.ts";
 import { expectDigits } from "../../support/digits.ts";
 import { errorsOf, expectAllDigits, orderedFit, referenceErrors } from "../../support/referenceErrors.ts";
 import { designOf, fitOf, inGroups } from "../../support/referenceFit.ts";

@@ -1,17 +1,14 @@
 import { readFileSync } from "node:fs";
 import { describe, expect, it } from "vitest";
 import {
-  chiSquareCdf,
   chiSquareQuantile,
   chiSquareTail,
-  fCdf,
   fQuantile,
   fTail,
   normalCdf,
   normalQuantile,
   normalTail,
   normalTwoSided,
-  tCdf,
   tQuantile,
   tTail,
   tTwoSided,
@@ -33,9 +30,9 @@ const tails: Readonly<Record<string, (at: number, df: readonly number[]) => numb
   "normal upper": (z) => normalTail(z),
   "t two-sided": (t, [df]) => tTwoSided(t, df!),
   "chi-square upper": (x, [df]) => chiSquareTail(x, df!),
-  "chi-square lower": (x, [df]) => chiSquareCdf(x, df!),
   "F upper": (f, [df1, df2]) => fTail(f, df1!, df2!),
-  "F lower": (f, [df1, df2]) => fCdf(f, df1!, df2!),
+  // P(F <= f) is the upper tail of 1 / F.
+  "F lower": (f, [df1, df2]) => fTail(1 / f, df2!, df1!),
 };
 
 /** The point with that tail, from the quantile functions, which take the lower side. */
@@ -71,7 +68,10 @@ describe.each(Object.keys(quantiles))("%s quantiles", (law) => {
   });
 
   it("have the tail that was asked for", () => {
-    for (const { df, tail } of own) expectDigits(tails[law]!(quantiles[law]!(tail, df), df), tail, 11);
+    const tailOf = tails[law] ?? ((x: number, [df]: readonly number[]): number => 1 - chiSquareTail(x, df!));
+    // The lower tail of chi-square has no function of its own: where it is not small it is what the upper one leaves.
+    const held = law in tails ? own : own.filter(({ tail }) => tail > 0.1);
+    for (const { df, tail } of held) expectDigits(tailOf(quantiles[law]!(tail, df), df), tail, 11);
   });
 });
 
@@ -105,10 +105,9 @@ describe("sides", () => {
       expect(normalTwoSided(z)).toBeCloseTo(2 * normalTail(Math.abs(z)), 14);
       expect(normalTail(z) + normalCdf(z)).toBeCloseTo(1, 14);
       expect(tTwoSided(z, 7)).toBeCloseTo(2 * tTail(Math.abs(z), 7), 14);
-      expect(tTail(z, 7) + tCdf(z, 7)).toBeCloseTo(1, 14);
+      expect(tTail(z, 7) + tTail(-z, 7)).toBeCloseTo(1, 14);
     }
-    expect(fTail(1.3, 4, 9) + fCdf(1.3, 4, 9)).toBeCloseTo(1, 14);
-    expect(chiSquareTail(1.3, 4) + chiSquareCdf(1.3, 4)).toBeCloseTo(1, 14);
+    expect(fTail(1.3, 4, 9) + fTail(1 / 1.3, 9, 4)).toBeCloseTo(1, 14);
   });
 
   it("F with one degree of freedom is t squared, and t with many is normal", () => {

@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { inverseRootOfRest, rootRoom } from "../../../src/core/numeric/inverseRoot.ts";
-import { randomFrom } from "../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../support/random.ts";
 import { times, timesRows } from "../../../src/core/numeric/smallProducts.ts";
 
 const random = randomFrom(77);

@@ -1,7 +1,7 @@
 import { readFileSync, readdirSync } from "node:fs";
 import { describe, expect, it } from "vitest";
 import { leastSquares, type Solution } from "../../../src/core/numeric/leastSquares.ts";
-import { randomFrom } from "../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../support/random.ts";
 import { triangularFactor } from "../../../src/core/numeric/triangularFactor.ts";
 import { digitsOf } from "../../support/digits.ts";
 

@@ -1,7 +1,7 @@
 import { describe, expect, it } from "vitest";
 import { leastSquares } from "../../../src/core/numeric/leastSquares.ts";
 import { levelRatio } from "../../../src/core/numeric/levelRatio.ts";
-import { randomFrom } from "../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../support/random.ts";
 import { expectDigits } from "../../support/digits.ts";
 
 /** The same regression with its columns written out. */

@@ -6,7 +6,7 @@ import { addGram, addScore, copyRows, visitGroups } from "../../../src/core/nume
 import { keepRows, takeLessEarlier } from "../../../src/core/numeric/lessEarlier.ts";
 import { movingWindowProducts } from "../../../src/core/numeric/movingWindows.ts";
 import { rowsOf } from "../../../src/core/numeric/ordering.ts";
-import { randomFrom } from "../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../support/random.ts";
 import { basisRows, columnsOf, combinedRows, storedRows, weightedRows } from "../../../src/core/numeric/rowSource.ts";
 import { triangularFactor } from "../../../src/core/numeric/triangularFactor.ts";
 

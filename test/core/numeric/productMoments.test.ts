@@ -2,7 +2,7 @@ import { describe, expect, it } from "vitest";
 import { explain } from "../../../src/core/numeric/explain.ts";
 import { explainFromMoments } from "../../../src/core/numeric/explainFromMoments.ts";
 import { productColumns, productMoments } from "../../../src/core/numeric/productMoments.ts";
-import { randomFrom, type Random } from "../../../src/core/numeric/random.ts";
+import { randomFrom, type Random } from "../../support/random.ts";
 import { mean, sumOfSquares } from "../../../src/core/numeric/sums.ts";
 import { triangularFactor } from "../../../src/core/numeric/triangularFactor.ts";
 import { expectDigits } from "../../support/digits.ts";

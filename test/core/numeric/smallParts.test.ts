@@ -9,7 +9,7 @@ import {
   rowsAbove,
   smallestRows,
 } from "../../../src/core/numeric/ordering.ts";
-import { randomFrom } from "../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../support/random.ts";
 import {
   bilinear,
   invert,

@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { randomFrom } from "../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../support/random.ts";
 import { basisRows, columnsOf } from "../../../src/core/numeric/rowSource.ts";
 import { differenceMoments, residualDifferences } from "../../../src/core/numeric/successiveDifferences.ts";
 import { triangularFactor } from "../../../src/core/numeric/triangularFactor.ts";

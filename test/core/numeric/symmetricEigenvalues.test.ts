@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 import type { SquareMatrix } from "../../../src/core/numeric/matrix.ts";
-import { randomFrom } from "../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../support/random.ts";
 import { symmetricEigenvalues } from "../../../src/core/numeric/symmetricEigenvalues.ts";
 import { eigenvaluesOf } from "../../support/smallMatrices.ts";
 

@@ -6,7 +6,7 @@ import type { Fit } from "../../../src/core/fit/fit.ts";
 import type { InferenceTable } from "../../../src/core/inference/inference.ts";
 import { inferenceOf } from "../../../src/core/inference/inferenceOf.ts";
 import type { Reference } from "../../../src/core/inference/reference.ts";
-import { randomFrom } from "../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../support/random.ts";
 import { lagLadder } from "../../../src/core/robustness/choices.ts";
 import { choicesInWords, type ChoiceName } from "../../../src/core/robustness/choicesInWords.ts";
 import { type Firmness, firmness } from "../../../src/core/robustness/firmness.ts";

@@ -8,7 +8,7 @@ import { rowsGuard } from "../../../../src/core/diagnostics/guards/rows.ts";
 import { trending, trendingGuard } from "../../../../src/core/diagnostics/guards/trending.ts";
 import { unitRoot, unitRootPoints } from "../../../../src/core/diagnostics/guards/unitRoot.ts";
 import { largestChow } from "../../../../src/core/diagnostics/largestChow.ts";
-import { randomFrom } from "../../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../../support/random.ts";
 import { expectDigits } from "../../../support/digits.ts";
 import {
   designOf,

@@ -4,7 +4,7 @@ import { influence, mostInfluential } from "../../../../src/core/diagnostics/gua
 import { influenceGuard } from "../../../../src/core/diagnostics/guards/influenceGuard.ts";
 import { tTwoSided } from "../../../../src/core/numeric/distributions.ts";
 import type { Fit } from "../../../../src/core/fit/fit.ts";
-import { randomFrom } from "../../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../../support/random.ts";
 import { expectDigits } from "../../../support/digits.ts";
 import { designOf, fitOf, reference, referenceFit, referenceIds, throughTime } from "../../../support/referenceFit.ts";
 

@@ -1,6 +1,6 @@
 import { afterEach, describe, expect, it, vi } from "vitest";
 import { compiledKernels } from "../../../../.config/vectorKernels.ts";
-import { randomFrom } from "../../../../src/core/numeric/random.ts";
+import { randomFrom } from "../../../support/random.ts";
 import { arena } from "../../../../src/core/numeric/vector/arena.ts";
 import type { Arena, Kernels } from "../../../../src/core/numeric/vector/kernels.ts";
 import { place } from "../../../../src/core/numeric/vector/place.ts";
