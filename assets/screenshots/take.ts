@@ -22,6 +22,13 @@ async function writeSheet({ page, pane }: DeskPage): Promise<void> {
   await atSheet(page, (desk) => desk.select("'Repairs answer'!A1"));
 }
 
+async function review({ page, pane }: DeskPage): Promise<void> {
+  await atSheet(page, (desk) => desk.select("Handover!A4"));
+  await pane.getByRole("tab", { name: "Review" }).click();
+  await pane.getByRole("button", { name: "List the regressions in this workbook" }).click();
+  await pane.getByRole("button", { name: "Write to a review sheet" }).waitFor();
+}
+
 const suite = await startDeskSuite();
 const desk = await suite.openDesk({ viewport, deviceScaleFactor: 1.5 });
 await answer(desk);
@@ -29,4 +36,8 @@ await desk.page.screenshot({ path: into("desk-answer.png") });
 await writeSheet(desk);
 await desk.page.screenshot({ path: into("result-sheet.png") });
 await desk.close();
+const handover = await suite.openDesk({ viewport, deviceScaleFactor: 1.5 });
+await review(handover);
+await handover.page.screenshot({ path: into("desk-review.png") });
+await handover.close();
 await suite.close();

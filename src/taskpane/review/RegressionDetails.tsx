@@ -48,11 +48,6 @@ export function RegressionDetails({ review, regression }: RegressionDetailsProps
         Reported at <CellLink address={claim.place} />: {originInWords(claim)}.
       </p>
       {claim.origin.kind === "formula" && <p className={styles.formula}>{claim.origin.formula}</p>}
-      {(claim.assumed ?? []).map((words) => (
-        <p key={words} className={type.remark}>
-          {words}
-        </p>
-      ))}
       <StillToReview review={review} />
       {regression.review !== null && <ReviewedWords review={review} regression={regression.review} />}
       <h2 className={type.head}>The data it names</h2>

@@ -20,13 +20,18 @@ interface ReviewedWordsProps {
 /** What a review says of one regression, the verdict first. */
 export function ReviewedWords({ review, regression }: ReviewedWordsProps): ReactNode {
   const type = useType();
-  const { verdict, findings, tried, errors, consequences } = regression;
+  const { claim, verdict, findings, tried, errors, consequences } = regression;
   const { craft, unread } = reviewShown(review);
   return (
     <>
       <section aria-label="Verdict on the work">
         <p className={type.verdict}>{keepTogether(verdict)}</p>
       </section>
+      {(claim.assumed ?? []).map((words) => (
+        <p key={words} className={type.remark}>
+          {words}
+        </p>
+      ))}
       <h2 className={type.head}>Findings</h2>
       {findings.length === 0 && <p className={type.body}>Nothing was found against the work.</p>}
       <FindingList findings={findings} />
