@@ -24,19 +24,34 @@ export interface DataInHand {
   readonly changedCell: string | null;
 }
 
-/** Finds the table in a block and describes its columns. */
-export function takeInHand(block: PlacedBlock): Result<DataInHand> {
+/** So many cells are described without a pause: a few hundredths of a second's work. */
+const cellsWithoutPause = 150_000;
+
+/** Finds the table in a block and describes its columns; what else the pane has to do gets its turn in between. */
+export async function takeInHand(block: PlacedBlock): Promise<Result<DataInHand>> {
   const located = readPlaced(block);
   if (!located.ok) return located;
   const { source, headingRow, table, notes } = located.value;
+  const columns: ColumnDescription[] = [];
+  let cells = 0;
+  for (const column of source.columns) {
+    cells += source.rowCount;
+    if (cells > cellsWithoutPause) {
+      await pause();
+      cells = source.rowCount;
+    }
+    columns.push(describeColumn(column));
+  }
   return success({
     address: block.address,
     source,
     headingRow,
     table,
-    columns: source.columns.map(describeColumn),
+    columns,
     notes,
     anchor: block.table === null ? null : { kind: "table", name: block.table },
     changedCell: null,
   });
 }
+
+const pause = (): Promise<void> => new Promise((resolve) => setTimeout(resolve));

@@ -6,8 +6,10 @@ import { compareSetups, writeComparison } from "./comparing.ts";
 import { createErrands } from "./errands.ts";
 import type { Host, WhereToRead } from "./host.ts";
 import { listPlaces, readData } from "./reading.ts";
+import { makeMemo } from "./memo.ts";
 import { reduce } from "./reduce.ts";
 import { type ReviewCommands, reviewCommands } from "./review/commands.ts";
+import { insertSample } from "./sampling.ts";
 import { keepSheet, recalculateSheet } from "./sheetInFront.ts";
 import { type Store, createStore } from "./store.ts";
 import { type PaneState, emptyState } from "./state.ts";
@@ -30,6 +32,8 @@ export interface PaneParts {
 export interface Commands {
   readonly open: () => void;
   readonly read: (where: WhereToRead) => void;
+  /** Puts invented data on a new sheet and reads them. */
+  readonly insertSample: () => void;
   readonly answer: () => void;
   readonly write: (kind: SheetKind) => void;
   /** Reads the cells again, answers again, and writes a kept sheet in place of itself where one was left out of date. */
@@ -50,6 +54,8 @@ export interface Commands {
   readonly recalculate: () => void;
   /** Turns the live sheet in front into a kept one. */
   readonly keep: () => void;
+  /** Puts the answer shown into plain text. */
+  readonly makeMemo: () => void;
   readonly goTo: (address: string) => void;
   readonly cancel: () => void;
 }
@@ -77,6 +83,7 @@ export function createPane({ host, analyst, edition, guard }: PaneParts): Pane {
   const commands: Commands = {
     open: () => guard(() => open(work)),
     read: (where) => guard(() => readData(work, where)),
+    insertSample: () => guard(() => insertSample(work)),
     answer: () => guard(() => findAnswer(work)),
     write: (kind) => guard(() => writeSheet(work, kind)),
     redo: () => guard(() => redo(work)),
@@ -91,6 +98,7 @@ export function createPane({ host, analyst, edition, guard }: PaneParts): Pane {
     review: reviewCommands(work, guard),
     recalculate: () => guard(() => recalculateSheet(work)),
     keep: () => guard(() => keepSheet(work)),
+    makeMemo: () => guard(() => makeMemo(work)),
     goTo: (address) => guard(() => goToCell(work, address)),
     cancel: errands.cancel,
   };

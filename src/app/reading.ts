@@ -11,8 +11,8 @@ import { type Work, fail } from "./work.ts";
 export async function readData(work: Work, where: WhereToRead): Promise<void> {
   const errand = work.errands.start("reading");
   const block = await work.host.read(where, errand);
+  const taken = block.ok ? await takeInHand(block.value) : block;
   if (errand.signal.aborted) return;
-  const taken = block.ok ? takeInHand(block.value) : block;
   if (!taken.ok) {
     fail(work, taken.problem);
     return;

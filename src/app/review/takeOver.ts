@@ -17,8 +17,8 @@ export async function takeOverRegression(work: Work, claim: Claim): Promise<void
   }
   const errand = work.errands.start("reading");
   const block = await work.host.read({ kind: "address", address: addressOf(area.value) }, errand);
+  const taken = block.ok ? await takeInHand(block.value) : block;
   if (errand.signal.aborted) return;
-  const taken = block.ok ? takeInHand(block.value) : block;
   if (!taken.ok) {
     fail(work, taken.problem);
     return;

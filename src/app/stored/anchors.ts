@@ -31,7 +31,7 @@ export async function readOrigin(
     return failure(
       goneOr(block.problem, { code: "setup-data-gone", setup: whose, place: inWords(anchor), last: address }),
     );
-  const data = takeInHand(block.value);
+  const data = await takeInHand(block.value);
   return data.ok ? success({ ...data.value, anchor }) : data;
 }
 

@@ -44,9 +44,13 @@ export const isRowHidden = (host: Host, sheet: string, row: number): boolean =>
   !worksheetOf(host.book, sheet).getRowVisible(row);
 
 export function rowsHidden(host: Host, area: Area): boolean | null {
-  const rows = Math.min(area.rows, worksheetOf(host.book, area.sheet).getRowCount() - area.row);
-  const hidden = Array.from({ length: Math.max(1, rows) }, (_, row) => isRowHidden(host, area.sheet, area.row + row));
-  return common(hidden);
+  const worksheet = worksheetOf(host.book, area.sheet);
+  const rows = Math.max(1, Math.min(area.rows, worksheet.getRowCount() - area.row));
+  // Only rows that something was done to have an entry: a sheet of a million rows is not walked through.
+  const known = Object.keys(worksheet.getConfig().rowData).map(Number);
+  const inside = known.filter((row) => row >= area.row && row < area.row + rows);
+  const hidden = inside.filter((row) => isRowHidden(host, area.sheet, row)).length;
+  return hidden === 0 ? false : hidden === rows ? true : null;
 }
 
 export function columnsHidden(host: Host, { sheet, column, columns }: Area): boolean | null {

@@ -1,4 +1,6 @@
+import { Button } from "@fluentui/react-components";
 import type { ReactNode } from "react";
+import { HelpHead } from "../help/HelpHead.tsx";
 import { useType } from "../look/type.ts";
 import { Disclosure } from "../parts/Disclosure.tsx";
 import { SectionTitle } from "../parts/SectionTitle.tsx";
@@ -38,7 +40,9 @@ export function DataSection(): ReactNode {
       </Disclosure>
       <h2 className={type.head}>Columns</h2>
       <ColumnList />
-      <h2 className={type.head}>Rows are</h2>
+      <HelpHead about="groups" asks="What are groups?">
+        Rows are
+      </HelpHead>
       <RowsAre />
       <HiddenRows />
       <WhatIsUsed />
@@ -60,8 +64,23 @@ function FirstRun(): ReactNode {
       </p>
       <p className={type.remark}>Select the columns with their headings, or one cell among them.</p>
       <PlaceChooser />
+      <Sample />
       <KeptHere />
       <p className={type.footnote}>All of it is computed on this computer. Nothing is sent anywhere.</p>
+    </>
+  );
+}
+
+/** For someone who has no data at hand, or wants to see first what comes out. */
+function Sample(): ReactNode {
+  const type = useType();
+  const { state, commands } = usePane();
+  return (
+    <>
+      <p className={type.remark}>No data at hand? Invented figures of 96 months go onto a new sheet of their own.</p>
+      <Button size="small" disabledFocusable={state.busy !== null} onClick={commands.insertSample}>
+        Insert sample data
+      </Button>
     </>
   );
 }
