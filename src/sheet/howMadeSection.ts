@@ -95,7 +95,7 @@ function madeRows(answer: Answer, { ranges, table, fingerprint, version }: Sheet
     plain("Rows used, when made", answer.observations),
     plain("Rows left out, when made", answer.leftOutCount),
     ...answer.notes.map((note) => plain("Done to the data", note)),
-    plain("Fingerprint (SHA-256)", fingerprint),
+    plain("Fingerprint when made (SHA-256)", fingerprint),
     plain("Version", version),
   ];
 }
