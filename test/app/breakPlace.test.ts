@@ -3,9 +3,9 @@ import { breakPlacesOf } from "../../src/app/breakPlace.ts";
 import { takeInHand } from "../../src/app/dataInHand.ts";
 import { proposeSetup } from "../../src/app/proposal.ts";
 import { changeColumn } from "../../src/app/setup.ts";
-import { toCellColumn } from "../../src/core/table/cells.ts";
 import { repairMonths } from "../support/repairs.ts";
 import { must } from "../support/sheet.ts";
+import { toCellColumn } from "../support/cellColumns.ts";
 
 const rows = repairMonths(24);
 rows[6]![3] = null;

@@ -1,8 +1,9 @@
 import { createHash } from "node:crypto";
 import { describe, expect, it } from "vitest";
 import { fingerprint, shortFingerprint } from "../../src/app/fingerprint.ts";
-import { type Cell, type CellColumn, toCellColumn } from "../../src/core/table/cells.ts";
+import type { Cell, CellColumn } from "../../src/core/table/cells.ts";
 import type { Column } from "../../src/core/table/source.ts";
+import { toCellColumn } from "../support/cellColumns.ts";
 
 const column = (name: string, cells: CellColumn, firstRow = 1): Column => ({
   name,

@@ -3,9 +3,9 @@ import { takeInHand } from "../../src/app/dataInHand.ts";
 import { proposeSetup } from "../../src/app/proposal.ts";
 import { questionOf } from "../../src/app/questionOf.ts";
 import { assignRole, changeColumn, type Setup } from "../../src/app/setup.ts";
-import { toCellColumn } from "../../src/core/table/cells.ts";
 import { must } from "../support/sheet.ts";
 import { repairMonths } from "../support/repairs.ts";
+import { toCellColumn } from "../support/cellColumns.ts";
 
 const rows = repairMonths(24).map((cells, row) => [...cells, row === 0 ? "Shop" : ["North", "South"][row % 2]!]);
 const data = must(

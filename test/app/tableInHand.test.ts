@@ -1,7 +1,8 @@
 import { describe, expect, it } from "vitest";
 import type { PlacedBlock } from "../../src/app/host.ts";
 import { columnsOfTable, readPlaced } from "../../src/app/tableInHand.ts";
-import { type Cell, toCellColumn } from "../../src/core/table/cells.ts";
+import type { Cell } from "../../src/core/table/cells.ts";
+import { toCellColumn } from "../support/cellColumns.ts";
 
 /** A block of three columns, its headings in row 5 of the sheet and column C the first. */
 const blockOf = (rows: readonly (readonly Cell[])[], table: string | null = "Sales"): PlacedBlock => ({

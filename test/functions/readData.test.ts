@@ -1,8 +1,9 @@
 import { describe, expect, it } from "vitest";
 import type { Problem } from "../../src/core/problem/problem.ts";
-import { type Cell, type CellColumn, toCellColumn } from "../../src/core/table/cells.ts";
+import type { Cell, CellColumn } from "../../src/core/table/cells.ts";
 import { readData } from "../../src/functions/readData.ts";
 import { ErrorCode } from "../support/functionsRuntime.ts";
+import { toCellColumn } from "../support/cellColumns.ts";
 
 const column = (...cells: unknown[]): unknown[][] => cells.map((cell) => [cell]);
 

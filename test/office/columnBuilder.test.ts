@@ -1,6 +1,7 @@
 import { describe, expect, it } from "vitest";
-import { type Cell, toCellColumn } from "../../src/core/table/cells.ts";
+import type { Cell } from "../../src/core/table/cells.ts";
 import { columnBuilder } from "../../src/office/columnBuilder.ts";
+import { toCellColumn } from "../support/cellColumns.ts";
 
 /** A cell as Excel's API tells it, and what it is. */
 const told: readonly (readonly [value: unknown, type: string, format: string, cell: Cell])[] = [

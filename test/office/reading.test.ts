@@ -1,9 +1,10 @@
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import type { PlacedBlock, WhereToRead } from "../../src/app/host.ts";
-import { type Cell, toCellColumn } from "../../src/core/table/cells.ts";
+import type { Cell } from "../../src/core/table/cells.ts";
 import type { BookCell, BookData, SheetData } from "../../src/desk/book/bookData.ts";
 import { bookOf, sheetOf } from "../support/deskBook.ts";
 import { type DeskHost, errand, openDeskHost } from "../support/deskHost.ts";
+import { toCellColumn } from "../support/cellColumns.ts";
 
 const month = (serial: number): BookCell => ({ value: serial, style: { numberFormat: "mmm yyyy" } });
 

@@ -3,10 +3,10 @@ import { analyse } from "../../src/core/answer/analyse.ts";
 import type { Answer } from "../../src/core/answer/answer.ts";
 import { defaultOptions } from "../../src/core/answer/options.ts";
 import type { Question } from "../../src/core/answer/question.ts";
-import { toCellColumn } from "../../src/core/table/cells.ts";
 import { sheetFactsOf } from "../../src/app/sheetFacts.ts";
 import { planAnswer } from "../../src/sheet/answerSheet.ts";
 import type { Area, PlanBlock, SheetPlan } from "../../src/sheet/plan.ts";
+import { toCellColumn } from "../support/cellColumns.ts";
 
 const rowCount = 36;
 /** Invented: a wave with a little of the driver in it. */

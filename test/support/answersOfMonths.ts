@@ -2,8 +2,8 @@ import { analyse } from "../../src/core/answer/analyse.ts";
 import type { Answer } from "../../src/core/answer/answer.ts";
 import { defaultOptions } from "../../src/core/answer/options.ts";
 import type { Model } from "../../src/core/design/model.ts";
-import { toCellColumn } from "../../src/core/table/cells.ts";
 import type { Source } from "../../src/core/table/source.ts";
+import { toCellColumn } from "./cellColumns.ts";
 
 const plain = { kind: "none" } as const;
 

@@ -2,11 +2,12 @@ import type { DataPlace, Errand, Host, PlacedBlock, WhereToRead } from "../../sr
 import { type Problem } from "../../src/core/problem/problem.ts";
 import { type Result, failure, success } from "../../src/core/problem/result.ts";
 import type { Book } from "../../src/core/review/book.ts";
-import { type Cell, toCellColumn } from "../../src/core/table/cells.ts";
+import type { Cell } from "../../src/core/table/cells.ts";
 import { addressOf } from "../../src/core/table/address.ts";
 import { namePrefix } from "../../src/app/keeper.ts";
 import type { SheetPlan } from "../../src/sheet/plan.ts";
 import { type FakeKeeper, fakeKeeper } from "./fakeKeeper.ts";
+import { toCellColumn } from "./cellColumns.ts";
 
 /** A spreadsheet of one sheet, in memory, that does as it is told: for the pane's own tests. */
 export interface FakeHost extends Host {

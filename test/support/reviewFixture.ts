@@ -1,7 +1,7 @@
 import type { Claim, ClaimedLine, ReportedNumber } from "../../src/core/review/claim.ts";
 import type { BookReview, ClaimReview, Comparison } from "../../src/core/review/claimReview.ts";
 import type { Finding } from "../../src/core/review/finding.ts";
-import { toCellColumn } from "../../src/core/table/cells.ts";
+import { toCellColumn } from "./cellColumns.ts";
 
 /** A review whose words and figures are made up, all different, so that one in the wrong place is seen. */
 const line = (name: string, track: number, start: number): ClaimedLine => ({

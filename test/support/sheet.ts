@@ -3,8 +3,9 @@ import type { Problem } from "../../src/core/problem/problem.ts";
 import type { Result } from "../../src/core/problem/result.ts";
 import type { CellBlock } from "../../src/core/table/block.ts";
 import { serialOf } from "../../src/core/table/calendar.ts";
-import { type Cell, toCellColumn } from "../../src/core/table/cells.ts";
+import type { Cell } from "../../src/core/table/cells.ts";
 import type { Column, Source } from "../../src/core/table/source.ts";
+import { toCellColumn } from "./cellColumns.ts";
 
 /** Rows of cells as a block that begins at a cell of a sheet, A1 of "Months" unless said otherwise. */
 export function blockOf(rows: readonly (readonly Cell[])[], at: Partial<CellBlock> = {}): CellBlock {

@@ -4,12 +4,12 @@ import { defaultOptions } from "../../src/core/answer/options.ts";
 import type { Question } from "../../src/core/answer/question.ts";
 import { failure, success } from "../../src/core/problem/result.ts";
 import type { Book } from "../../src/core/review/book.ts";
-import { toCellColumn } from "../../src/core/table/cells.ts";
 import type { Source } from "../../src/core/table/source.ts";
 import { inlineAnalystOf } from "../../src/worker/inlineAnalyst.ts";
 import { workerAnalyst } from "../../src/worker/workerAnalyst.ts";
 import { claimFixture, claimReviewFixture } from "../support/reviewFixture.ts";
 import { type Threads, threadsOf } from "../support/threadLine.ts";
+import { toCellColumn } from "../support/cellColumns.ts";
 
 const sourceOf = (...numbers: number[]): Source => ({
   rowCount: numbers.length,

@@ -3,7 +3,6 @@ import { pointedFrom, reviewShown } from "../../../src/app/review/reviewState.ts
 import { areaOfData } from "../../../src/app/review/takeOver.ts";
 import { failure, success } from "../../../src/core/problem/result.ts";
 import type { Claim, ClaimedLine } from "../../../src/core/review/claim.ts";
-import { toCellColumn } from "../../../src/core/table/cells.ts";
 import { type PaneBench, paneBench } from "../../support/paneBench.ts";
 import {
   bookReviewFixture,
@@ -11,6 +10,7 @@ import {
   claimReviewFixture,
   soundReviewFixture,
 } from "../../support/reviewFixture.ts";
+import { toCellColumn } from "../../support/cellColumns.ts";
 
 let bench: PaneBench;
 beforeEach(() => {

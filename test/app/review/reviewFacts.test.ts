@@ -1,8 +1,8 @@
 import { expect, it } from "vitest";
 import { fingerprint } from "../../../src/app/fingerprint.ts";
 import { fingerprintOfClaim, reviewFactsOf } from "../../../src/app/review/reviewFacts.ts";
-import { toCellColumn } from "../../../src/core/table/cells.ts";
 import { claimFixture } from "../../support/reviewFixture.ts";
+import { toCellColumn } from "../../support/cellColumns.ts";
 
 const edition = { today: () => "1 December 2026", version: "0.1.0" };
 

@@ -5,11 +5,11 @@ import { inquire } from "../../../src/core/answer/inquire.ts";
 import { readSettings } from "../../../src/core/answer/settings.ts";
 import type { Model } from "../../../src/core/design/model.ts";
 import type { Result } from "../../../src/core/problem/result.ts";
-import { toCellColumn } from "../../../src/core/table/cells.ts";
 import type { Source } from "../../../src/core/table/source.ts";
 import { tTwoSided } from "../../../src/core/numeric/distributions.ts";
 import { answerJson } from "../../../src/terminal/answerJson.ts";
 import { driver, modelWith } from "../../support/models.ts";
+import { toCellColumn } from "../../support/cellColumns.ts";
 
 const n = 60;
 const price = Array.from({ length: n }, (_, i) => 3 + ((i * 7) % 11) / 2);

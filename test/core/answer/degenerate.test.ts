@@ -4,7 +4,7 @@ import { defaultOptions } from "../../../src/core/answer/options.ts";
 import type { Question } from "../../../src/core/answer/question.ts";
 import type { Answer } from "../../../src/core/answer/answer.ts";
 import type { Model } from "../../../src/core/design/model.ts";
-import { toCellColumn } from "../../../src/core/table/cells.ts";
+import { toCellColumn } from "../../support/cellColumns.ts";
 
 const none = { kind: "none" } as const;
 

@@ -4,8 +4,9 @@ import { type Finding, type Inquiry, inquire } from "../../../src/core/answer/in
 import { defaultOptions } from "../../../src/core/answer/options.ts";
 import type { Model, Transform } from "../../../src/core/design/model.ts";
 import type { Result } from "../../../src/core/problem/result.ts";
-import { type Cell, toCellColumn } from "../../../src/core/table/cells.ts";
+import type { Cell } from "../../../src/core/table/cells.ts";
 import type { Source } from "../../../src/core/table/source.ts";
+import { toCellColumn } from "../../support/cellColumns.ts";
 
 const plain: Transform = { kind: "none" };
 

@@ -5,11 +5,11 @@ import { readSettings } from "../../../src/core/answer/settings.ts";
 import { choiceText, lawsInWords } from "../../../src/core/answer/tables.ts";
 import type { Model } from "../../../src/core/design/model.ts";
 import { tTwoSided } from "../../../src/core/numeric/distributions.ts";
-import { toCellColumn } from "../../../src/core/table/cells.ts";
 import type { Source } from "../../../src/core/table/source.ts";
 import { answerJson } from "../../../src/terminal/answerJson.ts";
 import { pValuesAgainst } from "../../../src/functions/kinds.ts";
 import { driver, modelWith } from "../../support/models.ts";
+import { toCellColumn } from "../../support/cellColumns.ts";
 
 const n = 40;
 const columns = {

@@ -9,9 +9,10 @@ import { buildDesign } from "../../../src/core/design/buildDesign.ts";
 import { fitLeastSquares } from "../../../src/core/fit/fitLeastSquares.ts";
 import type { Question } from "../../../src/core/answer/question.ts";
 import type { Result } from "../../../src/core/problem/result.ts";
-import { type Cell, toCellColumn } from "../../../src/core/table/cells.ts";
+import type { Cell } from "../../../src/core/table/cells.ts";
 import { directErrors, expectAllDigits } from "../../support/referenceErrors.ts";
 import { reference } from "../../support/referenceFit.ts";
+import { toCellColumn } from "../../support/cellColumns.ts";
 
 /** What settings alone make of columns, as the worksheet functions and the terminal ask it. */
 function questionOf(columns: Readonly<Record<string, readonly Cell[]>>, settings: string, parts: Parts): Question {

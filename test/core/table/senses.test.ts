@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
-import { toCellColumn } from "../../../src/core/table/cells.ts";
 import { countSenses, isMissingMark, picked, sense, sensesOf } from "../../../src/core/table/senses.ts";
+import { toCellColumn } from "../../support/cellColumns.ts";
 
 describe("the sense of a cell", () => {
   it("tells the kinds apart", () => {
