@@ -19,9 +19,9 @@ export const found = {
   headingInside: (line: string, heading: string) =>
     `The range of "${line}" begins with its heading, "${heading}", which the function passes over.`,
   overFormula: (line: string, count: number, formulas: number) =>
-    `${counted(count, "number")} ${count === 1 ? "is" : "are"} typed into "${line}", where the other ${formulas.toLocaleString("en-US")} cells are formulas.`,
+    `${counted(count, "number")} ${count === 1 ? "is" : "are"} typed into "${line}", where ${others(formulas)}.`,
   typedAmongFormulas: (count: number, formulas: number) =>
-    `${counted(count, "number")} of the report ${count === 1 ? "is" : "are"} typed in, where the other ${formulas.toLocaleString("en-US")} are formulas.`,
+    `${counted(count, "number")} of the report ${count === 1 ? "is" : "are"} typed in, where ${others(formulas)}.`,
   typedResults: (count: number) =>
     `The ${counted(count, "number")} of the report ${count === 1 ? "is" : "are"} typed in: no formula leads from the data to them.`,
   byHand: "The workbook calculates only when someone asks, so that results may be older than the cells they rest on.",
@@ -45,5 +45,8 @@ export const advice = {
   byHand: "Calculate the workbook (F9), and set calculation to automatic under Formulas.",
   repeated: "See whether the rows were pasted twice; if so, take one copy out.",
 } as const;
+
+const others = (formulas: number): string =>
+  formulas === 1 ? "the other is a formula" : `the other ${formulas.toLocaleString("en-US")} are formulas`;
 
 const rowsOf = (count: number): string => (count === 1 ? "its row" : "their rows");
