@@ -1,7 +1,7 @@
 import type { Browser, Page } from "playwright-core";
 import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from "vitest";
 import { openPane } from "./panePage/openPane.ts";
-import { announced, button, focused, getAnswer, heading, openTab, roleOf } from "./panePage/steps.ts";
+import { announced, button, focused, getAnswer, heading, openTab, roleOf, storeAs } from "./panePage/steps.ts";
 import { launchBrowser } from "./support/browser.ts";
 
 let browser: Browser;
@@ -26,9 +26,7 @@ const setups = () => page.getByRole("region", { name: "Set-ups in this workbook"
 
 async function store(name: string): Promise<void> {
   await openTab(page, "Data");
-  await page.getByLabel("Store what is chosen above as").fill(name);
-  await page.keyboard.press("Enter");
-  await setups().getByText(name, { exact: true }).waitFor();
+  await storeAs(page, name);
 }
 
 describe("stored set-ups", () => {
@@ -156,6 +154,38 @@ describe("result sheets", () => {
     await alert.getByText(/holds what Footing did not write/).waitFor();
     await alert.getByRole("button", { name: "'Repairs answer'!C4" }).click();
     expect(await page.evaluate(() => window.stage.host.gone)).toEqual(["'Repairs answer'!C4"]);
+  });
+});
+
+describe("the first run", () => {
+  it("puts sample data on a sheet of their own and reads them", async () => {
+    await button(page, "Insert sample data").click();
+    await heading(page, "'Sample months'!A4:E100").waitFor();
+    expect(await page.evaluate(() => window.stage.host.plans.map(({ name, holds }) => [name, holds]))).toEqual([
+      ["Sample months", "data"],
+    ]);
+    expect(await focused(page)).toMatch(/^H1 'Sample months'/);
+  });
+
+  it("says where the workbook may not be changed", async () => {
+    await page.evaluate(() => (window.stage.host.refusals.write = { code: "workbook-protected" }));
+    await button(page, "Insert sample data").click();
+    await page
+      .getByRole("alert")
+      .getByText(/structure is protected, so no sheet can be added/)
+      .waitFor();
+    await button(page, "Use selection").waitFor();
+  });
+});
+
+describe("what a newer Footing keeps", () => {
+  it("is left alone, and said", async () => {
+    await page.evaluate(() => {
+      const { host, pane } = window.stage;
+      host.keeper.parts = [{ id: "{1}", xml: '<footing xmlns="urn:footing:workbook" version="9">x</footing>' }];
+      pane.commands.open();
+    });
+    await page.getByText(/a newer Footing stored \(format 9; this one reads format 1\)/).waitFor();
   });
 });
 

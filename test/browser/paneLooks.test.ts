@@ -4,7 +4,7 @@ import type { AxeResults } from "axe-core";
 import type { Browser, Page } from "playwright-core";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { openPane } from "./panePage/openPane.ts";
-import { allowTextNumbers, button, getAnswer, openTab, useSelection } from "./panePage/steps.ts";
+import { allowTextNumbers, button, getAnswer, openTab, roleOf, storeAs, useSelection } from "./panePage/steps.ts";
 import { launchBrowser } from "./support/browser.ts";
 
 const axe = readFileSync(createRequire(import.meta.url).resolve("axe-core/axe.min.js"), "utf8");
@@ -28,6 +28,17 @@ const open = (page: Page, ...names: (string | RegExp)[]): Promise<void> =>
   names.reduce((before, name) => before.then(() => button(page, name).first().click()), Promise.resolve());
 
 const listRegressions = "List the regressions in this workbook";
+
+/** Two set-ups and a kept sheet in the workbook. */
+async function keepTwo(page: Page): Promise<void> {
+  await getAnswer(page);
+  await page.getByLabel("Live or kept").selectOption("kept");
+  await button(page, "Write to the workbook").click();
+  await openTab(page, "Data");
+  await storeAs(page, "All drivers");
+  await roleOf(page, "Price index").selectOption("unused");
+  await storeAs(page, "Without price");
+}
 
 /** Every state of the pane, as a person comes to it. */
 const states: Readonly<Record<string, (page: Page) => Promise<void>>> = {
@@ -83,6 +94,39 @@ const states: Readonly<Record<string, (page: Page) => Promise<void>>> = {
     await page.evaluate(() => (window.stage.listed = { ...window.stage.listed, claims: [] }));
     await open(page, listRegressions);
     await page.getByText("none of them could be read").waitFor();
+  },
+  "what the workbook keeps": async (page) => {
+    await keepTwo(page);
+    await page.evaluate(() => window.stage.host.change(5, 1, 99));
+    await page.getByText("Out of date: its cells have changed.").waitFor();
+    await open(page, "Rename All drivers", "Remove Without price");
+  },
+  "a set-up without its columns": async (page) => {
+    await keepTwo(page);
+    await page.evaluate(() => {
+      window.stage.host.hiddenRows = [3];
+      window.stage.host.change(0, 2, "Price level");
+    });
+    await open(page, "Open All drivers");
+    await page.getByText(/There is no column "Price index"/).waitFor();
+  },
+  "a comparison": async (page) => {
+    await keepTwo(page);
+    await page.getByLabel("Compare All drivers").check();
+    await page.getByLabel("Compare Without price").check();
+    await open(page, "Compare 2 side by side");
+    await page.getByRole("table", { name: "Drivers of the models" }).waitFor();
+    await page.evaluate(() => window.stage.host.change(5, 1, 99));
+    await page.getByText("Out of date: cells behind the models have changed.").waitFor();
+  },
+  "no permission": async (page) => {
+    await getAnswer(page);
+    await page.evaluate(() => (window.stage.host.refusals.write = { code: "workbook-protected" }));
+    await open(page, "Write to the workbook");
+    await page
+      .getByRole("alert")
+      .getByText(/structure is protected/)
+      .waitFor();
   },
   "a fault to mend": async (page) => {
     await useSelection(page);

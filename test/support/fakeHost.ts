@@ -76,7 +76,7 @@ export function fakeHost(sheet: string, rows: Cell[][]): FakeHost {
     write: (plan) => {
       host.plans.push(plan);
       const name = `${plan.name}${host.plans.length > 1 ? ` ${host.plans.length}` : ""}`;
-      if (host.refusals.write === undefined) keeper.tags.set(name, null);
+      if (host.refusals.write === undefined && plan.holds === undefined) keeper.tags.set(name, null);
       return Promise.resolve(refused("write", { sheet: name }));
     },
     recalculateSheet: () => Promise.resolve(refused("recalculate", { sheet: inFront() })),

@@ -25,6 +25,13 @@ export async function getAnswer(page: Page): Promise<void> {
   await heading(page, /^Repairs explained by/).waitFor();
 }
 
+/** Stores what is chosen in the Data section. */
+export async function storeAs(page: Page, name: string): Promise<void> {
+  await page.getByLabel("Store what is chosen above as").fill(name);
+  await page.keyboard.press("Enter");
+  await page.getByRole("button", { name: `Open ${name}`, exact: true }).waitFor();
+}
+
 export const openTab = (page: Page, name: string) => page.getByRole("tab", { name }).click();
 
 /** What screen readers were told last. */
