@@ -1,4 +1,4 @@
-import { type RunningMoments, packedLength } from "./runningMoments.ts";
+import { type Moved, packedLength } from "./runningMoments.ts";
 
 /** Which columns of some moments are regressed on which; columns count from 1, the constant is column 0. */
 export interface MomentModel {
@@ -28,7 +28,7 @@ export interface MomentSolution {
 
 export interface MomentSolver {
   /** @returns null where columns depend on one another or rows are too few. */
-  readonly solve: (moments: Float64Array, of: RunningMoments, model: MomentModel) => MomentSolution | null;
+  readonly solve: (moments: Float64Array, of: Moved, model: MomentModel) => MomentSolution | null;
   /** Fills in the breads of the solution just found. */
   readonly fillBreads: () => void;
 }
@@ -94,7 +94,7 @@ function select(work: Work, { outcome, drivers, constant }: MomentModel): void {
 const entryOf = (i: number, j: number): number => (i >= j ? packedLength(i) + j : packedLength(j) + i);
 
 /** @param about - the moves to undo where the model has no constant, which would take them up. */
-function fillLower({ lower, columns, count, most }: Work, moments: Float64Array, about: RunningMoments | null): void {
+function fillLower({ lower, columns, count, most }: Work, moments: Float64Array, about: Moved | null): void {
   for (let i = 0; i < count; i++) {
     for (let j = 0; j <= i; j++) {
       const [a, b] = [columns[i]!, columns[j]!];
@@ -136,7 +136,7 @@ interface Solving {
   readonly solution: MomentSolution;
 }
 
-function solved(work: Work, of: RunningMoments, { moments, model, solution }: Solving): MomentSolution {
+function solved(work: Work, of: Moved, { moments, model, solution }: Solving): MomentSolution {
   const { lower, weights, count, most } = work;
   const last = count - 1;
   for (let i = last - 1; i >= 0; i--) {
@@ -154,7 +154,7 @@ function solved(work: Work, of: RunningMoments, { moments, model, solution }: So
   return solution;
 }
 
-function inUnits({ weights, scales }: Work, { centres, scales: units }: RunningMoments, solving: Solving): void {
+function inUnits({ weights, scales }: Work, { centres, scales: units }: Moved, solving: Solving): void {
   const { model, solution } = solving;
   const first = model.constant ? 1 : 0;
   const unit = units[model.outcome]!;

@@ -1,8 +1,5 @@
-/**
- * Cross-products of columns summed up row by row, so that those of any run of rows are the difference of two sums.
- * Columns are moved to mean 0 and spread 1 over some rows, which keeps the differences exact to about 1e-12 of a sum.
- */
-export interface RunningMoments {
+/** Columns moved to mean 0 and spread 1 over some rows. */
+export interface Moved {
   /** Columns and the constant, which stands first. */
   readonly size: number;
   /** One value a column, the constant's 0 and 1 first: moved = (value - centre) / scale. */
@@ -10,6 +7,13 @@ export interface RunningMoments {
   readonly scales: Float64Array;
   /** The columns as moved, without the constant. */
   readonly moved: readonly Float64Array[];
+}
+
+/**
+ * Cross-products of columns summed up row by row, so that those of any run of rows are the difference of two sums.
+ * Columns are moved to mean 0 and spread 1 over some rows, which keeps the differences exact to about 1e-12 of a sum.
+ */
+export interface RunningMoments extends Moved {
   /** 1 for the rows that count; the others add nothing. */
   readonly complete: Uint8Array;
   /** For each row the packed sums of all rows before it: rows + 1 times `packedLength(size)` values. */
@@ -26,31 +30,56 @@ export interface RowRun {
 }
 
 /**
- * @param columns - of n values each.
+ * @param columns - of n values each, moved.
  * @param complete - n bytes: 1 for rows that count.
- * @param typical - the rows whose mean and spread the columns are moved by.
  */
-export function runningMoments(
-  columns: readonly Float64Array[],
-  complete: Uint8Array,
-  typical: RowRun,
-): RunningMoments {
-  const size = columns.length + 1;
-  const centres = new Float64Array(size);
-  const scales = new Float64Array(size).fill(1);
-  const moved = columns.map((column, index) => {
-    const { centre, scale } = centreAndScale(column, complete, typical);
-    centres[index + 1] = centre;
-    scales[index + 1] = scale;
-    return column.map((value) => (value - centre) / scale);
-  });
-  return { size, centres, scales, moved, complete, sums: summedUp(moved, complete) };
+export function runningMoments(columns: readonly MovedColumn[], complete: Uint8Array): RunningMoments {
+  const moved = sideBySide(columns);
+  return { ...moved, complete, sums: summedUp(moved.moved, complete) };
 }
+
+/** How many of the rows of a run count. */
+export const rowsInRun = ({ sums, size }: RunningMoments, { from, to }: RowRun): number =>
+  sums[to * packedLength(size)]! - sums[from * packedLength(size)]!;
+
+/** A column moved to mean 0 and spread 1 over some rows; rows that do not count hold 0. */
+export interface MovedColumn {
+  readonly centre: number;
+  readonly scale: number;
+  readonly values: Float64Array;
+}
+
+/** @param complete - 1 for the rows that count. @param typical - the rows whose mean and spread are taken. */
+export function movedColumn(column: Float64Array, complete: Uint8Array, typical: RowRun): MovedColumn {
+  const { centre, scale } = centreAndScale(column, complete, typical);
+  const values = new Float64Array(column.length);
+  for (let row = 0; row < values.length; row++) values[row] = complete[row] === 1 ? (column[row]! - centre) / scale : 0;
+  return { centre, scale, values };
+}
+
+/** sum of x_i y_i, without the compensation of `sums`: a sieve needs fewer digits and many sums. */
+export function roughProduct(x: Float64Array, y: Float64Array): number {
+  let sum = 0;
+  for (let i = 0; i < x.length; i++) sum += x[i]! * y[i]!;
+  return sum;
+}
+
+/** Columns moved each for itself, set side by side. */
+export const sideBySide = (columns: readonly MovedColumn[]): Moved => ({
+  size: columns.length + 1,
+  centres: Float64Array.from([0, ...columns.map(({ centre }) => centre)]),
+  scales: Float64Array.from([1, ...columns.map(({ scale }) => scale)]),
+  moved: columns.map(({ values }) => values),
+});
 
 function centreAndScale(column: Float64Array, complete: Uint8Array, { from, to }: RowRun) {
   let count = 0;
   let sum = 0;
-  for (let row = from; row < to; row++) if (complete[row] === 1) [count, sum] = [count + 1, sum + column[row]!];
+  for (let row = from; row < to; row++) {
+    if (complete[row] === 0) continue;
+    count++;
+    sum += column[row]!;
+  }
   const centre = count === 0 ? 0 : sum / count;
   let squares = 0;
   for (let row = from; row < to; row++) if (complete[row] === 1) squares += (column[row]! - centre) ** 2;
@@ -83,6 +112,13 @@ interface Weighted {
   readonly times: number;
 }
 
+/** target -= the products of one of the rows of the columns. */
+export function takeRow(target: Float64Array, { moved, size }: Moved, index: number): void {
+  const row = new Float64Array(size);
+  readRow(moved, index, row);
+  addProducts(target, 0, { row, times: -1 });
+}
+
 function addProducts(sums: Float64Array, at: number, { row, times }: Weighted): void {
   let entry = at;
   for (let i = 0; i < row.length; i++) {
@@ -91,17 +127,21 @@ function addProducts(sums: Float64Array, at: number, { row, times }: Weighted): 
   }
 }
 
-/** target += times * (the packed moments of a run of rows). */
-export function addRun(target: Float64Array, { sums, size }: RunningMoments, run: RowRun & { times: number }): void {
+/** target += the packed moments of a run of rows. */
+export function addRun(target: Float64Array, { sums, size }: RunningMoments, run: RowRun): void {
   const length = packedLength(size);
   const [from, to] = [run.from * length, run.to * length];
-  for (let entry = 0; entry < length; entry++) target[entry]! += run.times * (sums[to + entry]! - sums[from + entry]!);
+  for (let entry = 0; entry < length; entry++) target[entry]! += sums[to + entry]! - sums[from + entry]!;
 }
+
+/** target -= the packed moments of a run of rows. */
+export const takeRun = (target: Float64Array, moments: RunningMoments, { from, to }: RowRun): void =>
+  addRun(target, moments, { from: to, to: from });
 
 /** target += times * (the products of one row that is not among the columns), its values not moved yet. */
 export function addRow(
   target: Float64Array,
-  { centres, scales, size }: RunningMoments,
+  { centres, scales, size }: Moved,
   { values, times }: { readonly values: ArrayLike<number>; readonly times: number },
 ): void {
   const row = new Float64Array(size).fill(1);

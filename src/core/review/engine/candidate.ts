@@ -1,13 +1,16 @@
 import type { Change } from "./change.ts";
 import { mostByChance } from "./evidence.ts";
 import type { Recipe } from "./recipe.ts";
-import type { Sieve, SummedUp, Survivor } from "./sieve.ts";
+import type { Sieve, Survivor } from "./sieve.ts";
+import type { SummedUp } from "./summedUp.ts";
 
 /** The changes that are tried, by how many there are of them. */
 export interface Changes {
   readonly few: readonly Change[];
-  /** At least one a row. */
-  readonly many: readonly Change[];
+  /** At least one a row, to be tried alone. */
+  readonly many: Iterable<Change>;
+  /** Those to be tried with another change, for what that made of the recipe and the rows that are complete then. */
+  readonly manyMore: (recipe: Recipe, complete: Uint8Array) => readonly Change[];
 }
 
 /** A change or two that passed the sieve. */
@@ -24,7 +27,8 @@ export interface Kept {
 }
 
 export interface Keeping {
-  readonly look: (changes: readonly Change[], summed: SummedUp, recipe: Recipe) => void;
+  readonly look: (summed: SummedUp, recipe: Recipe) => Survivor | null;
+  readonly keep: (changes: readonly Change[], survivor: Survivor) => void;
   readonly kept: () => Kept;
 }
 
@@ -33,9 +37,8 @@ export function keeping(sieve: Sieve): Keeping {
   const candidates: Candidate[] = [];
   let untelling = 0;
   return {
-    look: (changes, summed, recipe) => {
-      const survivor = sieve.look(summed, recipe);
-      if (survivor === null) return;
+    look: sieve.look,
+    keep: (changes, survivor) => {
       if (survivor.chance * sieve.looked() < mostByChance) candidates.push({ changes, survivor });
       else untelling++;
     },

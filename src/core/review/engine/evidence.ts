@@ -35,6 +35,7 @@ export function evidenceOf(moved: readonly Moved[], errorsTried: number): Eviden
   const facts = new Map<string, number>();
   for (const one of moved) {
     const fact = factOf(one.reported.quantity);
+    if (fact === null) continue;
     facts.set(fact, Math.min(facts.get(fact) ?? 1, chanceOf(one)));
   }
   const plain = product([...facts].filter(([fact]) => !fact.startsWith(errorsFact)));
@@ -59,7 +60,8 @@ export function chanceOf({ reported, found, asClaimed }: Moved): number {
 
 const errorsFact = "errors of ";
 
-function factOf(quantity: Quantity): string {
+/** Null for the number of rows, by which the changes that are looked at are chosen. */
+function factOf(quantity: Quantity): string | null {
   switch (quantity.kind) {
     case "coefficient":
       return `coefficient of ${quantity.term ?? "constant"}`;
@@ -73,7 +75,7 @@ function factOf(quantity: Quantity): string {
       return `prediction at ${quantity.at.join()}`;
     case "observations":
     case "degrees-of-freedom":
-      return "rows";
+      return null;
     default:
       return "fit";
   }

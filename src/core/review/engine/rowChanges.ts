@@ -9,8 +9,6 @@ export interface RowFacts {
   readonly frame: Frame;
   /** 1 for each row of the frame in which every claimed line holds a number. */
   readonly complete: Uint8Array;
-  /** How many rows the report says were used less how many the claimed cells have; null where it does not say. */
-  readonly missing: number | null;
 }
 
 /** In pairs more rows than these at one end are not tried. */

@@ -20,7 +20,8 @@ export function listRows(frame: Frame, recipe: Recipe): Listed | null {
   const rows = runsOf(recipe.rows).flatMap(({ from, to }) =>
     rowsBetween(from, to).filter((row) => complete[row] === 1),
   );
-  const extra = extraRows(frame, recipe, rows);
+  const totals = (): number[] => frame.lines.map(({ numbers }) => rows.reduce((sum, row) => sum + numbers[row]!, 0));
+  const extra = extraRows(recipe, { totals, rows: rows.length });
   if (extra === null) return null;
   const factors = recipe.model.factors;
   const columns = values.map((line, index) => {
@@ -53,19 +54,20 @@ export function runsOf({ span, without, again }: RowRecipe): Run[] {
 const rowsBetween = (from: number, to: number): number[] =>
   Array.from({ length: Math.max(0, to - from) }, (_, i) => from + i);
 
+/** What a row that sums up others is made of. */
+export interface Summing {
+  /** The sum of each line's cells, as they stand, over the rows that count. */
+  readonly totals: () => readonly number[];
+  readonly rows: number;
+}
+
 /** Rows of zeros and the row that sums up, after each line's form; null where a form has no value there. */
-export function extraRows(frame: Frame, recipe: Recipe, rows: readonly number[]): number[][] | null {
+export function extraRows(recipe: Recipe, { totals, rows }: Summing): number[][] | null {
   const { zeros, summary } = recipe.rows;
-  const plain: number[][] = Array.from({ length: zeros }, () => frame.lines.map(() => 0));
-  if (summary !== "none") plain.push(summaryOf(frame, rows, summary));
+  const plain: number[][] = Array.from({ length: zeros }, () => recipe.lines.map(() => 0));
+  if (summary !== "none") plain.push(totals().map((sum) => (summary === "sum" ? sum : sum / Math.max(1, rows))));
   const made = plain.map((row) => row.map((value, index) => formed(value, recipe.lines[index]!.form)));
   const unused = (index: number): boolean => index !== recipe.model.outcome && !recipe.model.drivers.includes(index);
   const whole = made.map((row) => row.map((value, index) => (value === null && unused(index) ? 0 : value)));
   return whole.every((row): row is number[] => row.every((value) => value !== null)) ? whole : null;
 }
-
-const summaryOf = ({ lines }: Frame, rows: readonly number[], summary: "sum" | "mean"): number[] =>
-  lines.map(({ numbers }) => {
-    const sum = rows.reduce((total, row) => total + numbers[row]!, 0);
-    return summary === "sum" ? sum : sum / Math.max(1, rows.length);
-  });

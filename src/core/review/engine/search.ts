@@ -1,15 +1,16 @@
 import type { Candidate, Changes, Kept } from "./candidate.ts";
-import type { Change } from "./change.ts";
+import type { Change, Hypothesis } from "./change.ts";
 import { type Evidence, evidenceOf, fewestTelling, mostByChance } from "./evidence.ts";
 import { lineChanges } from "./lineChanges.ts";
-import { manyRowChanges } from "./manyRowChanges.ts";
+import { manyInPairs, manyRowChanges } from "./manyRowChanges.ts";
 import { modelChanges } from "./modelChanges.ts";
 import { looksAlone, looksInPairs } from "./looks.ts";
-import { type RowFacts, fewRowChanges } from "./rowChanges.ts";
+import type { Recipe, Run } from "./recipe.ts";
+import { fewRowChanges } from "./rowChanges.ts";
 import { underSameErrors } from "./sameErrors.ts";
 import { type Sieve, sieveOf } from "./sieve.ts";
 import { type Bench, type Trial, agreesThroughout, trial } from "./trial.ts";
-import { completeRows } from "./rowList.ts";
+import { completeRows, runsOf } from "./rowList.ts";
 import { lineValues } from "./lineValues.ts";
 
 /** Changes under which every reported number comes out, and which are worth believing. */
@@ -28,7 +29,7 @@ export interface Searched {
   /** How many fit the numbers shown, but would by chance as well. */
   readonly untelling: number;
   /** The sorts of changes that were tried. */
-  readonly tried: readonly Change[];
+  readonly tried: ReadonlySet<Hypothesis>;
   readonly inPairs: boolean;
 }
 
@@ -59,34 +60,36 @@ export function* search(bench: Bench, claimed: Trial | null): Generator<SearchSt
     const judged = judge(kept, { bench, claimed, sieve });
     untelling += judged.untelling;
     if (judged.found.length > 0 || index === stages.length - 1) {
-      const tried = [...changes.few, ...changes.many];
+      const tried = new Set([...changes.few.map(({ facts }) => facts.hypothesis), ...byTheRow]);
       return { found: judged.found, looked: sieve.looked(), untelling, tried, inPairs };
     }
   }
-  return { found: [], looked: 0, untelling, tried: [], inPairs: false };
+  return { found: [], looked: 0, untelling, tried: new Set(), inPairs: false };
 }
+
+const byTheRow: readonly Hypothesis[] = ["row-left-out", "rows-left-out", "block-repeated"];
 
 function changesOf({ frame, claim, claimed }: Bench): Changes {
   const lines = frame.lines.slice(0, frame.driverCount + 1);
   const complete = completeRows(lines.map((line, index) => lineValues(line, claimed.lines[index]!, frame)));
-  const facts: RowFacts = {
-    frame,
-    complete,
-    missing: missingRows(claim, complete.subarray(frame.first, frame.first + frame.count)),
+  const few = [...fewRowChanges({ frame, complete }), ...modelChanges(frame, claim), ...lineChanges(frame)];
+  const listed = manyInPairs(frame);
+  return {
+    few,
+    many: manyRowChanges({ frame, complete, missing: missingRows(claim, claimed, complete) }),
+    manyMore: (recipe, rows) => listed(rows, missingRows(claim, recipe, rows)),
   };
-  const few = [...fewRowChanges(facts), ...modelChanges(frame, claim), ...lineChanges(frame)];
-  return { few, many: manyRowChanges(facts) };
 }
 
-/** How many rows the report says it used, less those the claimed cells have. */
-function missingRows({ reported, drivers, constant }: Bench["claim"], complete: Uint8Array): number | null {
-  const have = complete.reduce((sum, byte) => sum + byte, 0);
-  const columns = drivers.length + (constant ? 1 : 0);
-  for (const { quantity, value } of reported) {
-    if (quantity.kind === "observations") return Math.round(value) - have;
-    if (quantity.kind === "degrees-of-freedom") return Math.round(value) + columns - have;
-  }
-  return null;
+/** How many rows the report says it used, less those that a recipe has. */
+function missingRows({ reported }: Bench["claim"], { rows, model }: Recipe, complete: Uint8Array): number | null {
+  const number = reported.find(({ quantity: { kind } }) => kind === "observations" || kind === "degrees-of-freedom");
+  if (number === undefined) return null;
+  const columns = model.drivers.length + (model.constant ? 1 : 0);
+  const used = Math.round(number.value) + (number.quantity.kind === "observations" ? 0 : columns);
+  const extra = rows.zeros + (rows.summary === "none" ? 0 : 1);
+  const counted = (run: Run): number => complete.subarray(run.from, run.to).reduce((sum, byte) => sum + byte, 0);
+  return used - runsOf(rows).reduce((sum, run) => sum + counted(run), extra);
 }
 
 /** The looks of a stage one after another; the generator pauses wherever they do. */

@@ -1,18 +1,12 @@
 import { type MomentModel, type MomentSolution, momentSolver } from "../../numeric/momentSolver.ts";
-import { type RunningMoments, addRow, addRun, packedLength, runningMoments } from "../../numeric/runningMoments.ts";
+import { packedLength } from "../../numeric/runningMoments.ts";
 import type { ReportedNumber } from "../claim.ts";
 import { type Moved, evidenceOf } from "./evidence.ts";
 import type { Frame } from "./frame.ts";
-import { lineValues } from "./lineValues.ts";
+import { madeLines } from "./madeLines.ts";
 import type { ModelRecipe, Recipe } from "./recipe.ts";
-import { completeRows, extraRows, runsOf } from "./rowList.ts";
 import { type SieveTarget, sieveTargets, targetValue } from "./sieveTargets.ts";
-
-/** The lines of a recipe summed up, so that any choice of rows and any model of them costs no pass over the rows. */
-export interface SummedUp {
-  readonly lines: Recipe["lines"];
-  readonly moments: RunningMoments;
-}
+import { type SummedUp, sumUp, sumUpOnce } from "./summedUp.ts";
 
 /** What the sieve lets through: it may reproduce the report, and its agreement may be worth something. */
 export interface Survivor {
@@ -21,8 +15,10 @@ export interface Survivor {
 }
 
 export interface Sieve {
-  /** @param helpers - whether columns beside the data are summed up too. */
-  readonly sumUp: (recipe: Recipe, helpers: boolean) => SummedUp;
+  /** For any number of looks, at columns beside the data too. */
+  readonly sumUp: (recipe: Recipe) => SummedUp;
+  /** For one look at the claimed columns over the claimed rows. */
+  readonly sumUpOnce: (recipe: Recipe) => SummedUp;
   /** Whether the numbers agree as far as moments tell; the chance is that of the sharpest reading of the report. */
   readonly look: (summed: SummedUp, recipe: Recipe) => Survivor | null;
   readonly looked: () => number;
@@ -44,18 +40,21 @@ export function sieveOf(frame: Frame, baseline: Baseline): Sieve {
   const solver = momentSolver(frame.lines.length + 1);
   const scratch = new Float64Array(packedLength(frame.lines.length + 1));
   const needsBreads = targets.some(({ needsBreads: needs }) => needs);
+  const made = madeLines(frame);
+  const modelFor = momentModels();
   let count = 0;
   return {
-    sumUp: (recipe, helpers) => sumUp(frame, recipe, helpers),
+    sumUp: (recipe) => sumUp(frame, recipe, made),
+    sumUpOnce: (recipe) => sumUpOnce(frame, recipe, made),
     looked: () => count,
     look: (summed, recipe) => {
       count++;
-      const { moments } = summed;
-      const target = scratch.subarray(0, packedLength(moments.size));
-      if (!gather(target, { frame, summed, recipe })) return null;
-      const model = momentModel(recipe.model, moments.size);
-      if (model === null || rowsDiffer(targets, target[0]!, model)) return null;
-      const solution = solver.solve(target, moments, model);
+      const { size } = summed.moved;
+      const model = modelFor(recipe.model, size);
+      if (model === null || rowsDiffer(targets, summed.rows(recipe.rows), model)) return null;
+      const target = scratch.subarray(0, packedLength(size));
+      if (!summed.gather(target, recipe)) return null;
+      const solution = solver.solve(target, summed.moved, model);
       if (solution === null) return null;
       if (needsBreads) solver.fillBreads();
       return passes(targets, recipe, solution) ? survivor(targets, { recipe, solution, errorsAtBest }) : null;
@@ -63,52 +62,21 @@ export function sieveOf(frame: Frame, baseline: Baseline): Sieve {
   };
 }
 
-function sumUp(frame: Frame, recipe: Recipe, helpers: boolean): SummedUp {
-  const claimed = frame.driverCount + 1;
-  const lines = frame.lines.slice(0, helpers ? undefined : claimed);
-  const values = lines.map((line, index) => lineValues(line, recipe.lines[index]!, frame));
-  const complete = completeRows(values.slice(0, claimed));
-  const typical = { from: frame.first, to: frame.first + frame.count };
-  const columns = values.map((line) => line.values);
-  return { lines: recipe.lines, moments: runningMoments(columns, complete, typical) };
+/** Models by their columns in the moments, each made once; null where one asks for a column that was not summed up. */
+function momentModels(): (recipe: ModelRecipe, size: number) => MomentModel | null {
+  const known = new WeakMap<ModelRecipe, MomentModel>();
+  return (recipe, size) => {
+    const found = known.get(recipe) ?? momentModel(recipe);
+    known.set(recipe, found);
+    return found.outcome < size && found.drivers.every((driver) => driver < size) ? found : null;
+  };
 }
 
-interface Gathering {
-  readonly frame: Frame;
-  readonly summed: SummedUp;
-  readonly recipe: Recipe;
-}
-
-/** The moments of the rows that count; false where a row counted in has no value. */
-function gather(target: Float64Array, { frame, summed: { moments }, recipe }: Gathering): boolean {
-  const { span, without, again, zeros, summary } = recipe.rows;
-  target.fill(0);
-  addRun(target, moments, { ...span, times: 1 });
-  for (const gap of without) {
-    const [from, to] = [Math.max(gap.from, span.from), Math.min(gap.to, span.to)];
-    if (from < to) addRun(target, moments, { from, to, times: -1 });
-  }
-  for (const run of again) addRun(target, moments, { ...run, times: 1 });
-  if (zeros === 0 && summary === "none") return true;
-  const rows = summary === "none" ? [] : countedRows(recipe, moments.complete);
-  const extra = extraRows(frame, recipe, rows);
-  for (const values of extra ?? []) addRow(target, moments, { values, times: 1 });
-  return extra !== null;
-}
-
-function countedRows(recipe: Recipe, complete: Uint8Array): number[] {
-  const rows: number[] = [];
-  for (const { from, to } of runsOf(recipe.rows)) {
-    for (let row = from; row < to; row++) if (complete[row] === 1) rows.push(row);
-  }
-  return rows;
-}
-
-/** Null where the model asks for a column that was not summed up. */
-function momentModel({ outcome, drivers, constant }: ModelRecipe, size: number): MomentModel | null {
-  if (outcome + 1 >= size || drivers.some((driver) => driver + 1 >= size)) return null;
-  return { outcome: outcome + 1, drivers: drivers.map((driver) => driver + 1), constant };
-}
+const momentModel = ({ outcome, drivers, constant }: ModelRecipe): MomentModel => ({
+  outcome: outcome + 1,
+  drivers: drivers.map((driver) => driver + 1),
+  constant,
+});
 
 /** The number of rows alone rules most changes out. */
 function rowsDiffer(targets: readonly SieveTarget[], rows: number, model: MomentModel): boolean {

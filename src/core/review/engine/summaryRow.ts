@@ -1,22 +1,30 @@
-import type { Frame } from "./frame.ts";
+import { sense } from "../../table/senses.ts";
+import type { Frame, FrameLine } from "./frame.ts";
 
 /** Sums typed with two decimals or more still agree to this share of themselves. */
 const tolerance = 1e-6;
 
-/** Whether a row below the claimed ones adds them up, or averages them, in any claimed line. */
+/**
+ * Whether a row below the claimed ones adds them up in any claimed line, or averages them in every line in which it
+ * holds a number: one value of many may be the mean of the others by chance.
+ */
 export function looksLikeSummary(frame: Frame, row: number): "sum" | "mean" | null {
-  const { lines, driverCount, first, count } = frame;
-  for (const { numbers } of lines.slice(0, driverCount + 1)) {
-    let sum = 0;
-    let rows = 0;
-    for (let above = first; above < Math.min(row, first + count); above++) {
-      if (above === row) continue;
-      sum += numbers[above]!;
-      rows += numbers[above] === 0 ? 0 : 1;
-    }
-    const near = (value: number): boolean => Math.abs(numbers[row]! - value) <= tolerance * Math.abs(value);
-    if (rows > 2 && sum !== 0 && near(sum)) return "sum";
-    if (rows > 2 && sum !== 0 && near(sum / rows)) return "mean";
+  const { lines, driverCount } = frame;
+  const filled = lines.slice(0, driverCount + 1).filter(({ senses }) => senses[row] === sense.number);
+  const made = filled.map((line) => madeOf(line, frame, row));
+  if (made.includes("sum")) return "sum";
+  return made.length > 0 && made.every((one) => one === "mean") ? "mean" : null;
+}
+
+function madeOf({ numbers }: FrameLine, { first, count }: Frame, row: number): "sum" | "mean" | null {
+  let sum = 0;
+  let rows = 0;
+  for (let above = first; above < Math.min(row, first + count); above++) {
+    if (above === row) continue;
+    sum += numbers[above]!;
+    rows += numbers[above] === 0 ? 0 : 1;
   }
-  return null;
+  const near = (value: number): boolean => Math.abs(numbers[row]! - value) <= tolerance * Math.abs(value);
+  if (rows <= 2 || sum === 0) return null;
+  return near(sum) ? "sum" : near(sum / rows) ? "mean" : null;
 }

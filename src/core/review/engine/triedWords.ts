@@ -4,9 +4,8 @@ import type { Searched } from "./search.ts";
 
 /** What was tried, in words, where nothing explains the report. */
 export function triedInWords({ tried, looked, untelling, inPairs }: Searched): readonly string[] {
-  const known = new Set(tried.map(({ facts }) => facts.hypothesis));
   const sorts = Object.entries(sortsInWords).flatMap(([words, hypotheses]) =>
-    hypotheses.some((one) => known.has(one)) ? [words] : [],
+    hypotheses.some((one) => tried.has(one)) ? [words] : [],
   );
   const count = numberInWords(looked, 0);
   const whole = inPairs ? `All of these alone and in pairs: ${count} changes in all.` : `${count} changes in all.`;
