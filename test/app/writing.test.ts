@@ -17,6 +17,26 @@ beforeEach(() => {
   ({ host, pane, questions, state, said, settled, read, answer, write } = bench);
 });
 
+describe("an answer as text", () => {
+  it("is made when asked for, with the data's fingerprint, and belongs to that answer alone", async () => {
+    await read();
+    await answer();
+    expect(state().answered?.memo).toBeNull();
+    pane.commands.makeMemo();
+    await expect.poll(() => state().answered?.memo).toMatch(/Fingerprint of the data \(SHA-256\): [0-9a-f]{64}/);
+    expect(state().answered?.memo).toContain(state().answered?.answer.title);
+    await answer();
+    expect(state().answered?.memo).toBeNull();
+  });
+
+  it("is not made without an answer", async () => {
+    await read();
+    pane.commands.makeMemo();
+    await settled();
+    expect(state().answered).toBeNull();
+  });
+});
+
 describe("writing", () => {
   it("writes the answer shown, live or kept, and says where", async () => {
     await read();

@@ -155,6 +155,19 @@ describe("the answer", () => {
     expect(await cases.getByRole("cell", { name: /the tests point here/ }).innerText()).toContain("Newey-West");
   });
 
+  it("can be copied as text for a memo", async () => {
+    await getAnswer(page);
+    await button(page, "Copy as text for a memo").click();
+    const field = page.getByRole("textbox", { name: "The answer as text" });
+    await field.waitFor();
+    const text = await field.inputValue();
+    expect(text).toMatch(/^Repairs explained by [\s\S]*WHAT HOLDS[\s\S]*DRIVERS[\s\S]*SHA-256[\s\S]*not financial/);
+    await page.context().grantPermissions(["clipboard-read", "clipboard-write"]);
+    await button(page, "Copy as text").last().click();
+    await page.getByText("Copied.").waitFor();
+    expect(await page.evaluate(() => navigator.clipboard.readText())).toBe(text);
+  });
+
   it("is written to the workbook, live or kept, with a way there", async () => {
     await getAnswer(page);
     await page.getByLabel("Live or kept").selectOption("kept");

@@ -146,4 +146,8 @@ export const answerFixture: Answer = {
   notes: [],
   options: defaultOptions,
   points: { fitted: [1, 2], residuals: [0.5, -0.5], rows: [2, 3], periods: [1, 2], thinned: false },
+  shape: {
+    correlations: { values: [0.5, -0.25], bound: 0.28 },
+    quantiles: { residuals: [-0.5, 0.5], normal: [-0.4, 0.4] },
+  },
 };

@@ -5,6 +5,7 @@ import type { ColumnSetup } from "../../src/app/setup.ts";
 import { holdsInWords, unusableCells } from "../../src/taskpane/data/columnWords.ts";
 import { derivationInWords } from "../../src/taskpane/answer/derivation.ts";
 import { intervalsInWords, kindFigures, writerFor } from "../../src/taskpane/answer/driverFigures.ts";
+import { correlationsInWords, quantilesInWords } from "../../src/taskpane/evidence/shapeWords.ts";
 import { groupTests, readingOfGroup } from "../../src/taskpane/evidence/testGroups.ts";
 import { largestResiduals, overFittedInWords, overRowsInWords } from "../../src/taskpane/evidence/residualWords.ts";
 import { pFigure } from "../../src/taskpane/parts/pFigure.ts";
@@ -170,5 +171,20 @@ describe("residuals in words", () => {
       { row: 2, words: "4 above the fitted 40" },
       { row: 3, words: "3 below the fitted 30" },
     ]);
+  });
+});
+
+describe("the shape of the residuals in words", () => {
+  it("names the lags outside the bounds", () => {
+    expect(correlationsInWords({ values: [0.5, -0.25, -0.4], bound: 0.28 })).toBe(
+      "Correlations of the residuals with their own past at lags 1 to 3, bounds ±0.28; outside the bounds: lag 1 (0.5) and lag 3 (−0.4).",
+    );
+    expect(correlationsInWords({ values: [0.1], bound: 0.28 })).toContain("none is outside the bounds");
+  });
+
+  it("tells how far the ends are from a normal law", () => {
+    expect(quantilesInWords({ residuals: [-5.25, 1, 3], normal: [-4, 0, 4] })).toBe(
+      "Residuals in order against a normal law of the same spread: the smallest is −5.25 where a normal law has −4, the largest 3 where a normal law has 4.",
+    );
   });
 });

@@ -3,7 +3,7 @@ import { decide } from "../decision/decide.ts";
 import { rulesOf } from "../decision/policies.ts";
 import { autocorrelationOrder } from "../decision/testOrder.ts";
 import { buildDesign } from "../design/buildDesign.ts";
-import type { Design } from "../design/design.ts";
+import type { Design, RowOrder } from "../design/design.ts";
 import type { Fit } from "../fit/fit.ts";
 import { fitLeastSquares } from "../fit/fitLeastSquares.ts";
 import { type Result, success } from "../problem/result.ts";
@@ -16,6 +16,7 @@ import { guardsOf } from "./guards.ts";
 import type { Options } from "./options.ts";
 import { residualPoints } from "./points.ts";
 import type { Question, Report } from "./question.ts";
+import { residualShape } from "./residualShape.ts";
 import { type RowPlaces, rowPlacesOf } from "./rowPlaces.ts";
 import { rowsSummary } from "./rowsSummary.ts";
 import { decidingTests, furtherTests } from "./runTests.ts";
@@ -43,7 +44,7 @@ function answerFrom(fit: Fit, { source, options }: Question, report: Report): Re
   const { design } = fit;
   const testOrder = autocorrelationOrder(design.order, fit.rowCount);
   const deciding = decidingTests(fit, testOrder, report);
-  const lags = design.order.kind === "time" ? lagsOf(fit, options.lags ?? rulesOf(options.policy).lags) : null;
+  const lags = asksLags(design.order, options) ? lagsOf(fit, options.lags ?? rulesOf(options.policy).lags) : null;
   const sizes = { rows: fit.rowCount, columns: fit.columnCount, lags: lags ?? 0 };
   const decided = decide({ tests: deciding, order: design.order, sizes, testOrder }, options);
   if (!decided.ok) return decided;
@@ -77,6 +78,10 @@ function answerFrom(fit: Fit, { source, options }: Question, report: Report): Re
   };
   return success(spoken(fit, found, { options, places }));
 }
+
+/** Within groups lags are asked for only where Newey-West is fixed by hand: the evidence calls for errors by group. */
+const asksLags = (order: RowOrder, { fixed }: Options): boolean =>
+  order.kind === "time" || (order.kind === "groups" && order.positions !== null && fixed?.errors === "newey-west");
 
 type Found = Pick<
   Answer,
@@ -114,6 +119,7 @@ function spoken(fit: Fit, found: Found, { options, places }: { options: Options;
     verdict,
     ...{ leftOut, leftOutCount, notes },
     points: residualPoints(fit, places),
+    shape: residualShape(fit),
   };
 }
 

@@ -58,6 +58,7 @@ export interface Answer {
   readonly notes: readonly string[];
   readonly options: Options;
   readonly points: ResidualPoints;
+  readonly shape: ResidualShape;
 }
 
 /** A test of the restrictions asked for, under each kind of standard errors. */
@@ -142,6 +143,14 @@ export type RowsSummary =
       /** The groups that cross them, where there are any. */
       readonly second: { readonly by: string; readonly groups: number } | null;
     };
+
+/** What the pictures of the residuals' own past and of their distribution show. */
+export interface ResidualShape {
+  /** r_1, r_2, ... and the bound that 95 % of them keep within if errors do not follow on; null where rows have no time. */
+  readonly correlations: { readonly values: readonly number[]; readonly bound: number } | null;
+  /** Residuals in ascending order, and where a normal law of the same spread would put them: at most 200 pairs. */
+  readonly quantiles: { readonly residuals: readonly number[]; readonly normal: readonly number[] };
+}
 
 /** Points for the pictures: at most 2,000, evenly thinned where there are more rows. */
 export interface ResidualPoints {

@@ -1,9 +1,8 @@
 import type { Fit } from "../fit/fit.ts";
 import { chiSquareTail } from "../numeric/distributions.ts";
-import { earlierRows, valuesAt } from "../numeric/earlierRows.ts";
-import { innerProduct } from "../numeric/sums.ts";
 import { type TestOutcome, computed, notApplicable } from "./outcome.ts";
-import { noTime, timeLineOf } from "./timeLine.ts";
+import { residualCorrelations } from "./residualCorrelations.ts";
+import { noTime } from "./timeLine.ts";
 
 /**
  * Ljung-Box test of the residuals' correlations with their own past, for each order asked for.
@@ -14,18 +13,11 @@ import { noTime, timeLineOf } from "./timeLine.ts";
  * @returns one outcome an order; not-applicable where rows do not run through time or p >= n.
  * @see Ljung and Box (1978), Biometrika 65, 297-303.
  */
-export function ljungBox(
-  { design, residuals, rowCount, residualSumOfSquares }: Fit,
-  orders: readonly number[],
-): TestOutcome[] {
-  const line = timeLineOf(design.order);
-  if (line === null) return orders.map((order) => notApplicable("ljung-box", noTime, order));
-  const most = Math.min(Math.max(...orders), rowCount - 1);
-  const parts = Array.from({ length: most }, (_, index) => {
-    const lag = index + 1;
-    const r = innerProduct(residuals, valuesAt(residuals, earlierRows(line, lag))) / residualSumOfSquares;
-    return r ** 2 / (rowCount - lag);
-  });
+export function ljungBox(fit: Fit, orders: readonly number[]): TestOutcome[] {
+  const { rowCount } = fit;
+  const correlations = residualCorrelations(fit, Math.min(Math.max(...orders), rowCount - 1));
+  if (correlations === null) return orders.map((order) => notApplicable("ljung-box", noTime, order));
+  const parts = correlations.map((r, index) => r ** 2 / (rowCount - index - 1));
   return orders.map((order) => {
     if (order >= rowCount) return notApplicable("ljung-box", `${rowCount} rows are too few for ${order} lags`, order);
     const statistic = rowCount * (rowCount + 2) * parts.slice(0, order).reduce((sum, part) => sum + part, 0);

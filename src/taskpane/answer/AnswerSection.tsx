@@ -5,6 +5,7 @@ import { usePane } from "../paneContext.ts";
 import { HelpHead } from "../help/HelpHead.tsx";
 import { Choice } from "./Choice.tsx";
 import { DriverList } from "./DriverList.tsx";
+import { Memo } from "./Memo.tsx";
 import { NoAnswer } from "./NoAnswer.tsx";
 import { OutdatedNotice } from "./OutdatedNotice.tsx";
 import { RowsUsed } from "./RowsUsed.tsx";
@@ -31,6 +32,7 @@ export function AnswerSection(): ReactNode {
       <DriverList answer={answer} />
       <h2 className={type.head}>Rows</h2>
       <RowsUsed answer={answer} />
+      <Memo />
       <p className={type.footnote}>{caution}</p>
     </>
   );

@@ -4,6 +4,9 @@ import { addressOf, parseAddress } from "../../core/table/address.ts";
 import { useType } from "../look/type.ts";
 import { CellList } from "../parts/CellList.tsx";
 import { ResidualPicture } from "../pictures/ResidualPicture.tsx";
+import { FiguresBehind } from "./FiguresBehind.tsx";
+import { OwnPast } from "./OwnPast.tsx";
+import { Quantiles } from "./Quantiles.tsx";
 import { largestResiduals, overFittedInWords, overRowsInWords } from "./residualWords.ts";
 
 const mostListed = 5;
@@ -14,7 +17,7 @@ interface ResidualsProps {
   readonly address: string;
 }
 
-/** Residuals over fitted values, over the rows where these run through time, and the rows that fit worst. */
+/** Residuals over fitted values, through time, against their own past and a normal law; the rows that fit worst. */
 export function Residuals({ answer, address }: ResidualsProps): ReactNode {
   const type = useType();
   const { points, observations } = answer;
@@ -23,6 +26,7 @@ export function Residuals({ answer, address }: ResidualsProps): ReactNode {
   const shown = points.fitted.length.toLocaleString("en-US");
   return (
     <>
+      <h3 className={type.subhead}>Over fitted values</h3>
       <ResidualPicture
         x={points.fitted}
         residuals={points.residuals}
@@ -34,7 +38,18 @@ export function Residuals({ answer, address }: ResidualsProps): ReactNode {
         A fan says that the spread is uneven, a bend that a curve is missing.
         {points.thinned && ` Shown are ${shown} of ${observations.toLocaleString("en-US")} rows.`}
       </p>
-      {answer.rows.kind === "time" && <OverRows answer={answer} />}
+      <FiguresBehind
+        picture="residuals over fitted values"
+        headings={["row", "fitted", "residual"]}
+        lines={points.rows.map((row, index) => ({
+          name: `row ${row}`,
+          cells: rowAddress(address, row),
+          figures: [points.fitted[index]!, points.residuals[index]!],
+        }))}
+      />
+      <ThroughTime answer={answer} address={address} />
+      <OwnPast answer={answer} />
+      <Quantiles answer={answer} />
       <h3 className={type.subhead}>Farthest from the fit{points.thinned && ", among the rows shown"}</h3>
       <CellList
         items={worst.map(({ row, words: said }) => ({ address: rowAddress(address, row), words: said }))}
@@ -44,20 +59,32 @@ export function Residuals({ answer, address }: ResidualsProps): ReactNode {
   );
 }
 
-function OverRows({ answer }: { readonly answer: Answer }): ReactNode {
+function ThroughTime({ answer, address }: ResidualsProps): ReactNode {
   const type = useType();
-  const { points } = answer;
+  const { points, rows } = answer;
   const words = useMemo(() => overRowsInWords(points), [points]);
+  if (rows.kind !== "time" || points.periods === null) return null;
+  const { unit } = rows.period;
   return (
     <>
+      <h3 className={type.subhead}>Through time</h3>
       <ResidualPicture
-        x={points.rows}
+        x={points.periods}
         residuals={points.residuals}
-        xTitle="row of the sheet"
+        xTitle={`${unit} (1 is ${rows.first})`}
         yTitle="residual"
         alternative={words}
       />
       <p className={type.remark}>Long runs on one side of zero say that the errors follow on.</p>
+      <FiguresBehind
+        picture="residuals through time"
+        headings={["row", unit, "residual"]}
+        lines={points.rows.map((row, index) => ({
+          name: `row ${row}`,
+          cells: rowAddress(address, row),
+          figures: [points.periods![index]!, points.residuals[index]!],
+        }))}
+      />
     </>
   );
 }
