@@ -85,7 +85,7 @@ export async function resultSheets(context: Excel.RequestContext): Promise<reado
   }));
   await context.sync();
   return found
-    .filter(({ mark }) => !mark.isNullObject)
+    .filter(({ mark }) => !mark.isNullObject && mark.value === sheetMark.value)
     .map(({ sheet, record }) => ({ sheet, record: record.isNullObject ? null : record.value }));
 }
 

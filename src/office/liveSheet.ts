@@ -1,11 +1,14 @@
 import type { Errand } from "../app/host.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";
 import { addressOf } from "../core/table/address.ts";
+import type { SheetPlan } from "../sheet/plan.ts";
 import { type Rectangle, rectangleOf, whereabouts } from "./areas.ts";
 import { rangeAt } from "./writeCells.ts";
 
 /** Stands on every sheet that Footing wrote; it travels with the workbook and outlives a change of the sheet's name. */
 export const sheetMark = { key: "Footing", value: "result sheet" } as const;
+
+export const markOf = ({ holds }: SheetPlan): string => (holds === "review" ? "review sheet" : sheetMark.value);
 
 type Done = Result<{ readonly sheet: string }>;
 

@@ -4,7 +4,7 @@ import type { SheetPlan } from "../sheet/plan.ts";
 import { drawCharts } from "./charts.ts";
 import type { ExcelClient } from "./client.ts";
 import { isExcelFault } from "./faults.ts";
-import { sheetMark } from "./liveSheet.ts";
+import { markOf, sheetMark } from "./liveSheet.ts";
 import { inExcel, inFront } from "./session.ts";
 import { freeSheetName } from "./sheetName.ts";
 import { addLinks, applyFormats, rangeAt, setWidths, writeBlocks } from "./writeCells.ts";
@@ -23,7 +23,7 @@ export function writePlan(client: ExcelClient, plan: SheetPlan, errand: Errand):
     const taken = worksheets.items.map((sheet) => sheet.name);
     const name = freeSheetName(plan.name, taken);
     const sheet = worksheets.add(name);
-    if (plan.holds !== "data") sheet.customProperties.add(sheetMark.key, sheetMark.value);
+    if (plan.holds !== "data") sheet.customProperties.add(sheetMark.key, markOf(plan));
     await inFront(() => context.sync());
     return finishOrTakeAway(sheet, () => fill(sheet, plan, { name, errand }));
   });

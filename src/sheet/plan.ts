@@ -2,8 +2,11 @@
 export interface SheetPlan {
   /** The wanted name; the host makes it unique ("Repairs answer", "Repairs answer 2"). */
   readonly name: string;
-  /** What stands on it where that is no result: data of the workbook from then on, like any others. */
-  readonly holds?: "data";
+  /**
+   * What stands on it where that is no answer: data of the workbook from then on, like any others, or a review, which
+   * has no data of its own that it could fall behind.
+   */
+  readonly holds?: "data" | "review";
   readonly blocks: readonly PlanBlock[];
   readonly formats: readonly PlanFormat[];
   readonly links: readonly PlanLink[];

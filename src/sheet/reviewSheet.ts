@@ -21,6 +21,7 @@ export function planReview(review: BookReview, facts: ReviewFacts): SheetPlan {
   const { rows, formats, links } = stack(parts);
   return {
     name: sheetName(review),
+    holds: "review",
     blocks: [{ row: 0, column: 0, cells: rectangle(rows, reviewColumns) }],
     formats: [evenRows(rows.length), ...formats],
     links,

@@ -38,15 +38,15 @@ export interface LabelledLine {
 
 export const labelledCells = ({ label, words }: LabelledLine): PlanCell[] => [text(label), text(words)];
 
-export const labelledFormats = (row: number, { words, style }: LabelledLine): PlanFormat[] => [
-  { area: { row, column: 0, rows: 1, columns: 1 }, style: style === "sentence" ? "label" : style },
+export const labelledFormats = (row: number, { label, words, style }: LabelledLine): PlanFormat[] => [
+  { area: { row, column: 0, rows: 1, columns: 1 }, style: style === "sentence" ? "label" : style, wrap: true },
   {
     area: { row, column: wordsColumn, rows: 1, columns: reviewColumns - wordsColumn },
     style,
     merge: true,
     wrap: true,
     align: "left",
-    rowHeight: heightOver(words, wordsColumn),
+    rowHeight: Math.max(heightOver(label, 0, 0), heightOver(words, wordsColumn)),
   },
 ];
 
