@@ -59,7 +59,7 @@ const addIn = (mode, serving) => ({
     clean: { keep: /^(desk\/|terminal)/ },
   },
   plugins: [
-    new FunctionsFiles({ metadata: at("src/functions/metadata.ts"), footingUrl }),
+    new FunctionsFiles({ help: at("src/functions/help.ts"), footingUrl }),
     new CopyPlugin({
       patterns: [
         { from: at("src/entries/taskpane.html") },

@@ -6,6 +6,7 @@ import { join } from "node:path";
 import { promisify } from "node:util";
 import { gzipSync } from "node:zlib";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
+import { settingTable } from "../src/core/answer/settingTable.ts";
 import { functionsMetadata } from "../src/functions/metadata.ts";
 
 const run = promisify(execFile);
@@ -81,6 +82,11 @@ describe("what Excel reads of the functions", () => {
       expect(part).toContain(`FOOTING.${name}`);
       for (const parameter of parameters) expect(part).toContain(`<dt>${parameter.name}</dt>`);
     }
+    const settings = help.slice(help.indexOf('id="every-setting"')).split("</section>")[0]!;
+    for (const { name } of settingTable) expect(settings).toContain(`<dt>${name}</dt>`);
+    const ids = [...help.matchAll(/ id="([^"]+)"/g)].map(([, id]) => id);
+    expect(new Set(ids).size).toBe(ids.length);
+    for (const [, target] of help.matchAll(/ href="#([^"]+)"/g)) expect(ids).toContain(target);
   });
 });
 

@@ -6,8 +6,8 @@ const plugin = "FunctionsFiles";
 
 /** Emits functions.json, which Excel reads, and help.html, which each function's help link opens, from the function table. */
 export class FunctionsFiles {
-  constructor({ metadata, footingUrl }) {
-    this.metadata = metadata;
+  constructor({ help, footingUrl }) {
+    this.help = help;
     this.footingUrl = footingUrl;
   }
 
@@ -19,12 +19,12 @@ export class FunctionsFiles {
   }
 
   async emit(compilation) {
-    const { module, files } = await load(this.metadata);
+    const { module, files } = await load(this.help);
     files.forEach((file) => compilation.fileDependencies.add(file));
-    const metadata = module.functionsMetadata();
-    const json = JSON.stringify(metadata, null, 2).replaceAll("FOOTING_URL", this.footingUrl);
+    const help = module.functionsHelp();
+    const json = JSON.stringify(help.metadata, null, 2).replaceAll("FOOTING_URL", this.footingUrl);
     compilation.emitAsset("functions.json", new webpack.sources.RawSource(json));
-    compilation.emitAsset("help.html", new webpack.sources.RawSource(helpPage(metadata)));
+    compilation.emitAsset("help.html", new webpack.sources.RawSource(helpPage(help)));
   }
 }
 

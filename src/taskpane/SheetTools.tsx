@@ -1,5 +1,6 @@
 import { Button, makeStyles, mergeClasses, tokens } from "@fluentui/react-components";
 import type { ReactNode } from "react";
+import { cellSigns } from "../app/cellSigns.ts";
 import { Disclosure } from "./parts/Disclosure.tsx";
 import { useType } from "./look/type.ts";
 import { usePane } from "./paneContext.ts";
@@ -57,27 +58,12 @@ function Tools(): ReactNode {
   );
 }
 
-const signs: readonly (readonly [sign: string, meaning: string])[] = [
-  [
-    "#NAME?",
-    "The add-in is not loaded here. Open Footing once in this workbook, then recalculate; who has no add-in needs a kept sheet.",
-  ],
-  [
-    "#BUSY!",
-    "The function is still at work. The value comes by itself; if it stays away, recalculate this sheet's functions.",
-  ],
-  [
-    "#SPILL!",
-    "Something stands in the cells that the result needs. Empty the cells below and to the right of the formula, or move it.",
-  ],
-];
-
 function Signs(): ReactNode {
   const styles = useStyles();
   const type = useType();
   return (
     <dl className={styles.signs} aria-label="What the signs mean">
-      {signs.map(([sign, meaning]) => (
+      {cellSigns.map(([sign, meaning]) => (
         <div key={sign}>
           <dt className={styles.sign}>{sign}</dt>
           <dd className={mergeClasses(type.remark, styles.meaning)}>{meaning}</dd>
