@@ -24,9 +24,14 @@ export function answerJson(answer: Answer, predicted: Predicted | null = null): 
 
 const standardErrorsJson = (errors: Answer["standardErrors"]): object => ({
   ...errors,
-  neweyWest: errors.neweyWest ?? { notApplicable: "Rows do not run through time." },
+  neweyWest: errors.neweyWest ?? { notApplicable: notThroughTime(errors) },
   grouped: errors.grouped ?? { notApplicable: "Rows are not in groups." },
 });
+
+const notThroughTime = ({ grouped }: Answer["standardErrors"]): string =>
+  grouped === null
+    ? "Rows do not run through time."
+    : "Rows are in groups: Newey-West within them is given where it is fixed and the time within groups is known.";
 
 function choiceJson({ decision, lags, inference }: Answer): object {
   const { errors, reference } = decision.inForce;

@@ -59,7 +59,9 @@ export const againstOf = ({ design }: Fit, { against }: Options): number[] =>
   );
 
 function agreeingKinds(inference: Answer["inference"]): string {
-  if (inference.neweyWest !== null) return "all three kinds of standard error";
+  if (inference.neweyWest !== null) {
+    return `all ${inference.grouped === null ? "three" : "four"} kinds of standard error`;
+  }
   return inference.grouped === null
     ? "classical and White standard errors"
     : "classical, White and grouped standard errors";

@@ -32,7 +32,7 @@ export function answerTable(answer: Answer): Grid {
     driver.coefficient,
     at(inference.classical.standardErrors, row),
     at(inference.white.standardErrors, row),
-    at((inference.neweyWest ?? inference.grouped)?.standardErrors, row),
+    at((inference.grouped ?? inference.neweyWest)?.standardErrors, row),
     driver.standardError,
     driver.ratio,
     driver.pValue,

@@ -82,8 +82,12 @@ function caseOf(consulted: readonly Consulted[], order: RowOrder): FourCase {
   };
 }
 
-const fits = (kind: ErrorsChoice["kind"], order: RowOrder): boolean =>
-  kind === "newey-west" ? order.kind === "time" : kind === "grouped" ? order.kind === "groups" : true;
+/** Newey-West needs time; where rows are in groups, the time within each. */
+function fits(kind: ErrorsChoice["kind"], order: RowOrder): boolean {
+  if (kind === "grouped") return order.kind === "groups";
+  if (kind !== "newey-west" || order.kind === "time") return true;
+  return order.kind === "groups" && order.positions !== null;
+}
 
 /** A kind with its settings and the law the policy compares its ratios with. */
 export function chosen(

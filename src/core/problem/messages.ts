@@ -184,7 +184,7 @@ const sentences: { readonly [Code in Problem["code"]]: (problem: Extract<Problem
     "Leave the driver out, or join its category with another.",
   ],
   "errors-need-order": ({ errors, rows }) => [
-    `${errors === "newey-west" ? "Newey-West standard errors need rows that run through time" : "Grouped standard errors need rows in groups"}, but here rows are ${rows === "time" ? "through time" : rows === "groups" ? "in groups" : "separate cases"}.`,
+    `${errors === "newey-west" ? "Newey-West standard errors need rows that run through time" : "Grouped standard errors need rows in groups"}, but here rows are ${rows === "time" ? "through time" : rows === "groups" ? "in groups, and no column gives the time within them" : "separate cases"}.`,
     "Say otherwise what the rows are to each other, or choose another kind of standard errors.",
   ],
   "unknown-setting": ({ setting, nearest }) => [

@@ -4,13 +4,14 @@ import type { Answer } from "../../../src/core/answer/answer.ts";
 import { inquire } from "../../../src/core/answer/inquire.ts";
 import { type Parts, modelOf } from "../../../src/core/answer/modelOf.ts";
 import { readSettings, settingPairs } from "../../../src/core/answer/settings.ts";
+import { answerTable } from "../../../src/core/answer/tables.ts";
 import { chow } from "../../../src/core/diagnostics/chow.ts";
 import { buildDesign } from "../../../src/core/design/buildDesign.ts";
 import { fitLeastSquares } from "../../../src/core/fit/fitLeastSquares.ts";
 import type { Question } from "../../../src/core/answer/question.ts";
 import type { Result } from "../../../src/core/problem/result.ts";
 import type { Cell } from "../../../src/core/table/cells.ts";
-import { directErrors, expectAllDigits } from "../../support/referenceErrors.ts";
+import { directErrors, expectAllDigits, statsmodelsErrors } from "../../support/referenceErrors.ts";
 import { reference } from "../../support/referenceFit.ts";
 import { toCellColumn } from "../../support/cellColumns.ts";
 
@@ -71,6 +72,31 @@ describe("what settings reach", () => {
       "There are only 11 groups by Firm: standard errors by group are then often too small.",
       "There are only 20 groups by Year: standard errors by group are then often too small.",
     ]);
+  });
+
+  it("Newey-West within groups, fixed by hand, with no lag from one group into the next", () => {
+    const { y, X, drivers, group } = reference("grunfeld");
+    const columns = {
+      Outcome: y,
+      ...Object.fromEntries(drivers.map((name, j) => [name, X[j]!])),
+      Firm: group!.map(String),
+      Year: y.map((_, i) => 1935 + (i % 20)),
+    };
+    const { lags, unadjusted } = statsmodelsErrors["grunfeld"]!["newey-west in groups"]!;
+    const asked: Parts = { outcome: "Outcome", drivers, key: "Firm", keyIs: "groups", order: "Year" };
+    const settings = `errors: newey-west; lags: ${lags}; small-sample factor: no`;
+    const answer = answerTo(questionOf(columns, settings, asked));
+    expectAllDigits(answer.inference.inForce.standardErrors, unadjusted, 10);
+    expect(answer.standardErrors.neweyWest?.lags).toBe(lags);
+    expect(answer.decision.called.errors.kind).toBe("grouped");
+    expect(answerTable(answer)[0]![4]).toBe("grouped");
+    expect(answerTable(answer)[2]!.slice(4, 6)).toEqual([
+      answer.standardErrors.grouped!.CR1[1],
+      answer.inference.neweyWest!.standardErrors[1],
+    ]);
+    expect(answerTo(questionOf(columns, "", asked)).standardErrors.neweyWest).toBeNull();
+    const timeless = analyse(questionOf(columns, settings, { ...asked, order: null }), () => undefined);
+    expect(timeless).toMatchObject({ problem: { code: "errors-need-order", errors: "newey-west", rows: "groups" } });
   });
 
   it("a curve: a column and its square, with its turning point, and predictions along it", () => {

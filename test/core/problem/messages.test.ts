@@ -358,6 +358,9 @@ describe("messageOf", () => {
     expect(messageOf({ code: "errors-need-order", errors: "grouped", rows: "time" })).toMatch(
       /^Grouped standard errors need rows in groups, but here rows are through time\./,
     );
+    expect(messageOf({ code: "errors-need-order", errors: "newey-west", rows: "groups" })).toContain(
+      "but here rows are in groups, and no column gives the time within them.",
+    );
     expect(messageOf({ code: "calendar-needs-dates", driver: "trend", column: null })).toMatch(/but there is none\./);
     expect(messageOf({ code: "too-few-rows", rows: 1, needed: 3, leftOut: 0 })).toBe(
       "1 row can be used, but this regression needs at least 3. Bring in more rows or use fewer drivers.",
