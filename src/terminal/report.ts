@@ -33,7 +33,20 @@ function table(answer: Answer): string[] {
   const cells = answerTable(answer).map((row) =>
     row.map((value) => (typeof value === "number" ? shown(value) : value)),
   );
-  return alignedLines(cells);
+  const normal = normalColumn(answer);
+  const place = (cells[0] ?? []).indexOf("p-value") + 1;
+  return alignedLines(normal === null ? cells : cells.map((row, i) => row.toSpliced(place, 0, normal[i] ?? "")));
+}
+
+/**
+ * The p-value by the normal law of large samples, beside the one in force where they differ in the second digit; null
+ * where none does.
+ */
+function normalColumn({ inference: { inForce } }: Answer): string[] | null {
+  const values = inForce.pValueNormal.map((p, row) =>
+    p.toPrecision(2) === (inForce.pValue[row] ?? p).toPrecision(2) ? "" : shown(p),
+  );
+  return values.every((value) => value === "") ? null : ["by the normal", ...values];
 }
 
 const shown = (value: number): string => String(Number(value.toPrecision(5)));

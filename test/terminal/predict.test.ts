@@ -30,6 +30,17 @@ interface Told {
   };
 }
 
+describe("the drivers in columns", () => {
+  it("have the p-value by the normal law beside the one in force where the second digit differs", async () => {
+    const headingsOf = async (...more: string[]) => {
+      const { out } = await ask(...more);
+      return out.split("\n").find((line) => line.startsWith("driver"));
+    };
+    expect(await headingsOf()).toMatch(/ratio +p-value +by the normal +low +high/);
+    expect(await headingsOf("--policy", "textbook", "--errors", "white")).toMatch(/ratio +p-value +low +high/);
+  });
+});
+
 describe("--predict", () => {
   it("predicts rows of a range by their headings, in full precision under --json", async () => {
     const { out, err } = await ask("--predict", "E2:F5", "--json");
