@@ -38,14 +38,13 @@ ${notes.map(noteSection).join("\n")}
 
 const anchor = (name) => escape(name.toLowerCase().replace(/[^a-z0-9]+/g, "-"));
 
-function section({ id, description, gives, parameters }) {
-  const parameterNames = parameters.map((parameter) => (parameter.optional ? `[${parameter.name}]` : parameter.name));
+function section({ id, call, description, gives, parameters }) {
   const list = parameters.map(
     ({ name: parameter, description: meaning }) => `<dt>${escape(parameter)}</dt><dd>${escape(meaning)}</dd>`,
   );
   return `<section id="${anchor(id)}">
 <h2>FOOTING.${escape(id)}</h2>
-<p><code>=FOOTING.${escape(id)}(${escape(parameterNames.join(", "))})</code></p>
+<p><code>${escape(call)}</code></p>
 <p>${escape(description)}</p>
 <p>Gives: ${escape(gives)}</p>
 ${list.length === 0 ? "" : `<dl>\n${list.join("\n")}\n</dl>`}

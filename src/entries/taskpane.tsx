@@ -3,12 +3,14 @@ import { createRoot } from "react-dom/client";
 import packageFile from "../../package.json" with { type: "json" };
 import { detailsOf } from "../app/faultDetails.ts";
 import { createPane } from "../app/pane.ts";
+import { listedFunctions } from "../functions/listed.ts";
 import { pageClient } from "../office/client.ts";
 import { excelHost } from "../office/excelHost.ts";
 import { floor } from "../office/session.ts";
 import { Outside, type WhyOutside } from "../taskpane/Outside.tsx";
 import { PaneApp } from "../taskpane/PaneApp.tsx";
 import { inlineAnalyst } from "../worker/inlineAnalyst.ts";
+import { lateReviewer } from "../worker/lateReviewer.ts";
 import type { WorkerLine } from "../worker/protocol.ts";
 import { workerAnalyst } from "../worker/workerAnalyst.ts";
 
@@ -22,7 +24,7 @@ const patienceMs = 15_000;
 
 const pane = createPane({
   host: excelHost(),
-  analyst: workerAnalyst({ hire, fallback: inlineAnalyst, seconds: 600 }),
+  analyst: workerAnalyst({ hire, fallback: { ...inlineAnalyst, ...lateReviewer }, seconds: 600 }),
   edition: { today: () => day.format(new Date()), version: packageFile.version },
   guard: (work) => void work().catch(showFault),
 });
@@ -55,7 +57,13 @@ const giveUp = setTimeout(() => show(<Outside why={{ kind: "no host" }} hostIsDa
 function meetHost(host: Office.HostType | null): void {
   clearTimeout(giveUp);
   const why = whyOutside(host);
-  show(why === null ? <PaneApp pane={pane} hostIsDark={hostIsDark} /> : <Outside why={why} hostIsDark={hostIsDark} />);
+  show(
+    why === null ? (
+      <PaneApp pane={pane} hostIsDark={hostIsDark} functions={listedFunctions} />
+    ) : (
+      <Outside why={why} hostIsDark={hostIsDark} />
+    ),
+  );
 }
 
 /** null where Excel answers and has what is used. */

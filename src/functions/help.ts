@@ -1,6 +1,6 @@
 import { cellSigns } from "../app/cellSigns.ts";
 import { settingTable } from "../core/answer/settingTable.ts";
-import { functionTable } from "./functionTable.ts";
+import { listedFunctions } from "./listed.ts";
 import { functionsMetadata } from "./metadata.ts";
 
 /** Signs with a sentence of their own beside them. */
@@ -32,7 +32,7 @@ const notes: readonly (readonly [heading: string, words: string])[] = [
 /** All that the page behind the functions' help links says. */
 export const functionsHelp = () => ({
   metadata: functionsMetadata(),
-  functions: functionTable,
+  functions: listedFunctions,
   settings: settingTable.map(({ name, values, standard, meaning }) => ({ name, values, standard, meaning })),
   signs: [...cellSigns, ...ownSigns],
   notes,

@@ -15,6 +15,7 @@ const useStyles = makeStyles({
   },
   signs: { margin: `${tokens.spacingVerticalXS} 0 0` },
   sign: { fontWeight: tokens.fontWeightSemibold, fontSize: tokens.fontSizeBase200 },
+  call: { overflowWrap: "anywhere" },
   meaning: { margin: `0 0 ${tokens.spacingVerticalS}` },
 });
 
@@ -51,10 +52,29 @@ function Tools(): ReactNode {
         A kept sheet holds values alone and needs no add-in where it is read. Formulas are replaced on sheets that
         Footing wrote, and on no others.
       </p>
+      <Disclosure label="The worksheet functions">
+        <Functions />
+      </Disclosure>
       <Disclosure label="What #NAME?, #BUSY! and #SPILL! mean">
         <Signs />
       </Disclosure>
     </>
+  );
+}
+
+function Functions(): ReactNode {
+  const styles = useStyles();
+  const type = useType();
+  const { functions } = usePane();
+  return (
+    <dl className={styles.signs} aria-label="The worksheet functions">
+      {functions.map(({ call, description }) => (
+        <div key={call}>
+          <dt className={mergeClasses(styles.sign, styles.call)}>{call}</dt>
+          <dd className={mergeClasses(type.remark, styles.meaning)}>{description}</dd>
+        </div>
+      ))}
+    </dl>
   );
 }
 

@@ -2,6 +2,7 @@ import { readFile } from "node:fs/promises";
 import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from "vitest";
 import type { Download, Page } from "playwright-core";
 import { demoBook } from "../../src/desk/demo/demoBook.ts";
+import { listedFunctions } from "../../src/functions/listed.ts";
 import { openXlsx } from "../../src/desk/files/openXlsx.ts";
 import { atSheet, startDeskSuite, type DeskPage, type DeskSuite } from "./support/deskPage.ts";
 
@@ -62,6 +63,13 @@ describe("the desk", { timeout: 180_000 }, () => {
     );
     expect(samples.length).toBeGreaterThan(10);
     for (const [name, value] of samples) expect(value, String(name)).not.toBe("");
+  });
+
+  it("lists every worksheet function in the pane", async () => {
+    await desk.pane.getByRole("button", { name: "Functions in the sheet in front" }).click();
+    await desk.pane.getByRole("button", { name: "The worksheet functions" }).click();
+    const calls = await desk.pane.getByText(/^=FOOTING\./).allTextContents();
+    expect(calls).toEqual(listedFunctions.map(({ call }) => call));
   });
 
   it("saves the workbook, opens it again and finds the same", async () => {

@@ -4,6 +4,7 @@ import { type Pane, createPane } from "../../../src/app/pane.ts";
 import type { Problem } from "../../../src/core/problem/problem.ts";
 import { failure, success } from "../../../src/core/problem/result.ts";
 import type { BookClaims } from "../../../src/core/review/claimsOf.ts";
+import { listedFunctions } from "../../../src/functions/listed.ts";
 import { PaneApp } from "../../../src/taskpane/PaneApp.tsx";
 import { inlineAnalyst } from "../../../src/worker/inlineAnalyst.ts";
 import { type FakeHost, fakeHost } from "../../support/fakeHost.ts";
@@ -76,4 +77,6 @@ const pane = createPane({
 const { claims, unread, craft } = bookReviewFixture;
 const listed: BookClaims = { claims: claims.map(({ claim }) => claim), unread, craft };
 window.stage = { host, pane, hold: null, refusal: null, listed, hostIsDark: null };
-createRoot(document.getElementById("pane")!).render(<PaneApp pane={pane} hostIsDark={() => window.stage.hostIsDark} />);
+createRoot(document.getElementById("pane")!).render(
+  <PaneApp pane={pane} hostIsDark={() => window.stage.hostIsDark} functions={listedFunctions} />,
+);
