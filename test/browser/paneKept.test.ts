@@ -60,7 +60,7 @@ describe("stored set-ups", () => {
     await getAnswer(page);
     await store("One");
     await store("Two");
-    await page.getByLabel("Store what is chosen above as").fill("one");
+    await page.getByLabel("Store this set-up as").fill("one");
     await page.getByText("Another set-up has this name.").waitFor();
   });
 

@@ -58,7 +58,7 @@ interface Remedy {
 /** A sheet is written again only where its own cells changed, or where it is all that is behind. */
 function remedyFor(outdated: Outdated | null, sheet: Written | null, commands: Commands): Remedy {
   if (sheet === null || outdated?.because === "set-up") return { label: "Answer again", mend: commands.answer };
-  if (outdated === null) return { label: "Write it again", mend: () => commands.write(sheet.kind) };
+  if (outdated === null) return { label: "Redo the sheet", mend: commands.redo };
   return { label: "Redo answer and sheet", mend: commands.redo };
 }
 

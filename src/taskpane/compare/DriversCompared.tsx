@@ -1,7 +1,8 @@
 import type { ReactNode } from "react";
 import type { DriverAnswer } from "../../core/answer/answer.ts";
-import { confidenceInWords, decimalsFor, numberInWords } from "../../core/answer/wording.ts";
+import { confidenceInWords } from "../../core/answer/wording.ts";
 import { type ComparedDriver, type ComparedModel, comparedDrivers } from "../../sheet/comparison.ts";
+import { standardErrorInWords, writerFor } from "../answer/driverFigures.ts";
 import { FirmnessMark } from "../answer/FirmnessMark.tsx";
 import { pFigure } from "../parts/pFigure.ts";
 import { useTableLook } from "./tableLook.ts";
@@ -37,17 +38,12 @@ export function DriversCompared({ models }: ModelsProps): ReactNode {
 type Line = readonly [label: string, figure: (driver: DriverAnswer, model: ComparedModel) => ReactNode];
 
 const lines = (confidence: string): readonly Line[] => [
-  ["coefficient", (driver) => <strong>{written(driver, driver.coefficient)}</strong>],
-  ["standard error", (driver) => written(driver, driver.standardError)],
-  [`${confidence} interval`, (driver) => `${written(driver, driver.low)} to ${written(driver, driver.high)}`],
+  ["coefficient", (driver) => <strong>{writerFor(driver)(driver.coefficient)}</strong>],
+  ["standard error", (driver) => standardErrorInWords(driver.standardError)],
+  [`${confidence} interval`, (driver) => `${writerFor(driver)(driver.low)} to ${writerFor(driver)(driver.high)}`],
   ["p-value", (driver, { answer }) => pFigure(driver.pValue, answer.options.level)],
   ["firm or leaning", (driver) => <Firmness driver={driver} />],
 ];
-
-/** To what the standard error in force supports. */
-function written({ low, high }: DriverAnswer, value: number): string {
-  return numberInWords(value, decimalsFor((high - low) / 2)).replace("-", "\u2212");
-}
 
 const Firmness = ({ driver }: { readonly driver: DriverAnswer }): ReactNode => (
   <>

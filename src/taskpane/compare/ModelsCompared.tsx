@@ -27,7 +27,7 @@ export function ModelsCompared({ models }: ModelsProps): ReactNode {
               </th>
               {values.map((value, index) => (
                 <td key={models[index]!.name} className={look.cell}>
-                  {typeof value === "number" ? figure.format(value) : value}
+                  {typeof value === "number" ? written(value) : value}
                 </td>
               ))}
             </tr>
@@ -38,4 +38,8 @@ export function ModelsCompared({ models }: ModelsProps): ReactNode {
   );
 }
 
-const figure = new Intl.NumberFormat("en-US", { maximumSignificantDigits: 6 });
+const fourDigits = new Intl.NumberFormat("en-US", { maximumSignificantDigits: 4 });
+
+/** Counts in full, figures of fit to four digits. */
+const written = (value: number): string =>
+  Number.isInteger(value) ? value.toLocaleString("en-US") : fourDigits.format(value).replace("-", "\u2212");

@@ -1,4 +1,4 @@
-import { Button } from "@fluentui/react-components";
+import { Button, makeStyles, mergeClasses, tokens } from "@fluentui/react-components";
 import type { ReactNode } from "react";
 import { HelpHead } from "../help/HelpHead.tsx";
 import { useType } from "../look/type.ts";
@@ -71,13 +71,18 @@ function FirstRun(): ReactNode {
   );
 }
 
+const useStyles = makeStyles({ sample: { marginTop: tokens.spacingVerticalL } });
+
 /** For someone who has no data at hand, or wants to see first what comes out. */
 function Sample(): ReactNode {
+  const styles = useStyles();
   const type = useType();
   const { state, commands } = usePane();
   return (
     <>
-      <p className={type.remark}>No data at hand? Invented figures of 96 months go onto a new sheet of their own.</p>
+      <p className={mergeClasses(type.remark, styles.sample)}>
+        No data at hand? Invented figures of 96 months go onto a new sheet of their own.
+      </p>
       <Button size="small" disabledFocusable={state.busy !== null} onClick={commands.insertSample}>
         Insert sample data
       </Button>

@@ -14,7 +14,8 @@ const useStyles = makeStyles({
   },
   name: { minWidth: 0, overflowWrap: "anywhere", gridColumn: "2" },
   remark: { margin: 0 },
-  buttons: { display: "flex", flexWrap: "wrap", gap: tokens.spacingHorizontalXS, marginTop: tokens.spacingVerticalXS },
+  // The words of a button without a frame stand in line with the name.
+  buttons: { display: "flex", flexWrap: "wrap", margin: `${tokens.spacingVerticalXS} 0 0 -8px` },
 });
 
 export interface SetupEntryProps {
@@ -88,6 +89,7 @@ const useForm = makeStyles({
     alignItems: "end",
     marginTop: tokens.spacingVerticalXS,
   },
+  question: { margin: 0, alignSelf: "center" },
 });
 
 function Renaming({ name, onDone }: DoingProps): ReactNode {
@@ -119,7 +121,7 @@ function Removing({ name, onDone }: DoingProps): ReactNode {
   const { commands } = usePane();
   return (
     <div className={styles.form} role="group" aria-label={`Remove ${name}`}>
-      <span className={type.remark}>It cannot be brought back.</span>
+      <span className={mergeClasses(type.remark, styles.question)}>It cannot be brought back.</span>
       <Button size="small" onClick={() => commands.removeSetup(name)}>
         Remove it
       </Button>

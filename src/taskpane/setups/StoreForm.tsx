@@ -31,7 +31,7 @@ export function StoreForm(): ReactNode {
   return (
     <form className={styles.form} onSubmit={store}>
       <TextField
-        label="Store what is chosen above as"
+        label="Store this set-up as"
         placeholder="Repairs by month"
         value={name}
         onText={setTyped}

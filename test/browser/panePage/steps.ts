@@ -27,7 +27,7 @@ export async function getAnswer(page: Page): Promise<void> {
 
 /** Stores what is chosen in the Data section. */
 export async function storeAs(page: Page, name: string): Promise<void> {
-  await page.getByLabel("Store what is chosen above as").fill(name);
+  await page.getByLabel("Store this set-up as").fill(name);
   await page.keyboard.press("Enter");
   await page.getByRole("button", { name: `Open ${name}`, exact: true }).waitFor();
 }
