@@ -278,6 +278,21 @@ describe("evidence", () => {
     await openTab(page, "Evidence");
     await page.getByRole("img", { name: /^Residuals of 94 rows over the fitted values, from/ }).waitFor();
     await page.getByRole("img", { name: /^Residuals in the order of the rows/ }).waitFor();
+    await page.getByRole("img", { name: /^Correlations of the residuals .* at lags 1 to 23, bounds ±0.2/ }).waitFor();
+    await page.getByRole("img", { name: /^Residuals in order against a normal law/ }).waitFor();
+    for (const picture of ["over fitted", "through time", "own past", "normal law"]) {
+      await button(page, new RegExp(`^Figures behind it .*${picture}`)).click();
+      await page
+        .getByRole("region", { name: new RegExp(picture) })
+        .getByRole("row")
+        .nth(3)
+        .waitFor();
+    }
+    await page
+      .getByRole("region", { name: /through time/ })
+      .getByRole("button", { name: "row 3", exact: true })
+      .click();
+    expect(await page.evaluate(() => window.stage.host.gone.splice(0))).toEqual(["Months!A3:F3"]);
     await page
       .getByRole("button", { name: /^A\d+:F\d+$/ })
       .first()

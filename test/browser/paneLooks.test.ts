@@ -69,6 +69,31 @@ const states: Readonly<Record<string, (page: Page) => Promise<void>>> = {
   evidence: async (page) => {
     await getAnswer(page);
     await openTab(page, "Evidence");
+    await open(page, /^Figures behind it .*over fitted/, /^Figures behind it .*own past/);
+  },
+  help: async (page) => {
+    await getAnswer(page);
+    await open(page, /Help: Why three kinds/);
+  },
+  memo: async (page) => {
+    await getAnswer(page);
+    await open(page, "Copy as text for a memo");
+    await page.getByRole("textbox", { name: "The answer as text" }).waitFor();
+  },
+  "data in groups": async (page) => {
+    await useSelection(page);
+    await roleOf(page, "Shop").selectOption("group");
+    await roleOf(page, "Month").selectOption("second group");
+    await open(page, /^Advertising/, /95 % intervals/);
+    await page.getByLabel("Enters a second time").selectOption({ label: "its value some periods earlier" });
+  },
+  "a break to name": async (page) => {
+    await useSelection(page);
+    await allowTextNumbers(page);
+    await open(page, /95 % intervals/);
+    await page.getByLabel("Break that Chow's test asks about").selectOption("named");
+    await page.getByLabel(/^First row after the break/).fill("9999");
+    await page.getByText("Type the number of a row that is used.").waitFor();
   },
   "a review to begin": async (page) => {
     await openTab(page, "Review");
@@ -188,6 +213,7 @@ const widerThanPane = (page: Page): Promise<string[]> =>
 const smallTargets = (page: Page): Promise<string[]> =>
   page.evaluate(() =>
     [...document.querySelectorAll("button, select, input, textarea, a[href]")]
+      .filter((element) => element.getClientRects().length > 0)
       .filter((element) => {
         const { width, height } = element.getBoundingClientRect();
         return width < 24 || height < 24;

@@ -16,7 +16,7 @@ const useStyles = makeStyles({
   head: {
     fontWeight: tokens.fontWeightRegular,
     textAlign: "right",
-    padding: "4px 0 4px 4px",
+    padding: "4px 0 4px 8px",
     color: tokens.colorNeutralForeground3,
     verticalAlign: "bottom",
   },
@@ -26,7 +26,7 @@ const useStyles = makeStyles({
     padding: "3px 4px 3px 0",
     color: tokens.colorNeutralForeground3,
   },
-  cell: { textAlign: "right", padding: "3px 0 3px 4px", borderTop: `1px solid ${tokens.colorNeutralStroke2}` },
+  cell: { textAlign: "right", padding: "3px 0 3px 8px", borderTop: `1px solid ${tokens.colorNeutralStroke2}` },
   inForce: { color: tokens.colorNeutralForeground1, fontWeight: tokens.fontWeightSemibold },
 });
 

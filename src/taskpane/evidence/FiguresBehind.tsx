@@ -50,7 +50,7 @@ export const FiguresBehind = (props: FiguresBehindProps): ReactNode => {
     <Disclosure
       label={
         <>
-          Figures behind it<span className={type.hidden}>: {props.picture}</span>
+          Figures behind it<span className={type.hidden}> (the picture of {props.picture})</span>
         </>
       }
     >

@@ -5,6 +5,7 @@ import { lawInWords } from "../../core/answer/tables.ts";
 import { pValueInWords } from "../../core/answer/wording.ts";
 import type { Figure, TestOutcome } from "../../core/diagnostics/outcome.ts";
 import { testWords } from "../../core/diagnostics/words.ts";
+import { keepTogether } from "../parts/keepTogether.ts";
 import { pFigure } from "../parts/pFigure.ts";
 import type { TestGroup } from "./testGroups.ts";
 
@@ -41,11 +42,11 @@ export function TestFigures({ group, answer }: TestFiguresProps): ReactNode {
   if (main.kind !== "computed") return null;
   return (
     <p className={styles.figures}>
-      {figureInWords(main.figure, answer)}
+      {keepTogether(figureInWords(main.figure, answer))}
       {main.fForm !== null && (
         <>
           <br />
-          {figureInWords(main.fForm, answer)}
+          {keepTogether(figureInWords(main.fForm, answer))}
         </>
       )}
     </p>

@@ -19,7 +19,13 @@ const useStyles = makeStyles({
     fontSize: tokens.fontSizeBase300,
   },
   others: { margin: 0, padding: 0, listStyleType: "none" },
-  other: { display: "inline-flex", alignItems: "center", minHeight: "28px", textAlign: "left" },
+  other: {
+    display: "inline-flex",
+    alignItems: "center",
+    minHeight: "28px",
+    textAlign: "left",
+    "@media (forced-colors: active)": { color: "LinkText" },
+  },
 });
 
 interface HelpArticleProps {

@@ -12,6 +12,7 @@ const useStyles = makeStyles({
     fontSize: tokens.fontSizeBase200,
     fontWeight: tokens.fontWeightRegular,
     textAlign: "left",
+    "@media (forced-colors: active)": { color: "LinkText" },
   },
 });
 

@@ -1,3 +1,6 @@
 /** Keeps signs with their numbers when a sentence breaks over lines: "95 %", "p = 0.03". */
 export const keepTogether = (sentence: string): string =>
-  sentence.replaceAll(/ %/g, "\u00a0%").replaceAll(/\bp = /g, "p\u00a0=\u00a0");
+  sentence
+    .replaceAll(/ %/g, "\u00a0%")
+    .replaceAll(/\bp = /g, "p\u00a0=\u00a0")
+    .replaceAll(/\bp under /g, "p\u00a0under\u00a0");

@@ -58,7 +58,7 @@ export function PlotFrame({ across, up, xTitle, yTitle, alternative, children }:
         {children}
       </svg>
       <div className={styles.xTicks} aria-hidden="true">
-        {roundTicks(across, 3).map((tick) => (
+        {roundTicks(across, 4).map((tick) => (
           <span key={tick} className={styles.xTick} style={{ left: percentOf(across, tick) }}>
             {tickLabel(tick)}
           </span>
@@ -96,7 +96,7 @@ export interface PointsProps {
 const crowded = 300;
 
 export const Points = ({ across, up, x, y }: PointsProps): ReactNode => (
-  <g fill="currentColor" fillOpacity="0.55">
+  <g fill="currentColor" fillOpacity="0.7">
     {x.map((value, index) => (
       <circle
         key={index}
