@@ -90,7 +90,17 @@ function rowsOf(settings: Settings, { key, keyIs, order }: Parts): RowsAre | nul
       return { kind: "cases" };
     case "time":
       return { kind: "time", order: key };
-    case "groups":
-      return key === null ? null : { kind: "groups", by: key, second: settings.secondGroups, order };
+    case "groups": {
+      const second = settings.secondGroups;
+      if (key === null) return null;
+      // A column that groups may hold what is no time: it is read as time only where something looks back in it.
+      const grouping = second !== null && order !== null && same(second, order) && !looksBack(settings);
+      return { kind: "groups", by: key, second, order: grouping ? null : order };
+    }
   }
 }
+
+const looksBack = ({ transforms, added, calendar, options }: Settings): boolean =>
+  calendar.length > 0 ||
+  options.fixed?.errors === "newey-west" ||
+  [...transforms, ...added].some(({ transform }) => "periods" in transform);

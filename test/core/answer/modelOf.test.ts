@@ -74,6 +74,21 @@ describe("settings and columns make a model", () => {
     });
   });
 
+  it("takes a second column of the key for groups that cross, and for time where something looks back", () => {
+    const rows = (settings: Partial<Settings>) => {
+      const crossed = { secondGroups: "region code", ...settings };
+      const result = model(crossed, { key: "Shop", keyIs: "groups", order: "Region code" });
+      return result.ok && result.value.rows.kind === "groups" ? result.value.rows.order : result;
+    };
+    expect(rows({})).toBeNull();
+    expect(rows({ calendar: ["trend"] })).toBe("Region code");
+    expect(rows({ added: [{ column: "Price", transform: { kind: "lag", periods: 1 } }] })).toBe("Region code");
+    expect(rows({ added: [{ column: "Price", transform: { kind: "square" } }] })).toBeNull();
+    const fixed = { errors: "newey-west", reason: null } as const;
+    expect(rows({ options: { ...defaultSettings.options, fixed } })).toBe("Region code");
+    expect(rows({ secondGroups: null })).toBe("Region code");
+  });
+
   it("names the nearest column where a setting speaks of one that plays no part", () => {
     expect(model({ categories: ["Regoin"] })).toMatchObject({
       ok: false,
