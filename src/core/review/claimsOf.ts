@@ -9,6 +9,7 @@ import { type Ground, craftOf } from "./craft/craftOf.ts";
 import type { Finding } from "./finding.ts";
 import { type FormulaCell, readFormulas } from "./found/formulaCells.ts";
 import { type Gathered, claimOf, gathered } from "./found/gatherClaims.ts";
+import { firstWindows, onceEach } from "./found/movingWindows.ts";
 import { groupBehind, withBlock } from "./typed/attachBlock.ts";
 import { dataTables } from "./typed/dataTables.ts";
 import { areaCalled, givenData } from "./typed/pointedAt.ts";
@@ -86,7 +87,8 @@ function regressionsIn(book: Book, onSheet: string | null, report: Report): Foun
     unread.push(...read.unread);
     blocks.push(...reportBlocks(sheet));
   }
-  return { groups: gathered(cells, book), blocks, unread };
+  const windows = firstWindows(gathered(cells, book));
+  return { groups: windows.groups, blocks, unread: [...onceEach(unread), ...windows.unread] };
 }
 
 /** What has a cell inside an area. */

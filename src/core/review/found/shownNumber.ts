@@ -53,7 +53,8 @@ function inGeneral(value: number, digits: number): ShownNumber {
 /** "3.10**", "(0.42)", "4.2 %": the digits that stand there are the digits that count. */
 export function readShownText(text: string): ShownNumber | null {
   const plain = text.replace(/\s*[*†‡]+\s*$/, "").trim();
-  const read = readWith(plain, ".") ?? readWith(plain, ",");
+  // "0,125" has its decimals behind the comma: nobody sets apart thousands behind a zero.
+  const read = (/^\D*0,/.test(plain) ? null : readWith(plain, ".")) ?? readWith(plain, ",");
   return read === null ? null : { ...read, shown: plain };
 }
 
