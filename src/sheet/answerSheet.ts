@@ -56,7 +56,7 @@ const evenRows = (rows: number): PlanFormat => ({
 });
 
 const partsOf = (answer: Answer, facts: SheetFacts, figures: Figures) => [
-  titleSection(answer, facts),
+  titleSection(answer, facts, figures),
   verdictSection(answer, figures),
   fourCasesSection(answer, figures),
   driversSection(answer, figures),

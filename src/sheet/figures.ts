@@ -17,6 +17,8 @@ export interface Figures {
   readonly choice: () => PlanCell;
   /** The text put where a condition on the evidence holds: the mark of the case in force. */
   readonly mark: (spread: string, followOn: string, words: string) => PlanCell;
+  /** Words where a spreadsheet shows the first cell of a result alone, so that figures are missing; null on a kept sheet. */
+  readonly notSpilled: PlanCell;
   readonly blocks: readonly PlanBlock[];
   readonly formats: readonly PlanFormat[];
 }
@@ -34,6 +36,7 @@ export function keptFigures(answer: Answer): Figures {
     choice: () => text(choiceText(answer)),
     mark: (spread, followOn, words) =>
       text(markOf(spread === fourCase.spread && matchesFollowOn(followOn, fourCase.followOn), words)),
+    notSpilled: null,
     blocks: [],
     formats: [],
   };
@@ -81,6 +84,7 @@ export function liveFigures(answer: Answer, sources: LiveSources): Figures {
       formula(
         `=IF(AND(${spread}="${spreadIs}",(${followOn}="some")=${followOnIs === "some" ? "TRUE" : "FALSE"}),"${markOf(true, words)}","${words}")`,
       ),
+    notSpilled: unlessSpilled(at(0, liveColumn), at(0, liveColumn + 1)),
     blocks: [
       spill(liveColumn, "Live figures", `=FOOTING.ANSWER(${data},${tail})`),
       spill(evidenceColumn, "Live evidence", `=FOOTING.EVIDENCE(${data},,${tail})`),
@@ -95,6 +99,13 @@ export function liveFigures(answer: Answer, sources: LiveSources): Figures {
     ],
   };
 }
+
+/** A text in a formula has room for 255 characters. */
+const notSpilledWords =
+  "This spreadsheet shows the first cell of each function's result and not the rest, so figures are missing here. Open the workbook in a version of Excel that spills results; for other readers, turn the sheet into a kept one there.";
+
+const unlessSpilled = (first: string, second: string): PlanCell =>
+  formula(`=IF(ISERROR(${first}),"",IF(AND(${first}<>"",${second}=""),"${notSpilledWords}",""))`);
 
 /** The reading is the last column of the evidence table. */
 const readingColumn = (evidence: Grid): number => (evidence[0]?.length ?? 1) - 1;

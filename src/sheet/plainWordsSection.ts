@@ -14,9 +14,14 @@ export const cautionLine =
 const titleHeight = 28;
 const titleLetters = 105;
 
-export const titleSection = (answer: Answer, { date, version }: SheetFacts): Section =>
+export const titleSection = (answer: Answer, { date, version }: SheetFacts, { notSpilled }: Figures): Section =>
   section(
-    [[text(answer.title)], [text(`${date}. Made with Footing ${version}.`)], [text(cautionLine)]],
+    [
+      [text(answer.title)],
+      [text(`${date}. Made with Footing ${version}.`)],
+      [text(cautionLine)],
+      ...(notSpilled === null ? [] : [[notSpilled]]),
+    ],
     [
       {
         ...acrossPage(0, "title"),

@@ -6,10 +6,12 @@ import { questionOf } from "../../src/app/questionOf.ts";
 import { sheetFactsOf } from "../../src/app/sheetFacts.ts";
 import type { Answer } from "../../src/core/answer/answer.ts";
 import { answerTable } from "../../src/core/answer/tables.ts";
+import { localAddressOf } from "../../src/core/table/address.ts";
 import type { Result } from "../../src/core/problem/result.ts";
 import type { BookCell, SheetData } from "../../src/desk/book/bookData.ts";
 import type { NodeDesk } from "../../src/desk/client/openDesk.ts";
 import { registerFunctions } from "../../src/functions/register.ts";
+import { liveColumn } from "../../src/sheet/columns.ts";
 import { type SheetKind, planAnswer } from "../../src/sheet/answerSheet.ts";
 import { inlineAnalyst } from "../../src/worker/inlineAnalyst.ts";
 import { bookOf, sheetOf } from "../support/deskBook.ts";
@@ -59,7 +61,7 @@ async function open(rows: BookCell[][], more: Partial<SheetData> = {}): Promise<
 /** From a selected cell to an answer, as the pane does it. */
 async function answerFrom({ desk, host }: DeskHost, cell: string) {
   desk.select(cell);
-  const data = value(takeInHand(value(await host.read({ kind: "selection" }, errand()))));
+  const data = value(await takeInHand(value(await host.read({ kind: "selection" }, errand()))));
   const question = value(questionOf(data.source, proposeSetup(data.columns)));
   const answer = value(await inlineAnalyst.analyse(question, errand()));
   return { data, question, answer };
@@ -160,6 +162,17 @@ describe("from cells to a result sheet", () => {
     expect(after.answer.observations).toBe(51);
     expect(after.answer.coefficients[1]).not.toBeCloseTo(before.answer.coefficients[1]!, 3);
     expectSame(shownFigures(opened.desk, live, after.answer), figuresOf(after.answer));
+  });
+
+  it("live: says so where a spreadsheet shows the first cell of a result alone", async () => {
+    const opened = await open(shopRows());
+    const sheet = await writeAnswer(opened, await answerFrom(opened, "Data!A1"), "live");
+    expect(opened.desk.value(`'${sheet}'!A4`)).toBe("");
+    const fed = localAddressOf({ row: 3, column: liveColumn, rows: 1, columns: 1 });
+    expect(opened.desk.value(`'${sheet}'!${fed}`)).toBe("driver");
+    opened.desk.edit(`'${sheet}'!${fed}`, "driver");
+    await opened.desk.settle();
+    expect(opened.desk.value(`'${sheet}'!A4`)).toMatch(/first cell of each function's result and not the rest/);
   });
 
   it("live, then kept: the sheet looks the same and holds no formula", async () => {
