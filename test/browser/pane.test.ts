@@ -187,7 +187,9 @@ describe("the answer", () => {
     expect(await announced(page)).toBe("Months!B6 has changed. The answer is out of date.");
     await button(page, "Redo answer and sheet").click();
     await page.getByText(/Out of date/).waitFor({ state: "detached" });
-    expect(await page.evaluate(() => window.stage.host.plans.length)).toBe(2);
+    // In its own place: no second sheet.
+    expect(await page.evaluate(() => window.stage.host.plans.length)).toBe(1);
+    expect(await page.evaluate(() => window.stage.host.keeper.rewrites.length)).toBe(1);
   });
 
   it("names what is missing where there is none yet", async () => {
