@@ -28,6 +28,11 @@ export async function startNodeGrid(): Promise<Grid> {
     injector: univer.__getInjector(),
     // Without a page it listens from the start.
     awaken: () => undefined,
-    dispose: () => univer.dispose(),
+    dispose: () => {
+      const words = univer.__getInjector().get(core.LocaleService);
+      univer.dispose();
+      // A calculation that was under way says a second later how far it has come, in words that are gone by then.
+      words.t = (key) => key;
+    },
   };
 }
