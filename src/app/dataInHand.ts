@@ -20,6 +20,8 @@ export interface DataInHand {
   readonly notes: readonly string[];
   /** The name by which they are found again wherever they move; null where they have none yet. */
   readonly anchor: Anchor | null;
+  /** Filled rows right below them that their name does not reach, "Months!A98:D99"; asked where they were found by it. */
+  readonly below: string | null;
   /** The first cell that has changed since, null as long as none has. */
   readonly changedCell: string | null;
 }
@@ -50,6 +52,7 @@ export async function takeInHand(block: PlacedBlock): Promise<Result<DataInHand>
     columns,
     notes,
     anchor: block.table === null ? null : { kind: "table", name: block.table },
+    below: null,
     changedCell: null,
   });
 }

@@ -13,6 +13,7 @@ import { insertSample } from "./sampling.ts";
 import { keepSheet, recalculateSheet } from "./sheetInFront.ts";
 import { type Store, createStore } from "./store.ts";
 import { type PaneState, emptyState } from "./state.ts";
+import { takeInBelow } from "./stored/below.ts";
 import { checkSheets } from "./stored/checking.ts";
 import { redoSheet, redoWith } from "./stored/redoing.ts";
 import { openSetup, removeSetup, renameSetup, storeSetup, type Renaming } from "./stored/setups.ts";
@@ -46,6 +47,8 @@ export interface Commands {
   readonly openSetup: (name: string) => void;
   readonly renameSetup: (renaming: Renaming) => void;
   readonly removeSetup: (name: string) => void;
+  /** Reads the data again with the rows that were added below them. */
+  readonly takeInBelow: () => void;
   /** Answers stored set-ups side by side. */
   readonly compare: (names: readonly string[]) => void;
   readonly writeComparison: () => void;
@@ -94,6 +97,7 @@ export function createPane({ host, analyst, edition, guard }: PaneParts): Pane {
     renameSetup: (renaming) => guard(() => renameSetup(work, renaming)),
     compare: (names) => guard(() => compareSetups(work, names)),
     writeComparison: () => guard(() => writeComparison(work)),
+    takeInBelow: () => guard(() => takeInBelow(work)),
     removeSetup: (name) => guard(() => removeSetup(work, name)),
     review: reviewCommands(work, guard),
     recalculate: () => guard(() => recalculateSheet(work)),

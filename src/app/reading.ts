@@ -32,7 +32,8 @@ function setupFor(data: DataInHand, before: PaneState): Carried & Pick<PaneState
   const { waiting } = before;
   if (waiting !== null) {
     const brought = bringSetup(waiting.setup, data);
-    if (brought.lost.length < usedIn(waiting.setup).length) return { ...brought, opened: waiting.name };
+    const { name } = waiting;
+    if (brought.lost.length < usedIn(waiting.setup).length) return { ...brought, opened: name === "" ? null : name };
   }
   if (before.setup === null || before.data?.address !== data.address) {
     return { setup: proposeSetup(data.columns), lost: [], opened: null };

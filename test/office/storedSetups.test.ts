@@ -77,6 +77,28 @@ describe("a set-up in the workbook", { timeout: 120_000 }, () => {
     expect(at.desk.snapshot().names.map(({ name }) => name)).toEqual(["Purchase_lots"]);
   });
 
+  it("tells of rows that were added right below its data, and takes them in on request", async () => {
+    await read("Months!A4:E98");
+    at.pane.store.dispatch({ kind: "role chosen", column: "Advertising", role: "unused" });
+    await store("To October");
+    await open("To October");
+    expect(at.state().data).toMatchObject({ address: "Months!A4:E98", below: "Months!A99:E100" });
+    await at.carryOut(at.pane.commands.takeInBelow);
+    expect(at.state()).toMatchObject({ opened: "To October", waiting: null, data: { below: null } });
+    expect(at.state().data?.address).toBe("Months!A4:E100");
+    expect(at.state().setup?.columns.map(({ role }) => role)).toEqual([
+      "time",
+      "outcome",
+      "driver",
+      "unused",
+      "driver",
+    ]);
+    await store("To October");
+    await open("To October");
+    expect(at.state().data).toMatchObject({ address: "Months!A4:E100", below: null });
+    expect(at.desk.snapshot().names.map(({ name }) => name)).toEqual(["Purchase_lots", "Footing_data_2"]);
+  });
+
   it("is renamed and removed, and takes the name of its cells with it", async () => {
     await read("Months!A4:E100");
     await store("A");

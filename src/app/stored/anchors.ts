@@ -3,6 +3,7 @@ import { type Result, failure, success } from "../../core/problem/result.ts";
 import { type DataInHand, takeInHand } from "../dataInHand.ts";
 import type { Errand, Host, WhereToRead } from "../host.ts";
 import type { Work } from "../work.ts";
+import { rowsBelow } from "./below.ts";
 import type { Anchor, Origin, StoredBook } from "./storedBook.ts";
 
 /** The anchor of the data in hand, or a new name for their cells. */
@@ -32,7 +33,10 @@ export async function readOrigin(
       goneOr(block.problem, { code: "setup-data-gone", setup: whose, place: inWords(anchor), last: address }),
     );
   const data = await takeInHand(block.value);
-  return data.ok ? success({ ...data.value, anchor }) : data;
+  if (!data.ok) return data;
+  // A table takes in what is written below it; a name does not.
+  const below = anchor.kind === "table" ? null : await rowsBelow(host, data.value.address, errand);
+  return success({ ...data.value, anchor, below });
 }
 
 const goneOr = (problem: Problem, gone: Problem): Problem => (problem.code === "unknown-place" ? gone : problem);

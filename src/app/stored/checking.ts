@@ -80,5 +80,6 @@ async function standingOf(
   const asked = await askAgain(work, record, { whose: `the sheet "${sheet}"`, errand: quietly() });
   if (!asked.ok) return { standing: { kind: "cut off", problem: asked.problem }, address: null };
   const same = (await fingerprintOf(asked.value.question)) === record.fingerprint;
-  return { standing: { kind: same ? "current" : "out of date" }, address: asked.value.data.address };
+  const { address, below } = asked.value.data;
+  return { standing: same ? { kind: "current", below } : { kind: "out of date" }, address };
 }

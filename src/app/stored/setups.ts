@@ -1,9 +1,10 @@
 import { type Result, failure, success } from "../../core/problem/result.ts";
 import { bringSetup } from "../carrying.ts";
+import { namePrefix } from "../keeper.ts";
 import { type Work, fail } from "../work.ts";
 import { anchorOf, isUsed, readOrigin } from "./anchors.ts";
 import { changeKept, failIfNot } from "./keeping.ts";
-import { type StoredBook, type StoredSetup, sameName } from "./storedBook.ts";
+import { type Anchor, type StoredBook, type StoredSetup, sameName } from "./storedBook.ts";
 
 const named = ({ setups }: StoredBook, name: string): StoredSetup | undefined =>
   setups.find((setup) => sameName(setup.name, name));
@@ -11,7 +12,7 @@ const named = ({ setups }: StoredBook, name: string): StoredSetup | undefined =>
 /** Stores the set-up in hand under a name; the one that was opened under that name is stored anew. */
 export async function storeSetup(work: Work, wanted: string): Promise<void> {
   const name = wanted.trim();
-  const { data, setup, opened } = work.store.get();
+  const { data, setup, opened, kept } = work.store.get();
   if (data === null || setup === null) return;
   const refused = name === "" ? failure({ code: "setup-unnamed" }) : null;
   if (refused !== null) {
@@ -24,6 +25,7 @@ export async function storeSetup(work: Work, wanted: string): Promise<void> {
     return;
   }
   const entry: StoredSetup = { name, anchor: anchor.value, address: data.address, setup };
+  const before = named(kept.book, name);
   const changed = await changeKept(work, (book) => {
     const taken = named(book, name);
     const isOwn = opened !== null && sameName(opened, name);
@@ -31,7 +33,18 @@ export async function storeSetup(work: Work, wanted: string): Promise<void> {
       ? failure({ code: "setup-name-taken", name: taken.name })
       : success(withSetup(book, entry));
   });
-  if (failIfNot(work, changed)) work.store.dispatch({ kind: "setup stored", name });
+  if (!failIfNot(work, changed) || !changed.ok) return;
+  work.store.dispatch({ kind: "setup stored", name });
+  if (before !== undefined) await forgetUnused(work, changed.value, before.anchor);
+}
+
+/** A name that Footing gave to cells goes when nothing that is kept needs it any more. */
+async function forgetUnused(work: Work, book: StoredBook, anchor: Anchor): Promise<void> {
+  const isOwn = anchor.kind === "name" && anchor.name.startsWith(namePrefix);
+  if (!isOwn || isUsed(book, anchor)) return;
+  // The data in hand may still go by that name; they get another one when it is needed.
+  work.store.dispatch({ kind: "anchor lost", anchor });
+  failIfNot(work, await work.host.forgetName(anchor.name));
 }
 
 /** In the order of their names, as a list is searched. */
@@ -90,8 +103,5 @@ export async function removeSetup(work: Work, name: string): Promise<void> {
   );
   if (!failIfNot(work, changed) || !changed.ok) return;
   work.store.dispatch({ kind: "setup removed", name });
-  if (entry === undefined || entry.anchor.kind !== "name" || isUsed(changed.value, entry.anchor)) return;
-  // The data in hand may still go by that name; they get another one when it is needed.
-  work.store.dispatch({ kind: "anchor lost", anchor: entry.anchor });
-  failIfNot(work, await work.host.forgetName(entry.anchor.name));
+  if (entry !== undefined) await forgetUnused(work, changed.value, entry.anchor);
 }

@@ -6,7 +6,8 @@ export type Standing =
   /** Live: its formulas follow the cells. */
   | { readonly kind: "follows" }
   | { readonly kind: "being checked" }
-  | { readonly kind: "current" }
+  /** `below`: filled rows right below its data that are not in it. */
+  | { readonly kind: "current"; readonly below: string | null }
   | { readonly kind: "out of date" }
   /** What it was made from is no longer found. */
   | { readonly kind: "cut off"; readonly problem: Problem }

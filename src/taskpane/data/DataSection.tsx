@@ -12,6 +12,7 @@ import { ColumnList } from "./ColumnList.tsx";
 import { HiddenRows } from "./HiddenRows.tsx";
 import { LostColumns } from "./LostColumns.tsx";
 import { PlaceChooser } from "./PlaceChooser.tsx";
+import { RowsBelow } from "./RowsBelow.tsx";
 import { RowsAre } from "./RowsAre.tsx";
 import { WhatIsUsed } from "./WhatIsUsed.tsx";
 import { WayToAnswer } from "./WayToAnswer.tsx";
@@ -35,6 +36,7 @@ export function DataSection(): ReactNode {
       ))}
       <ChangedNotice />
       <LostColumns />
+      <RowsBelow />
       <Disclosure key={address} label="Choose other data">
         <PlaceChooser />
       </Disclosure>

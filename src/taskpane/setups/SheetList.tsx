@@ -67,7 +67,9 @@ function wordsFor({ standing, record }: SheetStatus): string {
     case "being checked":
       return "Kept. Being checked against its cells.";
     case "current":
-      return "Kept, and as its cells are.";
+      return standing.below === null
+        ? "Kept, and as its cells are."
+        : `Kept, and as its cells are; ${standing.below} right below them is filled too, but not in it.`;
     case "out of date":
       return record?.written === null
         ? "Out of date: its cells have changed. It was live once; write the answer to a new sheet."
