@@ -1,7 +1,7 @@
 import { blankGuard } from "../functions/blankGuard.ts";
 import { registerFunctions } from "../functions/register.ts";
 import { excelHost } from "../office/excelHost.ts";
-import { inlineAnalyst } from "../worker/inlineAnalyst.ts";
+import { lateComputing } from "../worker/lateComputing.ts";
 import type { WorkerLine } from "../worker/protocol.ts";
 import { workerAnalyst } from "../worker/workerAnalyst.ts";
 
@@ -9,7 +9,7 @@ const hire = (): WorkerLine =>
   new Worker(/* webpackChunkName: "worker" */ new URL("./worker.ts", import.meta.url)) as WorkerLine;
 
 /** Functions have a worker of their own, so that a long analysis in the pane does not hold up the cells. */
-const analyst = workerAnalyst({ hire, fallback: inlineAnalyst, seconds: 600 });
+const analyst = workerAnalyst({ hire, fallback: lateComputing, seconds: 600 });
 
 const { read } = excelHost();
 

@@ -9,8 +9,7 @@ import { excelHost } from "../office/excelHost.ts";
 import { floor } from "../office/session.ts";
 import { Outside, type WhyOutside } from "../taskpane/Outside.tsx";
 import { PaneApp } from "../taskpane/PaneApp.tsx";
-import { inlineAnalyst } from "../worker/inlineAnalyst.ts";
-import { lateReviewer } from "../worker/lateReviewer.ts";
+import { lateComputing } from "../worker/lateComputing.ts";
 import type { WorkerLine } from "../worker/protocol.ts";
 import { workerAnalyst } from "../worker/workerAnalyst.ts";
 
@@ -24,7 +23,7 @@ const patienceMs = 15_000;
 
 const pane = createPane({
   host: excelHost(),
-  analyst: workerAnalyst({ hire, fallback: { ...inlineAnalyst, ...lateReviewer }, seconds: 600 }),
+  analyst: workerAnalyst({ hire, fallback: lateComputing, seconds: 600 }),
   edition: { today: () => day.format(new Date()), version: packageFile.version },
   guard: (work) => void work().catch(showFault),
 });

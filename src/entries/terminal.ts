@@ -3,13 +3,14 @@ import { deskBook } from "../terminal/deskBook.ts";
 import { diskFiles } from "../terminal/fileAccess.ts";
 import { runTerminal } from "../terminal/runTerminal.ts";
 import { inlineAnalyst } from "../worker/inlineAnalyst.ts";
+import { inlineReviewer } from "../worker/inlineReviewer.ts";
 
 const today = (): string => new Intl.DateTimeFormat("en-GB", { dateStyle: "long" }).format(new Date());
 
 const ran = await runTerminal(process.argv.slice(2), {
   files: diskFiles,
   openBook: deskBook(inlineAnalyst),
-  analyst: inlineAnalyst,
+  analyst: { ...inlineAnalyst, ...inlineReviewer },
   today,
   version: packageFile.version,
 });

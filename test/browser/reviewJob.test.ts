@@ -86,3 +86,21 @@ describe("a regression that was handed over", { timeout: 180_000 }, () => {
     await pane.getByRole("heading", { name: "Repairs explained by Price index, Advertising and Rainy days" }).waitFor();
   });
 });
+
+describe("where a page may not start workers", { timeout: 180_000 }, () => {
+  it("the same code is loaded for the page itself, and reviews", async () => {
+    const { page, pane } = desk;
+    const frame = page.frames().find((one) => one.url().includes("taskpane.html"))!;
+    await frame.evaluate(() => {
+      const forbidden = function (): never {
+        throw new Error("not allowed here");
+      };
+      Object.assign(globalThis, { Worker: forbidden });
+    });
+    const loaded = page.waitForRequest(/\/inline\.js$/);
+    await pane.getByRole("tab", { name: "Review" }).click();
+    await pane.getByRole("button", { name: "List the regressions in this workbook" }).click();
+    await loaded;
+    await pane.getByText("The last row (Months!B100:E100) was left off.").first().waitFor();
+  });
+});

@@ -6,6 +6,7 @@ import { openXlsx } from "../../src/desk/files/openXlsx.ts";
 import { saveXlsx } from "../../src/desk/files/saveXlsx.ts";
 import { registerFunctions } from "../../src/functions/register.ts";
 import { inlineAnalyst } from "../../src/worker/inlineAnalyst.ts";
+import { inlineReviewer } from "../../src/worker/inlineReviewer.ts";
 import { type DeskHost, openDeskHost } from "./deskHost.ts";
 
 /** The pane without its looks, over the stand-in spreadsheet and the real analysis. */
@@ -27,7 +28,7 @@ export async function openDeskPane(book: BookData): Promise<DeskPane> {
   const work: Promise<void>[] = [];
   const pane = createPane({
     host: at.host,
-    analyst: inlineAnalyst,
+    analyst: { ...inlineAnalyst, ...inlineReviewer },
     edition: { today: () => "1 December 2026", version: "0.1.0" },
     guard: (task) => void work.push(task()),
   });

@@ -1,7 +1,9 @@
+import type { Surroundings } from "../../src/terminal/answerCommand.ts";
 import type { FileAccess } from "../../src/terminal/fileAccess.ts";
 import { deskBook } from "../../src/terminal/deskBook.ts";
 import { type Ran, runTerminal } from "../../src/terminal/runTerminal.ts";
 import { inlineAnalyst } from "../../src/worker/inlineAnalyst.ts";
+import { inlineReviewer } from "../../src/worker/inlineReviewer.ts";
 
 export interface Shelf extends FileAccess {
   readonly files: Map<string, Uint8Array>;
@@ -26,11 +28,14 @@ export function shelf(contents: Readonly<Record<string, string | Uint8Array>>): 
   };
 }
 
+/** Everything that the terminal computes with. */
+export const wholeAnalyst = { ...inlineAnalyst, ...inlineReviewer };
+
 /** Runs a command line over files in memory, with the real desk and the analysis given. */
 export const terminalWith = (
   words: readonly string[],
   files: FileAccess,
-  analyst: typeof inlineAnalyst,
+  analyst: Surroundings["analyst"],
 ): Promise<Ran> =>
   runTerminal(words, {
     files,
@@ -42,4 +47,4 @@ export const terminalWith = (
 
 /** The same with the real analysis. */
 export const terminal = (words: readonly string[], files: FileAccess): Promise<Ran> =>
-  terminalWith(words, files, inlineAnalyst);
+  terminalWith(words, files, wholeAnalyst);

@@ -5,17 +5,16 @@ import type { ClaimReview } from "../../src/core/review/claimReview.ts";
 import { demoBook } from "../../src/desk/demo/demoBook.ts";
 import { openXlsx } from "../../src/desk/files/openXlsx.ts";
 import { saveXlsx } from "../../src/desk/files/saveXlsx.ts";
-import { inlineAnalyst } from "../../src/worker/inlineAnalyst.ts";
 import { answerFixture } from "../support/answerFixture.ts";
 import { digitsOf } from "../support/digits.ts";
 import { bookReviewFixture, claimReviewFixture, smaller, soundReviewFixture } from "../support/reviewFixture.ts";
-import { type Shelf, shelf, terminalWith } from "../support/terminal.ts";
+import { type Shelf, shelf, terminalWith, wholeAnalyst } from "../support/terminal.ts";
 
 /** A reviewer who finds what the test gives it, so that what is printed can be told apart from what is found. */
 function reviewer(reviews: readonly ClaimReview[]) {
   const asked: Asked[] = [];
-  const analyst: typeof inlineAnalyst = {
-    ...inlineAnalyst,
+  const analyst: typeof wholeAnalyst = {
+    ...wholeAnalyst,
     listClaims: (_, what) => {
       asked.push(what);
       const { unread, craft } = bookReviewFixture;
@@ -62,7 +61,7 @@ describe("the exit status", () => {
   });
 
   it("is 1 where the fault is Footing's own", async () => {
-    const analyst = { ...inlineAnalyst, listClaims: () => Promise.reject(new Error("broken")) };
+    const analyst = { ...wholeAnalyst, listClaims: () => Promise.reject(new Error("broken")) };
     const ran = await terminalWith(["review", "book.xlsx"], book, analyst);
     expect([ran.status, ran.out]).toEqual([1, ""]);
     expect(ran.err).toContain("broken");
@@ -162,7 +161,7 @@ describe("faults of the input", () => {
   });
 
   it("a command that there is not", async () => {
-    const ran = await terminalWith(["reviw", "book.xlsx"], book, inlineAnalyst);
+    const ran = await terminalWith(["reviw", "book.xlsx"], book, wholeAnalyst);
     expect(ran.status).toBe(2);
     expect(ran.err).toContain('Did you mean "review"?');
   });
@@ -170,7 +169,7 @@ describe("faults of the input", () => {
 
 describe("the demo's handed-over regression", () => {
   it("is found, explained by the row left off, and judged by the standard errors that the evidence calls for", async () => {
-    const ran = await terminalWith(["review", "book.xlsx", "--sheet", "Handover", "--json"], book, inlineAnalyst);
+    const ran = await terminalWith(["review", "book.xlsx", "--sheet", "Handover", "--json"], book, wholeAnalyst);
     expect(ran.status).toBe(3);
     const { regressions } = JSON.parse(ran.out) as { regressions: Record<string, unknown>[] };
     expect(regressions).toHaveLength(1);
@@ -189,7 +188,7 @@ describe("the demo's handed-over regression", () => {
     expect(changed).toEqual(["Price index"]);
     // The same numbers by the other door: what `footing answer` makes of all rows.
     const line = ["--outcome", "Repairs", "--drivers", "Price index,Advertising,Rainy days", "--order", "Month"];
-    const answered = await terminalWith(["answer", "book.xlsx", ...line, "--json"], book, inlineAnalyst);
+    const answered = await terminalWith(["answer", "book.xlsx", ...line, "--json"], book, wholeAnalyst);
     const { coefficients } = JSON.parse(answered.out) as { coefficients: number[] };
     const recomputed = handed.numbers.filter(({ number }) => /^(constant|coefficient)/.test(number));
     recomputed.forEach((number, index) =>
@@ -201,11 +200,11 @@ describe("the demo's handed-over regression", () => {
   it("is the same where it is pointed at", async () => {
     const pointed = ["--reported", "Handover!A4:D8", "--outcome", "Repairs"];
     const drivers = ["--drivers", "Price index,Advertising,Rainy days"];
-    const ran = await terminalWith(["review", "book.xlsx", ...pointed, ...drivers], book, inlineAnalyst);
+    const ran = await terminalWith(["review", "book.xlsx", ...pointed, ...drivers], book, wholeAnalyst);
     expect([ran.status, ran.err]).toEqual([3, ""]);
     expect(ran.out.replaceAll(/\s+/g, " ")).toContain("The last row (Months!B100:E100) was left off.");
     const wrong = ["--reported", "Handover!A4:D8", "--outcome", "Repiars", ...drivers];
-    const faulty = await terminalWith(["review", "book.xlsx", ...wrong], book, inlineAnalyst);
+    const faulty = await terminalWith(["review", "book.xlsx", ...wrong], book, wholeAnalyst);
     expect(faulty.status).toBe(2);
     expect(faulty.err).toContain("Repiars");
   });

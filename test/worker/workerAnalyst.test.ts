@@ -6,6 +6,7 @@ import { failure, success } from "../../src/core/problem/result.ts";
 import type { Book } from "../../src/core/review/book.ts";
 import type { Source } from "../../src/core/table/source.ts";
 import { inlineAnalystOf } from "../../src/worker/inlineAnalyst.ts";
+import { inlineReviewerOf } from "../../src/worker/inlineReviewer.ts";
 import { workerAnalyst } from "../../src/worker/workerAnalyst.ts";
 import { claimFixture, claimReviewFixture } from "../support/reviewFixture.ts";
 import { type Threads, threadsOf } from "../support/threadLine.ts";
@@ -37,7 +38,10 @@ const noReview = {
   listClaims: () => success({ claims: [], unread: [{ cell: "S!A1", why: "in line" }], craft: [] }),
   review: () => success({ ...claimReviewFixture, verdict: "in line" }),
 };
-const inline = inlineAnalystOf({ analyse: () => success(answerTitled("in line")), inquire: noFinding, ...noReview });
+const inline = {
+  ...inlineAnalystOf({ analyse: () => success(answerTitled("in line")), inquire: noFinding }),
+  ...inlineReviewerOf(noReview),
+};
 const errand = (signal = new AbortController().signal, progress: (what: string) => void = () => undefined) => ({
   signal,
   progress: ({ what }: { readonly what: string }) => progress(what),
@@ -194,7 +198,6 @@ describe("where no worker can start", () => {
         return success(answerTitled("in line"));
       },
       inquire: noFinding,
-      ...noReview,
     });
     const controller = new AbortController();
     controller.abort();
