@@ -20,6 +20,8 @@ export interface PlantedBook {
   readonly name: string;
   readonly kind: "single" | "pair" | "sound";
   readonly expected: readonly Expected[];
+  /** What must be said of the report as it is read from the workbook; null where it cannot show the faults. */
+  readonly expectedInBook: readonly Expected[] | null;
   readonly claim: Claim;
   readonly book: BookData;
 }
@@ -44,7 +46,7 @@ export function singles(): PlantedBook[] {
     const sets = setsFor([fault]);
     return Array.from({ length: Math.min(setsEach, sets.length) }, (_, turn) => {
       const set = sets[(index + turn * 3) % sets.length]!;
-      return planted(set, [fault], { random, style: styles[(index + turn) % styles.length]!, kind: "single" });
+      return planted(set, [fault], { random, style: styleFor([fault], index + turn), kind: "single" });
     });
   });
 }
@@ -73,7 +75,7 @@ export function pairs(): PlantedBook[] {
   return together.flatMap((pair, index) => {
     const sets = setsFor(pair);
     if (sets.length === 0) return [];
-    const style = styles[index % styles.length]!;
+    const style = styleFor(pair, index);
     return [planted(sets[index % sets.length]!, pair, { random, style, kind: "pair" })];
   });
 }
@@ -118,10 +120,22 @@ function planted(set: DataSet, faults: readonly Fault[], { random, style, kind }
     name: `${set.id}: ${faults.map(({ name }) => name).join(", and ") || "no fault"} (${style})`,
     kind,
     expected: faults.map(({ expected }) => expected),
+    expectedInBook: inBook(faults),
     claim,
-    book: { sheets: [dataSheet(sheet), reportSheet(reported, names)], names: [], active: 1 },
+    book: { sheets: [dataSheet(sheet), reportSheet(reported, claim.outcome.name, names)], names: [], active: 1 },
   };
 }
+
+function inBook(faults: readonly Fault[]): readonly Expected[] | null {
+  const said = faults.map((fault) => (fault.inBook === undefined ? fault.expected : fault.inBook));
+  return said.every((one): one is Expected => one !== null) ? said : null;
+}
+
+/** The style whose turn it is, or the next that can show the faults. */
+const styleFor = (faults: readonly Fault[], turn: number): Style =>
+  styles
+    .map((_, i) => styles[(turn + i) % styles.length]!)
+    .find((style) => faults.every((fault) => fault.styles === undefined || fault.styles.includes(style)))!;
 
 /** The rows as they were read: a row lacking anything is left out. */
 function madeOf(sheet: Sheet, faults: readonly Fault[]): Made {

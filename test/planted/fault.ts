@@ -2,6 +2,7 @@ import type { ErrorsChoice } from "../../src/core/covariance/choice.ts";
 import type { Random } from "../support/random.ts";
 import type { ClaimedForm, ReportedNumber } from "../../src/core/review/claim.ts";
 import type { Cell } from "../../src/core/table/cells.ts";
+import type { Style } from "./report.ts";
 import type { Sheet } from "./sheet.ts";
 
 /** A row as it went into the regression. */
@@ -32,6 +33,13 @@ export type Expected =
 export interface Fault {
   readonly name: string;
   readonly expected: Expected;
+  /**
+   * What must be said where the report is read from a workbook, whose typed results are held against all rows of the data;
+   * null where typed results cannot show the fault. As above where it does not say.
+   */
+  readonly inBook?: Expected | null;
+  /** Figures without which too few numbers would speak of it; any will do where it does not say. */
+  readonly styles?: readonly Style[];
   readonly sheet?: (sheet: Sheet, random: Random) => Sheet;
   readonly rows?: (sheet: Sheet) => { readonly from: number; readonly to: number };
   readonly read?: (cell: Cell) => number | null;

@@ -51,6 +51,8 @@ const leftOffStart = (count: number): Fault => ({
 const factor = (name: string, scale: number, column: "outcome" | number): Fault => ({
   name: `${name} times ${scale}`,
   expected: explained("factor"),
+  // A driver's own coefficient is the only number that its units move beside its standard error.
+  ...(column !== "outcome" && { styles: ["errors", "all", "bounds"] as const }),
   made: (made) =>
     eachRow(made, (row) =>
       column === "outcome" ? { ...row, y: row.y * scale } : atDriver(row, column, row.x[column]! * scale),
@@ -95,12 +97,14 @@ export const rowFaults: readonly Fault[] = [
   {
     name: "two rows too many at the end",
     expected: explained("extra-rows-at-end"),
+    inBook: null,
     sheet: (sheet) => ({ ...sheet, claimed: { from: 0, to: sheet.claimed.to - 2 } }),
     rows: ({ rows }) => ({ from: 0, to: rows.length }),
   },
   {
     name: "a row too many at the start",
     expected: explained("extra-rows-at-start"),
+    inBook: null,
     sheet: (sheet) => ({ ...sheet, claimed: { from: 1, to: sheet.claimed.to } }),
     rows: ({ rows }) => ({ from: 0, to: rows.length }),
   },
@@ -227,6 +231,7 @@ export const columnFaults: readonly Fault[] = [
   {
     name: "logarithm claimed and not taken",
     expected: explained("no-logarithm"),
+    inBook: null,
     only: positive,
     claimedForms: { 2: "logarithm" },
   },
@@ -256,7 +261,12 @@ export const columnFaults: readonly Fault[] = [
 /** The right numbers in the wrong model, or under the wrong names. */
 export const modelFaults: readonly Fault[] = [
   { name: "no constant", expected: explained("no-constant"), made: (made) => ({ ...made, constant: false }) },
-  { name: "a constant where none is claimed", expected: explained("with-constant"), claimsConstant: false },
+  {
+    name: "a constant where none is claimed",
+    expected: explained("with-constant"),
+    inBook: null,
+    claimsConstant: false,
+  },
   {
     name: "coefficients in reverse order",
     expected: explained("reverse-order"),
@@ -281,6 +291,7 @@ export const modelFaults: readonly Fault[] = [
   {
     name: "a driver left out",
     expected: explained("driver-left-out"),
+    inBook: null,
     only: threeDrivers,
     made: (made) => ({
       ...eachRow(made, (row) => ({ ...row, x: row.x.slice(0, -1) })),
@@ -336,11 +347,13 @@ export const reportFaults: readonly Fault[] = [
   {
     name: "the range stops before the data do",
     expected: { kind: "finding", code: "range-stops-early" },
+    inBook: explained("rows-left-off-at-end"),
     sheet: (sheet) => ({ ...sheet, claimed: { from: 0, to: sheet.claimed.to - 4 } }),
   },
   {
     name: "a total inside the range",
     expected: { kind: "finding", code: "total-row-in-range" },
+    inBook: explained("total-row-counted"),
     sheet: (sheet) => ({
       ...sheet,
       rows: [...sheet.rows, totalOf(sheet)],

@@ -1,4 +1,4 @@
-import type { ClaimReview } from "../../src/core/review/claimReview.ts";
+import type { BookReview, ClaimReview } from "../../src/core/review/claimReview.ts";
 import type { Expected } from "./fault.ts";
 import type { PlantedBook } from "./books.ts";
 
@@ -12,6 +12,14 @@ export function judge({ kind, expected }: Pick<PlantedBook, "kind" | "expected">
   return missed.length === 0
     ? null
     : `not said: ${JSON.stringify(missed)} but ${JSON.stringify(review.errors?.kinds.slice(0, 3))}, ${review.findings.map(({ code }) => code).join()}`;
+}
+
+/** The same of a whole workbook: the one report in it, with what is said of its sheets. */
+export function judgeBook(planted: PlantedBook, { claims, craft }: BookReview): string | null {
+  const [review, ...others] = claims;
+  if (review === undefined || others.length > 0) return `${claims.length} reports found`;
+  const expected = planted.expectedInBook ?? [];
+  return judge({ ...planted, expected }, { ...review, findings: [...review.findings, ...craft] });
 }
 
 function soundly({ findings, compared, verdict }: ClaimReview): string | null {

@@ -88,8 +88,12 @@ const wholes: Readonly<Record<string, string>> = {
   sigma: "Standard error of the regression",
 };
 
-/** The report as a sheet of typed numbers, each in its cell. */
-export function reportSheet(reported: readonly ReportedNumber[], drivers: readonly string[]): SheetData {
+/** The report as a sheet of typed numbers, each in its cell, and a line that says what was explained. */
+export function reportSheet(
+  reported: readonly ReportedNumber[],
+  outcome: string,
+  drivers: readonly string[],
+): SheetData {
   const rows: BookCell[][] = [["Driver"]];
   const put = (row: number, column: number, cell: BookCell): void => {
     while (rows.length <= row) rows.push([]);
@@ -106,5 +110,5 @@ export function reportSheet(reported: readonly ReportedNumber[], drivers: readon
       put(row, 0, quantity.term === null ? "Constant" : drivers[quantity.term]!);
     } else put(row, 0, wholes[quantity.kind] ?? quantity.kind);
   }
-  return blankSheet("Report", rows);
+  return blankSheet("Report", [...rows, [], [`What explains ${outcome}?`]]);
 }

@@ -4,24 +4,34 @@ import { join } from "node:path";
 import { reviewClaim } from "../../src/core/review/reviewClaim.ts";
 import { saveXlsx } from "../../src/desk/files/saveXlsx.ts";
 import { type PlantedBook, pairs, singles, soundBooks } from "./books.ts";
-import { judge } from "./judge.ts";
+import { judge, judgeBook } from "./judge.ts";
+import { reviewBook } from "./wholeBook.ts";
 
+/** `--save DIR` writes the workbooks; `--books` takes each the whole way, through the desk and the search for reports. */
+const isWhole = process.argv.includes("--books");
 const at = process.argv.indexOf("--save");
 const directory = at < 0 ? null : (process.argv[at + 1] ?? "planted");
 if (directory !== null) mkdirSync(directory, { recursive: true });
 
-const books = [...singles(), ...pairs(), ...soundBooks()];
-const results = new Map<PlantedBook, string | null>();
-for (const [index, planted] of books.entries()) {
-  const fault = judge(
+const claimFault = (planted: PlantedBook): string | null =>
+  judge(
     planted,
     reviewClaim(planted.claim, () => undefined),
   );
-  results.set(planted, fault);
-  if (fault !== null) console.log(`${planted.kind} ${planted.name}\n    ${fault}`);
+
+const wholeFault = async (planted: PlantedBook): Promise<string | null> =>
+  judgeBook(planted, await reviewBook(planted.book));
+
+const planted = [...singles(), ...pairs(), ...soundBooks()];
+const books = isWhole ? planted.filter(({ expectedInBook }) => expectedInBook !== null) : planted;
+const results = new Map<PlantedBook, string | null>();
+for (const [index, book] of books.entries()) {
+  const fault = isWhole ? await wholeFault(book) : claimFault(book);
+  results.set(book, fault);
+  if (fault !== null) console.log(`${book.kind} ${book.name}\n    ${fault}`);
   if (directory === null) continue;
-  const name = `${String(index + 1).padStart(3, "0")} ${planted.name.replaceAll(/[^\w -]/g, "")}.xlsx`;
-  writeFileSync(join(directory, name), await saveXlsx(planted.book));
+  const name = `${String(index + 1).padStart(3, "0")} ${book.name.replaceAll(/[^\w -]/g, "")}.xlsx`;
+  writeFileSync(join(directory, name), await saveXlsx(book.book));
 }
 
 console.log("\n| workbooks | made | right |\n|---|---|---|");

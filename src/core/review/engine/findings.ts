@@ -7,6 +7,7 @@ import type { Finding, Rank } from "../finding.ts";
 import { quantityInWords } from "../quantityWords.ts";
 import { gravestFirst } from "../reviewWords.ts";
 import { recomputedInWords } from "../shownDigits.ts";
+import { agrees } from "./agreement.ts";
 import { cellsOfRun } from "./changeWords.ts";
 import type { Intended } from "./intended.ts";
 import type { Bench } from "./trial.ts";
@@ -15,6 +16,7 @@ import {
   notReproduced,
   oneDiffers,
   rowsBeyond,
+  slips,
   summaryInside,
   textsLeftOut,
   toDo,
@@ -113,11 +115,21 @@ function mismatchFindings({ bench, compared, explanation, errorsUnknown, blame }
       wrong[0]!.reported.quantity,
       bench.claim.drivers.map((line) => line.name),
     );
-    const what = oneDiffers(name, compared.length);
+    const what = oneDiffers(name, compared.length, slipOf(wrong[0]!));
     return [finding({ rank, code: "one-number-differs", cells, ...farthest(wrong), what, toDo: toDo.oneNumber })];
   }
   const what = notReproduced(wrong.length, compared.length);
   return [finding({ rank, code: "not-reproduced", cells, ...farthest(wrong), what, toDo: toDo.unexplained })];
+}
+
+/** A slip that one number can come from: its sign, or a factor of ten, a hundred or a thousand. */
+function slipOf({ reported, recomputed }: Comparison): string | null {
+  if (recomputed === null) return null;
+  const scaledTo = (factor: number): boolean =>
+    agrees({ value: factor * reported.value, halfUnit: Math.abs(factor) * reported.halfUnit }, recomputed);
+  if (scaledTo(-1)) return slips.sign;
+  const power = [0.001, 0.01, 0.1, 10, 100, 1000].find(scaledTo);
+  return power === undefined ? null : slips.power(power);
 }
 
 /** What the claimed range leaves off or takes in, whether or not the report used it so. */

@@ -1,3 +1,4 @@
+import { roundedTwice } from "./agreement.ts";
 import type { MomentSolution } from "../../numeric/momentSolver.ts";
 import type { Quantity, ReportedNumber } from "../claim.ts";
 import { isErrorQuantity, plainQuantity, wholeValue } from "./quantities.ts";
@@ -34,8 +35,8 @@ const targetOf = (reported: ReportedNumber, asClaimed: number | null): SieveTarg
   reported,
   quantity: reported.quantity,
   asClaimed,
-  least: reported.value - reported.halfUnit * (1 + 1e-6),
-  most: reported.value + reported.halfUnit * (1 + 1e-6),
+  least: reported.value - reported.halfUnit * roundedTwice,
+  most: reported.value + reported.halfUnit * roundedTwice,
   ofConstant:
     reported.quantity.kind === "prediction" || ("term" in reported.quantity && reported.quantity.term === null),
   needsBreads: isErrorQuantity(reported.quantity),

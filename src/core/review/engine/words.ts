@@ -102,7 +102,7 @@ function numbersSentence({
       alternatives === 0
         ? ""
         : ` ${alternatives === 1 ? "Another change does" : `${alternatives} other changes do`} so too.`;
-    return `The reported numbers do not come out of the cells as claimed. They do if this was done: ${explanation}${others}`;
+    return `The reported numbers do not come out of the cells as claimed, but they do as follows. ${explanation}${others}`;
   }
   if (errorsUnknown)
     return `The coefficients come out of the cells, the figures that rest on standard errors do not.${more}`;
@@ -148,8 +148,16 @@ export const textsLeftOut = (cells: readonly string[], count: number): string =>
 export const notReproduced = (disagreeing: number, compared: number): string =>
   `${disagreeing} of ${compared} reported numbers ${disagreeing === 1 ? "does" : "do"} not come out of the cells as claimed, and no change that was tried gives them all.`;
 
-export const oneDiffers = (name: string, compared: number): string =>
-  `${capitalised(name)} is the only one of ${compared} reported numbers that does not come out of the cells.`;
+export const oneDiffers = (name: string, compared: number, slip: string | null): string =>
+  `${capitalised(name)} is the only one of ${compared} reported numbers that does not come out of the cells.${slip === null ? "" : ` It would come out ${slip}; one number alone cannot show whether that was done.`}`;
+
+export const slips = {
+  sign: "with its sign changed",
+  power: (factor: number) =>
+    factor > 1
+      ? `${factor.toLocaleString("en-US")} times as large`
+      : `${Math.round(1 / factor).toLocaleString("en-US")} times smaller`,
+} as const;
 
 export const lawsDiffer = (drivers: readonly string[]): string =>
   `The kind of standard errors is allowed, but the conclusion on ${listInWords(drivers)} hangs on the version, the lags or the law that the p-value is taken from.`;

@@ -1,0 +1,55 @@
+import { describe, expect, it } from "vitest";
+import { reviewClaim } from "../../src/core/review/reviewClaim.ts";
+import { hypotheses } from "../../src/core/review/engine/change.ts";
+import { type PlantedBook, pairs, singles, soundBooks } from "./books.ts";
+import { judge, judgeBook } from "./judge.ts";
+import { reviewBook } from "./wholeBook.ts";
+
+const faultOf = (planted: PlantedBook): string | null =>
+  judge(
+    planted,
+    reviewClaim(planted.claim, () => undefined),
+  );
+
+const wrongOf = (books: readonly PlantedBook[]): string[] =>
+  books.flatMap((planted) => {
+    const fault = faultOf(planted);
+    return fault === null ? [] : [`${planted.name}: ${fault}`];
+  });
+
+describe("planted faults", () => {
+  it("are made of every hypothesis, in six data sets at least", () => {
+    const books = singles();
+    const planted = new Set(
+      books.flatMap(({ expected }) => expected.map((one) => ("hypothesis" in one ? one.hypothesis : ""))),
+    );
+    expect(hypotheses.filter((one) => !planted.has(one))).toEqual([]);
+    expect(new Set(books.map(({ name }) => name.split(":")[0])).size).toBeGreaterThanOrEqual(6);
+    expect(books.length).toBeGreaterThanOrEqual(60);
+  });
+
+  it("are each explained", () => {
+    expect(wrongOf(singles())).toEqual([]);
+  });
+
+  it("are explained in nine of ten pairs", () => {
+    const books = pairs();
+    expect(wrongOf(books).length).toBeLessThanOrEqual(books.length / 10);
+  });
+
+  it("are not found where there are none", () => {
+    const books = soundBooks();
+    expect(books).toHaveLength(20);
+    expect(wrongOf(books)).toEqual([]);
+  });
+
+  it("are found in workbooks as they are opened", async () => {
+    const all = [...singles(), ...pairs(), ...soundBooks()].filter(({ expectedInBook }) => expectedInBook !== null);
+    const wrong: string[] = [];
+    for (const planted of all.filter((_, index) => index % 16 === 3)) {
+      const fault = judgeBook(planted, await reviewBook(planted.book));
+      if (fault !== null) wrong.push(`${planted.name}: ${fault}`);
+    }
+    expect(wrong).toEqual([]);
+  });
+});
