@@ -12,6 +12,7 @@ import {
   tablesOf,
   type PlacedTable,
 } from "../workbook/tables.ts";
+import { renameTable } from "../workbook/renameInFormulas.ts";
 import { writeCells } from "../workbook/write.ts";
 import { areaAt } from "./addresses.ts";
 import { asText, integerAt, stateAt, textAt } from "./arguments.ts";
@@ -187,6 +188,7 @@ function rename(host: Host, found: PlacedTable, name: string): void {
   const other = tableNamed(host.book, name);
   const taken = (other !== null && other.table !== found.table) || nameCalled(host.book, name) !== null;
   if (taken) throw fault("ItemAlreadyExists");
+  renameTable(host.book, found.table.name, name);
   forgetTable(host.book, found.table.name);
   found.table.name = name;
   announceTable(host.book, found);

@@ -3,6 +3,7 @@ import { absoluteAddress, intersectionOf, type Area } from "./areas.ts";
 import { nameOf, recordOf, sheetIds, sheetNamed, type Book, type BookChange } from "./book.ts";
 import { usedWithin } from "./cells.ts";
 import type { LinkRecord, SeriesRecord, SheetRecord } from "./records.ts";
+import { renameColumns } from "./renameInFormulas.ts";
 import { announceTable, areaOfTable } from "./tables.ts";
 
 type Edit = Extract<BookChange, { readonly kind: "edited" | "calculated" }>;
@@ -31,7 +32,9 @@ function refreshHeadings(book: Book, change: Edit): void {
   for (const table of recordOf(book, change.sheet).tables) {
     const placed = { sheet: change.sheet, table };
     const headings = { ...areaOfTable(placed), rows: 1 };
-    if (intersectionOf(headings, change) !== null) announceTable(book, placed);
+    if (intersectionOf(headings, change) === null) continue;
+    renameColumns(book, placed);
+    announceTable(book, placed);
   }
 }
 

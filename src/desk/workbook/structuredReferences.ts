@@ -42,6 +42,30 @@ export function spellOut(formula: string, standpoint: Standpoint): string {
   });
 }
 
+/** New words for a table and its columns. */
+export interface Renaming {
+  readonly table: string;
+  /** The table's new name, where it has one. */
+  readonly to?: string;
+  /** New headings by the old ones in small letters. */
+  readonly columns: ReadonlyMap<string, string>;
+}
+
+/** The formula with a table and its columns by their new names. */
+export function renamed(formula: string, { table, to, columns }: Renaming): string {
+  return formula.replaceAll(spoken, (whole: string, ...found: (string | undefined)[]) => {
+    const [called, brackets, bare] = found;
+    if ((called ?? bare ?? "").toLowerCase() !== table.toLowerCase()) return whole;
+    const name = to ?? called ?? bare ?? "";
+    if (brackets === undefined) return name;
+    const parts = brackets.replaceAll(/(?<=\[@?)((?:'[^]|[^@[\]'])+)(?=\])/g, (part: string) => {
+      const now = columns.get(unescaped(part.trim()).toLowerCase());
+      return now === undefined ? part : now.replaceAll(/['#@[\]]/g, "'$&");
+    });
+    return name + parts;
+  });
+}
+
 interface TableParts {
   /** "#headers", "#data" and the like, in small letters. */
   readonly items: readonly string[];

@@ -94,6 +94,26 @@ describe("formulas that speak of a table", () => {
     expect(formulas.map((_, row) => sheet.formula(`Work!A${row + 1}`))).toEqual(formulas);
   });
 
+  it("speak of a column by its new heading, and of the table by its new name", async () => {
+    const sheet = await open(book());
+    await enter(sheet);
+    sheet.edit("'My data'!B2", "Price [net], #2");
+    await sheet.settle();
+    await sheet.Excel.run(async (context) => {
+      context.workbook.tables.getItem("Sales").name = "Turnover";
+      await context.sync();
+    });
+    sheet.edit("'My data'!B3", 101);
+    await sheet.settle();
+    expect(results(sheet)).toEqual([103, 133, 133, "3 Sales[Price]"]);
+    expect(formulas.slice(0, 4).map((_, row) => sheet.formula(`Work!A${row + 1}`))).toEqual([
+      "=SUM(Turnover[Price '[net'], '#2])",
+      `=SUM(Turnover[[#Headers],[#Data],[Price '[net'], '#2]:${inBrackets}])`,
+      "=SUM(Turnover)",
+      "=COUNTA(Turnover[[#All],[Price '[net'], '#2]])&\" Sales[Price]\"",
+    ]);
+  });
+
   it("stand in a saved workbook as they were written, and compute when it is opened again", async () => {
     const sheet = await open(book());
     await enter(sheet);
