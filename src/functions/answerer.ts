@@ -4,7 +4,7 @@ import type { Answer } from "../core/answer/answer.ts";
 import type { Finding, Inquiry } from "../core/answer/inquire.ts";
 import { modelOf } from "../core/answer/modelOf.ts";
 import type { Question } from "../core/answer/question.ts";
-import { type Result, success } from "../core/problem/result.ts";
+import { type Result, failure, success } from "../core/problem/result.ts";
 import type { Source } from "../core/table/source.ts";
 import { fitCache } from "./fitCache.ts";
 import type { FunctionId } from "./functionTable.ts";
@@ -68,6 +68,10 @@ function questionOf(
   if (!data.ok) return data;
   const model = modelOf(settings.value, data.value.parts);
   if (!model.ok) return model;
+  const { spanned } = data.value;
+  if (spanned !== null && model.value.drivers.some(({ column }) => column === spanned.column)) {
+    return failure(spanned.problem);
+  }
   const question = { source: data.value.source, model: model.value, options: settings.value.options };
   return success({ question, data: data.value });
 }

@@ -50,6 +50,6 @@ export function repeatedHeading(columns: readonly Column[]): Problem | null {
   return { code: "repeated-heading", heading: first.name, cells };
 }
 
-/** A time column may be a driver too; as the key it goes by a name of its own. */
-export const apartFrom = (others: readonly Column[], column: Column): Column =>
-  others.some(({ name }) => sameName(name, column.name)) ? { ...column, name: `${column.name} (key)` } : column;
+/** A column that stands in two arguments goes by a name of its own in the later one: a time column may be a driver too. */
+export const apartFrom = (others: readonly Column[], column: Column, as: "key" | "outcome"): Column =>
+  others.some(({ name }) => sameName(name, column.name)) ? { ...column, name: `${column.name} (${as})` } : column;

@@ -10,6 +10,15 @@ import { type RawCells, columnOf, isMissing, rawCells, usedHeight, widthOf } fro
 export interface CalledData {
   readonly source: Source;
   readonly parts: Parts;
+  /** The outcome's column where the drivers' rectangle spans it: it must be left out by the setting "columns". */
+  readonly spanned: SpannedOutcome | null;
+}
+
+export interface SpannedOutcome {
+  /** The name that it goes by among the drivers. */
+  readonly column: string;
+  /** What is wrong where it is not left out. */
+  readonly problem: Problem;
 }
 
 interface Argument {
@@ -38,14 +47,25 @@ export function readData(values: Readonly<Record<string, unknown>>): Result<Call
   if (lower !== undefined) return failure(withoutHeadings(given.outcome, lower));
   const rows = [firstRow, heightOfData(Object.values(given))] as const;
   const outcome = columnsOf(given.outcome, rows);
-  const drivers = columnsOf(given.drivers, rows);
-  const repeated = repeatedHeading([...outcome, ...drivers]);
+  const called = columnsOf(given.drivers, rows);
+  const repeated = repeatedHeading(called);
   if (repeated !== null) return failure(repeated);
-  const keys = columnsOf(given.key, rows).map((column) => apartFrom([...outcome, ...drivers], column));
+  const drivers = called.map((column) => spannedName(outcome[0]!, column));
+  const keys = columnsOf(given.key, rows).map((column) => apartFrom([...outcome, ...drivers], column, "key"));
   return success({
     source: { columns: [...outcome, ...drivers, ...keys], rowCount: rows[1] - firstRow },
     parts: partsOf(outcome, drivers, keys),
+    spanned: spannedIn(outcome[0]!, called),
   });
+}
+
+/** A rectangle of drivers may span the outcome, whose column then goes by a name of its own there. */
+const spannedName = (outcome: Column, column: Column): Column => apartFrom([outcome], column, "outcome");
+
+function spannedIn(outcome: Column, drivers: readonly Column[]): SpannedOutcome | null {
+  const problem = repeatedHeading([outcome, ...drivers]);
+  const again = drivers.find((column) => spannedName(outcome, column) !== column);
+  return problem === null || again === undefined ? null : { column: spannedName(outcome, again).name, problem };
 }
 
 /** The outcome has a heading and another range has none, so that their data differ in height. */

@@ -286,3 +286,27 @@ describe("calls in Excel's hands", () => {
     }
   });
 });
+
+describe("drivers whose rectangle spans the outcome", () => {
+  const spanning = [
+    ["Price", "Repairs", "Rain"],
+    [1, 5, 2],
+    [3, 7, 4],
+    [5, 6, 7],
+  ];
+
+  it("are those that the setting names", async () => {
+    const desk = answering();
+    await call(desk, "COEFFICIENTS", outcome, spanning, "columns: 1, 3");
+    expect(desk.asked[0]?.model.drivers.map(({ column: name }) => name)).toEqual(["Price", "Rain"]);
+  });
+
+  it("are refused where nothing leaves the outcome out", async () => {
+    const desk = answering();
+    expect(await call(desk, "COEFFICIENTS", outcome, spanning)).toMatchObject({
+      error: "#VALUE!",
+      message: expect.stringContaining('"Repairs" stands above more than one column') as string,
+    });
+    expect(desk.asked).toEqual([]);
+  });
+});

@@ -161,11 +161,32 @@ describe("arguments that cannot be used", () => {
       code: "unequal-heights",
       second: "the key",
     });
-    expect(problemOf(column("Price", 1), [["price"], [2]])).toEqual({
+    expect(
+      problemOf(column("Repairs", 1), [
+        ["price", "Price"],
+        [2, 3],
+      ]),
+    ).toMatchObject({
       code: "repeated-heading",
-      heading: "Price",
-      cells: ["row 1 of outcome, column 1", "row 1 of drivers, column 1"],
+      cells: ["row 1 of drivers, column 1", "row 1 of drivers, column 2"],
     });
+  });
+
+  it("takes drivers whose rectangle spans the outcome, under a name of its own there", () => {
+    const { parts, spanned } = read(column("Price", 1), [
+      ["Rain", "price", "Fuel"],
+      [4, 1, 6],
+    ]);
+    expect(parts).toMatchObject({ outcome: "Price", drivers: ["Rain", "price (outcome)", "Fuel"] });
+    expect(spanned).toEqual({
+      column: "price (outcome)",
+      problem: {
+        code: "repeated-heading",
+        heading: "Price",
+        cells: ["row 1 of outcome, column 1", "row 1 of drivers, column 2"],
+      },
+    });
+    expect(read(column("Price", 1), [["Rain"], [4]]).spanned).toBeNull();
   });
 });
 
