@@ -9,7 +9,7 @@ import {
   comparedDrivers,
   comparedLines,
 } from "./comparison.ts";
-import { figureFormat, formatFor, pValueFormat } from "./numberFormats.ts";
+import { figureFormat, formatFor, numberHeadingFormat, pValueFormat } from "./numberFormats.ts";
 import type { PlanCell, PlanFormat, SheetPlan } from "./plan.ts";
 import { cautionLine } from "./plainWordsSection.ts";
 import { type Section, cellOf, number, rectangle, section, stack, text } from "./section.ts";
@@ -91,10 +91,16 @@ function notesPart(models: readonly ComparedModel[], columns: number): Section {
 
 const modelHeadings = (models: readonly ComparedModel[]): PlanCell[] => models.map(({ name }) => text(name));
 
+const headingsOf = ({ length }: readonly ComparedModel[]): PlanFormat => ({
+  area: { row: 1, column: labels, rows: 1, columns: length },
+  align: "right",
+  numberFormat: numberHeadingFormat,
+});
+
 interface DriverLine {
   readonly label: string;
   readonly cell: (driver: DriverAnswer) => PlanCell;
-  readonly format: (drivers: readonly DriverAnswer[]) => string | null;
+  readonly format: (drivers: readonly DriverAnswer[]) => string;
 }
 
 const amounts = (drivers: readonly DriverAnswer[]): string => formatFor(drivers.map((driver) => driver.standardError));
@@ -105,7 +111,7 @@ const driverLines = (level: string): readonly DriverLine[] => [
   { label: `${level} interval from`, cell: ({ low }) => number(low), format: amounts },
   { label: "to", cell: ({ high }) => number(high), format: amounts },
   { label: "p-value", cell: ({ pValue }) => number(pValue), format: () => pValueFormat },
-  { label: "firm or leaning", cell: ({ firmness }) => text(firmness.kind), format: () => null },
+  { label: "firm or leaning", cell: ({ firmness }) => text(firmness.kind), format: () => numberHeadingFormat },
 ];
 
 function driversPart(models: readonly ComparedModel[]): Section {
@@ -120,9 +126,13 @@ function driversPart(models: readonly ComparedModel[]): Section {
     [
       { area: { row: 0, column: 0, rows: 1, columns }, style: "heading" },
       { area: { row: 1, column: 0, rows: 1, columns }, style: "table heading", wrap: true },
-      { area: { row: 1, column: labels, rows: 1, columns: models.length }, align: "right" },
+      headingsOf(models),
       { area: { row: 2, column: 0, rows: rows.length, columns: labels }, style: "label" },
-      { area: { row: 2, column: labels, rows: rows.length, columns: models.length }, align: "right" },
+      {
+        area: { row: 2, column: labels, rows: rows.length, columns: models.length },
+        style: "sentence",
+        align: "right",
+      },
       ...formats,
     ],
   );
@@ -145,11 +155,10 @@ function driverFormats(
   const drivers = found.filter((driver) => driver !== null);
   return [
     { area: { row, column: 0, rows: 1, columns: labels + columns }, style: "in force" },
-    ...lines.flatMap(({ format }, index): PlanFormat[] => {
-      const numberFormat = format(drivers);
-      const area = { row: row + index, column: labels, rows: 1, columns };
-      return numberFormat === null ? [] : [{ area, numberFormat }];
-    }),
+    ...lines.map(({ format }, index): PlanFormat => ({
+      area: { row: row + index, column: labels, rows: 1, columns },
+      numberFormat: format(drivers),
+    })),
   ];
 }
 
@@ -167,9 +176,14 @@ function linesPart(models: readonly ComparedModel[]): Section {
     [
       { area: { row: 0, column: 0, rows: 1, columns }, style: "heading" },
       { area: { row: 1, column: 0, rows: 1, columns }, style: "table heading", wrap: true },
-      { area: { row: 1, column: labels, rows: 1, columns: models.length }, align: "right" },
+      headingsOf(models),
       { area: { row: 2, column: 0, rows: lines.length, columns: labels }, style: "label" },
-      { area: { row: 2, column: labels, rows: lines.length, columns: models.length }, align: "right", wrap: true },
+      {
+        area: { row: 2, column: labels, rows: lines.length, columns: models.length },
+        style: "sentence",
+        align: "right",
+        wrap: true,
+      },
       ...lines.map(({ values }, index): PlanFormat => ({
         area: { row: 2 + index, column: labels, rows: 1, columns: models.length },
         numberFormat: figureFormat(values[0]),
@@ -187,16 +201,23 @@ function madePart(models: readonly ComparedModel[], { models: facts }: Compariso
       ["Data", address],
       ...settings,
       ...answer.notes.map((note) => ["Done to the data", note] as const),
-      ["Fingerprint of the data (SHA-256)", fingerprint],
+      ["Fingerprint (SHA-256)", fingerprint],
     ];
-    return lines.map(([label, value], line) => [text(line === 0 ? name : ""), text(label), text(value)]);
+    return lines.map(([label, value], line) => ({ name: line === 0 ? name : "", label, value }));
   });
   return section(
-    [[text("How this was made")], ...rows],
+    [[text("How this was made")], ...rows.map(({ name, label, value }) => [text(name), text(label), text(value)])],
     [
       { area: { row: 0, column: 0, rows: 1, columns: labels + models.length }, style: "heading" },
       { area: { row: 1, column: 0, rows: rows.length, columns: labels }, style: "label" },
-      { area: { row: 1, column: labels, rows: rows.length, columns: 1 }, align: "left" },
+      ...rows.map(({ value }, index): PlanFormat => ({
+        area: { row: index + 1, column: labels, rows: 1, columns: models.length },
+        style: "sentence",
+        align: "left",
+        merge: true,
+        wrap: true,
+        rowHeight: textHeight(value, models.length * widths.model),
+      })),
     ],
   );
 }

@@ -77,6 +77,6 @@ function wordsFor({ standing, record }: SheetStatus): string {
     case "cut off":
       return `Cut off from its data. ${messageOf(standing.problem)}`;
     case "not known":
-      return "Nothing is known of its data.";
+      return "Values that stay; the sheet itself says what they were made from.";
   }
 }
