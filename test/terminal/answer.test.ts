@@ -222,6 +222,21 @@ describe("--save", () => {
     expect(prints[1]).toBe(prints[0]);
   });
 
+  it("--live: an outcome that stands between its drivers, in groups that cross", async () => {
+    const lines = Array.from({ length: 40 }, (_, row) => {
+      const [a, b] = [(row * 7) % 11, (row * 5) % 13];
+      return `S${row % 5},M${row % 8},${a},${3 + 2 * a - b + ((row * row) % 7)},${b}`;
+    });
+    const files = shelf({ "mid.csv": ["Shop,Month,A,Y,B", ...lines].join("\n") });
+    const asked = ["mid.csv", "--outcome", "Y", "--drivers", "A,B", "--groups", "Shop", "--second-groups", "Month"];
+    await run([...asked, "--live", "--save", "live.xlsx"], files);
+    const opened = await openXlsx(files.files.get("live.xlsx")!);
+    if (!opened.ok) throw new Error(opened.because);
+    const sheet = opened.value.sheets.at(-1)!;
+    expect(JSON.stringify(sheet.rows)).toContain("=FOOTING.ANSWER(mid!$D$1:$D$41,mid!$B$1:$E$41,");
+    expect(JSON.stringify(sheet.rows)).not.toContain('"error"');
+  });
+
   it("--live: the same figures as worksheet functions with their values", async () => {
     await run([...months, "--save", "kept.xlsx"], demo);
     await run([...months, "--live", "--save", "live.xlsx"], demo);
