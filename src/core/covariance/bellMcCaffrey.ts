@@ -1,6 +1,6 @@
 import type { Fit } from "../fit/fit.ts";
-import { basisTimes, weightedCrossProducts } from "../numeric/crossProducts.ts";
-import { sum, sumOfSquares } from "../numeric/sums.ts";
+import { combinationMoments } from "../numeric/combinationMoments.ts";
+import { sumOfSquares } from "../numeric/sums.ts";
 import { basisOf } from "./basisOf.ts";
 import { eachCoefficient } from "./basisWeights.ts";
 import { selfFittingRows } from "./leverageOfOne.ts";
@@ -18,15 +18,12 @@ export function bellMcCaffreyDegrees(fit: Fit, weights = eachCoefficient(fit)): 
   if (selfFittingRows(fit).length > 0) return null;
   const size = fit.columnCount;
   const { count, values } = weights;
-  return Float64Array.from({ length: count }, (_, l) => degreesOf(fit, values.subarray(l * size, (l + 1) * size)));
-}
-
-/** @param z - the weights of a combination in the basis Q. */
-function degreesOf(fit: Fit, z: Float64Array): number {
-  const { leverages } = fit;
-  const basis = basisOf(fit);
-  const d = basisTimes(basis, z).map((c, i) => c ** 2 / (1 - leverages[i]!));
-  const [inside] = weightedCrossProducts(basis, [d]);
-  const own = d.map((weight, i) => weight ** 2 * (1 - 2 * leverages[i]!));
-  return sumOfSquares(z) ** 2 / (sum(own) + sumOfSquares(inside!.values));
+  const combinations = Array.from({ length: count }, (_, l) => values.subarray(l * size, (l + 1) * size));
+  const divisors = fit.leverages.map((h) => 1 - h);
+  const factors = fit.leverages.map((h) => 1 - 2 * h);
+  const moments = combinationMoments(basisOf(fit), combinations, { divisors, factors });
+  return Float64Array.from(
+    moments,
+    ({ squares, inside }, l) => sumOfSquares(combinations[l]!) ** 2 / (squares + sumOfSquares(inside.values)),
+  );
 }

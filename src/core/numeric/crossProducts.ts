@@ -75,15 +75,3 @@ export function squaredRowLengths(basis: Basis): Float64Array<ArrayBuffer> {
   });
   return lengths;
 }
-
-/** Q z, n values. */
-export function basisTimes(basis: Basis, z: Float64Array): Float64Array<ArrayBuffer> {
-  const product = new Float64Array(basis.columns[0]?.length ?? 0);
-  visitBasis(basis, ({ values, first, rows }) => {
-    z.forEach((weight, j) => {
-      const start = j * basisBlockRows;
-      for (let i = 0; i < rows; i++) product[first + i]! += weight * values[start + i]!;
-    });
-  });
-  return product;
-}

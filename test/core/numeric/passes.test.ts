@@ -1,6 +1,7 @@
 import { describe, expect, it } from "vitest";
 import { visitBasis } from "../../../src/core/numeric/basis.ts";
-import { basisTimes, squaredRowLengths, weightedCrossProducts } from "../../../src/core/numeric/crossProducts.ts";
+import { combinationMoments } from "../../../src/core/numeric/combinationMoments.ts";
+import { squaredRowLengths, weightedCrossProducts } from "../../../src/core/numeric/crossProducts.ts";
 import { filterColumns } from "../../../src/core/numeric/fourier.ts";
 import { addGram, addScore, copyRows, visitGroups } from "../../../src/core/numeric/groupParts.ts";
 import { keepRows, takeLessEarlier } from "../../../src/core/numeric/lessEarlier.ts";
@@ -57,20 +58,30 @@ describe.each(shapes)("passes over $n rows of $k columns", ({ n, k }) => {
     );
   });
 
-  it("row lengths and products with a vector", () => {
-    const z = column(k);
-    const lengths = squaredRowLengths(basis);
-    const product = basisTimes(basis, z);
-    for (let row = 0; row < n; row++) {
-      expect(lengths[row]).toBeCloseTo(
-        q.reduce((sum, qi) => sum + qi[row]! ** 2, 0),
-        13,
+  it("row lengths", () => {
+    squaredRowLengths(basis).forEach((length, row) => {
+      const expected = q.reduce((sum, qi) => sum + qi[row]! ** 2, 0);
+      expect(length).toBeCloseTo(expected, 13);
+    });
+  });
+
+  it("moments of several combinations of the basis", () => {
+    const combinations = [column(k), column(k)];
+    const [divisors, factors] = [column(n).map((value) => 1 + value ** 2), column(n)];
+    const found = combinationMoments(basis, combinations, { divisors, factors });
+    combinations.forEach((z, l) => {
+      const d = weights.map((_, row) => q.reduce((sum, qi, i) => sum + qi[row]! * z[i]!, 0) ** 2 / divisors[row]!);
+      expect(found[l]!.squares).toBeCloseTo(
+        d.reduce((sum, value, row) => sum + value ** 2 * factors[row]!, 0),
+        10,
       );
-      expect(product[row]).toBeCloseTo(
-        q.reduce((sum, qi, i) => sum + qi[row]! * z[i]!, 0),
-        13,
+      q.forEach((left, i) =>
+        q.forEach((right, j) => {
+          const product = d.reduce((sum, value, row) => sum + value * left[row]! * right[row]!, 0);
+          expect(found[l]!.inside.values[i * k + j]).toBeCloseTo(product, 10);
+        }),
       );
-    }
+    });
   });
 
   it("groups add up their rows, wherever blocks end", () => {
