@@ -1,12 +1,15 @@
 import { findRegressions } from "../app/review/findRegressions.ts";
 import { reviewEach } from "../app/review/reviewEach.ts";
 import { reviewFactsOf } from "../app/review/reviewFacts.ts";
+import { nearestName } from "../core/problem/nearestName.ts";
+import type { Problem } from "../core/problem/problem.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";
 import type { BookReview } from "../core/review/claimReview.ts";
 import type { Asked } from "../core/review/claimsOf.ts";
 import { reviewText } from "../core/review/reviewText.ts";
 import { changesConclusion } from "../core/review/reviewWords.ts";
 import { addressOf, parseAddress } from "../core/table/address.ts";
+import { plainHeading } from "../core/table/headingRow.ts";
 import { cautionLine } from "../sheet/plainWordsSection.ts";
 import { planReview } from "../sheet/reviewSheet.ts";
 import { type OpenBook, type Surroundings, quiet } from "./answerCommand.ts";
@@ -39,7 +42,13 @@ export async function reviewCommand(command: ReviewCommand, world: Surroundings)
 }
 
 /** What the command asks of the book; a file of values alone can be asked about typed results only. */
-function askedOf({ book, sheet, reported, outcome, drivers }: ReviewCommand, file: BookFile): Result<Asked> {
+function askedOf(command: ReviewCommand, file: BookFile): Result<Asked> {
+  const { book, reported, outcome, drivers } = command;
+  const known = file.book.sheets.map(({ name }) => name);
+  const sheet = known.find((name) => plainHeading(name) === plainHeading(command.sheet ?? "")) ?? null;
+  if (sheet === null && command.sheet !== null) {
+    return failure({ code: "unknown-place", place: command.sheet, nearest: nearestName(command.sheet, known) });
+  }
   if (reported === null) {
     return file.original === null ? failure({ code: "no-formulas", file: book }) : success({ pointed: null, sheet });
   }
@@ -70,7 +79,7 @@ async function reviewIn(opened: OpenBook, asked: Asked, { file, command, world }
   const listed = await findRegressions({ host: opened.host, analyst }, asked, quiet);
   if (!listed.ok) return listed;
   const { claims, unread, craft } = listed.value;
-  if (claims.length === 0 && unread.length === 0) return failure({ code: "nothing-to-review", where: command.book });
+  if (claims.length === 0) return failure(nothingToReview(command, unread));
   const reviews = await reviewEach(claims, { analyst, errand: quiet });
   if (!reviews.ok) return reviews;
   const review: BookReview = { claims: reviews.value, unread, craft };
@@ -79,6 +88,15 @@ async function reviewIn(opened: OpenBook, asked: Asked, { file, command, world }
   const out = command.json ? JSON.stringify(reviewJson(review), null, 2) : report(review, saved.value);
   return success({ out, changesConclusion: changesConclusion(review) });
 }
+
+/** Problems list ten at most. */
+const mostListed = 10;
+
+const nothingToReview = ({ book }: ReviewCommand, unread: BookReview["unread"]): Problem => ({
+  code: "nothing-to-review",
+  where: book,
+  unread: unread.slice(0, mostListed).map(({ cell, why }) => `${cell} (${why.replace(/\.$/, "")})`),
+});
 
 /** Writes the review sheet through the same adapter as in Excel, then puts it into a copy of the file. */
 async function written(

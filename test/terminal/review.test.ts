@@ -77,7 +77,7 @@ describe("what is asked of the book", () => {
 
   it("is everything, or one sheet", async () => {
     expect(await askedBy([])).toEqual({ pointed: null, sheet: null });
-    expect(await askedBy(["--sheet", "Handover"])).toEqual({ pointed: null, sheet: "Handover" });
+    expect(await askedBy(["--sheet", "handover "])).toEqual({ pointed: null, sheet: "Handover" });
   });
 
   it("is the cells pointed at, with what is said of their data", async () => {
@@ -144,6 +144,7 @@ describe("faults of the input", () => {
     ["data without the cells that report", ["book.xlsx", "--outcome", "Repairs"], "missing-option"],
     ["reported cells on no sheet", ["book.xlsx", "--reported", "A4:D8"], "missing-option"],
     ["no such file", ["gone.xlsx"], "unreadable-file"],
+    ["no such sheet", ["book.xlsx", "--sheet", "Handovr"], "unknown-place"],
     ["values alone", ["values.csv"], "no-formulas"],
     ["a copy over the workbook itself", ["book.xlsx", "--save", "./book.xlsx"], "unwritable-file"],
   ])("%s", async (_, line, code) => {
@@ -158,6 +159,16 @@ describe("faults of the input", () => {
     const ran = await reviewer([]).run(["book.xlsx"], book);
     expect(ran.status).toBe(2);
     expect(ran.err).toContain("No regression was found in book.xlsx");
+  });
+
+  it("a book whose formulas cannot be read, each with the reason", async () => {
+    const analyst = {
+      ...wholeAnalyst,
+      listClaims: () => Promise.resolve(success({ ...bookReviewFixture, claims: [] })),
+    };
+    const ran = await terminalWith(["review", "book.xlsx"], book, analyst);
+    expect(ran.status).toBe(2);
+    expect(ran.err).toContain("could be read: Sums!D9 (It reads its range with OFFSET).");
   });
 
   it("a command that there is not", async () => {

@@ -107,7 +107,8 @@ export type FileProblem =
 export type ReviewProblem =
   /** The cells pointed at report no regression that can be read. */
   | { readonly code: "no-report"; readonly where: string }
-  | { readonly code: "nothing-to-review"; readonly where: string }
+  /** `unread`: cells whose formulas look like a regression, with the reason why they could not be read. */
+  | { readonly code: "nothing-to-review"; readonly where: string; readonly unread: readonly string[] }
   /** Its data lie across, or on several sheets. */
   | { readonly code: "regression-not-in-columns"; readonly title: string };
 

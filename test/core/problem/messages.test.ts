@@ -199,7 +199,7 @@ const sentences: Sentences = {
     "No reported regression can be read from Handover!A1:A2. Choose the whole block with its headings (coefficient, standard error, t ratio, p-value) and the drivers' names beside the figures, or a cell with a formula such as LINEST or SLOPE.",
   ],
   "nothing-to-review": [
-    { code: "nothing-to-review", where: "book.xlsx" },
+    { code: "nothing-to-review", where: "book.xlsx", unread: [] },
     "No regression was found in book.xlsx: no formula such as LINEST, SLOPE or RSQ, and no block of figures under headings such as coefficient and standard error. If results are typed in, point at their cells and say which columns are the outcome and the drivers.",
   ],
   "regression-not-in-columns": [
