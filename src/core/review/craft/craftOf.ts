@@ -11,6 +11,7 @@ import type { ReportBlock } from "../typed/reportBlocks.ts";
 import { addressesAlong, craftFinding } from "./craftFinding.ts";
 import { found } from "./craftWords.ts";
 import { type CheckedLine, hiddenLine, typedOverFormulas, unusableCells } from "./lineChecks.ts";
+import { olderResults } from "./olderResults.ts";
 import { headingsInside, shiftedRanges } from "./rangeChecks.ts";
 import { repeatedRows } from "./repeatedRows.ts";
 import { typedResults } from "./reportChecks.ts";
@@ -51,6 +52,7 @@ function ofClaim(claim: Claim, book: Book): Finding[] {
     ...lines.flatMap(typedOverFormulas),
     ...lines.flatMap(hiddenLine),
     ...shiftedRanges(named(outcome), drivers.map(named)),
+    ...olderResults(claim),
     ...hiddenRows(outcome),
     ...hiddenSheets(lines),
     ...repeatedRows(

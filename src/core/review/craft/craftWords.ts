@@ -24,6 +24,8 @@ export const found = {
     `${counted(count, "number")} of the report ${count === 1 ? "is" : "are"} typed in, where ${others(formulas)}.`,
   typedResults: (count: number) =>
     `The ${counted(count, "number")} of the report ${count === 1 ? "is" : "are"} typed in: no formula leads from the data to them.`,
+  olderResults: (count: number) =>
+    `${counted(count, "coefficient")} of a formula ${count === 1 ? "is" : "are"} not what its cells give now: the formula was not calculated since they changed.`,
   byHand: "The workbook calculates only when someone asks, so that results may be older than the cells they rest on.",
   repeated: (count: number, first: string, again: string) =>
     `${counted(count, "row")} of data in ${first} ${count === 1 ? "stands" : "stand"} again, number for number, in ${again}.`,
@@ -42,6 +44,8 @@ export const advice = {
   overFormula: "Put the formula back, or mark the number and say where it comes from.",
   typedAmongFormulas: "Put the formulas back.",
   typedResults: "Let formulas make them, or keep beside them how they were made.",
+  olderResults:
+    "Calculate the workbook (F9) and look at the results again; set calculation to automatic under Formulas.",
   byHand: "Calculate the workbook (F9), and set calculation to automatic under Formulas.",
   repeated: "See whether the rows were pasted twice; if so, take one copy out.",
 } as const;

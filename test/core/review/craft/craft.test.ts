@@ -16,6 +16,23 @@ const sound = (): Rows =>
     (day * 3) % 17,
   ]);
 
+const numberIn = (cell: BookCell): number =>
+  typeof cell === "number"
+    ? cell
+    : typeof cell === "object" && cell !== null && "value" in cell
+      ? Number(cell.value)
+      : NaN;
+
+/** What SLOPE gives of cups on price, the price so many rows further on. */
+function slopeIn(rows: Rows, further = 0): number {
+  const pairs = rows
+    .slice(0, rows.length - further)
+    .map((row, index) => [row[1]!, rows[index + further]![2]!].map(numberIn));
+  const [y, x] = [0, 1].map((side) => pairs.reduce((sum, pair) => sum + pair[side]!, 0) / pairs.length);
+  const products = pairs.reduce((sum, pair) => sum + (pair[0]! - y!) * (pair[1]! - x!), 0);
+  return products / pairs.reduce((sum, pair) => sum + (pair[1]! - x!) ** 2, 0);
+}
+
 const headings: BookCell[] = ["Day", "Cups", "Price", "Rain"];
 
 interface Case {
@@ -23,6 +40,8 @@ interface Case {
   readonly more?: Partial<SheetData>;
   /** With D for the sheet of the data. */
   readonly formula?: string;
+  /** How many rows further on its price stands. */
+  readonly further?: number;
   readonly report?: Rows;
 }
 
@@ -42,7 +61,7 @@ const cases = {
   hiddenRows: { more: { hiddenRows: [3, 4, 5, 30] } },
   hiddenColumn: { more: { hiddenColumns: [2] } },
   hiddenSheet: { more: { hidden: true } },
-  shifted: { formula: "=SLOPE(D!B2:B20,D!C3:C21)" },
+  shifted: { formula: "=SLOPE(D!B2:B20,D!C3:C21)", further: 1 },
   unequal: { formula: "=SLOPE(D!B2:B21,D!C2:C20)" },
   heading: { formula: "=SLOPE(D!B1:B21,D!C1:C21)" },
   wholeColumns: { formula: "=SLOPE(D!B:B,D!C:C)" },
@@ -54,6 +73,7 @@ const cases = {
     ),
   },
   repeated: { rows: changed((rows) => rows.splice(12, 5, ...rows.slice(2, 7))) },
+  older: { formula: "=SLOPE(D!B2:B21,D!C2:C21)+1-1", rows: changed((rows) => (rows[3]![1] = 90)) },
   typed: {
     report: [
       ["Driver", "Coefficient", "Std error"],
@@ -63,20 +83,26 @@ const cases = {
   typedAmong: {
     report: [
       ["Driver", "Coefficient", "Std error"],
-      ["Price", { value: 1.25, formula: slope }, 0.5],
+      ["Price", { value: slopeIn(sound()), formula: slope }, 0.5],
     ],
   },
 } as const satisfies Record<string, Case>;
 
 type Name = keyof typeof cases;
 
+/** The saved result of each formula is what its cells give; that of `older` is from before they changed. */
+const valueOf = (name: string, rows: Rows = sound(), further = 0): number => {
+  const value = slopeIn(name === "older" ? sound() : rows, further);
+  return Number.isNaN(value) ? 1.25 : value;
+};
+
 /** Every case is a sheet of data and a sheet that reports, in one workbook. */
 const book: BookData = {
   ...bookOf(
-    ...Object.entries<Case>(cases).flatMap(([name, { rows, more, formula, report }]) => {
+    ...Object.entries<Case>(cases).flatMap(([name, { rows, more, formula, further, report }]) => {
       const sheet = `${name} data`;
       const named = (text: string): string => text.replaceAll("D!", `'${sheet}'!`);
-      const cells = report ?? [[{ value: 1.25, formula: formula ?? slope }]];
+      const cells = report ?? [[{ value: valueOf(name, rows, further), formula: formula ?? slope }]];
       const shown = cells.map((row) =>
         row.map((cell) =>
           typeof cell === "object" && cell !== null && "formula" in cell
@@ -177,6 +203,13 @@ describe("how the sheets are made", () => {
     expect(only(name).toDo).toMatch(/\.$/);
   });
 
+  it("tells of a formula whose result is older than its cells, and of what they give now", () => {
+    const finding = only("older");
+    expect(finding).toMatchObject({ code: "older-results", cells: ["'older fit'!A1"], rank: "changes a number" });
+    expect(Number(finding.reported)).toBeCloseTo(slopeIn(sound()), 8);
+    expect(Number(finding.recomputed)).toBeCloseTo(slopeIn(cases.older.rows), 8);
+  });
+
   it("tells of headings inside the range, one by one", () => {
     expect(craft("heading").map(({ code, cells }) => [code, ...cells])).toEqual([
       ["heading-inside", "'heading data'!B1"],
@@ -190,7 +223,7 @@ describe("how the sheets are made", () => {
 
   it("tells of a workbook that calculates by hand, where formulas report", async () => {
     const read = await readOnDesk({
-      ...bookOf(sheetOf("D", [headings, ...sound()]), sheetOf("Fit", [[{ value: 1.25, formula: slope }]])),
+      ...bookOf(sheetOf("D", [headings, ...sound()]), sheetOf("Fit", [[{ value: slopeIn(sound()), formula: slope }]])),
       manualCalculation: true,
     });
     expect(claimsIn(read).craft).toMatchObject([{ rank: "worth knowing", code: "by-hand", cells: ["Fit!A1"] }]);
@@ -199,7 +232,7 @@ describe("how the sheets are made", () => {
   it("ranks what changes a number before what is worth knowing", async () => {
     const rows = changed((all) => ((all[3]![1] = null), (all[4]![1] = "closed")));
     const read = await readOnDesk(
-      bookOf(sheetOf("D", [headings, ...rows]), sheetOf("Fit", [[{ value: 1.25, formula: slope }]])),
+      bookOf(sheetOf("D", [headings, ...rows]), sheetOf("Fit", [[{ value: slopeIn(sound()), formula: slope }]])),
     );
     expect(claimsIn(read).craft.map(({ rank }) => rank)).toEqual(["changes a number", "worth knowing"]);
   });
