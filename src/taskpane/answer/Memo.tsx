@@ -22,5 +22,12 @@ function MemoText(): ReactNode {
     if (memo === null) commands.makeMemo();
   }, [memo, commands]);
   if (memo === null) return <p className={type.remark}>Putting the answer into words.</p>;
-  return <TextToCopy label="The answer as text" text={memo} rows={linesInView} />;
+  return (
+    <>
+      {(state.answered?.outdated ?? null) !== null && (
+        <p className={type.remark}>This tells of the answer as it was before the change: answer again first.</p>
+      )}
+      <TextToCopy label="The answer as text" text={memo} rows={linesInView} />
+    </>
+  );
 }
