@@ -21,6 +21,18 @@ afterEach(() => page.close());
 const list = () => button(page, "List the regressions in this workbook").click();
 const gone = (): Promise<string[]> => page.evaluate(() => [...window.stage.host.gone]);
 
+const mostStops = 60;
+
+/** Tabs on until the control with that text has the focus. */
+async function tabTo(wanted: string | RegExp): Promise<void> {
+  for (let stop = 0; stop < mostStops; stop++) {
+    await page.keyboard.press("Tab");
+    const text = await page.evaluate(() => document.activeElement?.textContent ?? "");
+    if (typeof wanted === "string" ? text === wanted : wanted.test(text)) return;
+  }
+  throw new Error(`"${String(wanted)}" is not reached with the Tab key.`);
+}
+
 async function openGravest(): Promise<void> {
   await list();
   await heading(page, "2 regressions found").waitFor();
@@ -115,6 +127,23 @@ describe("the section Review", () => {
       .getByText(/^2 regressions reviewed/)
       .first()
       .waitFor();
+  });
+
+  it("goes from the tab to a written review by keyboard alone", async () => {
+    await page.getByRole("tab", { name: "Data" }).click();
+    await page.keyboard.press("End");
+    await tabTo("List the regressions in this workbook");
+    await page.keyboard.press("Enter");
+    await expect.poll(() => focused(page)).toBe("H1 2 regressions found");
+    await tabTo(/^Repairs explained by Price index.*typed numbers$/);
+    await page.keyboard.press("Enter");
+    await expect.poll(() => focused(page)).toBe("H1 Repairs explained by Price index");
+    await tabTo("Months!C10");
+    await page.keyboard.press("Enter");
+    await expect.poll(gone).toEqual(["Months!C10"]);
+    await tabTo("Write to a review sheet");
+    await page.keyboard.press("Enter");
+    await button(page, "Repairs review").waitFor();
   });
 
   it("says what to do where nothing is found", async () => {
