@@ -74,8 +74,13 @@ describe("reviewing a workbook", () => {
     await run(bench.pane.commands.review.book);
     expect(bench.state().busy).toBeNull();
     expect(bench.state().review!.regressions.map(({ review }) => review !== null)).toEqual([true, false]);
-    bench.reviewClaim = reviewClaim;
+    const goneOver: string[] = [];
+    bench.reviewClaim = (claim, errand) => {
+      goneOver.push(claim.place);
+      return reviewClaim(claim, errand);
+    };
     await run(bench.pane.commands.review.rest);
+    expect(goneOver).toEqual([soundReviewFixture.claim.place]);
     expect(bench.state().review!.regressions.map(({ review }) => review)).toEqual(reviews);
   });
 
