@@ -73,7 +73,7 @@ function underReportedErrors(bench: Bench, { intended, made }: Drawing): readonl
   const fitted = trial(bench, intended.recipe);
   if (fitted === null) return null;
   const used = made?.used ?? fitted.used;
-  for (const kind of allKinds(bench, intended.recipe, fitted.fit)) {
+  for (const kind of allKinds(bench, fitted)) {
     if (used !== null && kind.name !== used.kind.name) continue;
     const law = kind.laws.find(({ name }) => name === used?.law.name) ?? kind.laws[0]!;
     return standingsUnder(bench, fitted, { kind, law, level: 0.05 });

@@ -29,31 +29,48 @@ export function* plainKinds(fit: Fit): Generator<ErrorKind> {
   yield { name: "classical", kind: "classical", standardErrors: classical, laws };
   for (const version of whiteVersions) {
     const kind = kindOf(fit, { kind: "white", version }, `White (${version})`);
-    if (kind !== null) yield kind;
+    if (kind !== null) yield version === "HC2" ? { ...kind, laws: [...kind.laws, ...bellMcCaffreyLaws(fit)] } : kind;
   }
   const factor = Math.sqrt(fit.degreesOfFreedom / fit.rowCount);
   const standardErrors = classical.map((error) => error * factor);
   yield { name: "classical, divided by n in place of n - k", kind: "classical", standardErrors, laws };
 }
 
+/** With more rows than these the degrees of freedom are so many that the law is the usual one. */
+const mostForOwnDegrees = 2000;
+
+function bellMcCaffreyLaws(fit: Fit): NamedLaw[] {
+  if (fit.rowCount > mostForOwnDegrees) return [];
+  const found = covarianceOf(fit, { kind: "white", version: "HC2", degrees: "bell-mccaffrey" });
+  const degrees = found.ok && found.value.used.fallback === null ? found.value.degreesOfFreedom : null;
+  return degrees === null ? [] : [{ ...ownLaw(degrees), name: "with Bell and McCaffrey's degrees of freedom" }];
+}
+
 /**
- * Newey-West with every number of lags, with and without the factor n / (n - k), and by the rules that look at the
- * residuals. No lags at all are White's HC0 and HC1.
+ * Newey-West with numbers of lags that people take, with and without the factor n / (n - k). No lags at all are White's
+ * HC0 and HC1.
  * @param suffix - words for the order of the rows: ", rows by Month"; empty where they are taken as they stand.
  */
-export function* timeKinds(fit: Fit, suffix: string): Generator<ErrorKind> {
-  for (let lags = 1; lags <= mostLags(fit); lags++) {
+export function* lagKinds(fit: Fit, suffix: string): Generator<ErrorKind> {
+  for (const lags of lagsTried(fit)) {
     const words = `Newey-West with ${lags} ${lags === 1 ? "lag" : "lags"}`;
     yield* bothFactors(fit, { kind: "given", lags }, `${words}${suffix}`);
   }
+}
+
+/** The same by the rules that look at the residuals, which cost more. */
+export function* ruleKinds(fit: Fit, suffix: string): Generator<ErrorKind> {
   for (const [rule, words] of lagRules) yield* bothFactors(fit, rule, `Newey-West by ${words}${suffix}`);
 }
 
 /** Someone who counts lags by hand seldom goes further; the careful rule of long series does. */
-const lagsTried = 24;
+const mostByHand = 24;
 
-const mostLags = ({ rowCount, columnCount }: Fit): number =>
-  Math.min(rowCount - columnCount - 1, Math.max(lagsTried, lagsForRows(rowCount, "careful")));
+function lagsTried({ rowCount, columnCount }: Fit): number[] {
+  const byHand = Array.from({ length: mostByHand }, (_, i) => i + 1);
+  const lags = [...new Set([...byHand, lagsForRows(rowCount, "careful")])];
+  return lags.filter((one) => one > 0 && one < rowCount - columnCount);
+}
 
 const kernels: readonly Kernel[] = ["bartlett", "parzen", "quadratic spectral"];
 

@@ -14,7 +14,7 @@ export function* fittingKinds(
   if (reported.length === 0 || !errorsAgree) return [];
   const fitted = { coefficients: fit.coefficients, model: recipe.model };
   const found: ErrorsUsed[] = [];
-  for (const kind of allKinds(bench, recipe, fit)) {
+  for (const kind of allKinds(bench, { recipe, fit })) {
     const [match] = matchesOf(kind, reported, fitted);
     if (match !== undefined) found.push(match);
     yield null;

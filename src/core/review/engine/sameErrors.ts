@@ -9,7 +9,7 @@ export function underSameErrors(
 ): readonly (number | null)[] {
   const plain = compared.map(({ recomputed }) => recomputed);
   if (wanted === null || used === null || used.kind.name === wanted.kind.name) return plain;
-  for (const kind of allKinds(bench, recipe, fit)) {
+  for (const kind of allKinds(bench, { recipe, fit })) {
     if (kind.name !== wanted.kind.name) continue;
     const law = kind.laws.find(({ name }) => name === wanted.law.name) ?? kind.laws[0]!;
     const same = { kind, law, level: wanted.level };

@@ -9,7 +9,7 @@ import type { Recipe, Run } from "./recipe.ts";
 import { fewRowChanges } from "./rowChanges.ts";
 import { underSameErrors } from "./sameErrors.ts";
 import { type Sieve, sieveOf } from "./sieve.ts";
-import { type Bench, type Trial, agreesThroughout, trial } from "./trial.ts";
+import { type Bench, type Trial, agreesThroughout, quickKinds, trial } from "./trial.ts";
 import { completeRows, runsOf } from "./rowList.ts";
 import { lineValues } from "./lineValues.ts";
 
@@ -39,9 +39,6 @@ export interface SearchStep {
   readonly share: number;
 }
 
-/** Survivors of one stage that are fitted in full, the most telling first. */
-const mostFitted = 60;
-
 /**
  * Looks for a small change of data or model that reproduces every reported number: each alone, then each with each,
  * few before many; stops after the first stage in which one is found, so that others of the same cost are told too.
@@ -57,7 +54,10 @@ export function* search(bench: Bench, claimed: Trial | null): Generator<SearchSt
   let untelling = 0;
   for (const [index, { step, inPairs, looks }] of stages.entries()) {
     const kept = yield* keptOf(looks, { step, from: index / stages.length, width: 1 / stages.length });
-    const judged = judge(kept, { bench, claimed, sieve });
+    const judged = yield* stepping(judge(kept, { bench, claimed, sieve }), {
+      step: "Fitting what may explain it",
+      share: (index + 1) / stages.length,
+    });
     untelling += judged.untelling;
     if (judged.found.length > 0 || index === stages.length - 1) {
       const tried = new Set([...changes.few.map(({ facts }) => facts.hypothesis), ...byTheRow]);
@@ -92,6 +92,15 @@ function missingRows({ reported }: Bench["claim"], { rows, model }: Recipe, comp
   return used - runsOf(rows).reduce((sum, run) => sum + counted(run), extra);
 }
 
+/** A step wherever the work pauses. */
+function* stepping<T>(work: Generator<null, T>, step: SearchStep): Generator<SearchStep, T> {
+  for (;;) {
+    const next = work.next();
+    if (next.done === true) return next.value;
+    yield step;
+  }
+}
+
 /** The looks of a stage one after another; the generator pauses wherever they do. */
 function* keptOf(
   looks: Generator<number, Kept>,
@@ -110,24 +119,32 @@ interface Judging {
   readonly sieve: Sieve;
 }
 
-/** Fits what may be worth believing, and keeps what reproduces everything and is. */
-function judge(kept: Kept, { bench, claimed, sieve }: Judging): Pick<Searched, "found" | "untelling"> {
+/** Fits what may be worth believing, with a pause after each, and keeps what reproduces everything and is. */
+function* judge(
+  kept: Kept,
+  { bench, claimed, sieve }: Judging,
+): Generator<null, Pick<Searched, "found" | "untelling">> {
   const looked = sieve.looked();
   const worthIt = ({ survivor }: Candidate): boolean => survivor.chance * looked < mostByChance;
   const hopeful = kept.candidates.filter(worthIt);
-  const fitted = hopeful.toSorted((a, b) => a.survivor.chance - b.survivor.chance).slice(0, mostFitted);
+  const bestFirst = hopeful.toSorted((a, b) => a.survivor.chance - b.survivor.chance);
+  const fitted = new Set(bestFirst.slice(0, mostFitted(bench.frame.count)));
   const found: Found[] = [];
   let untelling = kept.untelling + kept.candidates.length - hopeful.length;
-  for (const { changes, survivor } of hopeful.filter((one) => fitted.includes(one))) {
-    const tried = trial(bench, survivor.recipe);
+  for (const { changes, survivor } of hopeful.filter((one) => fitted.has(one))) {
+    yield null;
+    const tried = trial(bench, survivor.recipe, quickKinds);
     if (tried === null || !agreesThroughout(tried)) continue;
     const evidence = evidenceFor(tried, bench, claimed);
-    if (evidence.telling >= fewestTelling && evidence.chance * looked < mostByChance)
+    if (evidence.telling >= fewestTelling && evidence.chance * looked < mostByChance) {
       found.push({ changes, trial: tried, evidence });
-    else untelling++;
+    } else untelling++;
   }
   return { found, untelling };
 }
+
+/** How many regressions one stage may fit in full: about so many rows in all, within reason. */
+const mostFitted = (rows: number): number => Math.max(12, Math.min(60, Math.floor(100_000 / rows)));
 
 function evidenceFor({ compared, errorsTried, used }: Trial, bench: Bench, claimed: Trial | null): Evidence {
   const base = claimed === null ? null : underSameErrors(bench, claimed, used);

@@ -2,7 +2,7 @@ import type { Fit } from "../../fit/fit.ts";
 import type { Claim } from "../claim.ts";
 import type { Comparison } from "../claimReview.ts";
 import { agrees } from "./agreement.ts";
-import { type ErrorKind, groupedKinds, plainKinds, timeKinds } from "./errorKinds.ts";
+import { type ErrorKind, groupedKinds, lagKinds, plainKinds, ruleKinds } from "./errorKinds.ts";
 import { type ErrorsUsed, type ReportedError, errorValue, matchesOf } from "./errorMatch.ts";
 import type { Frame } from "./frame.ts";
 import type { Ordering } from "./orderings.ts";
@@ -38,13 +38,25 @@ export const agreesThroughout = ({ plainAgree, errorsAgree }: Trial): boolean =>
 export const reportedErrors = ({ reported }: Claim): ReportedError[] =>
   reported.filter((number): number is ReportedError => isErrorQuantity(number.quantity));
 
-/** @returns null where the recipe cannot be fitted at all. */
-export function trial(bench: Bench, recipe: Recipe): Trial | null {
+/**
+ * Fits a recipe and holds it against the report.
+ * @param kinds - the standard errors that are looked at where all other numbers agree.
+ * @returns null where the recipe cannot be fitted at all.
+ */
+export function trial(bench: Bench, recipe: Recipe, kinds: Kinds = allKinds): Trial | null {
   const fitted = refit(bench.frame, recipe, { kind: "cases" });
-  return fitted?.ok === true ? trialOf(bench, recipe, fitted.value) : null;
+  return fitted?.ok === true ? trialOf(bench, { recipe, fit: fitted.value }, kinds) : null;
 }
 
-export function trialOf(bench: Bench, recipe: Recipe, fit: Fit): Trial {
+export interface Made {
+  readonly recipe: Recipe;
+  readonly fit: Fit;
+}
+
+/** Kinds of standard errors for a fit, simplest first. */
+export type Kinds = (bench: Bench, made: Made) => Generator<ErrorKind>;
+
+function trialOf(bench: Bench, { recipe, fit }: Made, kinds: Kinds): Trial {
   const errors = reportedErrors(bench.claim);
   const plainAgree = bench.claim.reported.every((number) => {
     const quantity = plainQuantity(number.quantity);
@@ -52,7 +64,8 @@ export function trialOf(bench: Bench, recipe: Recipe, fit: Fit): Trial {
     const found = plainValue(quantity, fit, recipe.model);
     return found !== null && agrees(number, found);
   });
-  const match = errors.length === 0 ? null : firstMatch(bench, { recipe, fit, errors, wide: plainAgree });
+  const tried = plainAgree ? kinds(bench, { recipe, fit }) : plainKinds(fit);
+  const match = errors.length === 0 ? null : firstMatch(errors, { recipe, fit }, tried);
   const used = match?.used ?? null;
   return {
     recipe,
@@ -65,20 +78,12 @@ export function trialOf(bench: Bench, recipe: Recipe, fit: Fit): Trial {
   };
 }
 
-interface Matching {
-  readonly recipe: Recipe;
-  readonly fit: Fit;
-  readonly errors: readonly ReportedError[];
-  /** Whether all kinds are looked at, or the classical ones alone. */
-  readonly wide: boolean;
-}
-
 /** The first kind that gives all reported figures; the classical one where none does. */
-function firstMatch(bench: Bench, { recipe, fit, errors, wide }: Matching) {
+function firstMatch(errors: readonly ReportedError[], { recipe, fit }: Made, kinds: Generator<ErrorKind>) {
   const fitted = { coefficients: fit.coefficients, model: recipe.model };
   let tried = 0;
   let classical: ErrorKind | null = null;
-  for (const kind of wide ? allKinds(bench, recipe, fit) : plainKinds(fit)) {
+  for (const kind of kinds) {
     tried++;
     classical ??= kind;
     const used = matchesOf(kind, errors, fitted)[0];
@@ -88,17 +93,32 @@ function firstMatch(bench: Bench, { recipe, fit, errors, wide }: Matching) {
   return { used: { kind: classical, law: classical.laws[0]!, level: 0.05 }, tried, fits: false };
 }
 
-/** Every kind of standard errors that the sheet allows to be tried, simplest first. */
-export function* allKinds({ frame, orderings }: Bench, recipe: Recipe, fit: Fit): Generator<ErrorKind> {
-  yield* plainKinds(fit);
-  yield* timeKinds(fit, "");
-  for (const line of orderings.times) {
-    const ordered = refit(frame, recipe, { kind: "time", by: line });
-    if (ordered?.ok === true && !runsOn(ordered.value)) yield* timeKinds(ordered.value, `, rows by ${line.name}`);
-  }
-  for (const line of orderings.groups) {
-    const grouped = refit(frame, recipe, { kind: "groups", by: line });
+/** Every kind of standard errors that the sheet allows to be tried. */
+export function* allKinds(bench: Bench, made: Made): Generator<ErrorKind> {
+  yield* quickKinds(bench, made);
+  yield* ruleKinds(made.fit, "");
+  for (const { fit, suffix } of ordered(bench, made)) yield* ruleKinds(fit, suffix);
+}
+
+/** Those that cost little: for the many regressions that a search fits. */
+export function* quickKinds(bench: Bench, made: Made): Generator<ErrorKind> {
+  yield* plainKinds(made.fit);
+  yield* lagKinds(made.fit, "");
+  for (const { fit, suffix } of ordered(bench, made)) yield* lagKinds(fit, suffix);
+  for (const line of bench.orderings.groups) {
+    const grouped = refit(bench.frame, made.recipe, { kind: "groups", by: line });
     if (grouped?.ok === true) yield* groupedKinds(grouped.value, line.name);
+  }
+}
+
+/** The same regression with its rows by each line that may be the time, where that is another order. */
+function* ordered(
+  { frame, orderings }: Bench,
+  { recipe }: Made,
+): Generator<{ readonly fit: Fit; readonly suffix: string }> {
+  for (const line of orderings.times) {
+    const inTime = refit(frame, recipe, { kind: "time", by: line });
+    if (inTime?.ok === true && !runsOn(inTime.value)) yield { fit: inTime.value, suffix: `, rows by ${line.name}` };
   }
 }
 
