@@ -35,7 +35,8 @@ export async function takeInHand(block: PlacedBlock): Promise<Result<DataInHand>
   if (!located.ok) return located;
   const { source, headingRow, table, notes } = located.value;
   const columns: ColumnDescription[] = [];
-  let cells = 0;
+  // Finding the table has looked at all of them already.
+  let cells = source.rowCount * source.columns.length;
   for (const column of source.columns) {
     cells += source.rowCount;
     if (cells > cellsWithoutPause) {

@@ -77,7 +77,9 @@ function endsOf(column: CellColumn): { first: number; last: number } | null {
 
 function bodyOf(column: CellColumn): Body {
   const counts = new Array<number>(Object.keys(cellKind).length).fill(0);
-  for (const kind of column.kinds) counts[kind]!++;
+  const { kinds } = column;
+  // By index: an iterator takes several times as long, and there may be millions of cells.
+  for (let row = 0; row < kinds.length; row++) counts[kinds[row]!]!++;
   counts[cellKind.blank] = 0;
   const kind = counts.indexOf(Math.max(...counts));
   return { kind, valued: kind !== cellKind.text || mostlyValues(column.texts) };
