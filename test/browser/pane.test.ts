@@ -117,7 +117,7 @@ describe("the answer", () => {
     expect(await cases.getByRole("cell", { name: /in force/ }).innerText()).toContain("Newey-West");
     expect(await page.getByRole("definition").allInnerTexts()).toEqual([
       expect.stringMatching(/^even: White's test, p\s=\s0\.\d+, tested at 10\s%$/),
-      expect.stringMatching(/^some: Breusch-Godfrey test, p under 0.0001, tested at 10\s%$/),
+      expect.stringMatching(/^some: Breusch-Godfrey test, p\sunder\s0.0001, tested at 10\s%$/),
     ]);
   });
 

@@ -70,7 +70,7 @@ it("walks through the tabs with the arrows, Home and End", async () => {
   await press("ArrowRight");
   expect(await name()).toBe("Answer");
   await press("End");
-  expect(await name()).toBe("Evidence");
+  expect(await name()).toBe("Review");
   await press("ArrowRight");
   expect(await name()).toBe("Data");
   await press("ArrowLeft", "Home");
