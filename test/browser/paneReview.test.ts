@@ -115,6 +115,19 @@ describe("the section Review", () => {
     expect(await focused(page)).toBe("H1 Months!A4:C10");
   });
 
+  it("lets the data that typed results were taken to mean be put right", async () => {
+    await openGravest();
+    await button(page, "Other data are meant").click();
+    const field = (name: string) => page.getByRole("textbox", { name });
+    expect(await field("Cells that report it").inputValue()).toBe("Handover!A4:C6");
+    expect(await field("Outcome: heading or cells").inputValue()).toBe("Months!B5:B9");
+    await field("Drivers, in the order of the report").fill("Rainy days");
+    await button(page, "Review these results").click();
+    await heading(page, "2 regressions found").waitFor();
+    const { asked } = await page.evaluate(() => window.stage.pane.store.get().review!);
+    expect(asked.pointed).toEqual({ reported: "Handover!A4:C6", outcome: "Months!B5:B9", drivers: ["Rainy days"] });
+  });
+
   it("shows how far it has come, can be cancelled, and goes on with what is left", async () => {
     await page.evaluate(() => (window.stage.hold = "next"));
     await list();

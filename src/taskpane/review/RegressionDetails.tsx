@@ -8,6 +8,7 @@ import { CellLink } from "../parts/CellLink.tsx";
 import { Disclosure } from "../parts/Disclosure.tsx";
 import { SectionTitle } from "../parts/SectionTitle.tsx";
 import { usePane } from "../paneContext.ts";
+import { OtherData } from "./OtherData.tsx";
 import { PlacesSaid } from "./PlacesSaid.tsx";
 import { ReviewChoices } from "./ReviewChoices.tsx";
 import { ReviewedWords } from "./ReviewedWords.tsx";
@@ -52,6 +53,7 @@ export function RegressionDetails({ review, regression }: RegressionDetailsProps
       {regression.review !== null && <ReviewedWords review={review} regression={regression.review} />}
       <h2 className={type.head}>The data it names</h2>
       <ItsData claim={claim} />
+      <OtherData key={claim.place} claim={claim} />
       <Disclosure label="Review something else">
         <ReviewChoices />
       </Disclosure>
