@@ -119,7 +119,8 @@ function mismatchFindings({ bench, compared, explanation, errorsUnknown, blame }
     return [finding({ rank, code: "one-number-differs", cells, ...farthest(wrong), what, toDo: toDo.oneNumber })];
   }
   const what = notReproduced(wrong.length, compared.length);
-  return [finding({ rank, code: "not-reproduced", cells, ...farthest(wrong), what, toDo: toDo.unexplained })];
+  const next = bench.claim.origin.kind === "formula" ? toDo.recalculate : toDo.unexplained;
+  return [finding({ rank, code: "not-reproduced", cells, ...farthest(wrong), what, toDo: next })];
 }
 
 /** A slip that one number can come from: its sign, or a factor of ten, a hundred or a thousand. */

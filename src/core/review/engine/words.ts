@@ -106,7 +106,7 @@ function numbersSentence({
   }
   if (errorsUnknown)
     return `The coefficients come out of the cells, the figures that rest on standard errors do not.${more}`;
-  return `${disagreeing} of ${compared} reported numbers ${disagreeing === 1 ? "does" : "do"} not come out of the cells, and nothing that was tried explains it.${more}`;
+  return `${outOf(disagreeing, compared)} not come out of the cells, and nothing that was tried explains it.${more}`;
 }
 
 function errorsPart({ errors, answer }: VerdictFacts): string {
@@ -129,6 +129,8 @@ export const toDo = {
     "Report the standard errors that the evidence calls for, with their p-values, and draw the conclusion from them.",
   version: "Say which standard errors and which law were used; the conclusion hangs on it.",
   unexplained: "Ask for the file or the program behind the numbers; do not rely on them until they can be redone.",
+  recalculate:
+    "Calculate the workbook again (F9), then review it again: the formula may not have been calculated since.",
   oneNumber: "Check this number for a slip in typing against the calculation it was taken from.",
   beyond: "Take in the rows that were left off, or say why they are left off.",
   summary: "Take the row that sums up the others out of the range.",
@@ -145,8 +147,14 @@ export const summaryInside = (cells: string): string =>
 export const textsLeftOut = (cells: readonly string[], count: number): string =>
   `${count === 1 ? "A number" : `${count} numbers`} kept as text ${count === 1 ? "was" : "were"} left out (${listInWords(cells)}).`;
 
+/** "The reported number does", "3 of 9 reported numbers do". */
+function outOf(disagreeing: number, compared: number): string {
+  if (compared === 1) return "The reported number does";
+  return `${disagreeing} of ${compared} reported numbers ${disagreeing === 1 ? "does" : "do"}`;
+}
+
 export const notReproduced = (disagreeing: number, compared: number): string =>
-  `${disagreeing} of ${compared} reported numbers ${disagreeing === 1 ? "does" : "do"} not come out of the cells as claimed, and no change that was tried gives them all.`;
+  `${outOf(disagreeing, compared)} not come out of the cells as claimed, and no change that was tried gives ${compared === 1 ? "it" : "them all"}.`;
 
 export const oneDiffers = (name: string, compared: number, slip: string | null): string =>
   `${capitalised(name)} is the only one of ${compared} reported numbers that does not come out of the cells.${slip === null ? "" : ` It would come out ${slip}; one number alone cannot show whether that was done.`}`;
