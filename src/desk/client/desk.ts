@@ -12,6 +12,7 @@ import { calculateUnsaved, openBook } from "../workbook/openBook.ts";
 import { startCalls, type Call, type CallDoors } from "../workbook/pendingCalls.ts";
 import { followChanges } from "../workbook/shifts.ts";
 import { snapshotOf } from "../workbook/snapshot.ts";
+import { tellLetNamesApart } from "../workbook/letNames.ts";
 import { spellTables } from "../workbook/spellTables.ts";
 import { forgetRuns } from "../workbook/forgetRuns.ts";
 import { growTo } from "../workbook/write.ts";
@@ -53,6 +54,7 @@ export function startDesk(grid: Grid, line: Transport, options: DeskOptions): De
   const functions = functionsOf({ line, server, options }, (results) => takeIn(book, results));
   registerFunctions(book, functions);
   spellTables(book);
+  tellLetNamesApart(book);
   forgetRuns(grid);
   calculation.onFinished(functions.calls.settle);
   const host = hostOf(book, { calculation, functions, server, profile: options.profile ?? "desktop" });
