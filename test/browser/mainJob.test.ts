@@ -61,7 +61,7 @@ describe("from cells to a result sheet", { timeout: 180_000 }, () => {
     expect(moved.length).toBeGreaterThan(40);
 
     const { path, sheet } = await savedSheet(page);
-    expect(sheet.charts).toHaveLength(2);
+    expect(sheet.charts).toHaveLength(3);
     await page.getByLabel("File to open").setInputFiles(path);
     await pane.getByRole("button", { name: "Use selection" }).waitFor();
     expect(await numbersOn(page)).toEqual(after);
@@ -69,7 +69,7 @@ describe("from cells to a result sheet", { timeout: 180_000 }, () => {
     expect(await numbersOn(page)).not.toEqual(after);
   });
 
-  it("the charts stand over the cells beside the page and hide none of its text", async () => {
+  it("the charts stand over the cells that the page keeps for them, and hide none of its text", async () => {
     const { page, pane } = desk;
     await page.setViewportSize({ width: 2600, height: 1000 });
     await pane.getByLabel("Or type an address").fill("Months!A4:E100");
@@ -78,11 +78,17 @@ describe("from cells to a result sheet", { timeout: 180_000 }, () => {
     await pane.getByRole("button", { name: "Write to the workbook" }).click();
     const chart = page.getByRole("img", { name: "Chart: Residuals over fitted values" });
     await chart.waitFor();
-    const corner = await atSheet(page, (d) => {
+    const { corner, hidden } = await atSheet(page, (d) => {
+      const { charts } = d.snapshot().sheets.find(({ name }) => name === "Repairs answer")!;
+      const { place } = charts.find(({ title }) => title === "Residuals over fitted values")!;
+      const rows = `${place.row + 1}:K${place.row + place.rows}`;
+      const covered = d.values(`'Repairs answer'!A${rows}`).flat();
       const sheet = d.book.grid.api.getActiveWorkbook()!.getActiveSheet();
-      const { x, y } = (sheet.getRange("M15") as unknown as { getCellRect: () => DOMRect }).getCellRect();
-      return { x, y };
+      const first = `${String.fromCharCode(65 + place.column)}${place.row + 1}`;
+      const { x, y } = (sheet.getRange(first) as unknown as { getCellRect: () => DOMRect }).getCellRect();
+      return { corner: { x, y }, hidden: covered.filter((value) => value !== "") };
     });
+    expect(hidden).toEqual([]);
     const cells = (await page.locator("main canvas").last().boundingBox())!;
     const drawn = (await chart.boundingBox())!;
     expect(Math.abs(drawn.x - cells.x - corner.x)).toBeLessThan(edge);
