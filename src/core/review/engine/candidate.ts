@@ -32,6 +32,9 @@ export interface Keeping {
   readonly kept: () => Kept;
 }
 
+/** Where so many changes fit, the report cannot tell one from another; the first of them are enough to see that. */
+const mostKept = 5000;
+
 /** Looks through a sieve and keeps what may be worth believing after so many looks. */
 export function keeping(sieve: Sieve): Keeping {
   const candidates: Candidate[] = [];
@@ -39,7 +42,8 @@ export function keeping(sieve: Sieve): Keeping {
   return {
     look: sieve.look,
     keep: (changes, survivor) => {
-      if (survivor.chance * sieve.looked() < mostByChance) candidates.push({ changes, survivor });
+      const mayTell = survivor.chance * sieve.looked() < mostByChance;
+      if (mayTell && candidates.length < mostKept) candidates.push({ changes, survivor });
       else untelling++;
     },
     kept: () => ({ candidates, untelling }),

@@ -42,6 +42,7 @@ export interface SearchStep {
 /**
  * Looks for a small change of data or model that reproduces every reported number: each alone, then each with each,
  * few before many; stops after the first stage in which one is found, so that others of the same cost are told too.
+ * Where nothing differs but the standard errors there is nothing for two changes to explain, and pairs are not tried.
  * A generator, so that whoever runs it can show how far it is and stop it between steps.
  * @param claimed - the trial of the regression as claimed; null where it cannot be fitted.
  */
@@ -50,7 +51,8 @@ export function* search(bench: Bench, claimed: Trial | null): Generator<SearchSt
   const { reported } = bench.claim;
   const asClaimed = reported.map((_, index) => claimed?.compared[index]?.recomputed ?? null);
   const sieve = sieveOf(bench.frame, { reported, asClaimed });
-  const stages = [looksAlone(bench, changes, sieve), looksInPairs(bench, changes, sieve)].flat();
+  const alone = looksAlone(bench, changes, sieve);
+  const stages = claimed?.plainAgree === true ? alone : [...alone, ...looksInPairs(bench, changes, sieve)];
   let untelling = 0;
   for (const [index, { step, inPairs, looks }] of stages.entries()) {
     const kept = yield* keptOf(looks, { step, from: index / stages.length, width: 1 / stages.length });

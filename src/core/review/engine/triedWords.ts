@@ -13,7 +13,7 @@ export function triedInWords({ tried, looked, untelling, inPairs }: Searched): r
 }
 
 const untellingInWords = (untelling: number): string =>
-  `${numberInWords(untelling, 0)} of them ${untelling === 1 ? "fits" : "fit"} the numbers shown, but with so few digits a change that was never made would fit as well: none of them is an explanation.`;
+  `${numberInWords(untelling, 0)} of them ${untelling === 1 ? "fits" : "fit"} the numbers shown beside the standard errors, but with so few digits a change that was never made would fit as well: none of them is an explanation.`;
 
 const sortsInWords: Readonly<Record<string, readonly Hypothesis[]>> = {
   "Rows left off at either end.": ["rows-left-off-at-end", "rows-left-off-at-start"],
