@@ -14,6 +14,14 @@ const ran = await runTerminal(process.argv.slice(2), {
   today,
   version: packageFile.version,
 });
-process.stdout.write(ran.out);
-process.stderr.write(ran.err);
-process.exitCode = ran.status;
+await written(process.stdout, ran.out);
+await written(process.stderr, ran.err);
+// What is said is said: calls that a book's own functions still wait for must not keep the command alive.
+process.exit(ran.status);
+
+/** Resolves when the stream has taken the text: an exit before would cut off what goes into a pipe. */
+function written(stream: NodeJS.WriteStream, text: string): Promise<void> {
+  return new Promise((resolve) => {
+    stream.write(text, () => resolve());
+  });
+}
