@@ -92,6 +92,13 @@ describe("influence", () => {
     );
     const inTime = fitOf(designOf(y, [one], { order: throughTime(30) }));
     expect(offerOf(inTime)).toBeUndefined();
+    const two = x.map((value, i) => (i === 4 ? 9 : value));
+    const other = x.map((_, i) => (i === 6 ? 1 : i === 7 ? 0.6 : 0));
+    const both = fitOf(designOf(y, [two, other]));
+    const [first, second] = [both.leverages[4]!, both.leverages[6]!];
+    expect(Math.min(first, second)).toBeGreaterThan(0.5);
+    expect(Math.abs(first - second)).toBeGreaterThan(0.02);
+    expect(offerOf(both)).toContain(`up to ${Math.floor(100 * Math.max(first, second))} % of its own`);
     // Six columns that each stand on two rows, the first of them almost alone.
     const pairs = [0, 1, 2, 3, 4, 5].map((pair) =>
       y.map((_, i) => (i === 2 * pair ? 1 : i === 2 * pair + 1 ? 0.3 : 0)),
