@@ -118,7 +118,7 @@ const states: Readonly<Record<string, (page: Page) => Promise<void>>> = {
     await openTab(page, "Review");
     await page.evaluate(() => (window.stage.listed = { ...window.stage.listed, claims: [] }));
     await open(page, listRegressions);
-    await page.getByText("none of them could be read").waitFor();
+    await page.getByText("The reasons stand below.").waitFor();
   },
   "what the workbook keeps": async (page) => {
     await keepTwo(page);

@@ -42,7 +42,7 @@ describe("a sheet of one review", () => {
     const places = parts.map((part) => texts.indexOf(part));
     expect(places).not.toContain(-1);
     expect(places).toEqual(places.toSorted((one, other) => one - other));
-    expect(texts).not.toContain("Formulas that could not be read");
+    expect(texts).not.toContain("Could not be read");
   });
 
   it("ranks findings and links them to their cells", () => {
@@ -151,7 +151,7 @@ describe("a sheet of several reviews", () => {
   });
 
   it("lists what could not be read with a link", () => {
-    const row = rowOf(whole, "Formulas that could not be read") + 1;
+    const row = rowOf(whole, "Could not be read") + 1;
     expect(cellsOf(whole)[row]![1]).toEqual({ kind: "text", text: "It reads its range with OFFSET." });
     expect(whole.links).toContainEqual({ row, column: 0, text: "Sums!D9", target: "Sums!D9" });
   });

@@ -55,7 +55,7 @@ function foundWords({ regressions, unread }: ReviewInHand): string {
   const { length } = regressions;
   const found =
     length === 0 ? "No regression was found." : `${length} ${length === 1 ? "regression" : "regressions"} found.`;
-  return unread.length === 0 ? found : `${found} Formulas that could not be read: ${unread.length}.`;
+  return unread.length === 0 ? found : `${found} Could not be read: ${unread.length}.`;
 }
 
 function finishedWords(review: ReviewInHand | null): string {

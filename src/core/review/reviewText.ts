@@ -19,7 +19,7 @@ export function reviewText({ claims, unread, craft }: BookReview): readonly Text
     ...claims.flatMap(claimLines),
     ...part("Sheet craft", gravestFirst(craft).flatMap(findingLines)),
     ...part(
-      "Formulas that could not be read",
+      "Could not be read",
       unread.map(({ cell, why }) => sentence(`${cell}: ${why}`)),
     ),
     sentence(reviewLimits),

@@ -21,11 +21,11 @@ export interface ReviewFacts {
   readonly fingerprints: readonly string[];
 }
 
-/** Formulas that look like a regression and could not be read. */
+/** What looks like a regression and could not be read. */
 export function unreadSection(unread: BookReview["unread"]): Section {
   const lines = unread.map(({ why }): LabelledLine => ({ label: "", words: why, style: "sentence" }));
   return labelledSection(
-    "Formulas that could not be read",
+    "Could not be read",
     lines,
     unread.flatMap(({ cell }, index) => linkTo(index + 1, 0, cell)),
   );

@@ -16,7 +16,7 @@ export function NothingFound({ review }: { readonly review: ReviewInHand }): Rea
       <p className={type.body}>
         {unread.length === 0
           ? "No formula fits a regression (LINEST, SLOPE, INTERCEPT, TREND, FORECAST, RSQ, STEYX, CORREL), and no figures stand under headings such as coefficient and standard error."
-          : "There are formulas that look like a regression, but none of them could be read."}
+          : "Something looks like a regression, but could not be read. The reasons stand below."}
       </p>
       <p className={type.body}>
         If results are typed in, select them and say where they come from. A regression that was run elsewhere leaves no

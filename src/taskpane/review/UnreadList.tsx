@@ -1,12 +1,11 @@
 import type { ReactNode } from "react";
 import type { BookReview } from "../../core/review/claimReview.ts";
 import { useType } from "../look/type.ts";
-import { counted } from "../parts/rowWords.ts";
 import { PlacesSaid } from "./PlacesSaid.tsx";
 
 const mostListed = 20;
 
-/** Formulas that look like a regression and could not be read, each with the reason. */
+/** What looks like a regression and could not be read, each with the reason. */
 export function UnreadList({ unread }: Pick<BookReview, "unread">): ReactNode {
   const type = useType();
   if (unread.length === 0) return null;
@@ -15,7 +14,7 @@ export function UnreadList({ unread }: Pick<BookReview, "unread">): ReactNode {
     <>
       <h2 className={type.head}>Could not be read</h2>
       <PlacesSaid places={unread.slice(0, mostListed).map(({ cell, why }) => ({ address: cell, words: why }))} />
-      {more > 0 && <p className={type.remark}>and {counted(more, "formula")} more</p>}
+      {more > 0 && <p className={type.remark}>and {more} more</p>}
     </>
   );
 }

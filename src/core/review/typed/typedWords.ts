@@ -24,7 +24,7 @@ export const whyNoData = {
   noOutcome: (sheet: string) =>
     `Sheet "${sheet}" has the drivers, but no other column of numbers that they could explain; point at the outcome.`,
   fewDrivers: (reported: number, given: number) =>
-    `It reports ${reported} ${reported === 1 ? "driver" : "drivers"}, but the data given for it are ${given} columns.`,
+    `It reports ${reported} ${reported === 1 ? "driver" : "drivers"}, but ${given === 1 ? "one column of data is" : `${given} columns of data are`} given for it.`,
 } as const;
 
 const inQuotes = (names: readonly string[]): string => names.map((name) => `"${name}"`).join(", ");
