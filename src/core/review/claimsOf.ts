@@ -51,11 +51,12 @@ export function claimsOf(book: Book, asked: Asked, report: Report): Result<BookC
   const { pointed } = asked;
   const area = pointed === null ? success(null) : areaCalled(book, pointed.reported);
   if (!area.ok) return area;
-  const given = pointed === null ? success(nothingGiven) : givenData(book, pointed);
-  if (!given.ok) return given;
   const place = area.value;
   const onSheet = place?.sheet ?? asked.sheet;
   const found = regressionsIn(book, onSheet, report);
+  const reports = found.blocks.map((block) => block.area);
+  const given = pointed === null ? success(nothingGiven) : givenData(book, { ...pointed, reports });
+  if (!given.ok) return given;
   const here = place === null ? found : touching(found, place);
   if (place !== null && here.groups.length + here.blocks.length === 0) {
     return failure({ code: "no-report", where: addressOf(place) });

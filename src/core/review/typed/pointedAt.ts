@@ -33,16 +33,17 @@ const placeNamed = (formula: Formula): string | null => {
   return formula.kind === "name" ? formula.name : null;
 };
 
-/** What was said of the data of a report. */
+/** What was said of the data of a report, and where the book's reports stand: their cells are no data. */
 interface Said {
   readonly outcome: string | null;
   readonly drivers: readonly string[] | null;
+  readonly reports: readonly SheetArea[];
 }
 
 /** Headings and addresses as lines of data. Problem "unknown-heading", beside those of an address. */
-export function givenData(book: Book, { outcome, drivers }: Said): Result<GivenData> {
+export function givenData(book: Book, { outcome, drivers, reports }: Said): Result<GivenData> {
   const words = [...(outcome === null ? [] : [outcome]), ...(drivers ?? [])];
-  const tables = dataTables(book, []);
+  const tables = dataTables(book, reports);
   const headings = words.filter((word) => isHeading(tables, word) || !isPlace(book, word));
   const matched = headings.length === 0 ? null : bestTable(headings, tables, () => false);
   const found: DataLine[][] = [];

@@ -84,6 +84,21 @@ describe("reports of typed numbers", () => {
   });
   const on = (sheet: string): Claim => claimsIn(book, { sheet }).claims[0]!;
 
+  it("may stand below their data, in the same columns: the data end above them", async () => {
+    const [headings, ...rows] = [["Cups", "Unit price", "Rain"], ...days.map((day) => day.slice(1, 4))];
+    const report = [
+      ["What came out"],
+      ["Driver", "Coefficient", "Standard error"],
+      ["Unit price", -6.1, 1.25],
+      ["Rain", 2.05, 0.25],
+    ];
+    const below = await readOnDesk(bookOf(sheetOf("Below", [headings, ...rows, [], ...report])));
+    const expected = ["Cups 2+12", "Unit price 2+12", "Rain 2+12"];
+    expect(linesOf(claimsIn(below).claims[0]!)).toEqual(expected);
+    const pointed = { reported: "Below!A16:C18", outcome: "Cups", drivers: ["Unit price", "Rain"] };
+    expect(linesOf(claimsIn(below, { pointed }).claims[0]!)).toEqual(expected);
+  });
+
   it("are read by headings of many spellings, each number to the digits that it shows", () => {
     const claim = on("Plain");
     expect(claim).toMatchObject({ place: "Plain!B3:H6", origin: { kind: "typed" }, constant: true });
