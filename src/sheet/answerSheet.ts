@@ -1,4 +1,5 @@
 import type { Answer } from "../core/answer/answer.ts";
+import { askedSection } from "./askedSection.ts";
 import { chartsAt, chartsSection } from "./chartsSection.ts";
 import { lineHeight, page, pageWidths } from "./columns.ts";
 import { driversSection } from "./driversSection.ts";
@@ -10,12 +11,12 @@ import { type SheetFacts, howMadeSection, settingsArea } from "./howMadeSection.
 import { pageBreaksOf } from "./pageBreaks.ts";
 import type { PlanFormat, SheetPlan } from "./plan.ts";
 import { titleSection, verdictSection } from "./plainWordsSection.ts";
-import { rectangle, stack } from "./section.ts";
+import { rectangle, rowsTaken, stack } from "./section.ts";
 
 export type SheetKind = "live" | "kept";
 
 /** The place, in the order of the parts on the page, of those that others look for. */
-const part = { charts: 4, evidence: 5, howMade: 7 } as const;
+const part = { charts: 5, evidence: 6, howMade: 8 } as const;
 
 /**
  * Lays an answer out on a sheet that someone who was not there can read and redo.
@@ -40,9 +41,8 @@ export function planAnswer(answer: Answer, facts: SheetFacts, kind: SheetKind): 
     columnWidths: pageWidths,
     frozenRows: 1,
     charts: charts.map(({ chart }) => chart),
-    // One blank row follows each part.
     pageBreaks: pageBreaksOf(
-      parts.map((one, index) => ({ rows: one.rows.length + 1, whole: index !== part.evidence })),
+      parts.map((one, index) => ({ rows: rowsTaken(one), whole: index !== part.evidence })),
       formats,
     ),
     printArea: { row: 0, column: 0, rows: rows.length, columns: page.columns },
@@ -60,6 +60,7 @@ const partsOf = (answer: Answer, facts: SheetFacts, figures: Figures) => [
   verdictSection(answer, figures),
   fourCasesSection(answer, figures),
   driversSection(answer, figures),
+  askedSection(answer),
   chartsSection(answer),
   evidenceSection(answer, figures),
   guardsSection(answer),

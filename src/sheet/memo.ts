@@ -1,5 +1,7 @@
 import { alignedLines } from "../core/answer/alignedLines.ts";
 import type { Answer } from "../core/answer/answer.ts";
+import { estimatesTable } from "../core/answer/askedTables.ts";
+import { askedSentences } from "../core/answer/askedWords.ts";
 import { findingInWords } from "../core/answer/findings.ts";
 import { answerTable, choiceText } from "../core/answer/tables.ts";
 import { decimalsFor, numberInWords, pValueInWords } from "../core/answer/wording.ts";
@@ -19,6 +21,7 @@ export function memoOf(answer: Answer, facts: SheetFacts): string {
     ["What holds", [...drivers.flatMap(({ sentence }) => sentence ?? []), opening]],
     ["Which standard errors, and why", [choice, `${choiceText(answer)}.`, ...whyLines(answer), ...decision.cautions]],
     ["Drivers", driverLines(answer)],
+    ...askedParts(answer),
     ["Rows", rowLines(answer)],
     ["How this was made", madeLines(facts)],
   ];
@@ -32,6 +35,21 @@ const whyLines = ({ decision }: Answer): string[] => [
   `Follow-on of the errors: ${findingInWords(decision, "follow-on")}.`,
   ...(decision.override === null ? [] : [`Fixed by hand, reason: ${decision.override}.`]),
 ];
+
+/** What was asked of the coefficients beside the drivers, and its figures in columns; nothing where nothing was. */
+function askedParts(answer: Answer): Part[] {
+  const { estimates, options } = answer;
+  const sentences = askedSentences(answer);
+  if (sentences.length === 0) return [];
+  const [headings = [], ...body] = estimatesTable(answer);
+  const shown = body.map((row, index) => {
+    const { low, high } = estimates[index]?.estimate ?? { low: 0, high: 0 };
+    const write = writerFor({ low, high, level: options.level });
+    return row.map((value, column) => (typeof value === "number" ? write(value, String(headings[column])) : value));
+  });
+  const table = estimates.length === 0 ? [] : alignedLines([headings.map(String), ...shown]);
+  return [["Asked of the coefficients", [...sentences, ...table]]];
+}
 
 /** One line a term, figures to what the standard error in force supports; columns that hold nothing are left out. */
 function driverLines(answer: Answer): string[] {
@@ -63,6 +81,7 @@ function writerFor({ low, high, level }: Writing): (value: number, heading: stri
       case "p-value":
         return pValueInWords(value, level).replace(/^p (= )?/, "");
       case "coefficient":
+      case "estimate":
       case "low":
       case "high":
         return numberInWords(value, decimals);

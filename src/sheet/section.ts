@@ -29,6 +29,9 @@ export interface Stacked extends Section {
   readonly starts: readonly number[];
 }
 
+/** Rows that a section takes on the page, with the blank row that follows it; one without rows takes none. */
+export const rowsTaken = ({ rows }: Section): number => (rows.length === 0 ? 0 : rows.length + 1);
+
 /** Puts sections one below the other with a blank row between them. */
 export function stack(parts: readonly Section[]): Stacked {
   const rows: (readonly PlanCell[])[] = [];
@@ -40,7 +43,7 @@ export function stack(parts: readonly Section[]): Stacked {
     starts.push(start);
     formats.push(...part.formats.map((format) => movedFormat(format, start)));
     links.push(...part.links.map((link) => ({ ...link, row: link.row + start })));
-    rows.push(...part.rows, []);
+    rows.push(...part.rows, ...(part.rows.length === 0 ? [] : [[]]));
   }
   return { rows, formats, links, starts };
 }

@@ -108,6 +108,7 @@ export const answerFixture: Answer = {
     asked: null,
   },
   estimates: [],
+  askable: { names: terms.map((name, term) => ({ name, term })), size: terms.length },
   firmness: {
     choices: [],
     terms: terms.map((term, row) => ({

@@ -37,6 +37,9 @@ const model = (rows: Model["rows"]): Model => ({
   textNumbers: [],
 });
 
+/** The months as steps through time, with nothing asked yet. */
+export const monthsQuestion = { source, model: model({ kind: "time", order: null }) };
+
 function answerOver(rows: Model["rows"]): Answer {
   const answer = analyse({ source, model: model(rows), options: defaultOptions }, () => undefined);
   if (!answer.ok) throw new Error(answer.problem.code);

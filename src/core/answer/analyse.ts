@@ -10,7 +10,8 @@ import { type Result, success } from "../problem/result.ts";
 import { type Firmness, firmness } from "../robustness/firmness.ts";
 import { allErrors } from "./allErrors.ts";
 import type { Answer, FitFigures } from "./answer.ts";
-import { estimateSentence, jointSentence } from "./askedWords.ts";
+import { coefficientsOf } from "./asked.ts";
+import { askedSentences } from "./askedWords.ts";
 import { againstOf, driverAnswers } from "./drivers.ts";
 import { guardsOf } from "./guards.ts";
 import type { Options } from "./options.ts";
@@ -103,13 +104,13 @@ function spoken(fit: Fit, found: Found, { options, places }: { options: Options;
     outcome: design.outcome.name,
     observations: fit.rowCount,
     terms: design.terms.map(({ name }) => name),
+    askable: coefficientsOf(design),
     fit: figuresOf(fit),
     rows: rowsSummary(design),
     options,
   };
-  const asked = askedSentences(found, options.level);
   const opening = [openingSentence(said), choiceSentence(said)];
-  const verdict = [...opening, ...sentences(drivers), ...asked, ...found.decision.cautions];
+  const verdict = [...opening, ...sentences(drivers), ...askedSentences(said), ...found.decision.cautions];
   const { leftOut, leftOutCount, notes } = design;
   return {
     ...said,
@@ -125,11 +126,6 @@ function spoken(fit: Fit, found: Found, { options, places }: { options: Options;
 
 const sentences = (drivers: Answer["drivers"]): string[] =>
   drivers.flatMap(({ sentence }) => (sentence === null ? [] : [sentence]));
-
-const askedSentences = ({ estimates, joint }: Found, level: number): string[] => [
-  ...estimates.map((estimate) => estimateSentence(estimate, level)),
-  ...(joint.asked === null ? [] : [jointSentence(joint.asked, level)]),
-];
 
 function titleOf({ outcome, terms }: Design): string {
   const drivers = terms.filter(({ meaning }) => meaning.kind !== "constant").map(({ name }) => name);

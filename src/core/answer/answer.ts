@@ -6,6 +6,7 @@ import type { InferenceTable } from "../inference/inference.ts";
 import type { JointOutcome } from "../inference/joint.ts";
 import type { ChoiceTable, TermFirmness } from "../robustness/firmness.ts";
 import type { AskedEstimate } from "./asked.ts";
+import type { Coefficients } from "./expression.ts";
 import type { Guards } from "./guards.ts";
 import type { Options } from "./options.ts";
 
@@ -42,6 +43,8 @@ export interface Answer {
   };
   /** Numbers made of the coefficients that were asked for, under the standard errors in force. */
   readonly estimates: readonly AskedEstimate[];
+  /** What more may be asked of: the names that each coefficient goes by. */
+  readonly askable: Coefficients;
   /** Every choice of standard errors side by side, and what each conclusion hangs on. */
   readonly firmness: {
     readonly choices: readonly ChoiceTable[];

@@ -6,7 +6,7 @@ import type { Restrictions } from "../inference/joint.ts";
 import type { Side } from "../inference/ratioLaw.ts";
 import type { Reference } from "../inference/reference.ts";
 import { type Result, failure, success } from "../problem/result.ts";
-import { type Expression, type TermName, readExpression } from "./expression.ts";
+import { type Coefficients, type Expression, type TermName, type Vocabulary, readExpression } from "./expression.ts";
 import type { Options } from "./options.ts";
 
 /** A number that was asked for, made of the coefficients; null where it divides by exactly zero. */
@@ -32,7 +32,7 @@ export function askedEstimates(
   { covariance, reference }: InForce,
   { estimates, level }: Pick<Options, "estimates" | "level">,
 ): Result<readonly AskedEstimate[]> {
-  const read = expressionsOf(fit.design, "estimates", estimates);
+  const read = readEstimates(coefficientsOf(fit.design), estimates);
   if (!read.ok) return read;
   return success(
     read.value.map(({ text, above, below, against, side }) => {
@@ -57,13 +57,8 @@ export function askedRestrictions(
   { jointTest }: Pick<Options, "jointTest">,
 ): Result<AskedRestrictions | null> {
   if (jointTest.length === 0) return success(null);
-  const read = expressionsOf(design, "joint test", jointTest);
+  const read = readJointTest(coefficientsOf(design), jointTest);
   if (!read.ok) return read;
-  const strange = read.value.find(({ below, side }) => below !== null || side !== "both");
-  if (strange !== undefined) {
-    const allowed = ["sums of coefficients, each equal to a number or another sum, such as Price = 0"];
-    return failure({ code: "unknown-value", setting: "joint test", value: strange.text, allowed, nearest: null });
-  }
   return success({
     texts: read.value.map(({ text }) => text),
     weights: read.value.map(({ above }) => above.weights),
@@ -71,8 +66,27 @@ export function askedRestrictions(
   });
 }
 
-function expressionsOf(design: Design, setting: string, texts: readonly string[]): Result<readonly Expression[]> {
-  const vocabulary = { names: namesOf(design), size: design.terms.length, setting };
+/**
+ * Reads what the setting "estimates" asks for.
+ * @returns Problems of the expressions.
+ */
+export const readEstimates = (coefficients: Coefficients, texts: readonly string[]): Result<readonly Expression[]> =>
+  expressionsOf({ ...coefficients, setting: "estimates" }, texts);
+
+/**
+ * Reads the equations of the setting "joint test".
+ * @returns Problems of the expressions, "unknown-value" for one that is not linear or looks to one side.
+ */
+export function readJointTest(coefficients: Coefficients, texts: readonly string[]): Result<readonly Expression[]> {
+  const read = expressionsOf({ ...coefficients, setting: "joint test" }, texts);
+  if (!read.ok) return read;
+  const strange = read.value.find(({ below, side }) => below !== null || side !== "both");
+  if (strange === undefined) return read;
+  const allowed = ["sums of coefficients, each equal to a number or another sum, such as Price = 0"];
+  return failure({ code: "unknown-value", setting: "joint test", value: strange.text, allowed, nearest: null });
+}
+
+function expressionsOf(vocabulary: Vocabulary, texts: readonly string[]): Result<readonly Expression[]> {
   const found: Expression[] = [];
   for (const text of texts) {
     const read = readExpression(text, vocabulary);
@@ -81,6 +95,12 @@ function expressionsOf(design: Design, setting: string, texts: readonly string[]
   }
   return success(found);
 }
+
+/** What expressions may speak of in a design. */
+export const coefficientsOf = (design: Design): Coefficients => ({
+  names: namesOf(design),
+  size: design.terms.length,
+});
 
 /** Terms go by their own names, and by their column's where one term alone is made of it. */
 function namesOf({ terms }: Design): TermName[] {

@@ -1,7 +1,15 @@
 import type { JointFigure } from "../inference/joint.ts";
 import type { AskedEstimate } from "./asked.ts";
-import type { AskedJoint } from "./answer.ts";
+import type { Answer, AskedJoint } from "./answer.ts";
 import { confidenceInWords, decimalsFor, listInWords, numberInWords, pValueInWords } from "./wording.ts";
+
+type Asked = Pick<Answer, "estimates" | "joint" | "options">;
+
+/** One sentence for each number that was asked for, then one for the equations tested together. */
+export const askedSentences = ({ estimates, joint, options }: Asked): string[] => [
+  ...estimates.map((estimate) => estimateSentence(estimate, options.level)),
+  ...(joint.asked === null ? [] : [jointSentence(joint.asked, options.level)]),
+];
 
 /** A number that was asked for, with its interval and what may be said of the value it is held against. */
 export function estimateSentence({ text, against, side, estimate }: AskedEstimate, level: number): string {

@@ -21,10 +21,14 @@ export interface TermName {
   readonly term: number;
 }
 
-export interface Vocabulary {
+/** The coefficients that an expression may be made of. */
+export interface Coefficients {
   readonly names: readonly TermName[];
   /** k. */
   readonly size: number;
+}
+
+export interface Vocabulary extends Coefficients {
   /** The setting that the expression stands in. */
   readonly setting: string;
 }
