@@ -10,7 +10,9 @@ import { addressOf } from "../../table/address.ts";
 export function typedResults(block: ReportBlock, group: Gathered | null): Finding[] {
   const filled = new Set(group?.cells.map(({ place }) => addressAt(place)) ?? []);
   const places = [
-    ...block.terms.flatMap(({ numbers }) => numbers.map(({ place }) => place)),
+    ...block.terms.flatMap(({ numbers, inBrackets }) =>
+      [...numbers, ...(inBrackets === null ? [] : [inBrackets])].map(({ place }) => place),
+    ),
     ...block.summaries.map(({ place }) => place),
   ];
   const typed = places.filter((place) => !isCalculatedAt(place) && !filled.has(addressAt(place)));

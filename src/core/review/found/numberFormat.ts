@@ -36,9 +36,22 @@ const countDigits = (part: string): number => part.replaceAll(/[^0#?]/g, "").len
 /** Commas behind the decimals, as in "0.0,", scale the number too. */
 const trailingCommas = (decimals: string): number => /[0#?](,+)[^0#?,]*$/.exec(decimals)?.[1]?.length ?? 0;
 
+/**
+ * Whether a format sets a number in round brackets, and whether a minus is shown with it: "0.00;(0.00)" puts brackets in
+ * place of the minus, "(0.00)" puts them beside it.
+ * @returns null where the number stands without brackets.
+ */
+export function bracketsIn(format: string, value: number): { readonly minus: boolean } | null {
+  const section = sectionFor(format, value).replaceAll(/[_*]./g, "");
+  if (!/\([^)]*[0#?][^)]*\)/.test(section)) return null;
+  return { minus: value < 0 && (sectionsOf(format).length === 1 || section.includes("-")) };
+}
+
 /** A format may have parts for positive and negative numbers and for zero. */
 function sectionFor(format: string, value: number): string {
-  const sections = format.match(/(?:"[^"]*"|\\.|[^;])+/g) ?? [format];
+  const sections = sectionsOf(format);
   const index = value < 0 ? 1 : value === 0 ? 2 : 0;
-  return sections[index] ?? sections[0];
+  return sections[index] ?? sections[0]!;
 }
+
+const sectionsOf = (format: string): readonly string[] => format.match(/(?:"[^"]*"|\\.|[^;])+/g) ?? [format];

@@ -3,6 +3,7 @@ import { addressAt } from "../cellsOfBook.ts";
 import type { Gathered } from "../found/gatherClaims.ts";
 import { shownNumberAt } from "../found/shownNumber.ts";
 import type { CellPlace } from "../cellsOfBook.ts";
+import { withBrackets } from "./readInBrackets.ts";
 import type { ReportBlock, ReportedTerm } from "./reportBlocks.ts";
 
 /** The group whose formulas give a block its coefficients; null where they are typed, or come from several. */
@@ -25,7 +26,17 @@ function quantityAt({ cells }: Gathered, at: CellPlace): Quantity | null {
  * The claim of formulas with the numbers that stand beside them under headings: ratios and p-values worked out from
  * their cells, or typed there.
  */
-export function withBlock(claim: Claim, group: Gathered, { terms, summaries }: ReportBlock): Claim {
+export function withBlock(claim: Claim, group: Gathered, block: ReportBlock): Claim {
+  const whole = withNumbers(claim, group, block);
+  if (block.model === null) return whole;
+  const counted = block.terms.flatMap((reported) => {
+    const term = termCounted(reported, group);
+    return term === undefined || reported.inBrackets === null ? [] : [{ term, inBrackets: reported.inBrackets }];
+  });
+  return withBrackets(whole, counted, block.model.brackets);
+}
+
+function withNumbers(claim: Claim, group: Gathered, { terms, summaries }: ReportBlock): Claim {
   const known = new Set(claim.reported.map(({ cell }) => cell));
   const ofTerms = terms.flatMap((term) => {
     const counted = termCounted(term, group);

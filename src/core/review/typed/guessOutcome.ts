@@ -12,10 +12,12 @@ import { outcomeNameIn } from "./reportWords.ts";
 export interface Outcome {
   readonly column: DataColumn;
   readonly form: ClaimedForm;
-  readonly because: "named" | "spoken of" | "only one" | "nearest";
+  readonly because: "heading" | "named" | "spoken of" | "only one" | "nearest";
 }
 
 export interface Report {
+  /** What stands over its coefficients where they are one column of several, the nearest first. */
+  readonly headings: readonly string[];
   /** Texts of the report and around it. */
   readonly texts: readonly string[];
   readonly drivers: readonly Match[];
@@ -24,14 +26,14 @@ export interface Report {
 }
 
 /**
- * The outcome among the columns that are no drivers: the one that the report names as such, the one that its texts
- * speak of, the only one there is, or the one whose regression comes nearest to the coefficients.
+ * The outcome among the columns that are no drivers: the one that stands over the coefficients, the one that the report
+ * names as such, the one that its texts speak of, the only one there is, or the one whose regression comes nearest to the coefficients.
  * @returns null where no column of numbers is left.
  */
 export function guessOutcome(columns: readonly DataColumn[], report: Report): Outcome | null {
   const used = new Set(report.drivers.map(({ column }) => column.column));
   const left = columns.filter((column) => !used.has(column.column) && holdsNumbers(column));
-  const named = namedAmong(left, report.texts);
+  const named = headingAmong(left, report.headings) ?? namedAmong(left, report.texts);
   if (named !== null) return named;
   const spoken = left.filter(({ name }) => report.texts.some((text) => speaksOf(text, name)));
   if (spoken.length === 1) return { column: spoken[0]!, form: "as it is", because: "spoken of" };
@@ -43,6 +45,18 @@ export function guessOutcome(columns: readonly DataColumn[], report: Report): Ou
 function holdsNumbers({ source }: DataColumn): boolean {
   const contents = contentsOf(source);
   return holdingOf(source, contents) === "numbers" && !contents.values.counter;
+}
+
+/** From this likeness on a heading is no other column's. */
+const surelyMeant = 3;
+
+function headingAmong(columns: readonly DataColumn[], headings: readonly string[]): Outcome | null {
+  for (const heading of headings) {
+    const { base, form } = formIn(heading);
+    const column = columns.find(({ name }) => scoreOf(base, name) >= surelyMeant);
+    if (column !== undefined) return { column, form, because: "heading" };
+  }
+  return null;
 }
 
 function namedAmong(columns: readonly DataColumn[], texts: readonly string[]): Outcome | null {

@@ -36,14 +36,21 @@ function readingOf(text: string): Omit<Label, "place"> | null {
   return term === null && summary === null && inText.length === 0 ? null : { term, summary, inText };
 }
 
+/** Rows of a sheet, and the columns of it that speak of something else. */
+interface Surroundings {
+  readonly firstRow: number;
+  readonly lastRow: number;
+  readonly without: readonly number[];
+}
+
 /** The texts that stand in some rows of a sheet. */
-export function textsBetween(sheet: BookSheet, firstRow: number, lastRow: number): string[] {
+export function textsBetween(sheet: BookSheet, { firstRow, lastRow, without }: Surroundings): string[] {
   const from = Math.max(firstRow, sheet.firstRow);
   const to = Math.min(lastRow, sheet.firstRow + sheet.rowCount - 1);
   const texts: string[] = [];
   for (let row = from; row <= to; row++) {
     for (const [index, cells] of sheet.columns.entries()) {
-      if (cells.kinds[row - sheet.firstRow] !== cellKind.text) continue;
+      if (cells.kinds[row - sheet.firstRow] !== cellKind.text || without.includes(sheet.firstColumn + index)) continue;
       texts.push(cellInWords(cells, row - sheet.firstRow));
       if (index > mostColumnsRead) break;
     }

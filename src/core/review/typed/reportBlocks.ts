@@ -2,6 +2,9 @@ import type { SheetArea } from "../../table/address.ts";
 import type { BookSheet } from "../book.ts";
 import { type CellPlace, isTextAt, wordsAt } from "../cellsOfBook.ts";
 import { shownNumberAt } from "../found/shownNumber.ts";
+import type { Brackets } from "./bracketNotes.ts";
+import { bracketBlocks, overlap } from "./bracketBlocks.ts";
+import type { InBrackets } from "./inBrackets.ts";
 import { type Label, labelsOf } from "./labels.ts";
 import { type TermWord, isConstantName, summaryWordIn } from "./reportWords.ts";
 import { type SummaryNumber, summariesOf } from "./summaries.ts";
@@ -11,25 +14,46 @@ export interface ReportedTerm {
   readonly name: string;
   readonly isConstant: boolean;
   readonly numbers: readonly { readonly word: TermWord; readonly place: CellPlace }[];
+  /** What stands in brackets under the coefficient. */
+  readonly inBrackets: InBrackets | null;
 }
 
-/** A block of cells that says by its headings what its numbers are. */
+/** A model among others whose coefficients stand in columns over the same names. */
+export interface ModelColumn {
+  readonly brackets: Brackets;
+  /** What stands over its coefficients, the nearest first: "(1)", "Repairs". */
+  readonly headings: readonly string[];
+  /** Names of the drivers that are not in this model. */
+  readonly absent: readonly string[];
+  /** The columns of the other models. */
+  readonly beside: readonly number[];
+}
+
+/** A block of cells that says by its headings, or by brackets under its coefficients, what its numbers are. */
 export interface ReportBlock {
   readonly sheet: BookSheet;
   /** Headings and names included. */
   readonly area: SheetArea;
   readonly terms: readonly ReportedTerm[];
   readonly summaries: readonly SummaryNumber[];
+  /** Null for a block under headings. */
+  readonly model: ModelColumn | null;
 }
 
-/** The blocks of a sheet: one driver a row under headings, or one driver a column beside them. */
+/**
+ * The blocks of a sheet: one driver a row under headings, one driver a column beside them, or models in columns with
+ * numbers in brackets under their coefficients.
+ */
 export function reportBlocks(sheet: BookSheet): readonly ReportBlock[] {
   const labels = labelsOf(sheet);
   const headings = labels.filter(({ term }) => term !== null);
   const found = [...linedUp(headings, "down"), ...linedUp(headings, "across")]
     .map((group) => readBlock(sheet, group))
     .filter((block) => block !== null);
-  return summariesOf(sheet, found, labels);
+  const { blocks, own } = bracketBlocks(sheet, labels, found);
+  const others = labels.filter((label) => !own.has(label));
+  const headed = found.filter(({ area }) => !blocks.some((block) => overlap(area, block.area)));
+  return summariesOf(sheet, [...headed, ...blocks], others);
 }
 
 type Lie = "down" | "across";
@@ -83,6 +107,7 @@ function readBlock(sheet: BookSheet, group: Group): ReportBlock | null {
     area: areaBetween(sheet, [first, last, cellAt(sheet, group.lie, [names.track, at - 1])]),
     terms,
     summaries: [],
+    model: null,
   };
 }
 
@@ -133,10 +158,10 @@ function termAt(sheet: BookSheet, { lie, headings }: Group, { names, at }: TermP
   const isConstant = isConstantName(name);
   if (numbers[0]?.word !== "coefficient") return null;
   if (!isConstant && numbers.length === 1 && summaryWordIn(name) !== null) return null;
-  return { name, isConstant, numbers };
+  return { name, isConstant, numbers, inBrackets: null };
 }
 
-function areaBetween(sheet: BookSheet, places: readonly CellPlace[]): SheetArea {
+export function areaBetween(sheet: BookSheet, places: readonly CellPlace[]): SheetArea {
   const [rows, columns] = [places.map(({ row }) => row), places.map(({ column }) => column)];
   const [row, column] = [Math.min(...rows), Math.min(...columns)];
   return {

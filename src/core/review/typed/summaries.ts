@@ -15,7 +15,7 @@ export interface SummaryNumber {
 }
 
 /** So many rows above, below or beside a block its other numbers may stand. */
-const farthestRows = 14;
+export const farthestRows = 14;
 const farthestColumns = 6;
 
 /** Each block with the numbers that stand nearest to it. */
@@ -24,10 +24,11 @@ export function summariesOf(
   blocks: readonly ReportBlock[],
   labels: readonly Label[],
 ): readonly ReportBlock[] {
-  const found = blocks.map((): SummaryNumber[] => []);
+  const found = blocks.map(({ summaries }): SummaryNumber[] => [...summaries]);
+  const areas = blocks.map(({ area }) => area);
   for (const label of labels) {
     if (blocks.some(({ area }) => isIn(area, label.place))) continue;
-    const nearest = nearestBlock(blocks, label.place);
+    const nearest = nearestArea(areas, label.place);
     if (nearest !== null) found[nearest]!.push(...numbersAt(sheet, label));
   }
   return blocks.map((block, index) => ({ ...block, summaries: firstOfEach(found[index]!) }));
@@ -36,10 +37,11 @@ export function summariesOf(
 const isIn = (area: SheetArea, { row, column }: CellPlace): boolean =>
   row >= area.row && row < area.row + area.rows && column >= area.column && column < area.column + area.columns;
 
-function nearestBlock(blocks: readonly ReportBlock[], place: CellPlace): number | null {
+/** Which of some areas a cell speaks of; null where none is near. */
+export function nearestArea(areas: readonly SheetArea[], place: CellPlace): number | null {
   let nearest: number | null = null;
   let least = Infinity;
-  for (const [index, { area }] of blocks.entries()) {
+  for (const [index, area] of areas.entries()) {
     const rows = distance(place.row, area.row, area.rows);
     const columns = distance(place.column, area.column, area.columns);
     if (rows > farthestRows || columns > farthestColumns) continue;
@@ -78,5 +80,5 @@ function numberBeside(sheet: BookSheet, { row, column }: CellPlace): Pick<Summar
   return shown === null || isColumn ? null : { place: below, shown };
 }
 
-const firstOfEach = (numbers: readonly SummaryNumber[]): SummaryNumber[] =>
+export const firstOfEach = (numbers: readonly SummaryNumber[]): SummaryNumber[] =>
   numbers.filter(({ word }, index) => numbers.findIndex((other) => other.word === word) === index);

@@ -6,10 +6,11 @@ import { othersBeside } from "../found/othersBeside.ts";
 import { type ShownNumber, shownNumberAt } from "../found/shownNumber.ts";
 import { type Reading, read, unread } from "../formula/reading.ts";
 import type { CellPlace } from "../cellsOfBook.ts";
-import type { DataTable } from "./dataTables.ts";
+import type { DataColumn, DataTable } from "./dataTables.ts";
 import { guessOutcome } from "./guessOutcome.ts";
 import { textsBetween } from "./labels.ts";
-import { type Match, bestTable } from "./matchNames.ts";
+import { type Match, bestTable, matchNames } from "./matchNames.ts";
+import { type CountedBrackets, withBrackets } from "./readInBrackets.ts";
 import type { ReportBlock } from "./reportBlocks.ts";
 import { assumptions, whyNoData } from "./typedWords.ts";
 
@@ -33,7 +34,7 @@ export function typedClaim(block: ReportBlock, tables: readonly DataTable[], giv
   const lines = [outcome, ...drivers];
   const [first, ...others] = lines.map(({ stretch }) => stretch) as [Stretch, ...Stretch[]];
   const constant = block.terms.some(({ isConstant }) => isConstant);
-  return read({
+  const claim: Claim = {
     place: addressOf(block.area),
     origin: { kind: "typed" },
     outcome: claimedLine(outcome.stretch, outcome.form),
@@ -42,12 +43,24 @@ export function typedClaim(block: ReportBlock, tables: readonly DataTable[], giv
     reported: reportedBy(block),
     others: othersBeside([first, ...others]),
     assumed: constant ? assumed : [...assumed, assumptions.noConstant],
+  };
+  return read(block.model === null ? claim : withBrackets(claim, bracketsIn(block), block.model.brackets));
+}
+
+const driversOf = ({ terms }: ReportBlock) => terms.filter(({ isConstant }) => !isConstant);
+
+function bracketsIn(block: ReportBlock): CountedBrackets[] {
+  const drivers = driversOf(block);
+  return block.terms.flatMap((term) => {
+    const counted = term.isConstant ? null : drivers.indexOf(term);
+    return term.inBrackets === null ? [] : [{ term: counted, inBrackets: term.inBrackets }];
   });
 }
 
 /** Every number of a block with what it is; the drivers are counted in the order in which they stand. */
-export function reportedBy({ terms, summaries }: ReportBlock): readonly ReportedNumber[] {
-  const drivers = terms.filter(({ isConstant }) => !isConstant);
+export function reportedBy(block: ReportBlock): readonly ReportedNumber[] {
+  const { terms, summaries } = block;
+  const drivers = driversOf(block);
   const ofTerms = terms.flatMap((term) =>
     term.numbers.flatMap(({ word, place }) =>
       numberAs({ kind: word, term: term.isConstant ? null : drivers.indexOf(term) }, place, shownNumberAt(place)),
@@ -66,7 +79,7 @@ interface FoundData {
 }
 
 function dataFor(block: ReportBlock, tables: readonly DataTable[], given: GivenData): Reading<FoundData> {
-  const names = block.terms.filter(({ isConstant }) => !isConstant).map(({ name }) => name);
+  const names = driversOf(block).map(({ name }) => name);
   if (given.drivers !== null && given.drivers.length !== names.length) {
     return unread(whyNoData.fewDrivers(names.length, given.drivers.length));
   }
@@ -97,13 +110,21 @@ function foundData(block: ReportBlock, tables: readonly DataTable[], { names, gi
   );
   const assumed = given.drivers === null ? [assumptions.data(rangeOf(table)), ...renamed] : [];
   if (given.outcome !== null) return read({ outcome: given.outcome, drivers, assumed });
-  const outcome = guessOutcome(table.columns, { ...reportOf(block, matches), texts });
+  const outcome = guessOutcome(possibleOutcomes(block, table, names), { ...reportOf(block, matches), texts });
   if (outcome === null) return unread(whyNoData.noOutcome(table.sheet.sheet));
   return read({
     outcome: lineIn(table, outcome.column.column, outcome.form),
     drivers,
     assumed: [...assumed, assumptions.outcome(outcome.column.name, outcome.because)],
   });
+}
+
+/** Columns that are no drivers of other models beside this one. */
+function possibleOutcomes({ model }: ReportBlock, table: DataTable, names: readonly string[]): readonly DataColumn[] {
+  if (model === null || model.absent.length === 0) return table.columns;
+  const { matches } = matchNames([...names, ...model.absent], table);
+  const drivers = matches.flatMap((match) => (match !== null && match.score >= surelyMeant ? [match.column] : []));
+  return table.columns.filter((column) => !drivers.includes(column));
 }
 
 /** From this likeness on a name is no other's. */
@@ -126,19 +147,17 @@ function rangeOf({ sheet, columns, firstRow, rowCount }: DataTable): string {
   });
 }
 
-function reportOf({ terms }: ReportBlock, drivers: readonly Match[]) {
-  const coefficients = terms
-    .filter(({ isConstant }) => !isConstant)
-    .map(({ numbers }) => shownNumberAt(numbers[0]!.place)?.value ?? 0);
-  return { drivers, coefficients };
+function reportOf(block: ReportBlock, drivers: readonly Match[]) {
+  const coefficients = driversOf(block).map(({ numbers }) => shownNumberAt(numbers[0]!.place)?.value ?? 0);
+  return { drivers, coefficients, headings: block.model?.headings ?? [] };
 }
 
 /** So many rows above and below a block may speak of it. */
 const rowsAround = 12;
 
-function textsAround({ sheet, area, terms }: ReportBlock): string[] {
-  const names = new Set(terms.map(({ name }) => name));
-  return textsBetween(sheet, area.row - rowsAround, area.row + area.rows + rowsAround).filter(
-    (text) => !names.has(text),
-  );
+function textsAround({ sheet, area, terms, model }: ReportBlock): string[] {
+  const names = new Set([...terms.map(({ name }) => name), ...(model?.absent ?? [])]);
+  const [firstRow, lastRow] = [area.row - rowsAround, area.row + area.rows + rowsAround];
+  const texts = textsBetween(sheet, { firstRow, lastRow, without: model?.beside ?? [] });
+  return texts.filter((text) => !names.has(text));
 }

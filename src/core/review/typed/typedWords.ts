@@ -1,4 +1,7 @@
+import type { BracketWord } from "./bracketNotes.ts";
 import type { Outcome } from "./guessOutcome.ts";
+
+const noNote = "The report does not say what its numbers in brackets are:";
 
 /** What had to be taken for granted to read a report of typed numbers. */
 export const assumptions = {
@@ -6,9 +9,26 @@ export const assumptions = {
   name: (name: string, heading: string) => `"${name}" was read as the column "${heading}".`,
   noConstant: "No constant is reported; the regression was taken to have one all the same.",
   outcome: (name: string, because: Outcome["because"]) => `The outcome was taken to be "${name}", ${reasons[because]}.`,
+  nearerBrackets: (word: BracketWord) =>
+    `${noNote} they were read as ${plurals[word]}, which come nearer to what the data give than ${plurals[otherThan(word)]} would.`,
+  unclearBrackets: (word: BracketWord) =>
+    `${noNote} they were read as ${plurals[word]}, but as ${plurals[otherThan(word)]} they would come about as near to what the data give: ask which they are.`,
+  negativeBrackets: `${noNote} they were read as t ratios, as standard errors cannot be negative and some of these are.`,
+  usualBrackets: `${noNote} they were read as standard errors, as is common practice.`,
+  signs: "The t ratios in brackets carry no sign; each was given the sign of its coefficient.",
+  furtherLine: "A further line of numbers in brackets under the coefficients was not read.",
 } as const;
 
+const plurals: Readonly<Record<BracketWord, string>> = {
+  "standard-error": "standard errors",
+  ratio: "t ratios",
+  "p-value": "p-values",
+};
+
+const otherThan = (word: BracketWord): BracketWord => (word === "ratio" ? "standard-error" : "ratio");
+
 const reasons: Readonly<Record<Outcome["because"], string>> = {
+  heading: "which stands over the coefficients",
   named: "which the report names as such",
   "spoken of": "of which the report speaks",
   "only one": "the only other column of numbers there",
