@@ -12,6 +12,7 @@ import type { BookCell, BookData, BookValue, SheetData, StyledCell } from "../bo
 import { toRange } from "./areas.ts";
 import { pixelsOf, pointsPerPixel, standardHeight, standardWidth } from "./sizes.ts";
 import { toGridStyle } from "./styleTables.ts";
+import { staysText } from "./typed.ts";
 
 /** The grid shows at least this much, so that an empty sheet looks like one. */
 const leastRows = 1000;
@@ -102,6 +103,8 @@ function toValue(value: BookValue): ICellData {
   if (typeof value === "number") return { v: value, t: CellValueType.NUMBER };
   if (typeof value === "boolean") return { v: value ? 1 : 0, t: CellValueType.BOOLEAN };
   // Text of a file is text, even where it reads like an error or a number.
-  if (typeof value === "string") return { v: value, t: CellValueType.FORCE_STRING };
+  if (typeof value === "string") {
+    return { v: value, t: staysText(value) ? CellValueType.STRING : CellValueType.FORCE_STRING };
+  }
   return { v: value.error, t: CellValueType.STRING };
 }

@@ -37,3 +37,11 @@ export function asTyped(value: string | number | boolean, format: string): Typed
   if (typeof read.v === "boolean") return boolean(read.v);
   return keep({ v: read.v, t: CellValueType.NUMBER }, read.z ?? null);
 }
+
+const wordsAlone = /^\p{L}\P{Nd}*$/u;
+
+/** Whether text would be text again if someone entered it: the cell line shows any other behind an apostrophe. */
+export function staysText(value: string): boolean {
+  if (wordsAlone.test(value)) return !["TRUE", "FALSE"].includes(value.toUpperCase());
+  return asTyped(value, "General").cell.t === CellValueType.STRING && !isErrorSign(value.toUpperCase());
+}

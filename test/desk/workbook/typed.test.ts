@@ -1,5 +1,5 @@
 import { expect, it } from "vitest";
-import { asTyped } from "../../../src/desk/workbook/typed.ts";
+import { asTyped, staysText } from "../../../src/desk/workbook/typed.ts";
 
 it.each([
   ["1e3", 1000, "0.00E+00"],
@@ -30,4 +30,19 @@ it.each([["=A1"], [5], [true], ["#N/A"]])("keeps %j as text under a text format"
 
 it("takes a sign of equality alone for text", () => {
   expect(asTyped("=", "General").cell).toMatchObject({ v: "=", f: null });
+});
+
+it.each([
+  ["Price index", true],
+  ["Kestrel & Vane: 2014 = 100", true],
+  ["2019Q1", true],
+  ["false", false],
+  ["#N/A", false],
+  ["005", false],
+  ["Jan-19", false],
+  ["=A1", false],
+  ["'quoted", false],
+  ["", false],
+])("of a file's text %j knows whether entering it would give text again: %j", (text, stays) => {
+  expect(staysText(text)).toBe(stays);
 });
