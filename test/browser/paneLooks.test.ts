@@ -61,6 +61,18 @@ const states: Readonly<Record<string, (page: Page) => Promise<void>>> = {
     await page.getByLabel("Standard errors").selectOption({ label: "always classical" });
     await button(page, "Repairs answer").waitFor();
   },
+  "more asked": async (page) => {
+    await getAnswer(page);
+    await open(page, /^Ask more/);
+    const [estimates, equations] = [/^Sums and quotients/, /^Equations tested/].map((label) => page.getByLabel(label));
+    await estimates!.fill("Price index + Advertising");
+    await equations!.fill("Price index = 0, Rainy days = Advertising");
+    await open(page, "Ask this");
+    await page.getByRole("region", { name: "Asked of the coefficients" }).waitFor();
+    await estimates!.fill("Price indx");
+    await open(page, "Ask this");
+    await page.getByText(/Did you mean "Price index"/).waitFor();
+  },
   "out of date": async (page) => {
     await getAnswer(page);
     await page.evaluate(() => window.stage.host.change(5, 1, 99));

@@ -3,6 +3,8 @@ import { SectionTitle } from "../parts/SectionTitle.tsx";
 import { useType } from "../look/type.ts";
 import { usePane } from "../paneContext.ts";
 import { HelpHead } from "../help/HelpHead.tsx";
+import { AskMore } from "./AskMore.tsx";
+import { AskedFigures } from "./AskedFigures.tsx";
 import { Choice } from "./Choice.tsx";
 import { DriverList } from "./DriverList.tsx";
 import { Memo } from "./Memo.tsx";
@@ -30,6 +32,8 @@ export function AnswerSection(): ReactNode {
         Drivers
       </HelpHead>
       <DriverList answer={answer} />
+      <AskedFigures answer={answer} />
+      <AskMore />
       <h2 className={type.head}>Rows</h2>
       <RowsUsed answer={answer} />
       <Memo />

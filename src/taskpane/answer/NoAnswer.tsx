@@ -3,12 +3,15 @@ import type { ReactNode } from "react";
 import { useType } from "../look/type.ts";
 import { SectionTitle } from "../parts/SectionTitle.tsx";
 import { usePane } from "../paneContext.ts";
+import { AskMore } from "./AskMore.tsx";
 
 /** A section that has nothing to show yet says what is missing and takes the user there. */
 export function NoAnswer({ section }: { readonly section: "Answer" | "Evidence" }): ReactNode {
   const type = useType();
   const { state, dispatch, commands } = usePane();
   const hasData = state.data !== null;
+  const options = state.setup?.options;
+  const asksMore = options !== undefined && options.estimates.length + options.jointTest.length > 0;
   return (
     <>
       <SectionTitle>No answer yet</SectionTitle>
@@ -26,6 +29,8 @@ export function NoAnswer({ section }: { readonly section: "Answer" | "Evidence" 
           Choose the data
         </Button>
       )}
+      {/* What a stored set-up asks may not fit its columns any more, and must be within reach to be mended. */}
+      {section === "Answer" && asksMore && <AskMore />}
     </>
   );
 }

@@ -1,11 +1,11 @@
-import { Field, Input, type InputProps, makeStyles } from "@fluentui/react-components";
+import { Field, type FieldProps, Input, type InputProps, makeStyles } from "@fluentui/react-components";
 import type { ReactNode } from "react";
 
 export interface TextFieldProps extends Pick<InputProps, "placeholder" | "inputMode" | "onBlur"> {
   readonly label: string;
   readonly value: string;
   readonly onText: (text: string) => void;
-  readonly hint?: string;
+  readonly hint?: NonNullable<FieldProps["hint"]>;
   /** What is wrong with what was typed; null where nothing is. */
   readonly complaint?: string | null;
 }
