@@ -177,7 +177,7 @@ function errorsFor(
 }
 
 /** What the evidence calls for on the whole data, rows through time where the first column says so. */
-function calledFor(set: DataSet) {
+export function calledFor(set: DataSet) {
   const isTime = set.key.cells.every((cell) => typeof cell !== "string");
   const numbers = [set.outcome, ...set.drivers];
   const column = (name: string, cells: readonly Cell[], index: number) => ({

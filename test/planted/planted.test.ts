@@ -2,8 +2,10 @@ import { describe, expect, it } from "vitest";
 import { reviewClaim } from "../../src/core/review/reviewClaim.ts";
 import { hypotheses } from "../../src/core/review/engine/change.ts";
 import { type PlantedBook, pairs, singles, soundBooks } from "./books.ts";
+import { type FormulaBook, bookOf, formulaFaults, soundFormulas } from "./formulas/books.ts";
+import { judgeFormulas } from "./formulas/judge.ts";
 import { judge, judgeBook } from "./judge.ts";
-import { reviewBook } from "./wholeBook.ts";
+import { reviewBook, reviewTogether } from "./wholeBook.ts";
 
 const faultOf = (planted: PlantedBook): string | null =>
   judge(
@@ -48,6 +50,35 @@ describe("planted faults", () => {
     const wrong: string[] = [];
     for (const planted of all.filter((_, index) => index % 16 === 3)) {
       const fault = judgeBook(planted, await reviewBook(planted.book));
+      if (fault !== null) wrong.push(`${planted.name}: ${fault}`);
+    }
+    expect(wrong).toEqual([]);
+  });
+});
+
+describe("faults planted where formulas report", () => {
+  const wrongAmong = async (books: readonly FormulaBook[]): Promise<string[]> => {
+    const reviews = await reviewTogether(books);
+    return books.flatMap((planted, index) => {
+      const fault = judgeFormulas(planted, reviews[index]!);
+      return fault === null ? [] : [`${planted.name}: ${fault}`];
+    });
+  };
+
+  it("are each found", async () => {
+    expect(await wrongAmong(formulaFaults())).toEqual([]);
+  });
+
+  it("are not found where there are none", async () => {
+    const books = soundFormulas();
+    expect(books).toHaveLength(20);
+    expect(await wrongAmong(books)).toEqual([]);
+  });
+
+  it("are found in workbooks as they are opened", async () => {
+    const wrong: string[] = [];
+    for (const planted of [...formulaFaults(), ...soundFormulas()].filter((_, index) => index % 12 === 5)) {
+      const fault = judgeFormulas(planted, await reviewBook(bookOf(planted)));
       if (fault !== null) wrong.push(`${planted.name}: ${fault}`);
     }
     expect(wrong).toEqual([]);

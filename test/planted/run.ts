@@ -2,10 +2,13 @@
 import { mkdirSync, writeFileSync } from "node:fs";
 import { join } from "node:path";
 import { reviewClaim } from "../../src/core/review/reviewClaim.ts";
+import type { BookData } from "../../src/desk/book/bookData.ts";
 import { saveXlsx } from "../../src/desk/files/saveXlsx.ts";
 import { type PlantedBook, pairs, singles, soundBooks } from "./books.ts";
+import { type FormulaBook, bookOf, formulaFaults, soundFormulas } from "./formulas/books.ts";
+import { judgeFormulas } from "./formulas/judge.ts";
 import { judge, judgeBook } from "./judge.ts";
-import { reviewBook } from "./wholeBook.ts";
+import { reviewBook, reviewTogether } from "./wholeBook.ts";
 
 /** `--save DIR` writes the workbooks; `--books` takes each the whole way, through the desk and the search for reports. */
 const isWhole = process.argv.includes("--books");
@@ -13,30 +16,51 @@ const at = process.argv.indexOf("--save");
 const directory = at < 0 ? null : (process.argv[at + 1] ?? "planted");
 if (directory !== null) mkdirSync(directory, { recursive: true });
 
-const claimFault = (planted: PlantedBook): string | null =>
-  judge(
-    planted,
-    reviewClaim(planted.claim, () => undefined),
-  );
+interface Judged {
+  readonly kind: string;
+  readonly name: string;
+  readonly book: BookData;
+  readonly fault: string | null;
+}
 
-const wholeFault = async (planted: PlantedBook): Promise<string | null> =>
-  judgeBook(planted, await reviewBook(planted.book));
+async function judgedPlanted(planted: PlantedBook): Promise<Judged> {
+  const fault = isWhole
+    ? judgeBook(planted, await reviewBook(planted.book))
+    : judge(
+        planted,
+        reviewClaim(planted.claim, () => undefined),
+      );
+  return { kind: `typed, ${planted.kind}`, name: planted.name, book: planted.book, fault };
+}
 
-const planted = [...singles(), ...pairs(), ...soundBooks()];
-const books = isWhole ? planted.filter(({ expectedInBook }) => expectedInBook !== null) : planted;
-const results = new Map<PlantedBook, string | null>();
-for (const [index, book] of books.entries()) {
-  const fault = isWhole ? await wholeFault(book) : claimFault(book);
-  results.set(book, fault);
-  if (fault !== null) console.log(`${book.kind} ${book.name}\n    ${fault}`);
+async function* judgedFormulas(books: readonly FormulaBook[]): AsyncGenerator<Judged> {
+  const together = isWhole ? [] : await reviewTogether(books);
+  for (const [index, planted] of books.entries()) {
+    const book = bookOf(planted);
+    const fault = judgeFormulas(planted, together[index] ?? (await reviewBook(book)));
+    yield { kind: planted.said === null ? "formulas, sound" : "formulas, single", name: planted.name, book, fault };
+  }
+}
+
+async function* all(): AsyncGenerator<Judged> {
+  const typed = [...singles(), ...pairs(), ...soundBooks()];
+  for (const planted of typed) {
+    if (!isWhole || planted.expectedInBook !== null) yield await judgedPlanted(planted);
+  }
+  yield* judgedFormulas([...formulaFaults(), ...soundFormulas()]);
+}
+
+const counts = new Map<string, { made: number; right: number }>();
+let number = 0;
+for await (const { kind, name, book, fault } of all()) {
+  const count = counts.get(kind) ?? { made: 0, right: 0 };
+  counts.set(kind, { made: count.made + 1, right: count.right + (fault === null ? 1 : 0) });
+  if (fault !== null) console.log(`${kind}: ${name}\n    ${fault}`);
+  number++;
   if (directory === null) continue;
-  const name = `${String(index + 1).padStart(3, "0")} ${book.name.replaceAll(/[^\w -]/g, "")}.xlsx`;
-  writeFileSync(join(directory, name), await saveXlsx(book.book));
+  const file = `${String(number).padStart(3, "0")} ${name.replaceAll(/[^\w -]/g, "")}.xlsx`;
+  writeFileSync(join(directory, file), await saveXlsx(book));
 }
 
 console.log("\n| workbooks | made | right |\n|---|---|---|");
-for (const kind of ["single", "pair", "sound"] as const) {
-  const made = books.filter((book) => book.kind === kind);
-  const right = made.filter((book) => results.get(book) === null);
-  console.log(`| ${kind} | ${made.length} | ${right.length} |`);
-}
+for (const [kind, { made, right }] of counts) console.log(`| ${kind} | ${made} | ${right} |`);

@@ -63,9 +63,15 @@ export function claimsOf(book: Book, asked: Asked, report: Report): Result<BookC
   }
   report("Looking at how the sheets are made", 0.9);
   const { claims, unread, blocks } = claimsFrom(here, book, given.value);
-  const missed = place === null ? [...found.unread, ...unread] : unread;
+  const missed = place === null ? onceEach(notReported([...found.unread, ...unread], claims)) : unread;
   const craft = craftOf({ book, claims, groups: here.groups, blocks, unread: missed });
   return success({ claims, unread: missed, craft });
+}
+
+/** A formula that cannot be followed is no loss where the headings beside it say what it gives. */
+function notReported(unread: BookClaims["unread"], claims: readonly Claim[]): BookClaims["unread"] {
+  const known = new Set(claims.flatMap(({ reported }) => reported.map(({ cell }) => cell)));
+  return unread.filter(({ cell }) => !known.has(cell));
 }
 
 const nothingGiven: GivenData = { outcome: null, drivers: null };
@@ -89,7 +95,7 @@ function regressionsIn(book: Book, onSheet: string | null, report: Report): Foun
     blocks.push(...reportBlocks(sheet));
   }
   const windows = firstWindows(gathered(cells, book));
-  return { groups: windows.groups, blocks, unread: [...onceEach(unread), ...windows.unread] };
+  return { groups: windows.groups, blocks, unread: [...unread, ...windows.unread] };
 }
 
 /** What has a cell inside an area. */

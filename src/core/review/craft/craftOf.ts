@@ -12,6 +12,7 @@ import { addressesAlong, craftFinding } from "./craftFinding.ts";
 import { found } from "./craftWords.ts";
 import { type CheckedLine, hiddenLine, typedOverFormulas, unusableCells } from "./lineChecks.ts";
 import { olderResults } from "./olderResults.ts";
+import { namedOtherwise } from "./namedOtherwise.ts";
 import { headingsInside, shiftedRanges } from "./rangeChecks.ts";
 import { repeatedRows } from "./repeatedRows.ts";
 import { typedResults } from "./reportChecks.ts";
@@ -31,6 +32,7 @@ export function craftOf({ book, claims, groups, blocks, unread }: Ground): reado
   const findings = [
     ...claims.flatMap((claim) => ofClaim(claim, book)),
     ...groups.flatMap(headingsInside),
+    ...groups.flatMap(namedOtherwise),
     ...blocks.flatMap(({ block, group }) => typedResults(block, group)),
     ...unread
       .filter(({ why }) => saysUnequal(why))
@@ -53,6 +55,7 @@ function ofClaim(claim: Claim, book: Book): Finding[] {
     ...lines.flatMap(hiddenLine),
     ...shiftedRanges(named(outcome), drivers.map(named)),
     ...olderResults(claim),
+    ...noConstant(claim),
     ...hiddenRows(outcome),
     ...hiddenSheets(lines),
     ...repeatedRows(
@@ -67,6 +70,13 @@ function checked(line: ClaimedLine, book: Book): CheckedLine[] {
   if (sheet === null) return [];
   const { runs, track, from, count } = line;
   return [{ line, stretch: { sheet, runs, track, from, count } }];
+}
+
+/** A constant is left out of a formula by a word that is easily overlooked; a report that is typed in says so itself. */
+function noConstant({ origin, constant, place, outcome }: Claim): Finding[] {
+  if (origin.kind !== "formula" || constant) return [];
+  const what = found.noConstant(outcome.name);
+  return [craftFinding("noConstant", { rank: "changes a number", cells: [place], what })];
 }
 
 function hiddenRows({ line, stretch }: CheckedLine): Finding[] {

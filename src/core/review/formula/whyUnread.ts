@@ -36,6 +36,8 @@ export const whyUnread = {
   goesIntoText: "The result goes into a text.",
   severalAtOnce: "Results of several regressions go into one cell.",
   noNumber: (shows: string) => `The cell shows ${shows === "" ? "nothing" : shows} in place of a number.`,
+  noNumberAmong: (shows: string, cell: string, holds: string) =>
+    `${whyUnread.noNumber(shows).replace(/\.$/, "")}: ${cell}, which it is to use, ${holds === "" ? "is empty" : `holds "${holds}"`}.`,
   moreWindows: (count: number, last: string) =>
     `${count.toLocaleString("en-US")} more regressions of the same columns over other rows, as far as ${last}, are not reviewed one by one.`,
   beyondTheBlock: (name: string) => `A cell beyond what ${name} gives is asked for.`,

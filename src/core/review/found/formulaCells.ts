@@ -8,6 +8,7 @@ import { type RegressionFunction, showsRegression } from "../formula/telling.ts"
 import type { Measure, Value } from "../formula/values.ts";
 import { whyUnread } from "../formula/whyUnread.ts";
 import { arraysAmong } from "./arraysAmong.ts";
+import { firstUnusable } from "./firstUnusable.ts";
 
 /** A cell that shows a quantity of a regression. */
 export interface FormulaCell {
@@ -40,7 +41,7 @@ export function readFormulas(sheet: BookSheet, book: Book): FormulasRead {
     const found = value === null ? [] : cellsOf(entered, value, { sheet, met: seen });
     cells.push(...found);
     met.push(...seen.regressions.map(({ regression }) => ({ regression, cell: addressAt(place) })));
-    const why = found.length > 0 ? null : whyNothing(value, place, seen);
+    const why = found.length > 0 ? null : whyNothing(value, { place, book, met: seen });
     if (why !== null) unread.push({ cell: addressAt(place), why });
   }
   return { cells, met, unread };
@@ -77,11 +78,17 @@ function cellsOf(entered: BookFormula, value: Value, { sheet, met }: On): Formul
 }
 
 /** Why a formula reports nothing; null where no regression was met in it after all. */
-function whyNothing(value: Value | null, place: CellPlace, met: Met): string | null {
+function whyNothing(value: Value | null, { place, book, met }: At): string | null {
   if (value === null) return whyUnread.notAFormula;
   const [why] = met.unread;
   if (why !== undefined) return why;
-  if (met.regressions.length === 0) return null;
+  const [first] = met.regressions;
+  if (first === undefined) return null;
   if (value.kind === "unknown" && value.why !== "") return value.why;
-  return numberAt(place) === null ? whyUnread.noNumber(wordsAt(place)) : whyUnread.goesIntoArithmetic;
+  if (numberAt(place) !== null) return whyUnread.goesIntoArithmetic;
+  const shows = wordsAt(place);
+  const culprit = first.regression.passesOver ? null : firstUnusable(first.regression, book);
+  return culprit === null
+    ? whyUnread.noNumber(shows)
+    : whyUnread.noNumberAmong(shows, addressAt(culprit), wordsAt(culprit));
 }
