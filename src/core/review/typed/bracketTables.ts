@@ -28,7 +28,11 @@ interface Pair {
 /** The tables of a sheet from the top down, those of one column of names after the other. */
 export function bracketTables(sheet: BookSheet): readonly BracketTable[] {
   const sides = new Map<number, Pair[]>();
-  for (const pair of pairsOf(sheet)) sides.set(pair.names, [...(sides.get(pair.names) ?? []), pair]);
+  for (const pair of pairsOf(sheet)) {
+    const side = sides.get(pair.names);
+    if (side === undefined) sides.set(pair.names, [pair]);
+    else side.push(pair);
+  }
   return [...sides.values()].flatMap((pairs) => tablesOf(sheet, pairs));
 }
 
@@ -61,6 +65,7 @@ export const isName = (place: CellPlace): boolean =>
 
 /** Further apart than this, two coefficients belong to two reports. */
 const farthestRowsApart = 6;
+const mostTerms = 200;
 
 function tablesOf(sheet: BookSheet, pairs: readonly Pair[]): BracketTable[] {
   const names = pairs[0]!.names;
@@ -72,6 +77,7 @@ function tablesOf(sheet: BookSheet, pairs: readonly Pair[]): BracketTable[] {
     const goesOn =
       run !== undefined &&
       row - run.at(-1)! <= farthestRowsApart &&
+      run.length < mostTerms &&
       !run.some((earlier) => nameOf(earlier) === nameOf(row)) &&
       !hasEnded(nameOf, run.at(-1)!, row);
     if (goesOn) run.push(row);
@@ -79,8 +85,9 @@ function tablesOf(sheet: BookSheet, pairs: readonly Pair[]): BracketTable[] {
   }
   return runs.flatMap((run): BracketTable[] => {
     if (run.every((row) => isConstantName(nameOf(row)))) return [];
-    const columns = pairs.filter(({ row }) => run.includes(row)).map(({ column }) => column);
-    const inOrder = [...new Set(columns)].sort((one, other) => one - other);
+    const within = new Set(run);
+    const columns = new Set(pairs.filter(({ row }) => within.has(row)).map(({ column }) => column));
+    const inOrder = [...columns].sort((one, other) => one - other);
     return [{ sheet, names, columns: inOrder, first: run[0]!, last: run.at(-1)!, pairs: run.length }];
   });
 }

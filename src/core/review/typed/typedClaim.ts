@@ -98,7 +98,11 @@ function foundData(block: ReportBlock, tables: readonly DataTable[], { names, gi
   const texts = textsAround(block);
   const isSpokenOf = (sheet: string): boolean => texts.some((text) => text.toLowerCase().includes(sheet.toLowerCase()));
   const wanted = given.drivers?.map(({ stretch }) => claimedLine(stretch, "as it is").name) ?? names;
-  const best = bestTable(wanted, tables, isSpokenOf);
+  // Where tables fit alike, the one beside the report is meant sooner than one of another sheet.
+  const nearFirst = tables.toSorted(
+    (one, other) => Number(other.sheet === block.sheet) - Number(one.sheet === block.sheet),
+  );
+  const best = bestTable(wanted, nearFirst, isSpokenOf);
   if (best === null) return unread(whyNoData.noColumns(names));
   const missing = names.filter((_, index) => best.matches[index] === null);
   const { table } = best;
