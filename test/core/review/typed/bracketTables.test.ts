@@ -42,15 +42,15 @@ const stacked = sheetOf("Stacked", [
   ["R squared", 0.8],
   ["standard errors in brackets"],
   [],
-  ["Weight", -5.34],
-  ["", "(9.6)"],
+  ["Power", -0.068],
+  ["", "(6.7)"],
   ["", "[0.000]"],
-  ["Constant", 37.3],
-  ["", "(19.9)"],
+  ["Constant", 30.1],
+  ["", "(18.4)"],
   ["", "[0.000]"],
-  ["F", 91.4],
+  ["F", 45.5],
   ["", "(0.000)"],
-  ["R squared", 0.7],
+  ["R squared", 0.6],
   ["t ratios in round brackets and p-values in square brackets"],
 ]);
 
@@ -62,6 +62,16 @@ const outcomes = sheetOf("Outcomes", [
   ["Power", -0.0015, ""],
   ["", "(0.0003)", ""],
   ["n", 32, 31],
+  ["R squared", "", 0.031],
+]);
+
+/** No outcome is named; Power is a driver of the first model alone. */
+const nested = sheetOf("Nested", [
+  ["", "(1)", "(2)"],
+  ["Weight", -3.878, -5.344],
+  ["", "(0.633)", "(0.559)"],
+  ["Power", -0.0318, "-"],
+  ["", "(0.0090)", ""],
 ]);
 
 /** A report under its data, in the same columns. */
@@ -73,7 +83,7 @@ const wordsOf = ({ reported }: Claim) =>
 describe("tables with numbers in brackets", () => {
   let book: Book;
   beforeAll(async () => {
-    book = await readOnDesk(bookOf(sheetOf("Cars", data), formulas, stacked, outcomes, below));
+    book = await readOnDesk(bookOf(sheetOf("Cars", data), formulas, stacked, outcomes, nested, below));
   });
   const on = (sheet: string) => claimsIn(book, { sheet }).claims;
 
@@ -104,26 +114,34 @@ describe("tables with numbers in brackets", () => {
       ["r-squared", 0.8],
     ]);
     expect(wordsOf(second!)).toEqual([
-      ["coefficient 0", -5.34],
-      ["ratio 0", -9.6],
-      ["coefficient null", 37.3],
-      ["ratio null", 19.9],
-      ["f", 91.4],
-      ["r-squared", 0.7],
+      ["coefficient 0", -0.068],
+      ["ratio 0", -6.7],
+      ["coefficient null", 30.1],
+      ["ratio null", 18.4],
+      ["f", 45.5],
+      ["r-squared", 0.6],
     ]);
     expect(first!.assumed!.join(" ")).not.toContain("bracket");
-    expect(second!.assumed!.slice(-2)).toEqual([
+    expect(second!.assumed!.slice(2)).toEqual([
       "The t ratios in brackets carry no sign; each was given the sign of its coefficient.",
       "A further line of numbers in brackets under the coefficients was not read.",
     ]);
   });
 
-  it("may name an outcome over each column, and no driver of another model is taken for it", () => {
+  it("have outcomes that are no driver of another model beside", () => {
+    expect(on("Nested").map(({ outcome }) => outcome.name)).toEqual(["Mileage", "Mileage"]);
+  });
+
+  it("may name an outcome over each column, and leave out figures of some", () => {
     const [first, second] = on("Outcomes");
     expect(first!.outcome).toMatchObject({ name: "Mileage", form: "logarithm" });
     expect(first!.assumed).toContain('The outcome was taken to be "Mileage", which stands over the coefficients.');
     expect(second!.outcome).toMatchObject({ name: "Quarter", form: "as it is" });
-    expect(wordsOf(second!).at(-1)).toEqual(["observations", 31]);
+    expect(wordsOf(first!).at(-1)).toEqual(["observations", 32]);
+    expect(wordsOf(second!).slice(-2)).toEqual([
+      ["observations", 31],
+      ["r-squared", 0.031],
+    ]);
     const onlyNamed = { reported: "Outcomes!C2:C3", outcome: "Mileage", drivers: null };
     expect(claimsIn(book, { pointed: onlyNamed }).claims.map(({ outcome }) => outcome.name)).toEqual(["Mileage"]);
   });

@@ -152,6 +152,7 @@ describe("numbers in brackets under their coefficients", () => {
   });
 
   it("are what the note says of brackets of their shape", () => {
+    expect(on("Errors").assumed!.join(" ")).not.toContain("brackets");
     expect(kindsOn("Errors")).toEqual(new Set(["coefficient", "standard-error", "r-squared", "observations"]));
     expect(kindsOn("Ratios")).toEqual(new Set(["coefficient", "ratio", "r-squared", "observations"]));
     expect(numbersOf(on("Ratios"))[1]).toEqual(["ratio 0", -5.747, 0.0005, "B4", "-5.747"]);
