@@ -81,6 +81,7 @@ function tableSection([headings = [], ...body]: Grid, columns: Columns): Section
         area: area(0, index + 1, 1),
         ...headingLook(columns, index),
       })),
+      { area: { row: 1, column: 0, rows: body.length, columns: headings.length }, style: "sentence" },
       ...body.flatMap((row, index): PlanFormat[] => [
         {
           area: area(index + 1, 0, 1),

@@ -76,6 +76,8 @@ function writerFor({ low, high, level }: Writing): (value: number, heading: stri
   const decimals = decimalsFor((high - low) / 2);
   return (value, heading) => {
     switch (heading) {
+      case "held against":
+        return String(value);
       case "ratio":
         return numberInWords(value, ratioDecimals);
       case "p-value":

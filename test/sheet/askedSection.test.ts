@@ -40,7 +40,7 @@ describe("the figures of what was asked, on a result sheet", () => {
     const rows = valuesOf(askedSection(asked).rows);
     expect(rows[0]).toEqual([heading]);
     const { value, standardError, ratio, pValue, low, high } = asked.estimates[0]!.estimate!;
-    expect(rows[2]).toEqual(["Price + Rain = 2", value, standardError, ratio, pValue, low, high, "2"]);
+    expect(rows[2]).toEqual(["Price + Rain = 2", value, standardError, ratio, pValue, low, high, 2]);
     expect(rows[3]!.at(-1)).toBe("above 0 (one-sided)");
     expect(rows[4]).toEqual(["Tested together: Price = 0 and Rain = Price"]);
     expect(rows.slice(6).map(([kind]) => String(kind).replace(" (in force)", ""))).toEqual([
@@ -92,6 +92,7 @@ describe("what was asked, in the text for a memo", () => {
     expect(lines).toHaveLength(6);
     for (const sentence of lines.slice(0, 3)) expect(asked.verdict).toContain(sentence);
     expect(lines[3]).toMatch(/^asked for +estimate +standard error +ratio +p-value +low +high +held against$/);
+    expect(lines[4]).toMatch(/^Price \+ Rain = 2 .* 2$/);
     expect(lines[5]).toMatch(/^Rain > 0 .*above 0 \(one-sided\)$/);
   });
 

@@ -18,7 +18,11 @@ const estimateHeadings = [
 /** One row a number that was asked for, under the standard errors in force; figures that cannot be had are empty. */
 export const estimatesTable = ({ estimates }: Pick<Answer, "estimates">): Grid => [
   [...estimateHeadings],
-  ...estimates.map((asked) => [asked.text, ...figuresOf(asked), heldInWords(asked)]),
+  ...estimates.map((asked) => [
+    asked.text,
+    ...figuresOf(asked),
+    asked.side === "both" ? asked.against : heldInWords(asked),
+  ]),
 ];
 
 const figuresOf = ({ estimate }: AskedEstimate): (number | string)[] => {

@@ -27,7 +27,7 @@ describe("the figures of what was asked of the coefficients", () => {
     ]);
     const { coefficient, standardError, ratio, pValue, low, high } = answer.drivers[2]!;
     const figures = [coefficient, standardError, ratio, pValue, low, high];
-    expect(own).toEqual(["Rain", ...figures.map((figure) => expect.closeTo(figure, 10) as number), "0"]);
+    expect(own).toEqual(["Rain", ...figures.map((figure) => expect.closeTo(figure, 10) as number), 0]);
     expect(above!.at(-1)).toBe("above 0 (one-sided)");
     expect(above![4]).toBeCloseTo(ratio > 0 ? pValue / 2 : 1 - pValue / 2, 10);
   });
@@ -35,7 +35,7 @@ describe("the figures of what was asked of the coefficients", () => {
   it("are left empty where a number cannot be had", () => {
     const answer = answerTo({ estimates: ["Price"] });
     const none = { ...answer, estimates: answer.estimates.map((asked) => ({ ...asked, estimate: null })) };
-    expect(estimatesTable(none)[1]).toEqual(["Price", "", "", "", "", "", "", "0"]);
+    expect(estimatesTable(none)[1]).toEqual(["Price", "", "", "", "", "", "", 0]);
   });
 
   it("of equations stand under each kind, the one in force marked", () => {
