@@ -1,7 +1,7 @@
 import type { Browser, Page } from "playwright-core";
 import { afterAll, afterEach, beforeAll, beforeEach, expect, it } from "vitest";
 import { openPane } from "./panePage/openPane.ts";
-import { announced, button, getAnswer, heading, openTab, roleOf } from "./panePage/steps.ts";
+import { announced, button, getAnswer, heading, openTab, roleOf, storeAs } from "./panePage/steps.ts";
 import { launchBrowser } from "./support/browser.ts";
 
 let browser: Browser;
@@ -29,11 +29,11 @@ it("asks for a sum and a joint test by keyboard, and shows and tells what comes 
   await estimates().fill("Price index + Advertising, Advertising > 0");
   await page.keyboard.press("Enter");
   await asked().waitFor();
-  const sum = page.getByRole("table", { name: "Figures of Price index + Advertising", exact: true });
+  const sum = page.getByRole("table", { name: "Asked: Price index + Advertising", exact: true });
   expect(await sum.getByRole("row", { name: /^standard error \d/ }).count()).toBe(1);
   expect(
     await page
-      .getByRole("table", { name: "Figures of Advertising > 0" })
+      .getByRole("table", { name: "Asked: Advertising > 0" })
       .getByRole("row", { name: "held against above 0 (one-sided)" })
       .count(),
   ).toBe(1);
@@ -92,4 +92,26 @@ it("lets what was asked be taken back once a driver is gone", async () => {
   await estimates().fill("");
   await button(page, "Ask this").click();
   await heading(page, "Repairs explained by Price index and Rainy days").waitFor();
+});
+
+it("keeps what a stored set-up asks within reach while there is no answer", async () => {
+  await button(page, "Ask more of the coefficients").click();
+  await estimates().fill("Advertising");
+  await button(page, "Ask this").click();
+  await asked().waitFor();
+  await openTab(page, "Data");
+  await storeAs(page, "With a sum");
+  await page.evaluate(() => window.stage.pane.commands.read({ kind: "address", address: "Months!A1:F49" }));
+  await expect.poll(() => page.evaluate(() => window.stage.pane.store.get().answered)).toBeNull();
+  await page.getByRole("button", { name: "Open With a sum", exact: true }).click();
+  await heading(page, "Months!A1:F97").waitFor();
+  await roleOf(page, "Advertising").selectOption("unused");
+  await openTab(page, "Answer");
+  await heading(page, "No answer yet").waitFor();
+  await button(page, "Ask more of the coefficients (1 asked)").click();
+  expect(await estimates().inputValue()).toBe("Advertising");
+  await estimates().fill("Price index");
+  await button(page, "Ask this").click();
+  await heading(page, "Repairs explained by Price index and Rainy days").waitFor();
+  await page.getByRole("table", { name: "Asked: Price index", exact: true }).waitFor();
 });

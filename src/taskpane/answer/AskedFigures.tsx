@@ -78,7 +78,7 @@ function EstimateTable({ asked, level }: { readonly asked: AskedEstimate; readon
     ["to", write(estimate.high)],
   ];
   return (
-    <table className={styles.table} aria-label={`Figures of ${text}`}>
+    <table className={styles.table} aria-label={`Asked: ${text}`}>
       <tbody>
         {lines.map(([label, figure]) => (
           <tr key={label}>
