@@ -2,7 +2,7 @@ import { describe, expect, it } from "vitest";
 import { reviewClaim } from "../../src/core/review/reviewClaim.ts";
 import { hypotheses } from "../../src/core/review/engine/change.ts";
 import { type PlantedBook, pairs, singles, soundBooks } from "./books.ts";
-import { type FormulaBook, bookOf, formulaFaults, soundFormulas } from "./formulas/books.ts";
+import { type FormulaBook, bookOf, formulaFaults, formulaPairs, soundFormulas } from "./formulas/books.ts";
 import { judgeFormulas } from "./formulas/judge.ts";
 import { judge, judgeBook } from "./judge.ts";
 import { reviewBook, reviewTogether } from "./wholeBook.ts";
@@ -67,6 +67,11 @@ describe("faults planted where formulas report", () => {
 
   it("are each found", async () => {
     expect(await wrongAmong(formulaFaults())).toEqual([]);
+  });
+
+  it("are both found in nine of ten pairs", async () => {
+    const books = formulaPairs();
+    expect((await wrongAmong(books)).length).toBeLessThanOrEqual(books.length / 10);
   });
 
   it("are not found where there are none", async () => {

@@ -5,7 +5,14 @@ import { reviewClaim } from "../../src/core/review/reviewClaim.ts";
 import type { BookData } from "../../src/desk/book/bookData.ts";
 import { saveXlsx } from "../../src/desk/files/saveXlsx.ts";
 import { type PlantedBook, pairs, singles, soundBooks } from "./books.ts";
-import { type FormulaBook, bookOf, formulaFaults, soundFormulas } from "./formulas/books.ts";
+import {
+  type FormulaBook,
+  bookOf,
+  everyFormulaFault,
+  formulaFaults,
+  formulaPairs,
+  soundFormulas,
+} from "./formulas/books.ts";
 import { judgeFormulas } from "./formulas/judge.ts";
 import { judge, judgeBook } from "./judge.ts";
 import { reviewBook, reviewTogether } from "./wholeBook.ts";
@@ -38,7 +45,7 @@ async function* judgedFormulas(books: readonly FormulaBook[]): AsyncGenerator<Ju
   for (const [index, planted] of books.entries()) {
     const book = bookOf(planted);
     const fault = judgeFormulas(planted, together[index] ?? (await reviewBook(book)));
-    yield { kind: planted.said === null ? "formulas, sound" : "formulas, single", name: planted.name, book, fault };
+    yield { kind: `formulas, ${planted.kind}`, name: planted.name, book, fault };
   }
 }
 
@@ -47,7 +54,7 @@ async function* all(): AsyncGenerator<Judged> {
   for (const planted of typed) {
     if (!isWhole || planted.expectedInBook !== null) yield await judgedPlanted(planted);
   }
-  yield* judgedFormulas([...formulaFaults(), ...soundFormulas()]);
+  yield* judgedFormulas([...(isWhole ? formulaFaults() : everyFormulaFault()), ...formulaPairs(), ...soundFormulas()]);
 }
 
 const counts = new Map<string, { made: number; right: number }>();

@@ -9,8 +9,8 @@ import { type Worksheet, toSheetData, worksheetOf } from "./worksheet.ts";
 /** A workbook whose report is made by formulas, with one fault or none. */
 export interface FormulaBook {
   readonly name: string;
-  /** Null where it is sound. */
-  readonly said: Said | null;
+  readonly kind: "single" | "pair" | "sound";
+  readonly said: readonly Said[];
   /** The data, then the report; no two books have a sheet of the same name. */
   readonly sheets: readonly [SheetData, SheetData];
 }
@@ -22,20 +22,52 @@ const setsEach = 3;
 
 export function formulaFaults(): FormulaBook[] {
   return faults.flatMap((fault, index) => {
-    const sets = dataSets.filter(
-      ({ id, drivers }) =>
-        (fault.only === undefined || fault.only.includes(id)) && (fault.severalDrivers !== true || drivers.length > 1),
-    );
-    const possible = fault.forms ?? forms;
+    const [sets, possible] = [setsFor([fault]), formsFor([fault])];
     return Array.from({ length: setsEach }, (_, turn) =>
       made(`F${index * setsEach + turn + 1}`, {
         set: sets[(index + turn * 3) % sets.length]!,
         form: possible[(index + turn) % possible.length]!,
-        fault,
+        together: [fault],
       }),
     );
   });
 }
+
+/** Each fault in every form and data set that it can be planted in. */
+export function everyFormulaFault(): FormulaBook[] {
+  return faults.flatMap((fault, index) =>
+    setsFor([fault]).flatMap((set) =>
+      formsFor([fault]).map((form) =>
+        made(`E${index + 1}_${set.id.replaceAll("-", "")}_${form.replace(" ", "")}`, { set, form, together: [fault] }),
+      ),
+    ),
+  );
+}
+
+/** Faults of different sorts that happen together, in one form and data set each. */
+export function formulaPairs(): FormulaBook[] {
+  const sorts = [rangeFaults, readingFaults, sheetFaults];
+  const couples = sorts.flatMap((first, i) =>
+    sorts.slice(i + 1).flatMap((second) => first.flatMap((one) => second.map((other) => [one, other] as const))),
+  );
+  return couples.flatMap((pair, index) => {
+    const [sets, possible] = [setsFor(pair), formsFor(pair)];
+    if (pair.some(({ alone }) => alone === true) || sets.length * possible.length === 0) return [];
+    const set = sets[index % sets.length]!;
+    return [made(`P${index + 1}`, { set, form: possible[index % possible.length]!, together: pair })];
+  });
+}
+
+const setsFor = (together: readonly FormulaFault[]): DataSet[] =>
+  dataSets.filter(({ id, drivers }) =>
+    together.every(
+      ({ only, severalDrivers }) =>
+        (only === undefined || only.includes(id)) && (severalDrivers !== true || drivers.length > 1),
+    ),
+  );
+
+const formsFor = (together: readonly FormulaFault[]): Form[] =>
+  forms.filter((form) => together.every((fault) => fault.forms === undefined || fault.forms.includes(form)));
 
 /** Reports without fault: LINEST's standard errors where the data allow them, and figures that rest on none elsewhere. */
 export function soundFormulas(): FormulaBook[] {
@@ -45,8 +77,8 @@ export function soundFormulas(): FormulaBook[] {
     return [0, 1].map((turn) => {
       const { name, sheet } = soundSheets[(index + turn) % soundSheets.length]!;
       const form = possible[(index + turn) % possible.length]!;
-      const fault = { name, said: null, ...(sheet && { sheet, ranges: wholeOf(set) }) };
-      return made(`S${index * 2 + turn + 1}`, { set, form, fault });
+      const unusual = { name, ...(sheet && { sheet, ranges: wholeOf(set) }) };
+      return made(`S${index * 2 + turn + 1}`, { set, form, together: [unusual] });
     });
   });
 }
@@ -60,28 +92,41 @@ const wholeOf = ({ key }: DataSet): NonNullable<FormulaFault["ranges"]> => {
 interface Planting {
   readonly set: DataSet;
   readonly form: Form;
-  readonly fault: Omit<FormulaFault, "said"> & { readonly said: Said | null };
+  readonly together: readonly (Omit<FormulaFault, "said"> & { readonly said?: Said })[];
 }
 
-function made(id: string, { set, form, fault }: Planting): FormulaBook {
-  const plain = worksheetOf(set);
-  const sheet = fault.sheet?.(plain) ?? plain;
+function made(id: string, { set, form, together }: Planting): FormulaBook {
+  const sheet = together.reduce((one, fault) => fault.sheet?.(one) ?? one, worksheetOf(set));
   const names = set.drivers.map(({ name }) => name);
   const data = `Data${id}`;
-  const rows = reportRows[form]({ ...reportingOf(fault, sheet, names), name: data });
-  const standing: Worksheet = fault.since?.(sheet) ?? sheet;
+  const calculated = reportRows[form]({ ...reportingOf(together, sheet, names), name: data });
+  const standing = together.reduce((one, fault) => fault.since?.(one) ?? one, sheet);
+  const rows = together.reduce((one, fault) => fault.report?.(one, names) ?? one, calculated);
+  const said = together.flatMap((fault) => fault.said ?? []);
   return {
-    name: `${id} ${set.id}: ${fault.name} (${form})`,
-    said: fault.said,
-    sheets: [toSheetData(data, standing), blankSheet(`Report${id}`, fault.report?.(rows, names) ?? rows)],
+    name: `${id} ${set.id}: ${together.map(({ name }) => name).join(", and ")} (${form})`,
+    kind: (["sound", "single", "pair"] as const)[said.length] ?? "pair",
+    said,
+    sheets: [toSheetData(data, standing), blankSheet(`Report${id}`, rows)],
   };
 }
 
-function reportingOf(fault: Planting["fault"], sheet: Worksheet, names: readonly string[]): Omit<Reporting, "name"> {
-  const { ranges, constant = true, slip = 0, labels } = fault;
+function reportingOf(
+  together: Planting["together"],
+  sheet: Worksheet,
+  names: readonly string[],
+): Omit<Reporting, "name"> {
   const span = { from: 0, to: sheet.rows.length };
-  const whole = { outcome: span, drivers: span };
-  return { sheet, ranges: ranges?.(whole, sheet) ?? whole, constant, slip, labels: labels?.(names) ?? names };
+  return {
+    sheet,
+    ranges: together.reduce((ranges, fault) => fault.ranges?.(ranges, sheet) ?? ranges, {
+      outcome: span,
+      drivers: span,
+    }),
+    constant: together.every(({ constant }) => constant !== false),
+    slip: Math.max(...together.map(({ slip = 0 }) => slip)),
+    labels: together.reduce((labels, fault) => fault.labels?.(labels) ?? labels, names),
+  };
 }
 
 export const bookOf = ({ sheets }: FormulaBook): BookData => ({ sheets, names: [], active: 1 });

@@ -12,6 +12,8 @@ export interface FormulaFault {
   /** All where it does not say. */
   readonly forms?: readonly Form[];
   readonly severalDrivers?: true;
+  /** No number is left that formulas report, so that no second fault can show beside it. */
+  readonly alone?: true;
   /** Data sets that it can be planted in; all where it does not say. */
   readonly only?: readonly string[];
   readonly sheet?: (sheet: Worksheet) => Worksheet;
@@ -72,6 +74,7 @@ export const rangeFaults: readonly FormulaFault[] = [
   {
     name: "a heading inside the range of LINEST",
     said: { unread: /#VALUE!.*![A-Z]1, which it is to use, holds "/ },
+    alone: true,
     forms: [...linest, "trend"],
     ranges: ({ outcome: { to } }) => both({ from: -1, to }),
   },
@@ -83,6 +86,7 @@ export const rangeFaults: readonly FormulaFault[] = [
   {
     name: "ranges of unequal height",
     said: finding("unequal"),
+    alone: true,
     ranges: ({ outcome, drivers }) => ({ outcome, drivers: { ...drivers, to: drivers.to - 1 } }),
   },
   {
@@ -134,6 +138,7 @@ export const readingFaults: readonly FormulaFault[] = [
   {
     name: "results pasted as values",
     said: finding("typed-results"),
+    alone: true,
     forms: ["index"],
     report: (rows) => rows.map((row) => row.map((cell) => (typeof cell === "string" ? cell : numberIn(cell)))),
   },
@@ -173,6 +178,7 @@ export const sheetFaults: readonly FormulaFault[] = [
   {
     name: "words among the data of LINEST",
     said: { unread: /#VALUE!.*!C\d+, which it is to use, holds "closed"/ },
+    alone: true,
     forms: [...linest, "trend"],
     sheet: (sheet) => changed(sheet, 2, [middle(sheet, 2), () => "closed"]),
   },

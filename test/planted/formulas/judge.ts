@@ -1,19 +1,22 @@
 import type { BookReview } from "../../../src/core/review/claimReview.ts";
 import type { FormulaBook } from "./books.ts";
+import type { Said } from "./faults.ts";
 
 /** Whether a review says of a workbook what was planted there; else what it says. */
-export function judgeFormulas({ said }: FormulaBook, { claims, craft, unread }: BookReview): string | null {
-  if (said === null) return soundly({ claims, craft, unread });
-  if ("unread" in said) {
-    return unread.some(({ why }) => said.unread.test(why))
-      ? null
-      : `not said, but ${unread.map(({ why }) => why).join(" ")}`;
-  }
-  const codes = [...claims.flatMap(({ findings }) => findings), ...craft].map(({ code }) => code);
-  return codes.includes(said.finding)
-    ? null
-    : `${said.finding} not found, but ${codes.join(", ") || "nothing"}; ${unread.map(({ why }) => why).join(" ")}`;
+export function judgeFormulas({ said }: FormulaBook, review: BookReview): string | null {
+  if (said.length === 0) return soundly(review);
+  const missed = said.filter((one) => !isSaid(one, review));
+  const told = [...codesOf(review), ...review.unread.map(({ why }) => why)].join("; ");
+  return missed.length === 0 ? null : `not said: ${missed.map(inWords).join(", ")}, but ${told || "nothing"}`;
 }
+
+const isSaid = (said: Said, review: BookReview): boolean =>
+  "unread" in said ? review.unread.some(({ why }) => said.unread.test(why)) : codesOf(review).includes(said.finding);
+
+const inWords = (said: Said): string => ("unread" in said ? said.unread.source : said.finding);
+
+const codesOf = ({ claims, craft }: BookReview): string[] =>
+  [...claims.flatMap(({ findings }) => findings), ...craft].map(({ code }) => code);
 
 /** One report, all of its numbers out of the cells, and nothing that would change a conclusion. */
 function soundly({ claims, craft, unread }: BookReview): string | null {

@@ -34,14 +34,19 @@ export function craftOf({ book, claims, groups, blocks, unread }: Ground): reado
     ...groups.flatMap(headingsInside),
     ...groups.flatMap(namedOtherwise),
     ...blocks.flatMap(({ block, group }) => typedResults(block, group)),
-    ...unread
-      .filter(({ why }) => saysUnequal(why))
-      .map(({ cell, why }) =>
-        craftFinding("unequal", { rank: "changes a number", cells: [cell], what: found.unequal(why) }),
-      ),
+    ...unequalRanges(unread),
     ...byHand(book, claims),
   ];
   return gravestFirst(once(findings));
+}
+
+/** An array that was entered over a block is told once, not in each of its cells. */
+function unequalRanges(unread: Ground["unread"]): Finding[] {
+  const unequal = unread.filter(({ why }) => saysUnequal(why));
+  return [...new Set(unequal.map(({ why }) => why))].map((why) => {
+    const cells = unequal.filter((one) => one.why === why).map(({ cell }) => cell);
+    return craftFinding("unequal", { rank: "changes a number", cells, what: found.unequal(why) });
+  });
 }
 
 function ofClaim(claim: Claim, book: Book): Finding[] {
