@@ -35,15 +35,18 @@ export function bracketBlocks(
   const blocks = tables.flatMap((table, index) => {
     const bottom = bottomOf(table, labels, begins);
     const near = notes.filter(({ place }) => nearestArea(areas, place) === index);
-    if (table.pairs < fewestPairs && bottom.length === 0 && near.length === 0) return [];
+    if (bottom.length === 0 && near.length === 0 && !looksLikeReport(table)) return [];
     for (const label of bottom) own.add(label);
     return table.columns.flatMap((column) => blockOf(table, column, { bottom, notes: near }));
   });
   return { blocks, own };
 }
 
-/** A single number in brackets under another says nothing, if nothing beside it speaks of a regression. */
-const fewestPairs = 2;
+/**
+ * Where no word beside a table speaks of a regression, two names at the least have a number in brackets below, and no
+ * name between them has none: accounts have negative subtotals without a name here and there.
+ */
+const looksLikeReport = (table: BracketTable): boolean => table.pairs > 1 && rowsOf(table).length === table.pairs;
 
 /** Whether headings over the same cells give more drivers than brackets do. */
 const readsMore = ({ area, terms }: ReportBlock, table: BracketTable): boolean =>

@@ -61,9 +61,17 @@ const leftOff = (name: string, under: readonly string[], note: readonly string[]
 const errors = ["(0.761)", "(0.0151)", "(0.444)", "(8.509)"];
 const ratios = ["(5.747)", "(1.189)", "(1.166)", "(3.246)"];
 
-/** Brackets for negative numbers, one of them under a number with a name. */
+/** Brackets for negative numbers, two of them subtotals without a name. */
 const accounts = sheetOf("Accounts", [
   ["", "2024"],
+  ["Sales", negative(-1250)],
+  ["", negative(40)],
+  ["Grants", 120],
+  ["Wages", negative(310)],
+  ["", negative(230)],
+]);
+/** The same with a single one. */
+const fewer = sheetOf("Fewer", [
   ["Sales", negative(-1250)],
   ["", negative(40)],
   ["Wages", negative(310)],
@@ -90,6 +98,7 @@ describe("numbers in brackets under their coefficients", () => {
         leftOff("Unsaid ratios", ratios, []),
         leftOff("Signed", ["(-5.747)", ...ratios.slice(1)], []),
         accounts,
+        fewer,
       ),
     );
   });
@@ -180,7 +189,9 @@ describe("numbers in brackets under their coefficients", () => {
   });
 
   it("make no report of accounts", () => {
-    expect(claimsIn(book, { sheet: "Accounts" })).toMatchObject({ claims: [], unread: [] });
+    for (const sheet of ["Accounts", "Fewer"]) {
+      expect(claimsIn(book, { sheet })).toMatchObject({ claims: [], unread: [] });
+    }
   });
 });
 
