@@ -1,5 +1,5 @@
 import type { Answer } from "../core/answer/answer.ts";
-import { readEstimates, readJointTest } from "../core/answer/asked.ts";
+import { readEstimates, readJointTest } from "../core/answer/readAsked.ts";
 import { readExpressions } from "../core/answer/settingReaders.ts";
 import type { Problem } from "../core/problem/problem.ts";
 import type { Setup } from "./setup.ts";
