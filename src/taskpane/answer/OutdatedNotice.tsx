@@ -1,42 +1,21 @@
-import {
-  Button,
-  MessageBar,
-  MessageBarActions,
-  MessageBarBody,
-  MessageBarTitle,
-  makeStyles,
-  tokens,
-} from "@fluentui/react-components";
 import type { ReactNode } from "react";
 import type { Commands } from "../../app/pane.ts";
 import type { Outdated, PaneState, Written } from "../../app/state.ts";
 import { CellLink } from "../parts/CellLink.tsx";
+import { OutdatedBar } from "../parts/OutdatedBar.tsx";
 import { usePane } from "../paneContext.ts";
-
-const useStyles = makeStyles({
-  notice: { marginBottom: tokens.spacingVerticalM },
-  text: { whiteSpace: "normal", overflowWrap: "anywhere" },
-});
 
 /** Says that the figures below belong to cells or a set-up that have changed, and puts it right in one click. */
 export function OutdatedNotice(): ReactNode {
-  const styles = useStyles();
   const { state, commands } = usePane();
   const { outdated, sheet } = whatIsOutdated(state);
   if (outdated === null && sheet === null) return null;
   const { label, mend } = remedyFor(outdated, sheet, commands);
   return (
-    <MessageBar intent="warning" layout="multiline" className={styles.notice}>
-      <MessageBarBody className={styles.text}>
-        <MessageBarTitle>Out of date.</MessageBarTitle> <Reason outdated={outdated} />
-        {sheet !== null && <> The kept sheet {sheet.sheet} shows an earlier answer.</>}
-      </MessageBarBody>
-      <MessageBarActions>
-        <Button size="small" disabledFocusable={state.busy !== null} onClick={mend}>
-          {label}
-        </Button>
-      </MessageBarActions>
-    </MessageBar>
+    <OutdatedBar label={label} mend={mend}>
+      <Reason outdated={outdated} />
+      {sheet !== null && <> The kept sheet {sheet.sheet} shows an earlier answer.</>}
+    </OutdatedBar>
   );
 }
 
