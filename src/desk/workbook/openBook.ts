@@ -39,9 +39,9 @@ export function openBook(grid: Grid, data: BookData): Book {
 export function calculateUnsaved(book: Book, data: BookData): void {
   const ids = [...book.sheets.keys()];
   const unsaved = data.sheets.flatMap((sheet, index) => unsavedFormulas(sheet, ids[index]!));
-  if (unsaved.length === 0) return;
+  // Awake before the first edit: what changes while the engine sleeps is never calculated.
   book.grid.awaken();
-  recalculate(book, unsaved);
+  if (unsaved.length > 0) recalculate(book, unsaved);
 }
 
 function registerNames(book: Book, data: BookData): void {
