@@ -26,8 +26,5 @@ export async function saveCopy({ opened, file, sheet, from, to }: Copy, files: F
 /** A copy of an .xlsx file keeps all that is in it; a .csv file becomes a workbook. */
 async function copyWith(book: BookData, { original }: BookFile, sheet: string): ReturnType<typeof addSheets> {
   if (original === null) return { ok: true, value: await saveXlsx(book) };
-  return addSheets(
-    original,
-    book.sheets.filter(({ name }) => name === sheet),
-  );
+  return addSheets(original, { ...book, sheets: book.sheets.filter(({ name }) => name === sheet) });
 }

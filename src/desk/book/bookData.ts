@@ -1,7 +1,7 @@
 /** A workbook as plain data: what files hold, what the grid opens, what the demo script writes. */
 export interface BookData {
   readonly sheets: readonly SheetData[];
-  readonly names: readonly { readonly name: string; readonly refersTo: string }[];
+  readonly names: readonly BookName[];
   /** Index of the sheet shown first. */
   readonly active: number;
   /** Set where formulas are calculated only when someone asks: their values may be older than the cells they read. */
@@ -9,6 +9,20 @@ export interface BookData {
   /** What add-ins keep in the workbook; their parts and settings travel with the file. */
   readonly customXml?: readonly { readonly id: string; readonly xml: string }[];
   readonly settings?: Readonly<Record<string, unknown>>;
+}
+
+export interface BookName {
+  readonly name: string;
+  readonly refersTo: string;
+  /** The sheet whose own name it is; absent for a name of the workbook. */
+  readonly sheet?: string;
+}
+
+/** Sheets on their way into another workbook, with the names that are their own. */
+export interface CarriedSheets {
+  readonly sheets: readonly SheetData[];
+  /** Names of sheets that are not among them stay behind. */
+  readonly names: BookData["names"];
 }
 
 export interface SheetData {

@@ -1,5 +1,5 @@
 import { absoluteAddress, type Area } from "../workbook/areas.ts";
-import { areaOfName, nameCalled, namesOf, removeName, setName, type BookName } from "../workbook/names.ts";
+import { areaOfName, nameCalled, nameId, namesOf, removeName, setName, type BookName } from "../workbook/names.ts";
 import { tableNamed } from "../workbook/tables.ts";
 import { optionalText, textAt } from "./arguments.ts";
 import { fault } from "./fault.ts";
@@ -40,9 +40,10 @@ const isName = (name: string): boolean =>
 function add(host: Host, { sheet }: Names, args: Arguments): Held {
   const name = textAt(args, 0);
   if (!isName(name)) throw fault("InvalidArgument", name);
-  if (nameCalled(host.book, name) !== null || tableNamed(host.book, name) !== null) throw fault("ItemAlreadyExists");
+  if (nameCalled(host.book, name, sheet) !== null || tableNamed(host.book, name) !== null)
+    throw fault("ItemAlreadyExists");
   const refersTo = referenceOf(host, args[1]);
-  const id = `name-${name.toLowerCase()}`;
+  const id = nameId(name, sheet);
   setName(host.book, { id, name, refersTo, comment: optionalText(args, 2) ?? "", sheet });
   return hold("NamedItem", { id });
 }

@@ -186,7 +186,7 @@ function rename(host: Host, found: PlacedTable, name: string): void {
   const fits = /^[\p{L}_\\][\p{L}\p{N}_.]{0,254}$/u.test(name) && !/^[A-Za-z]{1,3}\d+$/.test(name);
   if (!fits) throw fault("InvalidArgument", name);
   const other = tableNamed(host.book, name);
-  const taken = (other !== null && other.table !== found.table) || nameCalled(host.book, name) !== null;
+  const taken = (other !== null && other.table !== found.table) || nameCalled(host.book, name, null) !== null;
   if (taken) throw fault("ItemAlreadyExists");
   renameTable(host.book, found.table.name, name);
   forgetTable(host.book, found.table.name);

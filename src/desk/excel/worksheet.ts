@@ -4,6 +4,7 @@ import { nameOf, recordOf, sheetIds, worksheetOf } from "../workbook/book.ts";
 import { recalculate } from "../workbook/calculation.ts";
 import { usedWithin } from "../workbook/cells.ts";
 import { carryOut, command } from "../workbook/grid.ts";
+import { removeNamesOfSheet } from "../workbook/names.ts";
 import { flag } from "../workbook/styleTables.ts";
 import { pointsPerPixel, standardHeight } from "../workbook/sizes.ts";
 import { hideSheet, isHidden, removeSheet, renameSheet, showSheet } from "../workbook/sheets.ts";
@@ -146,6 +147,7 @@ function activate(host: Host, sheet: string): void {
 function remove(host: Host, sheet: string): void {
   ensureStructure(host);
   ensureNotLast(host, (one) => !isHidden(host.book, one), present(host, sheet));
+  removeNamesOfSheet(host.book, sheet);
   removeSheet(host.book, sheet);
 }
 

@@ -1,4 +1,4 @@
-import type { BookData, SheetData } from "../book/bookData.ts";
+import type { BookData, CarriedSheets } from "../book/bookData.ts";
 import { carriedParts } from "./carriedParts.ts";
 import { standardFont, usualFontOf } from "./fonts.ts";
 import { mergeStyles } from "./mergeStyles.ts";
@@ -14,15 +14,15 @@ const metadata = "xl/metadata.xml";
 /**
  * The workbook file with sheets added at its end. Nothing else is read and written anew: every other part
  * (sheets, charts, pivot tables, macros) stays as it was, to the byte.
- * @param sheets - their names must not be in use in the workbook.
+ * @param added - what the sheets are called must not be in use in the workbook.
  */
-export async function addSheets(original: Uint8Array, sheets: readonly SheetData[]): Promise<Reading<Uint8Array>> {
+export async function addSheets(original: Uint8Array, added: CarriedSheets): Promise<Reading<Uint8Array>> {
   const because = whyNoXlsx(original);
   if (because !== null) return unreadable(because);
   const parts = unpackOrNull(original);
   if (parts === null) return unreadable("it is damaged, or no Excel workbook (.xlsx)");
   if (parts["xl/workbook.xml"] === undefined) return unreadable("its parts stand in unusual places");
-  return readable(pack(await withSheets(parts, sheets)));
+  return readable(pack(await withSheets(parts, added)));
 }
 
 /** Whatever trips over the container is the file's fault. */
@@ -34,7 +34,7 @@ function unpackOrNull(bytes: Uint8Array): Parts | null {
   }
 }
 
-async function withSheets(parts: Parts, sheets: readonly SheetData[]): Promise<Parts> {
+async function withSheets(parts: Parts, { sheets, names }: CarriedSheets): Promise<Parts> {
   const looks = parts[styles] && textOf(parts[styles]);
   const book: BookData = { sheets, names: [], active: 0 };
   const added = await toParts(book, looks === undefined ? standardFont : usualFontOf(looks));
@@ -45,7 +45,7 @@ async function withSheets(parts: Parts, sheets: readonly SheetData[]): Promise<P
   });
   const own = { ...carried, parts: { ...carried.parts, ...missingParts(parts, added) } };
   const restyled = merged === null ? {} : { [styles]: partOf(merged.part) };
-  return registerSheets({ ...parts, ...own.parts, ...restyled }, sheets, own);
+  return registerSheets({ ...parts, ...own.parts, ...restyled }, { sheets, names }, own);
 }
 
 /** Parts of which a workbook has one, taken over where it has none yet. */

@@ -44,13 +44,16 @@ function withPlainCharts(bytes: Uint8Array): Uint8Array {
   return Object.keys(charts).length === 0 ? bytes : pack(changeParts(unpack(bytes), chartParts, withoutEmptyLines));
 }
 
+/** Names that Excel keeps for itself: what is printed, filtered, or taken for a criterion. */
+const ownToExcel = "_xlnm.";
+
 function toBook(workbook: Workbook): BookData {
   const usual = { theme: workbook.themeColors ?? [], size: workbook.defaultFont?.size ?? standardSize };
   return {
     sheets: workbook.sheets.map((sheet) => toSheet(sheet, usual)),
     names: (workbook.namedRanges ?? [])
-      .filter(({ scope }) => scope === undefined)
-      .map(({ name, range }) => ({ name, refersTo: range })),
+      .filter(({ name }) => !name.startsWith(ownToExcel))
+      .map(({ name, range, scope }) => ({ name, refersTo: range, ...(scope !== undefined && { sheet: scope }) })),
     active: workbook.activeSheet ?? 0,
   };
 }

@@ -1,4 +1,4 @@
-import type { SheetData } from "../book/bookData.ts";
+import type { CarriedSheets, SheetData } from "../book/bookData.ts";
 import type { Carried } from "./carriedParts.ts";
 import { partOf, textOf, type Parts } from "./parts.ts";
 import { appendTo, countOf, escapeXml, insideOf, prefixOf, withPrefix } from "./xmlText.ts";
@@ -10,7 +10,8 @@ const links = "xl/_rels/workbook.xml.rels";
 const officeTypes = "http://schemas.openxmlformats.org/officeDocument/2006/relationships";
 
 /** Tells a workbook of the sheets that were put among its parts. */
-export function registerSheets(parts: Parts, sheets: readonly SheetData[], carried: Carried): Parts {
+export function registerSheets(parts: Parts, added: CarriedSheets, carried: Carried): Parts {
+  const { sheets } = added;
   const ids = carried.sheets.map(
     (_, index) => `footing${countOf(textOf(parts[links]!), "(?:\\w+:)?Relationship") + index + 1}`,
   );
@@ -18,7 +19,7 @@ export function registerSheets(parts: Parts, sheets: readonly SheetData[], carri
     ...parts,
     [contents]: partOf(withTypes(textOf(parts[contents]!), carried)),
     [links]: partOf(withLinks(textOf(parts[links]!), carried, ids)),
-    [workbook]: partOf(withNames(withEntries(textOf(parts[workbook]!), sheets, ids), sheets)),
+    [workbook]: partOf(withNames(withEntries(textOf(parts[workbook]!), sheets, ids), added)),
   };
 }
 
@@ -64,18 +65,26 @@ function withEntries(part: string, sheets: readonly SheetData[], ids: readonly s
   return appended(part, "sheets", entries.join(""));
 }
 
-/** What is to be printed is a name of the workbook that belongs to a sheet, counted over all of them. */
-function withNames(part: string, sheets: readonly SheetData[]): string {
+/** A name that belongs to a sheet goes by the sheet's place among all of them. */
+function withNames(part: string, { sheets, names }: CarriedSheets): string {
   const prefix = prefixOf(part);
   const first = countOf(insideOf(part, `${prefix}sheets`), `${prefix}sheet`) - sheets.length;
-  const names = sheets.flatMap(({ name, printArea }, index) => {
-    if (printArea === null) return [];
-    const area = `'${name.replaceAll("'", "''")}'!${printArea.replace(/\$?([A-Z]+)\$?(\d+)/g, "$$$1$$$2")}`;
-    return [`<definedName name="_xlnm.Print_Area" localSheetId="${first + index}">${escapeXml(area)}</definedName>`];
-  });
-  if (names.length === 0) return part;
-  const children = withPrefix(names.join(""), prefix);
+  const entries = sheets.flatMap((sheet, index) =>
+    [...printed(sheet), ...names.filter((name) => name.sheet === sheet.name)].map(
+      ({ name, refersTo }) =>
+        `<definedName name="${escapeXml(name)}" localSheetId="${first + index}">${escapeXml(refersTo)}</definedName>`,
+    ),
+  );
+  if (entries.length === 0) return part;
+  const children = withPrefix(entries.join(""), prefix);
   return appendTo(part, `${prefix}definedNames`, children) ?? afterSheets(part, prefix, children);
+}
+
+/** What is to be printed is such a name too. */
+function printed({ name, printArea }: SheetData): CarriedSheets["names"] {
+  if (printArea === null) return [];
+  const area = printArea.replace(/\$?([A-Z]+)\$?(\d+)/g, "$$$1$$$2");
+  return [{ name: "_xlnm.Print_Area", refersTo: `'${name.replaceAll("'", "''")}'!${area}` }];
 }
 
 /** A workbook without names: their list follows that of the sheets, of function groups and of outside links. */

@@ -14,7 +14,7 @@ export interface BookName {
 }
 
 /** What the grid writes for a name that belongs to the whole workbook. */
-const wholeWorkbook = "AllDefaultWorkbook";
+export const wholeWorkbook = "AllDefaultWorkbook";
 
 export function namesOf(book: Book): readonly BookName[] {
   const map = book.grid.injector.get(IDefinedNamesService).getDefinedNameMap(book.unit) ?? {};
@@ -27,8 +27,12 @@ export function namesOf(book: Book): readonly BookName[] {
   }));
 }
 
-export const nameCalled = (book: Book, name: string): BookName | null =>
-  namesOf(book).find((known) => known.name.toLowerCase() === name.toLowerCase()) ?? null;
+/** Names are held equal without regard to case; each sheet has its own beside those of the workbook. */
+export const nameCalled = (book: Book, name: string, sheet: string | null): BookName | null =>
+  namesOf(book).find((known) => known.sheet === sheet && known.name.toLowerCase() === name.toLowerCase()) ?? null;
+
+export const nameId = (name: string, sheet: string | null): string =>
+  sheet === null ? `name-${name.toLowerCase()}` : `name-${sheet}-${name.toLowerCase()}`;
 
 export function setName(book: Book, { id, name, refersTo, comment, sheet }: BookName): void {
   const localSheetId = sheet ?? wholeWorkbook;
@@ -40,6 +44,11 @@ export function setName(book: Book, { id, name, refersTo, comment, sheet }: Book
     comment,
     localSheetId,
   });
+}
+
+/** Whoever goes takes its own names along. */
+export function removeNamesOfSheet(book: Book, sheet: string): void {
+  for (const name of namesOf(book)) if (name.sheet === sheet) removeName(book, name);
 }
 
 export function removeName(book: Book, { id, name, refersTo, comment }: BookName): void {

@@ -5,6 +5,7 @@ import type { Book } from "./book.ts";
 import { recalculate } from "./calculation.ts";
 import { toChartRecord } from "./charts.ts";
 import type { Grid } from "./grid.ts";
+import { nameId, wholeWorkbook } from "./names.ts";
 import { emptySheetRecord, type SheetRecord } from "./records.ts";
 import { seedSpills, unsavedFormulas } from "./savedResults.ts";
 import { registerTable } from "./tables.ts";
@@ -27,7 +28,7 @@ export function openBook(grid: Grid, data: BookData): Book {
     listeners: new Set(),
   };
   // Told before the formula engine reads a formula: told later, they would count as changes.
-  registerNames(book, data);
+  registerNames(book, data, ids);
   data.sheets.forEach((sheet, index) => registerTables(book, sheet, ids[index]!));
   const workbook = grid.api.createWorkbook(toGrid(book.unit, data, ids));
   data.sheets.forEach((sheet, index) => seedSpills(book, sheet, ids[index]!));
@@ -44,11 +45,18 @@ export function calculateUnsaved(book: Book, data: BookData): void {
   if (unsaved.length > 0) recalculate(book, unsaved);
 }
 
-function registerNames(book: Book, data: BookData): void {
+/** The grid gives a name the meaning that it learnt last: a name of the workbook, where a sheet has one called the same. */
+function registerNames(book: Book, data: BookData, ids: readonly string[]): void {
   const names = book.grid.injector.get(IDefinedNamesService);
-  for (const { name, refersTo } of data.names) {
-    const id = `name-${name.toLowerCase()}`;
-    names.registerDefinedName(book.unit, { id, name, formulaOrRefString: refersTo.replace(/^=/, "") });
+  const ofSheetsFirst = data.names.toSorted((one, other) => Number(!one.sheet) - Number(!other.sheet));
+  for (const { name, refersTo, sheet } of ofSheetsFirst) {
+    const owner = ids[data.sheets.findIndex((one) => one.name === sheet)] ?? null;
+    names.registerDefinedName(book.unit, {
+      id: nameId(name, owner),
+      name,
+      formulaOrRefString: refersTo.replace(/^=/, ""),
+      localSheetId: owner ?? wholeWorkbook,
+    });
   }
 }
 

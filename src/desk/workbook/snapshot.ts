@@ -26,7 +26,11 @@ export function snapshotOf(book: Book): BookData {
   const ids = sheetIds(book);
   return {
     sheets: ids.map((sheet) => sheetData(book, sheet)),
-    names: namesOf(book).map(({ name, refersTo }) => ({ name, refersTo })),
+    names: namesOf(book).map(({ name, refersTo, sheet }) => ({
+      name,
+      refersTo,
+      ...(sheet === null ? {} : { sheet: nameOf(book, sheet) }),
+    })),
     active: Math.max(0, ids.indexOf(activeSheet(book))),
     ...(book.customXml.length === 0 ? {} : { customXml: book.customXml.map((part) => ({ ...part })) }),
     ...(book.manualCalculation ? { manualCalculation: true as const } : {}),

@@ -137,6 +137,33 @@ describe("names", () => {
     expect(await codeOf(inBatch((context) => context.workbook.names.add("OUTCOME", "=1")))).toBe("ItemAlreadyExists");
   });
 
+  it("belong to a sheet too, which may call its own as another calls one, and go with it", async () => {
+    await inBatch(({ workbook }) => {
+      const { worksheets } = workbook;
+      worksheets.add("Passing");
+      for (const name of ["Passing", "Plain"]) {
+        const sheet = worksheets.getItem(name);
+        sheet.names.add("Heading", sheet.getRange("A1"));
+      }
+      workbook.names.add("Heading", worksheets.getItem("Data").getRange("A1"));
+    })();
+    const again = inBatch(({ workbook }) => workbook.worksheets.getItem("Plain").names.add("heading", "=1"));
+    expect(await codeOf(again)).toBe("ItemAlreadyExists");
+    const kept = () => desk.snapshot().names.filter(({ name }) => name === "Heading");
+    expect(kept()).toEqual([
+      { name: "Heading", refersTo: "Passing!$A$1", sheet: "Passing" },
+      { name: "Heading", refersTo: "Plain!$A$1", sheet: "Plain" },
+      { name: "Heading", refersTo: "Data!$A$1" },
+    ]);
+    await inBatch(({ workbook }) => workbook.worksheets.getItem("Passing").delete())();
+    expect(kept().map(({ sheet }) => sheet)).toEqual(["Plain", undefined]);
+    await inBatch(({ workbook }) => {
+      workbook.names.getItem("Heading").delete();
+      workbook.worksheets.getItem("Plain").names.getItem("Heading").delete();
+    })();
+    expect(kept()).toEqual([]);
+  });
+
   it("are deleted", async () => {
     await inBatch((context) => context.workbook.names.getItem("Counts").delete())();
     expect(desk.snapshot().names.map(({ name }) => name)).toEqual(["Outcome"]);

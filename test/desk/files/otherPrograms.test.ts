@@ -1,7 +1,7 @@
 import { readFile } from "node:fs/promises";
 import { describe, expect, it } from "vitest";
 import { blankSheet } from "../../../src/desk/book/blankSheet.ts";
-import type { BookData, SheetData } from "../../../src/desk/book/bookData.ts";
+import type { BookData, CarriedSheets, SheetData } from "../../../src/desk/book/bookData.ts";
 import { addSheets } from "../../../src/desk/files/addSheets.ts";
 import { openXlsx } from "../../../src/desk/files/openXlsx.ts";
 import { textOf, unpack, type Parts } from "../../../src/desk/files/parts.ts";
@@ -16,8 +16,11 @@ async function open(bytes: Uint8Array): Promise<BookData> {
   return reading.value;
 }
 
-async function withAdded(original: Uint8Array, ...sheets: readonly SheetData[]): Promise<Uint8Array> {
-  const reading = await addSheets(original, sheets);
+const withAdded = (original: Uint8Array, ...sheets: readonly SheetData[]): Promise<Uint8Array> =>
+  withCarried(original, { sheets, names: [] });
+
+async function withCarried(original: Uint8Array, added: CarriedSheets): Promise<Uint8Array> {
+  const reading = await addSheets(original, added);
   if (!reading.ok) throw new Error(reading.because);
   return reading.value;
 }
@@ -112,6 +115,16 @@ describe("sheets added to a workbook file", () => {
     expect(workbook).toContain(area);
   });
 
+  it("bring the names that are their own, and no others", async () => {
+    const names = [
+      { name: "Section_1", refersTo: "'Tubes answer'!$A$1", sheet: "Tubes answer" },
+      { name: "Section_1", refersTo: "Months!$A$1", sheet: "Months" },
+      { name: "Footing_data_1", refersTo: "Months!$A$1:$B$9" },
+    ];
+    const after = await open(await withCarried(stock, { sheets: [blankSheet("Notes of ours", []), answer], names }));
+    expect(after.names).toEqual([...(await open(stock)).names, names[0]]);
+  });
+
   it("go into a workbook whose parts carry a namespace prefix", async () => {
     const plain = await saveXlsx({ sheets: [blankSheet("Data", [[1, "a"]])], names: [], active: 0 });
     const prefixed = await withAdded(await withPrefixes(plain), answer);
@@ -121,7 +134,9 @@ describe("sheets added to a workbook file", () => {
   });
 
   it("are refused for a file that is no workbook", async () => {
-    expect(await addSheets(new TextEncoder().encode("a,b"), [answer])).toMatchObject({ ok: false });
+    expect(await addSheets(new TextEncoder().encode("a,b"), { sheets: [answer], names: [] })).toMatchObject({
+      ok: false,
+    });
   });
 });
 

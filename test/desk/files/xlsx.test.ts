@@ -100,7 +100,10 @@ describe("a workbook saved and opened again", () => {
   it("keeps names, the sheet in front, hidden sheets and what add-ins store", async () => {
     const book: BookData = {
       sheets: [{ ...blankSheet("Hidden", [[1]]), hidden: true }, blankSheet("Shown", [[2]])],
-      names: [{ name: "Tubes", refersTo: "Shown!$A$1:$A$9" }],
+      names: [
+        { name: "Tubes", refersTo: "Shown!$A$1:$A$9" },
+        { name: "Tubes", refersTo: "Hidden!$A$1", sheet: "Hidden" },
+      ],
       active: 1,
       customXml: [
         { id: "{11111111-2222-3333-4444-555555555555}", xml: '<model xmlns="urn:footing:model">a &amp; b</model>' },

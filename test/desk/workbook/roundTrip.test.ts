@@ -59,15 +59,24 @@ const book: BookData = {
     ),
     sheetOf("Other", [], { hidden: true }),
   ),
-  names: [{ name: "Outcome", refersTo: "'Repairs answer'!$A$2:$A$3" }],
+  names: [
+    { name: "Outcome", refersTo: "'Repairs answer'!$A$2:$A$3" },
+    { name: "Part", refersTo: "'Repairs answer'!$A$2", sheet: "Repairs answer" },
+    { name: "Part", refersTo: "Other!$B$2", sheet: "Other" },
+  ],
   customXml: [{ id: "{1}", xml: "<model/>" }],
   settings: { level: 0.05 },
 };
 
+const byPlace = (one: { readonly sheet?: string }, other: { readonly sheet?: string }): number =>
+  sheetOrder.indexOf(one.sheet) - sheetOrder.indexOf(other.sheet);
+const sheetOrder = [undefined, "Repairs answer", "Other"];
+
 it("gives back what it opened", async () => {
   const desk = await testDesk({ book });
   await desk.settle();
-  expect(desk.snapshot()).toEqual(book);
+  const { names, ...rest } = desk.snapshot();
+  expect({ ...rest, names: names.toSorted(byPlace) }).toEqual(book);
   desk.close();
 });
 
@@ -78,6 +87,12 @@ it("moves tables, links and names with their rows", async () => {
   const [sheet] = desk.snapshot().sheets;
   expect(sheet?.tables).toEqual([{ name: "Data", address: "A4:B5" }]);
   expect(sheet?.links).toEqual([{ cell: "B4", target: "Other!A1" }]);
+  expect(
+    desk
+      .snapshot()
+      .names.toSorted(byPlace)
+      .map(({ refersTo }) => refersTo),
+  ).toEqual(["'Repairs answer'!$A$4:$A$5", "'Repairs answer'!$A$4", "Other!$B$2"]);
   desk.book.grid.api.getActiveWorkbook()?.getActiveSheet().deleteRows(0, 4);
   await desk.settle();
   expect(desk.snapshot().sheets[0]?.tables).toEqual([{ name: "Data", address: "A1:B1" }]);
