@@ -2,7 +2,15 @@ import { describe, expect, it } from "vitest";
 import { reviewClaim } from "../../src/core/review/reviewClaim.ts";
 import { hypotheses } from "../../src/core/review/engine/change.ts";
 import { type PlantedBook, pairs, singles, soundBooks } from "./books.ts";
-import { type FormulaBook, bookOf, formulaFaults, formulaPairs, soundFormulas } from "./formulas/books.ts";
+import {
+  type FormulaBook,
+  bookOf,
+  formulaFaults,
+  formulaPairs,
+  positionFaults,
+  soundFormulas,
+  soundPositions,
+} from "./formulas/books.ts";
 import { judgeFormulas } from "./formulas/judge.ts";
 import { judge, judgeBook } from "./judge.ts";
 import { reviewBook, reviewTogether } from "./wholeBook.ts";
@@ -67,6 +75,11 @@ describe("faults planted where formulas report", () => {
 
   it("are each found", async () => {
     expect(await wrongAmong(formulaFaults())).toEqual([]);
+  });
+
+  it("are found where formulas name no drivers, and not where there are none", async () => {
+    const some = [...positionFaults().filter((_, index) => index % 9 === 1), ...soundPositions()];
+    expect(await wrongAmong(some)).toEqual([]);
   });
 
   it("are both found in nine of ten pairs", async () => {

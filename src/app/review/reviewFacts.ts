@@ -1,4 +1,5 @@
 import type { Claim, ClaimedLine } from "../../core/review/claim.ts";
+import { standsInCells } from "../../core/review/forms.ts";
 import type { Column } from "../../core/table/source.ts";
 import type { ReviewFacts } from "../../sheet/review/madeSections.ts";
 import { fingerprint } from "../fingerprint.ts";
@@ -11,7 +12,7 @@ export async function reviewFactsOf(claims: readonly Claim[], { today, version }
 
 /** The fingerprint of the cells as the regression took them: the same as that of an answer about the same cells. */
 export const fingerprintOfClaim = ({ outcome, drivers }: Claim): Promise<string> =>
-  fingerprint([outcome, ...drivers].map(columnOf));
+  fingerprint([outcome, ...drivers.filter(standsInCells)].map(columnOf));
 
 function columnOf({ name, sheet, track, first, from, count, cells }: ClaimedLine): Column {
   const [start, end] = [from - first, from - first + count];

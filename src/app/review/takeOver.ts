@@ -61,12 +61,13 @@ function reachOf({ cells, first, from, count }: ClaimedLine): { readonly first: 
   return { first: top, last: bottom };
 }
 
-/** The transforms that the pane has for what a regression is made of; a cube is left to the user. */
+/** The transforms that the pane has for what a regression is made of; a cube, and positions, are left to the user. */
 const transforms: Readonly<Record<ClaimedForm, ColumnSetup["transform"]>> = {
   "as it is": { kind: "none" },
   logarithm: { kind: "logarithm" },
   square: { kind: "square" },
   cube: { kind: "none" },
+  position: { kind: "none" },
 };
 
 function setupFor({ outcome, drivers, constant }: Claim, { columns, source }: DataInHand): Setup {
@@ -81,10 +82,13 @@ function setupFor({ outcome, drivers, constant }: Claim, { columns, source }: Da
   return { ...proposed, columns: claimed, constant };
 }
 
-/** What the pane's set-up has no words for: a column that enters twice, and a cube. */
+/** What the pane's set-up has no words for: a column that enters twice, a cube, and positions. */
 const leftToTheUser = ({ drivers }: Claim): readonly string[] =>
   drivers
-    .filter(({ form, track }, index) => form === "cube" || drivers.findIndex((line) => line.track === track) < index)
+    .filter(
+      ({ form, track }, index) =>
+        form === "cube" || form === "position" || drivers.findIndex((line) => line.track === track) < index,
+    )
     .map((line) => `The regression also has ${lineInWords(line)}, which was not taken over: add a column with it.`);
 
 const roled = (entry: ColumnSetup, role: ColumnSetup["role"], { form }: ClaimedLine): ColumnSetup => ({

@@ -1,7 +1,10 @@
 import type { CellColumn } from "../table/cells.ts";
 
-/** What a driver or the outcome is made of before it enters the regression. */
-export type ClaimedForm = "as it is" | "logarithm" | "square" | "cube";
+/**
+ * What a driver or the outcome is made of before it enters the regression. A position is no cell's: the drivers are
+ * 1, 2, 3 and so on along the outcome where a formula names none.
+ */
+export type ClaimedForm = "as it is" | "logarithm" | "square" | "cube" | "position";
 
 /**
  * One line of cells that a regression uses, with what stands before and after it in the sheet, so that rows left off

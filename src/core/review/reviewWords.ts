@@ -12,11 +12,15 @@ export const reviewLimits =
 export const titleOf = ({ outcome, drivers }: Claim): string =>
   `${lineInWords(outcome)} explained by ${listInWords(drivers.map(lineInWords))}`;
 
+/** What a driver is called that counts 1, 2, 3 and so on along the outcome. */
+export const positionName = "Position in the range";
+
 const forms: Readonly<Record<ClaimedForm, string>> = {
   "as it is": "",
   logarithm: "the logarithm of ",
   square: "the square of ",
   cube: "the cube of ",
+  position: "",
 };
 
 /** "Price index", "the logarithm of Advertising" */

@@ -44,6 +44,23 @@ export function everyFormulaFault(): FormulaBook[] {
   );
 }
 
+/** What can go wrong where formulas name no drivers, each in every form and data set. */
+export function positionFaults(): FormulaBook[] {
+  return faults.flatMap(({ ofPositions = [], ...fault }, index) =>
+    dataSets.flatMap((set) =>
+      ofPositions.map((form, turn) =>
+        made(`T${index + 1}_${set.id.replaceAll("-", "")}_${turn}`, { set, form, together: [fault] }),
+      ),
+    ),
+  );
+}
+
+/** Formulas that name no drivers, without fault: figures that rest on no standard errors. */
+export const soundPositions = (): FormulaBook[] =>
+  dataSets.map((set, index) =>
+    made(`U${index + 1}`, { set, form: "trend of positions", together: [{ name: "no fault" }] }),
+  );
+
 /** Faults of different sorts that happen together, in one form and data set each. */
 export function formulaPairs(): FormulaBook[] {
   const sorts = [rangeFaults, readingFaults, sheetFaults];

@@ -15,8 +15,8 @@ export interface Calculated {
 
 export interface Calculation {
   readonly ranges: Ranges;
-  /** Columns of the sheet. */
-  readonly drivers: readonly number[];
+  /** Columns of the sheet, or 1, 2, 3 and so on. */
+  readonly drivers: readonly number[] | "positions";
   readonly constant: boolean;
   /** What becomes of rows in which not every cell is a number: LINEST ends in an error, SLOPE passes them over. */
   readonly otherCells: "error" | "passed over";
@@ -31,11 +31,13 @@ export function calculated(
   if (outcome.to - outcome.from !== beside.to - beside.from) return null;
   const all = Array.from({ length: outcome.to - outcome.from }, (_, index) => [
     numberIn(sheet.rows[outcome.from + index]?.[1]),
-    ...drivers.map((column) => numberIn(sheet.rows[beside.from + index]?.[column])),
+    ...(drivers === "positions"
+      ? [index + 1]
+      : drivers.map((column) => numberIn(sheet.rows[beside.from + index]?.[column]))),
   ]);
   const rows = all.filter((row): row is number[] => row.every((one) => one !== null));
   if (rows.length < all.length && otherCells === "error") return null;
-  const columns = drivers.map((_, j) => rows.map((row) => row[j + 1]!));
+  const columns = (rows[0] ?? []).slice(1).map((_, j) => rows.map((row) => row[j + 1]!));
   const fit = fitOf(
     designOf(
       rows.map(([y]) => y!),

@@ -1,5 +1,5 @@
 import type { BookCell } from "../../../src/desk/book/bookData.ts";
-import { type Form, linestForms } from "./forms.ts";
+import { type Form, linestForms, positionForms } from "./forms.ts";
 import { type Ranges, type Worksheet, changed, numberIn } from "./worksheet.ts";
 
 /** What a review must say: the short name of a finding, or why a formula could not be read. */
@@ -12,6 +12,8 @@ export interface FormulaFault {
   /** All where it does not say. */
   readonly forms?: readonly Form[];
   readonly severalDrivers?: true;
+  /** Where formulas name no drivers; none where it does not say. */
+  readonly ofPositions?: readonly Form[];
   /** No number is left that formulas report, so that no second fault can show beside it. */
   readonly alone?: true;
   /** Data sets that it can be planted in; all where it does not say. */
@@ -56,15 +58,22 @@ const linest: readonly Form[] = linestForms;
 export const rangeFaults: readonly FormulaFault[] = [
   {
     name: "the range stops before the data do",
+    ofPositions: positionForms,
     said: finding("range-stops-early"),
     ranges: ({ outcome: { from, to } }) => both({ from, to: to - 4 }),
   },
   {
     name: "the range begins after the data do",
+    ofPositions: positionForms,
     said: finding("range-stops-early"),
     ranges: ({ outcome: { from, to } }) => both({ from: from + 2, to }),
   },
-  { name: "a total inside the range", said: finding("total-row-in-range"), sheet: withTotal },
+  {
+    name: "a total inside the range",
+    ofPositions: positionForms,
+    said: finding("total-row-in-range"),
+    sheet: withTotal,
+  },
   {
     name: "a heading inside the range",
     said: finding("heading-inside"),
@@ -99,7 +108,13 @@ export const rangeFaults: readonly FormulaFault[] = [
 
 /** The formulas give something else than the report says. */
 export const readingFaults: readonly FormulaFault[] = [
-  { name: "no constant", said: finding("no-constant"), forms: [...linest, "trend"], constant: false },
+  {
+    name: "no constant",
+    ofPositions: positionForms,
+    said: finding("no-constant"),
+    forms: [...linest, "trend"],
+    constant: false,
+  },
   {
     name: "LINEST read from the first driver to the last",
     said: finding("named-otherwise"),
@@ -144,6 +159,7 @@ export const readingFaults: readonly FormulaFault[] = [
   },
   {
     name: "results older than the data",
+    ofPositions: ["array of positions", "table of positions"],
     said: finding("older-results"),
     forms: [...linest, "one driver"],
     since: (sheet) => changed(sheet, 1, [middle(sheet, 1), (cell) => (numberIn(cell) ?? 0) * 1.5 + 1]),
@@ -160,6 +176,7 @@ export const sheetFaults: readonly FormulaFault[] = [
   },
   {
     name: "hidden rows counted in",
+    ofPositions: positionForms,
     said: finding("hidden-rows"),
     sheet: (sheet) => ({ ...sheet, more: { hiddenRows: middle(sheet, 3).map((row) => row + 1) } }),
   },
@@ -168,7 +185,12 @@ export const sheetFaults: readonly FormulaFault[] = [
     said: finding("hidden-line"),
     sheet: (sheet) => ({ ...sheet, more: { hiddenColumns: [2] } }),
   },
-  { name: "a hidden sheet", said: finding("hidden-sheet"), sheet: (sheet) => ({ ...sheet, more: { hidden: true } }) },
+  {
+    name: "a hidden sheet",
+    ofPositions: positionForms,
+    said: finding("hidden-sheet"),
+    sheet: (sheet) => ({ ...sheet, more: { hidden: true } }),
+  },
   {
     name: "words among the data",
     said: finding("text-in-range"),
@@ -196,6 +218,7 @@ export const sheetFaults: readonly FormulaFault[] = [
   },
   {
     name: "a block of rows pasted twice",
+    ofPositions: positionForms,
     said: finding("repeated"),
     sheet: (sheet) => ({ ...sheet, rows: [...sheet.rows, ...sheet.rows.slice(2, 9)] }),
   },

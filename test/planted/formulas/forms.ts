@@ -1,10 +1,12 @@
 import type { BookCell, BookValue } from "../../../src/desk/book/bookData.ts";
-import { type Calculated, calculated } from "./calculated.ts";
+import { type Calculated, type Calculation, calculated } from "./calculated.ts";
 import { type Ranges, type Worksheet, rangeOf } from "./worksheet.ts";
 
 /** How formulas report a regression. */
 export const forms = ["array", "spilled", "index", "let", "one driver", "trend"] as const;
-export type Form = (typeof forms)[number];
+/** Formulas that name no drivers: 1, 2, 3 and so on take their place. */
+export const positionForms = ["array of positions", "table of positions", "trend of positions"] as const;
+export type Form = (typeof forms)[number] | (typeof positionForms)[number];
 
 /** The forms that take several drivers and end in an error where a cell is no number. */
 export const linestForms = ["array", "spilled", "index", "let"] as const satisfies readonly Form[];
@@ -19,6 +21,8 @@ export interface Reporting {
   readonly slip: number;
   /** The driver that each place in the report is said to be about. */
   readonly labels: readonly string[];
+  /** Whether the formulas name no drivers. */
+  readonly byPosition?: true;
 }
 
 type Rows = BookCell[][];
@@ -30,15 +34,35 @@ export const reportRows: Readonly<Record<Form, (reporting: Reporting) => Rows>> 
   let: (reporting) => table(reporting, (linest, row, column) => `LET(fit,${linest},INDEX(fit,${row},${column}))`),
   "one driver": oneDriver,
   trend,
+  "array of positions": (reporting) => block(byPosition(reporting), "array"),
+  "table of positions": (reporting) => reportRows.index(byPosition(reporting)),
+  "trend of positions": (reporting) => trend(byPosition(reporting)),
 };
 
-const driverColumns = ({ driverCount }: Worksheet): number[] => Array.from({ length: driverCount }, (_, j) => j + 2);
+/** One driver, which is nobody's column. */
+const byPosition = (reporting: Reporting): Reporting => ({
+  ...reporting,
+  sheet: { ...reporting.sheet, driverCount: 1 },
+  labels: ["Place"],
+  byPosition: true,
+});
 
-const linestOf = ({ sheet, name, ranges, constant }: Reporting): string =>
-  `LINEST(${rangeOf(name, ranges.outcome, { from: 1, to: 2 })},${rangeOf(name, ranges.drivers, { from: 2, to: 2 + sheet.driverCount })},${constant ? "TRUE" : "FALSE"},TRUE)`;
+const driversOf = ({ sheet, byPosition: none }: Reporting): Calculation["drivers"] =>
+  none === true ? "positions" : Array.from({ length: sheet.driverCount }, (_, j) => j + 2);
 
-const linestResult = ({ sheet, ranges, constant }: Reporting): Calculated | null =>
-  calculated(sheet, { ranges, drivers: driverColumns(sheet), constant, otherCells: "error" });
+/** The outcome's range and the drivers', as a formula has them. */
+function dataOf({ sheet, name, ranges, byPosition: none }: Reporting): string {
+  const outcome = rangeOf(name, ranges.outcome, { from: 1, to: 2 });
+  return none === true
+    ? `${outcome},`
+    : `${outcome},${rangeOf(name, ranges.drivers, { from: 2, to: 2 + sheet.driverCount })}`;
+}
+
+const linestOf = (reporting: Reporting): string =>
+  `LINEST(${dataOf(reporting)},${reporting.constant ? "TRUE" : "FALSE"},TRUE)`;
+
+const linestResult = (reporting: Reporting): Calculated | null =>
+  calculated(reporting.sheet, { ...reporting, drivers: driversOf(reporting), otherCells: "error" });
 
 const unequal = ({ outcome, drivers }: Ranges): boolean => outcome.to - outcome.from !== drivers.to - drivers.from;
 
@@ -165,10 +189,10 @@ const movedBy = ({ outcome, drivers }: Ranges, by: number): Ranges => ({
 
 /** The fitted values, spilled down a column. */
 function trend(reporting: Reporting): Rows {
-  const { sheet, name, ranges, constant } = reporting;
+  const { ranges, constant } = reporting;
   const found = linestResult(reporting);
   const fitted = found?.rows.map(([y], index): BookValue => y! - found.fit.residuals[index]!) ?? [linestError(ranges)];
-  const data = `${rangeOf(name, ranges.outcome, { from: 1, to: 2 })},${rangeOf(name, ranges.drivers, { from: 2, to: 2 + sheet.driverCount })}`;
+  const data = dataOf(reporting);
   const formula = constant ? `=TREND(${data})` : `=TREND(${data},,FALSE)`;
   const first: BookCell =
     fitted.length > 1

@@ -3,6 +3,7 @@ import { sheetNamed } from "../cellsOfBook.ts";
 import type { BookReview } from "../claimReview.ts";
 import type { Claim, ClaimedLine } from "../claim.ts";
 import type { Finding } from "../finding.ts";
+import { standsInCells } from "../forms.ts";
 import type { Stretch } from "../found/claimedLines.ts";
 import type { Gathered } from "../found/gatherClaims.ts";
 import { saysUnequal } from "../formula/whyUnread.ts";
@@ -50,8 +51,9 @@ function unequalRanges(unread: Ground["unread"]): Finding[] {
 }
 
 function ofClaim(claim: Claim, book: Book): Finding[] {
-  const [outcome, ...drivers] = [claim.outcome, ...claim.drivers].flatMap((line) => checked(line, book));
-  if (outcome === undefined || drivers.length < claim.drivers.length) return [];
+  const inCells = claim.drivers.filter(standsInCells);
+  const [outcome, ...drivers] = [claim.outcome, ...inCells].flatMap((line) => checked(line, book));
+  if (outcome === undefined || drivers.length < inCells.length) return [];
   const lines = [outcome, ...drivers];
   const named = ({ line, stretch }: CheckedLine) => ({ name: line.name, stretch });
   return [

@@ -2,10 +2,12 @@ import { plainHeading } from "../../table/headingRow.ts";
 import { type CellPlace, addressAt, isCalculatedAt, isTextAt, numberAt, wordsAt } from "../cellsOfBook.ts";
 import type { Quantity } from "../claim.ts";
 import type { Finding, Rank } from "../finding.ts";
+import { standsInCells } from "../forms.ts";
 import { headingOf } from "../found/claimedLines.ts";
 import type { FormulaCell } from "../found/formulaCells.ts";
 import type { Gathered } from "../found/gatherClaims.ts";
 import { quantityInWords } from "../quantityWords.ts";
+import { positionName } from "../reviewWords.ts";
 import { isConstantName, summaryWordIn, termWordIn } from "../typed/reportWords.ts";
 import { craftFinding } from "./craftFinding.ts";
 import { found } from "./craftWords.ts";
@@ -15,7 +17,9 @@ import { found } from "./craftWords.ts";
  * its coefficients from the last driver to the first.
  */
 export function namedOtherwise(group: Gathered): Finding[] {
-  const drivers = group.aligned.slice(1).map((line) => headingOf(line) ?? "");
+  const drivers = group.aligned
+    .slice(1)
+    .map((line, index) => (standsInCells(group.regression.drivers[index]!) ? (headingOf(line) ?? "") : positionName));
   return group.cells.flatMap((cell) => {
     if (cell.measure.quantity.kind === "prediction") return [];
     const labels = labelsOf(cell.place);

@@ -1,7 +1,8 @@
 import { leastSquares } from "../../numeric/leastSquares.ts";
 import { cellKind } from "../../table/cells.ts";
-import type { Claim, ClaimedForm, ClaimedLine, ReportedNumber } from "../claim.ts";
+import type { Claim, ClaimedLine, ReportedNumber } from "../claim.ts";
 import type { Finding } from "../finding.ts";
+import { formOf } from "../forms.ts";
 import { recomputedInWords } from "../shownDigits.ts";
 import { craftFinding } from "./craftFinding.ts";
 import { found } from "./craftWords.ts";
@@ -38,13 +39,6 @@ const termOf = ({ quantity }: ReportedNumber): number | null => ("term" in quant
 
 const agrees = ({ value, halfUnit }: ReportedNumber, recomputed: number): boolean =>
   Math.abs(value - recomputed) <= Math.max(1.0001 * halfUnit, lostDigits * Math.abs(recomputed));
-
-const formOf: Readonly<Record<ClaimedForm, (value: number) => number>> = {
-  "as it is": (value) => value,
-  logarithm: Math.log,
-  square: (value) => value ** 2,
-  cube: (value) => value ** 3,
-};
 
 /** Of the drivers in their order, then the constant; null where not every cell is a number that can enter. */
 function coefficientsNow({ outcome, drivers, constant }: Claim): Float64Array | null {

@@ -1,5 +1,6 @@
 import { listInWords } from "../../answer/wording.ts";
 import { addressOf } from "../../table/address.ts";
+import { standsInCells } from "../forms.ts";
 import type { Change, Facts, LineHypothesis } from "./change.ts";
 import { type Frame, positionOf } from "./frame.ts";
 import type { Run } from "./recipe.ts";
@@ -23,7 +24,7 @@ export function saidOf(changes: readonly Change[], frame: Frame): Said {
 
 /** The claimed cells of a run of rows, line by line; lines side by side are one range. */
 export function cellsOfRun(frame: Frame, { from, to }: Run): string[] {
-  const claimed = frame.lines.slice(0, frame.driverCount + 1);
+  const claimed = frame.lines.slice(0, frame.driverCount + 1).filter(({ line }) => standsInCells(line));
   const spans = claimed
     .map((line) => ({ line: line.line, start: positionOf(line, from, frame) }))
     .toSorted((a, b) => a.line.track - b.line.track);

@@ -1,4 +1,5 @@
 import { sense } from "../../table/senses.ts";
+import { standsInCells } from "../forms.ts";
 import type { Change, Facts } from "./change.ts";
 import type { Frame } from "./frame.ts";
 import { type LineRecipe, type Recipe, withLines } from "./recipe.ts";
@@ -9,7 +10,8 @@ const farthestInPairs = 2;
 
 /** The changes of what is made of a line's cells: how they are read, shifted, transformed, ordered. */
 export function lineChanges(frame: Frame): Change[] {
-  const claimed = Array.from({ length: frame.driverCount + 1 }, (_, line) => line);
+  const every = Array.from({ length: frame.driverCount + 1 }, (_, line) => line);
+  const claimed = every.filter((line) => standsInCells(frame.lines[line]!.line));
   const sets = setsOf(claimed);
   return [
     ...readings(frame, sets),

@@ -1,4 +1,5 @@
 import { sense } from "../../table/senses.ts";
+import { formOf } from "../forms.ts";
 import type { Frame, FrameLine } from "./frame.ts";
 import type { LineRecipe, Run } from "./recipe.ts";
 
@@ -48,19 +49,16 @@ function shifted(line: LineValues, { shift, beyond }: LineRecipe, { from, to }: 
 }
 
 const forms: Readonly<Record<LineRecipe["form"], (value: number) => number>> = {
-  "as it is": (value) => value,
-  logarithm: Math.log,
+  ...formOf,
   "base-10 logarithm": Math.log10,
-  square: (value) => value ** 2,
-  cube: (value) => value ** 3,
 };
 
 /** A value without a form, as zero has no logarithm, is missing. */
 function transform({ values, present }: LineValues, form: LineRecipe["form"]): void {
   if (form === "as it is") return;
-  const formOf = forms[form];
+  const made = forms[form];
   for (let row = 0; row < values.length; row++) {
-    const value = formOf(values[row]!);
+    const value = made(values[row]!);
     if (!Number.isFinite(value)) present[row] = 0;
     values[row] = Number.isFinite(value) ? value : 0;
   }

@@ -1,4 +1,5 @@
 import type { Claim, Quantity } from "../claim.ts";
+import { standsInCells } from "../forms.ts";
 import type { Change, Facts } from "./change.ts";
 import type { Frame } from "./frame.ts";
 import type { ModelRecipe } from "./recipe.ts";
@@ -7,21 +8,22 @@ import type { ModelRecipe } from "./recipe.ts";
 export function modelChanges(frame: Frame, claim: Claim): Change[] {
   const { driverCount, lines } = frame;
   const drivers = Array.from({ length: driverCount }, (_, j) => j + 1);
+  const inCells = [0, ...drivers].filter((line) => standsInCells(lines[line]!.line));
   const helpers = Array.from({ length: lines.length - driverCount - 1 }, (_, j) => driverCount + 1 + j);
   return [
     modelChange({ hypothesis: claim.constant ? "no-constant" : "with-constant" }, (model) => ({
       constant: !model.constant,
     })),
     ...orders(drivers),
-    ...[0, ...drivers].flatMap((line) => factors.map((factor) => scaled(line, factor))),
-    ...drivers.map(swapped),
+    ...inCells.flatMap((line) => factors.map((factor) => scaled(line, factor))),
+    ...inCells.filter((line) => line > 0).map(swapped),
     ...drivers.filter((_, term) => drivers.length > 1 && !isReported(claim, term)).map(leftOut),
     ...helpers.map((line) =>
       modelChange({ hypothesis: "another-driver", line }, (model) =>
         model.drivers.includes(line) ? null : { drivers: [...model.drivers, line] },
       ),
     ),
-    ...helpers.flatMap((other) => [0, ...drivers].map((line) => replaced(line, other))),
+    ...helpers.flatMap((other) => inCells.map((line) => replaced(line, other))),
   ];
 }
 

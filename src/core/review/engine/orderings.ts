@@ -3,6 +3,7 @@ import { proposeRoles } from "../../table/roles.ts";
 import { rowsOf } from "../../table/locate.ts";
 import type { Column } from "../../table/source.ts";
 import type { Claim, ClaimedLine } from "../claim.ts";
+import { standsInCells } from "../forms.ts";
 
 /** The lines by what they may be to the rows; a driver can be the time as well. */
 export interface Ordering {
@@ -33,7 +34,7 @@ export function orderingsOf({ others, outcome, drivers }: Claim): Ordering {
   return {
     times: times.map(({ line }) => line),
     groups: groups.slice(0, mostGroupings).map(({ line }) => line),
-    proposed: proposedFrom(roles.rowsAre, named(roles.time), named(roles.groups)),
+    proposed: inPositionOrder(proposedFrom(roles.rowsAre, named(roles.time), named(roles.groups)), drivers),
   };
 }
 
@@ -45,6 +46,12 @@ function proposedFrom(
   if (rowsAre === "time" && time !== null) return { kind: "time", by: time };
   if (rowsAre === "groups" && groups !== null && time !== null) return { kind: "groups", by: groups, order: time };
   return { kind: "cases" };
+}
+
+/** Whoever regresses on positions takes the rows for a course of time, whatever else stands beside them. */
+function inPositionOrder(proposed: Ordering["proposed"], drivers: readonly ClaimedLine[]): Ordering["proposed"] {
+  const position = drivers.find((line) => !standsInCells(line));
+  return proposed.kind === "cases" && position !== undefined ? { kind: "time", by: position } : proposed;
 }
 
 /** Names may repeat; a heading's own words tell whether it counts weeks or months. */

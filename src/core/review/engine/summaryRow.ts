@@ -1,4 +1,5 @@
 import { sense } from "../../table/senses.ts";
+import { standsInCells } from "../forms.ts";
 import type { Frame, FrameLine } from "./frame.ts";
 
 /** Sums typed with two decimals or more still agree to this share of themselves. */
@@ -10,7 +11,8 @@ const tolerance = 1e-6;
  */
 export function looksLikeSummary(frame: Frame, row: number): "sum" | "mean" | null {
   const { lines, driverCount } = frame;
-  const filled = lines.slice(0, driverCount + 1).filter(({ senses }) => senses[row] === sense.number);
+  const ownCells = lines.slice(0, driverCount + 1).filter(({ line }) => standsInCells(line));
+  const filled = ownCells.filter(({ senses }) => senses[row] === sense.number);
   const made = filled.map((line) => madeOf(line, frame, row));
   if (made.includes("sum")) return "sum";
   return made.length > 0 && made.every((one) => one === "mean") ? "mean" : null;

@@ -77,9 +77,12 @@ function dataOf(
   { name, scope }: Call,
 ): Reading<Pick<Regression, "outcome" | "drivers">> {
   if (y === undefined || y.kind === "missing") return unread(whyUnread.fewArguments(name));
-  if (x === undefined || x.kind === "missing") return unread(whyUnread.noDrivers);
   const outcome = outcomeOf(ingredientsOf(y, scope));
   if (!outcome.ok) return outcome;
+  if (x === undefined || x.kind === "missing") {
+    if (positions[name].constant === null) return unread(whyUnread.fewArguments(name));
+    return read({ outcome: outcome.value, drivers: [{ area: outcome.value.area, form: "position", factor: 1 }] });
+  }
   const parts = ingredientsOf(x, scope);
   if (!parts.ok) return parts;
   const drivers = driversOf(parts.value, outcome.value.area);

@@ -1,5 +1,6 @@
 import { type CellPlace, numberAt, sheetNamed } from "../cellsOfBook.ts";
 import type { Quantity } from "../claim.ts";
+import { formOf } from "../forms.ts";
 import { type Ingredient, constantOf, ingredientsOf } from "./ingredients.ts";
 import { type Scope, placeOf } from "./places.ts";
 import { type Regression, type UsedLine, linesIn, truthOf } from "./regression.ts";
@@ -82,14 +83,29 @@ const mostPredictions = 200;
 function predictions(regression: Regression, rows: Formula | undefined, scope: Scope): Value {
   const { drivers, outcome } = regression;
   const given = rows === undefined || rows.kind === "missing" ? null : rows;
-  const single = given === null ? null : numberOf(given, scope);
-  if (single !== null && drivers.length === 1) return prediction(regression, [single]);
+  if (given !== null && drivers.length === 1) {
+    const typed = typedPredictions(regression, given, scope);
+    if (typed !== null) return typed;
+  }
   const lines = given === null ? drivers : linesOf(given, regression, scope);
   if (lines === null) return unknown(whyUnread.computedPrediction);
   const down = outcome.area.columns === 1;
   const count = Math.min(mostPredictions, Math.max(lines[0]!.area.rows, lines[0]!.area.columns));
   const found = Array.from({ length: count }, (_, index) => predictionAt(regression, lines, { index, scope }));
   return { kind: "block", rows: down ? found.map((one) => [one]) : [found] };
+}
+
+/** Of one driver, at numbers that stand in the formula or at one in a cell; null where the rows are cells. */
+function typedPredictions(regression: Regression, given: Formula, scope: Scope): Value | null {
+  if (given.kind !== "array") {
+    const single = numberOf(given, scope);
+    return single === null ? null : prediction(regression, [single]);
+  }
+  const at = (one: Formula): Value => {
+    const number = constantOf(one);
+    return number === null ? unknown(whyUnread.computedPrediction) : prediction(regression, [number]);
+  };
+  return { kind: "block", rows: given.rows.map((row) => row.map(at)) };
 }
 
 /** A number typed into the formula or standing in the one cell it names. */
@@ -129,20 +145,14 @@ const prediction = (regression: Regression, at: readonly number[]): Measure => {
   return regression.exponential ? after(measure, { kind: "back", from: Math.log }) : measure;
 };
 
-const forms: Readonly<Record<UsedLine["form"], (cell: number) => number>> = {
-  "as it is": (cell) => cell,
-  logarithm: Math.log,
-  square: (cell) => cell ** 2,
-  cube: (cell) => cell ** 3,
-};
-
 /** What a line's cell brings into the regression; null where it holds no number. */
 function enteringAt({ area, form, factor }: UsedLine, index: number, { book }: Scope): number | null {
+  if (form === "position") return index + 1;
   const sheet = sheetNamed(book, area.sheet);
   const down = area.columns === 1;
   if (sheet === null) return null;
   const place: CellPlace = { sheet, row: area.row + (down ? index : 0), column: area.column + (down ? 0 : index) };
   const cell = numberAt(place);
-  const value = cell === null ? NaN : factor * forms[form](cell);
+  const value = cell === null ? NaN : factor * formOf[form](cell);
   return Number.isFinite(value) ? value : null;
 }

@@ -24,7 +24,6 @@ export const whyUnread = {
   typedData: "The data are typed into the formula.",
   noCells: (cells: string) => `There are no cells in use in ${cells}.`,
   wideOutcome: (cells: string) => `The outcome is a block of several columns (${cells}).`,
-  noDrivers: "No drivers are given, so that the row numbers 1, 2, 3 and so on take their place.",
   unequal: (first: Ranged, second: Ranged) =>
     `${unequalRanges}: ${first.count} cells in ${first.cells}, ${second.count} in ${second.cells}.`,
   oneDriver: (name: string, cells: string) => `${name} takes one driver, but ${cells} holds several.`,

@@ -3,6 +3,7 @@ import { type CellColumn, cellKind } from "../../table/cells.ts";
 import type { BookSheet } from "../book.ts";
 import { type CellPlace, isTextAt, kindAt, wordsAt } from "../cellsOfBook.ts";
 import type { ClaimedForm, ClaimedLine } from "../claim.ts";
+import { positionName } from "../reviewWords.ts";
 
 /** A line of a sheet, and the stretch of it that a regression says it uses. */
 export interface Stretch {
@@ -17,17 +18,29 @@ export interface Stretch {
 export function claimedLine(stretch: Stretch, form: ClaimedForm): ClaimedLine {
   const { sheet, runs, track, from, count } = stretch;
   const down = runs === "down";
+  const first = down ? sheet.firstRow : sheet.firstColumn;
+  const cells = down ? sheet.columns[track - sheet.firstColumn]! : rowOf(sheet, track);
   return {
-    name: headingOf(stretch) ?? addressOf(areaOf(stretch)),
+    name: form === "position" ? positionName : (headingOf(stretch) ?? addressOf(areaOf(stretch))),
     sheet: sheet.sheet,
     runs,
     track,
-    first: down ? sheet.firstRow : sheet.firstColumn,
-    cells: down ? sheet.columns[track - sheet.firstColumn]! : rowOf(sheet, track),
+    first,
+    cells: form === "position" ? positionsAlong(cells, from - first) : cells,
     from,
     count,
     form,
     hidden: down ? sheet.hiddenRows : sheet.hiddenColumns,
+  };
+}
+
+/** 1 for the first claimed cell, and so on along the line, wherever a number stands there. */
+function positionsAlong({ kinds }: CellColumn, start: number): CellColumn {
+  const isNumber = (kind: number): boolean => kind === cellKind.number || kind === cellKind.date;
+  return {
+    kinds: kinds.map((kind) => (isNumber(kind) ? cellKind.number : cellKind.blank)),
+    numbers: Float64Array.from(kinds, (_, at) => at - start + 1),
+    texts: [],
   };
 }
 

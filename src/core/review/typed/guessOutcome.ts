@@ -4,6 +4,7 @@ import { holdingOf } from "../../table/holding.ts";
 import { plainHeading } from "../../table/headingRow.ts";
 import { cellKind } from "../../table/cells.ts";
 import type { ClaimedForm } from "../claim.ts";
+import { formOf } from "../forms.ts";
 import type { DataColumn } from "./dataTables.ts";
 import { formIn, type Match, scoreOf } from "./matchNames.ts";
 import { outcomeNameIn } from "./reportWords.ts";
@@ -82,13 +83,6 @@ function speaksOf(text: string, heading: string): boolean {
     ` ${plainHeading(text).replaceAll(/[^\p{L}\p{N}]+/gu, " ")} `.match(new RegExp(` ${stem}(?:s|es)? `, "u")) !== null
   );
 }
-
-const formOf: Readonly<Record<ClaimedForm, (value: number) => number>> = {
-  "as it is": (value) => value,
-  logarithm: Math.log,
-  square: (value) => value ** 2,
-  cube: (value) => value ** 3,
-};
 
 /** More rows than these tell no more of which column is meant. */
 const mostRows = 5000;

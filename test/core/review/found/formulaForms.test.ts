@@ -37,6 +37,7 @@ interface Form {
 }
 
 const plain = "Cups 5-16 on Price 5-16";
+const positions = "Cups 5-16 on position of Position in the range 5-16";
 const both = "Cups 5-16 on Price 5-16, Rain 5-16";
 
 const forms: readonly Form[] = [
@@ -167,8 +168,32 @@ const forms: readonly Form[] = [
   },
   {
     formula: "=LINEST(Data!B5:B16)",
-    says: "not read: No drivers are given, so that the row numbers 1, 2, 3 and so on take their place.",
+    values: [[1, 2]],
+    says: `${positions}: coefficient 0, coefficient c`,
   },
+  {
+    formula: "=LINEST(Data!B5:B16,,FALSE,FALSE)",
+    values: [[1, 0]],
+    says: `${positions} without constant: coefficient 0`,
+  },
+  { formula: "=INDEX(LINEST(Data!B5:B16,,TRUE,TRUE),2,1)", says: `${positions}: standard-error 0` },
+  {
+    formula: "=TREND(Data!B5:B16)",
+    values: [[40], [41]],
+    says: `${positions}: prediction 1, prediction 2`,
+  },
+  {
+    formula: "=TREND(Data!B5:B16,,{13;14.5})",
+    values: [[40], [41]],
+    says: `${positions}: prediction 13, prediction 14.5`,
+  },
+  { formula: "=TREND(Data!B5:B16,,Data!A16)", says: `${positions}: prediction 12` },
+  {
+    formula: "=LOGEST(Data!B5:B16)",
+    values: [[1, 2]],
+    says: "logarithm of Cups 5-16 on position of Position in the range 5-16: coefficient 0, coefficient c",
+  },
+  { formula: "=SLOPE(Data!B5:B16,)", says: "not read: SLOPE has too few arguments." },
   {
     formula: "=LINEST(Data!B5:B16,Data!C5:C16*Data!D5:D16)",
     says: "not read: Two ranges are multiplied with each other.",
