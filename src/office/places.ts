@@ -1,6 +1,7 @@
 import type { DataPlace } from "../app/host.ts";
 import { addressOf } from "../core/table/address.ts";
 import { rectangleOf, whereabouts } from "./areas.ts";
+import { sheetMark } from "./liveSheet.ts";
 import { tablesOf } from "./tables.ts";
 
 /** Tables, named ranges and sheets that hold data, in the order a user looks for them. */
@@ -11,9 +12,14 @@ export async function listPlaces(context: Excel.RequestContext): Promise<readonl
   const tables = await tablesOf(context.workbook);
   const visible = worksheets.items.filter(({ visibility }) => visibility === "Visible");
   const used = visible.map((sheet) => sheet.getUsedRangeOrNullObject(true).load(`${whereabouts},worksheet/name`));
-  const local = visible.map((sheet) => sheet.names.load("items/name,items/type,items/visible"));
+  const local = visible.map((sheet) => ({
+    own: sheet.names.load("items/name,items/type,items/visible"),
+    mark: sheet.customProperties.getItemOrNullObject(sheetMark.key).load("value"),
+  }));
   await context.sync();
-  const items = [names, ...local].flatMap((collection) => collection.items).filter(isOffered);
+  // Names on sheets that Footing wrote are headings, not data.
+  const ofOthers = local.filter(({ mark }) => mark.isNullObject).map(({ own }) => own);
+  const items = [names, ...ofOthers].flatMap((collection) => collection.items).filter(isOffered);
   const ranges = items.map((item) => item.getRangeOrNullObject().load(`${whereabouts},worksheet/name`));
   if (ranges.length > 0) await context.sync();
   return [

@@ -70,7 +70,10 @@ async function frameOf(context: Excel.RequestContext): Promise<Frame> {
         area: { ...rectangleOf(used), sheet: sheet.name },
         visible: sheet.visibility === "Visible",
       })),
-    names: [namesIn(names, null), ...looked.map(({ sheet, own }) => namesIn(own, sheet.name))].flat(),
+    names: [
+      namesIn(names, null),
+      ...looked.filter(({ mark }) => mark.isNullObject).map(({ sheet, own }) => namesIn(own, sheet.name)),
+    ].flat(),
     tables,
     calculation: calculations[application.calculationMode] ?? "automatic",
   };

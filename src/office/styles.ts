@@ -21,6 +21,7 @@ const line = "#9CA3AF";
 /** Text on its fill keeps a contrast of 7 to 1 or more. */
 const looks: Readonly<Record<PlanStyle, Look>> = {
   title: { bold: true, size: 16, color: ink },
+  banner: { bold: true, color: ink, fill: "#DBEAFE" },
   heading: { bold: true, size: 12, color: ink, above: line },
   "table heading": { bold: true, color: ink, fill: "#F3F4F6", below: line, vertical: "Top" },
   label: { color: quiet, vertical: "Top" },

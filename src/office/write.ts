@@ -4,6 +4,7 @@ import type { SheetPlan } from "../sheet/plan.ts";
 import { drawCharts } from "./charts.ts";
 import type { ExcelClient } from "./client.ts";
 import { isExcelFault } from "./faults.ts";
+import { nameLandmarks } from "./landmarks.ts";
 import { markOf, sheetMark } from "./liveSheet.ts";
 import { inExcel, inFront } from "./session.ts";
 import { freeSheetName } from "./sheetName.ts";
@@ -69,6 +70,7 @@ export async function fill(sheet: Excel.Worksheet, plan: SheetPlan, { name, erra
     },
     () => drawCharts(sheet, plan.charts),
     () => layOutPage(sheet, plan),
+    () => nameLandmarks(sheet, plan),
   ];
   for (const [index, step] of steps.entries()) {
     if (errand.signal.aborted) return failure({ code: "cancelled" });

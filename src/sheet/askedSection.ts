@@ -76,6 +76,7 @@ function tableSection([headings = [], ...body]: Grid, columns: Columns): Section
       {
         area: { row: 0, column: 0, rows: 1, columns: headings.length },
         style: "table heading",
+        heads: body.length,
       },
       ...columns.map((_, index): PlanFormat => ({
         area: area(0, index + 1, 1),

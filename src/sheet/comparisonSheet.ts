@@ -125,7 +125,7 @@ function driversPart(models: readonly ComparedModel[]): Section {
     [[text("Drivers")], [text("Driver"), text("Figure"), ...modelHeadings(models)], ...rows],
     [
       { area: { row: 0, column: 0, rows: 1, columns }, style: "heading" },
-      { area: { row: 1, column: 0, rows: 1, columns }, style: "table heading", wrap: true },
+      { area: { row: 1, column: 0, rows: 1, columns }, style: "table heading", wrap: true, heads: rows.length },
       headingsOf(models),
       { area: { row: 2, column: 0, rows: rows.length, columns: labels }, style: "label" },
       {
@@ -175,7 +175,7 @@ function linesPart(models: readonly ComparedModel[]): Section {
     ],
     [
       { area: { row: 0, column: 0, rows: 1, columns }, style: "heading" },
-      { area: { row: 1, column: 0, rows: 1, columns }, style: "table heading", wrap: true },
+      { area: { row: 1, column: 0, rows: 1, columns }, style: "table heading", wrap: true, heads: lines.length },
       headingsOf(models),
       { area: { row: 2, column: 0, rows: lines.length, columns: labels }, style: "label" },
       {

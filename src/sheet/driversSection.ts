@@ -24,7 +24,7 @@ export function driversSection(answer: Answer, figures: Figures): Section {
     [[text("Drivers")], headings.map((heading) => text(String(heading))), ...rows],
     [
       headingFormat(0),
-      { area: { row: 1, column: 0, rows: 1, columns }, style: "table heading" },
+      { area: { row: 1, column: 0, rows: 1, columns }, style: "table heading", heads: body.length },
       { area: { row: 1, column: 1, rows: 1, columns: columns - 2 }, align: "right", numberFormat: numberHeadingFormat },
       { area: { row: 2, column: 0, rows: body.length, columns }, style: "sentence" },
       { area: { row: 2, column: 0, rows: body.length, columns: 1 }, style: "label", wrap: true },

@@ -43,7 +43,7 @@ export function evidenceSection(answer: Answer, figures: Figures): Section {
       [text("The fit as a whole")],
       ...fit.map((_, index) => [figures.evidence(count + index + 1, 0), figures.evidence(count + index + 1, 2)]),
     ],
-    [headingFormat(0), ...headingFormats, ...testFormats(tests), ...fitFormats(fit, fitRow)],
+    [headingFormat(0), ...headingFormats(tests.length), ...testFormats(tests), ...fitFormats(fit, fitRow)],
   );
 }
 
@@ -69,8 +69,8 @@ const cellFormat = (row: number, column: number, format: Omit<PlanFormat, "area"
 const apart = { align: "left", indent: 1 } as const;
 const figure = (numberFormat: string) => ({ numberFormat, align: "right" }) as const;
 
-const headingFormats: readonly PlanFormat[] = [
-  { area: { row: 1, column: 0, rows: 1, columns: page.columns }, style: "table heading" },
+const headingFormats = (tests: number): readonly PlanFormat[] => [
+  { area: { row: 1, column: 0, rows: 1, columns: page.columns }, style: "table heading", heads: tests },
   ...[...statistics, ...pValues].map((column) => cellFormat(1, column, figure(numberHeadingFormat))),
   ...laws.map((column) => cellFormat(1, column, apart)),
   cellFormat(1, 1, {}),
@@ -102,7 +102,7 @@ const heightOf = (row: Row): number =>
   );
 
 const fitFormats = (fit: readonly Row[], row: number): PlanFormat[] => [
-  { area: { row, column: 0, rows: 1, columns: 2 }, style: "table heading" },
+  { area: { row, column: 0, rows: 1, columns: 2 }, style: "table heading", heads: fit.length },
   { area: { row: row + 1, column: 0, rows: fit.length, columns: 1 }, style: "label" },
   ...fit.map((values, index): PlanFormat => ({
     area: { row: row + 1 + index, column: 1, rows: 1, columns: 1 },

@@ -55,7 +55,11 @@ const reasonFormat = (row: number, reason: string): PlanFormat => ({
   rowHeight: wrappedHeight(reason, 1),
 });
 
-const tableHeading: PlanFormat = { area: { row: 1, column: 0, rows: 1, columns: 7 }, style: "table heading" };
+const tableHeading: PlanFormat = {
+  area: { row: 1, column: 0, rows: 1, columns: 7 },
+  style: "table heading",
+  heads: 2,
+};
 
 function caseTable(answer: Answer, { mark }: Figures): PlanCell[][] {
   const asked = answer.decision.fourCase.followOn !== "not asked";

@@ -67,7 +67,7 @@ const rowCells = ({ cell, leverage, cook, dffits, outside }: Answer["guards"]["r
 function tableFormats(row: number, count: number): PlanFormat[] {
   const figures = { column: 1, columns: rowHeadings.length - 1 };
   return [
-    { area: { row, column: 0, rows: 1, columns: rowHeadings.length }, style: "table heading" },
+    { area: { row, column: 0, rows: 1, columns: rowHeadings.length }, style: "table heading", heads: count },
     {
       area: { row, rows: 1, ...figures },
       align: "right",

@@ -40,11 +40,17 @@ export function howMadeSection(answer: Answer, facts: SheetFacts): Section {
     headingFormat(0),
     { area: { row: 1, column: 0, rows: made.length, columns: 1 }, style: "label" },
     ...made.map(({ value }, index) => valueFormat(index + 1, value)),
-    { area: { row: settingsRow, column: 0, rows: 1, columns: 2 }, style: "table heading" },
+    { area: { row: settingsRow, column: 0, rows: 1, columns: 2 }, style: "table heading", heads: settings.length },
     ...settings.map(({ value }, index) => valueFormat(settingsRow + 1 + index, value)),
     ...(leftOut.length === 0
       ? []
-      : [{ area: { row: listRow, column: 0, rows: 1, columns: 3 }, style: "table heading" } as const]),
+      : [
+          {
+            area: { row: listRow, column: 0, rows: 1, columns: 3 },
+            style: "table heading",
+            heads: leftOut.length - 1,
+          } as const,
+        ]),
   ];
   return section(
     [

@@ -45,6 +45,8 @@ export interface PlanBlock {
 
 export type PlanStyle =
   | "title"
+  /** Above several headings: which regression of a review they are about. */
+  | "banner"
   | "heading"
   | "table heading"
   | "label"
@@ -67,6 +69,8 @@ export interface PlanFormat {
   readonly merge?: boolean;
   /** Height of each row in points, for wrapped sentences. */
   readonly rowHeight?: number;
+  /** How many rows below have these cells for the headings of their columns, and their own names in the first column. */
+  readonly heads?: number;
 }
 
 export interface PlanLink {

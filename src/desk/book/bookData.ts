@@ -16,6 +16,7 @@ export interface BookName {
   readonly refersTo: string;
   /** The sheet whose own name it is; absent for a name of the workbook. */
   readonly sheet?: string;
+  readonly comment?: string;
 }
 
 /** Sheets on their way into another workbook, with the names that are their own. */

@@ -53,7 +53,12 @@ function toBook(workbook: Workbook): BookData {
     sheets: workbook.sheets.map((sheet) => toSheet(sheet, usual)),
     names: (workbook.namedRanges ?? [])
       .filter(({ name }) => !name.startsWith(ownToExcel))
-      .map(({ name, range, scope }) => ({ name, refersTo: range, ...(scope !== undefined && { sheet: scope }) })),
+      .map(({ name, range, scope, comment }) => ({
+        name,
+        refersTo: range,
+        ...(scope !== undefined && { sheet: scope }),
+        ...(comment !== undefined && { comment }),
+      })),
     active: workbook.activeSheet ?? 0,
   };
 }

@@ -71,8 +71,8 @@ function withNames(part: string, { sheets, names }: CarriedSheets): string {
   const first = countOf(insideOf(part, `${prefix}sheets`), `${prefix}sheet`) - sheets.length;
   const entries = sheets.flatMap((sheet, index) =>
     [...printed(sheet), ...names.filter((name) => name.sheet === sheet.name)].map(
-      ({ name, refersTo }) =>
-        `<definedName name="${escapeXml(name)}" localSheetId="${first + index}">${escapeXml(refersTo)}</definedName>`,
+      ({ name, refersTo, comment = "" }) =>
+        `<definedName name="${escapeXml(name)}"${comment && ` comment="${escapeXml(comment)}"`} localSheetId="${first + index}">${escapeXml(refersTo)}</definedName>`,
     ),
   );
   if (entries.length === 0) return part;

@@ -26,10 +26,11 @@ export async function saveXlsx(book: BookData): Promise<Uint8Array> {
 export async function toParts(book: BookData, usualFont: string): Promise<Parts> {
   const bytes = await writeXlsx({
     sheets: book.sheets.map(toFileSheet),
-    namedRanges: book.names.map(({ name, refersTo, sheet }) => ({
+    namedRanges: book.names.map(({ name, refersTo, sheet, comment }) => ({
       name,
       range: refersTo.replace(/^=/, ""),
       ...(sheet !== undefined && { scope: sheet }),
+      ...(comment !== undefined && { comment }),
     })),
     activeSheet: book.active,
     stringMode: "inline",

@@ -49,13 +49,14 @@ export function calculateUnsaved(book: Book, data: BookData): void {
 function registerNames(book: Book, data: BookData, ids: readonly string[]): void {
   const names = book.grid.injector.get(IDefinedNamesService);
   const ofSheetsFirst = data.names.toSorted((one, other) => Number(!one.sheet) - Number(!other.sheet));
-  for (const { name, refersTo, sheet } of ofSheetsFirst) {
+  for (const { name, refersTo, sheet, comment } of ofSheetsFirst) {
     const owner = ids[data.sheets.findIndex((one) => one.name === sheet)] ?? null;
     names.registerDefinedName(book.unit, {
       id: nameId(name, owner),
       name,
       formulaOrRefString: refersTo.replace(/^=/, ""),
       localSheetId: owner ?? wholeWorkbook,
+      ...(comment !== undefined && { comment }),
     });
   }
 }

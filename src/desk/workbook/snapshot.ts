@@ -26,10 +26,11 @@ export function snapshotOf(book: Book): BookData {
   const ids = sheetIds(book);
   return {
     sheets: ids.map((sheet) => sheetData(book, sheet)),
-    names: namesOf(book).map(({ name, refersTo, sheet }) => ({
+    names: namesOf(book).map(({ name, refersTo, sheet, comment }) => ({
       name,
       refersTo,
       ...(sheet === null ? {} : { sheet: nameOf(book, sheet) }),
+      ...(comment === "" ? {} : { comment }),
     })),
     active: Math.max(0, ids.indexOf(activeSheet(book))),
     ...(book.customXml.length === 0 ? {} : { customXml: book.customXml.map((part) => ({ ...part })) }),

@@ -30,7 +30,7 @@ function placeSection({ claim }: ClaimReview): Section {
   return section(
     [[text(title)], [text(`Reported by ${originInWords(claim)} at`)]],
     [
-      { ...acrossReview(0, "in force"), merge: true, wrap: true, rowHeight: heightOver(title, 0) },
+      { ...acrossReview(0, "banner"), merge: true, wrap: true, rowHeight: heightOver(title, 0) },
       { area: { row: 1, column: 0, rows: 1, columns: 1 }, style: "label" },
     ],
     linkTo(1, 1, claim.place),
@@ -58,7 +58,7 @@ function consequencesSection(consequences: readonly Consequence[]): Section {
     [
       acrossReview(0, "heading"),
       ...lines.flatMap((words, index) => lineFormats(words, index + 1)),
-      acrossReview(1, "table heading"),
+      { ...acrossReview(1, "table heading"), heads: consequences.length },
     ],
   );
 }

@@ -26,7 +26,7 @@ export function comparedSection(review: ClaimReview): Section {
     [[text("Reported and recomputed")], headings.map(text), ...lines.map(({ cells }) => cells)],
     [
       acrossReview(0, "heading"),
-      { area: { row: 1, column: 0, rows: 1, columns: reviewColumns }, style: "table heading" },
+      { area: { row: 1, column: 0, rows: 1, columns: reviewColumns }, style: "table heading", heads: lines.length },
       { area: figureArea(1, 1), align: "right", numberFormat: numberHeadingFormat },
       { area: { row: 2, column: 0, rows: Math.max(1, lines.length), columns: 1 }, style: "label" },
       { area: figureArea(2, Math.max(1, lines.length)), align: "right" },

@@ -117,7 +117,7 @@ describe("sheets added to a workbook file", () => {
 
   it("bring the names that are their own, and no others", async () => {
     const names = [
-      { name: "Section_1", refersTo: "'Tubes answer'!$A$1", sheet: "Tubes answer" },
+      { name: "Section_1", refersTo: "'Tubes answer'!$A$1", sheet: "Tubes answer", comment: "A <heading>" },
       { name: "Section_1", refersTo: "Months!$A$1", sheet: "Months" },
       { name: "Footing_data_1", refersTo: "Months!$A$1:$B$9" },
     ];

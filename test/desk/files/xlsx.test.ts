@@ -102,7 +102,7 @@ describe("a workbook saved and opened again", () => {
       sheets: [{ ...blankSheet("Hidden", [[1]]), hidden: true }, blankSheet("Shown", [[2]])],
       names: [
         { name: "Tubes", refersTo: "Shown!$A$1:$A$9" },
-        { name: "Tubes", refersTo: "Hidden!$A$1", sheet: "Hidden" },
+        { name: "Tubes", refersTo: "Hidden!$A$1", sheet: "Hidden", comment: 'Tubes & "more"' },
       ],
       active: 1,
       customXml: [

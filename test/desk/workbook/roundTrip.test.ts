@@ -61,7 +61,7 @@ const book: BookData = {
   ),
   names: [
     { name: "Outcome", refersTo: "'Repairs answer'!$A$2:$A$3" },
-    { name: "Part", refersTo: "'Repairs answer'!$A$2", sheet: "Repairs answer" },
+    { name: "Part", refersTo: "'Repairs answer'!$A$2", sheet: "Repairs answer", comment: "The first" },
     { name: "Part", refersTo: "Other!$B$2", sheet: "Other" },
   ],
   customXml: [{ id: "{1}", xml: "<model/>" }],
