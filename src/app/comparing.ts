@@ -2,16 +2,26 @@ import { settingsSaid } from "../core/answer/settingsSaid.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";
 import type { ComparedModel } from "../sheet/comparison.ts";
 import { planComparison } from "../sheet/comparisonSheet.ts";
+import type { SheetPlan } from "../sheet/plan.ts";
+import { writtenBlocks } from "../sheet/written.ts";
 import { fingerprintOf } from "./fingerprint.ts";
 import type { Errand } from "./host.ts";
+import type { Setup } from "./setup.ts";
 import { hiddenSetting } from "./sheetFacts.ts";
 import { askAgain } from "./stored/checking.ts";
-import { type StoredSetup, sameName } from "./stored/storedBook.ts";
+import { keepRecord } from "./stored/recording.ts";
+import { type Anchor, type ModelRecord, type StoredSetup, sameName } from "./stored/storedBook.ts";
 import { type Work, fail } from "./work.ts";
+
+/** A stored set-up answered, and what it was answered from. */
+export interface AnsweredModel extends ComparedModel {
+  readonly setup: Setup;
+  readonly anchor: Anchor;
+}
 
 /** Stored set-ups answered side by side, each with its own data as they stand now. */
 export interface Comparison {
-  readonly models: readonly ComparedModel[];
+  readonly models: readonly AnsweredModel[];
   /** Whether cells behind it have changed since. */
   readonly outdated: boolean;
 }
@@ -32,31 +42,36 @@ async function answerAll(
   work: Work,
   names: readonly string[],
   errand: Errand,
-): Promise<Result<readonly ComparedModel[]>> {
+): Promise<Result<readonly AnsweredModel[]>> {
   if (names.length < 2) return failure({ code: "too-few-setups", setups: names.length });
   const { setups } = work.store.get().kept.book;
-  const models: ComparedModel[] = [];
+  const models: AnsweredModel[] = [];
   for (const [index, name] of names.entries()) {
     const entry = setups.find((setup) => sameName(setup.name, name));
     if (entry === undefined) return failure({ code: "setup-gone", name });
-    const model = await answerOne(work, entry, partOf(errand, { index, count: names.length, name }));
+    const part = partOf(errand, { index, count: names.length, name });
+    const model = await answerOne(work, entry, { whose: `the set-up "${entry.name}"`, errand: part });
     if (!model.ok) return model;
     models.push(model.value);
   }
   return success(models);
 }
 
-async function answerOne(work: Work, entry: StoredSetup, errand: Errand): Promise<Result<ComparedModel>> {
-  const { name } = entry;
-  const asked = await askAgain(work, entry, { whose: `the set-up "${name}"`, errand });
+/** Answers one model with its data as they stand now. */
+export async function answerOne(
+  work: Work,
+  { name, anchor, ...entry }: StoredSetup,
+  by: { readonly whose: string; readonly errand: Errand },
+): Promise<Result<AnsweredModel>> {
+  const asked = await askAgain(work, { ...entry, anchor }, by);
   if (!asked.ok) return asked;
-  const { data, question } = asked.value;
-  const answer = await work.analyst.analyse(question, errand);
-  return answer.ok ? success({ name, answer: answer.value, question, address: data.address }) : answer;
+  const { data, setup, question } = asked.value;
+  const answer = await work.analyst.analyse(question, by.errand);
+  return answer.ok ? success({ name, answer: answer.value, question, address: data.address, setup, anchor }) : answer;
 }
 
 /** The share of one model in the whole. */
-function partOf(
+export function partOf(
   errand: Errand,
   part: { readonly index: number; readonly count: number; readonly name: string },
 ): Errand {
@@ -71,18 +86,37 @@ function partOf(
 export async function writeComparison(work: Work): Promise<void> {
   const { comparison } = work.store.get();
   if (comparison === null) return;
-  const { models } = comparison;
   const errand = work.errands.start("writing");
-  const facts = await Promise.all(
-    models.map(async ({ question }) => ({
-      fingerprint: await fingerprintOf(question),
-      settings: [...settingsSaid(question.model, question.options), ...hiddenSetting(question.source)],
-    })),
-  );
-  const { today, version } = work.edition;
-  const plan = planComparison(models, { date: today(), version, models: facts });
+  const { plan, records } = await planOfModels(work, comparison.models);
   const written = await work.host.write(plan, errand);
   if (errand.signal.aborted) return;
-  if (written.ok) work.store.dispatch({ kind: "comparison written", sheet: written.value.sheet });
-  else fail(work, written.problem);
+  if (!written.ok) {
+    fail(work, written.problem);
+    return;
+  }
+  const { sheet } = written.value;
+  work.store.dispatch({ kind: "comparison written", sheet });
+  const id = crypto.randomUUID();
+  await keepRecord(work, sheet, { id, kind: "comparison", models: records, written: writtenBlocks(plan) });
+}
+
+/** The sheet of a comparison, and what is to be known of its models. */
+export async function planOfModels(
+  { edition }: Pick<Work, "edition">,
+  models: readonly AnsweredModel[],
+): Promise<{ readonly plan: SheetPlan; readonly records: readonly ModelRecord[] }> {
+  const fingerprints = await Promise.all(models.map(({ question }) => fingerprintOf(question)));
+  const facts = models.map(({ question }, index) => ({
+    fingerprint: fingerprints[index]!,
+    settings: [...settingsSaid(question.model, question.options), ...hiddenSetting(question.source)],
+  }));
+  const plan = planComparison(models, { date: edition.today(), version: edition.version, models: facts });
+  const records = models.map(({ name, setup, anchor, address }, index) => ({
+    name,
+    setup,
+    anchor,
+    address,
+    fingerprint: fingerprints[index]!,
+  }));
+  return { plan, records };
 }

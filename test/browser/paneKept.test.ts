@@ -113,8 +113,16 @@ describe("a comparison", () => {
     expect(await whole.getByRole("row", { name: /^Rows used/ }).innerText()).toMatch(/94\s+96/);
     await button(page, "Write the comparison to a sheet").click();
     await expect.poll(() => announced(page)).toBe("The comparison is written to the sheet Comparison.");
+    const bar = page.getByRole("contentinfo");
+    await bar.getByText(/^Written to Comparison\s*\.$/).waitFor();
     await page.evaluate(() => window.stage.host.change(5, 1, 99));
     await page.getByText("Out of date: cells behind the models have changed.").waitFor();
+    await bar.getByText(/^Written to Comparison, out of date\./).waitFor();
+    await button(page, "Redo Comparison in place").click();
+    await bar.getByText(/^Written to Comparison\s*\.$/).waitFor();
+    expect(await page.evaluate(() => window.stage.host.keeper.rewrites.map(({ over }) => over.sheet))).toEqual([
+      "Comparison",
+    ]);
     await button(page, "Compare again").click();
     await page.getByText("Out of date: cells behind the models have changed.").waitFor({ state: "detached" });
     await button(page, "Back to the answer").click();

@@ -138,6 +138,61 @@ describe("a kept sheet whose data have changed", { timeout: 120_000 }, () => {
   });
 });
 
+describe("a comparison sheet", { timeout: 120_000 }, () => {
+  const comparison = "Comparison";
+  const models = ["All drivers", "Without advertising"] as const;
+
+  /** Two set-ups, with and without a driver, side by side on a new sheet. */
+  async function writeComparison(): Promise<void> {
+    const [all, without] = models;
+    await at.carryOut(() => at.pane.commands.storeSetup(all));
+    at.pane.store.dispatch({ kind: "role chosen", column: "Advertising", role: "unused" });
+    await at.carryOut(() => at.pane.commands.storeSetup(without));
+    await at.carryOut(() => at.pane.commands.compare(models));
+    await at.carryOut(at.pane.commands.writeComparison);
+  }
+
+  const printed = (): string => JSON.stringify(sheetData(comparison).rows);
+
+  it("is out of date when the data of one model change, and is redone in place from what it was made of", async () => {
+    await writeComparison();
+    expect(standing(comparison)).toBe("current");
+    const before = printed();
+    for (const name of models) await at.carryOut(() => at.pane.commands.removeSetup(name));
+    at.desk.edit("Months!B50", 700);
+    await new Promise((resolve) => setTimeout(resolve, 700));
+    expect(standing(comparison)).toBe("out of date");
+    await reopen();
+    expect(standing(comparison)).toBe("out of date");
+    at.desk.edit(`${comparison}!A300`, "my remark");
+    await redo(comparison);
+    expect(standing(comparison)).toBe("current");
+    expect(at.desk.value(`${comparison}!A300`)).toBe("my remark");
+    expect(printed()).not.toBe(before);
+    const redone = content(sheetData(comparison)).rows;
+    await at.carryOut(() => at.pane.commands.read({ kind: "address", address: "Months!A4:E100" }));
+    await writeComparison();
+    const fresh = content(sheetData(`${comparison} 2`)).rows;
+    expect(redone.slice(0, fresh.length)).toEqual(fresh);
+  });
+
+  it("is not written over where its user wrote into it, and tells which column is gone", async () => {
+    await writeComparison();
+    at.desk.edit("Months!B50", 700);
+    at.desk.edit(`${comparison}!A1`, "Our models");
+    expect(await at.faultOf(() => at.pane.commands.redoSheet(comparison))).toContain("what Footing did not write");
+    at.desk.edit(`${comparison}!A1`, "");
+    await redo(comparison);
+    expect(at.desk.value(`${comparison}!A1`)).toBe("2 models side by side");
+    at.desk.edit("Months!D4", "Adverts");
+    await at.carryOut(at.pane.commands.checkSheets);
+    expect(standing(comparison)).toBe("cut off");
+    expect(await at.faultOf(() => at.pane.commands.redoSheet(comparison))).toContain(
+      'There is no column "Advertising"',
+    );
+  });
+});
+
 describe("a live sheet", { timeout: 120_000 }, () => {
   it("follows its cells; turned into a kept one it can be out of date, and is not written over", async () => {
     await write("live");

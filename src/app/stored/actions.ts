@@ -1,5 +1,5 @@
 import type { Problem } from "../../core/problem/problem.ts";
-import type { ComparedModel } from "../../sheet/comparison.ts";
+import type { AnsweredModel } from "../comparing.ts";
 import type { LostColumn } from "../carrying.ts";
 import type { DataInHand } from "../dataInHand.ts";
 import type { Setup } from "../setup.ts";
@@ -28,7 +28,7 @@ export type StoredAction =
   | { readonly kind: "sheet checked"; readonly sheet: string; readonly standing: Standing }
   | { readonly kind: "source changed"; readonly sheet: string }
   | { readonly kind: "sheet redone"; readonly sheet: string }
-  | { readonly kind: "compared"; readonly models: readonly ComparedModel[] }
+  | { readonly kind: "compared"; readonly models: readonly AnsweredModel[] }
   | { readonly kind: "compared cells changed" }
   | { readonly kind: "comparison written"; readonly sheet: string }
   | { readonly kind: "comparison closed" };

@@ -44,5 +44,7 @@ const goneOr = (problem: Problem, gone: Problem): Problem => (problem.code === "
 const inWords = ({ kind, name }: Anchor): string => (kind === "table" ? `the table ${name}` : `the name ${name}`);
 
 /** Whether anything stored goes back to an anchor. */
-export const isUsed = ({ setups, sheets }: StoredBook, anchor: Anchor): boolean =>
-  [...setups, ...sheets].some((one) => one.anchor.kind === anchor.kind && one.anchor.name === anchor.name);
+export const isUsed = ({ setups, sheets, comparisons }: StoredBook, anchor: Anchor): boolean =>
+  [...setups, ...sheets, ...comparisons.flatMap(({ models }) => models)].some(
+    (one) => one.anchor.kind === anchor.kind && one.anchor.name === anchor.name,
+  );

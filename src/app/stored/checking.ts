@@ -10,7 +10,7 @@ import { type Work, fail } from "../work.ts";
 import { readOrigin } from "./anchors.ts";
 import { loadKept } from "./keeping.ts";
 import type { SheetStatus, Standing } from "./sheetStatus.ts";
-import type { Origin, SheetRecord } from "./storedBook.ts";
+import type { ComparisonRecord, Origin, SheetRecord } from "./storedBook.ts";
 
 /** Something stored with its data as they stand now: the question that it asks today. */
 export interface Asked {
@@ -49,37 +49,45 @@ export async function checkSheets(work: Work): Promise<void> {
     fail(work, found.problem);
     return;
   }
-  const { sheets } = kept.value.book;
+  const records = [...kept.value.book.sheets, ...kept.value.book.comparisons];
   const statuses = found.value.map(({ sheet, record }) =>
     statusOf(
       sheet,
-      sheets.find(({ id }) => id === record),
+      records.find(({ id }) => id === record),
     ),
   );
   work.store.dispatch({ kind: "sheets found", sheets: statuses });
   const sources: { readonly address: string; readonly sheet: string }[] = [];
   for (const { sheet, record } of statuses) {
-    if (record?.kind !== "kept") continue;
-    const { standing, address } = await standingOf(work, sheet, record);
+    if (record === null || record.kind === "live") continue;
+    const { standing, addresses } = await standingOf(work, sheet, record);
     work.store.dispatch({ kind: "sheet checked", sheet, standing });
-    if (address !== null) sources.push({ address, sheet });
+    sources.push(...addresses.map((address) => ({ address, sheet })));
   }
   await work.watchSources(sources);
 }
 
-function statusOf(sheet: string, record: SheetRecord | undefined): SheetStatus {
+type AnyRecord = SheetRecord | ComparisonRecord;
+
+function statusOf(sheet: string, record: AnyRecord | undefined): SheetStatus {
   if (record === undefined) return { sheet, record: null, standing: { kind: "not known" } };
   return { sheet, record, standing: { kind: record.kind === "live" ? "follows" : "being checked" } };
 }
 
+/** A comparison is as current as the one of its models that is least so. */
 async function standingOf(
   work: Work,
   sheet: string,
-  record: SheetRecord,
-): Promise<{ readonly standing: Standing; readonly address: string | null }> {
-  const asked = await askAgain(work, record, { whose: `the sheet "${sheet}"`, errand: quietly() });
-  if (!asked.ok) return { standing: { kind: "cut off", problem: asked.problem }, address: null };
-  const same = (await fingerprintOf(asked.value.question)) === record.fingerprint;
-  const { address, below } = asked.value.data;
-  return { standing: same ? { kind: "current", below } : { kind: "out of date" }, address };
+  record: AnyRecord,
+): Promise<{ readonly standing: Standing; readonly addresses: readonly string[] }> {
+  const asked: (Asked & { readonly same: boolean })[] = [];
+  for (const origin of record.kind === "comparison" ? record.models : [record]) {
+    const again = await askAgain(work, origin, { whose: `the sheet "${sheet}"`, errand: quietly() });
+    if (!again.ok) return { standing: { kind: "cut off", problem: again.problem }, addresses: [] };
+    asked.push({ ...again.value, same: (await fingerprintOf(again.value.question)) === origin.fingerprint });
+  }
+  const addresses = [...new Set(asked.map(({ data }) => data.address))];
+  if (asked.some(({ same }) => !same)) return { standing: { kind: "out of date" }, addresses };
+  const below = asked.map(({ data }) => data.below).find((one) => one !== null) ?? null;
+  return { standing: { kind: "current", below }, addresses };
 }

@@ -1,9 +1,17 @@
 import type { Problem } from "../../core/problem/problem.ts";
 import type { WrittenBlock } from "../../sheet/written.ts";
 import type { KeptPart } from "../keeper.ts";
-import { type Reader, listOf, malformed, number, objectOf, oneOf, orNull, text } from "./readers.ts";
+import { type Reader, listOf, malformed, number, objectOf, oneOf, orNull, since, text } from "./readers.ts";
 import { readSetup } from "./readSetup.ts";
-import { type Anchor, type SheetRecord, type StoredBook, type StoredSetup, emptyBook } from "./storedBook.ts";
+import {
+  type Anchor,
+  type ComparisonRecord,
+  type ModelRecord,
+  type SheetRecord,
+  type StoredBook,
+  type StoredSetup,
+  emptyBook,
+} from "./storedBook.ts";
 
 /** Of the XML part that holds what Footing keeps; it outlives a new version and a new address of the add-in. */
 export const namespace = "urn:footing:workbook";
@@ -31,7 +39,9 @@ export function readKept(parts: readonly KeptPart[]): Kept {
 
 const anchor: Reader<Anchor> = objectOf<Anchor>({ kind: oneOf("table", "name"), name: text });
 
-const setup: Reader<StoredSetup> = objectOf<StoredSetup>({ name: text, anchor, address: text, setup: readSetup });
+const setupMembers = { name: text, anchor, address: text, setup: readSetup } as const;
+
+const setup: Reader<StoredSetup> = objectOf<StoredSetup>(setupMembers);
 
 const block: Reader<WrittenBlock> = objectOf<WrittenBlock>({
   row: number,
@@ -51,7 +61,18 @@ const record: Reader<SheetRecord> = objectOf<SheetRecord>({
   written: orNull(listOf(block)),
 });
 
-const book: Reader<StoredBook> = objectOf<StoredBook>({ setups: listOf(setup), sheets: listOf(record) });
+const comparison: Reader<ComparisonRecord> = objectOf<ComparisonRecord>({
+  id: text,
+  kind: oneOf("comparison"),
+  models: listOf(objectOf<ModelRecord>({ ...setupMembers, fingerprint: text })),
+  written: listOf(block),
+});
+
+const book: Reader<StoredBook> = objectOf<StoredBook>({
+  setups: listOf(setup),
+  sheets: listOf(record),
+  comparisons: since(listOf(comparison), []),
+});
 
 function readPart({ id, xml }: KeptPart): { readonly book: StoredBook } | Problem {
   const body = xml.replace(/^\s*<\?xml[^>]*\?>\s*/, "");

@@ -7,7 +7,7 @@ import type { Answered } from "../state.ts";
 import { type Work, fail } from "../work.ts";
 import { askAgain, checkSheets } from "./checking.ts";
 import { changeKept } from "./keeping.ts";
-import type { Anchor, SheetRecord, StoredBook } from "./storedBook.ts";
+import { type Anchor, type ComparisonRecord, type SheetRecord, withNewRecord, withRecord } from "./storedBook.ts";
 
 export interface WrittenSheet {
   readonly sheet: string;
@@ -32,6 +32,11 @@ export async function recordSheet(work: Work, { sheet, kind, plan, answered }: W
     fingerprint: await fingerprintOf(answered.question),
     written: kind === "live" ? null : writtenBlocks(plan),
   };
+  await keepRecord(work, sheet, record);
+}
+
+/** Marks a sheet with the id of its record, and keeps the record in the workbook. */
+export async function keepRecord(work: Work, sheet: string, record: SheetRecord | ComparisonRecord): Promise<void> {
   const tagged = await work.host.tagSheet(sheet, record.id);
   if (!tagged.ok) {
     fail(work, tagged.problem);
@@ -43,19 +48,13 @@ export async function recordSheet(work: Work, { sheet, kind, plan, answered }: W
     return;
   }
   const ids = present.value.map((one) => one.record);
-  const changed = await changeKept(work, (book) => success(withRecord(book, record, ids)));
+  const changed = await changeKept(work, (book) => success(withNewRecord(book, record, ids)));
   if (!changed.ok) {
     fail(work, changed.problem);
     return;
   }
   await checkSheets(work);
 }
-
-/** The book with a record; those of sheets that are no longer there go. */
-const withRecord = (book: StoredBook, record: SheetRecord, present: readonly (string | null)[]): StoredBook => ({
-  ...book,
-  sheets: [...book.sheets.filter(({ id }) => id !== record.id && present.includes(id)), record],
-});
 
 /** The data may have been chosen by a name of the user's; where other data are in hand by now, their cells get one. */
 async function anchorFor({ host, store }: Work, { address }: Answered) {
@@ -68,15 +67,14 @@ async function anchorFor({ host, store }: Work, { address }: Answered) {
   return success(anchor);
 }
 
-export const changeRecord = (work: Work, id: string, change: (record: SheetRecord) => SheetRecord) =>
-  changeKept(work, (book) =>
-    success({ ...book, sheets: book.sheets.map((record) => (record.id === id ? change(record) : record)) }),
-  );
+/** Keeps a record in the place of the one that has its id. */
+export const changeRecord = (work: Work, record: SheetRecord | ComparisonRecord) =>
+  changeKept(work, (book) => success(withRecord(book, record)));
 
 /** A live sheet that was turned into a kept one holds what its data said then; its cells are not told apart from others. */
 export async function recordKept(work: Work, sheet: string): Promise<void> {
   const record = work.store.get().sheets.find((one) => one.sheet === sheet)?.record ?? null;
-  if (record === null) return;
+  if (record === null || record.kind === "comparison") return;
   const errand = { signal: new AbortController().signal, progress: () => undefined };
   const asked = await askAgain(work, record, { whose: `the sheet "${sheet}"`, errand });
   if (!asked.ok) {
@@ -84,7 +82,7 @@ export async function recordKept(work: Work, sheet: string): Promise<void> {
     return;
   }
   const fingerprint = await fingerprintOf(asked.value.question);
-  const changed = await changeRecord(work, record.id, (one) => ({ ...one, kind: "kept", fingerprint, written: null }));
+  const changed = await changeRecord(work, { ...record, kind: "kept", fingerprint, written: null });
   if (!changed.ok) {
     fail(work, changed.problem);
     return;

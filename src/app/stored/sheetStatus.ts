@@ -1,5 +1,5 @@
 import type { Problem } from "../../core/problem/problem.ts";
-import type { SheetRecord } from "./storedBook.ts";
+import type { ComparisonRecord, SheetRecord } from "./storedBook.ts";
 
 /** How a result sheet stands to its data. */
 export type Standing =
@@ -16,10 +16,10 @@ export type Standing =
 
 export interface SheetStatus {
   readonly sheet: string;
-  readonly record: SheetRecord | null;
+  readonly record: SheetRecord | ComparisonRecord | null;
   readonly standing: Standing;
 }
 
 /** Whether Footing can write the sheet again in place of itself: it must know its own cells there. */
 export const canBeRedone = ({ record }: SheetStatus): boolean =>
-  record !== null && record.kind === "kept" && record.written !== null;
+  record !== null && record.kind !== "live" && record.written !== null;

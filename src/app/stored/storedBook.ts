@@ -36,13 +36,47 @@ export interface SheetRecord extends Origin {
   readonly written: readonly WrittenBlock[] | null;
 }
 
+/** One model of a comparison sheet. */
+export interface ModelRecord extends StoredSetup {
+  /** Of its data when the sheet was written. */
+  readonly fingerprint: string;
+}
+
+/** What is known of a sheet that shows several models side by side: always values. */
+export interface ComparisonRecord {
+  readonly id: string;
+  readonly kind: "comparison";
+  readonly models: readonly ModelRecord[];
+  readonly written: readonly WrittenBlock[];
+}
+
 /** Everything that Footing keeps in a workbook. */
 export interface StoredBook {
   readonly setups: readonly StoredSetup[];
   readonly sheets: readonly SheetRecord[];
+  readonly comparisons: readonly ComparisonRecord[];
 }
 
-export const emptyBook: StoredBook = { setups: [], sheets: [] };
+export const emptyBook: StoredBook = { setups: [], sheets: [], comparisons: [] };
+
+/** The book with a record in the place of the one that has its id. */
+export const withRecord = (book: StoredBook, record: SheetRecord | ComparisonRecord): StoredBook =>
+  record.kind === "comparison"
+    ? { ...book, comparisons: book.comparisons.map((one) => (one.id === record.id ? record : one)) }
+    : { ...book, sheets: book.sheets.map((one) => (one.id === record.id ? record : one)) };
+
+/** The book with a record of a new sheet; those of sheets that are no longer there go. */
+export function withNewRecord(
+  { setups, ...book }: StoredBook,
+  record: SheetRecord | ComparisonRecord,
+  present: readonly (string | null)[],
+): StoredBook {
+  const stays = ({ id }: { readonly id: string }): boolean => id !== record.id && present.includes(id);
+  const [sheets, comparisons] = [book.sheets.filter(stays), book.comparisons.filter(stays)];
+  return record.kind === "comparison"
+    ? { setups, sheets, comparisons: [...comparisons, record] }
+    : { setups, sheets: [...sheets, record], comparisons };
+}
 
 /** Names of set-ups differ without regard to case and outer blanks. */
 export const sameName = (a: string, b: string): boolean => a.trim().toLowerCase() === b.trim().toLowerCase();

@@ -32,6 +32,17 @@ const book: StoredBook = {
     },
     { id: "x2", kind: "live", setup, anchor, address: "'My data'!A1:C4", fingerprint: "cd", written: null },
   ],
+  comparisons: [
+    {
+      id: "x3",
+      kind: "comparison",
+      models: [
+        { name: "A", setup, anchor, address: "'My data'!A1:C4", fingerprint: "ef" },
+        { name: "B", setup, anchor, address: "'My data'!A1:C4", fingerprint: "gh" },
+      ],
+      written: [{ row: 0, column: 0, rows: 1, columns: 1, marks: "AbC7" }],
+    },
+  ],
 };
 
 const reading = (...texts: readonly string[]): Kept =>
@@ -40,6 +51,12 @@ const reading = (...texts: readonly string[]): Kept =>
 describe("the part that holds what Footing keeps", () => {
   it("gives back what was put in, whatever signs headings hold", () => {
     expect(reading(partText(book))).toEqual({ book, part: "{1}", leftAlone: [] });
+  });
+
+  it("is read as it was before comparison sheets were known to it", () => {
+    const { comparisons, ...before } = book;
+    expect(comparisons).toHaveLength(1);
+    expect(reading(partText(before as StoredBook)).book).toEqual({ ...before, comparisons: [] });
   });
 
   it("may hold signs that no XML knows", () => {
