@@ -5,35 +5,17 @@ import { type ComparedDriver, type ComparedModel, comparedDrivers } from "../../
 import { standardErrorInWords, writerFor } from "../answer/driverFigures.ts";
 import { FirmnessMark } from "../answer/FirmnessMark.tsx";
 import { pFigure } from "../parts/pFigure.ts";
+import { ModelTable, type ModelsProps } from "./ModelTable.tsx";
 import { useTableLook } from "./tableLook.ts";
 
-export interface ModelsProps {
-  readonly models: readonly ComparedModel[];
-}
-
 /** Each driver with its figures under every model. */
-export function DriversCompared({ models }: ModelsProps): ReactNode {
-  const look = useTableLook();
-  return (
-    <div className={look.box} tabIndex={0} role="region" aria-label="Drivers in rows, models in columns">
-      <table className={look.table} aria-label="Drivers of the models">
-        <thead>
-          <tr>
-            <td />
-            {models.map(({ name }) => (
-              <th key={name} scope="col" className={look.model}>
-                {name}
-              </th>
-            ))}
-          </tr>
-        </thead>
-        {comparedDrivers(models).map((driver) => (
-          <Driver key={driver.term} driver={driver} models={models} />
-        ))}
-      </table>
-    </div>
-  );
-}
+export const DriversCompared = ({ models }: ModelsProps): ReactNode => (
+  <ModelTable models={models} label="Drivers of the models" region="Drivers in rows, models in columns">
+    {comparedDrivers(models).map((driver) => (
+      <Driver key={driver.term} driver={driver} models={models} />
+    ))}
+  </ModelTable>
+);
 
 type Line = readonly [label: string, figure: (driver: DriverAnswer, model: ComparedModel) => ReactNode];
 
