@@ -349,7 +349,7 @@ describe("work and faults", () => {
     await page.getByText("Footing made a mistake.").waitFor();
     expect(await page.getByLabel("Details of the fault").inputValue()).toContain("something broke");
     await button(page, "Copy the details").click();
-    await page.getByText(/^(Copied\.|The details are selected)/).waitFor();
+    await page.getByText(/^(Copied\.|The text is selected)/).waitFor();
     const selected = (): string =>
       document.querySelector("textarea")?.value.slice(0, document.querySelector("textarea")?.selectionEnd) ?? "";
     expect(await page.evaluate(selected)).toContain("something broke");

@@ -21,10 +21,14 @@ export interface TextToCopyProps {
   readonly text: string;
   /** Lines of the field that are in view. */
   readonly rows: number;
+  /** What the button says. */
+  readonly copies?: string;
+  /** Further buttons, beside the one that copies. */
+  readonly children?: ReactNode;
 }
 
 /** A text in a field, and a button that copies it; where the clipboard is closed it stays selected for the keys. */
-export function TextToCopy({ label, text, rows }: TextToCopyProps): ReactNode {
+export function TextToCopy({ label, text, rows, copies = "Copy as text", children }: TextToCopyProps): ReactNode {
   const styles = useStyles();
   const field = useRef<HTMLTextAreaElement>(null);
   const [copied, setCopied] = useState("");
@@ -37,9 +41,9 @@ export function TextToCopy({ label, text, rows }: TextToCopyProps): ReactNode {
       <textarea ref={field} readOnly rows={rows} className={styles.text} aria-label={label} value={text} />
       <div>
         <Button size="small" onClick={() => void copy()}>
-          Copy as text
+          {copies}
         </Button>{" "}
-        <span role="status">{copied}</span>
+        {children} <span role="status">{copied}</span>
       </div>
     </div>
   );
