@@ -26,7 +26,7 @@ const mayImport: Readonly<Record<string, readonly string[]>> = {
   functions: ["core", "sheet", "app"],
   taskpane: ["core", "sheet", "app"],
   worker: ["core", "sheet", "app"],
-  desk: ["core/table/address.ts", "sheet/sample/months.ts", "sheet/sample/draws.ts"],
+  desk: ["core/table/address.ts", "core/table/tableReference.ts", "sheet/sample/months.ts", "sheet/sample/draws.ts"],
   terminal: ["core", "sheet", "app", "office", "functions", "worker", "desk"],
   entries: ["core", "sheet", "app", "office", "functions", "taskpane", "worker", "desk", "terminal"],
 };

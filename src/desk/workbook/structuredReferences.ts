@@ -1,4 +1,5 @@
 import { columnLetters, quoteSheet } from "../../core/table/address.ts";
+import { headingIn, readTableReference, type TableReference } from "../../core/table/tableReference.ts";
 
 /** A table as a formula may speak of it. */
 export interface SpokenTable {
@@ -38,7 +39,9 @@ export function spellOut(formula: string, standpoint: Standpoint): string {
     const [called, brackets, bare] = found;
     if (brackets === undefined && bare === undefined) return whole;
     const table = standpoint.tableCalled(called ?? bare ?? "");
-    return table === null ? whole : cellsOf(table, partsOf(brackets ?? "[]"), standpoint.row);
+    return table === null
+      ? whole
+      : cellsOf(table, readTableReference((brackets ?? "[]").slice(1, -1).trim()), standpoint.row);
   });
 }
 
@@ -59,45 +62,14 @@ export function renamed(formula: string, { table, to, columns }: Renaming): stri
     const name = to ?? called ?? bare ?? "";
     if (brackets === undefined) return name;
     const parts = brackets.replaceAll(/(?<=\[@?)((?:'[^]|[^@[\]'])+)(?=\])/g, (part: string) => {
-      const now = columns.get(unescaped(part.trim()).toLowerCase());
+      const now = columns.get(headingIn(part.trim()).toLowerCase());
       return now === undefined ? part : now.replaceAll(/['#@[\]]/g, "'$&");
     });
     return name + parts;
   });
 }
 
-interface TableParts {
-  /** "#headers", "#data" and the like, in small letters. */
-  readonly items: readonly string[];
-  /** The first and the last column; none for all of them. */
-  readonly columns: readonly string[];
-}
-
-function partsOf(brackets: string): TableParts {
-  const inside = brackets.slice(1, -1).trim();
-  if (inside.startsWith("@")) return { items: ["#this row"], columns: columnsIn(inside.slice(1).trim()) };
-  if (!inside.startsWith("[")) {
-    return inside.startsWith("#")
-      ? { items: [inside.toLowerCase()], columns: [] }
-      : { items: [], columns: columnsIn(inside) };
-  }
-  const parts = listed(inside);
-  return {
-    items: parts.filter((part) => part.startsWith("#")).map((part) => part.toLowerCase()),
-    columns: parts.filter((part) => !part.startsWith("#")).map(unescaped),
-  };
-}
-
-const columnsIn = (text: string): string[] =>
-  text === "" ? [] : text.startsWith("[") ? listed(text).map(unescaped) : [unescaped(text)];
-
-/** The parts in brackets of their own. */
-const listed = (text: string): string[] =>
-  [...text.matchAll(/\[((?:'[^]|[^[\]'])*)\]/g)].map(([, part = ""]) => part.trim());
-
-const unescaped = (text: string): string => text.replaceAll(/'([^])/g, "$1");
-
-function cellsOf(table: SpokenTable, { items, columns }: TableParts, row: number): string {
+function cellsOf(table: SpokenTable, { items, columns }: TableReference, row: number): string {
   const places = columns.map((column) => placeOf(table, column));
   const rows = rowsOf(table, items, row);
   if (rows === null || places.includes(-1) || places.length > 2) return "#REF!";

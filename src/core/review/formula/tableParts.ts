@@ -1,5 +1,6 @@
 import type { SheetArea } from "../../table/address.ts";
 import { plainHeading } from "../../table/headingRow.ts";
+import { readTableReference } from "../../table/tableReference.ts";
 import type { Book, BookSheet, BookTable } from "../book.ts";
 import { sheetNamed, wordsAt } from "../cellsOfBook.ts";
 import { type Reading, read, unread } from "./reading.ts";
@@ -28,7 +29,7 @@ export const isTable = (book: Book, name: string): boolean => tableCalled(book, 
 export function tableArea(at: Standpoint, { table: name, inside }: Spoken): Reading<SheetArea> {
   const table = name === "" ? tableAround(at) : tableCalled(at.book, name);
   if (table === null) return unread(name === "" ? whyUnread.noTableHere : whyUnread.unknownTable(name));
-  const { items, columns } = partsOf(inside.trim());
+  const { items, columns } = readTableReference(inside.trim());
   const headings = headingsOf(at.book, table);
   const places = columns.map((column) => headings.indexOf(plainHeading(column)));
   const missing = columns[places.indexOf(-1)];
@@ -52,39 +53,6 @@ function headingsOf(book: Book, { area, headings }: BookTable): string[] {
     plainHeading(wordsAt({ sheet: sheet!, row: area.row, column: area.column + index })),
   );
 }
-
-interface Parts {
-  /** "#data", "#all" and the like. */
-  readonly items: readonly string[];
-  /** The first and the last column; none for all of them. */
-  readonly columns: readonly string[];
-}
-
-function partsOf(inside: string): Parts {
-  if (inside.startsWith("@")) return { items: ["#this row"], columns: columnsIn(inside.slice(1).trim()) };
-  if (!inside.startsWith("[")) {
-    return inside.startsWith("#")
-      ? { items: [inside.toLowerCase()], columns: [] }
-      : { items: [], columns: columnsIn(inside) };
-  }
-  const parts = listed(inside);
-  return {
-    items: parts.filter((part) => part.startsWith("#")).map((part) => part.toLowerCase()),
-    columns: parts.filter((part) => !part.startsWith("#")).map(unescaped),
-  };
-}
-
-function columnsIn(text: string): string[] {
-  if (text === "") return [];
-  return (text.startsWith("[") ? listed(text) : [text]).map(unescaped);
-}
-
-/** The parts that stand in brackets of their own. */
-const listed = (text: string): string[] =>
-  [...text.matchAll(/\[((?:'[^]|[^[\]'])*)\]/g)].map(([, part = ""]) => part.trim());
-
-/** An apostrophe makes a letter of the sign behind it. */
-const unescaped = (text: string): string => text.replaceAll(/'([^])/g, "$1");
 
 /** @returns null where the part holds no rows of data. */
 function rowsOf(table: BookTable, items: readonly string[], row: number): Pick<SheetArea, "row" | "rows"> | null {
