@@ -12,6 +12,7 @@ import { allErrors } from "./allErrors.ts";
 import type { Answer, FitFigures } from "./answer.ts";
 import { askedSentences } from "./askedWords.ts";
 import { againstOf, driverAnswers } from "./drivers.ts";
+import { followsOn } from "./findings.ts";
 import { guardsOf } from "./guards.ts";
 import type { Options } from "./options.ts";
 import { residualPoints } from "./points.ts";
@@ -65,7 +66,7 @@ function answerFrom(fit: Fit, { source, options }: Question, report: Report): Re
   const firm = firmness(fit, { inForce: inference.inForce, against, level, lags, adjusted });
   if (!firm.ok) return firm;
   const places = rowPlacesOf(design, source);
-  const guards = guardsOf(fit, { tests, level, places });
+  const guards = guardsOf(fit, { tests, level, followsOn: followsOn(decision), places });
   const found = {
     decision,
     lags,

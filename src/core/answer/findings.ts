@@ -7,6 +7,10 @@ export type CaseQuestion = "spread" | "follow-on";
 
 const followOnTests: readonly TestName[] = ["breusch-godfrey"];
 
+/** Whether errors were found to follow on, be the choice left to that or not. */
+export const followsOn = ({ restsOn }: Decision): boolean =>
+  restsOn.some(({ outcome, rejected }) => rejected && followOnTests.includes(outcome.test));
+
 /** The test that settled a question: the one with the smallest p-value among those looked at. */
 export function settledBy(decision: Decision, question: CaseQuestion): Decision["restsOn"][number] | null {
   const asked = decision.restsOn.filter(

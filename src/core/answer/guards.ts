@@ -32,11 +32,13 @@ const mostRows = 10;
 export interface GuardSettings {
   readonly tests: readonly TestOutcome[];
   readonly level: number;
+  /** Whether the errors were found to follow on. */
+  readonly followsOn: boolean;
   readonly places: RowPlaces;
 }
 
 /** Every guard that applies: collinearity, single rows, wandering series, breaks, gaps or groups. */
-export function guardsOf(fit: Fit, { tests, level, places }: GuardSettings): Guards {
+export function guardsOf(fit: Fit, { tests, level, followsOn, places }: GuardSettings): Guards {
   const near = collinearity(fit);
   const measures = influence(fit);
   const rows = measures === null ? [] : mostInfluential(fit, measures, mostRows);
@@ -46,7 +48,7 @@ export function guardsOf(fit: Fit, { tests, level, places }: GuardSettings): Gua
     collinearityGuard(near),
     measures === null ? null : influenceGuard({ fit, measures, rows }, places.name),
     wandering === null ? null : trendingGuard(wandering),
-    breaksGuard(tests, level, places.name),
+    breaksGuard(tests, { level, followsOn }, places.name),
     rowsGuard(fit.design.order),
   ];
   return {

@@ -1,8 +1,9 @@
 import type { Figure, TestOutcome } from "../diagnostics/outcome.ts";
-import { testWords } from "../diagnostics/words.ts";
+import { testWords, upsetByFollowOn } from "../diagnostics/words.ts";
 import type { InferenceTable } from "../inference/inference.ts";
 import type { Reference } from "../inference/reference.ts";
 import type { Answer, DriverAnswer } from "./answer.ts";
+import { followsOn } from "./findings.ts";
 import { errorsInWords } from "./verdict.ts";
 import { capitalised } from "./wording.ts";
 
@@ -126,14 +127,17 @@ function testRow(outcome: TestOutcome, context: Context): (string | number)[] {
 
 /**
  * What a computed test means here, held against the level of the tests that decide; the consequence for the standard
- * errors is said only of the tests that the decision rests on.
+ * errors is said only of the tests that the decision rests on, and a test that follow-on upsets is not believed in full.
  */
 export function readingOf(outcome: Extract<TestOutcome, { kind: "computed" }>, { decision }: Context): string {
   const counted = decision.restsOn.find((entry) => entry.outcome === outcome);
   const pValue = counted?.pValue ?? (outcome.fForm ?? outcome.figure).pValue;
   const { rejected, notRejected } = testWords[outcome.test];
   const reading = pValue < decision.testLevel ? rejected : notRejected;
-  return counted === undefined ? reading.replace(/: .*$/s, ".") : reading;
+  if (counted !== undefined) return reading;
+  const plain = reading.replace(/: .*$/s, ".");
+  const isDoubtful = reading === rejected && upsetByFollowOn.has(outcome.test) && followsOn(decision);
+  return isDoubtful ? `${plain} But the errors follow on, and this test then says so too often.` : plain;
 }
 
 /** "chi-square(3)", "F(3, 92)". */

@@ -14,6 +14,21 @@ export interface TestWords {
   readonly source: string;
 }
 
+/**
+ * Tests that take errors not to follow on, or hardly to, and reject too often where they do. Of 300 series of 96 rows
+ * with no break and no curve, whose errors carry over by 0.6, they rejected at 5 % in 10 % (RESET) to 70 % (the largest
+ * Chow statistic).
+ */
+export const upsetByFollowOn: ReadonlySet<TestName> = new Set([
+  "chow",
+  "largest-chow",
+  "cusum",
+  "cusum-recursive",
+  "reset",
+  "reset-robust",
+  "arch",
+]);
+
 export const testWords: Readonly<Record<TestName, TestWords>> = {
   koenker: {
     title: "Koenker's test",

@@ -1,11 +1,17 @@
 import type { TestOutcome } from "../outcome.ts";
 import { testWords } from "../words.ts";
-import type { Guard } from "./guard.ts";
+import { type Guard, namesInWords } from "./guard.ts";
 
 type Computed = Extract<TestOutcome, { kind: "computed" }>;
 
 /** The tests that look for coefficients that change over the period. */
 const lookForBreaks: readonly TestOutcome["test"][] = ["largest-chow", "cusum", "cusum-recursive"];
+
+export interface BreakSettings {
+  readonly level: number;
+  /** Whether the errors were found to follow on: these tests then see changes where there are none. */
+  readonly followsOn: boolean;
+}
 
 /**
  * Whether the coefficients hold over the whole period, by the break tests among the outcomes.
@@ -14,7 +20,7 @@ const lookForBreaks: readonly TestOutcome["test"][] = ["largest-chow", "cusum", 
  */
 export function breaksGuard(
   outcomes: readonly TestOutcome[],
-  level: number,
+  { level, followsOn }: BreakSettings,
   rowName: (row: number) => string,
 ): Guard | null {
   const computed = outcomes.flatMap((outcome) =>
@@ -26,6 +32,9 @@ export function breaksGuard(
     const sentences = ["No change of the coefficients over the period shows."];
     return { guard: "breaks", finding: "nothing found", sentences };
   }
+  if (followsOn) {
+    return { guard: "breaks", finding: "worth knowing", sentences: [doubtful(rejected, rowName)] };
+  }
   return {
     guard: "breaks",
     finding: "look into it",
@@ -33,10 +42,25 @@ export function breaksGuard(
   };
 }
 
+/** What the tests would say, and why it may be nothing. */
+function doubtful(rejected: readonly Computed[], rowName: (row: number) => string): string {
+  const named = rejected.map(({ test, details }) => {
+    const place = placeOf(details, rowName);
+    return `the ${testWords[test].title.replace(/^L/, "l")}${place === null ? "" : ` (${place})`}`;
+  });
+  return `By ${namesInWords(named)} the coefficients would change over the period. But the errors follow on, and then ${
+    named.length === 1 ? "this test finds" : "these tests find"
+  } changes where there are none: look at the residuals through time before you believe it.`;
+}
+
 function sentenceOf({ test, details }: Computed, rowName: (row: number) => string): string {
   const { title, rejected } = testWords[test];
+  const place = placeOf(details, rowName);
+  return `${title}: ${rejected}${place === null ? "" : ` It is ${place}.`}`;
+}
+
+/** Where a test sees the change, if it names a place. */
+function placeOf(details: Computed["details"], rowName: (row: number) => string): string | null {
   const firstRows = details["firstRows"];
-  const place =
-    firstRows === undefined ? "" : ` It is largest between ${rowName(firstRows - 1)} and ${rowName(firstRows)}.`;
-  return `${title}: ${rejected}${place}`;
+  return firstRows === undefined ? null : `largest between ${rowName(firstRows - 1)} and ${rowName(firstRows)}`;
 }

@@ -65,12 +65,15 @@ function farOut(fit: Fit, { selfFitting: alone }: Influence, rowName: (row: numb
 
 function movedBy({ design }: Fit, { row, dfbetas }: InfluentialRow, rowName: (row: number) => string): string[] {
   const moved = design.terms
-    .map(({ name }, j) => ({ name, by: Math.abs(dfbetas[j]!) }))
+    .map(({ name, meaning }, j) => ({
+      what: meaning.kind === "constant" ? "the constant" : `the coefficient of ${name}`,
+      by: Math.abs(dfbetas[j]!),
+    }))
     .filter(({ by }) => by > oneStandardError)
     .sort((one, other) => other.by - one.by);
   if (moved.length === 0) return [];
-  const changes = namesInWords(moved.map(({ name, by }) => `${name} by ${by.toFixed(1)}`));
-  return [`Leaving out ${rowName(row)} changes the coefficient of ${changes} standard errors.`];
+  const changes = namesInWords(moved.map(({ what, by }) => `${what} by ${by.toFixed(1)}`));
+  return [`Leaving out ${rowName(row)} changes ${changes} standard errors.`];
 }
 
 function outliers(rows: readonly InfluentialRow[], rowName: (row: number) => string): string[] {

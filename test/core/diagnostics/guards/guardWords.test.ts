@@ -78,7 +78,7 @@ describe("words about single rows", () => {
     expect(finding).toBe("worth knowing");
     expect(sentences).toHaveLength(5);
     expect(sentences[0]).toBe(
-      "Leaving out row 1 changes the coefficient of Price by 2.5 and constant by 1.3 standard errors.",
+      "Leaving out row 1 changes the coefficient of Price by 2.5 and the constant by 1.3 standard errors.",
     );
   });
 
@@ -142,17 +142,36 @@ describe("words about breaks", () => {
       details,
     });
 
+  const at = (followsOn = false) => ({ level: 0.05, followsOn });
+
+  it("doubt the tests where errors follow on, which makes them see changes that are none", () => {
+    const name = (row: number): string => `row ${row}`;
+    const largest = found("largest-chow", 0.01, { firstRows: 12 });
+    expect(breaksGuard([found("cusum", 0.2), largest], at(true), name)).toEqual({
+      guard: "breaks",
+      finding: "worth knowing",
+      sentences: [
+        "By the largest Chow statistic (largest between row 11 and row 12) the coefficients would change over the period. But the errors follow on, and then this test finds changes where there are none: look at the residuals through time before you believe it.",
+      ],
+    });
+    const both = breaksGuard([found("cusum", 0.01), largest], at(true), name)!.sentences;
+    expect(both).toEqual([
+      expect.stringMatching(/^By the CUSUM test on the residuals and the largest Chow .* then these tests find/),
+    ]);
+    expect(breaksGuard([found("cusum", 0.2)], at(true), name)!.finding).toBe("nothing found");
+  });
+
   it("go by the tests on breaks alone, and say where", () => {
     const others = [found("koenker", 0.001), notApplicable("largest-chow", "too few rows")];
-    expect(breaksGuard(others, 0.05, String)).toBeNull();
-    const calm = breaksGuard([...others, found("cusum", 0.05)], 0.05, String);
+    expect(breaksGuard(others, at(), String)).toBeNull();
+    const calm = breaksGuard([...others, found("cusum", 0.05)], at(), String);
     expect(calm).toEqual({
       guard: "breaks",
       finding: "nothing found",
       sentences: ["No change of the coefficients over the period shows."],
     });
     const moved = [found("cusum", 0.04), found("largest-chow", 0.01, { firstRows: 12 })];
-    const { sentences, finding } = breaksGuard([...others, ...moved], 0.05, (row) => `row ${row}`)!;
+    const { sentences, finding } = breaksGuard([...others, ...moved], at(), (row) => `row ${row}`)!;
     expect(finding).toBe("look into it");
     expect(sentences).toHaveLength(2);
     expect(sentences[0]).not.toContain("largest between");

@@ -202,11 +202,12 @@ describe("rows and breaks", () => {
   });
 
   it("says where the coefficients change", () => {
+    const at = (level: number) => ({ level, followsOn: false });
     const outcomes = [largestChow(referenceFit("investment"))];
-    const found = breaksGuard(outcomes, 0.05, (row) => String(1964 + row));
+    const found = breaksGuard(outcomes, at(0.05), (row) => String(1964 + row));
     expect(found).toMatchObject({ guard: "breaks", finding: "look into it" });
     expect(found!.sentences[0]).toMatch(/It is largest between 1975 and 1976\.$/);
-    expect(breaksGuard(outcomes, 1e-20, String)).toMatchObject({ finding: "nothing found" });
-    expect(breaksGuard([], 0.05, String)).toBeNull();
+    expect(breaksGuard(outcomes, at(1e-20), String)).toMatchObject({ finding: "nothing found" });
+    expect(breaksGuard([], at(0.05), String)).toBeNull();
   });
 });
