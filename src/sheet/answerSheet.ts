@@ -3,7 +3,7 @@ import { askedSection } from "./askedSection.ts";
 import { chartsAt, chartsSection } from "./chartsSection.ts";
 import { lineHeight, page, pageWidths } from "./columns.ts";
 import { driversSection } from "./driversSection.ts";
-import { evidenceSection } from "./evidenceSection.ts";
+import { evidenceSection, fitSection } from "./evidenceSection.ts";
 import { type Figures, keptFigures, liveFigures } from "./figures.ts";
 import { fourCasesSection } from "./fourCasesSection.ts";
 import { guardsSection } from "./guardsSection.ts";
@@ -16,7 +16,7 @@ import { rectangle, rowsTaken, stack } from "./section.ts";
 export type SheetKind = "live" | "kept";
 
 /** The place, in the order of the parts on the page, of those that others look for. */
-const part = { charts: 5, evidence: 6, howMade: 8 } as const;
+const part = { charts: 5, evidence: 6, howMade: 9 } as const;
 
 /**
  * Lays an answer out on a sheet that someone who was not there can read and redo.
@@ -63,6 +63,7 @@ const partsOf = (answer: Answer, facts: SheetFacts, figures: Figures) => [
   askedSection(answer),
   chartsSection(answer),
   evidenceSection(answer, figures),
+  fitSection(answer, figures),
   guardsSection(answer),
   howMadeSection(answer, facts),
 ];

@@ -28,23 +28,49 @@ const pValues = [4, 7] as const;
 const laws = [3, 6] as const;
 const words = [0, 1, 8] as const;
 
-/** All tests with their readings, then the fit as a whole. */
+/** All tests with their readings. */
 export function evidenceSection(answer: Answer, figures: Figures): Section {
-  const [headings = [], ...body] = evidenceTable(answer);
-  const count = body.findIndex(isFitRow);
-  const tests = body.slice(0, count);
-  const fit = body.slice(count);
-  const fitRow = tests.length + 2;
+  const { headings, tests } = partsOf(answer);
   return section(
     [
       [text("Evidence")],
       placed(headings.map((heading) => text(String(heading)))),
       ...tests.map((row, index) => placed(row.map((_, column) => figures.evidence(index + 1, column)))),
-      [text("The fit as a whole")],
-      ...fit.map((_, index) => [figures.evidence(count + index + 1, 0), figures.evidence(count + index + 1, 2)]),
     ],
-    [headingFormat(0), ...headingFormats(tests.length), ...testFormats(tests), ...fitFormats(fit, fitRow)],
+    [headingFormat(0), ...headingFormats(tests.length), ...testFormats(tests)],
   );
+}
+
+/** What is said of the fit as a whole: the last rows of the evidence, each a name and one figure. */
+export function fitSection(answer: Answer, figures: Figures): Section {
+  const { tests, fit } = partsOf(answer);
+  const first = tests.length + 1;
+  return section(
+    [
+      [text("The fit as a whole")],
+      ...fit.map((_, index) => [figures.evidence(first + index, 0), figures.evidence(first + index, 2)]),
+    ],
+    [
+      { area: { row: 0, column: 0, rows: 1, columns: 2 }, style: "table heading", heads: fit.length },
+      { area: { row: 1, column: 0, rows: fit.length, columns: 1 }, style: "label" },
+      ...fit.map((values, index): PlanFormat => ({
+        area: { row: 1 + index, column: 1, rows: 1, columns: 1 },
+        ...figure(figureFormat(values[2])),
+      })),
+    ],
+  );
+}
+
+interface Parts {
+  readonly headings: Row;
+  readonly tests: readonly Row[];
+  readonly fit: readonly Row[];
+}
+
+function partsOf(answer: Answer): Parts {
+  const [headings = [], ...body] = evidenceTable(answer);
+  const count = body.findIndex(isFitRow);
+  return { headings, tests: body.slice(0, count), fit: body.slice(count) };
 }
 
 /** Rows about the fit as a whole have one figure and nothing beside it. */
@@ -100,12 +126,3 @@ const heightOf = (row: Row): number =>
       return wrappedHeight(String(row[column] ?? ""), first, last);
     }),
   );
-
-const fitFormats = (fit: readonly Row[], row: number): PlanFormat[] => [
-  { area: { row, column: 0, rows: 1, columns: 2 }, style: "table heading", heads: fit.length },
-  { area: { row: row + 1, column: 0, rows: fit.length, columns: 1 }, style: "label" },
-  ...fit.map((values, index): PlanFormat => ({
-    area: { row: row + 1 + index, column: 1, rows: 1, columns: 1 },
-    ...figure(figureFormat(values[2])),
-  })),
-];
