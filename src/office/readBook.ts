@@ -7,7 +7,8 @@ import { rectangleOf, whereabouts } from "./areas.ts";
 import { hiddenColumnsOf, hiddenRowsOf } from "./hidden.ts";
 import { sheetMark } from "./liveSheet.ts";
 import { persist } from "./session.ts";
-import { readSheetCells } from "./sheetReader.ts";
+import { withReaders } from "./readers.ts";
+import { type SheetCells, readSheetCells } from "./sheetReader.ts";
 import { withSpills } from "./spills.ts";
 import { type TablePlace, tablesOf } from "./tables.ts";
 
@@ -23,6 +24,7 @@ export async function readBook(context: Excel.RequestContext, errand: Errand): P
   errand.progress({ what: "Reading the workbook", share: 0 });
   const telling = isTelling(frame.names);
   const sheets: BookSheet[] = [];
+  const others: SheetCells["others"][] = [];
   for (const sheet of frame.sheets) {
     const cells = await readSheetCells(context, {
       area: sheet.area,
@@ -31,10 +33,12 @@ export async function readBook(context: Excel.RequestContext, errand: Errand): P
       signal: errand.signal,
     });
     if (!cells.ok) return cells;
+    others.push(cells.value.others);
     sheets.push(await persist(() => finish(context, sheet, { ...cells.value, tables: frame.tables })));
   }
   if (errand.signal.aborted) return failure({ code: "cancelled" });
-  return success({ sheets, names: frame.names, calculation: frame.calculation });
+  const { names, calculation } = frame;
+  return success({ sheets: await persist(() => withReaders(context, sheets, { others, names })), names, calculation });
 }
 
 interface FoundSheet {
@@ -97,6 +101,7 @@ async function finish(
 ): Promise<BookSheet> {
   return {
     ...cells,
+    readers: [],
     sheet: area.sheet,
     firstRow: area.row,
     firstColumn: area.column,

@@ -12,6 +12,8 @@ import { persist } from "./session.ts";
 export interface SheetCells {
   readonly columns: readonly CellColumn[];
   readonly formulas: readonly BookFormula[];
+  /** The other formulas, where formats are read too: they may show what those give. */
+  readonly others: readonly BookFormula[];
   readonly calculated: readonly (Uint8Array<ArrayBuffer> | null)[];
   readonly formats: readonly FormatWindow[];
 }
@@ -101,25 +103,41 @@ async function valuesOf(range: Excel.Range): Promise<Block | null> {
 
 const isFormula = (content: unknown): content is string => typeof content === "string" && content.startsWith("=");
 
+interface FormulaPlace {
+  readonly row: number;
+  readonly column: number;
+  /** Whether its number format is read. */
+  readonly isShown: boolean;
+}
+
+/** Longer formulas calculate; those that show a result are short. */
+const longestReader = 300;
+
 function collectorOf({ area, isTelling }: SheetReading) {
   const builders = Array.from({ length: area.columns }, () => columnBuilder(area.rows));
   const calculated = Array.from({ length: area.columns }, (): Uint8Array<ArrayBuffer> | null => null);
   const formulas: BookFormula[] = [];
+  const others: BookFormula[] = [];
   const formats: FormatWindow[] = [];
-  const takeFormula = (formula: string, row: number, column: number): void => {
+  const takeFormula = (formula: string, { row, column, isShown }: FormulaPlace): void => {
     (calculated[column] ??= new Uint8Array(area.rows))[row] = 1;
-    if (!isTelling(formula)) return;
-    formulas.push({ row: area.row + row, column: area.column + column, formula, rows: 1, columns: 1 });
+    const kept = isTelling(formula) ? formulas : isShown && formula.length <= longestReader ? others : null;
+    kept?.push({ row: area.row + row, column: area.column + column, formula, rows: 1, columns: 1 });
   };
   const take = (cells: Chunk, firstRow: number): void => {
     for (const [column, { put }] of builders.entries()) put(cells, column, firstRow);
     cells.formulas.forEach((line, row) =>
       line.forEach((content, column) => {
         // A text that begins with "=" is its own value; a formula never is.
-        if (isFormula(content) && content !== cells.values[row]![column]) takeFormula(content, firstRow + row, column);
+        if (isFormula(content) && content !== cells.values[row]![column]) {
+          takeFormula(content, { row: firstRow + row, column, isShown: cells.numberFormat !== null });
+        }
       }),
     );
     if (cells.numberFormat !== null) formats.push(formatWindow(cells.numberFormat, area.row + firstRow));
   };
-  return { take, cells: () => ({ columns: builders.map(({ column }) => column()), formulas, calculated, formats }) };
+  return {
+    take,
+    cells: () => ({ columns: builders.map(({ column }) => column()), formulas, others, calculated, formats }),
+  };
 }

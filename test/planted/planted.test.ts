@@ -8,8 +8,10 @@ import {
   formulaFaults,
   formulaPairs,
   positionFaults,
+  readerFaults,
   soundFormulas,
   soundPositions,
+  soundReaders,
 } from "./formulas/books.ts";
 import { judgeFormulas } from "./formulas/judge.ts";
 import { judge, judgeBook } from "./judge.ts";
@@ -79,6 +81,11 @@ describe("faults planted where formulas report", () => {
 
   it("are found where formulas name no drivers, and not where there are none", async () => {
     const some = [...positionFaults().filter((_, index) => index % 9 === 1), ...soundPositions()];
+    expect(await wrongAmong(some)).toEqual([]);
+  });
+
+  it("are found where a table reads the results in cells, and not where there are none", async () => {
+    const some = [...readerFaults().filter((_, index) => index % 17 === 1), ...soundReaders()];
     expect(await wrongAmong(some)).toEqual([]);
   });
 

@@ -12,8 +12,10 @@ import {
   formulaFaults,
   formulaPairs,
   positionFaults,
+  readerFaults,
   soundFormulas,
   soundPositions,
+  soundReaders,
 } from "./formulas/books.ts";
 import { judgeFormulas } from "./formulas/judge.ts";
 import { judge, judgeBook } from "./judge.ts";
@@ -59,6 +61,7 @@ async function* all(): AsyncGenerator<Judged> {
   const usual = [...(isWhole ? formulaFaults() : everyFormulaFault()), ...formulaPairs(), ...soundFormulas()];
   yield* judgedFormulas("formulas", usual);
   yield* judgedFormulas("formulas without drivers", [...positionFaults(), ...soundPositions()].filter(isTaken));
+  yield* judgedFormulas("results read in cells", [...readerFaults(), ...soundReaders()].filter(isTaken));
 }
 
 /** Book by book some of those that are many are enough. */

@@ -16,6 +16,8 @@ export interface BookSheet extends CellBlock {
   readonly hiddenColumns: readonly number[];
   /** The formulas that can bear on a regression, in row order: see `isTelling`. */
   readonly formulas: readonly BookFormula[];
+  /** Formulas that read the cells of those: see `readersAmong`. */
+  readonly readers: readonly BookFormula[];
   /** For each column of the block: 1 in each row of the block that holds a formula of any kind; null where none does. */
   readonly calculated: readonly (Uint8Array<ArrayBuffer> | null)[];
   readonly formats: readonly FormatWindow[];

@@ -50,6 +50,15 @@ export function formatAt({ sheet, row, column }: CellPlace): string | null {
 export const addressAt = ({ sheet, row, column }: CellPlace): string =>
   addressOf({ sheet: sheet.sheet, row, column, rows: 1, columns: 1 });
 
+export type Rectangle = Omit<SheetArea, "sheet">;
+
+/** Whether two areas of one sheet have a cell in common. */
+export const overlap = (one: Rectangle, other: Rectangle): boolean =>
+  one.row < other.row + other.rows &&
+  other.row < one.row + one.rows &&
+  one.column < other.column + other.columns &&
+  other.column < one.column + one.columns;
+
 /** The used range of a sheet. */
 export const usedAreaOf = ({ sheet, firstRow, firstColumn, rowCount, columns }: BookSheet): SheetArea => ({
   sheet,

@@ -2,7 +2,7 @@ import type { Report } from "../answer/question.ts";
 import { type Result, failure, success } from "../problem/result.ts";
 import { type SheetArea, addressOf } from "../table/address.ts";
 import type { Book } from "./book.ts";
-import type { CellPlace } from "./cellsOfBook.ts";
+import { type CellPlace, overlap } from "./cellsOfBook.ts";
 import type { Claim } from "./claim.ts";
 import type { BookReview } from "./claimReview.ts";
 import { type Ground, craftOf } from "./craft/craftOf.ts";
@@ -10,6 +10,7 @@ import type { Finding } from "./finding.ts";
 import { type FormulaCell, readFormulas } from "./found/formulaCells.ts";
 import { type Gathered, claimOf, gathered } from "./found/gatherClaims.ts";
 import { firstWindows, onceEach } from "./found/movingWindows.ts";
+import { resultsInCells } from "./found/resultsInCells.ts";
 import { groupBehind, withBlock } from "./typed/attachBlock.ts";
 import { dataTables } from "./typed/dataTables.ts";
 import { areaCalled, givenData } from "./typed/pointedAt.ts";
@@ -86,10 +87,11 @@ function regressionsIn(book: Book, onSheet: string | null, report: Report): Foun
   const cells: FormulaCell[] = [];
   const blocks: ReportBlock[] = [];
   const unread: BookClaims["unread"][number][] = [];
+  const results = resultsInCells(book);
   for (const [index, sheet] of book.sheets.entries()) {
     report("Looking for regressions", (0.9 * index) / book.sheets.length);
     if (onSheet !== null && onSheet.toLowerCase() !== sheet.sheet.toLowerCase()) continue;
-    const read = readFormulas(sheet, book);
+    const read = readFormulas(sheet, { book, results });
     cells.push(...read.cells);
     unread.push(...read.unread);
     blocks.push(...reportBlocks(sheet));
@@ -101,21 +103,13 @@ function regressionsIn(book: Book, onSheet: string | null, report: Report): Foun
 /** What has a cell inside an area. */
 function touching({ groups, blocks, unread }: Found, area: SheetArea): Found {
   const isIn = ({ sheet, row, column }: CellPlace): boolean =>
-    sheet.sheet === area.sheet && overlaps(area, { row, column, rows: 1, columns: 1 });
+    sheet.sheet === area.sheet && overlap(area, { row, column, rows: 1, columns: 1 });
   return {
     groups: groups.filter(({ cells }) => cells.some(({ place }) => isIn(place))),
-    blocks: blocks.filter((block) => block.sheet.sheet === area.sheet && overlaps(area, block.area)),
+    blocks: blocks.filter((block) => block.sheet.sheet === area.sheet && overlap(area, block.area)),
     unread,
   };
 }
-
-type Rectangle = Omit<SheetArea, "sheet">;
-
-const overlaps = (one: Rectangle, other: Rectangle): boolean =>
-  one.row < other.row + other.rows &&
-  other.row < one.row + one.rows &&
-  one.column < other.column + other.columns &&
-  other.column < one.column + one.columns;
 
 /** Blocks over formulas go with those; the others speak of data that are given, or found by their names. */
 function claimsFrom({ groups, blocks }: Found, book: Book, given: GivenData): Omit<Ground, "book" | "groups"> {

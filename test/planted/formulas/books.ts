@@ -3,7 +3,7 @@ import { blankSheet } from "../../../src/desk/book/blankSheet.ts";
 import { calledFor } from "../books.ts";
 import { type DataSet, dataSets } from "../dataSets.ts";
 import { type FormulaFault, type Said, rangeFaults, readingFaults, sheetFaults, soundSheets } from "./faults.ts";
-import { type Form, type Reporting, forms, linestForms, reportRows } from "./forms.ts";
+import { type Form, type Reporting, forms, linestForms, readerForms, reportRows } from "./forms.ts";
 import { type Worksheet, toSheetData, worksheetOf } from "./worksheet.ts";
 
 /** A workbook whose report is made by formulas, with one fault or none. */
@@ -54,6 +54,31 @@ export function positionFaults(): FormulaBook[] {
     ),
   );
 }
+
+/** What can go wrong where a table reads LINEST's cells, each in every form and data set. */
+export function readerFaults(): FormulaBook[] {
+  return faults.flatMap((fault, index) =>
+    readerForms
+      .filter((form) => isReadable(fault, form))
+      .flatMap((form, turn) =>
+        setsFor([fault]).map((set) =>
+          made(`Q${index + 1}_${set.id.replaceAll("-", "")}_${turn}`, { set, form, together: [fault] }),
+        ),
+      ),
+  );
+}
+
+/** A name that is looked up is never that of another. */
+const isReadable = ({ forms: only, labels }: FormulaFault, form: Form): boolean =>
+  (only === undefined || only.includes("index")) && !(labels !== undefined && form === "read by MATCH");
+
+/** Tables that read LINEST's cells, without fault, where the data allow its standard errors. */
+export const soundReaders = (): FormulaBook[] =>
+  dataSets
+    .filter((set) => calledFor(set).errors.kind === "classical")
+    .flatMap((set, index) =>
+      readerForms.map((form, turn) => made(`V${index + 1}_${turn}`, { set, form, together: [{ name: "no fault" }] })),
+    );
 
 /** Formulas that name no drivers, without fault: figures that rest on no standard errors. */
 export const soundPositions = (): FormulaBook[] =>

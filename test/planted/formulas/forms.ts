@@ -6,7 +6,9 @@ import { type Ranges, type Worksheet, rangeOf } from "./worksheet.ts";
 export const forms = ["array", "spilled", "index", "let", "one driver", "trend"] as const;
 /** Formulas that name no drivers: 1, 2, 3 and so on take their place. */
 export const positionForms = ["array of positions", "table of positions", "trend of positions"] as const;
-export type Form = (typeof forms)[number] | (typeof positionForms)[number];
+/** Tables that read the results of LINEST in the cells beside them. */
+export const readerForms = ["copied", "read from a spill", "read by MATCH"] as const;
+export type Form = (typeof forms)[number] | (typeof positionForms)[number] | (typeof readerForms)[number];
 
 /** The forms that take several drivers and end in an error where a cell is no number. */
 export const linestForms = ["array", "spilled", "index", "let"] as const satisfies readonly Form[];
@@ -34,6 +36,16 @@ export const reportRows: Readonly<Record<Form, (reporting: Reporting) => Rows>> 
   let: (reporting) => table(reporting, (linest, row, column) => `LET(fit,${linest},INDEX(fit,${row},${column}))`),
   "one driver": oneDriver,
   trend,
+  copied: (reporting) => beside(reporting, (row, column) => cellOfBlock(row, column)),
+  "read from a spill": (reporting) => beside(reporting, (row, column) => `INDEX($${blockColumn}$2#,${row},${column})`),
+  "read by MATCH": (reporting) =>
+    beside(reporting, (row, column) => {
+      const k = reporting.sheet.driverCount;
+      const [first, last] = [cellOfBlock(0, 1), cellOfBlock(5, k + 1)];
+      const name = [...reporting.labels].reverse()[column - 1] ?? "Constant";
+      const headings = `${first}:${cellOfBlock(0, k + 1)}`;
+      return `INDEX(${cellOfBlock(1, 1)}:${last},${row},${row < 3 ? `MATCH("${name}",${headings},0)` : column})`;
+    }),
   "array of positions": (reporting) => block(byPosition(reporting), "array"),
   "table of positions": (reporting) => reportRows.index(byPosition(reporting)),
   "trend of positions": (reporting) => trend(byPosition(reporting)),
@@ -110,6 +122,29 @@ function block(reporting: Reporting, entered: "array" | "spilled"): Rows {
       ...row.map((value, column) => cell(value, index + column === 0)),
     ]),
   ];
+}
+
+/** The block stands so many columns to the right of the table that reads it. */
+const blockOffset = 6;
+const blockColumn = String.fromCharCode(65 + blockOffset + 1);
+
+/** "$H$2" for the first number of the block; its row 0 holds the names. */
+const cellOfBlock = (row: number, column: number): string =>
+  `$${String.fromCharCode(65 + blockOffset + column)}$${row + 1}`;
+
+/** The table with the block that it reads beside it. */
+function beside(reporting: Reporting, read: (row: number, column: number) => string): Rows {
+  const left = table(reporting, (_, row, column) => read(row, column));
+  const right = block(reporting, "spilled");
+  const width = right[0]!.length - 1;
+  const spill = `${blockColumn}2:${String.fromCharCode(64 + blockOffset + 1 + width)}6`;
+  return Array.from({ length: Math.max(left.length, right.length) }, (_, at): BookCell[] => {
+    const line = Array.from({ length: blockOffset }, (_none, column): BookCell => left[at]?.[column] ?? null);
+    const moved = (right[at] ?? []).map((cell): BookCell =>
+      cell !== null && typeof cell === "object" && "spill" in cell ? { ...cell, spill } : cell,
+    );
+    return [...line, ...moved];
+  });
 }
 
 /** A line for each driver, each number taken out of LINEST, ratios and p-values worked out beside. */

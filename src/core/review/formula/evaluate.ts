@@ -1,7 +1,10 @@
-import { numberAt, sheetNamed } from "../cellsOfBook.ts";
+import type { SheetArea } from "../../table/address.ts";
+import { type CellPlace, numberAt, sheetNamed } from "../cellsOfBook.ts";
 import { combined, quantityIn, scaled } from "./arithmetic.ts";
 import { type Meant, type Scope, placeOf, standsFor } from "./places.ts";
+import { cellOf, isCounting, numberIn } from "./numbersIn.ts";
 import { type Regression, regressionOf } from "./regression.ts";
+import type { CellResult } from "./results.ts";
 import { valuesOfCalls } from "./regressionValues.ts";
 import { type RegressionFunction, regressionFunctions } from "./telling.ts";
 import type { Formula } from "./tree.ts";
@@ -36,12 +39,8 @@ export function evaluate(formula: Formula, scope: Scope, met: Met): Value {
       return { kind: "block", rows: formula.rows.map((row) => row.map((one) => evaluate(one, scope, met))) };
     case "call":
       return called(formula, scope, met);
-    case "name":
-    case "cells":
-    case "structured":
-      return atPlace(formula, scope, met);
     default:
-      return unknown(whyUnread.goesIntoArithmetic);
+      return atPlace(formula, scope, met);
   }
 }
 
@@ -49,8 +48,9 @@ function operated({ sign, left, right }: Extract<Formula, { kind: "operation" }>
   return combined(sign, evaluate(left, scope, met), evaluate(right, scope, met));
 }
 
-/** A name may stand for a formula; cells stand for the number in them. */
+/** A name may stand for a formula; cells stand for the number in them; words stand for nothing. */
 function atPlace(formula: Formula, scope: Scope, met: Met): Value {
+  if (formula.kind === "spill") return spilled(formula.of, scope, met);
   const place = placeOf(formula, scope);
   if (place === null || !place.ok) {
     const meant = formula.kind === "name" ? standsFor(formula, scope) : null;
@@ -58,10 +58,40 @@ function atPlace(formula: Formula, scope: Scope, met: Met): Value {
       ? evaluate(meant.value.formula, meant.value.scope, met)
       : unknown(whyUnread.goesIntoArithmetic);
   }
-  const { sheet: name, row, column, rows, columns } = place.value;
-  const sheet = sheetNamed(scope.book, name);
-  const number = sheet === null || rows * columns !== 1 ? null : numberAt({ sheet, row, column });
-  return number === null ? unknown(whyUnread.goesIntoArithmetic) : known(number);
+  return inCells(place.value, scope, met);
+}
+
+/** More cells than these are data, not results. */
+const mostCells = 5000;
+
+/** What stands in cells: the results of regressions as such, other numbers as they are. */
+function inCells(area: SheetArea, { book, results }: Scope, met: Met): Value {
+  const sheet = sheetNamed(book, area.sheet);
+  const { row, column, rows, columns } = area;
+  if (sheet === null || rows * columns > mostCells) return unknown(whyUnread.goesIntoArithmetic);
+  const valueAt = (place: CellPlace): Value => {
+    const result = results(place);
+    if (result !== null) return meeting(met, result).value;
+    const number = numberAt(place);
+    return number === null ? unknown(whyUnread.goesIntoArithmetic) : known(number);
+  };
+  if (rows * columns === 1) return valueAt({ sheet, row, column });
+  const all = Array.from({ length: rows }, (_, down) =>
+    Array.from({ length: columns }, (_, across) => valueAt({ sheet, row: row + down, column: column + across })),
+  );
+  return { kind: "block", rows: all };
+}
+
+/** "A1#": all that the formula of a cell shows. */
+function spilled(of: Formula, scope: Scope, met: Met): Value {
+  const place = cellOf(of, scope);
+  const result = place === null ? null : scope.results(place);
+  return result?.isCorner === true ? meeting(met, result).whole : unknown(whyUnread.goesIntoArithmetic);
+}
+
+function meeting(met: Met, result: CellResult): CellResult {
+  met.regressions.push(...result.met.regressions);
+  return result;
 }
 
 type Call = Extract<Formula, { kind: "call" }>;
@@ -72,6 +102,10 @@ function called(call: Call, scope: Scope, met: Met): Value {
   const { name, arguments: given } = call;
   if (isRegressionFunction(name)) return regressed(name, given, { scope, met });
   if (name === "LET") return letIn(given, scope, met);
+  if (isCounting(name)) {
+    const number = numberIn(call, scope);
+    return number === null ? unknown(whyUnread.computedPlace(name)) : known(number);
+  }
   const values = given.map((one) => (one.kind === "missing" ? undefined : evaluate(one, scope, met)));
   const value = valueFunctions[name]?.(values);
   return value ?? unknown(whyUnread.goesInto(name));

@@ -142,10 +142,16 @@ function call(reader: Reader, name: string): Formula | null {
     const argument = argumentAt(reader);
     if (argument === null) return null;
     given.push(argument);
-    if (take(reader, ")")) return { kind: "call", name, arguments: given };
+    if (take(reader, ")")) return calling(name, given);
     if (!take(reader, ",")) return null;
   }
 }
+
+/** Files write "A1#" as a function of the cell. */
+const calling = (name: string, given: readonly Formula[]): Formula =>
+  name === "ANCHORARRAY" && given.length === 1
+    ? { kind: "spill", of: given[0]! }
+    : { kind: "call", name, arguments: given };
 
 function argumentAt(reader: Reader): Formula | null {
   const sign = signAt(reader);

@@ -2,7 +2,9 @@ import { addressOf, type SheetArea } from "../../table/address.ts";
 import type { Book, BookSheet } from "../book.ts";
 import { sheetNamed, usedPart } from "../cellsOfBook.ts";
 import { parseFormula } from "./parse.ts";
+import { numberIn, placeAmong } from "./numbersIn.ts";
 import { type Reading, read, unread } from "./reading.ts";
+import type { Results } from "./results.ts";
 import { isTable, tableArea } from "./tableParts.ts";
 import type { Formula } from "./tree.ts";
 import { whyUnread } from "./whyUnread.ts";
@@ -17,6 +19,8 @@ export interface Scope {
   readonly given: ReadonlyMap<string, Meant>;
   /** How many names have been followed on the way here. */
   readonly followed: number;
+  /** What other cells show of regressions. */
+  readonly results: Results;
 }
 
 /** A formula, and where it is at home. */
@@ -107,9 +111,10 @@ function calledPlace({ name, arguments: given }: Call, scope: Scope): Reading<Sh
       if (which?.kind === "array") return null;
       return chosen === undefined ? unread(whyUnread.computedPlace(name)) : placeOf(chosen, scope);
     }
+    case "XLOOKUP":
+      return lookedUp(given, scope);
     case "OFFSET":
     case "INDIRECT":
-    case "XLOOKUP":
       return unread(whyUnread.computedPlace(name));
     default:
       return null;
@@ -121,7 +126,7 @@ function indexed([from, ...at]: readonly Formula[], scope: Scope): Reading<Sheet
   const range = from === undefined ? null : placeOf(from, scope);
   if (range === null || !range.ok) return range;
   const area = range.value;
-  const [first, second] = at.map(positionOf);
+  const [first, second] = at.map((one) => positionOf(one, scope));
   if (first === undefined || Number.isNaN(first) || Number.isNaN(second)) {
     return unread(whyUnread.computedPlace("INDEX"));
   }
@@ -130,9 +135,20 @@ function indexed([from, ...at]: readonly Formula[], scope: Scope): Reading<Sheet
   return part === null ? unread(whyUnread.noCells(`INDEX of ${addressOf(area)}`)) : read(part);
 }
 
-/** 0 stands for all; no number where it is worked out at calculation. */
-const positionOf = (given: Formula): number =>
-  given.kind === "number" ? given.value : given.kind === "missing" ? 0 : NaN;
+/** 0 stands for all; no number where it is worked out in a way that cannot be followed. */
+const positionOf = (given: Formula, scope: Scope): number =>
+  given.kind === "missing" ? 0 : Math.trunc(numberIn(given, scope) ?? NaN);
+
+/** XLOOKUP(heading, headings, block): the column below a heading, or the row beside a name. */
+function lookedUp([sought, among, from]: readonly Formula[], scope: Scope): Reading<SheetArea> {
+  const lines = among === undefined ? null : placeOf(among, scope);
+  const range = from === undefined ? null : placeOf(from, scope);
+  const at = placeAmong(sought, among, scope);
+  if (lines?.ok !== true || range?.ok !== true || at === null) return unread(whyUnread.computedPlace("XLOOKUP"));
+  const across = lines.value.rows === 1;
+  const part = across ? partOf(range.value, 0, at) : partOf(range.value, at, 0);
+  return part === null ? unread(whyUnread.computedPlace("XLOOKUP")) : read(part);
+}
 
 function partOf(area: SheetArea, row: number, column: number): SheetArea | null {
   if (row < 0 || column < 0 || row > area.rows || column > area.columns) return null;

@@ -2,7 +2,8 @@ import { type CellPlace, numberAt, sheetNamed } from "../cellsOfBook.ts";
 import type { Quantity } from "../claim.ts";
 import { formOf } from "../forms.ts";
 import { type Ingredient, constantOf, ingredientsOf } from "./ingredients.ts";
-import { type Scope, placeOf } from "./places.ts";
+import { numberIn } from "./numbersIn.ts";
+import type { Scope } from "./places.ts";
 import { type Regression, type UsedLine, linesIn, truthOf } from "./regression.ts";
 import type { RegressionFunction } from "./telling.ts";
 import type { Formula } from "./tree.ts";
@@ -98,7 +99,7 @@ function predictions(regression: Regression, rows: Formula | undefined, scope: S
 /** Of one driver, at numbers that stand in the formula or at one in a cell; null where the rows are cells. */
 function typedPredictions(regression: Regression, given: Formula, scope: Scope): Value | null {
   if (given.kind !== "array") {
-    const single = numberOf(given, scope);
+    const single = numberIn(given, scope);
     return single === null ? null : prediction(regression, [single]);
   }
   const at = (one: Formula): Value => {
@@ -106,16 +107,6 @@ function typedPredictions(regression: Regression, given: Formula, scope: Scope):
     return number === null ? unknown(whyUnread.computedPrediction) : prediction(regression, [number]);
   };
   return { kind: "block", rows: given.rows.map((row) => row.map(at)) };
-}
-
-/** A number typed into the formula or standing in the one cell it names. */
-function numberOf(formula: Formula, scope: Scope): number | null {
-  const typed = constantOf(formula);
-  if (typed !== null) return typed;
-  const place = placeOf(formula, scope);
-  if (place?.ok !== true || place.value.rows * place.value.columns !== 1) return null;
-  const sheet = sheetNamed(scope.book, place.value.sheet);
-  return sheet === null ? null : numberAt({ sheet, row: place.value.row, column: place.value.column });
 }
 
 function linesOf(rows: Formula, { drivers, outcome }: Regression, scope: Scope): readonly UsedLine[] | null {

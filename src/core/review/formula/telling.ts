@@ -39,8 +39,14 @@ export function isTelling(names: readonly BookName[]): (formula: string) => bool
 /** Tells the formulas that call a regression function, or a name that stands for one. */
 export function showsRegression(names: readonly BookName[]): (formula: string) => boolean {
   const standing = names.filter(({ refersTo }) => isRegressionFormula(refersTo)).map(({ name }) => name);
-  const named = standing.length === 0 ? null : new RegExp(mentioned(standing), "iu");
-  return (formula) => isRegressionFormula(formula) || named?.test(formula) === true;
+  const isNamed = mentions(standing);
+  return (formula) => isRegressionFormula(formula) || isNamed(formula);
+}
+
+/** Tells the formulas that speak of one of some names. */
+export function mentions(names: readonly string[]): (formula: string) => boolean {
+  const named = names.length === 0 ? null : new RegExp(mentioned(names), "iu");
+  return (formula) => named?.test(formula) === true;
 }
 
 const mentioned = (names: readonly string[]): string =>

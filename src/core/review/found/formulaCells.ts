@@ -4,6 +4,7 @@ import type { BookReview } from "../claimReview.ts";
 import { type Met, evaluate, nothingMet, quantitiesIn } from "../formula/evaluate.ts";
 import { parseFormula } from "../formula/parse.ts";
 import type { Regression } from "../formula/regression.ts";
+import { type Results, noResults } from "../formula/results.ts";
 import { type RegressionFunction, showsRegression } from "../formula/telling.ts";
 import type { Measure, Value } from "../formula/values.ts";
 import { whyUnread } from "../formula/whyUnread.ts";
@@ -16,6 +17,8 @@ export interface FormulaCell {
   readonly measure: Measure;
   readonly formula: string;
   readonly functions: readonly RegressionFunction[];
+  /** Whether the formula reads the result in other cells and makes no regression itself. */
+  readonly isReader: boolean;
 }
 
 /** What the formulas of a sheet report, and which of them could not be read. */
@@ -26,7 +29,7 @@ export interface FormulasRead {
   readonly unread: BookReview["unread"];
 }
 
-export function readFormulas(sheet: BookSheet, book: Book): FormulasRead {
+export function readFormulas(sheet: BookSheet, { book, results }: Ground): FormulasRead {
   const isTold = showsRegression(book.names);
   const cells: FormulaCell[] = [];
   const met: { regression: Regression; cell: string }[] = [];
@@ -37,25 +40,53 @@ export function readFormulas(sheet: BookSheet, book: Book): FormulasRead {
   )) {
     const place = { sheet, row: entered.row, column: entered.column };
     const seen = nothingMet();
-    const value = valueOf(entered, { place, book, met: seen });
+    const value = ownValue(entered, { place, book, met: seen, results });
     const found = value === null ? [] : cellsOf(entered, value, { sheet, met: seen });
     cells.push(...found);
     met.push(...seen.regressions.map(({ regression }) => ({ regression, cell: addressAt(place) })));
     const why = found.length > 0 ? null : whyNothing(value, { place, book, met: seen });
     if (why !== null) unread.push({ cell: addressAt(place), why });
   }
-  return { cells, met, unread };
+  return { cells: [...cells, ...readersOf(sheet, results)], met, unread };
 }
 
-interface At {
-  readonly place: CellPlace;
+/** A workbook, and what its cells show of regressions. */
+export interface Ground {
   readonly book: Book;
+  readonly results: Results;
+}
+
+interface At extends Ground {
+  readonly place: CellPlace;
   readonly met: Met;
 }
 
-function valueOf({ formula }: BookFormula, { place, book, met }: At): Value | null {
+/** Results of other cells are followed where that tells more than the numbers in them. */
+function ownValue({ formula }: BookFormula, { place, book, met, results }: At): Value | null {
   const parsed = parseFormula(formula);
-  return parsed === null ? null : evaluate(parsed, { ...place, book, given: new Map(), followed: 0 }, met);
+  if (parsed === null) return null;
+  const scope = { ...place, book, given: new Map(), followed: 0 };
+  const followed = nothingMet();
+  const value = evaluate(parsed, { ...scope, results }, followed);
+  if (value.kind === "unknown") return evaluate(parsed, { ...scope, results: noResults }, met);
+  met.regressions.push(...followed.regressions);
+  met.unread.push(...followed.unread);
+  return value;
+}
+
+/** The cells of formulas that read results in other cells; of those that cannot be followed nothing is missed. */
+const readersOf = (sheet: BookSheet, results: Results): FormulaCell[] =>
+  arraysAmong(sheet, sheet.readers).flatMap((entered) => {
+    const result = results({ sheet, row: entered.row, column: entered.column });
+    if (result === null) return [];
+    const cells = cellsOf(entered, result.whole, { sheet, met: result.met });
+    return cells.filter(({ measure }) => isReport(measure)).map((cell) => ({ ...cell, isReader: true }));
+  });
+
+/** A copy, or a figure worked out from results; a multiple of a coefficient is a use that is made of it. */
+function isReport({ quantity: { kind }, steps }: Measure): boolean {
+  const isFigure = kind === "ratio" || kind === "p-value" || kind === "low" || kind === "high" || kind === "prediction";
+  return isFigure || steps.every((step) => step.kind === "rounded");
 }
 
 interface On {
@@ -72,13 +103,13 @@ function cellsOf(entered: BookFormula, value: Value, { sheet, met }: On): Formul
       line.slice(0, entered.columns).flatMap((measure, column) => {
         const place = { sheet, row: entered.row + row, column: entered.column + column };
         const shows = measure !== null && numberAt(place) !== null;
-        return shows ? [{ place, measure, formula: entered.formula, functions }] : [];
+        return shows ? [{ place, measure, formula: entered.formula, functions, isReader: false }] : [];
       }),
     );
 }
 
 /** Why a formula reports nothing; null where no regression was met in it after all. */
-function whyNothing(value: Value | null, { place, book, met }: At): string | null {
+function whyNothing(value: Value | null, { place, book, met }: Omit<At, "results">): string | null {
   if (value === null) return whyUnread.notAFormula;
   const [why] = met.unread;
   if (why !== undefined) return why;

@@ -88,14 +88,16 @@ const turnedAbout = (regression: Regression): Regression => ({
 export function claimOf({ aligned, regression, cells }: Gathered): Claim | null {
   const reported = limited(cells.map(({ place, measure }) => reportedIn(place, measure)).filter((one) => one !== null));
   if (reported.length === 0) return null;
+  const own = cells.filter(({ isReader }) => !isReader);
+  const makers = own.length === 0 ? cells : own;
   const forms = [regression.outcome, ...regression.drivers].map(({ form }) => form);
   const [outcome, ...drivers] = aligned.map((line, index) => claimedLine(line, forms[index]!));
   return {
-    place: placeOfCells(cells),
+    place: placeOfCells(makers),
     origin: {
       kind: "formula",
       functions: [...new Set(cells.flatMap(({ functions }) => functions))],
-      formula: cells[0]!.formula,
+      formula: makers[0]!.formula,
     },
     outcome: outcome!,
     drivers,

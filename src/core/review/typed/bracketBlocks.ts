@@ -1,5 +1,5 @@
 import type { SheetArea } from "../../table/address.ts";
-import { type CellPlace, isTextAt, kindAt, wordsAt } from "../cellsOfBook.ts";
+import { type CellPlace, isTextAt, kindAt, overlap, wordsAt } from "../cellsOfBook.ts";
 import { cellKind } from "../../table/cells.ts";
 import { shownNumberAt } from "../found/shownNumber.ts";
 import { type BracketNote, type Brackets, bracketNotes } from "./bracketNotes.ts";
@@ -57,12 +57,6 @@ const areaOf = ({ sheet, names, columns, first, last }: BracketTable): SheetArea
     { sheet, row: first, column: names },
     { sheet, row: last + 1, column: columns.at(-1)! },
   ]);
-
-export const overlap = (one: SheetArea, other: SheetArea): boolean =>
-  one.row < other.row + other.rows &&
-  other.row < one.row + one.rows &&
-  one.column < other.column + other.columns &&
-  other.column < one.column + one.columns;
 
 type Spot = Pick<CellPlace, "row" | "column">;
 

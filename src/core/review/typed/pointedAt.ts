@@ -6,6 +6,7 @@ import { plainHeading } from "../../table/headingRow.ts";
 import { isTextAt, sheetNamed, usedPart } from "../cellsOfBook.ts";
 import { parseFormula } from "../formula/parse.ts";
 import { placeOf } from "../formula/places.ts";
+import { noResults } from "../formula/results.ts";
 import { linesIn } from "../formula/regression.ts";
 import type { Formula } from "../formula/tree.ts";
 import { type Stretch, placeAlong } from "../found/claimedLines.ts";
@@ -18,7 +19,10 @@ export function areaCalled(book: Book, text: string): Result<SheetArea> {
   const [home] = book.sheets;
   const formula = parseFormula(text);
   if (home === undefined || formula === null) return failure({ code: "bad-address", address: text });
-  const place = placeOf(formula, { book, sheet: home, row: 0, column: 0, given: new Map(), followed: 0 });
+  const place = placeOf(formula, {
+    ...{ book, sheet: home, row: 0, column: 0 },
+    ...{ given: new Map(), followed: 0, results: noResults },
+  });
   if (place?.ok === true) return success(place.value);
   const named = placeNamed(formula);
   if (named === null) return failure({ code: "bad-address", address: text });

@@ -1,9 +1,9 @@
 import type { SheetArea } from "../../table/address.ts";
 import type { BookSheet } from "../book.ts";
-import { type CellPlace, isTextAt, wordsAt } from "../cellsOfBook.ts";
+import { type CellPlace, isTextAt, overlap, wordsAt } from "../cellsOfBook.ts";
 import { shownNumberAt } from "../found/shownNumber.ts";
 import type { Brackets } from "./bracketNotes.ts";
-import { bracketBlocks, overlap } from "./bracketBlocks.ts";
+import { bracketBlocks } from "./bracketBlocks.ts";
 import type { InBrackets } from "./inBrackets.ts";
 import { type Label, labelsOf } from "./labels.ts";
 import { type TermWord, isConstantName, summaryWordIn } from "./reportWords.ts";

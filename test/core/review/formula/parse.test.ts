@@ -167,6 +167,7 @@ const bookWith = (formulas: readonly string[]): Book => ({
         rows: 1 + (row % 3),
         columns: 1 + (row % 2),
       })),
+      readers: [],
       calculated: [null, null, null, new Uint8Array(12).fill(1)],
       formats: [],
       tables: [

@@ -14,6 +14,7 @@ const sheetWith = (value: number, format: string | null): BookSheet => ({
   hiddenRows: [],
   hiddenColumns: [],
   formulas: [],
+  readers: [],
   calculated: [null],
   formats: format === null ? [] : [{ firstRow: 4, rowCount: 1, indices: new Uint16Array(1), formats: [format] }],
   tables: [],
