@@ -17,7 +17,7 @@ export interface Effect {
 export interface EffectWords {
   readonly up: Direction;
   readonly down: Direction;
-  /** From one end of an interval to the other, each with its direction: "from 4.1 fewer to 1.6 more repairs a month". */
+  /** From one end of an interval to the other, each with its direction: "anything from 4.1 fewer to 1.6 more repairs a month". */
   readonly span: (from: string, to: string) => string;
 }
 
@@ -73,7 +73,7 @@ function counted(what: string, [more, less]: readonly [string, string]): EffectW
     short: (amount) => `${amount} ${word}`,
     near: (amount) => (word.startsWith("%") ? `${amount} %` : amount),
   });
-  return { up: direction(more), down: direction(less), span: (from, to) => `from ${from} to ${to} ${what}` };
+  return { up: direction(more), down: direction(less), span: (from, to) => `anything from ${from} to ${to} ${what}` };
 }
 
 /** Amounts of a column whose unit is not known: "Repairs lower by 3.1". */
@@ -83,7 +83,11 @@ function measured(what: string): EffectWords {
     short: (amount) => `${amount} ${word}`,
     near: (amount) => amount,
   });
-  return { up: direction("higher"), down: direction("lower"), span: (from, to) => `${what} from ${from} to ${to}` };
+  return {
+    up: direction("higher"),
+    down: direction("lower"),
+    span: (from, to) => `${what} anywhere from ${from} to ${to}`,
+  };
 }
 
 function stepOf(meaning: TermMeaning, units: EffectSubject["units"]): string {

@@ -32,14 +32,20 @@ export function errorsInWords(errors: ErrorsChoice, lags: number | null): string
 }
 
 /** What was fitted, and how much of the outcome the drivers account for. */
-export function openingSentence({ outcome, observations, terms, fit, rows }: Facts): string {
+export function openingSentence(facts: Facts): string {
+  const drivers = facts.terms.filter((term) => term !== "constant");
+  return `${facts.outcome} explained by ${driversInWords(drivers)} ${scopeInWords(facts)}`;
+}
+
+/** How much of the outcome the drivers account for, over which rows: "over 140 separate cases: together they account for ...". */
+export function scopeInWords({ outcome, observations, terms, fit, rows }: Facts): string {
   const drivers = terms.filter((term) => term !== "constant");
   const share = shareInWords(fit.rSquared);
   const measure = fit.uncentred
     ? `R-squared about zero is ${share} (there is no constant)`
     : `together they account for ${share} of the variation in ${outcome}`;
   const subject = drivers.length === 1 ? measure.replace("together they account", "it accounts") : measure;
-  return `${outcome} explained by ${driversInWords(drivers)}, ${rowsInWords(rows, observations)}: ${subject}.`;
+  return `over ${rowsInWords(rows, observations)}: ${subject}.`;
 }
 
 function rowsInWords(rows: RowsSummary, observations: number): string {
@@ -99,7 +105,7 @@ function aboutZero(spoken: Spoken, differs: boolean): string {
   const p = pValueInWords(driver.pValue, level);
   const end = (value: number): string => (value < 0 ? words.down : words.up).short(text(value));
   const span = words.span(end(low), end(high));
-  return `${driver.term}: no effect can be shown (${p}); ${span} is compatible with the data (${confidenceInWords(level)}).`;
+  return `${driver.term}: no effect can be shown (${p}). ${effect.step} could go with ${span} (${confidenceInWords(level)}).`;
 }
 
 function aboutValue({ driver, level }: Spoken, differs: boolean): string {

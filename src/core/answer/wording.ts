@@ -20,13 +20,21 @@ export function decimalsFor(halfWidth: number): number {
 }
 
 const mostDecimals = 9;
+/** Numbers outside of these are written with a power of ten, as a spreadsheet shows them: zeros beyond hide the figure. */
+const plain = { smallest: 1e-4, largest: 1e15 } as const;
+/** As many as a number of double precision always holds. */
+const mostDigits = 15;
 
-/** A number with so many decimals, thousands apart by commas: 12,300 at -2, 0.31 at 2. */
+/** A number with so many decimals, thousands apart by commas: 12,300 at -2, 0.31 at 2, 2.51E+26 at -24. */
 export function numberInWords(value: number, decimals: number): string {
-  if (decimals > mostDecimals) return value.toExponential(1);
+  const size = Math.abs(value);
+  if (size >= plain.largest || (decimals > mostDecimals && size > 0 && size < plain.smallest)) {
+    const digits = Math.floor(Math.log10(size)) + decimals;
+    return value.toExponential(Math.min(Math.max(digits, 0), mostDigits - 1)).replace("e", "E");
+  }
   const step = 10 ** Math.min(decimals, 0);
   const rounded = decimals < 0 ? Math.round(value * step) / step : value;
-  const shown = Math.max(decimals, 0);
+  const shown = Math.min(Math.max(decimals, 0), mostDecimals);
   const text = rounded.toLocaleString("en-US", { minimumFractionDigits: shown, maximumFractionDigits: shown });
   return /^-0(\.0*)?$/.test(text) ? text.slice(1) : text;
 }

@@ -111,9 +111,19 @@ describe("what a coefficient goes with, in words", () => {
   });
 
   it.each([
-    [{ Repairs: "repairs a month" }, none, 1, "from 4.1 fewer to 1.6 more repairs a month is compatible"],
-    [{}, { kind: "logarithm" }, 0.01, "from 4.0 % less to 1.6 % more Repairs is compatible"],
-    [{}, { kind: "change", periods: 1 }, 1, "the change of Repairs from 4.1 lower to 1.6 higher is compatible"],
+    [
+      { Repairs: "repairs a month" },
+      none,
+      1,
+      "could go with anything from 4.1 fewer to 1.6 more repairs a month (95 %)",
+    ],
+    [{}, { kind: "logarithm" }, 0.01, "could go with anything from 4.0 % less to 1.6 % more Repairs (95 %)"],
+    [
+      {},
+      { kind: "change", periods: 1 },
+      1,
+      "could go with the change of Repairs anywhere from 4.1 lower to 1.6 higher (95 %)",
+    ],
   ] as const)("says what remains possible in the outcome's own terms", (units, transform, scale, words) => {
     const sentence = said({
       meaning: numberOf("Price"),
@@ -127,7 +137,7 @@ describe("what a coefficient goes with, in words", () => {
   it("says that nothing can be shown, and what remains possible", () => {
     const sentence = said({ meaning: numberOf("Price"), figures: [-1.2, -4.1, 1.6, 0.36] });
     expect(sentence).toContain(
-      "Price: no effect can be shown (p = 0.36); Repairs from 4.1 lower to 1.6 higher is compatible with the data (95 %).",
+      "Price: no effect can be shown (p = 0.36). Price higher by 1 could go with Repairs anywhere from 4.1 lower to 1.6 higher (95 %).",
     );
   });
 
