@@ -2,7 +2,7 @@ import type { Question } from "../core/answer/question.ts";
 import { type SettingPair, settingsSaid } from "../core/answer/settingsSaid.ts";
 import { type SheetArea, columnLetters, quoteSheet } from "../core/table/address.ts";
 import type { Column, Source } from "../core/table/source.ts";
-import type { SheetFacts } from "../sheet/howMadeSection.ts";
+import type { SheetFacts } from "../sheet/facts.ts";
 import { type TableInHand, columnsOfTable } from "./tableInHand.ts";
 
 export interface Made {

@@ -12,8 +12,10 @@ import { type Called, inquiries } from "./inquiries.ts";
 import { onceFor, readOnce } from "./once.ts";
 import { type CalledData, type readData } from "./readData.ts";
 import { readSettingsArgument } from "./readSettings.ts";
-import type { Answering } from "./register.ts";
-import { type CallValues, plainReplies, replies } from "./replies.ts";
+import { type CallValues, type Reply, plainReplies, replies } from "./replies.ts";
+
+/** How one call is computed: what to show for the function, from the values given, until the signal is raised. */
+export type Answering = (id: FunctionId, values: CallValues, signal: AbortSignal) => Promise<Reply>;
 
 /** More regressions than a workbook has on its busiest sheet; an answer takes some 100 kB, a finding up to 1.5 MB. */
 const mostAnswers = 100;

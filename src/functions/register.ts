@@ -1,15 +1,12 @@
 import type { Analyst, Inquirer } from "../app/analyst.ts";
 import { withinLimits } from "../app/timeLimit.ts";
 import { success } from "../core/problem/result.ts";
-import { answerer } from "./answerer.ts";
+import { type Answering, answerer } from "./answerer.ts";
 import { type FunctionsRuntime, cellError, notAvailable, ownFault } from "./cellErrors.ts";
 import { type FunctionId, type FunctionSpec, functionTable } from "./functionTable.ts";
 import { type Leaving, leave } from "./leave.ts";
 import type { BlankGuard } from "./blankGuard.ts";
-import type { CallValues, Reply } from "./replies.ts";
-
-/** How one call is computed: what to show for the function, from the values given, until the signal is raised. */
-export type Answering = (id: FunctionId, values: CallValues, signal: AbortSignal) => Promise<Reply>;
+import type { Reply } from "./replies.ts";
 
 /** A call that has no answer by then ends with an error: a promise that never settles shows #BUSY! for ever. */
 const secondsPerCall = 120;

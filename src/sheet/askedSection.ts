@@ -4,7 +4,7 @@ import type { Grid } from "../core/answer/tables.ts";
 import { listInWords } from "../core/answer/wording.ts";
 import { page, wrappedHeight } from "./columns.ts";
 import { figureFormat, formatFor, numberHeadingFormat, pValueFormat, ratioFormat } from "./numberFormats.ts";
-import { headingFormat } from "./plainWordsSection.ts";
+import { headingFormat } from "./pageFormats.ts";
 import type { PlanFormat } from "./plan.ts";
 import { type Section, cellOf, section, text } from "./section.ts";
 

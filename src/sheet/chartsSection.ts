@@ -3,7 +3,7 @@ import type { PlacedChart } from "./chartData.ts";
 import { intervalChart } from "./intervalChart.ts";
 import { page } from "./columns.ts";
 import type { Area } from "./plan.ts";
-import { headingFormat } from "./plainWordsSection.ts";
+import { headingFormat } from "./pageFormats.ts";
 import { overFittedChart, overTimeChart } from "./residualCharts.ts";
 import { type Section, section, text } from "./section.ts";
 

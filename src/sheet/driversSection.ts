@@ -3,7 +3,7 @@ import { answerTable } from "../core/answer/tables.ts";
 import { page, wrappedHeight } from "./columns.ts";
 import type { Figures } from "./figures.ts";
 import { formatFor, numberHeadingFormat, pValueFormat, ratioFormat } from "./numberFormats.ts";
-import { headingFormat } from "./plainWordsSection.ts";
+import { headingFormat } from "./pageFormats.ts";
 import type { PlanFormat } from "./plan.ts";
 import { type Section, section, text } from "./section.ts";
 

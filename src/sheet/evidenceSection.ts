@@ -3,7 +3,7 @@ import { evidenceTable } from "../core/answer/tables.ts";
 import { page, wrappedHeight } from "./columns.ts";
 import type { Figures } from "./figures.ts";
 import { figureFormat, numberHeadingFormat, pValueFormat } from "./numberFormats.ts";
-import { headingFormat } from "./plainWordsSection.ts";
+import { headingFormat } from "./pageFormats.ts";
 import type { PlanCell, PlanFormat } from "./plan.ts";
 import { type Section, section, text } from "./section.ts";
 

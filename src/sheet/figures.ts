@@ -2,7 +2,7 @@ import type { Answer } from "../core/answer/answer.ts";
 import { type Grid, answerTable, choiceText, evidenceTable, verdictLines } from "../core/answer/tables.ts";
 import { columnLetters } from "../core/table/address.ts";
 import { liveColumn } from "./columns.ts";
-import type { SourceRanges } from "./howMadeSection.ts";
+import type { SourceRanges } from "./facts.ts";
 import type { PlanBlock, PlanCell, PlanFormat } from "./plan.ts";
 import { cellOf, formula, text } from "./section.ts";
 

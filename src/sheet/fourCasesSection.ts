@@ -2,7 +2,7 @@ import type { Answer } from "../core/answer/answer.ts";
 import { page, wrappedHeight } from "./columns.ts";
 import type { Figures } from "./figures.ts";
 import { pValueFormat } from "./numberFormats.ts";
-import { headingFormat } from "./plainWordsSection.ts";
+import { headingFormat } from "./pageFormats.ts";
 import type { PlanCell, PlanFormat } from "./plan.ts";
 import { type Section, section, text } from "./section.ts";
 

@@ -1,7 +1,7 @@
 import type { Answer } from "../core/answer/answer.ts";
 import { page, wrappedHeight } from "./columns.ts";
 import { formatFor, numberHeadingFormat } from "./numberFormats.ts";
-import { headingFormat } from "./plainWordsSection.ts";
+import { headingFormat } from "./pageFormats.ts";
 import type { PlanCell, PlanFormat, PlanLink } from "./plan.ts";
 import { type Section, number, section, text } from "./section.ts";
 

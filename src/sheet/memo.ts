@@ -5,7 +5,7 @@ import { askedSentences } from "../core/answer/askedWords.ts";
 import { findingInWords } from "../core/answer/findings.ts";
 import { answerTable, choiceText } from "../core/answer/tables.ts";
 import { decimalsFor, numberInWords, pValueInWords } from "../core/answer/wording.ts";
-import type { SheetFacts } from "./howMadeSection.ts";
+import type { SheetFacts } from "./facts.ts";
 import { cautionLine } from "./plainWordsSection.ts";
 
 type Part = readonly [heading: string, lines: readonly string[]];

@@ -1,8 +1,9 @@
 import type { Answer } from "../core/answer/answer.ts";
 import { verdictLines } from "../core/answer/tables.ts";
-import { page, wrappedHeight } from "./columns.ts";
+import { wrappedHeight } from "./columns.ts";
 import type { Figures } from "./figures.ts";
-import type { SheetFacts } from "./howMadeSection.ts";
+import type { SheetFacts } from "./facts.ts";
+import { acrossPage } from "./pageFormats.ts";
 import type { PlanFormat } from "./plan.ts";
 import { type Section, section, text } from "./section.ts";
 
@@ -34,11 +35,6 @@ export const titleSection = (answer: Answer, { date, version }: SheetFacts, { no
     ],
   );
 
-const acrossPage = (row: number, style: NonNullable<PlanFormat["style"]>, rows = 1): PlanFormat => ({
-  area: { row, column: page.first, rows, columns: page.columns },
-  style,
-});
-
 /** Lines kept free below a live verdict, in case new figures call for another sentence. */
 const spareLines = 2;
 
@@ -55,5 +51,3 @@ export function verdictSection(answer: Answer, figures: Figures): Section {
   }));
   return section([[text("In plain words")], ...rows], [acrossPage(0, "heading"), ...formats]);
 }
-
-export const headingFormat = (row: number): PlanFormat => acrossPage(row, "heading");

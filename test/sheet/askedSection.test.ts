@@ -4,7 +4,7 @@ import type { Answer } from "../../src/core/answer/answer.ts";
 import { defaultOptions } from "../../src/core/answer/options.ts";
 import { planAnswer } from "../../src/sheet/answerSheet.ts";
 import { askedSection } from "../../src/sheet/askedSection.ts";
-import type { SheetFacts } from "../../src/sheet/howMadeSection.ts";
+import type { SheetFacts } from "../../src/sheet/facts.ts";
 import { memoOf } from "../../src/sheet/memo.ts";
 import type { PlanCell } from "../../src/sheet/plan.ts";
 import { monthsQuestion } from "../support/answersOfMonths.ts";

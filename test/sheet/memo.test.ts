@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import type { SheetFacts } from "../../src/sheet/howMadeSection.ts";
+import type { SheetFacts } from "../../src/sheet/facts.ts";
 import { memoOf } from "../../src/sheet/memo.ts";
 import { cautionLine } from "../../src/sheet/plainWordsSection.ts";
 import { answerFixture } from "../support/answerFixture.ts";

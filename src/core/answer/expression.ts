@@ -3,7 +3,7 @@ import type { Side } from "../inference/ratioLaw.ts";
 import { nearestName } from "../problem/nearestName.ts";
 import { type Result, failure, success } from "../problem/result.ts";
 import { type Arithmetic, arithmeticOf } from "./arithmetic.ts";
-import { type Token, tokensOf } from "./expressionTokens.ts";
+import { type TermName, type Token, tokensOf } from "./expressionTokens.ts";
 
 /** A number made of the coefficients, above / below, and the value that it is held against. */
 export interface Expression {
@@ -13,12 +13,6 @@ export interface Expression {
   readonly below: Combination | null;
   readonly against: number;
   readonly side: Side;
-}
-
-/** A name that an expression may use, and the coefficient it stands for. */
-export interface TermName {
-  readonly name: string;
-  readonly term: number;
 }
 
 /** The coefficients that an expression may be made of. */

@@ -1,4 +1,8 @@
-import type { TermName } from "./expression.ts";
+/** A name that an expression may use, and the coefficient it stands for. */
+export interface TermName {
+  readonly name: string;
+  readonly term: number;
+}
 
 export type Token =
   | { readonly kind: "term"; readonly term: number }

@@ -1,6 +1,7 @@
 import type { Design } from "../design/design.ts";
 import { type Result, failure, success } from "../problem/result.ts";
-import { type Coefficients, type Expression, type TermName, type Vocabulary, readExpression } from "./expression.ts";
+import { type Coefficients, type Expression, type Vocabulary, readExpression } from "./expression.ts";
+import type { TermName } from "./expressionTokens.ts";
 
 /**
  * Reads what the setting "estimates" asks for.

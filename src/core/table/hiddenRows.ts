@@ -1,13 +1,5 @@
 import { cellKind } from "./cells.ts";
-import type { Column, Source } from "./source.ts";
-
-/** Rows of a source that its sheet does not show: hidden by hand, or filtered away. */
-export interface HiddenRows {
-  /** Counted from 0 at the first row of the data. */
-  readonly rows: readonly number[];
-  /** Whether they were left out because they are hidden; by default they are used like all others. */
-  readonly leftOut: boolean;
-}
+import type { Column, HiddenRows, Source } from "./source.ts";
 
 /** The hidden ones among the rows of the data, given as rows of the sheet; null where there are none. */
 export function hiddenAmong(sheetRows: readonly number[], firstRow: number, rowCount: number): HiddenRows | null {

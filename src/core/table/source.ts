@@ -1,5 +1,4 @@
 import type { CellColumn } from "./cells.ts";
-import type { HiddenRows } from "./hiddenRows.ts";
 
 /** Where a column stands, so that a fault can name its cells. Rows and columns count from 0. */
 export type Place =
@@ -11,6 +10,14 @@ export interface Column {
   readonly name: string;
   readonly place: Place;
   readonly cells: CellColumn;
+}
+
+/** Rows of a source that its sheet does not show: hidden by hand, or filtered away. */
+export interface HiddenRows {
+  /** Counted from 0 at the first row of the data. */
+  readonly rows: readonly number[];
+  /** Whether they were left out because they are hidden; by default they are used like all others. */
+  readonly leftOut: boolean;
 }
 
 /** Columns of equal height that stand side by side: row i of each belongs to the same observation. */

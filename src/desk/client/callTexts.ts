@@ -1,4 +1,4 @@
-import type { CallResult } from "../excel/customFunctions.ts";
+import type { CallResult } from "../excel/host.ts";
 import type { HostEvent } from "../excel/events.ts";
 import { errorMark } from "../workbook/elementTexts.ts";
 import type { Call, CallOutcome } from "../workbook/pendingCalls.ts";

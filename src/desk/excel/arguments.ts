@@ -1,5 +1,6 @@
 import { fault } from "./fault.ts";
-import type { Arguments, Held, States, TypeName } from "./model.ts";
+import type { Held, States, TypeName } from "./held.ts";
+import type { Arguments } from "./model.ts";
 
 const isHeld = (value: unknown): value is Held =>
   typeof value === "object" && value !== null && "type" in value && "state" in value;

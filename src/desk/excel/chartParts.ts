@@ -1,7 +1,8 @@
 import { asFlag, asNumber, asText } from "./arguments.ts";
 import { change } from "./charts.ts";
 import { fault } from "./fault.ts";
-import { hold, type Family, type OnAxis, type OnChart } from "./model.ts";
+import { hold, type OnAxis, type OnChart } from "./held.ts";
+import type { Family } from "./model.ts";
 
 export const chartTitle: Family<OnChart> = {
   read: { Text: ({ chart }) => chart.title.text, Visible: ({ chart }) => chart.title.visible },

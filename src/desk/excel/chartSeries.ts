@@ -3,7 +3,8 @@ import { asFlag, asNumber, asText, integerAt, optionalText, stateAt } from "./ar
 import { change, chartTypeOf, chartTypes, newSeries, typeName } from "./charts.ts";
 import { fault } from "./fault.ts";
 import type { Host } from "./host.ts";
-import { hold, type Arguments, type Family, type Held, type OnChart, type OnSeries } from "./model.ts";
+import { hold, type Held, type OnChart, type OnSeries } from "./held.ts";
+import type { Arguments, Family } from "./model.ts";
 import { colorOf } from "./rangeFormat.ts";
 
 const held = (state: OnChart, series: OnSeries["series"]): Held => hold("ChartSeries", { ...state, series });

@@ -8,7 +8,8 @@ import { asNumber, asText, integerAt, stateAt, textAt } from "./arguments.ts";
 import { fault } from "./fault.ts";
 import { ensureSheet, ensureWritable } from "./guards.ts";
 import type { Host } from "./host.ts";
-import { hold, type Arguments, type Family, type Held, type OnChart, type OnSheet } from "./model.ts";
+import { hold, type Held, type OnChart, type OnSheet } from "./held.ts";
+import type { Arguments, Family } from "./model.ts";
 import { placeOf } from "./rangeShape.ts";
 
 /** The API's chart types that the stand-in draws, as the kinds of its records. */

@@ -1,7 +1,5 @@
+import type { CallResult } from "./host.ts";
 import type { Family } from "./model.ts";
-
-/** One result as the runtime sends it: number of the call, whether it succeeded, value or message, kind of error. */
-export type CallResult = readonly [id: number, succeeded: boolean, value: unknown, error?: unknown];
 
 /** Where the runtime of worksheet functions reports to. */
 export const customFunctions: Family<null> = {

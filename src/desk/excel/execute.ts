@@ -2,7 +2,8 @@ import { flushDrafts } from "../workbook/drafts.ts";
 import { fault, isFault } from "./fault.ts";
 import { families } from "./families.ts";
 import type { Host } from "./host.ts";
-import { hold, type Family, type Held } from "./model.ts";
+import { hold, type Held } from "./held.ts";
+import type { Family } from "./model.ts";
 import { identityOf, query, type Query, type Reading } from "./query.ts";
 
 /** A request of the client: what to do, in order, and how to find the objects it speaks of. */

@@ -9,7 +9,8 @@ import {
   chartSeriesFormat,
 } from "./chartSeries.ts";
 import { customFunctions } from "./customFunctions.ts";
-import type { Family, States } from "./model.ts";
+import type { States } from "./held.ts";
+import type { Family } from "./model.ts";
 import { namedItem, names } from "./names.ts";
 import { range } from "./range.ts";
 import { rangeAreas, rangeCollection, rangeView } from "./rangeAreas.ts";

@@ -1,7 +1,6 @@
 import type { Book } from "../workbook/book.ts";
-import type { CallResult } from "./customFunctions.ts";
 import type { Events } from "./events.ts";
-import type { Held } from "./model.ts";
+import type { Held } from "./held.ts";
 
 /** States of Excel in which it refuses; tests set them. */
 export interface Switches {
@@ -24,6 +23,9 @@ export const calm = (profile: Switches["profile"]): Switches => ({
   profile,
   structureProtected: false,
 });
+
+/** One result as the runtime sends it: number of the call, whether it succeeded, value or message, kind of error. */
+export type CallResult = readonly [id: number, succeeded: boolean, value: unknown, error?: unknown];
 
 /** All that the object model works on. */
 export interface Host {

@@ -4,7 +4,8 @@ import { tableNamed } from "../workbook/tables.ts";
 import { optionalText, textAt } from "./arguments.ts";
 import { fault } from "./fault.ts";
 import type { Host } from "./host.ts";
-import { hold, type Arguments, type Family, type Held, type States } from "./model.ts";
+import { hold, type Held, type States } from "./held.ts";
+import type { Arguments, Family } from "./model.ts";
 
 type Names = States["NamedItemCollection"];
 

@@ -3,7 +3,8 @@ import { areaAt } from "./addresses.ts";
 import { integerAt, stateAt } from "./arguments.ts";
 import { fault } from "./fault.ts";
 import type { Host } from "./host.ts";
-import { hold, type Arguments, type Family, type OnBreak, type OnSheet } from "./model.ts";
+import { hold, type OnBreak, type OnSheet } from "./held.ts";
+import type { Arguments, Family } from "./model.ts";
 
 const rowsOf = ({ book }: Host, { sheet }: OnSheet): number[] => recordOf(book, sheet).pageBreaks;
 

@@ -1,7 +1,8 @@
 import { fault } from "./fault.ts";
 import { families } from "./families.ts";
 import type { Host } from "./host.ts";
-import type { Family, Held } from "./model.ts";
+import type { Held } from "./held.ts";
+import type { Family } from "./model.ts";
 
 /** What a load asks for: paths like "address" and "format/fill/color"; nothing selected asks for all plain values. */
 export interface Query {

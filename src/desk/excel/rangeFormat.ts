@@ -18,7 +18,8 @@ import { autofitColumns, autofitRows, setColumnWidth, setRowHeight } from "./aut
 import { fault } from "./fault.ts";
 import { ensureWritable } from "./guards.ts";
 import type { Host } from "./host.ts";
-import { hold, type Family, type States } from "./model.ts";
+import { hold, type States } from "./held.ts";
+import type { Family } from "./model.ts";
 import { common, withinGrid } from "./rangeShape.ts";
 
 type Areas = readonly Area[];

@@ -2,7 +2,8 @@ import { generateRandomId } from "@univerjs/core";
 import { asText, textAt } from "./arguments.ts";
 import { fault } from "./fault.ts";
 import type { Host } from "./host.ts";
-import { hold, type Arguments, type Family, type Held, type States } from "./model.ts";
+import { hold, type Held, type States } from "./held.ts";
+import type { Arguments, Family } from "./model.ts";
 
 function missing(): never {
   throw fault("ItemNotFound");

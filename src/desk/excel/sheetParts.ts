@@ -7,7 +7,8 @@ import { areaAt } from "./addresses.ts";
 import { fault } from "./fault.ts";
 import { ensureInFront } from "./guards.ts";
 import type { Host } from "./host.ts";
-import { hold, type Arguments, type Family, type Held, type OnSheet, type States } from "./model.ts";
+import { hold, type Held, type OnSheet, type States } from "./held.ts";
+import type { Arguments, Family } from "./model.ts";
 import type { Area } from "../workbook/areas.ts";
 
 export const freezePanes: Family<OnSheet> = {

@@ -1,7 +1,8 @@
 import type { Area } from "../workbook/areas.ts";
 import { fault } from "./fault.ts";
 import type { Host } from "./host.ts";
-import { hold, type Arguments, type Held } from "./model.ts";
+import { hold, type Held } from "./held.ts";
+import type { Arguments } from "./model.ts";
 import { isRowHidden } from "./rangeShape.ts";
 
 /** The cells of an area that are not hidden, in as few areas as there are stretches of rows; null where all are hidden. */

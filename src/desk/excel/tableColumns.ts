@@ -5,7 +5,8 @@ import { asText, integerAt } from "./arguments.ts";
 import { fault } from "./fault.ts";
 import { ensureWritable } from "./guards.ts";
 import type { Host } from "./host.ts";
-import { hold, type Family, type Held, type OnTable, type States } from "./model.ts";
+import { hold, type Held, type OnTable, type States } from "./held.ts";
+import type { Family } from "./model.ts";
 import { setValues, valuesOf } from "./rangeValues.ts";
 import { placed } from "./tables.ts";
 

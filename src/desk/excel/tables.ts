@@ -20,7 +20,8 @@ import { eventKind } from "./events.ts";
 import { fault } from "./fault.ts";
 import { ensureWritable, isUnbounded } from "./guards.ts";
 import type { Host } from "./host.ts";
-import { hold, type Arguments, type Family, type Held, type OnTable, type States } from "./model.ts";
+import { hold, type Held, type OnTable, type States } from "./held.ts";
+import type { Arguments, Family } from "./model.ts";
 
 export function placed({ book }: Host, { id }: OnTable): PlacedTable {
   const found = tablesOf(book).find(({ table }) => table.id === id);

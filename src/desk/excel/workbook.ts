@@ -6,7 +6,8 @@ import { asFlag, oneOf, optionalText } from "./arguments.ts";
 import { fault } from "./fault.ts";
 import { ensureSelection } from "./guards.ts";
 import type { Host } from "./host.ts";
-import { hold, type Family, type Held } from "./model.ts";
+import { hold, type Held } from "./held.ts";
+import type { Family } from "./model.ts";
 
 export const workbook: Family<null> = {
   read: {

@@ -14,7 +14,8 @@ import { eventKind } from "./events.ts";
 import { fault } from "./fault.ts";
 import { ensureInFront, ensureNotLast, ensureSheet, ensureStructure } from "./guards.ts";
 import type { Host } from "./host.ts";
-import { hold, type Arguments, type Family, type Held, type OnSheet } from "./model.ts";
+import { hold, type Held, type OnSheet } from "./held.ts";
+import type { Arguments, Family } from "./model.ts";
 import { ensureName, place } from "./worksheets.ts";
 
 const visibilities = { Visible: false, Hidden: true, VeryHidden: true } as const;

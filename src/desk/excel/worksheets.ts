@@ -5,7 +5,8 @@ import { eventKind, wholeWorkbook } from "./events.ts";
 import { fault } from "./fault.ts";
 import { ensureInFront, ensureStructure } from "./guards.ts";
 import type { Host } from "./host.ts";
-import { hold, type Family, type Held } from "./model.ts";
+import { hold, type Held } from "./held.ts";
+import type { Family } from "./model.ts";
 
 const held = (sheet: string): Held => hold("Worksheet", { sheet });
 const orNull = (sheet: string | null): Held | null => (sheet === null ? null : held(sheet));

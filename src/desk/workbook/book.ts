@@ -1,7 +1,6 @@
 import { IUniverInstanceService, UniverInstanceType, type Workbook, type Worksheet } from "@univerjs/core";
-import type { Draft } from "./drafts.ts";
 import type { Grid } from "./grid.ts";
-import { emptySheetRecord, type CustomXmlRecord, type SheetRecord } from "./records.ts";
+import { emptySheetRecord, type CustomXmlRecord, type Draft, type SheetRecord } from "./records.ts";
 
 /** An open workbook: the cells live in the grid, everything beside them in records by the grid's sheet id. */
 export interface Book {

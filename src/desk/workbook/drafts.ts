@@ -1,19 +1,7 @@
 import type { ICellData, IStyleData } from "@univerjs/core";
 import { hasSheet, type Book } from "./book.ts";
 import { carryOut, command, styleTrigger } from "./grid.ts";
-
-type Cells = Record<number, Record<number, ICellData>>;
-
-/**
- * Changes that are gathered before they go to the grid, which looks through a sheet's every cell at each change:
- * the client cuts large blocks into hundreds of small ones.
- */
-export interface Draft {
-  /** Cells whose content changes, perhaps with their looks. */
-  readonly contents: Cells;
-  /** Cells whose looks alone change: sent as contents, they would lose the formula behind them. */
-  readonly looks: Cells;
-}
+import type { Draft, DraftCells } from "./records.ts";
 
 /** The draft of one row, to put cells in. */
 export interface DraftRow {
@@ -79,4 +67,4 @@ export function flushDrafts(book: Book): void {
   }
 }
 
-const holdsCells = (cells: Cells): boolean => Object.values(cells).some((row) => Object.keys(row).length > 0);
+const holdsCells = (cells: DraftCells): boolean => Object.values(cells).some((row) => Object.keys(row).length > 0);

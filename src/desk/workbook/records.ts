@@ -1,3 +1,4 @@
+import type { ICellData } from "@univerjs/core";
 import type { PageMargins } from "../book/bookData.ts";
 
 /** What a workbook holds beside its cells. The grid knows nothing of these: they are ours to keep. */
@@ -86,6 +87,19 @@ export interface SeriesRecord {
 export interface CustomXmlRecord {
   readonly id: string;
   xml: string;
+}
+
+export type DraftCells = Record<number, Record<number, ICellData>>;
+
+/**
+ * Changes that are gathered before they go to the grid, which looks through a sheet's every cell at each change:
+ * the client cuts large blocks into hundreds of small ones.
+ */
+export interface Draft {
+  /** Cells whose content changes, perhaps with their looks. */
+  readonly contents: DraftCells;
+  /** Cells whose looks alone change: sent as contents, they would lose the formula behind them. */
+  readonly looks: DraftCells;
 }
 
 export function emptySheetRecord(): SheetRecord {
