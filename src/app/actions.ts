@@ -1,7 +1,8 @@
 import type { SheetKind } from "../sheet/answerSheet.ts";
 import type { LostColumn } from "./carrying.ts";
 import type { DataInHand } from "./dataInHand.ts";
-import type { DataPlace, Progress } from "./host.ts";
+import type { Progress } from "./errand.ts";
+import type { DataPlace } from "./host.ts";
 import type { ReviewAction } from "./review/actions.ts";
 import type { ColumnDetails, Role, Setup } from "./setup.ts";
 import type { Answered, Busy, Fault, Section } from "./state.ts";

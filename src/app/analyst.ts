@@ -6,7 +6,7 @@ import type { Book } from "../core/review/book.ts";
 import type { Claim } from "../core/review/claim.ts";
 import type { ClaimReview } from "../core/review/claimReview.ts";
 import type { Asked, BookClaims } from "../core/review/claimsOf.ts";
-import type { Errand } from "./host.ts";
+import type { Errand } from "./errand.ts";
 
 /** Who computes: the worker in the pane, the same code in line in Node. Faults of ours reject. */
 export interface Analyst {

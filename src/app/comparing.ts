@@ -5,7 +5,7 @@ import { planComparison } from "../sheet/comparisonSheet.ts";
 import type { SheetPlan } from "../sheet/plan.ts";
 import { writtenBlocks } from "../sheet/written.ts";
 import { fingerprintOf } from "./fingerprint.ts";
-import type { Errand } from "./host.ts";
+import type { Errand } from "./errand.ts";
 import type { Setup } from "./setup.ts";
 import { hiddenSetting } from "./sheetFacts.ts";
 import { askAgain } from "./stored/checking.ts";

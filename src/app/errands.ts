@@ -1,5 +1,5 @@
 import type { Action } from "./actions.ts";
-import type { Errand, Progress } from "./host.ts";
+import type { Errand, Progress } from "./errand.ts";
 import type { Busy } from "./state.ts";
 
 /** One long piece of work at a time: a new one takes the place of the one before, and late news of that one is dropped. */

@@ -2,6 +2,7 @@ import type { Result } from "../core/problem/result.ts";
 import type { Book } from "../core/review/book.ts";
 import type { CellBlock } from "../core/table/block.ts";
 import type { SheetPlan } from "../sheet/plan.ts";
+import type { Errand } from "./errand.ts";
 import type { Keeper } from "./keeper.ts";
 
 /** A block of cells and where it was found. */
@@ -24,17 +25,6 @@ export type WhereToRead =
   | { readonly kind: "selection" }
   | { readonly kind: "address"; readonly address: string }
   | { readonly kind: "place"; readonly place: DataPlace };
-
-export interface Progress {
-  readonly what: string;
-  /** From 0 to 1, or null where it cannot be told. */
-  readonly share: number | null;
-}
-
-export interface Errand {
-  readonly signal: AbortSignal;
-  readonly progress: (progress: Progress) => void;
-}
 
 /** What the app needs of a spreadsheet. The office room answers it with Excel's API. */
 export interface Host extends Keeper {

@@ -1,7 +1,7 @@
 import type { Result } from "../core/problem/result.ts";
 import type { SheetPlan } from "../sheet/plan.ts";
 import type { WrittenBlock } from "../sheet/written.ts";
-import type { Errand } from "./host.ts";
+import type { Errand } from "./errand.ts";
 
 /** An XML part of the workbook, which travels with the file. */
 export interface KeptPart {

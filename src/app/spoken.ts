@@ -1,4 +1,5 @@
 import type { Answer } from "../core/answer/answer.ts";
+import { counted } from "../core/problem/spots.ts";
 import type { DataInHand } from "./dataInHand.ts";
 import type { PaneState, Written } from "./state.ts";
 
@@ -9,7 +10,7 @@ export const announce = (state: PaneState, text: string): PaneState => ({
 });
 
 export const readWords = ({ address, source }: DataInHand): string =>
-  `Read ${source.rowCount} rows and ${source.columns.length} columns from ${address}.`;
+  `Read ${counted(source.rowCount, "row")} and ${counted(source.columns.length, "column")} from ${address}.`;
 
 export const answeredWords = ({ verdict }: Answer): string => `The answer is ready. ${verdict.join(" ")}`;
 

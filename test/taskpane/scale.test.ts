@@ -26,5 +26,7 @@ it("writes ticks short, with a minus sign", () => {
   expect(tickLabel(-1500)).toBe("−1.5K");
   expect(tickLabel(0)).toBe("0");
   expect(tickLabel(0.25)).toBe("0.25");
-  expect(tickLabel(0.00002)).toBe("2e−5");
+  expect(tickLabel(0.00002)).toBe("2E−5");
+  expect(tickLabel(2e14)).toBe("200T");
+  expect(tickLabel(-2e26)).toBe("−2E+26");
 });

@@ -4,12 +4,12 @@ import type { Cell } from "../../src/core/table/cells.ts";
 import type { ColumnSetup } from "../../src/app/setup.ts";
 import { holdsInWords, unusableCells } from "../../src/taskpane/data/columnWords.ts";
 import { derivationInWords } from "../../src/taskpane/answer/derivation.ts";
-import { intervalsInWords, kindFigures, writerFor } from "../../src/taskpane/answer/driverFigures.ts";
+import { intervalsInWords, kindFigures, lawsInWords, writerFor } from "../../src/taskpane/answer/driverFigures.ts";
 import { correlationsInWords, quantilesInWords } from "../../src/taskpane/evidence/shapeWords.ts";
-import { groupTests, readingOfGroup } from "../../src/taskpane/evidence/testGroups.ts";
+import { applies, groupTests, keptOut, readingOfGroup } from "../../src/taskpane/evidence/testGroups.ts";
 import { largestResiduals, overFittedInWords, overRowsInWords } from "../../src/taskpane/evidence/residualWords.ts";
 import { pFigure } from "../../src/taskpane/parts/pFigure.ts";
-import { counted, rowsInWords } from "../../src/taskpane/parts/rowWords.ts";
+import { rowsInWords } from "../../src/taskpane/parts/rowWords.ts";
 import { answerFixture } from "../support/answerFixture.ts";
 import { columnOf, day } from "../support/sheet.ts";
 
@@ -63,10 +63,6 @@ describe("cells that cannot be used", () => {
 });
 
 describe("rows in words", () => {
-  it("count", () => {
-    expect([counted(1, "row"), counted(2400, "row")]).toEqual(["1 row", "2,400 rows"]);
-  });
-
   it("tell period and gaps, and how many gaps are not named", () => {
     const period = { name: "monthly", unit: "month", season: 12 };
     const rows = {
@@ -104,6 +100,15 @@ describe("figures of a driver", () => {
     expect(writerFor({ low: 900, high: 1700 })(1288)).toBe("1,290");
   });
 
+  it("say what their ratios are held against, kinds with the same law together", () => {
+    const kinds = kindFigures(answerFixture, 1);
+    expect(lawsInWords(kinds)).toBe(
+      "Ratios are held against a distribution: classical against t(46), White against t(47), Newey-West against t(48).",
+    );
+    const alike = kinds.map((one) => (one.kind === "white" ? { ...one, reference: "t(46)" } : one));
+    expect(lawsInWords(alike)).toContain(": classical and White against t(46), Newey-West against t(48).");
+  });
+
   it("are told to those who do not see the picture", () => {
     expect(intervalsInWords(answerFixture, 1)).toBe(
       "95 % intervals of Price: classical from −5.0 to 0.0; White from −6.0 to 1.0; Newey-West (in force) from −7.0 to 2.0.",
@@ -122,7 +127,7 @@ describe("how a figure came about", () => {
     const steps = derivationInWords({ ...answerFixture, drivers }, 1);
     expect(steps[0]).toMatch(/^\d+ rows, \d+ coefficients: \d+ degrees of freedom\.$/);
     expect(steps[1]).toMatch(
-      /^The coefficient −2\.5, less the tested value 0, divided by its Newey-West .* standard error 1\.25, is the ratio −2\.00\.$/,
+      /^The coefficient −2\.500, less the tested value 0, divided by its Newey-West .* standard error 1\.250, is the ratio −2\.00\.$/,
     );
     expect(steps[2]).toContain("p = 0.063. That is not below the level 0.05: an effect is not shown.");
     expect(steps[3]).toBe("The 95 % interval from −7.0 to 2.0 comes from the same distribution.");
@@ -138,6 +143,18 @@ describe("tests by name", () => {
       ["breusch-godfrey", false, 2],
       ["white", false, 1],
     ]);
+  });
+
+  it("decide nothing where their question is not asked, as for rows in groups", () => {
+    const { decision } = answerFixture;
+    const fourCase = { spread: "not asked", followOn: "not asked" } as const;
+    const asked = groupTests({ ...answerFixture, decision: { ...decision, fourCase } });
+    expect(asked.map(({ decided }) => decided)).toEqual([false, false, false]);
+  });
+
+  it("that say nothing stand together under their reason", () => {
+    expect(groups.map(applies)).toEqual([true, true, false]);
+    expect(keptOut(groups)).toEqual([{ because: "too few rows for its columns", titles: ["White's test"] }]);
   });
 
   it("say why one does not apply", () => {

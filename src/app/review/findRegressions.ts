@@ -1,7 +1,8 @@
 import { type Result } from "../../core/problem/result.ts";
 import type { Asked, BookClaims } from "../../core/review/claimsOf.ts";
 import type { Reviewer } from "../analyst.ts";
-import type { Errand, Host } from "../host.ts";
+import type { Errand } from "../errand.ts";
+import type { Host } from "../host.ts";
 
 /** What it takes to find regressions and to review them. */
 export interface Reviewing {

@@ -2,7 +2,7 @@ import { type Result, success } from "../../core/problem/result.ts";
 import type { Claim } from "../../core/review/claim.ts";
 import type { ClaimReview } from "../../core/review/claimReview.ts";
 import type { Reviewer } from "../analyst.ts";
-import type { Errand } from "../host.ts";
+import type { Errand } from "../errand.ts";
 
 /**
  * Reviews regressions one after the other; what has been found so far is told at once.

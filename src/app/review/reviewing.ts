@@ -1,5 +1,5 @@
 import type { Asked, Pointed } from "../../core/review/claimsOf.ts";
-import type { Errand } from "../host.ts";
+import type { Errand } from "../errand.ts";
 import { type Work, fail } from "../work.ts";
 import { findRegressions } from "./findRegressions.ts";
 import { reviewEach } from "./reviewEach.ts";

@@ -1,7 +1,8 @@
 import type { Problem } from "../../core/problem/problem.ts";
 import { type Result, failure, success } from "../../core/problem/result.ts";
 import { type DataInHand, takeInHand } from "../dataInHand.ts";
-import type { Errand, Host, WhereToRead } from "../host.ts";
+import type { Errand } from "../errand.ts";
+import type { Host, WhereToRead } from "../host.ts";
 import type { Work } from "../work.ts";
 import { rowsBelow } from "./below.ts";
 import type { Anchor, Origin, StoredBook } from "./storedBook.ts";

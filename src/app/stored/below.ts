@@ -1,6 +1,7 @@
 import { addressOf, mostRows, parseAddress } from "../../core/table/address.ts";
 import { cellKind } from "../../core/table/cells.ts";
-import type { Errand, Host, PlacedBlock } from "../host.ts";
+import type { Errand } from "../errand.ts";
+import type { Host, PlacedBlock } from "../host.ts";
 import { readData } from "../reading.ts";
 import type { Work } from "../work.ts";
 

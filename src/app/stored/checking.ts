@@ -3,7 +3,7 @@ import type { Question } from "../../core/answer/question.ts";
 import { bringSetup, lostProblem } from "../carrying.ts";
 import type { DataInHand } from "../dataInHand.ts";
 import { fingerprintOf } from "../fingerprint.ts";
-import type { Errand } from "../host.ts";
+import type { Errand } from "../errand.ts";
 import { questionOf } from "../questionOf.ts";
 import type { Setup } from "../setup.ts";
 import { type Work, fail } from "../work.ts";

@@ -4,7 +4,7 @@ import { planAnswer } from "../../sheet/answerSheet.ts";
 import type { SheetPlan } from "../../sheet/plan.ts";
 import { writtenBlocks } from "../../sheet/written.ts";
 import { answerOne, partOf, planOfModels } from "../comparing.ts";
-import type { Errand } from "../host.ts";
+import type { Errand } from "../errand.ts";
 import { sheetFactsOf } from "../sheetFacts.ts";
 import type { Answered } from "../state.ts";
 import { type Work, fail } from "../work.ts";

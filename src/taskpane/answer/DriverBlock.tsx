@@ -26,7 +26,12 @@ const useStyles = makeStyles({
     margin: `2px 0 ${tokens.spacingVerticalXS}`,
     fontVariantNumeric: "tabular-nums",
   },
-  coefficient: { fontSize: tokens.fontSizeBase500, lineHeight: tokens.lineHeightBase500 },
+  coefficient: {
+    minWidth: 0,
+    overflowWrap: "anywhere",
+    fontSize: tokens.fontSizeBase500,
+    lineHeight: tokens.lineHeightBase500,
+  },
   unit: { fontSize: tokens.fontSizeBase200, color: tokens.colorNeutralForeground3 },
   firmness: {
     display: "flex",

@@ -4,7 +4,14 @@ import type { Answer } from "../../core/answer/answer.ts";
 import { DriverBlock } from "./DriverBlock.tsx";
 
 const useStyles = makeStyles({
-  list: { display: "grid", rowGap: tokens.spacingVerticalL, margin: 0, padding: 0, listStyleType: "none" },
+  list: {
+    display: "grid",
+    gridTemplateColumns: "minmax(0, 1fr)",
+    rowGap: tokens.spacingVerticalL,
+    margin: 0,
+    padding: 0,
+    listStyleType: "none",
+  },
 });
 
 /** One block a term; the constant comes last, as it is seldom what was asked. */

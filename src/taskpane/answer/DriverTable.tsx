@@ -2,7 +2,8 @@ import { makeStyles, mergeClasses, tokens } from "@fluentui/react-components";
 import type { ReactNode } from "react";
 import type { Answer } from "../../core/answer/answer.ts";
 import { numberInWords } from "../../core/answer/wording.ts";
-import { type KindFigures, kindFigures, standardErrorInWords, writerFor } from "./driverFigures.ts";
+import { useType } from "../look/type.ts";
+import { type KindFigures, kindFigures, lawsInWords, standardErrorInWords, writerFor } from "./driverFigures.ts";
 import { pFigure } from "../parts/pFigure.ts";
 
 const useStyles = makeStyles({
@@ -11,22 +12,24 @@ const useStyles = makeStyles({
     borderCollapse: "collapse",
     fontSize: tokens.fontSizeBase200,
     fontVariantNumeric: "tabular-nums",
-    marginBottom: tokens.spacingVerticalS,
+    marginBottom: tokens.spacingVerticalXS,
   },
   head: {
     fontWeight: tokens.fontWeightRegular,
     textAlign: "right",
-    padding: "4px 0 4px 8px",
+    padding: "4px 0 4px 6px",
     color: tokens.colorNeutralForeground3,
     verticalAlign: "bottom",
   },
   side: {
     fontWeight: tokens.fontWeightRegular,
     textAlign: "left",
-    padding: "3px 4px 3px 0",
+    padding: "3px 2px 3px 0",
+    whiteSpace: "nowrap",
+    verticalAlign: "top",
     color: tokens.colorNeutralForeground3,
   },
-  cell: { textAlign: "right", padding: "3px 0 3px 8px", borderTop: `1px solid ${tokens.colorNeutralStroke2}` },
+  cell: { textAlign: "right", padding: "3px 0 3px 6px", borderTop: `1px solid ${tokens.colorNeutralStroke2}` },
   inForce: { color: tokens.colorNeutralForeground1, fontWeight: tokens.fontWeightSemibold },
 });
 
@@ -35,35 +38,39 @@ type Line = readonly [label: string, figure: (figures: KindFigures) => string];
 /** The figures of one term under every kind side by side, the kind in force in bold and in words. */
 export function DriverTable({ answer, index }: { readonly answer: Answer; readonly index: number }): ReactNode {
   const styles = useStyles();
+  const type = useType();
   const kinds = kindFigures(answer, index);
   return (
-    <table className={styles.table} aria-label={`Figures of ${answer.terms[index] ?? ""}`}>
-      <thead>
-        <tr>
-          <td />
-          {kinds.map(({ label, inForce }) => (
-            <th key={label} scope="col" className={mergeClasses(styles.head, inForce && styles.inForce)}>
-              {label}
-              {inForce && " ●"}
-            </th>
-          ))}
-        </tr>
-      </thead>
-      <tbody>
-        {linesFor(answer, index).map(([label, figure]) => (
-          <tr key={label}>
-            <th scope="row" className={styles.side}>
-              {label}
-            </th>
-            {kinds.map((figures) => (
-              <td key={figures.label} className={mergeClasses(styles.cell, figures.inForce && styles.inForce)}>
-                {figure(figures)}
-              </td>
+    <>
+      <table className={styles.table} aria-label={`Figures of ${answer.terms[index] ?? ""}`}>
+        <thead>
+          <tr>
+            <td />
+            {kinds.map(({ label, inForce }) => (
+              <th key={label} scope="col" className={mergeClasses(styles.head, inForce && styles.inForce)}>
+                {label}
+                {inForce && "\u00a0●"}
+              </th>
             ))}
           </tr>
-        ))}
-      </tbody>
-    </table>
+        </thead>
+        <tbody>
+          {linesFor(answer, index).map(([label, figure]) => (
+            <tr key={label}>
+              <th scope="row" className={styles.side}>
+                {label}
+              </th>
+              {kinds.map((figures) => (
+                <td key={figures.label} className={mergeClasses(styles.cell, figures.inForce && styles.inForce)}>
+                  {figure(figures)}
+                </td>
+              ))}
+            </tr>
+          ))}
+        </tbody>
+      </table>
+      <p className={type.remark}>{lawsInWords(kinds)}</p>
+    </>
   );
 }
 
@@ -76,9 +83,8 @@ function linesFor(answer: Answer, index: number): readonly Line[] {
     ["standard error", ({ standardError }) => standardErrorInWords(standardError)],
     ["ratio", ({ ratio }) => numberInWords(ratio, ratioDecimals).replace("-", "−")],
     ["p-value", ({ pValue }) => bare(pValue)],
-    ["with the normal", ({ pValueNormal }) => bare(pValueNormal)],
+    ["by the normal", ({ pValueNormal }) => bare(pValueNormal)],
     ["from", ({ low }) => write(low)],
     ["to", ({ high }) => write(high)],
-    ["compared with", ({ reference }) => reference],
   ];
 }

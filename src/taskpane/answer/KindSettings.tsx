@@ -12,6 +12,17 @@ export interface KindSettingsProps {
   readonly change: (options: Partial<Setup["options"]>) => void;
 }
 
+const whiteWords: Readonly<Record<(typeof whiteWishes)[number], string>> = {
+  HC0: "HC0: as it comes",
+  HC1: "HC1: corrected for the coefficients fitted",
+  HC2: "HC2: corrected row by row",
+  "HC2 bell-mccaffrey": "HC2 with degrees of freedom of its own",
+  HC3: "HC3: careful with few rows",
+  HC4: "HC4: careful with rows far out",
+  HC4m: "HC4m: the same, milder",
+  HC5: "HC5: stricter still for rows far out",
+};
+
 /** How White and Newey-West are made in detail. */
 export function KindSettings({ setup, change }: KindSettingsProps): ReactNode {
   return (
@@ -25,7 +36,9 @@ export function KindSettings({ setup, change }: KindSettingsProps): ReactNode {
           }
         >
           {whiteWishes.map((version) => (
-            <option key={version}>{version}</option>
+            <option key={version} value={version}>
+              {whiteWords[version]}
+            </option>
           ))}
         </Select>
       </Field>

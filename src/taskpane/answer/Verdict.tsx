@@ -1,6 +1,8 @@
 import { makeStyles, tokens } from "@fluentui/react-components";
 import type { ReactNode } from "react";
 import type { Answer } from "../../core/answer/answer.ts";
+import { scopeInWords } from "../../core/answer/verdict.ts";
+import { capitalised } from "../../core/answer/wording.ts";
 import { HelpLink } from "../help/HelpLink.tsx";
 import { useType } from "../look/type.ts";
 import { keepTogether } from "../parts/keepTogether.ts";
@@ -12,11 +14,10 @@ const useStyles = makeStyles({
   mark: { paddingTop: "7px" },
 });
 
-/** The sentences a reader takes along: one a driver, then how much the drivers account for. */
+/** The sentences a reader takes along: one a driver, then how much the drivers account for; the title has named them. */
 export function Verdict({ answer }: { readonly answer: Answer }): ReactNode {
   const styles = useStyles();
   const type = useType();
-  const [opening] = answer.verdict;
   return (
     <section aria-label="Verdict">
       <ul className={styles.list}>
@@ -30,7 +31,7 @@ export function Verdict({ answer }: { readonly answer: Answer }): ReactNode {
             ),
         )}
       </ul>
-      <p className={type.body}>{opening}</p>
+      <p className={type.body}>{keepTogether(capitalised(scopeInWords(answer)))}</p>
       <HelpLink about="firm" asks="What does firm mean?" />
     </section>
   );

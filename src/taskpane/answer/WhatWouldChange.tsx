@@ -10,12 +10,14 @@ export function WhatWouldChange({ answer, index }: { readonly answer: Answer; re
   const type = useType();
   const { pValues, leaveOneOut } = answer.firmness.terms[index]!;
   const write = writerFor(answer.drivers[index]!);
-  const [smallest, largest] = [pValues.smallest, pValues.largest].map((p) => pFigure(p, answer.options.level));
+  const [smallest, largest] = [pValues.smallest, pValues.largest].map((p) =>
+    pFigure(p, answer.options.level).replace("<", "under"),
+  );
   const range = smallest === largest ? `is ${smallest ?? ""}` : `runs from ${smallest ?? ""} to ${largest ?? ""}`;
   return (
     <p className={type.remark}>
-      Over all {answer.firmness.choices.length} choices of standard errors and law, p {range}. Without the row of{" "}
-      <CellLink address={leaveOneOut.cell} /> the coefficient would be {write(leaveOneOut.without)}.
+      Over all {answer.firmness.choices.length} choices of standard errors and distribution, p {range}. Without the row
+      of <CellLink address={leaveOneOut.cell} /> the coefficient would be {write(leaveOneOut.without)}.
     </p>
   );
 }

@@ -3,8 +3,8 @@ import { referenceInWords } from "../../core/answer/tables.ts";
 import { errorsInWords } from "../../core/answer/verdict.ts";
 import { confidenceInWords, numberInWords, pValueInWords } from "../../core/answer/wording.ts";
 import { lawAt } from "../../core/inference/ratioLaw.ts";
-import { counted } from "../parts/rowWords.ts";
-import { standardErrorInWords, writerFor } from "./driverFigures.ts";
+import { counted } from "../../core/problem/spots.ts";
+import { workingWriter, writerFor } from "./driverFigures.ts";
 
 const ratioDecimals = 2;
 
@@ -15,7 +15,8 @@ export function derivationInWords(answer: Answer, index: number): readonly strin
   const { level } = options;
   const write = writerFor({ low, high });
   const degrees = counted(fit.degreesOfFreedom, "degree");
-  const errors = `its ${errorsInWords(decision.inForce.errors, lags)} standard error ${standardErrorInWords(standardError)}`;
+  const exact = workingWriter(standardError);
+  const errors = `its ${errorsInWords(decision.inForce.errors, lags)} standard error ${exact(standardError)}`;
   const law = referenceInWords(lawAt(inference.inForce, index));
   const looked = against === 0 ? "an effect" : `a difference from ${against}`;
   const relation =
@@ -24,7 +25,7 @@ export function derivationInWords(answer: Answer, index: number): readonly strin
       : `not below the level ${level}: ${looked} is not shown`;
   return [
     `${counted(observations, "row")}, ${counted(fit.columns, "coefficient")}: ${degrees} of freedom.`,
-    `The coefficient ${write(coefficient)}, less the tested value ${against}, divided by ${errors}, is the ratio ${minus(numberInWords(ratio, ratioDecimals))}.`,
+    `The coefficient ${exact(coefficient)}, less the tested value ${against}, divided by ${errors}, is the ratio ${minus(numberInWords(ratio, ratioDecimals))}.`,
     `Under ${law}, a ratio at least so far from zero on either side has ${pValueInWords(pValue, level)}. That is ${relation}.`,
     `The ${confidenceInWords(level)} interval from ${write(low)} to ${write(high)} comes from the same distribution.`,
   ];

@@ -1,5 +1,11 @@
 import type { Answer } from "../../core/answer/answer.ts";
-import { confidenceInWords, decimalsFor, numberInWords, pValueInWords } from "../../core/answer/wording.ts";
+import {
+  confidenceInWords,
+  decimalsFor,
+  listInWords,
+  numberInWords,
+  pValueInWords,
+} from "../../core/answer/wording.ts";
 import type { ErrorsChoice } from "../../core/covariance/choice.ts";
 import type { InferenceTable } from "../../core/inference/inference.ts";
 import { referenceInWords } from "../../core/answer/tables.ts";
@@ -50,9 +56,28 @@ export function writerFor({ low, high }: Pick<KindFigures, "low" | "high">): (va
   return (value) => numberInWords(value, decimals).replace("-", "−");
 }
 
+/** Decimals that show so many significant digits of a value. */
+const decimalsOf = (value: number, digits: number): number =>
+  value > 0 ? digits - 1 - Math.floor(Math.log10(value)) : digits - 1;
+
 /** Three significant digits. */
-export const standardErrorInWords = (value: number): string =>
-  numberInWords(value, value > 0 ? Math.max(0, 2 - Math.floor(Math.log10(value))) : 2);
+export const standardErrorInWords = (value: number): string => numberInWords(value, Math.max(0, decimalsOf(value, 3)));
+
+/** For figures that are to be worked out again from one another: to four digits of the standard error. */
+export function workingWriter(standardError: number): (value: number) => string {
+  const decimals = Math.max(0, decimalsOf(standardError, 4));
+  return (value) => numberInWords(value, decimals).replace("-", "−");
+}
+
+/** What each kind's ratio is held against: "classical and White against t(92), Newey-West against fixed-b (...)". */
+export function lawsInWords(kinds: readonly KindFigures[]): string {
+  const laws = [...new Set(kinds.map(({ reference }) => reference))];
+  const held = laws.map((law) => {
+    const labels = kinds.filter(({ reference }) => reference === law).map(({ label }) => label);
+    return `${listInWords(labels)} against ${law}`;
+  });
+  return `Ratios are held against a distribution: ${held.join(", ")}.`;
+}
 
 /** What the picture of the intervals shows, for those who do not see it. */
 export function intervalsInWords(answer: Answer, index: number): string {

@@ -88,7 +88,7 @@ export function ColumnRow({ column, setup }: ColumnRowProps): ReactNode {
             <span className={styles.name}>{column.name}</span>
             <span className={styles.holds}>{holdsInWords(column)}</span>
             {unusable > 0 && (
-              <span className={mergeClasses(styles.holds, styles.unusable)}>
+              <span className={mergeClasses(styles.holds, setup.role !== "unused" && styles.unusable)}>
                 {unusable.toLocaleString("en-US")} unusable
               </span>
             )}

@@ -3,6 +3,7 @@ import type { ReactNode } from "react";
 import { HelpHead } from "../help/HelpHead.tsx";
 import { useType } from "../look/type.ts";
 import { Disclosure } from "../parts/Disclosure.tsx";
+import { counted } from "../../core/problem/spots.ts";
 import { SectionTitle } from "../parts/SectionTitle.tsx";
 import { usePane } from "../paneContext.ts";
 import { KeptHere } from "../setups/KeptHere.tsx";
@@ -27,7 +28,7 @@ export function DataSection(): ReactNode {
     <>
       <SectionTitle>{address}</SectionTitle>
       <p className={type.remark}>
-        {source.rowCount.toLocaleString("en-US")} rows, {source.columns.length} columns
+        {counted(source.rowCount, "row")}, {counted(source.columns.length, "column")}
       </p>
       {notes.map((note) => (
         <p key={note} className={type.remark}>

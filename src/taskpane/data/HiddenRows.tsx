@@ -1,7 +1,7 @@
 import { Checkbox } from "@fluentui/react-components";
 import type { ReactNode } from "react";
 import { useType } from "../look/type.ts";
-import { counted } from "../parts/rowWords.ts";
+import { counted } from "../../core/problem/spots.ts";
 import { usePane } from "../paneContext.ts";
 
 /** Whether rows that the sheet does not show are used: asked where there are some, or where they were left out before. */

@@ -50,7 +50,7 @@ function meaningOf(setup: Setup): string {
     case "groups":
       return group === null
         ? "Give one column the role group: rows with the same value there belong together."
-        : `Rows with the same ${group} belong together${second(setup)}${time === null ? "" : `, in the order of ${time}`}.`;
+        : `Rows with the same ${group} belong together${second(setup)}${time === null ? "" : `, in the order of ${time}`}.${crossed(setup)}`;
   }
 }
 
@@ -59,3 +59,9 @@ function second(setup: Setup): string {
   const column = columnWithRole(setup, "second group");
   return column === null ? "" : `, and so do rows with the same ${column}`;
 }
+
+/** That there may be a second way is easily missed in the list of roles. */
+const crossed = (setup: Setup): string =>
+  columnWithRole(setup, "second group") === null
+    ? " Where they belong together in two ways, such as by shop and by month, give another column the role second group."
+    : "";

@@ -5,7 +5,8 @@ import type { Problem } from "../../core/problem/problem.ts";
 import { useType } from "../look/type.ts";
 import { LeftOutList } from "../parts/LeftOutList.tsx";
 import { ProblemWords } from "../parts/ProblemWords.tsx";
-import { counted, rowsInWords } from "../parts/rowWords.ts";
+import { counted } from "../../core/problem/spots.ts";
+import { rowsInWords } from "../parts/rowWords.ts";
 import { usePane } from "../paneContext.ts";
 
 /** What the set-up makes of the rows, as it stands: the rows it can use, those it leaves out, or what is in the way. */
@@ -20,19 +21,23 @@ export function WhatIsUsed(): ReactNode {
   return preview.ok ? <Used preview={preview.value} /> : <InTheWay problem={preview.problem} />;
 }
 
+/** What was said of the data when they were read stands above, and is not said again. */
 function Used({ preview }: { readonly preview: Preview }): ReactNode {
   const type = useType();
+  const known = usePane().state.data?.notes ?? [];
   return (
     <>
       <p className={type.remark} role="status">
         {counted(preview.used, "row")} can be used, {rowsInWords(preview.rows)}.
       </p>
       <LeftOutList leftOut={preview.leftOut} count={preview.leftOutCount} />
-      {preview.notes.map((note) => (
-        <p key={note} className={type.remark}>
-          {note}
-        </p>
-      ))}
+      {preview.notes
+        .filter((note) => !known.includes(note))
+        .map((note) => (
+          <p key={note} className={type.remark}>
+            {note}
+          </p>
+        ))}
     </>
   );
 }

@@ -5,9 +5,10 @@ import { useType } from "../look/type.ts";
 import { SectionTitle } from "../parts/SectionTitle.tsx";
 import { usePane } from "../paneContext.ts";
 import { GuardList } from "./GuardList.tsx";
+import { KeptOutTests } from "./KeptOutTests.tsx";
 import { Residuals } from "./Residuals.tsx";
 import { TestList } from "./TestList.tsx";
-import { groupTests } from "./testGroups.ts";
+import { applies, groupTests } from "./testGroups.ts";
 
 /** What the answer rests on: the tests that decided, what to know beside them, the residuals, every other test. */
 export function EvidenceSection(): ReactNode {
@@ -16,7 +17,9 @@ export function EvidenceSection(): ReactNode {
   if (answered === null) return <NoAnswer section="Evidence" />;
   const { answer, address } = answered;
   const groups = groupTests(answer);
-  const [deciding, further] = [groups.filter(({ decided }) => decided), groups.filter(({ decided }) => !decided)];
+  const deciding = groups.filter(({ decided }) => decided);
+  const further = groups.filter((group) => !group.decided && applies(group));
+  const silent = groups.filter((group) => !applies(group));
   return (
     <>
       <SectionTitle>Evidence on {answer.outcome}</SectionTitle>
@@ -33,6 +36,7 @@ export function EvidenceSection(): ReactNode {
       <Residuals answer={answer} address={address} />
       <h2 className={type.head}>{deciding.length > 0 ? "Further tests" : "Tests"}</h2>
       <TestList groups={further} answer={answer} />
+      <KeptOutTests groups={silent} />
     </>
   );
 }

@@ -46,6 +46,11 @@ export function GuardList({ guards }: { readonly guards: Guards }): ReactNode {
         <>
           <h3 className={type.subhead}>Rows that weigh most</h3>
           <CellList items={guards.rows.slice(0, mostRows).map(rowItem)} more={0} />
+          <p className={type.remark}>
+            Cook's distance: how far all fitted values would move without the row. As a rule of thumb look at rows above
+            1, and at one far above the rest. Outside residual: how far the row lies from a fit made without it, in
+            standard deviations.
+          </p>
         </>
       )}
     </>

@@ -3,7 +3,7 @@ import type { LeftOut } from "../../core/design/design.ts";
 import { HelpLink } from "../help/HelpLink.tsx";
 import { CellList } from "./CellList.tsx";
 import { Disclosure } from "./Disclosure.tsx";
-import { counted } from "./rowWords.ts";
+import { counted } from "../../core/problem/spots.ts";
 
 export interface LeftOutListProps {
   readonly leftOut: readonly LeftOut[];

@@ -1,8 +1,5 @@
 import type { RowsSummary } from "../../core/answer/answer.ts";
-
-/** "3 rows", "1 row", thousands apart. */
-export const counted = (number: number, word: string): string =>
-  `${number.toLocaleString("en-US")} ${word}${number === 1 ? "" : "s"}`;
+import { counted } from "../../core/problem/spots.ts";
 
 /** What rows are to each other, after "94 rows": ", monthly from January 2018 to December 2025, no gaps". */
 export function rowsInWords(rows: RowsSummary): string {
@@ -11,8 +8,8 @@ export function rowsInWords(rows: RowsSummary): string {
       return "each a separate case";
     case "groups":
       return rows.second === null
-        ? `in ${rows.groups} groups by ${rows.by}`
-        : `in ${rows.groups} groups by ${rows.by} and ${rows.second.groups} by ${rows.second.by}`;
+        ? `in ${counted(rows.groups, "group")} by ${rows.by}`
+        : `in ${counted(rows.groups, "group")} by ${rows.by} and ${rows.second.groups} by ${rows.second.by}`;
     case "time": {
       const gaps = rows.gaps === 0 ? "no gaps" : `${counted(rows.gaps, "gap")}: ${gapList(rows)}`;
       return `${rows.period.name} from ${rows.first} to ${rows.last}, ${gaps}`;

@@ -139,7 +139,7 @@ function Axis({
             x={percentOf(scale, tick)}
             y="17"
             fontSize="12"
-            textAnchor={anchorAt(scale.percent(tick))}
+            textAnchor={anchorAt(scale.percent(tick), tickLabel(tick).length)}
             fill="currentColor"
           >
             {tickLabel(tick)}
@@ -150,6 +150,11 @@ function Axis({
   );
 }
 
-/** Labels near an edge lean inwards, so that none is cut off. */
-const anchorAt = (percent: number): "start" | "middle" | "end" =>
-  percent < 8 ? "start" : percent > 92 ? "end" : "middle";
+/** Half a sign of a label, in per cent of the narrowest picture. */
+const halfSign = 2;
+
+/** Labels too long for the room to an edge lean inwards, so that none is cut off. */
+function anchorAt(percent: number, signs: number): "start" | "middle" | "end" {
+  const half = halfSign * signs;
+  return percent < half ? "start" : percent > 100 - half ? "end" : "middle";
+}

@@ -20,10 +20,13 @@ export function scaleOver(values: readonly number[], margin = 0.06): Scale {
 export const percentOf = (scale: Scale, value: number): string => `${scale.percent(value).toFixed(2)}%`;
 
 /** How the ticks of an axis are written: short, without rounding dust. */
-export const tickLabel = (tick: number): string =>
-  (tick !== 0 && Math.abs(tick) < smallestPlain ? tick.toExponential() : compact.format(tick)).replace("-", "−");
+export function tickLabel(tick: number): string {
+  const size = Math.abs(tick);
+  const isPlain = tick === 0 || (size >= plain.smallest && size < plain.largest);
+  return (isPlain ? compact.format(tick) : tick.toExponential().replace("e", "E")).replace("-", "−");
+}
 
-const smallestPlain = 1e-4;
+const plain = { smallest: 1e-4, largest: 1e15 } as const;
 const compact = new Intl.NumberFormat("en-US", { maximumSignificantDigits: 5, notation: "compact" });
 
 const roundSteps = [1, 2, 2.5, 5, 10];

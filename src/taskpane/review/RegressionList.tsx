@@ -6,7 +6,7 @@ import { gravestRank, originInWords, summaryOf, titleOf } from "../../core/revie
 import { useType } from "../look/type.ts";
 import { Disclosure } from "../parts/Disclosure.tsx";
 import { SectionTitle } from "../parts/SectionTitle.tsx";
-import { counted } from "../parts/rowWords.ts";
+import { counted } from "../../core/problem/spots.ts";
 import { usePane } from "../paneContext.ts";
 import { FindingList } from "./FindingList.tsx";
 import { RankMark } from "./RankMark.tsx";

@@ -3,7 +3,7 @@ import type { ReactNode } from "react";
 import { type ReviewInHand, reviewShown } from "../../app/review/reviewState.ts";
 import { quoteSheet } from "../../core/table/address.ts";
 import { CellLink } from "../parts/CellLink.tsx";
-import { counted } from "../parts/rowWords.ts";
+import { counted } from "../../core/problem/spots.ts";
 import { usePane } from "../paneContext.ts";
 
 interface ReviewBarProps {

@@ -2,7 +2,7 @@ import { Button, makeStyles, tokens } from "@fluentui/react-components";
 import type { ReactNode } from "react";
 import type { ReviewInHand } from "../../app/review/reviewState.ts";
 import { useType } from "../look/type.ts";
-import { counted } from "../parts/rowWords.ts";
+import { counted } from "../../core/problem/spots.ts";
 import { usePane } from "../paneContext.ts";
 
 const useStyles = makeStyles({
