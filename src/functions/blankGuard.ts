@@ -1,4 +1,5 @@
-import type { Errand, Host, PlacedBlock } from "../app/host.ts";
+import type { Errand } from "../app/errand.ts";
+import type { Host, PlacedBlock } from "../app/host.ts";
 import { type Result, success } from "../core/problem/result.ts";
 import { parseAddress } from "../core/table/address.ts";
 import { cellKind } from "../core/table/cells.ts";

@@ -1,4 +1,5 @@
-import type { Errand, PlacedBlock } from "../app/host.ts";
+import type { Errand } from "../app/errand.ts";
+import type { PlacedBlock } from "../app/host.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";
 import { addressOf } from "../core/table/address.ts";
 import { type ColumnBuilder, type ReadCells, columnBuilder } from "./columnBuilder.ts";

@@ -1,4 +1,4 @@
-import type { Errand } from "../app/host.ts";
+import type { Errand } from "../app/errand.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";
 import type { Book, BookName, BookSheet } from "../core/review/book.ts";
 import { isTelling } from "../core/review/formula/telling.ts";

@@ -1,4 +1,4 @@
-import type { Errand } from "../app/host.ts";
+import type { Errand } from "../app/errand.ts";
 import type { Over } from "../app/keeper.ts";
 import { type Result, failure } from "../core/problem/result.ts";
 import { addressOf } from "../core/table/address.ts";

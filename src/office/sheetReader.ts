@@ -1,4 +1,4 @@
-import type { Errand } from "../app/host.ts";
+import type { Errand } from "../app/errand.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";
 import type { BookFormula, FormatWindow } from "../core/review/book.ts";
 import type { CellColumn } from "../core/table/cells.ts";

@@ -1,6 +1,7 @@
 import type { Analyst, Inquirer, Reviewer } from "../app/analyst.ts";
 import { fingerprintOf } from "../app/fingerprint.ts";
-import type { Errand, Host } from "../app/host.ts";
+import type { Errand } from "../app/errand.ts";
+import type { Host } from "../app/host.ts";
 import { sheetFactsOf } from "../app/sheetFacts.ts";
 import type { Answer } from "../core/answer/answer.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";
@@ -12,16 +13,10 @@ import { type BookFile, openBookFile } from "./bookFile.ts";
 import type { FileAccess } from "./fileAccess.ts";
 import { type Predicted, predictionLines, predictionsOf } from "./predictions.ts";
 import { type Asked, questionOf } from "./question.ts";
+import type { OpenBook } from "./deskBook.ts";
 import { report } from "./report.ts";
 import { saveCopy } from "./saveCopy.ts";
 import { saveFault } from "./saveName.ts";
-
-/** A workbook opened in the desk, for as long as a command needs it. */
-export interface OpenBook {
-  readonly host: Host;
-  readonly snapshot: () => Promise<BookData>;
-  readonly close: () => void;
-}
 
 /** What the command needs of the world outside. */
 export interface Surroundings {

@@ -1,4 +1,5 @@
-import type { Errand, Host } from "../app/host.ts";
+import type { Errand } from "../app/errand.ts";
+import type { Host } from "../app/host.ts";
 import { type FoundData, readPlaced } from "../app/tableInHand.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";
 import { type SheetArea, addressOf, localAddressOf, parseAddress } from "../core/table/address.ts";

@@ -1,10 +1,17 @@
 import type { Analyst, Inquirer } from "../app/analyst.ts";
+import type { Host } from "../app/host.ts";
 import type { BookData } from "../desk/book/bookData.ts";
 import { openDesk } from "../desk/client/openDesk.ts";
 import { functionsMetadata } from "../functions/metadata.ts";
 import { registerFunctions } from "../functions/register.ts";
 import { excelHost } from "../office/excelHost.ts";
-import type { OpenBook } from "./answerCommand.ts";
+
+/** A workbook opened in the desk, for as long as a command needs it. */
+export interface OpenBook {
+  readonly host: Host;
+  readonly snapshot: () => Promise<BookData>;
+  readonly close: () => void;
+}
 
 /** Opens a workbook in the desk without a screen, the add-in's functions in it, so that a live sheet has values when saved. */
 export const deskBook =

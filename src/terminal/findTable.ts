@@ -1,4 +1,5 @@
-import type { DataPlace, Errand, Host } from "../app/host.ts";
+import type { Errand } from "../app/errand.ts";
+import type { DataPlace, Host } from "../app/host.ts";
 import { type FoundData, readPlaced } from "../app/tableInHand.ts";
 import { nearestName } from "../core/problem/nearestName.ts";
 import type { Problem } from "../core/problem/problem.ts";

@@ -1,5 +1,6 @@
 import type { Inquirer } from "../app/analyst.ts";
-import type { Errand, Host } from "../app/host.ts";
+import type { Errand } from "../app/errand.ts";
+import type { Host } from "../app/host.ts";
 import { alignedLines } from "../core/answer/alignedLines.ts";
 import type { Answer } from "../core/answer/answer.ts";
 import type { Prediction } from "../core/inference/predict.ts";

@@ -1,4 +1,5 @@
-import type { Errand, Host } from "../app/host.ts";
+import type { Errand } from "../app/errand.ts";
+import type { Host } from "../app/host.ts";
 import type { FoundData } from "../app/tableInHand.ts";
 import { modelOf } from "../core/answer/modelOf.ts";
 import type { Question } from "../core/answer/question.ts";

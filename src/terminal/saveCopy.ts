@@ -2,8 +2,8 @@ import { type Result, failure, success } from "../core/problem/result.ts";
 import type { BookData } from "../desk/book/bookData.ts";
 import { addSheets } from "../desk/files/addSheets.ts";
 import { saveXlsx } from "../desk/files/saveXlsx.ts";
-import type { OpenBook } from "./answerCommand.ts";
 import type { BookFile } from "./bookFile.ts";
+import type { OpenBook } from "./deskBook.ts";
 import type { FileAccess } from "./fileAccess.ts";
 
 interface Copy {

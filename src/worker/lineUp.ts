@@ -1,4 +1,4 @@
-import type { Errand } from "../app/host.ts";
+import type { Errand } from "../app/errand.ts";
 import { failure } from "../core/problem/result.ts";
 import type { FromWorker, WorkerLine } from "./protocol.ts";
 import { type Seat, takeSeat } from "./seat.ts";

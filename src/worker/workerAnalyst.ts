@@ -1,5 +1,5 @@
 import type { Analyst, Inquirer, Reviewer } from "../app/analyst.ts";
-import type { Errand } from "../app/host.ts";
+import type { Errand } from "../app/errand.ts";
 import { withinLimits } from "../app/timeLimit.ts";
 import type { Result } from "../core/problem/result.ts";
 import { type Job, add, lineUp, remove } from "./lineUp.ts";

@@ -1,4 +1,5 @@
-import type { DataPlace, Errand, Host, PlacedBlock, WhereToRead } from "../../src/app/host.ts";
+import type { Errand } from "../../src/app/errand.ts";
+import type { DataPlace, Host, PlacedBlock, WhereToRead } from "../../src/app/host.ts";
 import { type Problem } from "../../src/core/problem/problem.ts";
 import { type Result, failure, success } from "../../src/core/problem/result.ts";
 import type { Book } from "../../src/core/review/book.ts";
