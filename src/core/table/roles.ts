@@ -12,14 +12,21 @@ export interface ProposedRoles {
 
 /**
  * Guesses roles: the first column of dates or periods is time, the first column of numbers the outcome, the other
- * numbers are drivers. Numbers that never vary or merely count the rows are left aside. Where times repeat and a column
- * of words tells the rows of a time apart, rows are in groups.
+ * numbers are drivers, unless they are more than anyone would mean at once or than the rows could tell apart: then the
+ * user names them. Numbers that never vary or merely count the rows are left aside. Where times repeat and a column of
+ * words tells the rows of a time apart, rows are in groups.
  */
 export function proposeRoles(descriptions: readonly ColumnDescription[]): ProposedRoles {
   const time = descriptions.find(isTime) ?? descriptions.find(isRunningTime) ?? null;
   const numbers = descriptions.filter((one) => isUsefulNumber(one) && one !== time).map(({ name }) => name);
-  return { outcome: numbers[0] ?? null, drivers: numbers.slice(1), ...rowsIn(time, descriptions) };
+  const [outcome = null, ...others] = numbers;
+  const rows = descriptions[0]?.counts.rows ?? 0;
+  const isPlausible = others.length <= mostDrivers && others.length + 1 < rows;
+  return { outcome, drivers: isPlausible ? others : [], ...rowsIn(time, descriptions) };
 }
+
+/** Of more columns of numbers none is taken for a driver. */
+const mostDrivers = 30;
 
 function rowsIn(
   time: ColumnDescription | null,

@@ -42,7 +42,7 @@ export function DataSection(): ReactNode {
         <PlaceChooser />
       </Disclosure>
       <h2 className={type.head}>Columns</h2>
-      <ColumnList />
+      <ColumnList key={address} />
       <HelpHead about="groups" asks="What are groups?">
         Rows are
       </HelpHead>

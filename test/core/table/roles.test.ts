@@ -31,6 +31,20 @@ describe("proposed roles", () => {
     });
   });
 
+  it("names no drivers where there are more of them than the rows could tell apart, or than anyone would mean", () => {
+    const numbered = (count: number, rows: number) =>
+      Object.fromEntries(
+        Array.from({ length: count }, (_, j) => [
+          `C${j}`,
+          Array.from({ length: rows }, (_, i) => (i * i + j * 7) % 11),
+        ]),
+      );
+    expect(proposed(numbered(4, 5)).drivers).toEqual(["C1", "C2", "C3"]);
+    expect(proposed(numbered(5, 5))).toMatchObject({ outcome: "C0", drivers: [] });
+    expect(proposed(numbered(31, 40)).drivers).toHaveLength(30);
+    expect(proposed(numbered(32, 40))).toMatchObject({ outcome: "C0", drivers: [] });
+  });
+
   it("leaves constants and row counters aside", () => {
     expect(proposed({ No: [1, 2, 3, 4], Country: [7, 7, 7, 7], Takings: repairs, Staff: price })).toMatchObject({
       outcome: "Takings",
