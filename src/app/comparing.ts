@@ -1,30 +1,16 @@
 import { settingsSaid } from "../core/answer/settingsSaid.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";
-import type { ComparedModel } from "../sheet/comparison.ts";
 import { planComparison } from "../sheet/comparisonSheet.ts";
 import type { SheetPlan } from "../sheet/plan.ts";
 import { writtenBlocks } from "../sheet/written.ts";
+import type { AnsweredModel } from "./compared.ts";
 import { fingerprintOf } from "./fingerprint.ts";
 import type { Errand } from "./errand.ts";
-import type { Setup } from "./setup.ts";
 import { hiddenSetting } from "./sheetFacts.ts";
 import { askAgain } from "./stored/checking.ts";
 import { keepRecord } from "./stored/recording.ts";
-import { type Anchor, type ModelRecord, type StoredSetup, sameName } from "./stored/storedBook.ts";
+import { type ModelRecord, type StoredSetup, sameName } from "./stored/storedBook.ts";
 import { type Work, fail } from "./work.ts";
-
-/** A stored set-up answered, and what it was answered from. */
-export interface AnsweredModel extends ComparedModel {
-  readonly setup: Setup;
-  readonly anchor: Anchor;
-}
-
-/** Stored set-ups answered side by side, each with its own data as they stand now. */
-export interface Comparison {
-  readonly models: readonly AnsweredModel[];
-  /** Whether cells behind it have changed since. */
-  readonly outdated: boolean;
-}
 
 export async function compareSetups(work: Work, names: readonly string[]): Promise<void> {
   const errand = work.errands.start("comparing");

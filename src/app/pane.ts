@@ -18,8 +18,8 @@ import { checkSheets } from "./stored/checking.ts";
 import { redoSheet, redoWith } from "./stored/redoing.ts";
 import { openSetup, removeSetup, renameSetup, storeSetup, type Renaming } from "./stored/setups.ts";
 import { createSourcesWatch, createWatch } from "./watching.ts";
-import { type Edition, goToCell, writeSheet } from "./writing.ts";
-import type { Work } from "./work.ts";
+import { goToCell, writeSheet } from "./writing.ts";
+import type { Edition, Work } from "./work.ts";
 
 export interface PaneParts {
   readonly host: Host;

@@ -3,7 +3,7 @@ import type { Question } from "../core/answer/question.ts";
 import type { Problem } from "../core/problem/problem.ts";
 import type { SheetKind } from "../sheet/answerSheet.ts";
 import type { LostColumn } from "./carrying.ts";
-import type { Comparison } from "./comparing.ts";
+import type { Comparison } from "./compared.ts";
 import type { DataInHand } from "./dataInHand.ts";
 import type { Progress } from "./errand.ts";
 import type { DataPlace } from "./host.ts";

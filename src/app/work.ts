@@ -6,7 +6,12 @@ import type { Host } from "./host.ts";
 import type { PaneState } from "./state.ts";
 import type { Store } from "./store.ts";
 import type { Watch, WatchSources } from "./watching.ts";
-import type { Edition } from "./writing.ts";
+
+/** What a result sheet says of its making: the day in words, and the version. */
+export interface Edition {
+  readonly today: () => string;
+  readonly version: string;
+}
 
 /** What the pane's use cases work with. */
 export interface Work {

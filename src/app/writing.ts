@@ -3,13 +3,7 @@ import { fingerprintOf } from "./fingerprint.ts";
 import { sheetFactsOf } from "./sheetFacts.ts";
 import type { Answered } from "./state.ts";
 import { recordSheet } from "./stored/recording.ts";
-import { type Work, fail } from "./work.ts";
-
-/** What a result sheet says of its making: the day in words, and the version. */
-export interface Edition {
-  readonly today: () => string;
-  readonly version: string;
-}
+import { type Edition, type Work, fail } from "./work.ts";
 
 /** Writes the answer shown to a new sheet. */
 export async function writeSheet(work: Work, wanted: SheetKind): Promise<void> {

@@ -3,7 +3,7 @@ import { standsInCells } from "../../core/review/forms.ts";
 import type { Column } from "../../core/table/source.ts";
 import type { ReviewFacts } from "../../sheet/review/madeSections.ts";
 import { fingerprint } from "../fingerprint.ts";
-import type { Edition } from "../writing.ts";
+import type { Edition } from "../work.ts";
 
 /** What a review sheet says of its making. */
 export async function reviewFactsOf(claims: readonly Claim[], { today, version }: Edition): Promise<ReviewFacts> {

@@ -1,5 +1,5 @@
 import type { Problem } from "../../core/problem/problem.ts";
-import type { AnsweredModel } from "../comparing.ts";
+import type { AnsweredModel } from "../compared.ts";
 import type { LostColumn } from "../carrying.ts";
 import type { DataInHand } from "../dataInHand.ts";
 import type { Setup } from "../setup.ts";

@@ -1,6 +1,6 @@
 import { Button, MessageBar, MessageBarActions, MessageBarBody, makeStyles, tokens } from "@fluentui/react-components";
 import type { ReactNode } from "react";
-import type { Comparison } from "../../app/comparing.ts";
+import type { Comparison } from "../../app/compared.ts";
 import { comparabilityOf } from "../../sheet/comparison.ts";
 import { useType } from "../look/type.ts";
 import { SectionTitle } from "../parts/SectionTitle.tsx";
