@@ -33,7 +33,10 @@ async function locateText(context: Excel.RequestContext, text: string): Promise<
   sheet.load("name");
   await context.sync();
   if (sheet.isNullObject) return unknownSheet(context, area.sheet);
-  return settle(context, { ...area, sheet: sheet.name });
+  if (area.rows * area.columns > 1) return settle(context, { ...area, sheet: sheet.name });
+  const cell = sheet.getRangeByIndexes(area.row, area.column, 1, 1).load(`${whereabouts},worksheet/name`);
+  await context.sync();
+  return settle(context, await widened(cell));
 }
 
 export const sheetNamed = (context: Excel.RequestContext, name: string): Excel.Worksheet =>
@@ -72,7 +75,7 @@ async function locatePlace(context: Excel.RequestContext, place: DataPlace): Pro
 }
 
 /**
- * One selected cell stands for the data around it: its table, or the cells that adjoin it. Where those are one column,
+ * One cell, selected or typed, stands for the data around it: its table, or the cells that adjoin it. Where those are one column,
  * as with a title or a note, nothing could be explained by anything: the cells in use on the sheet are meant.
  */
 async function widened(range: Excel.Range): Promise<SheetArea> {

@@ -105,6 +105,11 @@ describe("reading a workbook", () => {
     expect((await readOk({ kind: "selection" })).address).toBe("Months!B4:C6");
   });
 
+  it("widens one typed cell in the same way", async () => {
+    expect((await readOk(address("Months!B5"))).address).toBe("Months!A3:D9");
+    expect((await readOk(address("Months!A1"))).address).toBe("Months!A1:D9");
+  });
+
   it("stops whole columns at the last cell in use", async () => {
     at.desk.select("Months!A:D");
     expect(await readOk({ kind: "selection" })).toMatchObject({ address: "Months!A1:D9", rowCount: 9 });
