@@ -5,7 +5,7 @@ import { useType } from "../look/type.ts";
 import { CellList } from "../parts/CellList.tsx";
 import { TextField } from "../parts/TextField.tsx";
 import { usePane } from "../paneContext.ts";
-import type { ColumnRowProps } from "./ColumnRow.tsx";
+import type { ColumnInHand } from "./columnInHand.ts";
 import { NumberField } from "../parts/NumberField.tsx";
 import { ReadAs } from "./ReadAs.tsx";
 import { TextNumbers } from "./TextNumbers.tsx";
@@ -17,7 +17,7 @@ const useStyles = makeStyles({
 });
 
 /** What else can be said of a column: cells that cannot be used, how it is read, its unit, the value tested against. */
-export function ColumnDetails({ column, setup }: ColumnRowProps): ReactNode {
+export function ColumnDetails({ column, setup }: ColumnInHand): ReactNode {
   const styles = useStyles();
   const isDriver = setup.role === "driver";
   const isNumber = setup.role === "outcome" || (isDriver && setup.as === "number");
@@ -35,7 +35,7 @@ export function ColumnDetails({ column, setup }: ColumnRowProps): ReactNode {
   );
 }
 
-function Unusable({ column, setup }: ColumnRowProps): ReactNode {
+function Unusable({ column, setup }: ColumnInHand): ReactNode {
   const type = useType();
   const { cells, count } = unusableCells(column, setup);
   if (count === 0) return <p className={type.remark}>Every cell of {column.range} can be used.</p>;

@@ -1,18 +1,12 @@
 import { Select, makeStyles, mergeClasses, tokens } from "@fluentui/react-components";
 import { type ReactNode, useId, useState } from "react";
 import type { ColumnSetup, Role } from "../../app/setup.ts";
-import type { ColumnDescription } from "../../core/table/describe.ts";
 import { Turn } from "../parts/Disclosure.tsx";
 import { usePane } from "../paneContext.ts";
 import { ColumnPicture } from "../pictures/ColumnPicture.tsx";
 import { ColumnDetails } from "./ColumnDetails.tsx";
 import { holdsInWords, unusableCells } from "./columnWords.ts";
-
-/** A column, and what is made of it. */
-export interface ColumnRowProps {
-  readonly column: ColumnDescription;
-  readonly setup: ColumnSetup;
-}
+import type { ColumnInHand } from "./columnInHand.ts";
 
 const useStyles = makeStyles({
   row: {
@@ -67,7 +61,7 @@ const useStyles = makeStyles({
 });
 
 /** One column: name, what it holds, how much of it cannot be used, its values in a tiny picture, its role. */
-export function ColumnRow({ column, setup }: ColumnRowProps): ReactNode {
+export function ColumnRow({ column, setup }: ColumnInHand): ReactNode {
   const styles = useStyles();
   const joined = usePane().state.setup?.rows === "time";
   const unusable = unusableCells(column, setup).count;

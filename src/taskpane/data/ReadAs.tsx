@@ -2,7 +2,7 @@ import { Field, Select } from "@fluentui/react-components";
 import type { ReactNode } from "react";
 import type { ColumnSetup } from "../../app/setup.ts";
 import { usePane } from "../paneContext.ts";
-import type { ColumnRowProps } from "./ColumnRow.tsx";
+import type { ColumnInHand } from "./columnInHand.ts";
 
 const ways: readonly (readonly [ColumnSetup["as"], string])[] = [
   ["number", "numbers"],
@@ -11,7 +11,7 @@ const ways: readonly (readonly [ColumnSetup["as"], string])[] = [
 ];
 
 /** How a driver is read, and for categories the one that the others are compared with. */
-export function ReadAs({ column, setup }: ColumnRowProps): ReactNode {
+export function ReadAs({ column, setup }: ColumnInHand): ReactNode {
   const { dispatch } = usePane();
   const change = (details: Partial<Pick<ColumnSetup, "as" | "base">>): void =>
     dispatch({ kind: "column changed", column: setup.column, details });

@@ -3,10 +3,10 @@ import type { ReactNode } from "react";
 import type { ColumnSetup } from "../../app/setup.ts";
 import { useType } from "../look/type.ts";
 import { usePane } from "../paneContext.ts";
-import type { ColumnRowProps } from "./ColumnRow.tsx";
+import type { ColumnInHand } from "./columnInHand.ts";
 
 /** Text that is plainly numbers: read as such only with the user's leave, which can be taken back. */
-export function TextNumbers({ column, setup }: ColumnRowProps): ReactNode {
+export function TextNumbers({ column, setup }: ColumnInHand): ReactNode {
   const type = useType();
   const { dispatch } = usePane();
   const found = column.textNumbers;
