@@ -1,7 +1,8 @@
 import type { Answer, DriverAnswer } from "../core/answer/answer.ts";
 import type { Question } from "../core/answer/question.ts";
 import { choiceText } from "../core/answer/tables.ts";
-import { confidenceInWords } from "../core/answer/wording.ts";
+import { confidenceInWords, listInWords } from "../core/answer/wording.ts";
+import { counted } from "../core/problem/spots.ts";
 
 /** One of several answers that are set side by side. */
 export interface ComparedModel {
@@ -112,11 +113,12 @@ function rowDifference(one: ComparedModel, other: ComparedModel): string[] {
   const onlyB = rows.size - (a.rows.size - onlyA);
   if (onlyA === 0 && onlyB === 0) return [];
   return [
-    `${pair} do not rest on the same rows: ${counted(onlyA)} used by ${quoted(one)} alone, ${onlyB.toLocaleString("en-US")} by ${quoted(other)} alone.`,
+    `${pair} do not rest on the same rows: ${listInWords([...usedAlone(one, onlyA), ...usedAlone(other, onlyB)])}.`,
   ];
 }
 
-const counted = (rows: number): string => `${rows.toLocaleString("en-US")} ${rows === 1 ? "row is" : "rows are"}`;
+const usedAlone = (model: ComparedModel, rows: number): string[] =>
+  rows === 0 ? [] : [`${counted(rows, "row")} ${rows === 1 ? "is" : "are"} used by ${quoted(model)} alone`];
 
 /** Rows of the sheet (from 1) that a model rests on; null where more were left out than are listed. */
 function usedRows({ question, answer }: ComparedModel): {

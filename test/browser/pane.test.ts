@@ -130,9 +130,10 @@ describe("the answer", () => {
     );
     await rain.getByRole("button", { name: /Figures/ }).click();
     const table = page.getByRole("table", { name: "Figures of Rainy days" });
-    expect(await table.getByRole("row").count()).toBe(8);
-    await rain.getByText(/Over all \d+ choices of standard errors and law, p/).waitFor();
-    expect(await table.getByRole("columnheader").allInnerTexts()).toEqual(["classical", "White", "Newey-West ●"]);
+    expect(await table.getByRole("row").count()).toBe(7);
+    await rain.getByText(/^Ratios are held against a distribution: classical/).waitFor();
+    await rain.getByText(/Over all \d+ choices of standard errors and distribution, p/).waitFor();
+    expect(await table.getByRole("columnheader").allInnerTexts()).toEqual(["classical", "White", "Newey-West\u00a0●"]);
   });
 
   it("is found again when the policy changes, and keeps the reason of a fixed kind", async () => {
@@ -339,6 +340,26 @@ describe("work and faults", () => {
     await alert.getByRole("button", { name: "Dismiss" }).click();
     expect(await alert.innerText()).toBe("");
     expect(await focused(page)).toBe("H1 Months!A1:F97");
+  });
+
+  it("puts right in one click what needs the user's leave alone", async () => {
+    await useSelection(page);
+    await button(page, "Get the answer").click();
+    const alert = page.getByRole("alert");
+    await alert.getByRole("button", { name: "Read them as numbers" }).click();
+    expect(await alert.innerText()).toBe("");
+    await page.getByText(/^94 rows can be used/).waitFor();
+    await page.evaluate(
+      () => (window.stage.refusal = { code: "dependent-columns", column: "Rainy days", madeOf: ["Price index"] }),
+    );
+    await button(page, "Get the answer").click();
+    await alert.getByText(/"Rainy days" says nothing new/).waitFor();
+    await alert.getByRole("button", { name: "Leave out Rainy days" }).click();
+    expect(await roleOf(page, "Rainy days").inputValue()).toBe("unused");
+    expect(await focused(page)).toBe("H1 Months!A1:F97");
+    await page.evaluate(() => (window.stage.refusal = null));
+    await button(page, "Get the answer").click();
+    await heading(page, "Repairs explained by Price index and Advertising").waitFor();
   });
 
   it("owns up to a fault of its own, with details to copy", async () => {

@@ -104,7 +104,7 @@ describe("a comparison", () => {
     expect(await focused(page)).toBe("H1 2 models side by side");
     expect(await announced(page)).toMatch(/^2 set-ups are compared\. "All drivers" and "Without price" do not rest/);
     const notes = page.getByRole("list", { name: "What can be compared" });
-    await notes.getByText(/0 rows are used by "All drivers" alone, 2 by "Without price" alone/).waitFor();
+    await notes.getByText(/on the same rows: 2 rows are used by "Without price" alone/).waitFor();
     const drivers = page.getByRole("table", { name: "Drivers of the models" });
     expect(await drivers.getByRole("columnheader").allInnerTexts()).toEqual(["All drivers", "Without price"]);
     expect(await drivers.getByText("not in it").count()).toBe(1);

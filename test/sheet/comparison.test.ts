@@ -30,7 +30,7 @@ const models = [both, one];
 describe("what can be compared", () => {
   it("says on how many rows each model rests alone", () => {
     expect(comparabilityOf(models)).toEqual([
-      '"Both" and "Price alone" do not rest on the same rows: 0 rows are used by "Both" alone, 1 by "Price alone" alone.',
+      '"Both" and "Price alone" do not rest on the same rows: 1 row is used by "Price alone" alone.',
       "Where rows differ, so may the coefficients for that reason alone; R-squared and Akaike's criterion cannot be set against each other.",
     ]);
     expect(comparabilityOf([one, { ...one, name: "Again" }])).toEqual(["All models rest on the same 40 rows."]);

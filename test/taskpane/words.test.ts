@@ -8,6 +8,7 @@ import { intervalsInWords, kindFigures, lawsInWords, writerFor } from "../../src
 import { correlationsInWords, quantilesInWords } from "../../src/taskpane/evidence/shapeWords.ts";
 import { applies, groupTests, keptOut, readingOfGroup } from "../../src/taskpane/evidence/testGroups.ts";
 import { largestResiduals, overFittedInWords, overRowsInWords } from "../../src/taskpane/evidence/residualWords.ts";
+import { keepTogether } from "../../src/taskpane/parts/keepTogether.ts";
 import { pFigure } from "../../src/taskpane/parts/pFigure.ts";
 import { rowsInWords } from "../../src/taskpane/parts/rowWords.ts";
 import { answerFixture } from "../support/answerFixture.ts";
@@ -118,6 +119,12 @@ describe("figures of a driver", () => {
   it("show p-values without their name", () => {
     expect([pFigure(0.0341, 0.05), pFigure(0.00001, 0.05)]).toEqual(["0.034", "<\u00a00.0001"]);
   });
+});
+
+it("signs stay with their numbers in sentences, and a minus is one", () => {
+  expect(keepTogether("the estimate is -1.13 (between -1.42 and 2, 95 %), p = 0.03; 2020-01")).toBe(
+    "the estimate is −1.13 (between −1.42 and 2, 95\u00a0%), p\u00a0=\u00a00.03; 2020-01",
+  );
 });
 
 describe("how a figure came about", () => {

@@ -24,6 +24,7 @@ const useStyles = makeStyles({
     textAlign: "left",
     padding: "2px 4px 2px 0",
     color: tokens.colorNeutralForeground3,
+    borderTop: `1px solid ${tokens.colorNeutralStroke2}`,
   },
   head: { textAlign: "right", padding: "2px 0 2px 8px", verticalAlign: "bottom" },
   cell: {
@@ -113,7 +114,7 @@ function JointTable({ answer }: { readonly answer: Answer }): ReactNode {
         {body.map(([kind, statistic, law, pValue]) => (
           <tr key={kind}>
             <th scope="row" className={styles.side}>
-              {kind}
+              {String(kind).replace(" (in force)", "\u00a0●")}
             </th>
             <td className={styles.cell}>{numberInWords(Number(statistic), ratioDecimals)}</td>
             <td className={styles.cell}>{law}</td>

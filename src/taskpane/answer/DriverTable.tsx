@@ -28,6 +28,7 @@ const useStyles = makeStyles({
     whiteSpace: "nowrap",
     verticalAlign: "top",
     color: tokens.colorNeutralForeground3,
+    borderTop: `1px solid ${tokens.colorNeutralStroke2}`,
   },
   cell: { textAlign: "right", padding: "3px 0 3px 6px", borderTop: `1px solid ${tokens.colorNeutralStroke2}` },
   inForce: { color: tokens.colorNeutralForeground1, fontWeight: tokens.fontWeightSemibold },

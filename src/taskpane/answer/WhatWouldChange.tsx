@@ -1,7 +1,7 @@
 import type { ReactNode } from "react";
 import type { Answer } from "../../core/answer/answer.ts";
 import { useType } from "../look/type.ts";
-import { CellLink } from "../parts/CellLink.tsx";
+import { CellInText } from "../parts/CellLink.tsx";
 import { pFigure } from "../parts/pFigure.ts";
 import { writerFor } from "./driverFigures.ts";
 
@@ -17,7 +17,7 @@ export function WhatWouldChange({ answer, index }: { readonly answer: Answer; re
   return (
     <p className={type.remark}>
       Over all {answer.firmness.choices.length} choices of standard errors and distribution, p {range}. Without the row
-      of <CellLink address={leaveOneOut.cell} /> the coefficient would be {write(leaveOneOut.without)}.
+      of <CellInText address={leaveOneOut.cell} /> the coefficient would be {write(leaveOneOut.without)}.
     </p>
   );
 }

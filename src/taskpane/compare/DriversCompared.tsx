@@ -1,3 +1,4 @@
+import { mergeClasses } from "@fluentui/react-components";
 import type { ReactNode } from "react";
 import type { DriverAnswer } from "../../core/answer/answer.ts";
 import { confidenceInWords } from "../../core/answer/wording.ts";
@@ -46,7 +47,7 @@ function Driver({ driver, models }: ModelsProps & { readonly driver: ComparedDri
       </tr>
       {lines(confidence).map(([label, figure], index) => (
         <tr key={label}>
-          <th scope="row" className={look.label}>
+          <th scope="row" className={mergeClasses(look.label, look.short)}>
             {label.trim()}
           </th>
           {driver.in.map((found, place) => (

@@ -35,6 +35,6 @@ export const useTableLook = makeStyles({
     padding: "2px 4px 2px 0",
     color: tokens.colorNeutralForeground3,
   },
+  short: { whiteSpace: "nowrap" },
   cell: { textAlign: "right", verticalAlign: "top", padding: "2px 0 2px 6px", overflowWrap: "anywhere" },
-  strong: { fontWeight: tokens.fontWeightSemibold },
 });

@@ -11,7 +11,7 @@ import type { ColumnInHand } from "./columnInHand.ts";
 const useStyles = makeStyles({
   row: {
     display: "grid",
-    gridTemplateColumns: "minmax(0, 1fr) 44px 104px",
+    gridTemplateColumns: "minmax(0, 1fr) 44px 114px",
     columnGap: tokens.spacingHorizontalS,
     alignItems: "center",
     padding: `${tokens.spacingVerticalXS} 0`,

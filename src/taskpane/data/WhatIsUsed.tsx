@@ -1,4 +1,4 @@
-import { Button, MessageBar, MessageBarActions, MessageBarBody, makeStyles, tokens } from "@fluentui/react-components";
+import { MessageBar, MessageBarBody, makeStyles, tokens } from "@fluentui/react-components";
 import { type ReactNode, useMemo } from "react";
 import { type Preview, previewOf } from "../../app/preview.ts";
 import type { Problem } from "../../core/problem/problem.ts";
@@ -6,6 +6,7 @@ import { useType } from "../look/type.ts";
 import { LeftOutList } from "../parts/LeftOutList.tsx";
 import { ProblemWords } from "../parts/ProblemWords.tsx";
 import { counted } from "../../core/problem/spots.ts";
+import { Remedy } from "../parts/Remedy.tsx";
 import { rowsInWords } from "../parts/rowWords.ts";
 import { usePane } from "../paneContext.ts";
 
@@ -51,25 +52,7 @@ function InTheWay({ problem }: { readonly problem: Problem }): ReactNode {
       <MessageBarBody>
         <ProblemWords problem={problem} />
       </MessageBarBody>
-      {problem.code === "text-numbers" && (
-        <MessageBarActions>
-          <ReadTexts name={problem.column} />
-        </MessageBarActions>
-      )}
+      <Remedy problem={problem} />
     </MessageBar>
-  );
-}
-
-/** Leave to read a column's plain text numbers as numbers, where the lack of it is in the way. */
-function ReadTexts({ name }: { readonly name: string }): ReactNode {
-  const { state, dispatch } = usePane();
-  const decimal = state.data?.columns.find((column) => column.name === name)?.textNumbers?.decimal ?? ".";
-  return (
-    <Button
-      size="small"
-      onClick={() => dispatch({ kind: "column changed", column: name, details: { textNumbers: decimal } })}
-    >
-      Read them as numbers
-    </Button>
   );
 }

@@ -36,7 +36,12 @@ const useStyles = makeStyles({
     textAlign: "right",
     ":first-child": { textAlign: "left" },
   },
-  name: { padding: "2px 0", fontWeight: tokens.fontWeightRegular, textAlign: "left" },
+  name: {
+    padding: "2px 0",
+    fontWeight: tokens.fontWeightRegular,
+    textAlign: "left",
+    borderTop: `1px solid ${tokens.colorNeutralStroke2}`,
+  },
   figure: { padding: "2px 0", textAlign: "right", borderTop: `1px solid ${tokens.colorNeutralStroke2}` },
 });
 

@@ -1,9 +1,10 @@
-import { Button, MessageBar, MessageBarActions, MessageBarBody, makeStyles, tokens } from "@fluentui/react-components";
+import { Button, MessageBar, MessageBarBody, makeStyles, tokens } from "@fluentui/react-components";
 import { type ReactNode, useEffect, useRef } from "react";
 import type { Fault } from "../../app/state.ts";
 import { usePane } from "../paneContext.ts";
 import { BugReport } from "./BugReport.tsx";
 import { ProblemWords } from "./ProblemWords.tsx";
+import { Remedy } from "./Remedy.tsx";
 
 const useStyles = makeStyles({ notice: { marginBottom: tokens.spacingVerticalM } });
 
@@ -31,11 +32,11 @@ function Notice({ fault, onDismiss }: { readonly fault: Fault; readonly onDismis
       <MessageBarBody>
         <ProblemWords problem={fault.problem} />
       </MessageBarBody>
-      <MessageBarActions>
+      <Remedy problem={fault.problem}>
         <Button size="small" onClick={onDismiss}>
           Dismiss
         </Button>
-      </MessageBarActions>
+      </Remedy>
     </MessageBar>
   );
 }
