@@ -6,6 +6,8 @@ export interface BookData {
   readonly active: number;
   /** Set where formulas are calculated only when someone asks: their values may be older than the cells they read. */
   readonly manualCalculation?: true;
+  /** Results that a file held cell by cell and of which another program has changed a cell: "Months!B2:C9". */
+  readonly loosened?: readonly string[];
   /** What add-ins keep in the workbook; their parts and settings travel with the file. */
   readonly customXml?: readonly { readonly id: string; readonly xml: string }[];
   readonly settings?: Readonly<Record<string, unknown>>;

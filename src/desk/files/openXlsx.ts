@@ -1,6 +1,7 @@
 import { cellRef, dateToSerial, rangeRef, readXlsx, type Cell, type CellValue, type Sheet, type Workbook } from "hucre";
 import type { BookCell, BookData, BookValue, SheetData, StyledCell } from "../book/bookData.ts";
 import { chartParts, toBookChart, withoutEmptyLines } from "./charts.ts";
+import { putTogether } from "./elements/putTogether.ts";
 import { readKept, type Kept } from "./keptParts.ts";
 import { inPoints } from "./margins.ts";
 import { changeParts, pack, partsMatching, textOf, unpack } from "./parts.ts";
@@ -20,7 +21,7 @@ export async function openXlsx(bytes: Uint8Array): Promise<Reading<BookData>> {
   if (because !== null) return unreadable(because);
   const parsed = await parse(bytes);
   if (parsed === null) return unreadable("it is damaged, or no Excel workbook (.xlsx)");
-  const book = withKept(toBook(parsed.workbook), parsed.kept);
+  const book = withKept(putTogether(toBook(parsed.workbook)), parsed.kept);
   return readable(isCalculatedByHand(bytes) ? { ...book, manualCalculation: true } : book);
 }
 

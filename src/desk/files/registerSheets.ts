@@ -1,5 +1,6 @@
 import type { CarriedSheets, SheetData } from "../book/bookData.ts";
 import type { Carried } from "./carriedParts.ts";
+import { withHiddenSpillNames } from "./elements/spillNames.ts";
 import { partOf, textOf, type Parts } from "./parts.ts";
 import { appendTo, countOf, escapeXml, insideOf, prefixOf, withPrefix } from "./xmlText.ts";
 
@@ -76,7 +77,7 @@ function withNames(part: string, { sheets, names }: CarriedSheets): string {
     ),
   );
   if (entries.length === 0) return part;
-  const children = withPrefix(entries.join(""), prefix);
+  const children = withPrefix(withHiddenSpillNames(entries.join("")), prefix);
   return appendTo(part, `${prefix}definedNames`, children) ?? afterSheets(part, prefix, children);
 }
 

@@ -1,5 +1,6 @@
 import { isDateFormat, writeCsv, type CellValue } from "hucre";
-import type { BookCell, BookValue, SheetData } from "../book/bookData.ts";
+import type { BookCell, SheetData } from "../book/bookData.ts";
+import { isStyled, valueOf } from "./cells.ts";
 import { writeIsoDate } from "./isoDates.ts";
 
 /**
@@ -23,10 +24,7 @@ function toField(cell: BookCell): CellValue {
   return value === null ? null : value.error;
 }
 
-const valueOf = (cell: BookCell): BookValue =>
-  typeof cell === "object" && cell !== null && "value" in cell ? cell.value : cell;
-
 function isDate(cell: BookCell): boolean {
-  const format = typeof cell === "object" && cell !== null && "value" in cell ? cell.style?.numberFormat : undefined;
+  const format = isStyled(cell) ? cell.style?.numberFormat : undefined;
   return format !== undefined && isDateFormat(format);
 }

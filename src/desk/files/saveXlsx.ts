@@ -8,8 +8,11 @@ import {
   type TableDefinition,
   type WriteSheet,
 } from "hucre";
-import type { BookCell, BookData, BookValue, SheetData, StyledCell } from "../book/bookData.ts";
+import type { BookData, BookValue, SheetData, StyledCell } from "../book/bookData.ts";
+import { absolute } from "./absolute.ts";
+import { isStyled, valueOf } from "./cells.ts";
 import { chartParts, toFileChart, finishedChart } from "./charts.ts";
+import { withHiddenSpillNames } from "./elements/spillNames.ts";
 import { standardFont, withWholeFonts } from "./fonts.ts";
 import { keptOf, withKept } from "./keptParts.ts";
 import { inInches } from "./margins.ts";
@@ -43,7 +46,7 @@ const finishes = (book: BookData, usualFont: string): readonly (readonly [RegExp
   [/^xl\/worksheets\/[^/]+\.xml$/, withErrorResults],
   [chartParts, finishedChart],
   [/^xl\/styles\.xml$/, (part) => withWholeFonts(part, usualFont)],
-  [/^xl\/workbook\.xml$/, (part) => finishedWorkbook(part, book)],
+  [/^xl\/workbook\.xml$/, (part) => withHiddenSpillNames(finishedWorkbook(part, book))],
   [/^docProps\/app\.xml$/, finishedProperties],
 ];
 
@@ -116,14 +119,7 @@ function rowDefsOf({ rowHeights = [], hiddenRows }: SheetData): Map<number, RowD
   return rowDefs;
 }
 
-const isStyled = (cell: BookCell): cell is StyledCell =>
-  typeof cell === "object" && cell !== null && !("error" in cell);
-
-const valueOf = (cell: BookCell): BookValue => (isStyled(cell) ? cell.value : cell);
-
 const plain = (value: BookValue): CellValue => (typeof value === "object" && value !== null ? value.error : value);
-
-const absolute = (area: string): string => area.replaceAll("$", "").replace(/([A-Z]+)(\d+)/gi, "$$$1$$$2");
 
 /** Whatever a cell is beyond its value, by "row,column". */
 function detailsOf(sheet: SheetData): Map<string, Partial<Cell>> {

@@ -11,12 +11,33 @@ const shownAddIn = "FOOTING.";
  * @param inTable - the table that the formula stands in, empty for none.
  */
 export function toStored(formula: string, inTable = ""): string {
-  return outsideQuotes(withThisRow(formula.replace(/^=/, ""), inTable), (code) =>
-    code
-      .replace(/((?:\$?[A-Z]{1,3})\$?\d{1,7})#/gi, "ANCHORARRAY($1)")
-      .replace(/(?<![\w.])([A-Z][A-Z0-9.]*)(?=\()/gi, storedName),
+  return outsideQuotes(withAnchors(withThisRow(formula.replace(/^=/, ""), inTable)), (code) =>
+    code.replace(/(?<![\w.])([A-Z][A-Z0-9.]*)(?=\()/gi, storedName),
   );
 }
+
+/** Text, columns of tables and names of sheets; or a cell, with the sheet that it stands on where one is named. */
+const textOr = (cell: (reference: string) => string): RegExp =>
+  new RegExp(
+    [
+      String.raw`"(?:[^"]|"")*"`,
+      bracketed,
+      cell(String.raw`((?:'(?:[^']|'')+'!|[\p{L}_][\p{L}\p{N}_.]*!)?\$?[A-Z]{1,3}\$?\d{1,7})`),
+      String.raw`'(?:[^']|'')*'`,
+    ].join("|"),
+    "giu",
+  );
+
+const spilledCell = textOr((reference) => String.raw`(?<![\p{L}\p{N}_.'!])${reference}#`);
+const anchoredCell = textOr((reference) => String.raw`ANCHORARRAY\(${reference}\)`);
+
+const withAnchors = (formula: string): string =>
+  formula.replaceAll(spilledCell, (whole: string, cell?: string) =>
+    cell === undefined ? whole : `ANCHORARRAY(${cell})`,
+  );
+
+const withoutAnchors = (formula: string): string =>
+  formula.replaceAll(anchoredCell, (whole: string, cell?: string) => (cell === undefined ? whole : `${cell}#`));
 
 function storedName(name: string): string {
   const upper = name.toUpperCase();
@@ -41,18 +62,41 @@ const withThisRow = (formula: string, inTable: string): string =>
 const thisRow = (columns: string): string =>
   columns === "" ? "[#This Row]" : `[[#This Row],${columns.startsWith("[") ? columns : `[${columns}]`}]`;
 
-/** The same formula as people write it, with its "=". */
+/**
+ * The same formula as people write it, with its "=". Functions that came after the file format stand in capitals: LibreOffice
+ * saves those that it does not know in small letters.
+ */
 export function toShown(stored: string): string {
   const shown = outsideQuotes(stored.replace(/^=/, ""), (code) =>
     code
-      .replace(/_xldudf_FOOTING_(\w+)/gi, (_, name: string) => shownAddIn + name)
-      .replace(/_xlfn\.(?:_xlws\.)?|_xlpm\./g, "")
-      .replace(/ANCHORARRAY\(([^()]*)\)/g, "$1#"),
+      .replace(/_xldudf_FOOTING_(\w+)/gi, (_, name: string) => shownAddIn + name.toUpperCase())
+      .replace(/_xlfn\.(?:_xlws\.)?([\w.]+)/gi, (_, name: string) => name.toUpperCase())
+      .replaceAll("_xlpm.", ""),
   );
-  return `=${shown}`;
+  return `=${withoutAnchors(shown)}`;
 }
 
 const quotedOrBracketed = new RegExp(String.raw`("(?:[^"]|"")*"|'(?:[^']|'')*'|${bracketed})`, "u");
+
+/** The functions that a formula calls, in capitals and without prefixes; ANCHORARRAY for a spilled range A1#. */
+export function functionsIn(formula: string): readonly string[] {
+  const called: string[] = [];
+  outsideQuotes(toStored(formula), (code) => {
+    for (const [, name = ""] of code.matchAll(/([A-Z_][\w.]*)(?=\()/gi)) called.push(name.toUpperCase());
+    return code;
+  });
+  return called.map((name) => name.replace(/^_XLFN\.(?:_XLWS\.)?/, ""));
+}
+
+/** Whether a formula gives the same in every cell: it asks neither for its own place nor for what stands beside it. */
+export function isPlaceless(formula: string): boolean {
+  let found = /\[@|\[#This Row\]/i.test(formula);
+  outsideQuotes(formula, (code) => {
+    found ||= /@|\b(?:ROW|COLUMN)\(\s*\)/i.test(code);
+    return code;
+  });
+  return !found;
+}
 
 /** Text in double quotes, sheet names in single ones and columns of tables in brackets stay as they are. */
 function outsideQuotes(formula: string, change: (code: string) => string): string {

@@ -172,6 +172,11 @@ describe("formulas", () => {
       stored: "<f>_xlfn.NORM.S.DIST(1,TRUE)+STDEV(B1:B3)</f>",
     },
     { formula: "=SUM(SORT(B1#))", value: 6, stored: "<f>SUM(_xlfn._xlws.SORT(_xlfn.ANCHORARRAY(B1)))</f>" },
+    {
+      formula: "=SUM('Rye''s & A1# '!B1#,Other!$B$1#)+'x A1#'!B2",
+      value: 6,
+      stored: "<f>SUM(_xlfn.ANCHORARRAY('Rye''s &amp; A1# '!B1),_xlfn.ANCHORARRAY(Other!$B$1))+'x A1#'!B2</f>",
+    },
     { formula: "='T.TEST(x'!A1&\"A1#\"", value: "", stored: "<f>'T.TEST(x'!A1&amp;\"A1#\"</f>" },
     { formula: "=SUM(T[T.TEST(x) A1'#])", value: 6, stored: "<f>SUM(T[T.TEST(x) A1'#])</f>" },
     { formula: "=1/0", value: { error: "#DIV/0!" }, stored: ' t="e"><f>1/0</f><v>#DIV/0!</v>' },
