@@ -15,6 +15,7 @@ import {
 } from "./formulas/books.ts";
 import { judgeFormulas } from "./formulas/judge.ts";
 import { judge, judgeBook } from "./judge.ts";
+import { laidOut } from "./layouts.ts";
 import { reviewBook, reviewTogether } from "./wholeBook.ts";
 
 const faultOf = (planted: PlantedBook): string | null =>
@@ -59,6 +60,15 @@ describe("planted faults", () => {
     const all = [...singles(), ...pairs(), ...soundBooks()].filter(({ expectedInBook }) => expectedInBook !== null);
     const wrong: string[] = [];
     for (const planted of all.filter((_, index) => index % 16 === 3)) {
+      const fault = judgeBook(planted, await reviewBook(planted.book));
+      if (fault !== null) wrong.push(`${planted.name}: ${fault}`);
+    }
+    expect(wrong).toEqual([]);
+  });
+
+  it("are found where brackets stand beside coefficients, above them names, and in intervals", async () => {
+    const wrong: string[] = [];
+    for (const planted of laidOut().filter((_, index) => index % 13 === 4)) {
       const fault = judgeBook(planted, await reviewBook(planted.book));
       if (fault !== null) wrong.push(`${planted.name}: ${fault}`);
     }

@@ -19,6 +19,7 @@ import {
 } from "./formulas/books.ts";
 import { judgeFormulas } from "./formulas/judge.ts";
 import { judge, judgeBook } from "./judge.ts";
+import { laidOut } from "./layouts.ts";
 import { reviewBook, reviewTogether } from "./wholeBook.ts";
 
 /** `--save DIR` writes the workbooks; `--books` takes each the whole way, through the desk and the search for reports. */
@@ -34,14 +35,14 @@ interface Judged {
   readonly fault: string | null;
 }
 
-async function judgedPlanted(planted: PlantedBook): Promise<Judged> {
+async function judgedPlanted(what: string, planted: PlantedBook): Promise<Judged> {
   const fault = isWhole
     ? judgeBook(planted, await reviewBook(planted.book))
     : judge(
         planted,
         reviewClaim(planted.claim, () => undefined),
       );
-  return { kind: `typed, ${planted.kind}`, name: planted.name, book: planted.book, fault };
+  return { kind: `${what}, ${planted.kind}`, name: planted.name, book: planted.book, fault };
 }
 
 async function* judgedFormulas(what: string, books: readonly FormulaBook[]): AsyncGenerator<Judged> {
@@ -56,8 +57,10 @@ async function* judgedFormulas(what: string, books: readonly FormulaBook[]): Asy
 async function* all(): AsyncGenerator<Judged> {
   const typed = [...singles(), ...pairs(), ...soundBooks()];
   for (const planted of typed) {
-    if (!isWhole || planted.expectedInBook !== null) yield await judgedPlanted(planted);
+    if (!isWhole || planted.expectedInBook !== null) yield await judgedPlanted("typed", planted);
   }
+  // How a report lies on its sheet shows in books alone.
+  for (const planted of isWhole ? laidOut() : []) yield await judgedPlanted("typed, brackets elsewhere", planted);
   const usual = [...(isWhole ? formulaFaults() : everyFormulaFault()), ...formulaPairs(), ...soundFormulas()];
   yield* judgedFormulas("formulas", usual);
   yield* judgedFormulas("formulas without drivers", [...positionFaults(), ...soundPositions()].filter(isTaken));

@@ -79,6 +79,8 @@ export interface Claim {
   readonly reported: readonly ReportedNumber[];
   /** The other columns beside the data: they can be the time or the groups of the rows. */
   readonly others: readonly ClaimedLine[];
+  /** Two-sided level of the bounds where the report says it: 0.05 for 95 %. */
+  readonly level?: number;
   /** What had to be taken for granted to read a report of typed numbers, as full sentences. */
   readonly assumed?: readonly string[];
 }

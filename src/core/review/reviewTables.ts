@@ -19,9 +19,9 @@ export const namesOfDrivers = ({ drivers }: Claim): readonly string[] => drivers
 /** Every reported number, in the order of the report. */
 export function comparedRows({ claim, compared, explanation }: ClaimReview): readonly ComparedRow[] {
   const drivers = namesOfDrivers(claim);
-  return compared.map((comparison) => {
+  return compared.map((comparison, index) => {
     const { reported, agrees } = comparison;
-    const under = explanation?.compared.find((other) => other.reported.cell === reported.cell);
+    const under = explanation?.compared[index];
     return {
       name: quantityInWords(reported.quantity, drivers),
       cell: reported.cell,

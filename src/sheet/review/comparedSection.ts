@@ -12,9 +12,7 @@ const figureColumns = { first: 2, count: 3 } as const;
 /** Every reported number beside the same number recomputed, in the digits of the report. */
 export function comparedSection(review: ClaimReview): Section {
   const { compared, explanation } = review;
-  const under = (cell: string): Comparison | undefined =>
-    explanation?.compared.find(({ reported }) => reported.cell === cell);
-  const lines = compared.map((comparison) => lineOf(review, comparison, under(comparison.reported.cell)));
+  const lines = compared.map((comparison, index) => lineOf(review, comparison, explanation?.compared[index]));
   const headings = ["Number", "Cell", "Reported", "Recomputed", explanation === null ? "" : "As explained", "Agrees"];
   const figureArea = (row: number, rows: number) => ({
     row,

@@ -3,7 +3,7 @@ import { pValueOf } from "../../inference/ratioLaw.ts";
 import type { Consequence } from "../claimReview.ts";
 import type { ErrorsUsed } from "./errorMatch.ts";
 import type { Blame } from "./findings.ts";
-import { type Reported, type Standing, contradicts, reportedStanding, standingOf } from "./standings.ts";
+import { type Reported, type Standing, contradicts, level, reportedStanding, standingOf } from "./standings.ts";
 import { type Bench, type Trial, allKinds, trial } from "./trial.ts";
 import type { Intended } from "./intended.ts";
 import { answeredInWords, reportedInWords } from "./words.ts";
@@ -32,10 +32,11 @@ export function consequencesOf(bench: Bench, drawing: Drawing): Drawn {
   const { drivers, constant } = bench.claim;
   const before = underReportedErrors(bench, drawing);
   const degrees = made?.fit.degreesOfFreedom ?? answer.fit.degreesOfFreedom;
+  const boundsAt = bench.claim.level ?? made?.used?.level ?? level;
   const drawn = drivers.flatMap(({ name: driver }, term) => {
     const found = answer.drivers[term + (constant ? 1 : 0)];
     if (found === undefined) return [];
-    const reported = reportedStanding(bench.claim, term, degrees);
+    const reported = reportedStanding({ ...bench.claim, level: boundsAt }, term, degrees);
     const should = standingOf(found.coefficient, found.pValue);
     const fault = faultIn({ reported, should, before: before?.[term] ?? null, allowed: drawing.allowed });
     const words = { asReported: reportedInWords(reported), asItShouldBe: answeredInWords(should, found) };

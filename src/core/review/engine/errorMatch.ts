@@ -1,5 +1,5 @@
 import { criticalValue, pValueOf } from "../../inference/ratioLaw.ts";
-import type { ReportedNumber } from "../claim.ts";
+import type { Claim, ReportedNumber } from "../claim.ts";
 import { agrees } from "./agreement.ts";
 import type { ErrorKind, NamedLaw } from "./errorKinds.ts";
 import { type ErrorQuantity, placeOf } from "./quantities.ts";
@@ -21,7 +21,12 @@ export interface Fitted {
   readonly model: ModelRecipe;
 }
 
-const levels = [0.05, 0.1, 0.01] as const;
+/** What is tried where a report does not say which level its bounds have, the usual one first. */
+const usualLevels = [0.05, 0.1, 0.01] as const;
+
+/** The levels that the bounds of a report can have. */
+export const levelsOf = ({ level }: Pick<Claim, "level">): readonly number[] =>
+  level === undefined ? usualLevels : [level];
 
 /** The figures under one kind; null where the regression has no such term. */
 export function errorValue(
@@ -49,11 +54,17 @@ export function errorValue(
   }
 }
 
+/** The figures of a report that rest on standard errors, and the levels that its bounds can have. */
+export interface ErrorReport {
+  readonly reported: readonly ReportedError[];
+  readonly levels: readonly number[];
+}
+
 /** Every law and level of the bounds under which one kind gives all the reported figures; empty where none does. */
-export function matchesOf(kind: ErrorKind, reported: readonly ReportedError[], fitted: Fitted): ErrorsUsed[] {
+export function matchesOf(kind: ErrorKind, { reported, levels }: ErrorReport, fitted: Fitted): ErrorsUsed[] {
   const isReached = ({ quantity: { kind: what } }: ReportedError): boolean => what === "low" || what === "high";
   const lawless = reported.filter(({ quantity: { kind: what } }) => what === "standard-error" || what === "ratio");
-  const usual = { kind, law: kind.laws[0]!, level: levels[0] };
+  const usual = { kind, law: kind.laws[0]!, level: levels[0]! };
   if (!allAgree(lawless, fitted, usual)) return [];
   const pValues = reported.filter(({ quantity: { kind: what } }) => what === "p-value");
   const bounds = reported.filter(isReached);

@@ -1,8 +1,10 @@
 import type { Answer } from "../../answer/answer.ts";
+import { confidenceInWords } from "../../answer/wording.ts";
 import type { ErrorsChoice } from "../../covariance/choice.ts";
 import type { ErrorsFound } from "../claimReview.ts";
 import { type ErrorsUsed, matchesOf } from "./errorMatch.ts";
 import { type Bench, type Trial, allKinds, reportedErrors } from "./trial.ts";
+import { level as usualLevel } from "./standings.ts";
 import { errorsSentence } from "./words.ts";
 
 /** Every kind of standard errors that gives the reported figures, simplest first; pauses after each that is tried. */
@@ -10,12 +12,12 @@ export function* fittingKinds(
   bench: Bench,
   { recipe, fit, errorsAgree }: Trial,
 ): Generator<null, readonly ErrorsUsed[]> {
-  const reported = reportedErrors(bench.claim);
-  if (reported.length === 0 || !errorsAgree) return [];
+  const report = reportedErrors(bench.claim);
+  if (report.reported.length === 0 || !errorsAgree) return [];
   const fitted = { coefficients: fit.coefficients, model: recipe.model };
   const found: ErrorsUsed[] = [];
   for (const kind of allKinds(bench, { recipe, fit })) {
-    const [match] = matchesOf(kind, reported, fitted);
+    const [match] = matchesOf(kind, report, fitted);
     if (match !== undefined) found.push(match);
     yield null;
   }
@@ -30,7 +32,10 @@ export function errorsFound(kinds: readonly ErrorsUsed[], answer: Answer | null)
   return { ...named, sentence: errorsSentence(named, answer) };
 }
 
-const nameOf = ({ kind, law }: ErrorsUsed): string => (law.name === "" ? kind.name : `${kind.name}, ${law.name}`);
+const nameOf = ({ kind, law, level }: ErrorsUsed): string =>
+  [kind.name, law.name, level === usualLevel ? "" : `bounds at ${confidenceInWords(level)}`]
+    .filter((part) => part !== "")
+    .join(", ");
 
 type Kind = ErrorsChoice["kind"];
 

@@ -23,7 +23,8 @@ type Verdict = "yes" | "no" | "open";
  * standard error, or the bounds.
  * @param term - which driver. @param degrees - of freedom, for ratios.
  */
-export function reportedStanding({ reported }: Claim, term: number, degrees: number): Reported {
+export function reportedStanding(claim: Claim, term: number, degrees: number): Reported {
+  const { reported, level: claimed = level } = claim;
   const of = (kind: Quantity["kind"]): ReportedNumber | null =>
     reported.find(({ quantity }) => quantity.kind === kind && "term" in quantity && quantity.term === term) ?? null;
   const direction = directionOf([of("coefficient"), of("ratio"), of("low"), of("high")]);
@@ -31,7 +32,7 @@ export function reportedStanding({ reported }: Claim, term: number, degrees: num
     byPValue(of("p-value")) ??
     byRatio(of("ratio"), degrees) ??
     byError(of("coefficient"), of("standard-error"), degrees) ??
-    byBounds(of("low"), of("high"));
+    byBounds({ low: of("low"), high: of("high") }, degrees, claimed);
   if (found === null) {
     const coefficient = of("coefficient");
     const from = coefficient === null ? null : { kind: "coefficient" as const, shown: coefficient.shown };
@@ -73,8 +74,8 @@ function byRatio(number: ReportedNumber | null, degrees: number): Found | null {
   return { verdict, number };
 }
 
-const criticalAt = (degreesOfFreedom: number): number =>
-  criticalValue(level, degreesOfFreedom > 0 ? { law: "t", degreesOfFreedom } : { law: "normal" });
+const criticalAt = (degreesOfFreedom: number, at: number = level): number =>
+  criticalValue(at, degreesOfFreedom > 0 ? { law: "t", degreesOfFreedom } : { law: "normal" });
 
 function byError(coefficient: ReportedNumber | null, error: ReportedNumber | null, degrees: number): Found | null {
   if (coefficient === null || error === null) return null;
@@ -86,12 +87,30 @@ function byError(coefficient: ReportedNumber | null, error: ReportedNumber | nul
   return { verdict: opposite[below(criticalAt(degrees), least, most)], number };
 }
 
-function byBounds(low: ReportedNumber | null, high: ReportedNumber | null): Found | null {
+interface Bounds {
+  readonly low: ReportedNumber | null;
+  readonly high: ReportedNumber | null;
+}
+
+/** Bounds of another level than that of the question are led back to the ratio that they were made from. */
+function byBounds({ low, high }: Bounds, degrees: number, claimed: number): Found | null {
   if (low === null || high === null) return null;
+  const number = { ...low, shown: `${low.shown} to ${high.shown}` };
+  if (claimed === level) return { verdict: isApart(low, high), number };
+  const rounding = Math.max(low.halfUnit, high.halfUnit);
+  const [middle, reach] = [Math.abs(low.value + high.value) / 2, (high.value - low.value) / 2];
+  const quantile = criticalAt(degrees, claimed);
+  const least = (quantile * Math.max(0, middle - rounding)) / (reach + rounding);
+  const most = (quantile * (middle + rounding)) / Math.max(reach - rounding, Number.MIN_VALUE);
+  return { verdict: opposite[below(criticalAt(degrees), least, most)], number };
+}
+
+/** Whether zero lies outside. */
+function isApart(low: ReportedNumber, high: ReportedNumber): Verdict {
   const positive = opposite[below(0, low.value - low.halfUnit, low.value + low.halfUnit)];
   const negative = below(0, high.value - high.halfUnit, high.value + high.halfUnit);
-  if (positive === "yes" || negative === "yes") return { verdict: "yes", number: low };
-  return { verdict: positive === "no" && negative === "no" ? "no" : "open", number: low };
+  if (positive === "yes" || negative === "yes") return "yes";
+  return positive === "no" && negative === "no" ? "no" : "open";
 }
 
 /** What a coefficient and its p-value say. */

@@ -3,7 +3,14 @@ import type { Claim } from "../claim.ts";
 import type { Comparison } from "../claimReview.ts";
 import { agrees } from "./agreement.ts";
 import { type ErrorKind, groupedKinds, lagKinds, plainKinds, ruleKinds } from "./errorKinds.ts";
-import { type ErrorsUsed, type ReportedError, errorValue, matchesOf } from "./errorMatch.ts";
+import {
+  type ErrorReport,
+  type ErrorsUsed,
+  type ReportedError,
+  errorValue,
+  levelsOf,
+  matchesOf,
+} from "./errorMatch.ts";
 import type { Frame } from "./frame.ts";
 import type { Ordering } from "./orderings.ts";
 import { isErrorQuantity, plainQuantity, plainValue } from "./quantities.ts";
@@ -35,8 +42,10 @@ export interface Trial {
 
 export const agreesThroughout = ({ plainAgree, errorsAgree }: Trial): boolean => plainAgree && errorsAgree;
 
-export const reportedErrors = ({ reported }: Claim): ReportedError[] =>
-  reported.filter((number): number is ReportedError => isErrorQuantity(number.quantity));
+export const reportedErrors = (claim: Claim): ErrorReport => ({
+  reported: claim.reported.filter((number): number is ReportedError => isErrorQuantity(number.quantity)),
+  levels: levelsOf(claim),
+});
 
 /**
  * Fits a recipe and holds it against the report.
@@ -65,7 +74,8 @@ function trialOf(bench: Bench, { recipe, fit }: Made, kinds: Kinds): Trial {
     return found !== null && agrees(number, found);
   });
   const tried = plainAgree ? kinds(bench, { recipe, fit }) : plainKinds(fit);
-  const match = errors.length === 0 ? null : firstMatch(errors, { recipe, fit }, tried);
+  const isNone = errors.reported.length === 0;
+  const match = isNone ? null : firstMatch(errors, { recipe, fit }, tried);
   const used = match?.used ?? null;
   return {
     recipe,
@@ -74,12 +84,12 @@ function trialOf(bench: Bench, { recipe, fit }: Made, kinds: Kinds): Trial {
     used,
     errorsTried: match?.tried ?? 0,
     plainAgree,
-    errorsAgree: errors.length === 0 || match?.fits === true,
+    errorsAgree: isNone || match?.fits === true,
   };
 }
 
 /** The first kind that gives all reported figures; the classical one where none does. */
-function firstMatch(errors: readonly ReportedError[], { recipe, fit }: Made, kinds: Generator<ErrorKind>) {
+function firstMatch(errors: ErrorReport, { recipe, fit }: Made, kinds: Generator<ErrorKind>) {
   const fitted = { coefficients: fit.coefficients, model: recipe.model };
   let tried = 0;
   let classical: ErrorKind | null = null;
@@ -90,7 +100,7 @@ function firstMatch(errors: readonly ReportedError[], { recipe, fit }: Made, kin
     if (used !== undefined) return { used, tried, fits: true };
   }
   if (classical === null) return null;
-  return { used: { kind: classical, law: classical.laws[0]!, level: 0.05 }, tried, fits: false };
+  return { used: { kind: classical, law: classical.laws[0]!, level: errors.levels[0]! }, tried, fits: false };
 }
 
 /** Every kind of standard errors that the sheet allows to be tried. */

@@ -12,7 +12,7 @@ const figures: Readonly<Record<string, string>> = {
   "p-value": "p-value",
   ratio: "ratio",
   "standard-error": "standard error",
-  low: "bounds from",
+  low: "interval",
   coefficient: "coefficient",
 };
 

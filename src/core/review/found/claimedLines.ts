@@ -54,7 +54,7 @@ export const placeAlong = ({ sheet, runs, track }: Omit<Stretch, "from" | "count
   runs === "down" ? { sheet, row: position, column: track } : { sheet, row: track, column: position };
 
 /** A row of a sheet in the form in which columns are kept. */
-function rowOf(sheet: BookSheet, row: number): CellColumn {
+export function rowOf(sheet: BookSheet, row: number): CellColumn {
   const at = row - sheet.firstRow;
   const kinds = new Uint8Array(sheet.columns.length);
   const numbers = new Float64Array(sheet.columns.length);

@@ -53,15 +53,23 @@ function inGeneral(value: number, digits: number): ShownNumber {
 /** "3.10**", "(0.42)", "4.2 %": the digits that stand there are the digits that count. */
 export function readShownText(text: string): ShownNumber | null {
   const plain = text.replace(/\s*[*†‡]+\s*$/, "").trim();
-  // "0,125" has its decimals behind the comma: nobody sets apart thousands behind a zero.
-  const read = (/^\D*0,/.test(plain) ? null : readWith(plain, ".")) ?? readWith(plain, ",");
-  return read === null ? null : { ...read, shown: plain };
+  const [byPoint, byComma] = readingsOfNumber;
+  return byPoint(plain) ?? byComma(plain);
 }
 
-function readWith(text: string, mark: DecimalMark): Omit<ShownNumber, "shown"> | null {
+/** A number as it is read with decimals behind a point, and behind a comma. */
+export const readingsOfNumber: readonly [Reading, Reading] = [
+  // "0,125" has its decimals behind the comma: nobody sets apart thousands behind a zero.
+  (text) => (/^\D*0,/.test(text) ? null : readWith(text, ".")),
+  (text) => readWith(text, ","),
+];
+
+type Reading = (text: string) => ShownNumber | null;
+
+function readWith(text: string, mark: DecimalMark): ShownNumber | null {
   const value = readTextNumber(text, mark);
   if (value === null) return null;
   const [, decimals = "", exponent = "0"] = new RegExp(`\\${mark}(\\d*)(?:e([+-]?\\d+))?`, "i").exec(text) ?? [];
   const shift = Number(exponent) - (text.includes("%") ? 2 : 0);
-  return { value, halfUnit: 0.5 * 10 ** (shift - decimals.length) };
+  return { value, halfUnit: 0.5 * 10 ** (shift - decimals.length), shown: text };
 }

@@ -1,7 +1,6 @@
 import type { Claim, Quantity, ReportedNumber } from "../claim.ts";
 import { addressAt } from "../cellsOfBook.ts";
 import type { Gathered } from "../found/gatherClaims.ts";
-import { shownNumberAt } from "../found/shownNumber.ts";
 import type { CellPlace } from "../cellsOfBook.ts";
 import { withBrackets } from "./readInBrackets.ts";
 import type { ReportBlock, ReportedTerm } from "./reportBlocks.ts";
@@ -36,20 +35,20 @@ export function withBlock(claim: Claim, group: Gathered, block: ReportBlock): Cl
   return withBrackets(whole, counted, block.model.brackets);
 }
 
-function withNumbers(claim: Claim, group: Gathered, { terms, summaries }: ReportBlock): Claim {
+function withNumbers(claim: Claim, group: Gathered, { terms, summaries, level }: ReportBlock): Claim {
   const known = new Set(claim.reported.map(({ cell }) => cell));
   const ofTerms = terms.flatMap((term) => {
     const counted = termCounted(term, group);
     return counted === undefined
       ? []
-      : term.numbers.map(({ word, place }) => ({ quantity: { kind: word, term: counted }, place }));
+      : term.numbers.map(({ word, place, shown }) => ({ quantity: { kind: word, term: counted }, place, shown }));
   });
-  const ofWhole = summaries.map(({ word, place }) => ({ quantity: { kind: word }, place }));
-  const further = [...ofTerms, ...ofWhole].flatMap(({ quantity, place }): ReportedNumber[] => {
-    const shown = known.has(addressAt(place)) ? null : shownNumberAt(place);
-    return shown === null ? [] : [{ quantity, ...shown, cell: addressAt(place) }];
-  });
-  return further.length === 0 ? claim : { ...claim, reported: [...claim.reported, ...further] };
+  const ofWhole = summaries.map(({ word, place, shown }) => ({ quantity: { kind: word }, place, shown }));
+  const further = [...ofTerms, ...ofWhole].flatMap(({ quantity, place, shown }): ReportedNumber[] =>
+    known.has(addressAt(place)) ? [] : [{ quantity, ...shown, cell: addressAt(place) }],
+  );
+  if (further.length === 0) return claim;
+  return { ...claim, ...(level !== null && { level }), reported: [...claim.reported, ...further] };
 }
 
 /** Which driver a line of the block is about, told by a cell of it that a formula fills. */

@@ -1,61 +1,78 @@
 import type { SheetArea } from "../../table/address.ts";
-import { type CellPlace, isTextAt, kindAt, overlap, wordsAt } from "../cellsOfBook.ts";
+import { type CellPlace, isTextAt, kindAt, wordsAt } from "../cellsOfBook.ts";
 import { cellKind } from "../../table/cells.ts";
 import { shownNumberAt } from "../found/shownNumber.ts";
-import { type BracketNote, type Brackets, bracketNotes } from "./bracketNotes.ts";
-import { type BracketTable, bracketTables, isName } from "./bracketTables.ts";
+import { type BracketNote, type Brackets, type LevelNote, bracketNotes, levelNotes } from "./bracketNotes.ts";
+import { type BracketTable, bracketPlace, bracketTables, isName } from "./bracketTables.ts";
 import { type InBrackets, inBracketsAt } from "./inBrackets.ts";
+import { intervalInBrackets } from "./intervals.ts";
 import type { Label } from "./labels.ts";
 import { type ReportBlock, type ReportedTerm, areaBetween } from "./reportBlocks.ts";
-import { isConstantName } from "./reportWords.ts";
+import { type SummaryWord, isConstantName } from "./reportWords.ts";
 import { type SummaryNumber, farthestRows, firstOfEach, nearestArea } from "./summaries.ts";
+import { endsOf } from "./termNumbers.ts";
 import type { BookSheet } from "../book.ts";
 
-export interface BracketBlocks {
+/** A table with brackets as it was read. */
+export interface ReadTable {
+  readonly table: BracketTable;
+  readonly area: SheetArea;
+  /** How many names stand between its first coefficient and its last. */
+  readonly names: number;
+  /** Whether a word beside it speaks of a regression. */
+  readonly isSpokenOf: boolean;
+  /** Whether a word does that has no other meaning: what brackets hold, or R-squared and its like. */
+  readonly isSaid: boolean;
+  /** Where labels of whole regressions stand whose numbers it has. */
+  readonly own: readonly CellPlace[];
+  /** One for each model. */
   readonly blocks: readonly ReportBlock[];
-  /** Labels of whole regressions whose numbers the blocks have already. */
-  readonly own: ReadonlySet<Label>;
 }
 
-/** One block a model, of every table on a sheet whose numbers stand in brackets under their coefficients. */
-export function bracketBlocks(
+/** The tables of a sheet whose names stand to the left, as far as they are reports. */
+export function readTables(
   sheet: BookSheet,
   labels: readonly Label[],
-  headed: readonly ReportBlock[],
-): BracketBlocks {
-  const tables = bracketTables(sheet).filter((table) => !headed.some((block) => readsMore(block, table)));
-  if (tables.length === 0) return { blocks: [], own: new Set() };
-  const areas = tables.map(areaOf);
+  isReport: (found: Omit<ReadTable, "blocks">) => boolean,
+): ReadTable[] {
+  const levels = levelNotes(sheet);
   const notes = bracketNotes(sheet);
-  const begins = [
-    ...tables.map(({ first, names }) => ({ row: first, column: names })),
-    ...labels.filter(({ term }) => term === "coefficient").map(({ place }) => place),
-  ];
-  const own = new Set<Label>();
-  const blocks = tables.flatMap((table, index) => {
-    const bottom = bottomOf(table, labels, begins);
-    const near = notes.filter(({ place }) => nearestArea(areas, place) === index);
-    if (bottom.length === 0 && near.length === 0 && !looksLikeReport(table)) return [];
-    for (const label of bottom) own.add(label);
-    return table.columns.flatMap((column) => blockOf(table, column, { bottom, notes: near }));
+  return (["under", "beside"] as const).flatMap((side) => {
+    const tables = bracketTables(sheet, side);
+    const areas = tables.map(areaOf);
+    const begins = [
+      ...tables.map(({ first, names }) => ({ row: first, column: names })),
+      ...labels.filter(({ term }) => term === "coefficient").map(({ place }) => place),
+    ];
+    return tables.flatMap((table, index): ReadTable[] => {
+      const isNear = ({ place }: { readonly place: CellPlace }): boolean => nearestArea(areas, place) === index;
+      const beside = {
+        bottom: bottomOf(table, labels, begins),
+        notes: notes.filter(isNear),
+        levels: levels.filter(isNear),
+      };
+      const found = { table, area: areas[index]!, ...wordsBeside(table, beside) };
+      if (!isReport(found)) return [];
+      return [{ ...found, blocks: table.columns.flatMap((column) => blockOf(table, column, beside)) }];
+    });
   });
-  return { blocks, own };
 }
 
-/**
- * Where no word beside a table speaks of a regression, two names at the least have a number in brackets below, and no
- * name between them has none: accounts have negative subtotals without a name here and there.
- */
-const looksLikeReport = (table: BracketTable): boolean => table.pairs > 1 && rowsOf(table).length === table.pairs;
+const wordsBeside = (table: BracketTable, { bottom, notes, levels }: Beside) => ({
+  names: rowsOf(table).length,
+  isSpokenOf: bottom.length + notes.length + levels.length > 0,
+  isSaid:
+    notes.length + levels.length > 0 || bottom.some(({ summary }) => summary !== null && tellingWords.has(summary)),
+  own: bottom.map(({ place }) => place),
+});
 
-/** Whether headings over the same cells give more drivers than brackets do. */
-const readsMore = ({ area, terms }: ReportBlock, table: BracketTable): boolean =>
-  terms.length >= table.pairs && overlap(area, areaOf(table));
+/** Numbers of whole regressions that accounts and lists do not have. */
+const tellingWords: ReadonlySet<SummaryWord> = new Set(["r-squared", "adjusted-r-squared", "f", "f-p-value", "sigma"]);
 
-const areaOf = ({ sheet, names, columns, first, last }: BracketTable): SheetArea =>
+const areaOf = ({ sheet, side, names, columns, first, last }: BracketTable): SheetArea =>
   areaBetween(sheet, [
     { sheet, row: first, column: names },
-    { sheet, row: last + 1, column: columns.at(-1)! },
+    bracketPlace(side, { sheet, row: last, column: columns.at(-1)! }),
   ]);
 
 type Spot = Pick<CellPlace, "row" | "column">;
@@ -72,20 +89,20 @@ function bottomOf({ names, columns, last }: BracketTable, labels: readonly Label
 interface Beside {
   readonly bottom: readonly Label[];
   readonly notes: readonly BracketNote[];
+  readonly levels: readonly LevelNote[];
 }
 
-function blockOf(table: BracketTable, column: number, { bottom, notes }: Beside): ReportBlock[] {
-  const { sheet, names, columns, first } = table;
+function blockOf(table: BracketTable, column: number, { bottom, notes, levels }: Beside): ReportBlock[] {
+  const { sheet, side, names, columns, first } = table;
   const rows = rowsOf(table);
   const terms = rows.flatMap((row) => termAt(table, row, column));
-  if (!terms.some(({ isConstant, inBrackets }) => !isConstant && inBrackets !== null)) return [];
+  const hasBrackets = ({ inBrackets, numbers }: ReportedTerm): boolean => inBrackets !== null || numbers.length > 1;
+  if (!terms.some((term) => !term.isConstant && hasBrackets(term))) return [];
   const headings = headingsOver({ sheet, row: first, column });
   const left = columns.length === 1 ? names : column;
   const top = first - Math.min(1, headings.length);
-  const places = [
-    { sheet, row: top, column: left },
-    { sheet, row: table.last + 1, column },
-  ];
+  const places = [{ sheet, row: top, column: left }, bracketPlace(side, { sheet, row: table.last, column })];
+  const said = new Set(levels.map(({ level }) => level));
   const present = new Set(terms.map(({ name }) => name));
   const all = rows.map((row) => wordsAt({ sheet, row, column: names })).filter((name) => !isConstantName(name));
   return [
@@ -94,11 +111,12 @@ function blockOf(table: BracketTable, column: number, { bottom, notes }: Beside)
       area: areaBetween(sheet, places),
       terms,
       summaries: summariesIn(bottom, column),
+      level: said.size === 1 ? [...said][0]! : null,
       model: {
         brackets: bracketsOf(table, column, notes),
         headings,
         absent: all.filter((name) => !present.has(name)),
-        beside: columns.filter((other) => other !== column),
+        beside: { lie: "columns", at: columns.filter((other) => other !== column) },
       },
     },
   ];
@@ -110,33 +128,46 @@ function rowsOf({ sheet, names, first, last }: BracketTable): number[] {
 }
 
 /** None where the model's cell is empty, or has a dash: the driver is not in it. */
-function termAt({ sheet, names }: BracketTable, row: number, column: number): ReportedTerm[] {
+function termAt(table: BracketTable, row: number, column: number): ReportedTerm[] {
+  const { sheet, names } = table;
   const place = { sheet, row, column };
-  if (shownNumberAt(place) === null) return [];
+  const shown = shownNumberAt(place);
+  if (shown === null) return [];
   const name = wordsAt({ sheet, row, column: names });
+  const brackets = bracketsAt(table, place);
+  const interval = brackets.flatMap((at) => {
+    const found = intervalInBrackets(at, shown.value);
+    return found === null ? [] : [endsOf(found, at)];
+  });
   return [
     {
       name,
       isConstant: isConstantName(name),
-      numbers: [{ word: "coefficient", place }],
-      inBrackets: below({ sheet, names }, { row: row + 1, column }),
+      numbers: [{ word: "coefficient", place, shown }, ...(interval[0] ?? [])],
+      inBrackets: numbersIn(brackets)[0] ?? null,
     },
   ];
 }
 
-function below({ sheet, names }: Pick<BracketTable, "sheet" | "names">, { row, column }: Spot): InBrackets | null {
-  return wordsAt({ sheet, row, column: names }) === "" ? inBracketsAt({ sheet, row, column }) : null;
+/** Two cells of brackets at the most go with a coefficient: a number and an interval, or what is left unread. */
+function bracketsAt({ sheet, side, names }: BracketTable, coefficient: CellPlace): CellPlace[] {
+  const isOwn = ({ row }: CellPlace): boolean => side === "beside" || wordsAt({ sheet, row, column: names }) === "";
+  const places = [1, 2].map((steps) => bracketPlace(side, coefficient, steps));
+  const isBracketed = (place: CellPlace): boolean => inBracketsAt(place) !== null || intervalInBrackets(place) !== null;
+  const end = places.findIndex((place) => !isOwn(place) || !isBracketed(place));
+  return end < 0 ? places : places.slice(0, end);
 }
 
+const numbersIn = (places: readonly CellPlace[]): InBrackets[] => places.flatMap((place) => inBracketsAt(place) ?? []);
+
 function bracketsOf(table: BracketTable, column: number, notes: readonly BracketNote[]): Brackets {
-  const rows = rowsOf(table);
-  const shape = rows.map((row) => below(table, { row: row + 1, column })?.shape).find((one) => one !== undefined);
+  const { sheet } = table;
+  const numbers = rowsOf(table).map((row) => numbersIn(bracketsAt(table, { sheet, row, column })));
+  const shape = numbers.flat()[0]?.shape;
   const said = new Set(notes.filter((note) => note.shape === null || note.shape === shape).map(({ word }) => word));
   return {
     note: said.size === 1 ? [...said][0]! : null,
-    furtherLine: rows.some(
-      (row) => below(table, { row: row + 1, column }) !== null && below(table, { row: row + 2, column }) !== null,
-    ),
+    furtherLine: numbers.some(({ length }) => length > 1),
   };
 }
 

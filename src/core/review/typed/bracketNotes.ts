@@ -2,6 +2,7 @@ import { cellKind } from "../../table/cells.ts";
 import type { BookSheet } from "../book.ts";
 import type { CellPlace } from "../cellsOfBook.ts";
 import type { Shape } from "./inBrackets.ts";
+import { levelIn } from "./intervals.ts";
 import { type TermWord, termWordIn } from "./reportWords.ts";
 
 /** What numbers in brackets can be said to be. */
@@ -35,20 +36,38 @@ const shapes: readonly (readonly [RegExp, Shape | null])[] = [
   [/\bbrackets?\b|\bbracketed\b|\b(?:below|under|underneath|beneath)\b/, null],
 ];
 
-/** The notes of a sheet; each different text is looked at once. */
-export function bracketNotes(sheet: BookSheet): readonly BracketNote[] {
+/** The notes of a sheet. */
+export const bracketNotes = (sheet: BookSheet): readonly BracketNote[] => saidOn(sheet, notesIn);
+
+/** What the texts of a sheet say, with their places; each different text of a column is looked at once. */
+function saidOn<Said extends object>(
+  sheet: BookSheet,
+  reading: (text: string) => readonly Said[],
+): (Said & { readonly place: CellPlace })[] {
   return sheet.columns.flatMap(({ kinds, numbers, texts }, across) => {
-    const said = texts.map(notesIn);
-    if (said.every((notes) => notes.length === 0)) return [];
-    const found: BracketNote[] = [];
+    const said = texts.map(reading);
+    if (said.every((one) => one.length === 0)) return [];
+    const found: (Said & { readonly place: CellPlace })[] = [];
     for (let row = 0; row < kinds.length; row++) {
       if (kinds[row] !== cellKind.text) continue;
       const place = { sheet, row: sheet.firstRow + row, column: sheet.firstColumn + across };
-      found.push(...said[numbers[row]!]!.map((note) => ({ place, ...note })));
+      found.push(...said[numbers[row]!]!.map((one) => ({ ...one, place })));
     }
     return found;
   });
 }
+
+/** Which level intervals have, where a text says it: "95 % confidence intervals in brackets". */
+export interface LevelNote {
+  readonly place: CellPlace;
+  readonly level: number;
+}
+
+export const levelNotes = (sheet: BookSheet): readonly LevelNote[] =>
+  saidOn(sheet, (text) => {
+    const level = levelIn(text);
+    return level === null ? [] : [{ level }];
+  });
 
 /** "Standard errors in brackets; * p < 0.05", "Coefficient (t ratio)", "(robust standard errors)". */
 export function notesIn(text: string): readonly Omit<BracketNote, "place">[] {

@@ -1,12 +1,17 @@
 import type { BookSheet } from "../book.ts";
 import { type CellPlace, isTextAt, wordsAt } from "../cellsOfBook.ts";
 import { readShownText, shownNumberAt } from "../found/shownNumber.ts";
-import { allInBrackets } from "./inBrackets.ts";
+import { allInBrackets, inBracketsAt } from "./inBrackets.ts";
+import { intervalInBrackets } from "./intervals.ts";
 import { isConstantName, summaryWordIn } from "./reportWords.ts";
 
-/** Models in columns over the same names, each with numbers in brackets under its coefficients. */
+/** Where the brackets of a coefficient stand. */
+export type BracketSide = "under" | "beside";
+
+/** Models in columns over the same names, each with brackets under its coefficients, or beside them. */
 export interface BracketTable {
   readonly sheet: BookSheet;
+  readonly side: BracketSide;
   /** The column of the names. */
   readonly names: number;
   /** The columns of the models. */
@@ -14,37 +19,50 @@ export interface BracketTable {
   /** The rows of the first coefficient and of the last. */
   readonly first: number;
   readonly last: number;
-  /** How many names have a number in brackets below them. */
+  /** How many names have brackets, and how many of them hold an interval. */
   readonly pairs: number;
+  readonly intervals: number;
+  /** Whether one of the names is that of a constant. */
+  readonly hasConstant: boolean;
 }
 
-/** A coefficient with a number in brackets below it. */
+/** A coefficient with brackets. */
 interface Pair {
   readonly row: number;
   readonly column: number;
   readonly names: number;
+  readonly isInterval: boolean;
 }
+
+/** The cell so many steps away from a coefficient, in the direction in which its brackets stand. */
+export const bracketPlace = (side: BracketSide, { sheet, row, column }: CellPlace, steps = 1): CellPlace =>
+  side === "under" ? { sheet, row: row + steps, column } : { sheet, row, column: column + steps };
 
 /** The tables of a sheet from the top down, those of one column of names after the other. */
-export function bracketTables(sheet: BookSheet): readonly BracketTable[] {
+export function bracketTables(sheet: BookSheet, side: BracketSide): readonly BracketTable[] {
   const sides = new Map<number, Pair[]>();
-  for (const pair of pairsOf(sheet)) {
-    const side = sides.get(pair.names);
-    if (side === undefined) sides.set(pair.names, [pair]);
-    else side.push(pair);
+  for (const pair of pairsOf(sheet, side)) {
+    const together = sides.get(pair.names);
+    if (together === undefined) sides.set(pair.names, [pair]);
+    else together.push(pair);
   }
-  return [...sides.values()].flatMap((pairs) => tablesOf(sheet, pairs));
+  return [...sides.values()].flatMap((pairs) => tablesOf(sheet, side, pairs));
 }
 
-function pairsOf(sheet: BookSheet): Pair[] {
-  return allInBrackets(sheet).flatMap(({ place: { row, column } }): Pair[] => {
-    if (shownNumberAt({ sheet, row: row - 1, column }) === null) return [];
-    const names = columnOfNames(sheet, row - 1, column);
-    if (names === null || wordsAt({ sheet, row, column: names }) !== "") return [];
-    const isOfWhole = onlyOfWhole.has(summaryWordIn(wordsAt({ sheet, row: row - 1, column: names })) ?? "");
-    return isOfWhole ? [] : [{ row: row - 1, column, names }];
+function pairsOf(sheet: BookSheet, side: BracketSide): Pair[] {
+  return allInBrackets(sheet).flatMap((place): Pair[] => {
+    const { row, column } = bracketPlace(side, place, -1);
+    if (row < 0 || column < 0 || !isCoefficient({ sheet, row, column }, side)) return [];
+    const names = columnOfNames(sheet, row, column);
+    if (names === null || (side === "under" && wordsAt({ sheet, row: place.row, column: names }) !== "")) return [];
+    const isOfWhole = onlyOfWhole.has(summaryWordIn(wordsAt({ sheet, row, column: names })) ?? "");
+    return isOfWhole ? [] : [{ row, column, names, isInterval: intervalInBrackets(place) !== null }];
   });
 }
+
+/** Beside a coefficient stand its own brackets and no others'; under it they may be the second line of them. */
+const isCoefficient = (place: CellPlace, side: BracketSide): boolean =>
+  shownNumberAt(place) !== null && (side === "under" || inBracketsAt(place) === null);
 
 /** Under these may stand a p-value in brackets; no driver is called so. */
 const onlyOfWhole: ReadonlySet<string> = new Set(["f", "f-p-value", "r-squared", "adjusted-r-squared"]);
@@ -59,15 +77,21 @@ function columnOfNames(sheet: BookSheet, row: number, column: number): number | 
   return null;
 }
 
-/** Marks, dashes and numbers as text are no names. */
+/** Marks, dashes, numbers and intervals as text are no names, nor is what counts the models. */
 export const isName = (place: CellPlace): boolean =>
-  isTextAt(place) && /\p{L}/u.test(wordsAt(place)) && readShownText(wordsAt(place)) === null;
+  isTextAt(place) &&
+  /\p{L}/u.test(wordsAt(place)) &&
+  readShownText(wordsAt(place)) === null &&
+  intervalInBrackets(place) === null &&
+  !modelLabel.test(wordsAt(place).trim());
+
+const modelLabel = /^[([]?(?:model|specification|spec|equation|eq|regression)\.? ?\(?(?:\d+|[a-z]|[ivx]+)\)?[)\]]?$/i;
 
 /** Further apart than this, two coefficients belong to two reports. */
 const farthestRowsApart = 6;
 const mostTerms = 200;
 
-function tablesOf(sheet: BookSheet, pairs: readonly Pair[]): BracketTable[] {
+function tablesOf(sheet: BookSheet, side: BracketSide, pairs: readonly Pair[]): BracketTable[] {
   const names = pairs[0]!.names;
   const rows = [...new Set(pairs.map(({ row }) => row))].sort((one, other) => one - other);
   const nameOf = (row: number): string => wordsAt({ sheet, row, column: names });
@@ -84,11 +108,19 @@ function tablesOf(sheet: BookSheet, pairs: readonly Pair[]): BracketTable[] {
     else runs.push([row]);
   }
   return runs.flatMap((run): BracketTable[] => {
-    if (run.every((row) => isConstantName(nameOf(row)))) return [];
-    const within = new Set(run);
-    const columns = new Set(pairs.filter(({ row }) => within.has(row)).map(({ column }) => column));
-    const inOrder = [...columns].sort((one, other) => one - other);
-    return [{ sheet, names, columns: inOrder, first: run[0]!, last: run.at(-1)!, pairs: run.length }];
+    const constants = run.filter((row) => isConstantName(nameOf(row)));
+    if (constants.length === run.length) return [];
+    const within = pairs.filter(({ row }) => run.includes(row));
+    const inOrder = [...new Set(within.map(({ column }) => column))].sort((one, other) => one - other);
+    const intervals = new Set(within.filter(({ isInterval }) => isInterval).map(({ row }) => row)).size;
+    const ends = { first: run[0]!, last: run.at(-1)! };
+    return [
+      {
+        ...{ sheet, side, names, columns: inOrder, ...ends, pairs: run.length },
+        intervals,
+        hasConstant: constants.length > 0,
+      },
+    ];
   });
 }
 

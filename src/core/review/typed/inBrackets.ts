@@ -3,6 +3,7 @@ import type { BookSheet } from "../book.ts";
 import { type CellPlace, formatAt, isTextAt, numberAt, wordsAt } from "../cellsOfBook.ts";
 import { bracketsIn } from "../found/numberFormat.ts";
 import { type ShownNumber, readShownText, shownNumberAt } from "../found/shownNumber.ts";
+import { intervalInBrackets } from "./intervals.ts";
 
 /** A number in brackets, which stand for no minus here. */
 export interface InBrackets {
@@ -40,9 +41,13 @@ function readBracketed(text: string, place: CellPlace): InBrackets | null {
   return { place, size, minus: /[-−]/.test(sign), shape: opening === "[" ? "square" : "round" };
 }
 
-/** Every number in brackets of a sheet, as far as its formats are known; each different text is looked at once. */
-export function allInBrackets(sheet: BookSheet): readonly InBrackets[] {
-  return [...placesOfTexts(sheet), ...placesOfFormats(sheet)].flatMap((place) => inBracketsAt(place) ?? []);
+/**
+ * Every cell of a sheet with a number or an interval in brackets, as far as its formats are known; each different text
+ * is looked at once.
+ */
+export function allInBrackets(sheet: BookSheet): readonly CellPlace[] {
+  const places = [...placesOfTexts(sheet), ...placesOfFormats(sheet)];
+  return places.filter((place) => inBracketsAt(place) !== null || intervalInBrackets(place) !== null);
 }
 
 function* placesOfTexts(sheet: BookSheet): Generator<CellPlace> {

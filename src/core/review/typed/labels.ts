@@ -2,13 +2,20 @@ import { cellKind } from "../../table/cells.ts";
 import { cellInWords } from "../../table/spots.ts";
 import type { BookSheet } from "../book.ts";
 import { type CellPlace, wordsAt } from "../cellsOfBook.ts";
-import { type SummaryWord, type TermWord, summaryWordIn, termWordIn, wordWithNumber } from "./reportWords.ts";
+import {
+  type SummaryWord,
+  type TermWord,
+  isIntervalHeading,
+  summaryWordIn,
+  termWordIn,
+  wordWithNumber,
+} from "./reportWords.ts";
 
 /** A cell whose text says what the numbers beside or below it are. */
 export interface Label {
   readonly place: CellPlace;
   /** Under such a word stand numbers of each driver; null where the text is no such word. */
-  readonly term: TermWord | null;
+  readonly term: TermWord | "interval" | null;
   /** Beside such a word stands a number of the whole regression. */
   readonly summary: SummaryWord | null;
   /** Numbers that stand in the text itself, with their words. */
@@ -32,7 +39,8 @@ export function labelsOf(sheet: BookSheet): readonly Label[] {
 }
 
 function readingOf(text: string): Omit<Label, "place"> | null {
-  const [term, summary, inText] = [termWordIn(text), summaryWordIn(text), wordWithNumber(text)];
+  const term = termWordIn(text) ?? (isIntervalHeading(text) ? "interval" : null);
+  const [summary, inText] = [summaryWordIn(text), wordWithNumber(text)];
   return term === null && summary === null && inText.length === 0 ? null : { term, summary, inText };
 }
 
@@ -40,7 +48,13 @@ function readingOf(text: string): Omit<Label, "place"> | null {
 interface Surroundings {
   readonly firstRow: number;
   readonly lastRow: number;
-  readonly without: readonly number[];
+  readonly without: Tracks;
+}
+
+/** Columns of a sheet, or rows of it. */
+export interface Tracks {
+  readonly lie: "columns" | "rows";
+  readonly at: readonly number[];
 }
 
 /** The texts that stand in some rows of a sheet. */
@@ -50,7 +64,8 @@ export function textsBetween(sheet: BookSheet, { firstRow, lastRow, without }: S
   const texts: string[] = [];
   for (let row = from; row <= to; row++) {
     for (const [index, cells] of sheet.columns.entries()) {
-      if (cells.kinds[row - sheet.firstRow] !== cellKind.text || without.includes(sheet.firstColumn + index)) continue;
+      const isElse = without.at.includes(without.lie === "rows" ? row : sheet.firstColumn + index);
+      if (cells.kinds[row - sheet.firstRow] !== cellKind.text || isElse) continue;
       texts.push(cellInWords(cells, row - sheet.firstRow));
       if (index > mostColumnsRead) break;
     }

@@ -3,18 +3,21 @@ import type { BookSheet } from "../book.ts";
 import { type CellPlace, isTextAt, overlap, wordsAt } from "../cellsOfBook.ts";
 import { shownNumberAt } from "../found/shownNumber.ts";
 import type { Brackets } from "./bracketNotes.ts";
-import { bracketBlocks } from "./bracketBlocks.ts";
+import { bracketBlocks } from "./bracketReadings.ts";
 import type { InBrackets } from "./inBrackets.ts";
-import { type Label, labelsOf } from "./labels.ts";
-import { type TermWord, isConstantName, summaryWordIn } from "./reportWords.ts";
+import { levelIn } from "./intervals.ts";
+import { type Label, type Tracks, labelsOf } from "./labels.ts";
+import { isConstantName, summaryWordIn } from "./reportWords.ts";
 import { type SummaryNumber, summariesOf } from "./summaries.ts";
+import { type Lie, type TermNumber, cellAt, numbersUnder, spotOf, withSign } from "./termNumbers.ts";
 
 /** The numbers of one driver, or of the constant. */
 export interface ReportedTerm {
   readonly name: string;
   readonly isConstant: boolean;
-  readonly numbers: readonly { readonly word: TermWord; readonly place: CellPlace }[];
-  /** What stands in brackets under the coefficient. */
+  /** The coefficient first. */
+  readonly numbers: readonly TermNumber[];
+  /** The number that stands in brackets under the coefficient, or beside it. */
   readonly inBrackets: InBrackets | null;
 }
 
@@ -25,8 +28,8 @@ export interface ModelColumn {
   readonly headings: readonly string[];
   /** Names of the drivers that are not in this model. */
   readonly absent: readonly string[];
-  /** The columns of the other models. */
-  readonly beside: readonly number[];
+  /** Where the other models stand. */
+  readonly beside: Tracks;
 }
 
 /** A block of cells that says by its headings, or by brackets under its coefficients, what its numbers are. */
@@ -36,13 +39,15 @@ export interface ReportBlock {
   readonly area: SheetArea;
   readonly terms: readonly ReportedTerm[];
   readonly summaries: readonly SummaryNumber[];
+  /** Two-sided level of its bounds: 0.05 for 95 %; null where it says none. */
+  readonly level: number | null;
   /** Null for a block under headings. */
   readonly model: ModelColumn | null;
 }
 
 /**
- * The blocks of a sheet: one driver a row under headings, one driver a column beside them, or models in columns with
- * numbers in brackets under their coefficients.
+ * The blocks of a sheet: one driver a row under headings, one driver a column beside them, or models in columns or rows
+ * with numbers or intervals in brackets under their coefficients or beside them.
  */
 export function reportBlocks(sheet: BookSheet): readonly ReportBlock[] {
   const labels = labelsOf(sheet);
@@ -51,12 +56,10 @@ export function reportBlocks(sheet: BookSheet): readonly ReportBlock[] {
     .map((group) => readBlock(sheet, group))
     .filter((block) => block !== null);
   const { blocks, own } = bracketBlocks(sheet, labels, found);
-  const others = labels.filter((label) => !own.has(label));
+  const others = labels.filter(({ place }) => !own.has(spotOf(place)));
   const headed = found.filter(({ area }) => !blocks.some((block) => overlap(area, block.area)));
   return summariesOf(sheet, [...headed, ...blocks], others);
 }
-
-type Lie = "down" | "across";
 
 interface Group {
   readonly lie: Lie;
@@ -102,20 +105,21 @@ function readBlock(sheet: BookSheet, group: Group): ReportBlock | null {
   }
   if (!terms.some(({ isConstant }) => !isConstant)) return null;
   const last = group.headings.at(-1)!.place;
+  const levels = new Set(group.headings.flatMap(({ place }) => levelIn(wordsAt(place)) ?? []));
   return {
     sheet,
-    area: areaBetween(sheet, [first, last, cellAt(sheet, group.lie, [names.track, at - 1])]),
+    area: areaBetween(sheet, [
+      ...[first, last, cellAt(sheet, group.lie, [names.track, at - 1])],
+      ...terms.flatMap(({ numbers }) => numbers.map(({ place }) => place)),
+    ]),
     terms,
     summaries: [],
+    level: levels.size === 1 ? [...levels][0]! : null,
     model: null,
   };
 }
 
 const mostTerms = 200;
-
-/** A cell by the line that the headings or names stand in, and the position of a driver. */
-const cellAt = (sheet: BookSheet, lie: Lie, [line, position]: readonly [number, number]): CellPlace =>
-  lie === "down" ? { sheet, row: position, column: line } : { sheet, row: line, column: position };
 
 const lineOf = (lie: Lie, { row, column }: CellPlace): number => (lie === "down" ? column : row);
 const positionOf = (lie: Lie, { row, column }: CellPlace): number => (lie === "down" ? row : column);
@@ -152,13 +156,15 @@ interface TermPlace {
 function termAt(sheet: BookSheet, { lie, headings }: Group, { names, at }: TermPlace): ReportedTerm | null {
   const name = wordsAt(cellAt(sheet, lie, [names, at]));
   if (name === "") return null;
-  const numbers = headings
-    .map(({ term, place }) => ({ word: term!, place: cellAt(sheet, lie, [lineOf(lie, place), at]) }))
-    .filter(({ place }) => shownNumberAt(place) !== null);
+  const coefficient = shownNumberAt(cellAt(sheet, lie, [lineOf(lie, headings[0]!.place), at]))?.value ?? null;
+  const numbers = headings.flatMap(({ term, place }, index) => {
+    const laid = { sheet, lie, isLast: index === headings.length - 1, coefficient };
+    return numbersUnder(term!, [lineOf(lie, place), at], laid);
+  });
   const isConstant = isConstantName(name);
   if (numbers[0]?.word !== "coefficient") return null;
   if (!isConstant && numbers.length === 1 && summaryWordIn(name) !== null) return null;
-  return { name, isConstant, numbers, inBrackets: null };
+  return { name, isConstant, numbers: numbers.map((one) => withSign(one, numbers[0]!)), inBrackets: null };
 }
 
 export function areaBetween(sheet: BookSheet, places: readonly CellPlace[]): SheetArea {

@@ -65,6 +65,17 @@ const longest = 48;
 /** What a heading says of the numbers under it. */
 export const termWordIn = wordIn(termWords);
 
+/** Whether a heading says that intervals stand under it, both ends in one cell or in two: "95 % CI", "[95% conf. interval]". */
+export const isIntervalHeading = (text: string): boolean =>
+  intervalWords.test(
+    plain(text)
+      .replaceAll(/[[\]()]/g, "")
+      .trim(),
+  );
+
+const intervalWords =
+  /^(?:9\d(?:[.,]\d)? ?(?:%|per ?cent) ?)?(?:c\.?i|conf(?:idence)?\.? ?(?:int(?:erval|ervals)?|limits|bounds|range)?|intervals?|bounds)\.?(?:,? ?9\d(?:[.,]\d)? ?(?:%|per ?cent))?$/;
+
 /** What a word beside a number says of it. */
 export const summaryWordIn = wordIn(summaryWords);
 

@@ -3,7 +3,7 @@ import { addressAt } from "../cellsOfBook.ts";
 import type { Claim, ClaimedForm, Quantity, ReportedNumber } from "../claim.ts";
 import { type Stretch, claimedLine } from "../found/claimedLines.ts";
 import { othersBeside } from "../found/othersBeside.ts";
-import { type ShownNumber, shownNumberAt } from "../found/shownNumber.ts";
+import type { ShownNumber } from "../found/shownNumber.ts";
 import { type Reading, read, unread } from "../formula/reading.ts";
 import type { CellPlace } from "../cellsOfBook.ts";
 import type { DataColumn, DataTable } from "./dataTables.ts";
@@ -42,10 +42,17 @@ export function typedClaim(block: ReportBlock, tables: readonly DataTable[], giv
     constant: true,
     reported: reportedBy(block),
     others: othersBeside([first, ...others]),
-    assumed: constant ? assumed : [...assumed, assumptions.noConstant],
+    ...(block.level !== null && { level: block.level }),
+    assumed: [
+      ...(constant ? assumed : [...assumed, assumptions.noConstant]),
+      ...(block.level === null && hasBounds(block) ? [assumptions.levels] : []),
+    ],
   };
   return read(block.model === null ? claim : withBrackets(claim, bracketsIn(block), block.model.brackets));
 }
+
+const hasBounds = ({ terms }: ReportBlock): boolean =>
+  terms.some(({ numbers }) => numbers.some(({ word }) => word === "low" || word === "high"));
 
 const driversOf = ({ terms }: ReportBlock) => terms.filter(({ isConstant }) => !isConstant);
 
@@ -62,15 +69,16 @@ export function reportedBy(block: ReportBlock): readonly ReportedNumber[] {
   const { terms, summaries } = block;
   const drivers = driversOf(block);
   const ofTerms = terms.flatMap((term) =>
-    term.numbers.flatMap(({ word, place }) =>
-      numberAs({ kind: word, term: term.isConstant ? null : drivers.indexOf(term) }, place, shownNumberAt(place)),
+    term.numbers.flatMap(({ word, place, shown }) =>
+      numberAs({ kind: word, term: term.isConstant ? null : drivers.indexOf(term) }, place, shown),
     ),
   );
   return [...ofTerms, ...summaries.flatMap(({ word, place, shown }) => numberAs({ kind: word }, place, shown))];
 }
 
-const numberAs = (quantity: Quantity, place: CellPlace, shown: ShownNumber | null): ReportedNumber[] =>
-  shown === null ? [] : [{ quantity, ...shown, cell: addressAt(place) }];
+const numberAs = (quantity: Quantity, place: CellPlace, shown: ShownNumber): ReportedNumber[] => [
+  { quantity, ...shown, cell: addressAt(place) },
+];
 
 interface FoundData {
   readonly outcome: DataLine;
@@ -152,7 +160,7 @@ function rangeOf({ sheet, columns, firstRow, rowCount }: DataTable): string {
 }
 
 function reportOf(block: ReportBlock, drivers: readonly Match[]) {
-  const coefficients = driversOf(block).map(({ numbers }) => shownNumberAt(numbers[0]!.place)?.value ?? 0);
+  const coefficients = driversOf(block).map(({ numbers }) => numbers[0]!.shown.value);
   return { drivers, coefficients, headings: block.model?.headings ?? [] };
 }
 
@@ -162,6 +170,6 @@ const rowsAround = 12;
 function textsAround({ sheet, area, terms, model }: ReportBlock): string[] {
   const names = new Set([...terms.map(({ name }) => name), ...(model?.absent ?? [])]);
   const [firstRow, lastRow] = [area.row - rowsAround, area.row + area.rows + rowsAround];
-  const texts = textsBetween(sheet, { firstRow, lastRow, without: model?.beside ?? [] });
+  const texts = textsBetween(sheet, { firstRow, lastRow, without: model?.beside ?? { lie: "columns", at: [] } });
   return texts.filter((text) => !names.has(text));
 }

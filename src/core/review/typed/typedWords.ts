@@ -8,6 +8,7 @@ export const assumptions = {
   data: (range: string) => `The data were taken from ${range}, whose headings fit the names of the drivers.`,
   name: (name: string, heading: string) => `"${name}" was read as the column "${heading}".`,
   noConstant: "No constant is reported; the regression was taken to have one all the same.",
+  levels: "The report does not say how sure its intervals are to be: 95 %, 90 % and 99 % were tried.",
   outcome: (name: string, because: Outcome["because"]) => `The outcome was taken to be "${name}", ${reasons[because]}.`,
   nearerBrackets: (word: BracketWord) =>
     `${noNote} they were read as ${plurals[word]}, which come nearer to what the data give than ${plurals[otherThan(word)]} would.`,
