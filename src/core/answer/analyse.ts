@@ -3,7 +3,7 @@ import { decide } from "../decision/decide.ts";
 import { rulesOf } from "../decision/policies.ts";
 import { autocorrelationOrder } from "../decision/testOrder.ts";
 import { buildDesign } from "../design/buildDesign.ts";
-import type { Design, RowOrder } from "../design/design.ts";
+import type { Design, RowOrder, TermMeaning } from "../design/design.ts";
 import type { Fit } from "../fit/fit.ts";
 import { fitLeastSquares } from "../fit/fitLeastSquares.ts";
 import { type Result, success } from "../problem/result.ts";
@@ -22,7 +22,7 @@ import { residualShape } from "./residualShape.ts";
 import { type RowPlaces, rowPlacesOf } from "./rowPlaces.ts";
 import { rowsSummary } from "./rowsSummary.ts";
 import { decidingTests, furtherTests } from "./runTests.ts";
-import { choiceSentence, openingSentence } from "./verdict.ts";
+import { choiceSentence, scopeInWords } from "./verdict.ts";
 import { driversInWords } from "./wording.ts";
 
 /**
@@ -110,12 +110,13 @@ function spoken(fit: Fit, found: Found, { options, places }: { options: Options;
     rows: rowsSummary(design),
     options,
   };
-  const opening = [openingSentence(said), choiceSentence(said)];
+  const title = titleOf(design);
+  const opening = [`${title} ${scopeInWords(said)}`, choiceSentence(said)];
   const verdict = [...opening, ...sentences(drivers), ...askedSentences(said), ...found.decision.cautions];
   const { leftOut, leftOutCount, notes } = design;
   return {
     ...said,
-    title: titleOf(design),
+    title,
     coefficients: [...fit.coefficients],
     drivers,
     verdict,
@@ -129,8 +130,24 @@ const sentences = (drivers: Answer["drivers"]): string[] =>
   drivers.flatMap(({ sentence }) => (sentence === null ? [] : [sentence]));
 
 function titleOf({ outcome, terms }: Design): string {
-  const drivers = terms.filter(({ meaning }) => meaning.kind !== "constant").map(({ name }) => name);
-  return `${outcome.name} explained by ${driversInWords(drivers)}`;
+  const drivers = new Set(terms.flatMap(({ name, meaning }) => titledAs(name, meaning)));
+  return `${outcome.name} explained by ${driversInWords([...drivers])}`;
+}
+
+/** A driver of categories is named once, and so are the seasons; each of their terms has its sentence. */
+function titledAs(name: string, meaning: TermMeaning): string[] {
+  switch (meaning.kind) {
+    case "constant":
+      return [];
+    case "level":
+      return [meaning.column];
+    case "season":
+      return ["the season"];
+    case "number":
+    case "date":
+    case "trend":
+      return [name];
+  }
 }
 
 const figuresOf = (fit: Fit): FitFigures => ({

@@ -1,3 +1,5 @@
+import type { Term, TermMeaning } from "../design/design.ts";
+import type { Transform } from "../design/model.ts";
 import type { Fit } from "../fit/fit.ts";
 import type { TermFirmness } from "../robustness/firmness.ts";
 import type { Decision } from "../decision/decision.ts";
@@ -23,10 +25,26 @@ export function driverAnswers(facts: DriverFacts): DriverAnswer[] {
     const { decision, lags, options, inference } = facts;
     const effect = effectOf({ meaning: term.meaning, outcome: facts.fit.design.outcome, units: options.units });
     const driver = { term: term.name, ...figures };
-    const spoken = { driver, effect, decision, lags, level: options.level, agreeing: agreeingKinds(inference) };
+    const proviso = provisoOf(term.meaning, facts.fit.design.terms);
+    const agreeing = agreeingKinds(inference);
+    const spoken = { driver, effect, decision, lags, level: options.level, agreeing, proviso };
     return { ...driver, sentence: driverSentence(spoken) };
   });
 }
+
+/** Where a column enters as it is and squared, neither coefficient alone is what a step in it goes with. */
+function provisoOf(meaning: TermMeaning, terms: readonly Term[]): string {
+  if (meaning.kind !== "number" || !isOfCurve(meaning.transform)) return "";
+  const { column } = meaning;
+  const forms = terms.flatMap(({ meaning: other }) =>
+    other.kind === "number" && other.column === column ? [other.transform.kind] : [],
+  );
+  return forms.includes("none") && forms.includes("square")
+    ? `${column} enters with its square: what a step in it goes with differs along the way, and neither of the two says it alone.`
+    : "";
+}
+
+const isOfCurve = ({ kind }: Transform): boolean => kind === "none" || kind === "square";
 
 function figuresOf(
   { fit, inference, firmness, options }: DriverFacts,

@@ -6,7 +6,6 @@ import {
   capitalised,
   confidenceInWords,
   decimalsFor,
-  driversInWords,
   listInWords,
   numberInWords,
   pValueInWords,
@@ -29,12 +28,6 @@ export function errorsInWords(errors: ErrorsChoice, lags: number | null): string
     case "grouped":
       return `grouped (${errors.version})`;
   }
-}
-
-/** What was fitted, and how much of the outcome the drivers account for. */
-export function openingSentence(facts: Facts): string {
-  const drivers = facts.terms.filter((term) => term !== "constant");
-  return `${facts.outcome} explained by ${driversInWords(drivers)} ${scopeInWords(facts)}`;
 }
 
 /** How much of the outcome the drivers account for, over which rows: "over 140 separate cases: together they account for ...". */
@@ -80,6 +73,8 @@ export interface Spoken {
   readonly level: number;
   /** "all three kinds", "classical and White standard errors", ... */
   readonly agreeing: string;
+  /** What keeps the coefficient from being read by itself, as a sentence; empty where nothing does. */
+  readonly proviso: string;
 }
 
 /** The sentence about one driver: what it goes with, how sure, and whether that hangs on the choice of standard errors. */
@@ -87,7 +82,7 @@ export function driverSentence(spoken: Spoken): string {
   const { driver, level } = spoken;
   const differs = driver.pValue < level;
   const statement = driver.against === 0 ? aboutZero(spoken, differs) : aboutValue(spoken, differs);
-  return `${statement} ${firmnessSentence(spoken)}`;
+  return [statement, firmnessSentence(spoken), spoken.proviso].filter((sentence) => sentence !== "").join(" ");
 }
 
 function aboutZero(spoken: Spoken, differs: boolean): string {

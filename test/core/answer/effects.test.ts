@@ -48,6 +48,7 @@ function said({
   const driver = { term, coefficient, low, high, pValue, against, standardError: 1, ratio: 1, firmness };
   const effect = effectOf({ meaning, outcome, units });
   return driverSentence({
+    proviso: "",
     driver,
     effect,
     decision,

@@ -19,14 +19,18 @@ export function rowsGuard(order: RowOrder): Guard | null {
   }
 }
 
-function gapsGuard({ gaps, gapLabels, period, labels }: Extract<RowOrder, { kind: "time" }>): Guard {
+/** Rows that are their own time, since no column tells it, can only be left out. */
+function gapsGuard({ gaps, gapLabels, period, labels }: Extract<RowOrder, { kind: "time" }>): Guard | null {
+  const isRowByRow = period.unit === "row";
+  if (gaps === 0 && isRowByRow) return null;
   if (gaps === 0) {
     const sentences = [`Every ${period.unit} from ${labels.first} to ${labels.last} has its row.`];
     return { guard: "time", finding: "nothing found", sentences };
   }
   const shown = namesInWords(gapLabels);
   const more = gaps > gapLabels.length ? ` and ${gaps - gapLabels.length} more` : "";
-  const missing = gaps === 1 ? `One ${period.unit} has no row` : `${gaps} ${period.unit}s have no row`;
+  const lacks = isRowByRow ? ["is not used", "are not used"] : ["has no row", "have no row"];
+  const missing = gaps === 1 ? `One ${period.unit} ${lacks[0]}` : `${gaps} ${period.unit}s ${lacks[1]}`;
   return {
     guard: "time",
     finding: "worth knowing",
