@@ -83,8 +83,11 @@ export async function fill(sheet: Excel.Worksheet, plan: SheetPlan, { name, erra
   return success({ sheet: name });
 }
 
-/** Blank paper around the print, in points: half an inch, and two fifths above and below, which every printer can leave. */
-const margin = { side: 36, end: 28.8 } as const;
+/** Blank paper around the print, in points, which every printer can leave: the footer stands within that below. */
+const margin = { side: 36, top: 28.8, bottom: 36, footer: 18 } as const;
+
+/** In Excel's codes: the sheet's name, the page's number, how many there are. */
+const footer = { left: "&A", right: "Page &P of &N" } as const;
 
 /** Excel refuses page settings on machines without a printer; the sheet is whole without them. */
 async function layOutPage(sheet: Excel.Worksheet, { printArea, pageBreaks = [] }: SheetPlan): Promise<void> {
@@ -94,8 +97,12 @@ async function layOutPage(sheet: Excel.Worksheet, { printArea, pageBreaks = [] }
     sheet.pageLayout.zoom = { horizontalFitToPages: 1 };
     sheet.pageLayout.leftMargin = margin.side;
     sheet.pageLayout.rightMargin = margin.side;
-    sheet.pageLayout.topMargin = margin.end;
-    sheet.pageLayout.bottomMargin = margin.end;
+    sheet.pageLayout.topMargin = margin.top;
+    sheet.pageLayout.bottomMargin = margin.bottom;
+    sheet.pageLayout.footerMargin = margin.footer;
+    const { defaultForAllPages } = sheet.pageLayout.headersFooters;
+    defaultForAllPages.leftFooter = footer.left;
+    defaultForAllPages.rightFooter = footer.right;
     sheet.horizontalPageBreaks.removePageBreaks();
     for (const row of pageBreaks) {
       sheet.horizontalPageBreaks.add(rangeAt(sheet, { row, column: 0, rows: 1, columns: 1 }));

@@ -9,7 +9,7 @@ export interface Stretch {
 }
 
 /** Height of the print to its width on a lying page within the margins: A4, Letter. */
-const shapes = [(595 - 58) / (842 - 72), (612 - 58) / (792 - 72)];
+const shapes = [(595 - 65) / (842 - 72), (612 - 65) / (792 - 72)];
 /** Width of a digit to that of the usual font's: programs without it take a wider one, and print all smaller. */
 const digits = [1, 1.29];
 const papers = shapes.flatMap((shape) => digits.map((digit) => shape * digit));

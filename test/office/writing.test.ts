@@ -141,8 +141,12 @@ describe("writing a plan", () => {
     expect(sheet.links).toEqual([{ cell: "A4", target: "Data!A3" }]);
   });
 
-  it("leaves half an inch of paper at the sides", () => {
-    expect(sheet.margins).toMatchObject({ left: 36, right: 36 });
+  it("leaves half an inch of paper at the sides, and has the number of each page below it", () => {
+    const { left, right, bottom, footer } = sheet.margins!;
+    expect([left, right]).toEqual([36, 36]);
+    expect(sheet.footer).toEqual({ left: "&A", center: "", right: "Page &P of &N" });
+    const lineOfFooter = 12;
+    expect(footer + lineOfFooter).toBeLessThan(bottom);
   });
 
   it("draws the charts with their own series alone", () => {

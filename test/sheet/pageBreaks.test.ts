@@ -2,9 +2,9 @@ import { describe, expect, it } from "vitest";
 import { lineHeight, page, pageWidths, pointsOf } from "../../src/sheet/columns.ts";
 import { pageBreaksOf } from "../../src/sheet/pageBreaks.ts";
 
-/** Points that a lying A4 page holds of a print as wide as it: 537 of height to 770 of width. */
+/** Points that a lying A4 page holds of a print as wide as it: 530 of height to 770 of width. */
 const pageHeight =
-  (537 / 770) * pageWidths.slice(0, page.columns).reduce((sum, characters) => sum + pointsOf(characters), 0);
+  (530 / 770) * pageWidths.slice(0, page.columns).reduce((sum, characters) => sum + pointsOf(characters), 0);
 const rowsOnPage = Math.floor(pageHeight / lineHeight);
 
 describe("a new page", () => {

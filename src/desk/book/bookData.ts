@@ -51,6 +51,7 @@ export interface SheetData {
   readonly pageBreaks?: readonly number[];
   /** In points; absent leaves the usual ones. */
   readonly margins?: PageMargins;
+  readonly footer?: PageFooter;
   readonly links: readonly { readonly cell: string; readonly target: string }[];
   /** Marks that add-ins set on a sheet. */
   readonly customProperties?: Readonly<Record<string, string>>;
@@ -62,6 +63,15 @@ export interface PageMargins {
   readonly right: number;
   readonly top: number;
   readonly bottom: number;
+  /** From the edge of the paper to what stands below each page. */
+  readonly footer: number;
+}
+
+/** What stands below each page, with Excel's codes: &A the sheet's name, &P the page's number, &N how many there are. */
+export interface PageFooter {
+  readonly left: string;
+  readonly center: string;
+  readonly right: string;
 }
 
 export type BookValue = number | string | boolean | null | { readonly error: string };

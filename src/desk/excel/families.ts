@@ -17,6 +17,7 @@ import { rangeAreas, rangeCollection, rangeView } from "./rangeAreas.ts";
 import { rangeBorder, rangeBorders, rangeFill, rangeFont, rangeFormat } from "./rangeFormat.ts";
 import { customXmlPart, customXmlParts, oneSetting, scopedXmlParts, settings } from "./settings.ts";
 import { pageBreak, pageBreaks } from "./pageBreaks.ts";
+import { headerFooter, headersFooters } from "./pageFooter.ts";
 import { customProperties, customProperty, freezePanes, pageLayout } from "./sheetParts.ts";
 import { tableColumn, tableColumns } from "./tableColumns.ts";
 import { scopedTables, table, tableCollection } from "./tables.ts";
@@ -37,6 +38,8 @@ export const families: { readonly [T in keyof States]: Family<States[T]> } = {
   WorksheetProtection: worksheetProtection,
   WorksheetFreezePanes: freezePanes,
   PageLayout: pageLayout,
+  HeaderFooterGroup: headersFooters,
+  HeaderFooter: headerFooter,
   PageBreakCollection: pageBreaks,
   PageBreak: pageBreak,
   WorksheetCustomPropertyCollection: customProperties,

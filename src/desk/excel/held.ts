@@ -14,6 +14,8 @@ export interface States {
   WorksheetProtection: OnSheet;
   WorksheetFreezePanes: OnSheet;
   PageLayout: OnSheet;
+  HeaderFooterGroup: OnSheet;
+  HeaderFooter: OnSheet;
   PageBreakCollection: OnSheet;
   PageBreak: OnBreak;
   WorksheetCustomPropertyCollection: OnSheet;

@@ -48,7 +48,7 @@ const rangeAt = (host: Host, { sheet }: OnSheet, args: Arguments): Area =>
   typeof args[0] === "string" ? areaAt(host, args[0], sheet) : stateAt(args, 0, "Range");
 
 /** Of a page that says nothing, in points. */
-const usualMargins: PageMargins = { left: 50.4, right: 50.4, top: 54, bottom: 54 };
+const usualMargins: PageMargins = { left: 50.4, right: 50.4, top: 54, bottom: 54, footer: 21.6 };
 
 const readMargin =
   (side: keyof PageMargins) =>
@@ -72,12 +72,14 @@ export const pageLayout: Family<OnSheet> = {
     RightMargin: readMargin("right"),
     TopMargin: readMargin("top"),
     BottomMargin: readMargin("bottom"),
+    FooterMargin: readMargin("footer"),
   },
   write: {
     LeftMargin: writeMargin("left"),
     RightMargin: writeMargin("right"),
     TopMargin: writeMargin("top"),
     BottomMargin: writeMargin("bottom"),
+    FooterMargin: writeMargin("footer"),
     Orientation: ({ sheet }, { book }, value) => {
       recordOf(book, sheet).landscape = orientations[oneOf(value, orientations)];
     },
@@ -87,6 +89,7 @@ export const pageLayout: Family<OnSheet> = {
     },
   },
   part: {
+    HeadersFooters: (state) => hold("HeaderFooterGroup", state),
     GetPrintArea: (state, host) => printArea(state, host) ?? missing(),
     GetPrintAreaOrNullObject: printArea,
   },
@@ -104,7 +107,6 @@ export const pageLayout: Family<OnSheet> = {
     "PrintHeadings",
     "PrintGridlines",
     "HeaderMargin",
-    "FooterMargin",
     "PrintComments",
     "DraftMode",
     "FirstPageNumber",

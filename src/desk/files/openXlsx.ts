@@ -3,6 +3,7 @@ import type { BookCell, BookData, BookValue, SheetData, StyledCell } from "../bo
 import { chartParts, toBookChart, withoutEmptyLines } from "./charts.ts";
 import { putTogether } from "./elements/putTogether.ts";
 import { readKept, type Kept } from "./keptParts.ts";
+import { toBookFooter } from "./footers.ts";
 import { inPoints } from "./margins.ts";
 import { changeParts, pack, partsMatching, textOf, unpack } from "./parts.ts";
 import { readable, unreadable, whyNoXlsx, type Reading } from "./reading.ts";
@@ -85,25 +86,29 @@ function toSheet(sheet: Sheet, usual: UsualLooks): SheetData {
     protected: sheet.protection?.sheet === true,
     tables: tables.flatMap(({ name: table, range }) => (range === undefined ? [] : [{ name: table, address: range }])),
     charts: charts.map(toBookChart).filter((chart) => chart !== null),
-    ...printingOf(sheet.pageSetup),
+    ...printingOf(sheet),
     ...((sheet.rowBreaks ?? []).length > 0 && { pageBreaks: sheet.rowBreaks!.map((last) => last + 1) }),
     links: linksOf(sheet),
   };
 }
 
-type Printing = Pick<SheetData, "printArea" | "onePageWide" | "landscape" | "margins">;
+type Printing = Pick<SheetData, "printArea" | "onePageWide" | "landscape" | "margins" | "footer">;
 
 function hiddenColumnsOf(columns: NonNullable<Sheet["columns"]>): Pick<SheetData, "hiddenColumns"> {
   const hidden = columns.flatMap((column, index) => (column.hidden === true ? [index] : []));
   return hidden.length === 0 ? {} : { hiddenColumns: hidden };
 }
 
-const printingOf = (setup: Sheet["pageSetup"]): Printing => ({
-  printArea: setup?.printArea?.replaceAll("$", "") ?? null,
-  onePageWide: setup?.fitToPage === true && setup.fitToWidth !== 0,
-  landscape: setup?.orientation === "landscape",
-  ...(setup?.margins !== undefined && { margins: inPoints(setup.margins) }),
-});
+function printingOf({ pageSetup: setup, headerFooter }: Sheet): Printing {
+  const footer = toBookFooter(headerFooter?.oddFooter ?? "");
+  return {
+    printArea: setup?.printArea?.replaceAll("$", "") ?? null,
+    onePageWide: setup?.fitToPage === true && setup.fitToWidth !== 0,
+    landscape: setup?.orientation === "landscape",
+    ...(setup?.margins !== undefined && { margins: inPoints(setup.margins) }),
+    ...(footer !== null && { footer }),
+  };
+}
 
 /** In points; programs write it for every row, whether anyone asked for it or not. */
 const standardHeight = 15;

@@ -15,6 +15,7 @@ import { chartParts, toFileChart, finishedChart } from "./charts.ts";
 import { withHiddenSpillNames } from "./elements/spillNames.ts";
 import { standardFont, withWholeFonts } from "./fonts.ts";
 import { keptOf, withKept } from "./keptParts.ts";
+import { toFileFooter } from "./footers.ts";
 import { inInches } from "./margins.ts";
 import { changeParts, pack, unpack, type Parts } from "./parts.ts";
 import { toStored } from "./storedFormulas.ts";
@@ -95,6 +96,7 @@ function toFileSheet(sheet: SheetData): WriteSheet {
       ...(sheet.onePageWide && { fitToPage: true, fitToWidth: 1, fitToHeight: 0 }),
       ...(sheet.margins !== undefined && { margins: inInches(sheet.margins) }),
     },
+    ...(sheet.footer !== undefined && { headerFooter: { oddFooter: toFileFooter(sheet.footer) } }),
   };
 }
 

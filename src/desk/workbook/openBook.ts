@@ -76,6 +76,7 @@ function toRecord(sheet: SheetData): SheetRecord {
     onePageWide: sheet.onePageWide,
     landscape: sheet.landscape ?? false,
     margins: sheet.margins ?? null,
+    footer: sheet.footer ?? null,
     pageBreaks: [...(sheet.pageBreaks ?? [])],
   };
 }

@@ -1,5 +1,5 @@
 import type { ICellData } from "@univerjs/core";
-import type { PageMargins } from "../book/bookData.ts";
+import type { PageFooter, PageMargins } from "../book/bookData.ts";
 
 /** What a workbook holds beside its cells. The grid knows nothing of these: they are ours to keep. */
 export interface SheetRecord {
@@ -14,6 +14,7 @@ export interface SheetRecord {
   onePageWide: boolean;
   landscape: boolean;
   margins: PageMargins | null;
+  footer: PageFooter | null;
   /** Rows, counted from 0, that a new page begins with. */
   readonly pageBreaks: number[];
 }
@@ -113,6 +114,7 @@ export function emptySheetRecord(): SheetRecord {
     onePageWide: false,
     landscape: false,
     margins: null,
+    footer: null,
     pageBreaks: [],
   };
 }

@@ -59,6 +59,7 @@ function sheetData(book: Book, sheet: string): SheetData {
     ...(record.landscape ? { landscape: true } : {}),
     ...(record.pageBreaks.length === 0 ? {} : { pageBreaks: [...record.pageBreaks] }),
     ...(record.margins === null ? {} : { margins: record.margins }),
+    ...(record.footer === null ? {} : { footer: record.footer }),
     links: [...record.links].map(([place, { target }]) => ({ cell: cellName(place), target })),
     ...(customProperties.size === 0 ? {} : { customProperties: Object.fromEntries(customProperties) }),
   };

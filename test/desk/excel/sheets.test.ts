@@ -161,6 +161,7 @@ describe("sheets", () => {
       sheet.pageLayout.zoom = { horizontalFitToPages: 1 };
       sheet.pageLayout.orientation = "Landscape";
       sheet.pageLayout.leftMargin = 30;
+      sheet.pageLayout.headersFooters.defaultForAllPages.rightFooter = "Page &P";
       sheet.horizontalPageBreaks.add("A12");
       sheet.horizontalPageBreaks.add("A5");
       sheet.customProperties.add("model", "42");
@@ -172,7 +173,8 @@ describe("sheets", () => {
       onePageWide: true,
       landscape: true,
       pageBreaks: [4, 11],
-      margins: { left: 30, right: 50.4, top: 54, bottom: 54 },
+      margins: { left: 30, right: 50.4, top: 54, bottom: 54, footer: 21.6 },
+      footer: { left: "", center: "", right: "Page &P" },
       customProperties: { model: "42" },
     });
     const read = await desk.Excel.run(async (context) => {

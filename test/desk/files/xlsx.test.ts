@@ -86,7 +86,8 @@ describe("a workbook saved and opened again", () => {
       onePageWide: true,
       landscape: true,
       pageBreaks: [12, 30],
-      margins: { left: 36, right: 36, top: 45, bottom: 54 },
+      margins: { left: 36, right: 36, top: 45, bottom: 54, footer: 18 },
+      footer: { left: "&A", center: "", right: "Page &P of &N" },
       links: [
         { cell: "B1", target: "https://example.com/stock" },
         { cell: "A3", target: "'Rye Street'!B4" },

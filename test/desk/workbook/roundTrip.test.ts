@@ -29,7 +29,8 @@ const book: BookData = {
         onePageWide: true,
         landscape: true,
         pageBreaks: [8],
-        margins: { left: 30, right: 36, top: 40, bottom: 54 },
+        margins: { left: 30, right: 36, top: 40, bottom: 54, footer: 20 },
+        footer: { left: "", center: "&P", right: "" },
         links: [{ cell: "B2", target: "Other!A1" }],
         customProperties: { model: "7" },
         charts: [
