@@ -9,7 +9,7 @@ import { fourCasesSection } from "./fourCasesSection.ts";
 import { guardsSection } from "./guardsSection.ts";
 import type { SheetFacts } from "./facts.ts";
 import { howMadeSection, settingsArea } from "./howMadeSection.ts";
-import { pageBreaksOf } from "./pageBreaks.ts";
+import { type Stretch, pageBreaksOf } from "./pageBreaks.ts";
 import type { PlanFormat, SheetPlan } from "./plan.ts";
 import { titleSection, verdictSection } from "./plainWordsSection.ts";
 import { rectangle, rowsTaken, stack } from "./section.ts";
@@ -18,6 +18,11 @@ export type SheetKind = "live" | "kept";
 
 /** The place, in the order of the parts on the page, of those that others look for. */
 const part = { charts: 5, evidence: 6, howMade: 9 } as const;
+
+const partings = new Map<number, Stretch["parted"]>([
+  [part.charts, "never"],
+  [part.evidence, "anywhere"],
+]);
 
 /**
  * Lays an answer out on a sheet that someone who was not there can read and redo.
@@ -43,7 +48,7 @@ export function planAnswer(answer: Answer, facts: SheetFacts, kind: SheetKind): 
     frozenRows: 1,
     charts: charts.map(({ chart }) => chart),
     pageBreaks: pageBreaksOf(
-      parts.map((one, index) => ({ rows: rowsTaken(one), whole: index !== part.evidence })),
+      parts.map((one, index) => ({ rows: rowsTaken(one), parted: partings.get(index) ?? "seldom" })),
       formats,
     ),
     printArea: { row: 0, column: 0, rows: rows.length, columns: page.columns },

@@ -4,19 +4,23 @@ import type { PlanFormat } from "./plan.ts";
 /** A stretch of rows with what is known of it. */
 export interface Stretch {
   readonly rows: number;
-  /** Whether it stands on one page where it can, because a break would cut through pictures or a short table. */
-  readonly whole: boolean;
+  /** Whether it may be parted: pictures never where it can be helped, a short table seldom, a long one anywhere. */
+  readonly parted: "never" | "seldom" | "anywhere";
 }
 
 /** Height of the print to its width on a lying page within the margins: A4, Letter. */
 const shapes = [(595 - 65) / (842 - 72), (612 - 65) / (792 - 72)];
 /** Width of a digit to that of the usual font's: programs without it take a wider one, and print all smaller. */
-const digits = [1, 1.29];
-const papers = shapes.flatMap((shape) => digits.map((digit) => shape * digit));
+const wider = 1.29;
+const papers = shapes.flatMap((shape) => [
+  { shape, usual: true },
+  { shape: shape * wider, usual: false },
+]);
 
 /**
- * The rows that a new page begins with: what is whole and would run over the page's end on any paper begins the next,
- * and a long table does not begin with its last few lines at the foot of a page.
+ * The rows that a new page begins with: pictures that would run over the page's end on any paper begin the next, a short
+ * table where it would with the usual font, so that no page is left nearly empty for the sake of a rare one; and a long
+ * table does not begin with its last few lines at the foot of a page.
  * @param widths - of the columns that are printed, in characters; those of a result sheet where none are given.
  */
 export function pageBreaksOf(
@@ -28,15 +32,16 @@ export function pageBreaksOf(
   const width = sum(widths.map(pointsOf));
   const breaks: number[] = [];
   let row = 0;
-  let sheets = papers.map((shape) => ({ full: shape * width, used: 0 }));
-  for (const { rows, whole } of stretches) {
+  let sheets: readonly Paper[] = papers.map(({ shape, usual }) => ({ full: shape * width, used: 0, usual }));
+  for (const { rows, parted } of stretches) {
     const lines = Array.from({ length: rows }, (_, index) => heights.get(row + index) ?? lineHeight);
-    const needed = sum(whole ? lines : lines.slice(0, fewestLines));
-    if (sheets.some(({ full, used }) => used > 0 && used + needed > full && needed <= full)) {
+    const needed = sum(parted === "anywhere" ? lines.slice(0, fewestLines) : lines);
+    const asked = parted === "never" ? sheets : sheets.filter(({ usual }) => usual);
+    if (asked.some(({ full, used }) => used > 0 && used + needed > full && needed <= full)) {
       breaks.push(row);
-      sheets = sheets.map(({ full }) => ({ full, used: 0 }));
+      sheets = sheets.map((sheet) => ({ ...sheet, used: 0 }));
     }
-    sheets = sheets.map(({ full, used }) => ({ full, used: usedAfter(lines, { full, used }) }));
+    sheets = sheets.map((sheet) => ({ ...sheet, used: usedAfter(lines, sheet) }));
     row += rows;
   }
   return breaks;
@@ -45,6 +50,8 @@ export function pageBreaksOf(
 interface Paper {
   readonly full: number;
   readonly used: number;
+  /** Whether the font is the usual one. */
+  readonly usual: boolean;
 }
 
 /** How far down the last page the lines end; programs begin another page where one is full. */

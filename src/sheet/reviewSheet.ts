@@ -30,7 +30,10 @@ export function planReview(review: BookReview, facts: ReviewFacts): SheetPlan {
     charts: [],
     // One blank row follows each part.
     pageBreaks: pageBreaksOf(
-      parts.map((part) => ({ rows: part.rows.length + 1, whole: part.rows.length <= mostWhole })),
+      parts.map((part) => ({
+        rows: part.rows.length + 1,
+        parted: part.rows.length <= mostWhole ? "seldom" : "anywhere",
+      })),
       formats,
       reviewWidths,
     ),
