@@ -75,7 +75,7 @@ describe("the desk", { timeout: 180_000 }, () => {
   it("saves the workbook, opens it again and finds the same", async () => {
     const { page } = desk;
     await atSheet(page, (d) => d.edit("Parts!H5", "=SUM(B5:B6)"));
-    const download = await saved(page, "Save workbook");
+    const download = await saved(page, "Save for Excel");
     expect(download.suggestedFilename()).toBe("Kestrel & Vane.xlsx");
     const reading = await openXlsx(await bytesOf(download));
     const expected = await atSheet(page, (d) => d.values("Parts!A1:H64"));
@@ -86,6 +86,35 @@ describe("the desk", { timeout: 180_000 }, () => {
     );
     expect(await atSheet(page, (d) => d.values("Parts!A1:H64"))).toEqual(expected);
     expect(await atSheet(page, (d) => d.formula("Parts!H5"))).toBe("=SUM(B5:B6)");
+  });
+
+  it("saves the workbook for LibreOffice, says what that means, and opens it again with every result", async () => {
+    const { page } = desk;
+    await atSheet(page, () => undefined);
+    const before = await atSheet(page, (d) => d.snapshot().sheets.map(({ rows }) => rows));
+    const download = await saved(page, "Save for LibreOffice");
+    expect(download.suggestedFilename()).toBe("Kestrel & Vane for LibreOffice.xlsx");
+    const said = await page.getByRole("status").textContent();
+    expect(said).toMatch(
+      /^Saved for LibreOffice: every figure shows there as it is now\. LibreOffice cannot calculate/,
+    );
+    const file = { name: "Ours for LibreOffice.xlsx", mimeType: "", buffer: Buffer.from(await bytesOf(download)) };
+    await page.getByLabel("File to open").setInputFiles(file);
+    await desk.pane.getByRole("button", { name: "Use selection" }).waitFor();
+    await page.getByRole("heading", { name: "The desk Ours", exact: true }).waitFor();
+    expect(await page.getByRole("status").textContent()).toBe("");
+    expect(await atSheet(page, (d) => d.snapshot().sheets.map(({ rows }) => rows))).toEqual(before);
+  });
+
+  it("says of a workbook from LibreOffice where something was changed within a result", async () => {
+    const { page } = desk;
+    const changed = await readFile(new URL("../reference/workbooks/tubes-changed.xlsx", import.meta.url));
+    await page.getByLabel("File to open").setInputFiles({ name: "tubes.xlsx", mimeType: "", buffer: changed });
+    await page.getByText("something was changed within 'Rye''s tubes'!A5:D8. What was put there stays").waitFor();
+    expect(await atSheet(page, (d) => [d.value("'Rye''s tubes'!C5"), d.value("'Rye''s tubes'!A7")])).toEqual([
+      7.5,
+      "mine",
+    ]);
   });
 
   it("saves the sheet in front as separated text and opens such text", async () => {

@@ -35,7 +35,7 @@ const numbersOn = (page: Page): Promise<Readonly<Record<string, number>>> =>
 async function savedSheet(page: Page): Promise<{ readonly path: string; readonly sheet: SheetData }> {
   const [download] = await Promise.all([
     page.waitForEvent("download"),
-    page.getByRole("button", { name: "Save workbook" }).click(),
+    page.getByRole("button", { name: "Save for Excel" }).click(),
   ]);
   const path = await download.path();
   const reading = await openXlsx(new Uint8Array(await readFile(path)));

@@ -23,7 +23,7 @@ afterEach(async () => {
 async function savedSheets(page: Page): Promise<readonly SheetData[]> {
   const [download] = await Promise.all([
     page.waitForEvent("download"),
-    page.getByRole("button", { name: "Save workbook" }).click(),
+    page.getByRole("button", { name: "Save for Excel" }).click(),
   ]);
   const reading = await openXlsx(new Uint8Array(await readFile(await download.path())));
   if (!reading.ok) throw new Error(reading.because);

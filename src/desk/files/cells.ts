@@ -11,6 +11,8 @@ export const valueOf = (cell: BookCell): BookValue => (isStyled(cell) ? cell.val
 
 export const formulaOf = (cell: BookCell): string | null => (isStyled(cell) ? (cell.formula ?? null) : null);
 
+export const spillOf = (cell: BookCell): string | null => (isStyled(cell) ? (cell.spill ?? null) : null);
+
 /** The cell with a formula of its own, its value and looks as they are; what was spilled from it is left out. */
 export const withFormula = (cell: BookCell, formula: string): StyledCell => ({
   value: valueOf(cell),

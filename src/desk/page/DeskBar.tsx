@@ -1,14 +1,16 @@
 import { useRef, type ReactNode, type RefObject } from "react";
+import type { Note } from "./notes.ts";
 
 export interface DeskBarProps {
   /** Of the workbook. */
   readonly name: string;
-  /** What went wrong last, or nothing. */
-  readonly note: string;
+  /** What is to be said of what was done last. */
+  readonly note: Note | null;
   readonly bar: RefObject<HTMLElement | null>;
   readonly openDemo: () => void;
   readonly open: (file: File) => void;
-  readonly save: () => void;
+  readonly saveForExcel: () => void;
+  readonly saveForLibreOffice: () => void;
   readonly saveSheet: () => void;
   readonly goToGrid: () => void;
   readonly goToPane: () => void;
@@ -24,7 +26,8 @@ export function DeskBar(props: DeskBarProps): ReactNode {
       </h1>
       <nav aria-label="Workbook">
         <Command name="Open..." run={() => file.current?.click()} />
-        <Command name="Save workbook" run={props.save} />
+        <Command name="Save for Excel" run={props.saveForExcel} />
+        <Command name="Save for LibreOffice" run={props.saveForLibreOffice} />
         <Command name="Save sheet as CSV" run={props.saveSheet} />
         <Command name="Demo workbook" run={props.openDemo} />
       </nav>
@@ -33,7 +36,8 @@ export function DeskBar(props: DeskBarProps): ReactNode {
         <Command name="To the pane" run={props.goToPane} />
         <span className="hint">or F6</span>
       </nav>
-      <p role="alert">{props.note}</p>
+      <p role="alert">{textOf(props.note, "fault")}</p>
+      <p role="status">{textOf(props.note, "word")}</p>
       <input
         ref={file}
         type="file"
@@ -45,6 +49,8 @@ export function DeskBar(props: DeskBarProps): ReactNode {
     </header>
   );
 }
+
+const textOf = (note: Note | null, kind: Note["kind"]): string => (note?.kind === kind ? note.text : "");
 
 /** Hands on the file that was chosen; the same one may be chosen again. */
 function pass(input: HTMLInputElement, open: (file: File) => void): void {

@@ -2,8 +2,9 @@ import { useEffect, useRef, useState, type ReactNode } from "react";
 import type { BookData } from "../book/bookData.ts";
 import { demoBook } from "../demo/demoBook.ts";
 import type { FunctionsMetadata } from "../workbook/metadata.ts";
-import { baseName, downloadCsv, downloadXlsx, readBook } from "./bookFiles.ts";
+import { bookName, downloadCsv, downloadForExcel, downloadForLibreOffice, readBook } from "./bookFiles.ts";
 import { DeskBar } from "./DeskBar.tsx";
+import { cannotRead, openedNote, savedForLibreOffice, type Note } from "./notes.ts";
 import { useParts } from "./parts.ts";
 import { openSession, type Session } from "./session.ts";
 import { Splitter } from "./Splitter.tsx";
@@ -21,18 +22,21 @@ const usualPaneWidth = 400;
 /** The stand-in spreadsheet: a bar of its own, the cells, and the add-in's pane beside them. */
 export function DeskPage({ functions }: { readonly functions: FunctionsMetadata }): ReactNode {
   const [opened, setOpened] = useState(demo);
-  const [note, setNote] = useState("");
+  const [note, setNote] = useState<Note | null>(null);
   const [paneWidth, setPaneWidth] = useState(usualPaneWidth);
   const parts = useParts();
   const session = useSession(parts, opened, functions);
   const open = async (file: File): Promise<void> => {
     const reading = await readBook(file);
-    if (reading.ok) setOpened({ name: baseName(file.name), book: reading.value });
-    setNote(reading.ok ? "" : `${file.name} cannot be read: ${reading.because}.`);
+    if (reading.ok) setOpened({ name: bookName(file.name), book: reading.value });
+    setNote(reading.ok ? openedNote(reading.value.loosened) : cannotRead(file.name, reading.because));
   };
   const withBook = (use: (book: BookData) => unknown) => (): void => {
+    setNote(null);
     if (session.current !== null) use(session.current.desk.snapshot());
   };
+  const saveForLibreOffice = async (book: BookData): Promise<void> =>
+    setNote(savedForLibreOffice(await downloadForLibreOffice(book, opened.name)));
   return (
     <div className="desk" style={{ gridTemplateColumns: `minmax(0, 1fr) auto ${paneWidth}px` }}>
       <DeskBar
@@ -41,7 +45,8 @@ export function DeskPage({ functions }: { readonly functions: FunctionsMetadata 
         bar={parts.bar}
         openDemo={() => setOpened(demo())}
         open={(file) => void open(file)}
-        save={withBook((book) => downloadXlsx(book, opened.name))}
+        saveForExcel={withBook((book) => downloadForExcel(book, opened.name))}
+        saveForLibreOffice={withBook((book) => void saveForLibreOffice(book))}
         saveSheet={withBook(downloadCsv)}
         goToGrid={parts.goToGrid}
         goToPane={parts.goToPane}

@@ -3,6 +3,7 @@ import { openCsv } from "../files/openCsv.ts";
 import { openXlsx } from "../files/openXlsx.ts";
 import type { Reading } from "../files/reading.ts";
 import { saveCsv } from "../files/saveCsv.ts";
+import { saveForLibreOffice } from "../files/saveForLibreOffice.ts";
 import { saveXlsx } from "../files/saveXlsx.ts";
 
 /** Opens a file by its name's ending: separated text, or else a workbook. */
@@ -15,11 +16,28 @@ export async function readBook(file: File): Promise<Reading<BookData>> {
 
 const longestSheetName = 31;
 
-export const baseName = (name: string): string => name.replace(/\.[^.]*$/, "");
+const baseName = (name: string): string => name.replace(/\.[^.]*$/, "");
 
-export async function downloadXlsx(book: BookData, name: string): Promise<void> {
-  const type = "application/vnd.openxmlformats-officedocument.spreadsheetml.sheet";
-  download(new Blob([Uint8Array.from(await saveXlsx(book))], { type }), `${name}.xlsx`);
+/** Keeps the two forms of a workbook apart where both lie in one folder. */
+const forLibreOffice = " for LibreOffice";
+
+/** What the workbook of a file is called, whatever it was saved for. */
+export const bookName = (file: string): string => baseName(file).replace(new RegExp(`${forLibreOffice}$`), "");
+
+const xlsxType = "application/vnd.openxmlformats-officedocument.spreadsheetml.sheet";
+
+const downloadBytes = (bytes: Uint8Array, name: string): void =>
+  download(new Blob([Uint8Array.from(bytes)], { type: xlsxType }), `${name}.xlsx`);
+
+export async function downloadForExcel(book: BookData, name: string): Promise<void> {
+  downloadBytes(await saveXlsx(book), name);
+}
+
+/** @returns results that LibreOffice does not show. */
+export async function downloadForLibreOffice(book: BookData, name: string): Promise<readonly string[]> {
+  const { bytes, left } = await saveForLibreOffice(book);
+  downloadBytes(bytes, name + forLibreOffice);
+  return left;
 }
 
 /** The sheet in front. */

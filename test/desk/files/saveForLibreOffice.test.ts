@@ -60,7 +60,7 @@ describe("a workbook saved for LibreOffice", () => {
     ]);
   });
 
-  it("tells which results stay as Excel needs them, since nothing in them would be kept or they ask for their place", async () => {
+  it("tells which stay as Excel needs them, since nothing in them would be kept or they ask for their place", async () => {
     const results = bookOf(
       sheetOf("Odd", [
         [
@@ -69,10 +69,15 @@ describe("a workbook saved for LibreOffice", () => {
           { value: 1, formula: "=SORT(D1:D2)", spill: "C1:C2" },
         ],
         [false, 2, { error: "#CALC!" }],
+        [
+          { value: "", formula: "=FOOTING.CHOICE(D1:D2,E1:E2)" },
+          { value: "white", formula: "=FOOTING.CHOICE(D1:D2,E1:E2)" },
+          { value: "", formula: '=IF(D1=0,"",D1)' },
+        ],
       ]),
     );
     const { bytes, left } = await saveForLibreOffice(results);
-    expect(left).toEqual(["Odd!A1:A2", "Odd!B1:B2", "Odd!C1:C2"]);
+    expect(left).toEqual(["Odd!A1:A2", "Odd!B1:B2", "Odd!C1:C2", "Odd!A3"]);
     expect((await opened(bytes)).sheets.map(trimmed)).toEqual(results.sheets.map(trimmed));
   });
 });

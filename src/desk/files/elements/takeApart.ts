@@ -1,8 +1,8 @@
 import { type SheetArea, addressOf, localAddressOf, parseAddress } from "../../../core/table/address.ts";
-import type { BookCell, BookData, BookName, SheetData, StyledCell } from "../../book/bookData.ts";
+import type { BookCell, BookData, BookName, SheetData } from "../../book/bookData.ts";
 import { absolute } from "../absolute.ts";
 import { isPlaceless } from "../storedFormulas.ts";
-import { cellIn, type Rows, valueOf, withFormula } from "../cells.ts";
+import { cellIn, formulaOf, type Rows, spillOf, valueOf, withFormula } from "../cells.ts";
 import { elementFormula, isKept, standInFormula } from "./elementFormulas.ts";
 import { isMissingInLibreOffice } from "./missingFunctions.ts";
 import { spillName } from "./spillNames.ts";
@@ -10,7 +10,7 @@ import { spillName } from "./spillNames.ts";
 /** A workbook whose results LibreOffice shows. */
 export interface TakenApart {
   readonly book: BookData;
-  /** Cells of results that it cannot show: their first values say nothing that it would keep. */
+  /** Cells in which it shows #NAME? all the same: it would keep none of their values, or they ask for their own place. */
   readonly left: readonly string[];
 }
 
@@ -36,41 +36,44 @@ interface SheetApart {
   readonly left: readonly string[];
 }
 
-interface Spill {
-  readonly area: SheetArea;
+interface Missing {
   readonly formula: string;
+  readonly area: SheetArea;
 }
 
 function sheetApart(sheet: SheetData): SheetApart {
-  const spills = spillsOf(sheet);
+  const missing = missingIn(sheet);
   const [names, left]: [BookName[], string[]] = [[], []];
-  if (spills.length === 0) return { sheet, names, left };
+  if (missing.length === 0) return { sheet, names, left };
   const rows = sheet.rows.map((row) => [...row]);
-  for (const spill of spills) {
-    const cells = cellsApart(rows, spill);
-    if (cells === null) left.push(addressOf(spill.area));
+  for (const formula of missing) {
+    const { area } = formula;
+    if (!spills(area) && isKept(valueOf(cellIn(rows, area.row, area.column)))) continue;
+    const cells = spills(area) ? cellsApart(rows, formula) : null;
+    if (cells === null) left.push(addressOf(area));
     else {
-      layOver(rows, spill.area, cells);
-      names.push(spillName(spill.area, names.length + 1));
+      layOver(rows, area, cells);
+      names.push(spillName(area, names.length + 1));
     }
   }
   return { sheet: { ...sheet, rows }, names, left };
 }
 
-const spillsOf = ({ name, rows }: SheetData): readonly Spill[] =>
-  rows.flatMap((row) =>
-    row.flatMap((cell) => {
-      if (!isSpilling(cell) || !isMissingInLibreOffice(cell.formula)) return [];
-      const area = parseAddress(cell.spill);
-      return area === null ? [] : [{ area: { ...area, sheet: name }, formula: cell.formula }];
+const spills = ({ rows, columns }: SheetArea): boolean => rows * columns > 1;
+
+/** The formulas of a sheet that LibreOffice cannot calculate, with the cells that they fill. */
+const missingIn = ({ name, rows }: SheetData): readonly Missing[] =>
+  rows.flatMap((cells, row) =>
+    cells.flatMap((cell, column) => {
+      const formula = formulaOf(cell);
+      if (formula === null || !isMissingInLibreOffice(formula)) return [];
+      const spilled = parseAddress(spillOf(cell) ?? "");
+      return [{ formula, area: { ...(spilled ?? { row, column, rows: 1, columns: 1 }), sheet: name } }];
     }),
   );
 
-const isSpilling = (cell: BookCell): cell is StyledCell & { readonly formula: string; readonly spill: string } =>
-  typeof cell === "object" && cell !== null && "spill" in cell && cell.formula !== undefined;
-
 /** The cells of a result, each with its own formula, row by row; null where that cannot be. */
-function cellsApart(rows: Rows, { area, formula }: Spill): readonly (readonly BookCell[])[] | null {
+function cellsApart(rows: Rows, { area, formula }: Missing): readonly (readonly BookCell[])[] | null {
   const keeper = keeperOf(rows, area);
   if (keeper === null || !isPlaceless(formula)) return null;
   const found: BookCell[][] = [];
