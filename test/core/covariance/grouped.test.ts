@@ -58,6 +58,7 @@ describe("two ways of grouping", () => {
 
   it("has the degrees of freedom of the fewer groups", () => {
     expect([...grouped(orderedFit("grunfeld", "by year too"), "CR1").degreesOfFreedom!]).toEqual([10, 10, 10]);
+    expect([...grouped(orderedFit("grunfeld", "by year too"), "CR2").degreesOfFreedom!]).toEqual([10, 10, 10]);
     expect([...grouped(orderedFit("grunfeld"), "CR0").degreesOfFreedom!]).toEqual([10, 10, 10]);
   });
 
