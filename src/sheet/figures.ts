@@ -15,7 +15,7 @@ export interface Figures {
   readonly evidence: (row: number, column: number) => PlanCell;
   readonly verdict: (line: number) => PlanCell;
   readonly choice: () => PlanCell;
-  /** The text put where a condition on the evidence holds: the mark of the case in force. */
+  /** The text put where a condition on the evidence holds: the mark of the case that the tests point at. */
   readonly mark: (spread: string, followOn: string, words: string) => PlanCell;
   /** Words where a spreadsheet shows the first cell of a result alone, so that figures are missing; null on a kept sheet. */
   readonly notSpilled: PlanCell;
@@ -23,19 +23,24 @@ export interface Figures {
   readonly formats: readonly PlanFormat[];
 }
 
-const markOf = (inForce: boolean, words: string): string => (inForce ? `▶ ${words} (in force)` : words);
+/** The case that the tests point at is in force unless a kind was fixed by hand. */
+const markOf = ({ override }: Answer["decision"], words: string): string =>
+  `▶ ${words} (${override === null ? "in force" : "the tests point here"})`;
 
 /** Figures as values. */
 export function keptFigures(answer: Answer): Figures {
   const [answers, evidence, lines] = [answerTable(answer), evidenceTable(answer), verdictLines(answer)];
-  const { fourCase } = answer.decision;
+  const { decision } = answer;
+  const { fourCase } = decision;
   return {
     answer: (row, column) => valueAt(answers, row, column),
     evidence: (row, column) => valueAt(evidence, row, column),
     verdict: (line) => text(lines[line] ?? ""),
     choice: () => text(choiceText(answer)),
-    mark: (spread, followOn, words) =>
-      text(markOf(spread === fourCase.spread && matchesFollowOn(followOn, fourCase.followOn), words)),
+    mark: (spread, followOn, words) => {
+      const pointsHere = spread === fourCase.spread && matchesFollowOn(followOn, fourCase.followOn);
+      return text(pointsHere ? markOf(decision, words) : words);
+    },
     notSpilled: null,
     blocks: [],
     formats: [],
@@ -82,7 +87,7 @@ export function liveFigures(answer: Answer, sources: LiveSources): Figures {
     choice: () => reference(at(0, choiceColumn)),
     mark: (spreadIs, followOnIs, words) =>
       formula(
-        `=IF(AND(${spread}="${spreadIs}",(${followOn}="some")=${followOnIs === "some" ? "TRUE" : "FALSE"}),"${markOf(true, words)}","${words}")`,
+        `=IF(AND(${spread}="${spreadIs}",(${followOn}="some")=${followOnIs === "some" ? "TRUE" : "FALSE"}),"${markOf(answer.decision, words)}","${words}")`,
       ),
     notSpilled: unlessSpilled(at(0, liveColumn), at(0, liveColumn + 1)),
     blocks: [

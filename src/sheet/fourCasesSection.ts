@@ -12,7 +12,7 @@ const heading = "Which standard errors, and why";
 const question = { spread: 1, followOn: 2, level: 1, pValue: 4 } as const;
 
 /**
- * The four cases with the one in force marked in words, and the p-values that put it there; policies that ask no
+ * The four cases with the one that the tests point at marked in words, and the p-values that put it there; policies that ask no
  * tests say so by leaving them out.
  */
 export function fourCasesSection(answer: Answer, figures: Figures): Section {

@@ -168,3 +168,17 @@ describe("a live sheet", () => {
     }
   });
 });
+
+describe("the four cases of a kind that was fixed by hand", () => {
+  const asked = question();
+  const fixed = { ...asked, options: { ...asked.options, fixed: { errors: "classical", reason: "as ever" } as const } };
+
+  it.each(["live", "kept"] as const)("mark what the tests point at, not what is in force: %s", (kind) => {
+    const textOf = (one: Question): string =>
+      JSON.stringify(planAnswer(answered(one), sheetFactsOf(one, made), kind).blocks);
+    expect(textOf(asked)).toContain("▶ Newey-West (in force)");
+    expect(answered(fixed).decision.called.errors.kind).toBe("newey-west");
+    expect(textOf(fixed)).toContain("▶ Newey-West (the tests point here)");
+    expect(textOf(fixed)).not.toContain("(in force)");
+  });
+});
