@@ -1,7 +1,7 @@
 import type { Host } from "../app/host.ts";
 import { type Result, failure, success } from "../core/problem/result.ts";
 import { type SheetArea, addressOf, parseAddress } from "../core/table/address.ts";
-import type { Rectangle } from "./areas.ts";
+import { type Rectangle, intersection } from "./areas.ts";
 import type { ExcelClient } from "./client.ts";
 import { unknownSheet } from "./locate.ts";
 import { type SheetChange, changedArea, moved } from "./moved.ts";
@@ -70,7 +70,7 @@ async function listen(
 }
 
 /** Keeps where the areas of one sheet stand now, and tells of each that a change touched. */
-function follower(watched: readonly SheetArea[], tell: (address: string) => void): (change: SheetChange) => void {
+function follower(watched: readonly SheetArea[], tell: Teller["tell"]): (change: SheetChange) => void {
   let areas: readonly { readonly at: Rectangle | null; readonly last: SheetArea }[] = watched.map((area) => ({
     at: area,
     last: area,
@@ -80,31 +80,37 @@ function follower(watched: readonly SheetArea[], tell: (address: string) => void
       if (at === null) return { at, last };
       const { area, touched } = moved(at, change);
       const now = { ...last, ...area };
-      if (touched) tell(addressOf(now));
+      if (touched) tell(last, addressOf({ ...now, ...touchedPart(now, change) }));
       return { at: area, last: now };
     });
   };
 }
 
+/** The cells that were edited, or came to another value; where cells were put in or taken out, the whole area. */
+const touchedPart = (area: SheetArea, { kind, area: change }: SheetChange): Rectangle =>
+  (kind === "RangeEdited" || kind === "Calculated" ? intersection(area, change) : null) ?? area;
+
 interface Teller {
-  readonly tell: (address: string) => void;
+  /** Of several changes of an area the first is told. */
+  readonly tell: (area: SheetArea, address: string) => void;
   readonly silence: () => void;
 }
 
-/** Tells of each address once, when no further change has come for a while. */
+/** Tells of each area once, when no further change has come for a while. */
 function quietTeller(changed: (address: string) => void): Teller {
-  const addresses = new Set<string>();
+  const addresses = new Map<string, string>();
   let timer: ReturnType<typeof setTimeout> | undefined;
   let silent = false;
   const speak = (): void => {
-    const told = [...addresses];
+    const told = [...addresses.values()];
     addresses.clear();
     for (const address of told) changed(address);
   };
   return {
-    tell: (address) => {
+    tell: (area, address) => {
       if (silent) return;
-      addresses.add(address);
+      const key = addressOf(area);
+      if (!addresses.has(key)) addresses.set(key, address);
       clearTimeout(timer);
       timer = setTimeout(speak, quietMilliseconds);
     },
