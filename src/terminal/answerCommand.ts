@@ -15,7 +15,7 @@ import { type Predicted, predictionLines, predictionsOf } from "./predictions.ts
 import { type Asked, questionOf } from "./question.ts";
 import type { OpenBook } from "./deskBook.ts";
 import { report } from "./report.ts";
-import { saveCopy } from "./saveCopy.ts";
+import { forms, saveCopy } from "./saveCopy.ts";
 import { saveFault } from "./saveName.ts";
 
 /** What the command needs of the world outside. */
@@ -99,5 +99,6 @@ async function save({ opened, asked, answer, file, command }: Saving, world: Sur
   const written = await opened.host.write(plan, quiet);
   if (!written.ok) return written;
   const { sheet } = written.value;
-  return saveCopy({ opened, file, sheet, from: command.book, to: command.save ?? "" }, world.files);
+  const form = command.forLibreOffice ? forms.libreOffice : forms.excel;
+  return saveCopy({ opened, file, sheet, from: command.book, to: command.save ?? "", form }, world.files);
 }

@@ -15,6 +15,8 @@ export interface AnswerCommand {
   readonly predict: string | null;
   readonly save: string | null;
   readonly live: boolean;
+  /** The copy is to be one of which LibreOffice shows every figure. */
+  readonly forLibreOffice: boolean;
   readonly json: boolean;
 }
 
@@ -36,6 +38,7 @@ const flagTable: FlagTable = {
   predict: { type: "string" },
   save: { type: "string" },
   live: { type: "boolean" },
+  "for-libreoffice": { type: "boolean" },
   json: { type: "boolean" },
   help: { type: "boolean" },
 };
@@ -68,6 +71,7 @@ export function readAnswerCommand(words: readonly string[]): Result<AnswerComman
     predict: text("predict"),
     save: text("save"),
     live: has("live"),
+    forLibreOffice: has("for-libreoffice"),
     json: has("json"),
   });
 }

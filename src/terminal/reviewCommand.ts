@@ -18,7 +18,7 @@ import { type BookFile, openBookFile } from "./bookFile.ts";
 import { headingsIn } from "./columnsAsked.ts";
 import type { ReviewCommand } from "./reviewArguments.ts";
 import { reviewJson } from "./reviewJson.ts";
-import { saveCopy } from "./saveCopy.ts";
+import { forms, saveCopy } from "./saveCopy.ts";
 import { saveFault } from "./saveName.ts";
 import { wrapped } from "./wrapped.ts";
 
@@ -113,7 +113,7 @@ async function written(
   );
   const sheet = await opened.host.write(planReview(review, facts), quiet);
   if (!sheet.ok) return sheet;
-  const copy = { opened, file, sheet: sheet.value.sheet, from: command.book, to: save };
+  const copy = { opened, file, sheet: sheet.value.sheet, from: command.book, to: save, form: forms.excel };
   const saved = await saveCopy(copy, world.files);
   return saved.ok ? success([`Sheet "${saved.value}" is in ${save}.`]) : saved;
 }

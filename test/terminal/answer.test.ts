@@ -2,6 +2,7 @@ import { readFileSync } from "node:fs";
 import { beforeAll, describe, expect, it } from "vitest";
 import { demoBook } from "../../src/desk/demo/demoBook.ts";
 import { openXlsx } from "../../src/desk/files/openXlsx.ts";
+import { textOf, unpack } from "../../src/desk/files/parts.ts";
 import { saveXlsx } from "../../src/desk/files/saveXlsx.ts";
 import { digitsOf } from "../support/digits.ts";
 import { type Shelf, shelf, terminal } from "../support/terminal.ts";
@@ -260,5 +261,21 @@ describe("--save", () => {
         .filter((row) => row !== "");
     expect(texts(live)).toEqual(texts(kept));
     expect(JSON.stringify(live)).toContain("=FOOTING.ANSWER(Months!$B$4:$B$100,Months!$C$4:$E$100,");
+  });
+
+  it("--live --for-libreoffice: each cell by itself, and one result again on the desk", async () => {
+    await run([...months, "--live", "--save", "excel.xlsx"], demo);
+    await run([...months, "--live", "--for-libreoffice", "--save", "office.xlsx"], demo);
+    const parts = unpack(demo.files.get("office.xlsx")!);
+    const sheet = Object.keys(parts).find((path) => /^xl\/worksheets\/footing1-/.test(path))!;
+    expect(textOf(parts[sheet]!)).toContain("<f>INDEX(_xldudf_FOOTING_ANSWER(");
+    expect(textOf(parts[sheet]!)).not.toContain('t="array"');
+    expect(textOf(parts["xl/workbook.xml"]!)).toMatch(
+      /<definedName hidden="1" name="_Footing_spill_1" localSheetId="6">/,
+    );
+    const [excel, office] = await Promise.all(
+      ["excel.xlsx", "office.xlsx"].map((name) => openXlsx(demo.files.get(name)!)),
+    );
+    expect(office).toEqual(excel);
   });
 });
