@@ -33,13 +33,15 @@ const useStyles = makeStyles({
 export function ActionBar(): ReactNode {
   const styles = useStyles();
   const { state } = usePane();
+  // Kept here, so that it is still chosen after the work of writing.
+  const [wanted, setWanted] = useState<SheetKind>("live");
   if (state.busy !== null) return <Working busy={state.busy} />;
   if (state.section === "review") {
     return state.review === null ? null : <ReviewBar review={state.review} className={styles.bar} />;
   }
   if (state.section === "data") return state.data === null ? null : <AskBar />;
   if (state.section === "answer" && state.comparison !== null) return <CompareBar className={styles.bar} />;
-  return state.answered === null ? null : <WriteBar />;
+  return state.answered === null ? null : <WriteBar wanted={wanted} choose={setWanted} />;
 }
 
 function AskBar(): ReactNode {
@@ -85,10 +87,14 @@ function Working({ busy }: { readonly busy: Busy }): ReactNode {
   );
 }
 
-function WriteBar(): ReactNode {
+interface WriteBarProps {
+  readonly wanted: SheetKind;
+  readonly choose: (kind: SheetKind) => void;
+}
+
+function WriteBar({ wanted, choose }: WriteBarProps): ReactNode {
   const styles = useStyles();
   const { state, commands } = usePane();
-  const [wanted, setKind] = useState<SheetKind>("live");
   const { written, answered } = state;
   const onlyKept = answered !== null && !canBeLive(answered);
   const kind = onlyKept ? "kept" : wanted;
@@ -102,7 +108,7 @@ function WriteBar(): ReactNode {
           size="small"
           aria-label="Live or kept"
           value={kind}
-          onChange={(_, { value }) => setKind(value === "kept" ? "kept" : "live")}
+          onChange={(_, { value }) => choose(value === "kept" ? "kept" : "live")}
         >
           {!onlyKept && <option value="live">live</option>}
           <option value="kept">kept</option>

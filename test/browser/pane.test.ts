@@ -304,6 +304,18 @@ describe("evidence", () => {
   });
 });
 
+it("chooses other data in place of those before, each part of the section once", async () => {
+  await useSelection(page);
+  for (const address of ["Months!A1:F49", "Months!A1:F97"]) {
+    if ((await page.getByLabel("Or type an address").count()) === 0) await button(page, "Choose other data").click();
+    await page.getByLabel("Or type an address").fill(address);
+    await button(page, "Read it").click();
+    await heading(page, address).waitFor();
+    expect(await button(page, "Choose other data").count()).toBe(1);
+    expect(await page.getByRole("combobox", { name: /^Role of/ }).count()).toBe(6);
+  }
+});
+
 describe("work and faults", () => {
   it("shows progress, can be cancelled, and keeps the focus", async () => {
     await useSelection(page);

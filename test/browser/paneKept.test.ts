@@ -137,6 +137,11 @@ describe("result sheets", () => {
     await getAnswer(page);
     await page.getByLabel("Live or kept").selectOption("kept");
     await button(page, "Write to the workbook").click();
+    await page
+      .getByRole("contentinfo")
+      .getByText(/^Written to/)
+      .waitFor();
+    expect(await page.getByLabel("Live or kept").inputValue()).toBe("kept");
     await openTab(page, "Data");
     await sheets().getByText("Kept, and as its cells are.").waitFor();
     await page.evaluate(() => window.stage.host.change(5, 1, 99));

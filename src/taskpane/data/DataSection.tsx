@@ -42,7 +42,7 @@ export function DataSection(): ReactNode {
         <PlaceChooser />
       </Disclosure>
       <h2 className={type.head}>Columns</h2>
-      <ColumnList key={address} />
+      <ColumnList key={`columns of ${address}`} />
       <HelpHead about="groups" asks="What are groups?">
         Rows are
       </HelpHead>

@@ -1,7 +1,5 @@
-import { pValueInWords } from "../../core/answer/wording.ts";
+import { pValueText } from "../../sheet/tableTexts.ts";
 
-/** A p-value as a table shows it: "0.034", "< 0.0001", which no line break parts. */
+/** A p-value as a table of the pane shows it: "0.034", "< 0.0001", which no line break parts. */
 export const pFigure = (pValue: number, level: number): string =>
-  pValueInWords(pValue, level)
-    .replace(/^p (= )?/, "")
-    .replace("under ", "<\u00a0");
+  pValueText(pValue, level).replace("under ", "<\u00a0");
