@@ -1,12 +1,11 @@
 import { alignedLines } from "../core/answer/alignedLines.ts";
 import type { Answer } from "../core/answer/answer.ts";
-import { estimatesTable } from "../core/answer/askedTables.ts";
 import { askedSentences } from "../core/answer/askedWords.ts";
 import { findingInWords } from "../core/answer/findings.ts";
-import { answerTable, choiceText } from "../core/answer/tables.ts";
-import { decimalsFor, numberInWords, pValueInWords } from "../core/answer/wording.ts";
+import { choiceText } from "../core/answer/tables.ts";
 import type { SheetFacts } from "./facts.ts";
 import { cautionLine } from "./plainWordsSection.ts";
+import { driverTexts, estimateTexts } from "./tableTexts.ts";
 
 type Part = readonly [heading: string, lines: readonly string[]];
 
@@ -20,7 +19,7 @@ export function memoOf(answer: Answer, facts: SheetFacts): string {
   const parts: readonly Part[] = [
     ["What holds", [...drivers.flatMap(({ sentence }) => sentence ?? []), opening]],
     ["Which standard errors, and why", [choice, `${choiceText(answer)}.`, ...whyLines(answer), ...decision.cautions]],
-    ["Drivers", driverLines(answer)],
+    ["Drivers", alignedLines(driverTexts(answer))],
     ...askedParts(answer),
     ["Rows", rowLines(answer)],
     ["How this was made", madeLines(facts)],
@@ -38,59 +37,11 @@ const whyLines = ({ decision }: Answer): string[] => [
 
 /** What was asked of the coefficients beside the drivers, and its figures in columns; nothing where nothing was. */
 function askedParts(answer: Answer): Part[] {
-  const { estimates, options } = answer;
+  const { estimates } = answer;
   const sentences = askedSentences(answer);
   if (sentences.length === 0) return [];
-  const [headings = [], ...body] = estimatesTable(answer);
-  const shown = body.map((row, index) => {
-    const { low, high } = estimates[index]?.estimate ?? { low: 0, high: 0 };
-    const write = writerFor({ low, high, level: options.level });
-    return row.map((value, column) => (typeof value === "number" ? write(value, String(headings[column])) : value));
-  });
-  const table = estimates.length === 0 ? [] : alignedLines([headings.map(String), ...shown]);
+  const table = estimates.length === 0 ? [] : alignedLines(estimateTexts(answer));
   return [["Asked of the coefficients", [...sentences, ...table]]];
-}
-
-/** One line a term, figures to what the standard error in force supports; columns that hold nothing are left out. */
-function driverLines(answer: Answer): string[] {
-  const [headings = [], ...body] = answerTable(answer);
-  const shown = body.map((row, index) => {
-    const { low, high } = answer.drivers[index]!;
-    const write = writerFor({ low, high, level: answer.options.level });
-    return row.map((value, column) => (typeof value === "number" ? write(value, String(headings[column])) : value));
-  });
-  const columns = headings.flatMap((_, column) => (shown.some((row) => row[column] !== "") ? [column] : []));
-  return alignedLines([headings.map(String), ...shown].map((row) => columns.map((column) => row[column] ?? "")));
-}
-
-interface Writing {
-  readonly low: number;
-  readonly high: number;
-  readonly level: number;
-}
-
-const ratioDecimals = 2;
-
-/** Standard errors have a digit more than the coefficient. */
-function writerFor({ low, high, level }: Writing): (value: number, heading: string) => string {
-  const decimals = decimalsFor((high - low) / 2);
-  return (value, heading) => {
-    switch (heading) {
-      case "held against":
-        return String(value);
-      case "ratio":
-        return numberInWords(value, ratioDecimals);
-      case "p-value":
-        return pValueInWords(value, level).replace(/^p (= )?/, "");
-      case "coefficient":
-      case "estimate":
-      case "low":
-      case "high":
-        return numberInWords(value, decimals);
-      default:
-        return numberInWords(value, decimals + 1);
-    }
-  };
 }
 
 const mostRowsListed = 10;

@@ -1,8 +1,9 @@
 import { alignedLines } from "../core/answer/alignedLines.ts";
 import type { Answer } from "../core/answer/answer.ts";
-import { answerTable, choiceText, verdictLines } from "../core/answer/tables.ts";
+import { choiceText, verdictLines } from "../core/answer/tables.ts";
 import { listInWords } from "../core/answer/wording.ts";
 import { cautionLine } from "../sheet/plainWordsSection.ts";
+import { driverTexts, pValueText } from "../sheet/tableTexts.ts";
 import { wrapped } from "./wrapped.ts";
 
 const mostListed = 10;
@@ -28,28 +29,20 @@ export function report(answer: Answer, closing: readonly string[]): string {
     .join("\n");
 }
 
-/** Drivers in columns, numbers to five significant digits. */
+/** Drivers in columns, figures to what the standard error in force supports; `--json` has every digit. */
 function table(answer: Answer): string[] {
-  const cells = answerTable(answer).map((row) =>
-    row.map((value) => (typeof value === "number" ? shown(value) : value)),
-  );
+  const cells = driverTexts(answer);
   const normal = normalColumn(answer);
   const place = (cells[0] ?? []).indexOf("p-value") + 1;
   return alignedLines(normal === null ? cells : cells.map((row, i) => row.toSpliced(place, 0, normal[i] ?? "")));
 }
 
-/**
- * The p-value by the normal law of large samples, beside the one in force where they differ in the second digit; null
- * where none does.
- */
-function normalColumn({ inference: { inForce } }: Answer): string[] | null {
-  const values = inForce.pValueNormal.map((p, row) =>
-    p.toPrecision(2) === (inForce.pValue[row] ?? p).toPrecision(2) ? "" : shown(p),
-  );
+/** The p-value by the normal law of large samples, beside the one in force where they look different; null where none does. */
+function normalColumn({ inference: { inForce }, options: { level } }: Answer): string[] | null {
+  const shown = (p: number): string => pValueText(p, level);
+  const values = inForce.pValueNormal.map((p, row) => (shown(p) === shown(inForce.pValue[row] ?? p) ? "" : shown(p)));
   return values.every((value) => value === "") ? null : ["by the normal", ...values];
 }
-
-const shown = (value: number): string => String(Number(value.toPrecision(5)));
 
 function leftOut({ leftOut: rows, leftOutCount }: Answer): string[] {
   if (leftOutCount === 0) return [];
