@@ -1,0 +1,49 @@
+import type { Browser, Page } from "playwright-core";
+import { afterAll, afterEach, beforeAll, beforeEach, expect, it } from "vitest";
+import { openPane } from "./panePage/openPane.ts";
+import { button, focused, heading, roleOf, useSelection } from "./panePage/steps.ts";
+import { launchBrowser } from "./support/browser.ts";
+
+let browser: Browser;
+let page: Page;
+
+beforeAll(async () => {
+  browser = await launchBrowser();
+});
+afterAll(() => browser.close());
+beforeEach(async () => {
+  page = await openPane(browser, { width: 320 });
+});
+afterEach(() => page.close());
+
+it("chooses other data in place of those before, each part of the section once", async () => {
+  await useSelection(page);
+  for (const address of ["Months!A1:F49", "Months!A1:F97"]) {
+    if ((await page.getByLabel("Or type an address").count()) === 0) await button(page, "Choose other data").click();
+    await page.getByLabel("Or type an address").fill(address);
+    await button(page, "Read it").click();
+    await heading(page, address).waitFor();
+    expect(await button(page, "Choose other data").count()).toBe(1);
+    expect(await page.getByRole("combobox", { name: /^Role of/ }).count()).toBe(6);
+  }
+});
+
+it("puts right in one click what needs the user's leave alone", async () => {
+  await useSelection(page);
+  await button(page, "Get the answer").click();
+  const alert = page.getByRole("alert");
+  await alert.getByRole("button", { name: "Read them as numbers" }).click();
+  expect(await alert.innerText()).toBe("");
+  await page.getByText(/^94 rows can be used/).waitFor();
+  await page.evaluate(
+    () => (window.stage.refusal = { code: "dependent-columns", column: "Rainy days", madeOf: ["Price index"] }),
+  );
+  await button(page, "Get the answer").click();
+  await alert.getByText(/"Rainy days" says nothing new/).waitFor();
+  await alert.getByRole("button", { name: "Leave out Rainy days" }).click();
+  expect(await roleOf(page, "Rainy days").inputValue()).toBe("unused");
+  expect(await focused(page)).toBe("H1 Months!A1:F97");
+  await page.evaluate(() => (window.stage.refusal = null));
+  await button(page, "Get the answer").click();
+  await heading(page, "Repairs explained by Price index and Advertising").waitFor();
+});
