@@ -60,6 +60,16 @@ describe("a result that was saved cell by cell", () => {
     expect(rowsOf(loose)[1]).toEqual([null, { value: -1.5, formula: part(2, 1) }, { value: "", formula: part(2, 2) }]);
   });
 
+  it.each<[string, (rows: BookCell[][]) => unknown]>([
+    ["the last cell of a row was emptied", (rows) => rows[2]!.pop()],
+    ["the last row was emptied", (rows) => rows.pop()],
+    ["two parts of a row changed places", (rows) => rows[2]!.splice(1, 2, rows[2]![2]!, rows[2]![1]!)],
+  ])("is left cell by cell where %s", (_, change) => {
+    const loose = changed((rows) => void change(rows));
+    expect(loose.loosened).toEqual(["Result!B1:C3"]);
+    expect(rowsOf(loose)[1]![1]).toEqual({ value: -1.5, formula: part(2, 1) });
+  });
+
   it("takes the formula of most cells for what stands in for its value, also where the first cell has another", () => {
     const other = "=INDEX(FOOTING.FITTED(Data!A1:A9,Data!B1:B9),1,1)";
     const loose = changed((rows) => {
