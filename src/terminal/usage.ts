@@ -19,7 +19,7 @@ calls for, and prints the verdict. H is a heading, or a range such as B3:B99.
   --predict RANGE      new rows to predict, headings included, such as Plans!A1:C5, or the sheet that has them
   --save OUT.xlsx      write the result sheet into a copy of the workbook
   --live               with --save: figures as worksheet functions instead of values
-  --for-libreoffice    with --live: in the form of which LibreOffice shows the figures; without it, in Excel's
+  --for-libreoffice    with --live: in the form that LibreOffice needs to show the figures; else in that of Excel
   --json               print everything in full precision as JSON
 
 Settings, the same as in the worksheet functions:
