@@ -1,7 +1,7 @@
 import { parseArgs } from "node:util";
 import { startDeskSuite } from "../browser/support/deskPage.ts";
 import { largeDrivers, largeFile } from "../browser/support/largeFile.ts";
-import { watchTasks } from "../browser/support/longTasks.ts";
+import { watchTasks } from "./longTasks.ts";
 
 /**
  * Times the pane over a large sheet of six drivers, on the built desk in a browser: reading, and from the click to the

@@ -1,25 +1,13 @@
 import { readFile } from "node:fs/promises";
-import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from "vitest";
+import { describe, expect, it } from "vitest";
 import type { Download, Page } from "playwright-core";
 import { demoBook } from "../../src/desk/demo/demoBook.ts";
 import { listedFunctions } from "../../src/functions/listed.ts";
 import { openXlsx } from "../../src/desk/files/openXlsx.ts";
-import { atSheet, startDeskSuite, type DeskPage, type DeskSuite } from "./support/deskPage.ts";
+import { deskForEachTest } from "./support/deskForEachTest.ts";
+import { atSheet } from "./support/deskPage.ts";
 
-let suite: DeskSuite;
-let desk: DeskPage;
-beforeAll(async () => {
-  suite = await startDeskSuite();
-});
-afterAll(() => suite.close());
-beforeEach(async () => {
-  desk = await suite.openDesk();
-});
-afterEach(async () => {
-  expect(desk.asked, "no other host is asked for anything").toEqual([]);
-  expect(desk.faults).toEqual([]);
-  await desk.close();
-});
+const desk = deskForEachTest();
 
 async function saved(page: Page, button: string): Promise<Download> {
   const [download] = await Promise.all([

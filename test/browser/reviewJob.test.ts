@@ -1,24 +1,12 @@
 import { readFile } from "node:fs/promises";
 import type { Page } from "playwright-core";
-import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from "vitest";
+import { describe, expect, it } from "vitest";
 import type { SheetData } from "../../src/desk/book/bookData.ts";
 import { openXlsx } from "../../src/desk/files/openXlsx.ts";
-import { atSheet, startDeskSuite, type DeskPage, type DeskSuite } from "./support/deskPage.ts";
+import { deskForEachTest } from "./support/deskForEachTest.ts";
+import { atSheet } from "./support/deskPage.ts";
 
-let suite: DeskSuite;
-let desk: DeskPage;
-beforeAll(async () => {
-  suite = await startDeskSuite();
-});
-afterAll(() => suite.close());
-beforeEach(async () => {
-  desk = await suite.openDesk();
-});
-afterEach(async () => {
-  expect(desk.asked).toEqual([]);
-  expect(desk.faults).toEqual([]);
-  await desk.close();
-});
+const desk = deskForEachTest();
 
 async function savedSheets(page: Page): Promise<readonly SheetData[]> {
   const [download] = await Promise.all([
