@@ -16,6 +16,7 @@ import {
   soundFormulas,
   soundPositions,
   soundReaders,
+  soundThroughZero,
 } from "./formulas/books.ts";
 import { judgeFormulas } from "./formulas/judge.ts";
 import { judge, judgeBook } from "./judge.ts";
@@ -63,6 +64,7 @@ async function* all(): AsyncGenerator<Judged> {
   for (const planted of isWhole ? laidOut() : []) yield await judgedPlanted("typed, brackets elsewhere", planted);
   const usual = [...(isWhole ? formulaFaults() : everyFormulaFault()), ...formulaPairs(), ...soundFormulas()];
   yield* judgedFormulas("formulas", usual);
+  yield* judgedFormulas("formulas without a constant", soundThroughZero());
   yield* judgedFormulas("formulas without drivers", [...positionFaults(), ...soundPositions()].filter(isTaken));
   yield* judgedFormulas("results read in cells", [...readerFaults(), ...soundReaders()].filter(isTaken));
 }

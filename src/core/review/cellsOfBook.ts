@@ -38,6 +38,10 @@ export const isTextAt = (place: CellPlace): boolean => kindAt(place) === cellKin
 export const isCalculatedAt = ({ sheet, row, column }: CellPlace): boolean =>
   sheet.calculated[column - sheet.firstColumn]?.[row - sheet.firstRow] === 1;
 
+/** Whether the cell is among those that a regression's formula fills: one that spills stands in its first cell alone. */
+export const isSpilledAt = ({ sheet, row, column }: CellPlace): boolean =>
+  [...sheet.formulas, ...sheet.readers].some((one) => overlap(one, { row, column, rows: 1, columns: 1 }));
+
 /** The number format of a cell; null where it was not read. */
 export function formatAt({ sheet, row, column }: CellPlace): string | null {
   const stretch = sheet.formats.find(({ firstRow, rowCount }) => row >= firstRow && row < firstRow + rowCount);

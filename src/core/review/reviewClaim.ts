@@ -7,9 +7,10 @@ import type { ClaimReview, Explanation } from "./claimReview.ts";
 import { assemble } from "./engine/assemble.ts";
 import { saidOf } from "./engine/changeWords.ts";
 import { type Drawing, type Drawn, consequencesOf } from "./engine/consequences.ts";
+import { type ConstantLeftOut, constantLeftOut, leavesConstantOut } from "./engine/constantLeftOut.ts";
 import { errorsFound, fittingKinds } from "./engine/errorsFound.ts";
 import { frameOf } from "./engine/frame.ts";
-import { intendedOf, questionFor } from "./engine/intended.ts";
+import { type Intended, intendedOf, questionFor } from "./engine/intended.ts";
 import { orderingsOf } from "./engine/orderings.ts";
 import { claimedRecipe } from "./engine/recipe.ts";
 import { type SearchStep, search } from "./engine/search.ts";
@@ -51,7 +52,16 @@ export function* reviewing(claim: Claim): Generator<SearchStep, ClaimReview> {
     const hypotheses = changes.map(({ facts }) => facts.hypothesis);
     return { hypotheses, ...saidOf(changes, bench.frame), compared };
   });
-  return assemble({ bench, claimed, made, searched, explanations, errors, answered, drawn, intended });
+  const constant = constantOf(bench, intended, answer);
+  return assemble({ bench, claimed, made, searched, explanations, errors, answered, drawn, intended, constant });
+}
+
+function constantOf(bench: Bench, intended: Intended, answer: Answer | null): ConstantLeftOut | null {
+  if (!leavesConstantOut(bench.claim)) return null;
+  const { recipe } = intended;
+  const withIt = { ...intended, recipe: { ...recipe, model: { ...recipe.model, constant: true } } };
+  const answered = answerTo(questionFor(bench, withIt));
+  return constantLeftOut(bench.claim, answer, answered.ok ? answered.value : null);
 }
 
 function drawnFrom(bench: Bench, drawing: Omit<Drawing, "answer">, answer: Answer | null): Drawn {

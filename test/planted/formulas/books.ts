@@ -2,9 +2,10 @@ import type { BookData, SheetData } from "../../../src/desk/book/bookData.ts";
 import { blankSheet } from "../../../src/desk/book/blankSheet.ts";
 import { calledFor } from "../books.ts";
 import { type DataSet, dataSets } from "../dataSets.ts";
+import { type Calculated, calculated } from "./calculated.ts";
 import { type FormulaFault, type Said, rangeFaults, readingFaults, sheetFaults, soundSheets } from "./faults.ts";
 import { type Form, type Reporting, forms, linestForms, readerForms, reportRows } from "./forms.ts";
-import { type Worksheet, toSheetData, worksheetOf } from "./worksheet.ts";
+import { type Worksheet, changed, numberIn, toSheetData, worksheetOf } from "./worksheet.ts";
 
 /** A workbook whose report is made by formulas, with one fault or none. */
 export interface FormulaBook {
@@ -79,6 +80,36 @@ export const soundReaders = (): FormulaBook[] =>
     .flatMap((set, index) =>
       readerForms.map((form, turn) => made(`V${index + 1}_${turn}`, { set, form, together: [{ name: "no fault" }] })),
     );
+
+/** The outcome without its constant: a line through zero is right then. */
+const throughZero: NonNullable<FormulaFault["sheet"]> = (sheet) => {
+  const constant = wholly(sheet, true)?.fit.coefficients[0] ?? 0;
+  return changed(sheet, 1, [sheet.rows.map((_, row) => row), (cell) => (numberIn(cell) ?? 0) - constant]);
+};
+
+/** What a spreadsheet makes of all rows and drivers. */
+function wholly(sheet: Worksheet, constant: boolean): Calculated | null {
+  const span = { from: 0, to: sheet.rows.length };
+  const drivers = Array.from({ length: sheet.driverCount }, (_, j) => j + 2);
+  return calculated(sheet, { ranges: { outcome: span, drivers: span }, drivers, constant, otherCells: "error" });
+}
+
+/** Whether every driver is shown at 5 % with a constant if it is without one, and the other way round. */
+function survivesConstant(set: DataSet): boolean {
+  const sheet = throughZero(worksheetOf(set));
+  const [without, withIt] = [wholly(sheet, false), wholly(sheet, true)];
+  const isShown = (pValue: number): boolean => pValue < 0.05;
+  return without!.pValues.every((one, j) => isShown(one) === isShown(withIt!.pValues[j + 1]!));
+}
+
+/** LINEST without a constant where none is missed. */
+export const soundThroughZero = (): FormulaBook[] =>
+  dataSets
+    .filter((set) => calledFor(set).errors.kind === "classical" && survivesConstant(set))
+    .map((set, index) => {
+      const unusual = { name: "a line through zero", sheet: throughZero, constant: false } as const;
+      return made(`W${index + 1}`, { set, form: linestForms[index % linestForms.length]!, together: [unusual] });
+    });
 
 /** Formulas that name no drivers, without fault: figures that rest on no standard errors. */
 export const soundPositions = (): FormulaBook[] =>

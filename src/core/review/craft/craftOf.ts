@@ -62,7 +62,6 @@ function ofClaim(claim: Claim, book: Book): Finding[] {
     ...lines.flatMap(hiddenLine),
     ...shiftedRanges(named(outcome), drivers.map(named)),
     ...olderResults(claim),
-    ...noConstant(claim),
     ...hiddenRows(outcome),
     ...hiddenSheets(lines),
     ...repeatedRows(
@@ -77,13 +76,6 @@ function checked(line: ClaimedLine, book: Book): CheckedLine[] {
   if (sheet === null) return [];
   const { runs, track, from, count } = line;
   return [{ line, stretch: { sheet, runs, track, from, count } }];
-}
-
-/** A constant is left out of a formula by a word that is easily overlooked; a report that is typed in says so itself. */
-function noConstant({ origin, constant, place, outcome }: Claim): Finding[] {
-  if (origin.kind !== "formula" || constant) return [];
-  const what = found.noConstant(outcome.name);
-  return [craftFinding("noConstant", { rank: "changes a number", cells: [place], what })];
 }
 
 function hiddenRows({ line, stretch }: CheckedLine): Finding[] {

@@ -18,8 +18,6 @@ export const found = {
   unequal: (why: string) => why,
   headingInside: (line: string, heading: string) =>
     `The range of "${line}" begins with its heading, "${heading}", which the function passes over.`,
-  noConstant: (outcome: string) =>
-    `The formula leaves the constant out: the line of "${outcome}" is forced through zero, and its R-squared is counted from zero, not from the mean.`,
   namedOtherwise: (label: string, given: string) =>
     `The number is called "${label}", but its formula gives the ${given}.`,
   overFormula: (line: string, count: number, formulas: number) =>
@@ -45,7 +43,6 @@ export const advice = {
   shifted: "If a lag is meant, say so in the report; if not, let all ranges begin in the same row.",
   unequal: "Let all ranges begin and end in the same rows.",
   headingInside: "Let the range begin below the heading: other functions end in an error there.",
-  noConstant: "Let the formula have a constant, or say in the report why the line must pass through zero.",
   namedOtherwise: "Put the name right, or let the formula give what the name says.",
   overFormula: "Put the formula back, or mark the number and say where it comes from.",
   typedAmongFormulas: "Put the formulas back.",

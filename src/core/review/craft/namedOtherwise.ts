@@ -1,5 +1,5 @@
 import { plainHeading } from "../../table/headingRow.ts";
-import { type CellPlace, addressAt, isCalculatedAt, isTextAt, numberAt, wordsAt } from "../cellsOfBook.ts";
+import { type CellPlace, addressAt, isCalculatedAt, isSpilledAt, isTextAt, numberAt, wordsAt } from "../cellsOfBook.ts";
 import type { Quantity } from "../claim.ts";
 import type { Finding, Rank } from "../finding.ts";
 import { standsInCells } from "../forms.ts";
@@ -54,13 +54,7 @@ function labelsOf(place: CellPlace): readonly string[] {
 /** Names further away speak of something else. */
 const farthest = 64;
 
-const isResultAt = (at: CellPlace): boolean => numberAt(at) !== null && (isCalculatedAt(at) || isFilledByFormula(at));
-
-/** A result that spills has its formula in its first cell alone. */
-const isFilledByFormula = ({ sheet, row, column }: CellPlace): boolean =>
-  sheet.formulas.some(
-    (one) => row >= one.row && row < one.row + one.rows && column >= one.column && column < one.column + one.columns,
-  );
+const isResultAt = (at: CellPlace): boolean => numberAt(at) !== null && (isCalculatedAt(at) || isSpilledAt(at));
 
 interface Other {
   readonly label: string;

@@ -1,10 +1,12 @@
-import { addressAt, isCalculatedAt } from "../cellsOfBook.ts";
+import { type CellPlace, addressAt, isCalculatedAt, isSpilledAt } from "../cellsOfBook.ts";
 import type { Finding } from "../finding.ts";
 import type { ReportBlock } from "../typed/reportBlocks.ts";
 import type { Gathered } from "../found/gatherClaims.ts";
 import { craftFinding } from "./craftFinding.ts";
 import { found } from "./craftWords.ts";
 import { addressOf } from "../../table/address.ts";
+
+const isMade = (place: CellPlace): boolean => isCalculatedAt(place) || isSpilledAt(place);
 
 /** Numbers of a report that no formula supports: all of them, or some among formulas. */
 export function typedResults(block: ReportBlock, group: Gathered | null): Finding[] {
@@ -15,7 +17,7 @@ export function typedResults(block: ReportBlock, group: Gathered | null): Findin
     ),
     ...block.summaries.map(({ place }) => place),
   ];
-  const typed = places.filter((place) => !isCalculatedAt(place) && !filled.has(addressAt(place)));
+  const typed = places.filter((place) => !isMade(place) && !filled.has(addressAt(place)));
   if (typed.length === 0) return [];
   if (typed.length === places.length) {
     const cells = [addressOf(block.area)];

@@ -3,6 +3,7 @@ import { messageOf } from "../../problem/messages.ts";
 import type { Result } from "../../problem/result.ts";
 import type { ClaimReview, Comparison, ErrorsFound, Explanation } from "../claimReview.ts";
 import { agrees } from "./agreement.ts";
+import { type ConstantLeftOut, withConstantSaid } from "./constantLeftOut.ts";
 import type { Drawn } from "./consequences.ts";
 import { findingsOf } from "./findings.ts";
 import type { Intended } from "./intended.ts";
@@ -23,18 +24,31 @@ export interface Parts {
   readonly answered: Result<Answer>;
   readonly drawn: Drawn;
   readonly intended: Intended;
+  /** Null for a regression that has a constant, or whose report says itself that it has none. */
+  readonly constant: ConstantLeftOut | null;
 }
 
 /** The review of a claim from its parts. */
 export function assemble(parts: Parts): ClaimReview {
-  const { bench, claimed, made, searched, explanations, errors, answered, drawn, intended } = parts;
+  const { bench, claimed, made, searched, explanations, errors, answered, drawn, intended, constant } = parts;
   const answer = answered.ok ? answered.value : null;
   const compared = comparedAsClaimed(bench, claimed, made);
   const [explanation = null, ...alternatives] = explanations;
   const errorsUnknown = explanation === null ? kindsInVain(claimed) : null;
   const noAnswer = answered.ok ? null : messageOf(answered.problem);
   const { consequences, blame } = drawn;
-  const facts = { compared, explanation, alternatives, errors, errorsUnknown, answer, noAnswer, consequences, blame };
+  const facts = {
+    constant,
+    compared,
+    explanation,
+    alternatives,
+    errors,
+    errorsUnknown,
+    answer,
+    noAnswer,
+    consequences,
+    blame,
+  };
   return {
     claim: bench.claim,
     compared,
@@ -42,22 +56,29 @@ export function assemble(parts: Parts): ClaimReview {
     alternatives,
     tried: explanation === null && searched !== null ? triedInWords(searched) : [],
     errors,
-    consequences,
+    consequences: constant === null ? consequences : withConstantSaid(consequences, constant),
     answer,
     findings: findingsOf({ bench, intended, ...facts }),
-    verdict: verdictInWords({
-      compared: compared.length,
-      disagreeing: compared.filter((one) => !one.agrees).length,
-      explanation: explanation?.sentence ?? null,
-      alternatives: alternatives.length,
-      errors,
-      errorsUnknown: errorsUnknown !== null,
-      consequences,
-      answer,
-      beyond: intended.beyond.length > 0,
-    }),
+    verdict: verdictInWords({ ...facts, ...verdictFacts(parts, facts) }),
   };
 }
+
+type ForVerdict = Pick<ClaimReview, "compared" | "explanation" | "alternatives"> & {
+  readonly errorsUnknown: number | null;
+};
+
+const verdictFacts = (
+  { intended, constant }: Parts,
+  { compared, explanation, alternatives, errorsUnknown }: ForVerdict,
+) => ({
+  compared: compared.length,
+  disagreeing: compared.filter((one) => !one.agrees).length,
+  explanation: explanation?.sentence ?? null,
+  alternatives: alternatives.length,
+  errorsUnknown: errorsUnknown !== null,
+  withConstant: constant?.turned.map(({ driver }) => driver) ?? [],
+  beyond: intended.beyond.length > 0,
+});
 
 /** How many kinds were tried where all else comes out of the cells and none of them gives the rest; null elsewhere. */
 const kindsInVain = (claimed: Trial | null): number | null =>

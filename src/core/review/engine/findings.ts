@@ -6,10 +6,11 @@ import type { Comparison, Consequence, ErrorsFound, Explanation } from "../claim
 import type { Finding, Rank } from "../finding.ts";
 import { quantityInWords } from "../quantityWords.ts";
 import { gravestFirst } from "../reviewWords.ts";
-import { recomputedInWords } from "../shownDigits.ts";
 import { agrees } from "./agreement.ts";
 import { cellsOfRun } from "./changeWords.ts";
+import { type ConstantLeftOut, constantFinding } from "./constantLeftOut.ts";
 import type { Intended } from "./intended.ts";
+import { farthest, finding, mostCells, rankFor } from "./oneFinding.ts";
 import type { Bench } from "./trial.ts";
 import {
   lawsDiffer,
@@ -38,6 +39,8 @@ export interface Reviewed {
   readonly noAnswer: string | null;
   readonly consequences: readonly Consequence[];
   readonly blame: Blame;
+  /** Null for a regression that has a constant, or whose report says itself that it has none. */
+  readonly constant: ConstantLeftOut | null;
 }
 
 /** Which part of the work changes the conclusion on which drivers. */
@@ -56,23 +59,10 @@ export function findingsOf(reviewed: Reviewed): readonly Finding[] {
     ...mismatchFindings(reviewed),
     ...rowFindings(reviewed),
     ...errorFindings(reviewed),
+    ...(reviewed.constant === null ? [] : [constantFinding(reviewed.bench.claim, reviewed.constant)]),
     ...answerFindings(reviewed),
   ]);
 }
-
-const most = 10;
-
-type Told = Omit<Finding, "reported" | "recomputed"> & Partial<Pick<Finding, "reported" | "recomputed">>;
-
-const finding = (told: Told): Finding => ({
-  reported: null,
-  recomputed: null,
-  ...told,
-  cells: told.cells.slice(0, most),
-});
-
-const rankFor = (drivers: readonly string[], otherwise: Rank): Rank =>
-  drivers.length > 0 ? "changes the conclusion" : otherwise;
 
 function explanationFindings({ explanation, alternatives, compared, blame }: Reviewed): Finding[] {
   if (explanation === null) return [];
@@ -87,18 +77,6 @@ function explanationFindings({ explanation, alternatives, compared, blame }: Rev
       toDo: toDo.redo,
     }),
   ];
-}
-
-/** The reported number that is farthest from the recomputed one in units of its last digit, coefficients first. */
-function farthest(compared: readonly Comparison[]): Pick<Finding, "reported" | "recomputed"> {
-  const away = compared.filter(({ agrees, recomputed }) => !agrees && recomputed !== null);
-  const coefficients = away.filter(({ reported }) => reported.quantity.kind === "coefficient");
-  const distance = ({ reported, recomputed }: Comparison): number =>
-    Math.abs(recomputed! - reported.value) / Math.max(reported.halfUnit, Number.MIN_VALUE);
-  const [first] = (coefficients.length > 0 ? coefficients : away).toSorted((a, b) => distance(b) - distance(a));
-  return first === undefined
-    ? { reported: null, recomputed: null }
-    : { reported: first.reported.shown, recomputed: recomputedInWords(first) };
 }
 
 function mismatchFindings({ bench, compared, explanation, errorsUnknown, blame }: Reviewed): Finding[] {
@@ -164,7 +142,7 @@ function textFindings({ frame }: Bench, rank: Rank): Finding[] {
     return rows.map((row) => (line.runs === "down" ? cellOf(place, row) : line.name));
   });
   if (cells.length === 0) return [];
-  const what = textsLeftOut(cells.slice(0, most), cells.length);
+  const what = textsLeftOut(cells.slice(0, mostCells), cells.length);
   return [finding({ rank, code: "text-numbers-left-out", cells, what, toDo: toDo.textNumbers })];
 }
 

@@ -75,6 +75,8 @@ export interface VerdictFacts {
   readonly errors: ErrorsFound | null;
   readonly errorsUnknown: boolean;
   readonly consequences: readonly Consequence[];
+  /** Drivers whose conclusion is another one with the constant that was left out. */
+  readonly withConstant: readonly string[];
   readonly answer: Answer | null;
   /** Whether more rows of data stand beside those claimed. */
   readonly beyond: boolean;
@@ -115,12 +117,17 @@ function errorsPart({ errors, answer }: VerdictFacts): string {
   return `The standard errors are ${errors.kinds[0] ?? ""}, but ${answer.decision.because}: ${called} are called for.`;
 }
 
-function consequencePart({ consequences, answer }: VerdictFacts): string {
+function consequencePart({ consequences, withConstant, answer }: VerdictFacts): string {
   if (answer === null) return "What the conclusions should be could not be recomputed.";
   if (consequences.length === 0) return "";
   const changed = consequences.filter(({ changes }) => changes).map(({ driver }) => driver);
-  if (changed.length === 0) return "No conclusion of the report is contradicted by the recomputation.";
-  return `On all rows and with the standard errors that the evidence calls for, the conclusion on ${listInWords(changed)} does not hold as reported.`;
+  const constant =
+    withConstant.length === 0 ? "" : ` With a constant the conclusion on ${listInWords(withConstant)} is another one.`;
+  if (changed.length === 0) {
+    const without = constant === "" ? "" : ", as long as there is no constant";
+    return `No conclusion of the report is contradicted by the recomputation${without}.${constant}`;
+  }
+  return `On all rows and with the standard errors that the evidence calls for, the conclusion on ${listInWords(changed)} does not hold as reported.${constant}`;
 }
 
 export const toDo = {
@@ -135,7 +142,27 @@ export const toDo = {
   beyond: "Take in the rows that were left off, or say why they are left off.",
   summary: "Take the row that sums up the others out of the range.",
   textNumbers: "Turn the text into numbers, and make the regression again.",
+  noConstant: "Let the formula have a constant, or say in the report why the line must pass through zero.",
   noAnswer: "Mend the data and review the regression again.",
+} as const;
+
+/** What is said of a constant that a formula leaves out. */
+export const constantWords = {
+  leftOut: (outcome: string) =>
+    `The formula leaves the constant out: the line of "${outcome}" is forced through zero, and its R-squared is counted from zero, not from the mean.`,
+  withIt: (pValue: number, drivers: readonly string[]) => {
+    const p = pValueInWords(pValue, level);
+    const isShown = pValue < level;
+    const constant = isShown
+      ? `A constant is shown to differ from zero (${p})`
+      : `A constant is not shown to differ from zero (${p})`;
+    const conclusion =
+      drivers.length > 0
+        ? `with one the conclusion on ${listInWords(drivers)} is another one`
+        : "with one no conclusion of the report is another one";
+    return `${constant}; ${conclusion}.`;
+  },
+  beside: (words: string, withConstant: string) => `${words}; with a constant, ${withConstant}`,
 } as const;
 
 export const rowsBeyond = (cells: string, count: number): string =>
