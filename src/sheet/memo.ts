@@ -3,6 +3,7 @@ import type { Answer } from "../core/answer/answer.ts";
 import { askedSentences } from "../core/answer/askedWords.ts";
 import { findingInWords } from "../core/answer/findings.ts";
 import { choiceText } from "../core/answer/tables.ts";
+import { capitalised } from "../core/answer/wording.ts";
 import type { SheetFacts } from "./facts.ts";
 import { cautionLine } from "./plainWordsSection.ts";
 import { driverTexts, estimateTexts } from "./tableTexts.ts";
@@ -10,7 +11,8 @@ import { driverTexts, estimateTexts } from "./tableTexts.ts";
 type Part = readonly [heading: string, lines: readonly string[]];
 
 /**
- * The answer as plain text for a memo: verdict, choice and why, drivers in columns, rows, how it was made, the caution.
+ * The answer as plain text for a memo: verdict, choice and why, drivers in columns, guards, rows, how it was made, the
+ * caution.
  * Columns stand under one another in a type of even width.
  */
 export function memoOf(answer: Answer, facts: SheetFacts): string {
@@ -21,6 +23,7 @@ export function memoOf(answer: Answer, facts: SheetFacts): string {
     ["Which standard errors, and why", [choice, `${choiceText(answer)}.`, ...whyLines(answer), ...decision.cautions]],
     ["Drivers", alignedLines(driverTexts(answer))],
     ...askedParts(answer),
+    ["Guards", guardLines(answer)],
     ["Rows", rowLines(answer)],
     ["How this was made", madeLines(facts)],
   ];
@@ -42,6 +45,16 @@ function askedParts(answer: Answer): Part[] {
   if (sentences.length === 0) return [];
   const table = estimates.length === 0 ? [] : alignedLines(estimateTexts(answer));
   return [["Asked of the coefficients", [...sentences, ...table]]];
+}
+
+/** What else to know before relying on it, the most pressing first. */
+function guardLines({ guards }: Answer): string[] {
+  const lines = (["look into it", "worth knowing"] as const).flatMap((wanted) =>
+    guards.found.flatMap(({ finding, sentences }) =>
+      finding === wanted ? sentences.map((sentence) => `${capitalised(wanted)}: ${sentence}`) : [],
+    ),
+  );
+  return lines.length === 0 ? ["Nothing found."] : lines;
 }
 
 const mostRowsListed = 10;

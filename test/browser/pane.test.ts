@@ -266,6 +266,14 @@ describe("evidence", () => {
     expect(await correlations.getByRole("columnheader").allInnerTexts()).toEqual(["order", "statistic", "p-value"]);
   });
 
+  it("is within reach of a verdict that guards have something to add to", async () => {
+    await getAnswer(page);
+    await page.getByText(/^Worth knowing: .*time\. See the guards$/).waitFor();
+    await button(page, "See the guards").click();
+    await heading(page, "Evidence on Repairs").waitFor();
+    expect(await focused(page)).toBe("H1 Evidence on Repairs");
+  });
+
   it("guards against what the tests do not ask, and jumps to the rows that weigh most", async () => {
     await getAnswer(page);
     await openTab(page, "Evidence");

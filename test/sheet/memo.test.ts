@@ -49,6 +49,20 @@ describe("an answer as text for a memo", () => {
     expect(table.join("\n")).not.toMatch(/NaN|undefined|e-\d/);
   });
 
+  it("says what the guards found, the most pressing first", () => {
+    const found = [
+      { guard: "time", finding: "worth knowing", sentences: ["One month has no row: May."] },
+      { guard: "influence", finding: "nothing found", sentences: ["No single row."] },
+      { guard: "breaks", finding: "look into it", sentences: ["The level changes.", "So do the slopes."] },
+    ] as const;
+    const guarded = memoOf({ ...answerFixture, guards: { ...answerFixture.guards, found } }, facts);
+    expect(guarded).toContain(
+      "\nGUARDS\nLook into it: The level changes.\nLook into it: So do the slopes.\nWorth knowing: One month has no row: May.\n\n",
+    );
+    const calm = memoOf({ ...answerFixture, guards: { ...answerFixture.guards, found: [found[1]] } }, facts);
+    expect(calm).toContain("\nGUARDS\nNothing found.\n\n");
+  });
+
   it("counts the rows, with the cell and the reason of those left out", () => {
     expect(under("ROWS")[0]).toBe(`${answerFixture.observations} used, 0 left out.`);
     const leftOut = Array.from({ length: 12 }, (_, index) => ({

@@ -1,24 +1,16 @@
 import { makeStyles, tokens } from "@fluentui/react-components";
 import type { ReactNode } from "react";
 import type { Guards, PlacedRow } from "../../core/answer/guards.ts";
-import type { Guard, GuardName } from "../../core/diagnostics/guards/guard.ts";
+import type { Guard } from "../../core/diagnostics/guards/guard.ts";
 import { useType } from "../look/type.ts";
 import { CellList } from "../parts/CellList.tsx";
+import { guardNames } from "./guardNames.ts";
 
 const useStyles = makeStyles({
   list: { display: "grid", rowGap: tokens.spacingVerticalS, margin: 0, padding: 0, listStyleType: "none" },
   name: { margin: 0, fontSize: tokens.fontSizeBase300, lineHeight: "19px", fontWeight: tokens.fontWeightSemibold },
   finding: { fontWeight: tokens.fontWeightRegular, color: tokens.colorNeutralForeground3 },
 });
-
-const names: Readonly<Record<GuardName, string>> = {
-  collinearity: "Drivers that move together",
-  influence: "Single rows",
-  trending: "Series that wander",
-  breaks: "Breaks",
-  time: "Time",
-  groups: "Groups",
-};
 
 const mostRows = 5;
 
@@ -32,7 +24,7 @@ export function GuardList({ guards }: { readonly guards: Guards }): ReactNode {
         {sorted(guards.found).map(({ guard, finding, sentences }) => (
           <li key={guard}>
             <h3 className={styles.name}>
-              {names[guard]} <span className={styles.finding}>{finding}</span>
+              {guardNames[guard]} <span className={styles.finding}>{finding}</span>
             </h3>
             {sentences.map((sentence) => (
               <p key={sentence} className={type.remark}>

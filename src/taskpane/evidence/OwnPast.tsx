@@ -22,7 +22,7 @@ export function OwnPast({ answer }: { readonly answer: Answer }): ReactNode {
         alternative={correlationsInWords(correlations)}
       />
       <p className={type.remark}>
-        Between the dashed lines lie 95 % of such correlations if errors do not follow on, near enough: one in twenty
+        Between the dotted lines lie 95 % of such correlations if errors do not follow on, near enough: one in twenty
         outside them is no news.
       </p>
       <FiguresBehind

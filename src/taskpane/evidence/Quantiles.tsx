@@ -15,7 +15,7 @@ export function Quantiles({ answer }: { readonly answer: Answer }): ReactNode {
       <h3 className={type.subhead}>Against a normal law</h3>
       <QuantilePicture quantiles={quantiles} alternative={quantilesInWords(quantiles)} />
       <p className={type.remark}>
-        On the dashed line the errors are as a normal law has them. Ends that leave it mean large errors more often, or
+        On the dotted line the errors are as a normal law has them. Ends that leave it mean large errors more often, or
         on one side: with few rows, p-values are then less exact.
         {residuals.length < answer.observations &&
           ` Shown are ${residuals.length} of ${answer.observations.toLocaleString("en-US")} rows, evenly by rank.`}

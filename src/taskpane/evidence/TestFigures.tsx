@@ -53,7 +53,7 @@ export function TestFigures({ group, answer }: TestFiguresProps): ReactNode {
   );
 }
 
-const statistic = new Intl.NumberFormat("en-US", { maximumSignificantDigits: 4 });
+const statistic = new Intl.NumberFormat("en-US", { minimumSignificantDigits: 4, maximumSignificantDigits: 4 });
 
 /** "8.412 against chi-square(3), p = 0.038". */
 const figureInWords = (figure: Figure, answer: Answer): string =>

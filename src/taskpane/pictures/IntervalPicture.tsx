@@ -13,7 +13,7 @@ export interface IntervalLine {
 export interface IntervalPictureProps {
   readonly lines: readonly IntervalLine[];
   readonly estimate: number;
-  /** The value tested against, drawn as a dashed upright. */
+  /** The value tested against, drawn as a dotted upright. */
   readonly against: number;
   readonly alternative: string;
 }
