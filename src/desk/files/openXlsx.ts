@@ -2,6 +2,7 @@ import { cellRef, dateToSerial, rangeRef, readXlsx, type Cell, type CellValue, t
 import type { BookCell, BookData, BookValue, SheetData, StyledCell } from "../book/bookData.ts";
 import { chartParts, toBookChart, withoutEmptyLines } from "./charts.ts";
 import { putTogether } from "./elements/putTogether.ts";
+import { asBeforeLibreOffice, isFromLibreOffice } from "./fromLibreOffice.ts";
 import { readKept, type Kept } from "./keptParts.ts";
 import { toBookFooter } from "./footers.ts";
 import { inPoints } from "./margins.ts";
@@ -22,7 +23,9 @@ export async function openXlsx(bytes: Uint8Array): Promise<Reading<BookData>> {
   if (because !== null) return unreadable(because);
   const parsed = await parse(bytes);
   if (parsed === null) return unreadable("it is damaged, or no Excel workbook (.xlsx)");
-  const book = withKept(putTogether(toBook(parsed.workbook)), parsed.kept);
+  const read = toBook(parsed.workbook);
+  const found = isFromLibreOffice(bytes) ? asBeforeLibreOffice(read) : read;
+  const book = withKept(putTogether(found), parsed.kept);
   return readable(isCalculatedByHand(bytes) ? { ...book, manualCalculation: true } : book);
 }
 

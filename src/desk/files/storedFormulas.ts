@@ -88,6 +88,10 @@ export function functionsIn(formula: string): readonly string[] {
   return called.map((name) => name.replace(/^_XLFN\.(?:_XLWS\.)?/, ""));
 }
 
+/** The formula with its truth values as most people write them: TRUE, not TRUE(). */
+export const withPlainTruths = (formula: string): string =>
+  outsideQuotes(formula, (code) => code.replace(/(?<![\w.])(TRUE|FALSE)\(\)/g, "$1"));
+
 /** Whether a formula gives the same in every cell: it asks neither for its own place nor for what stands beside it. */
 export function isPlaceless(formula: string): boolean {
   let found = /\[@|\[#This Row\]/i.test(formula);

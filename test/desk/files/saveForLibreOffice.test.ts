@@ -2,7 +2,7 @@ import { readFile } from "node:fs/promises";
 import { describe, expect, it } from "vitest";
 import type { BookCell, BookData, SheetData } from "../../../src/desk/book/bookData.ts";
 import { openXlsx } from "../../../src/desk/files/openXlsx.ts";
-import { textOf, unpack } from "../../../src/desk/files/parts.ts";
+import { changeParts, pack, textOf, unpack } from "../../../src/desk/files/parts.ts";
 import { saveForLibreOffice } from "../../../src/desk/files/saveForLibreOffice.ts";
 import { bookOf, sheetOf } from "../../support/deskBook.ts";
 import { spilledBook } from "../../support/spilledBook.ts";
@@ -120,6 +120,21 @@ describe("a workbook that LibreOffice has saved again", () => {
     expect(book.sheets.map(trimmed)).toEqual(moved);
     expect(book.names).toEqual([]);
     expect(book.loosened).toBeUndefined();
+  });
+
+  it("has truth values as they were, where LibreOffice has written TRUE() for TRUE", async () => {
+    const sheet = sheetOf("Truths", [[{ value: true, formula: '=IF(FALSE,ISTRUE(),"TRUE()")=TRUE' }]]);
+    const parts = unpack((await saveForLibreOffice(bookOf(sheet))).bytes);
+    const written = changeParts(parts, /sheet1\.xml$/, (part) =>
+      part.replace("(FALSE", "(FALSE()").replace("=TRUE<", "=TRUE()<"),
+    );
+    const byLibreOffice = changeParts(written, /app\.xml$/, (part) =>
+      part.replace("Microsoft Excel", "LibreOffice/7.4.7.2"),
+    );
+    expect((await opened(pack(byLibreOffice))).sheets[0]!.rows).toEqual(sheet.rows);
+    expect((await opened(pack(written))).sheets[0]!.rows[0]![0]).toMatchObject({
+      formula: '=IF(FALSE(),ISTRUE(),"TRUE()")=TRUE()',
+    });
   });
 
   it("keeps what was typed into a result there, the other cells of it go on by themselves, and says so", async () => {

@@ -62,8 +62,8 @@ function literalOf(value: BookValue): string | null {
 
 /** The value that a stand-in says; undefined for what none of ours says: someone has changed it. */
 function spoken(said: string): BookValue | undefined {
-  const truth = /^(TRUE|FALSE)(?:\(\))?$/i.exec(said)?.[1];
-  if (truth !== undefined) return truth.toUpperCase() === "TRUE";
+  const truth = /^(?:TRUE|FALSE)$/.exec(said)?.[0];
+  if (truth !== undefined) return truth === "TRUE";
   if (errorSign.test(said)) return { error: said };
   const text = /^"([^"]*)"$/.exec(said)?.[1];
   return text !== undefined && isLost(text) ? text : undefined;
