@@ -4,7 +4,16 @@ import type { AxeResults } from "axe-core";
 import type { Browser, Page } from "playwright-core";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { openPane } from "./panePage/openPane.ts";
-import { allowTextNumbers, button, getAnswer, openTab, roleOf, storeAs, useSelection } from "./panePage/steps.ts";
+import {
+  allowTextNumbers,
+  button,
+  getAnswer,
+  listMany,
+  openTab,
+  roleOf,
+  storeAs,
+  useSelection,
+} from "./panePage/steps.ts";
 import { launchBrowser } from "./support/browser.ts";
 
 const axe = readFileSync(createRequire(import.meta.url).resolve("axe-core/axe.min.js"), "utf8");
@@ -121,6 +130,12 @@ const states: Readonly<Record<string, (page: Page) => Promise<void>>> = {
     await openTab(page, "Review");
     await open(page, listRegressions, "Write all 2 reviews to a sheet", "Review something else");
     await button(page, "Repairs review").waitFor();
+  },
+  "many regressions found": async (page) => {
+    await listMany(page);
+    await page.getByLabel("Only those with findings").check();
+    await open(page, /^Costs of running/, /^Prices/);
+    await page.getByText("15 of 30 regressions shown.").first().waitFor();
   },
   "a regression reviewed": async (page) => {
     await openTab(page, "Review");

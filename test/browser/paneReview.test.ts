@@ -2,7 +2,7 @@ import type { Browser, Page } from "playwright-core";
 import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from "vitest";
 import { claimReviewFixture, gravest, slight, smaller } from "../support/reviewFixture.ts";
 import { openPane } from "./panePage/openPane.ts";
-import { announced, button, focused, heading, openTab } from "./panePage/steps.ts";
+import { announced, button, focused, heading, listMany, openTab } from "./panePage/steps.ts";
 import { launchBrowser } from "./support/browser.ts";
 
 let browser: Browser;
@@ -53,6 +53,45 @@ describe("the section Review", () => {
     await expect.poll(() => announced(page)).toContain("2 regressions reviewed");
     expect(await focused(page)).toBe("H1 2 regressions found");
     await page.getByText("It reads its range with OFFSET.").waitFor();
+  });
+
+  it("parts a long list by sheets, opens and narrows it by keyboard, and keeps that", async () => {
+    await listMany(page);
+    const groups = page.getByRole("heading", { level: 2 }).getByRole("button");
+    await expect.poll(() => groups.count()).toBe(3);
+    expect(await groups.evaluateAll((all) => all.map((one) => one.getAttribute("aria-expanded")))).toEqual(
+      Array.from({ length: 3 }, () => "false"),
+    );
+    await tabTo(/^Prices/);
+    expect(await page.evaluate(() => document.activeElement!.textContent)).toBe(
+      "Prices 10 regressions: 5 change the conclusion, 5 nothing found",
+    );
+    const entries = page.getByRole("button", { name: /explained by Price index/ });
+    expect(await entries.count()).toBe(0);
+    await page.keyboard.press("Enter");
+    await expect.poll(() => entries.count()).toBe(10);
+
+    await page.getByRole("checkbox", { name: "Only those with findings" }).focus();
+    await page.keyboard.press("Space");
+    await expect.poll(() => entries.count()).toBe(5);
+    await expect.poll(() => announced(page)).toContain("15 of 30 regressions shown.");
+    expect(await button(page, /Nothing found/).count()).toBe(0);
+
+    await entries.nth(2).press("Enter");
+    await heading(page, "Findings").waitFor();
+    await page.getByText("Prices!B6").first().waitFor();
+    await button(page, "All 30 regressions").press("Enter");
+    await expect.poll(() => entries.count()).toBe(5);
+    await button(page, /^Prices/).press("Space");
+    await expect.poll(() => entries.count()).toBe(0);
+  });
+
+  it("folds what is said of the sheets where it is much", async () => {
+    await listMany(page);
+    const craft = page.getByText("A cell of the data holds text.");
+    expect(await craft.count()).toBe(0);
+    await button(page, "14 findings").press("Enter");
+    await expect.poll(() => craft.count()).toBe(14);
   });
 
   it("shows one with its verdict, its findings gravest first, and the numbers side by side", async () => {

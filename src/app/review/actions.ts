@@ -2,6 +2,7 @@ import type { ClaimReview } from "../../core/review/claimReview.ts";
 import type { Asked, BookClaims } from "../../core/review/claimsOf.ts";
 import type { DataInHand } from "../dataInHand.ts";
 import type { Setup } from "../setup.ts";
+import type { Listing } from "./listing.ts";
 import type { Pointing } from "./reviewState.ts";
 
 /** What can happen to a review. */
@@ -12,6 +13,7 @@ export type ReviewAction =
   | { readonly kind: "reviewed cell changed"; readonly cell: string }
   /** Null shows the list. */
   | { readonly kind: "regression opened"; readonly index: number | null }
+  | { readonly kind: "regressions listed"; readonly listing: Partial<Listing> }
   | { readonly kind: "pointing changed"; readonly pointing: Partial<Pointing> }
   /** The selected cells go into a field. */
   | { readonly kind: "cells pointed at"; readonly field: keyof Pointing; readonly address: string }

@@ -2,6 +2,7 @@ import { summaryOf } from "../../core/review/reviewWords.ts";
 import { announce } from "../spoken.ts";
 import type { PaneState } from "../state.ts";
 import type { ReviewAction } from "./actions.ts";
+import { shownWords } from "./listing.ts";
 import { type ReviewInHand, reviewShown, takeInHand } from "./reviewState.ts";
 
 type Of<Kind extends ReviewAction["kind"]> = Extract<ReviewAction, { kind: Kind }>;
@@ -27,6 +28,11 @@ export const reviewChanges: {
         ),
   "review finished": (state) => announce({ ...state, busy: null }, finishedWords(state.review)),
   "regression opened": (state, { index }) => arrived(withReview(state, (inHand) => ({ ...inHand, open: index }))),
+  "regressions listed": (state, { listing }) => {
+    const listed = withReview(state, (inHand) => ({ ...inHand, listing: { ...inHand.listing, ...listing } }));
+    const isNarrowed = listing.onlyFindings !== undefined && listed.review !== null;
+    return isNarrowed ? announce(listed, shownWords(listed.review)) : listed;
+  },
   "pointing changed": (state, { pointing }) => ({ ...state, pointing: { ...state.pointing, ...pointing } }),
   "cells pointed at": (state, { field, address }) =>
     announce({ ...state, busy: null, pointing: { ...state.pointing, [field]: address } }, `${address} is taken.`),

@@ -2,6 +2,7 @@ import type { Claim } from "../../core/review/claim.ts";
 import type { BookReview, ClaimReview } from "../../core/review/claimReview.ts";
 import { rangeOfLine } from "../../core/review/reviewWords.ts";
 import { addressOf, localAddressOf, parseAddress } from "../../core/table/address.ts";
+import { type Listing, wholeListing } from "./listing.ts";
 import type { Asked, BookClaims, Pointed } from "../../core/review/claimsOf.ts";
 
 /** A regression that the workbook reports, and what a review says of it; null until it has been reviewed. */
@@ -16,6 +17,7 @@ export interface ReviewInHand extends Omit<BookClaims, "claims"> {
   readonly regressions: readonly FoundRegression[];
   /** Which of them is shown in full, from 0; null shows the list. */
   readonly open: number | null;
+  readonly listing: Listing;
   /** The first cell that has changed since, null as long as none has. */
   readonly changedCell: string | null;
   /** The sheet that was written last, null where none was. */
@@ -61,6 +63,7 @@ export const takeInHand = (asked: Asked, { claims, ...rest }: BookClaims): Revie
   asked,
   regressions: claims.map((claim) => ({ claim, review: null })),
   open: claims.length === 1 ? 0 : null,
+  listing: wholeListing,
   changedCell: null,
   written: null,
 });

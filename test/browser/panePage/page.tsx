@@ -63,8 +63,8 @@ const pane = createPane({
     review: async (claim, errand) => {
       errand.progress({ what: "Trying what explains the numbers", share: 0.5 });
       if (window.stage.hold === "next") await new Promise<void>((resolve) => (window.stage.hold = resolve));
-      const found = bookReviewFixture.claims.find((review) => review.claim === claim);
-      return found === undefined ? failure({ code: "cancelled" }) : success(found);
+      const found = bookReviewFixture.claims.find((review) => review.claim.origin.kind === claim.origin.kind);
+      return found === undefined ? failure({ code: "cancelled" }) : success({ ...found, claim });
     },
   },
   edition: { today: () => "1 December 2026", version: "0.1.0" },

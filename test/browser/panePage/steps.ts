@@ -34,6 +34,24 @@ export async function storeAs(page: Page, name: string): Promise<void> {
 
 export const openTab = (page: Page, name: string) => page.getByRole("tab", { name }).click();
 
+/** Lists a workbook of thirty regressions on three sheets, every second one with findings. */
+export async function listMany(page: Page): Promise<void> {
+  await openTab(page, "Review");
+  await page.evaluate(() => {
+    const { claims, craft, unread } = window.stage.listed;
+    const sheets = ["Prices", "'Costs of running the shops, by town'", "Weeks"];
+    const places = Array.from({ length: 30 }, (_, at) => `${sheets[Math.floor(at / 10)]!}!B${at + 2}`);
+    window.stage.listed = {
+      unread,
+      craft: Array.from({ length: 14 }, () => craft[0]!),
+      claims: places.map((place, at) => ({ ...claims[at % 2]!, place })),
+    };
+  });
+  await button(page, "List the regressions in this workbook").click();
+  await page.getByText(/^30 regressions reviewed/).first().waitFor();
+  await page.getByRole("checkbox", { name: "Only those with findings" }).waitFor();
+}
+
 /** What screen readers were told last. */
 export const announced = (page: Page): Promise<string> =>
   page.evaluate(() => [...document.querySelectorAll("[role=status]")].map((region) => region.textContent).join(""));
