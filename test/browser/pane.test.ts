@@ -257,6 +257,7 @@ describe("evidence", () => {
   it("gives every test with its question, reading and source", async () => {
     await getAnswer(page);
     await openTab(page, "Evidence");
+    await page.getByText(/^Tests are held to 10\s%: something counts as found where p is below 0\.1\./).waitFor();
     await heading(page, "Does the spread of the errors change with the drivers?").waitFor();
     await page.getByText(/Breusch and Pagan 1979, in the form of Koenker 1981\. It decided/).waitFor();
     const orders = page.getByRole("table", { name: "Breusch-Godfrey test by order" });

@@ -7,7 +7,6 @@ import { AskMore } from "./AskMore.tsx";
 import { AskedFigures } from "./AskedFigures.tsx";
 import { Choice } from "./Choice.tsx";
 import { DriverList } from "./DriverList.tsx";
-import { GuardsFound } from "./GuardsFound.tsx";
 import { Memo } from "./Memo.tsx";
 import { NoAnswer } from "./NoAnswer.tsx";
 import { OutdatedNotice } from "./OutdatedNotice.tsx";
@@ -26,7 +25,6 @@ export function AnswerSection(): ReactNode {
       <SectionTitle>{answer.title}</SectionTitle>
       <OutdatedNotice />
       <Verdict answer={answer} />
-      <GuardsFound answer={answer} />
       <HelpHead about="four cases">Which standard errors</HelpHead>
       <WhichErrors answer={answer} />
       <Choice />

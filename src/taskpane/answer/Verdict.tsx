@@ -6,6 +6,7 @@ import { capitalised } from "../../core/answer/wording.ts";
 import { HelpLink } from "../help/HelpLink.tsx";
 import { useType } from "../look/type.ts";
 import { keepTogether } from "../parts/keepTogether.ts";
+import { GuardsFound } from "./GuardsFound.tsx";
 import { FirmnessMark } from "./FirmnessMark.tsx";
 
 const useStyles = makeStyles({
@@ -32,6 +33,7 @@ export function Verdict({ answer }: { readonly answer: Answer }): ReactNode {
         )}
       </ul>
       <p className={type.body}>{keepTogether(capitalised(scopeInWords(answer)))}</p>
+      <GuardsFound answer={answer} />
       <HelpLink about="firm" asks="What does firm mean?" />
     </section>
   );

@@ -11,7 +11,7 @@ import type { ColumnInHand } from "./columnInHand.ts";
 const useStyles = makeStyles({
   row: {
     display: "grid",
-    gridTemplateColumns: "minmax(0, 1fr) 44px 114px",
+    gridTemplateColumns: "minmax(0, 1fr) 44px 104px",
     columnGap: tokens.spacingHorizontalS,
     alignItems: "center",
     padding: `${tokens.spacingVerticalXS} 0`,
@@ -103,7 +103,8 @@ const roles: readonly (readonly [Role, string])[] = [
   ["driver", "driver"],
   ["time", "time"],
   ["group", "group"],
-  ["second group", "second group"],
+  // In full it would be cut off.
+  ["second group", "2nd group"],
   ["unused", "not used"],
 ];
 

@@ -63,5 +63,5 @@ function second(setup: Setup): string {
 /** That there may be a second way is easily missed in the list of roles. */
 const crossed = (setup: Setup): string =>
   columnWithRole(setup, "second group") === null
-    ? " Where they belong together in two ways, such as by shop and by month, give another column the role second group."
+    ? " Where they belong together in two ways, such as by shop and by month, give another column the role 2nd group."
     : "";

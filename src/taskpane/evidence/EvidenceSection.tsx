@@ -1,4 +1,5 @@
 import type { ReactNode } from "react";
+import type { Answer } from "../../core/answer/answer.ts";
 import { NoAnswer } from "../answer/NoAnswer.tsx";
 import { OutdatedNotice } from "../answer/OutdatedNotice.tsx";
 import { useType } from "../look/type.ts";
@@ -9,6 +10,10 @@ import { KeptOutTests } from "./KeptOutTests.tsx";
 import { Residuals } from "./Residuals.tsx";
 import { TestList } from "./TestList.tsx";
 import { applies, groupTests } from "./testGroups.ts";
+
+/** From where on a test says that it found something. */
+const levelInWords = ({ decision }: Answer): string =>
+  `Tests are held to ${Number((100 * decision.testLevel).toPrecision(6))}\u00a0%: something counts as found where p is below ${decision.testLevel}. What is not found is not shown to be absent.`;
 
 /** What the answer rests on: the tests that decided, what to know beside them, the residuals, every other test. */
 export function EvidenceSection(): ReactNode {
@@ -24,6 +29,7 @@ export function EvidenceSection(): ReactNode {
     <>
       <SectionTitle>Evidence on {answer.outcome}</SectionTitle>
       <OutdatedNotice />
+      <p className={type.remark}>{levelInWords(answer)}</p>
       {deciding.length > 0 && (
         <>
           <h2 className={type.head}>Tests that decided</h2>
