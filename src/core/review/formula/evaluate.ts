@@ -62,7 +62,7 @@ function atPlace(formula: Formula, scope: Scope, met: Met): Value {
 }
 
 /** More cells than these are data, not results. */
-const mostCells = 5000;
+const mostCells = 1000;
 
 /** What stands in cells: the results of regressions as such, other numbers as they are. */
 function inCells(area: SheetArea, { book, results }: Scope, met: Met): Value {

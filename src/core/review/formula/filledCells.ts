@@ -17,7 +17,7 @@ const mostRows = 5;
 const mostColumns = 70;
 
 /** Larger ranges are data. */
-const mostRead = 5000;
+const mostRead = 1000;
 
 export function filledCells(): Filled {
   const cells = new Map<string, Set<string>>();

@@ -91,6 +91,14 @@ describe("a constant that a formula leaves out", () => {
     expect(review.findings.filter(({ rank }) => rank !== "worth knowing")).toEqual([]);
   });
 
+  it("is not blamed for what the report says wrongly either way", () => {
+    const claim = claims.find(({ place }) => place.startsWith("Moved"))!;
+    const coarser = claim.reported.map((one) => (one.quantity.kind === "standard-error" ? { ...one, value: 3 } : one));
+    const review = reviewClaim({ ...claim, reported: coarser }, () => undefined);
+    expect(review.consequences[0]!.asReported).toContain("no effect shown");
+    expect(toldOf(review)).toMatchObject({ rank: "changes a number" });
+  });
+
   it("is not spoken of where there is one", () => {
     const claim = { ...claims[0]!, constant: true };
     const { findings } = reviewClaim(claim, () => undefined);

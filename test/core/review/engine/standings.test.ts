@@ -41,6 +41,17 @@ describe("what a report says of a driver", () => {
     expect(standing(number("low", -3, 0.05), number("high", 0, 0.05))).toBe("open");
   });
 
+  it("is read from bounds of another level by the ratio that they were made from", () => {
+    const at = (level: number, low: number, high: number, halfUnit = 0.0005) =>
+      reportedStanding({ ...reporting(number("low", low, halfUnit), number("high", high, halfUnit)), level }, 0, 20)
+        .standing;
+    // t(20) is 1.725 at 10 %, 2.086 at 5 % and 2.845 at 1 % (any handbook's table); standard errors of 1 throughout.
+    expect(at(0.1, 1.9 - 1.725, 1.9 + 1.725)).toBe("not shown");
+    expect(at(0.1, 2.2 - 1.725, 2.2 + 1.725)).toBe("more");
+    expect(at(0.01, -2.4 - 2.845, -2.4 + 2.845)).toBe("less");
+    expect(at(0.1, 2.086 - 1.725, 2.086 + 1.725, 0.05)).toBe("open");
+  });
+
   it("is nothing but a direction where only the coefficient stands", () => {
     expect(reportedStanding(reporting(number("coefficient", -3, 0.05)), 0, 20)).toMatchObject({
       standing: "unsaid",
