@@ -142,7 +142,7 @@ describe("workbooks that another program saved", () => {
     const ran = await run(["text.xlsx", ...ozone, "--json"], files);
     expect(ran.status).toBe(2);
     expect(ran.err).toBe(
-      `Cell 'airquality-text'!E31 in column "Temp" holds "n.k.", which is not a number. Correct the cell, or mark the column as a category.\n`,
+      `Cell 'airquality-text'!E31 in column "Temp" holds "n.k.", which is not a number. Correct the cell, empty it to leave the row out, or read a driver as categories.\n`,
     );
     expect(JSON.parse(ran.out)).toMatchObject({
       problem: { code: "text-in-number-column", cells: ["'airquality-text'!E31"], message: ran.err.trim() },

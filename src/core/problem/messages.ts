@@ -43,7 +43,7 @@ const sentences: { readonly [Code in Problem["code"]]: (problem: Extract<Problem
   ],
   "text-in-number-column": (spots) => [
     `${theCells(spots)} in column "${spots.column}" ${holds(spots)}, which ${spots.count === 1 ? "is not a number" : "are not numbers"}.`,
-    `Correct the ${cellWord(spots)}, or mark the column as a category.`,
+    `Correct the ${cellWord(spots)}, empty ${spots.count === 1 ? "it to leave the row" : "them to leave the rows"} out, or read a driver as categories.`,
   ],
   "text-numbers": (spots) => [
     `${theCells(spots)} in column "${spots.column}" ${holds(spots)}: ${spots.count === 1 ? "a number" : "numbers"} kept as text.`,

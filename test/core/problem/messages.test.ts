@@ -27,7 +27,7 @@ const sentences: Sentences = {
   ],
   "text-in-number-column": [
     { code: "text-in-number-column", ...one },
-    'Cell Months!C14 in column "Price" holds "n.k.", which is not a number. Correct the cell, or mark the column as a category.',
+    'Cell Months!C14 in column "Price" holds "n.k.", which is not a number. Correct the cell, empty it to leave the row out, or read a driver as categories.',
   ],
   "text-numbers": [
     { code: "text-numbers", ...two, values: ["1,5", "2,5"] },
@@ -321,7 +321,7 @@ describe("messageOf", () => {
   it("lists ten cells at most and counts the rest", () => {
     const many = { column: "Price", cells, values: cells.map(() => "n.k."), count: 1234 };
     expect(messageOf({ code: "text-in-number-column", ...many })).toBe(
-      `Cells ${cells.join(", ")} and 1,224 more in column "Price" hold "n.k." and others, which are not numbers. Correct the cells, or mark the column as a category.`,
+      `Cells ${cells.join(", ")} and 1,224 more in column "Price" hold "n.k." and others, which are not numbers. Correct the cells, empty them to leave the rows out, or read a driver as categories.`,
     );
   });
 
