@@ -28,6 +28,22 @@ it("chooses other data in place of those before, each part of the section once",
   }
 });
 
+it("keeps the months of a season from burying the drivers", async () => {
+  await useSelection(page);
+  await button(page, "Read them as numbers").click();
+  await button(page, /^Drivers made from time/).click();
+  await page.getByRole("checkbox", { name: "an indicator for each month but one" }).check();
+  await button(page, "Get the answer").click();
+  await heading(page, "Repairs explained by Price index, Advertising, Rainy days and the season").waitFor();
+  const verdict = page.getByRole("region", { name: "Verdict" });
+  expect(await verdict.getByRole("listitem").count()).toBe(3);
+  await button(page, "The season, in 11 sentences").click();
+  expect(await verdict.getByRole("listitem").count()).toBe(14);
+  expect(await page.getByRole("article", { name: "March" }).count()).toBe(0);
+  await button(page, "The season: 11 terms").click();
+  await page.getByRole("article", { name: "March" }).waitFor();
+});
+
 it("puts right in one click what needs the user's leave alone", async () => {
   await useSelection(page);
   await button(page, "Get the answer").click();

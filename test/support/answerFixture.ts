@@ -22,6 +22,7 @@ const [classical, white, neweyWest] = [table(1), table(2), table(3)];
 
 const driver = (row: number, sentence: string | null): DriverAnswer => ({
   term: terms[row]!,
+  kind: sentence === null ? "constant" : "number",
   coefficient: coefficients[row]!,
   against: 0,
   standardError: neweyWest.standardErrors[row]!,

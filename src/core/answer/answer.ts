@@ -1,6 +1,6 @@
 import type { WhiteVersion } from "../covariance/choice.ts";
 import type { Decision } from "../decision/decision.ts";
-import type { LeftOut, Period } from "../design/design.ts";
+import type { LeftOut, Period, TermMeaning } from "../design/design.ts";
 import type { TestOutcome } from "../diagnostics/outcome.ts";
 import type { InferenceTable } from "../inference/inference.ts";
 import type { JointOutcome } from "../inference/joint.ts";
@@ -115,6 +115,8 @@ export type PlacedFirmness = TermFirmness & { readonly leaveOneOut: { readonly c
 /** What is said of one term. */
 export interface DriverAnswer {
   readonly term: string;
+  /** What sort of term it is: a column of numbers, a category, a season, ... */
+  readonly kind: TermMeaning["kind"];
   readonly coefficient: number;
   readonly against: number;
   readonly standardError: number;

@@ -20,11 +20,10 @@ export interface DriverFacts {
 /** What is said of each term: the figures in force, whether they are firm, and the sentence. */
 export function driverAnswers(facts: DriverFacts): DriverAnswer[] {
   return facts.fit.design.terms.map((term, index) => {
-    const figures = figuresOf(facts, index);
-    if (term.meaning.kind === "constant") return { term: term.name, ...figures, sentence: null };
+    const driver = { term: term.name, kind: term.meaning.kind, ...figuresOf(facts, index) };
+    if (driver.kind === "constant") return { ...driver, sentence: null };
     const { decision, lags, options, inference } = facts;
     const effect = effectOf({ meaning: term.meaning, outcome: facts.fit.design.outcome, units: options.units });
-    const driver = { term: term.name, ...figures };
     const proviso = provisoOf(term.meaning, facts.fit.design.terms);
     const agreeing = agreeingKinds(inference);
     const spoken = { driver, effect, decision, lags, level: options.level, agreeing, proviso };
@@ -49,7 +48,7 @@ const isOfCurve = ({ kind }: Transform): boolean => kind === "none" || kind === 
 function figuresOf(
   { fit, inference, firmness, options }: DriverFacts,
   index: number,
-): Omit<DriverAnswer, "term" | "sentence"> {
+): Omit<DriverAnswer, "term" | "kind" | "sentence"> {
   const { inForce } = inference;
   const at = (values: readonly number[]): number => values[index] ?? 0;
   return {

@@ -45,7 +45,8 @@ function said({
 }: Said): string {
   const [coefficient, low, high, pValue] = figures;
   const term = "column" in meaning ? meaning.column : meaning.kind;
-  const driver = { term, coefficient, low, high, pValue, against, standardError: 1, ratio: 1, firmness };
+  const { kind } = meaning;
+  const driver = { term, kind, coefficient, low, high, pValue, against, standardError: 1, ratio: 1, firmness };
   const effect = effectOf({ meaning, outcome, units });
   return driverSentence({
     proviso: "",
