@@ -105,7 +105,8 @@ function planted(set: DataSet, faults: readonly Fault[], { random, style, kind }
   const made = faults.reduce((one, fault) => fault.made?.(one, { sheet, random }) ?? one, madeOf(sheet, faults));
   const fit = fitFrom(made);
   const { errors, law } = errorsFor(set, fit, { faults, kind });
-  const printed = reportOf(fit, { style, errors, law, order: made.order });
+  const level = faults.find((fault) => fault.level !== undefined)?.level ?? 0.05;
+  const printed = reportOf(fit, { style, errors, law, level, order: made.order });
   const reported = faults.reduce<readonly ReportedNumber[]>(
     (numbers, fault) => fault.typed?.(numbers) ?? numbers,
     printed,

@@ -47,6 +47,8 @@ export interface Fault {
   readonly claimedForms?: Readonly<Record<number, ClaimedForm>>;
   readonly claimsConstant?: boolean;
   readonly errors?: ErrorsChoice;
+  /** Two-sided level of the bounds, whatever their headings say; 0.05 where it does not say. */
+  readonly level?: number;
   readonly typed?: (reported: readonly ReportedNumber[]) => readonly ReportedNumber[];
   /** Data sets that it can be planted in; all where it does not say. */
   readonly only?: readonly string[];

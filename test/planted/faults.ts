@@ -365,4 +365,11 @@ export const reportFaults: readonly Fault[] = [
     expected: { kind: "finding", code: "text-numbers-left-out" },
     sheet: (sheet) => changed(sheet, 2, middle(sheet, 3), String),
   },
+  {
+    name: "bounds of 90 % under headings of 95 %",
+    expected: { kind: "errors", name: "classical, bounds at 90 %" },
+    inBook: { kind: "finding", code: "bounds-of-another-level" },
+    styles: ["bounds"],
+    level: 0.1,
+  },
 ];

@@ -14,6 +14,8 @@ export interface Reporting {
   readonly style: Style;
   readonly errors: ErrorsChoice;
   readonly law: Reference;
+  /** Two-sided level of the bounds. */
+  readonly level: number;
   /** For each claimed driver the place among the fit's drivers whose figures stand beside it; null for none. */
   readonly order: readonly (number | null)[];
 }
@@ -33,11 +35,11 @@ function decimalsOf({ kind }: Quantity, value: number): number {
   return Math.min(12, Math.max(0, digits - 1 - Math.floor(Math.log10(Math.abs(value) || 1))));
 }
 
-export function reportOf(fit: Fit, { style, errors, law, order }: Reporting): ReportedNumber[] {
+export function reportOf(fit: Fit, { style, errors, law, level, order }: Reporting): ReportedNumber[] {
   const covariance = covarianceOf(fit, errors);
   if (!covariance.ok) throw new Error(covariance.problem.code);
   const zero = Array.from(fit.coefficients, () => 0);
-  const table = inferenceOf(fit, covariance.value, { reference: law, against: zero, level: 0.05 });
+  const table = inferenceOf(fit, covariance.value, { reference: law, against: zero, level });
   const constants = fit.design.hasConstant ? 1 : 0;
   const numbers: ReportedNumber[] = [];
   const terms = [...(constants === 1 ? [null] : []), ...order.keys()];

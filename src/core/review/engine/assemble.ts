@@ -3,6 +3,7 @@ import { messageOf } from "../../problem/messages.ts";
 import type { Result } from "../../problem/result.ts";
 import type { ClaimReview, Comparison, ErrorsFound, Explanation } from "../claimReview.ts";
 import { agrees } from "./agreement.ts";
+import { levelInstead } from "./boundsLevel.ts";
 import { type ConstantLeftOut, withConstantSaid } from "./constantLeftOut.ts";
 import type { Drawn } from "./consequences.ts";
 import { findingsOf } from "./findings.ts";
@@ -35,9 +36,11 @@ export function assemble(parts: Parts): ClaimReview {
   const compared = comparedAsClaimed(bench, claimed, made);
   const [explanation = null, ...alternatives] = explanations;
   const errorsUnknown = explanation === null ? kindsInVain(claimed) : null;
+  const boundsAt = explanation === null ? levelInstead(bench, claimed) : null;
   const noAnswer = answered.ok ? null : messageOf(answered.problem);
   const { consequences, blame } = drawn;
   const facts = {
+    boundsAt,
     constant,
     compared,
     explanation,

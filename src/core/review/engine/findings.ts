@@ -13,6 +13,7 @@ import type { Intended } from "./intended.ts";
 import { farthest, finding, mostCells, rankFor } from "./oneFinding.ts";
 import type { Bench } from "./trial.ts";
 import {
+  boundsOfAnother,
   lawsDiffer,
   notReproduced,
   oneDiffers,
@@ -34,6 +35,8 @@ export interface Reviewed {
   readonly errors: ErrorsFound | null;
   /** How many kinds were tried where figures that rest on standard errors were reported and none gives them. */
   readonly errorsUnknown: number | null;
+  /** The level at which the bounds come out where they do not at the one that is said; null elsewhere. */
+  readonly boundsAt: number | null;
   readonly answer: Answer | null;
   /** Why there is no answer, as a sentence; null where there is one. */
   readonly noAnswer: string | null;
@@ -79,11 +82,17 @@ function explanationFindings({ explanation, alternatives, compared, blame }: Rev
   ];
 }
 
-function mismatchFindings({ bench, compared, explanation, errorsUnknown, blame }: Reviewed): Finding[] {
+function mismatchFindings({ bench, compared, explanation, errorsUnknown, boundsAt, blame }: Reviewed): Finding[] {
   const wrong = compared.filter(({ agrees }) => !agrees);
   if (explanation !== null || wrong.length === 0) return [];
   const rank = rankFor(blame.data, "changes a number");
   const cells = wrong.map(({ reported }) => reported.cell);
+  if (boundsAt !== null && bench.claim.level !== undefined) {
+    const what = boundsOfAnother(boundsAt, bench.claim.level);
+    return [
+      finding({ rank, code: "bounds-of-another-level", cells, ...farthest(wrong), what, toDo: toDo.boundsLevel }),
+    ];
+  }
   if (errorsUnknown !== null) {
     const what = unknownErrors(errorsUnknown);
     return [finding({ rank, code: "errors-not-recognised", cells, ...farthest(wrong), what, toDo: toDo.unexplained })];

@@ -1,6 +1,6 @@
 import type { Answer } from "../../answer/answer.ts";
 import { errorsInWords } from "../../answer/verdict.ts";
-import { capitalised, listInWords, pValueInWords } from "../../answer/wording.ts";
+import { capitalised, confidenceInWords, listInWords, pValueInWords } from "../../answer/wording.ts";
 import type { Consequence, ErrorsFound } from "../claimReview.ts";
 import { type Reported, type Standing, level } from "./standings.ts";
 
@@ -65,6 +65,9 @@ function verdictOnErrors(allowed: boolean, { decision, lags }: Answer): string {
 
 export const unknownErrors = (tried: number): string =>
   `None of the ${tried} kinds of standard errors that were tried gives the reported ones from these cells.`;
+
+export const boundsOfAnother = (found: number, said: number): string =>
+  `The bounds come out of the cells at ${confidenceInWords(found)}, not at ${confidenceInWords(said)} as the report says.`;
 
 export interface VerdictFacts {
   readonly compared: number;
@@ -143,6 +146,7 @@ export const toDo = {
   summary: "Take the row that sums up the others out of the range.",
   textNumbers: "Turn the text into numbers, and make the regression again.",
   noConstant: "Let the formula have a constant, or say in the report why the line must pass through zero.",
+  boundsLevel: "Say the level that the bounds have, or form them anew at the level that is said.",
   noAnswer: "Mend the data and review the regression again.",
 } as const;
 

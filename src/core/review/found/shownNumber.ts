@@ -34,9 +34,23 @@ function inFormat(
     return { value, halfUnit: 0.5 * 10 ** (exponent - decimals), shown: text.replace("e", "E") };
   }
   const factor = 100 ** percents * scale;
-  const digits = { minimumFractionDigits: decimals, maximumFractionDigits: decimals, useGrouping: grouped };
-  const text = (value * factor).toLocaleString("en-US", digits).replace(/^-(?=[0.,]*$)/, "");
+  const text = writerWith(decimals, grouped)
+    .format(value * factor)
+    .replace(/^-(?=[0.,]*$)/, "");
   return { value, halfUnit: (0.5 * 10 ** -decimals) / factor, shown: text + percentSign };
+}
+
+/** Making a writer of numbers costs a hundred times as much as writing one. */
+const writers = new Map<string, Intl.NumberFormat>();
+
+function writerWith(decimals: number, grouped: boolean): Intl.NumberFormat {
+  const key = `${decimals} ${grouped}`;
+  const known = writers.get(key);
+  if (known !== undefined) return known;
+  const digits = { minimumFractionDigits: decimals, maximumFractionDigits: decimals, useGrouping: grouped };
+  const writer = new Intl.NumberFormat("en-US", digits);
+  writers.set(key, writer);
+  return writer;
 }
 
 /** The digits of a number as someone would type it, zeros at either end not counted. */

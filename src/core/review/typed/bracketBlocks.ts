@@ -29,16 +29,20 @@ export interface ReadTable {
   readonly blocks: readonly ReportBlock[];
 }
 
+/** What is known of a sheet before its tables are looked for. */
+export interface Seen {
+  readonly labels: readonly Label[];
+  /** Every cell with a number or an interval in brackets. */
+  readonly brackets: readonly CellPlace[];
+  readonly isReport: (found: Omit<ReadTable, "blocks">) => boolean;
+}
+
 /** The tables of a sheet whose names stand to the left, as far as they are reports. */
-export function readTables(
-  sheet: BookSheet,
-  labels: readonly Label[],
-  isReport: (found: Omit<ReadTable, "blocks">) => boolean,
-): ReadTable[] {
+export function readTables(sheet: BookSheet, { labels, brackets, isReport }: Seen): ReadTable[] {
   const levels = levelNotes(sheet);
   const notes = bracketNotes(sheet);
   return (["under", "beside"] as const).flatMap((side) => {
-    const tables = bracketTables(sheet, side);
+    const tables = bracketTables(sheet, side, brackets);
     const areas = tables.map(areaOf);
     const begins = [
       ...tables.map(({ first, names }) => ({ row: first, column: names })),

@@ -1,12 +1,12 @@
 import type { SheetArea } from "../../table/address.ts";
 import type { BookSheet } from "../book.ts";
-import { overlap } from "../cellsOfBook.ts";
+import { type CellPlace, overlap } from "../cellsOfBook.ts";
 import { allInBrackets } from "./inBrackets.ts";
 import { type Label, labelsOf } from "./labels.ts";
 import { type ReadTable, readTables } from "./bracketBlocks.ts";
 import type { ReportBlock } from "./reportBlocks.ts";
 import { spotOf } from "./termNumbers.ts";
-import { turnedBack, turnedSheet } from "./turnedSheet.ts";
+import { turnedPlace, turnedSheet } from "./turnedSheet.ts";
 
 export interface BracketBlocks {
   readonly blocks: readonly ReportBlock[];
@@ -24,9 +24,12 @@ export function bracketBlocks(
   labels: readonly Label[],
   headed: readonly ReportBlock[],
 ): BracketBlocks {
-  const turned = allInBrackets(sheet).length === 0 ? null : turnedSheet(sheet);
-  const lying = turned === null ? [] : readTables(turned, labelsOf(turned), isLyingReport);
-  const all = [...readTables(sheet, labels, isStandingReport), ...lying.map((one) => turnedRound(one, sheet))];
+  const brackets = allInBrackets(sheet);
+  if (brackets.length === 0) return { blocks: [], own: new Set() };
+  const all = [
+    ...readTables(sheet, { labels, brackets, isReport: isStandingReport }),
+    ...lyingTables(sheet, brackets).map((one) => turnedRound(one, sheet)),
+  ];
   const kept: ReadTable[] = [];
   for (const one of all.sort((a, b) => Number(b.table.hasConstant) - Number(a.table.hasConstant))) {
     const isTaken = kept.some(({ area }) => overlap(area, one.area)) || headed.some((block) => readsMore(block, one));
@@ -36,6 +39,13 @@ export function bracketBlocks(
     blocks: kept.flatMap(({ blocks }) => blocks),
     own: new Set(kept.flatMap(({ own }) => own.map(spotOf))),
   };
+}
+
+function lyingTables(sheet: BookSheet, brackets: readonly CellPlace[]): ReadTable[] {
+  const turned = turnedSheet(sheet);
+  if (turned === null) return [];
+  const places = brackets.map((place) => turnedPlace(turned, place));
+  return readTables(turned, { labels: labelsOf(turned), brackets: places, isReport: isLyingReport });
 }
 
 /** Whether headings over the same cells give more drivers than brackets do. */
@@ -54,9 +64,9 @@ const isLyingReport = ({ isSaid }: Omit<ReadTable, "blocks">): boolean => isSaid
 
 /** What was read from a turned sheet, as it stands on the sheet itself. */
 function turnedRound(found: ReadTable, sheet: BookSheet): ReadTable {
-  const back = <T extends { readonly place: Parameters<typeof turnedBack>[1] }>(one: T) => ({
+  const back = <T extends { readonly place: Parameters<typeof turnedPlace>[1] }>(one: T) => ({
     ...one,
-    place: turnedBack(sheet, one.place),
+    place: turnedPlace(sheet, one.place),
   });
   const areaBack = ({ row, column, rows, columns }: SheetArea): SheetArea => ({
     ...{ sheet: sheet.sheet, row: column, column: row },
@@ -65,7 +75,7 @@ function turnedRound(found: ReadTable, sheet: BookSheet): ReadTable {
   return {
     ...found,
     area: areaBack(found.area),
-    own: found.own.map((place) => turnedBack(sheet, place)),
+    own: found.own.map((place) => turnedPlace(sheet, place)),
     blocks: found.blocks.map((block) => ({
       ...block,
       sheet,

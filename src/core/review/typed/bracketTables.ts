@@ -1,7 +1,7 @@
 import type { BookSheet } from "../book.ts";
 import { type CellPlace, isTextAt, wordsAt } from "../cellsOfBook.ts";
 import { readShownText, shownNumberAt } from "../found/shownNumber.ts";
-import { allInBrackets, inBracketsAt } from "./inBrackets.ts";
+import { inBracketsAt } from "./inBrackets.ts";
 import { intervalInBrackets } from "./intervals.ts";
 import { isConstantName, summaryWordIn } from "./reportWords.ts";
 
@@ -38,10 +38,17 @@ interface Pair {
 export const bracketPlace = (side: BracketSide, { sheet, row, column }: CellPlace, steps = 1): CellPlace =>
   side === "under" ? { sheet, row: row + steps, column } : { sheet, row, column: column + steps };
 
-/** The tables of a sheet from the top down, those of one column of names after the other. */
-export function bracketTables(sheet: BookSheet, side: BracketSide): readonly BracketTable[] {
+/**
+ * The tables of a sheet from the top down, those of one column of names after the other.
+ * @param brackets - every cell of the sheet with a number or an interval in brackets, in column order.
+ */
+export function bracketTables(
+  sheet: BookSheet,
+  side: BracketSide,
+  brackets: readonly CellPlace[],
+): readonly BracketTable[] {
   const sides = new Map<number, Pair[]>();
-  for (const pair of pairsOf(sheet, side)) {
+  for (const pair of pairsOf(sheet, side, brackets)) {
     const together = sides.get(pair.names);
     if (together === undefined) sides.set(pair.names, [pair]);
     else together.push(pair);
@@ -49,8 +56,8 @@ export function bracketTables(sheet: BookSheet, side: BracketSide): readonly Bra
   return [...sides.values()].flatMap((pairs) => tablesOf(sheet, side, pairs));
 }
 
-function pairsOf(sheet: BookSheet, side: BracketSide): Pair[] {
-  return allInBrackets(sheet).flatMap((place): Pair[] => {
+function pairsOf(sheet: BookSheet, side: BracketSide, brackets: readonly CellPlace[]): Pair[] {
+  return brackets.flatMap((place): Pair[] => {
     const { row, column } = bracketPlace(side, place, -1);
     if (row < 0 || column < 0 || !isCoefficient({ sheet, row, column }, side)) return [];
     const names = columnOfNames(sheet, row, column);

@@ -22,8 +22,7 @@ const inText = /^([([])\s*([-−+]?)\s*([^-−+([].*?)\s*[)\]]\s*[*†‡]*$/;
 /** What a cell shows in brackets, as text or by its number format; null where it shows no number in them. */
 export function inBracketsAt(place: CellPlace): InBrackets | null {
   if (isTextAt(place)) return readBracketed(wordsAt(place).trim(), place);
-  const value = numberAt(place);
-  const brackets = value === null ? null : bracketsIn(formatAt(place) ?? "General", value);
+  const brackets = formatBrackets(place);
   const shown = brackets === null ? null : shownNumberAt(place);
   if (shown === null || brackets === null) return null;
   return {
@@ -46,8 +45,15 @@ function readBracketed(text: string, place: CellPlace): InBrackets | null {
  * is looked at once.
  */
 export function allInBrackets(sheet: BookSheet): readonly CellPlace[] {
-  const places = [...placesOfTexts(sheet), ...placesOfFormats(sheet)];
-  return places.filter((place) => inBracketsAt(place) !== null || intervalInBrackets(place) !== null);
+  const ofTexts = [...placesOfTexts(sheet)];
+  const shown = ofTexts.filter((place) => inBracketsAt(place) !== null || intervalInBrackets(place) !== null);
+  return [...shown, ...[...placesOfFormats(sheet)].filter((place) => formatBrackets(place) !== null)];
+}
+
+/** The brackets that a number's format puts around it. */
+function formatBrackets(place: CellPlace): ReturnType<typeof bracketsIn> {
+  const value = numberAt(place);
+  return value === null ? null : bracketsIn(formatAt(place) ?? "General", value);
 }
 
 function* placesOfTexts(sheet: BookSheet): Generator<CellPlace> {

@@ -43,8 +43,8 @@ function turnedFormats({ firstRow, rowCount, firstColumn, columns, formats }: Bo
   return { firstRow: firstColumn, rowCount: width, indices, formats: all };
 }
 
-/** The cell of the sheet itself that stands at a place of the turned one. */
-export const turnedBack = (sheet: BookSheet, { row, column }: Pick<CellPlace, "row" | "column">): CellPlace => ({
+/** Where a cell of the one sheet stands on the other. */
+export const turnedPlace = (sheet: BookSheet, { row, column }: Pick<CellPlace, "row" | "column">): CellPlace => ({
   sheet,
   row: column,
   column: row,

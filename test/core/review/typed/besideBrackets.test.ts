@@ -189,7 +189,12 @@ describe("reports with brackets beside their coefficients, and with intervals", 
     expect(on("Under 99")[0]!.level).toBeUndefined();
     expect(on("Under 99")[0]!.assumed!.join(" ")).toContain("95 %, 90 % and 99 % were tried");
     const wrong: Claim = { ...on("Under 90")[0]!, level: 0.05 };
-    expect(reviewOf(wrong).compared.some(({ agrees }) => !agrees)).toBe(true);
+    const { compared, findings } = reviewOf(wrong);
+    expect(compared.some(({ agrees }) => !agrees)).toBe(true);
+    expect(findings.find(({ code }) => code === "bounds-of-another-level")!.what).toBe(
+      "The bounds come out of the cells at 90 %, not at 95 % as the report says.",
+    );
+    expect(reviewOf({ ...wrong, level: 0.2 }).findings.map(({ code }) => code)).toContain("bounds-of-another-level");
   });
 
   it("draw their conclusions at the level of the question, whatever that of the interval", () => {
