@@ -15,7 +15,7 @@ export function NothingFound({ review }: { readonly review: ReviewInHand }): Rea
       <SectionTitle>No regression was found</SectionTitle>
       <p className={type.body}>
         {unread.length === 0
-          ? "No formula fits a regression (LINEST, SLOPE, INTERCEPT, TREND, FORECAST, RSQ, STEYX, CORREL), and no figures stand under headings such as coefficient and standard error."
+          ? "No formula fits a regression (LINEST, SLOPE, INTERCEPT, TREND, FORECAST, RSQ, STEYX, CORREL), and no figures stand under headings such as coefficient and standard error, or in brackets with coefficients."
           : "Something looks like a regression, but could not be read. The reasons stand below."}
       </p>
       <p className={type.body}>
