@@ -169,4 +169,17 @@ describe("by keyboard", { timeout: 180_000 }, () => {
     for (let i = 0; i < 40; i++) await desk.page.keyboard.press("ArrowRight");
     expect(Number(await edge.getAttribute("aria-valuenow"))).toBe(320);
   });
+
+  it("has the pane below the cells where there is no room beside them", async () => {
+    const { page, pane } = desk;
+    await page.setViewportSize({ width: 320, height: 700 });
+    const [cells, frame] = await Promise.all([
+      page.getByRole("main").boundingBox(),
+      page.locator("iframe[title='Footing']").boundingBox(),
+    ]);
+    expect(cells!.y + cells!.height).toBeLessThanOrEqual(frame!.y);
+    expect([cells!.width, frame!.width]).toEqual([320, 320]);
+    expect(await page.evaluate("document.documentElement.scrollWidth")).toBe(320);
+    await pane.getByRole("button", { name: "Use selection" }).click({ trial: true });
+  });
 });

@@ -1,4 +1,4 @@
-import { useEffect, useRef, useState, type ReactNode } from "react";
+import { useEffect, useRef, useState, type CSSProperties, type ReactNode } from "react";
 import type { BookData } from "../book/bookData.ts";
 import { demoBook } from "../demo/demoBook.ts";
 import type { FunctionsMetadata } from "../workbook/metadata.ts";
@@ -19,6 +19,9 @@ const demo = (): Opened => ({ name: "Kestrel & Vane", book: demoBook() });
 /** In pixels; no pane of Excel's is narrower. */
 const usualPaneWidth = 400;
 
+/** How wide the pane is, for the style sheet. */
+const paneIs = (width: number): CSSProperties => ({ "--pane-width": `${width}px` }) as CSSProperties;
+
 /** The stand-in spreadsheet: a bar of its own, the cells, and the add-in's pane beside them. */
 export function DeskPage({ functions }: { readonly functions: FunctionsMetadata }): ReactNode {
   const [opened, setOpened] = useState(demo);
@@ -38,7 +41,7 @@ export function DeskPage({ functions }: { readonly functions: FunctionsMetadata 
   const saveForLibreOffice = async (book: BookData): Promise<void> =>
     setNote(savedForLibreOffice(await downloadForLibreOffice(book, opened.name)));
   return (
-    <div className="desk" style={{ gridTemplateColumns: `minmax(0, 1fr) auto ${paneWidth}px` }}>
+    <div className="desk" style={paneIs(paneWidth)}>
       <DeskBar
         name={opened.name}
         note={note}
