@@ -34,6 +34,7 @@ export const testsMiss: HelpPage = {
       ],
     },
     "So where errors follow on, take a p-value between 0.01 and 0.05 as undecided in a small sample.",
+    "Some tests see too much: those that look for breaks, missing curves and runs of large errors take errors not to follow on. Where they do, these tests often find what is not there, and the pane says so beside them.",
     "No test here can see a driver that is missing, a figure that was typed wrongly, rows that were chosen because they fit, or which of two things moves the other. And with very many rows a test can reject a departure that is too small to matter: look at the picture as well as at the p-value.",
   ],
 };
