@@ -18,7 +18,8 @@ export function digitsShown({ shown, halfUnit }: Pick<ReportedNumber, "shown" | 
   const percent = / ?%/.exec(shown)?.[0] ?? "";
   const scientific = /\dE[+-]?\d/i.test(shown);
   const grouped = /\d,\d{3}(?!\d)/.test(shown);
-  const written = /\.(\d+)/.exec(shown)?.[1]?.length;
+  // A formula's whole number counts to digits that its cell does not show.
+  const written = /\.(\d+)/.exec(shown)?.[1]?.length ?? (/^-?\d+$/.test(shown) ? 0 : undefined);
   const decimals = written ?? (scientific ? 0 : Math.round(-Math.log10(2 * halfUnit * (percent === "" ? 1 : 100))));
   return { percent, scientific, grouped, decimals: Math.max(0, Math.min(mostDecimals, decimals)) };
 }

@@ -21,6 +21,8 @@ describe("a number shown in the way of a reported one", () => {
     ["powers of ten", "1.23E-05", 5e-8, 0.000045678, "4.57E-05"],
     ["tens", "1230", 5, 4567, "4567"],
     ["as many as are written, though more are meant", "0.25", 5e-12, 0.25, "0.25"],
+    ["a formula's whole number, though more digits are meant", "30", 5e-9, 30, "30"],
+    ["decimals behind a comma", "-5,64", 0.005, -5.6392, "-5.64"],
     ["nothing below zero", "0.00", 0.005, -0.001, "0.00"],
   ])("%s", (_, shown, halfUnit, value, expected) => {
     expect(showWith(digitsShown({ shown, halfUnit }), value)).toBe(expected);

@@ -15,7 +15,7 @@ const mostCells = 10;
 export const craftFinding = (code: keyof typeof advice, { rank, cells, what }: Told): Finding => ({
   rank,
   code: codeOf(code),
-  cells: cells.slice(0, mostCells),
+  cells: [...new Set(cells)].slice(0, mostCells),
   reported: null,
   recomputed: null,
   what,

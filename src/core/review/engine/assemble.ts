@@ -12,7 +12,7 @@ import { underSameErrors } from "./sameErrors.ts";
 import type { Searched } from "./search.ts";
 import { triedInWords } from "./triedWords.ts";
 import type { Bench, Trial } from "./trial.ts";
-import { verdictInWords } from "./words.ts";
+import { boundsOfAnother, verdictInWords } from "./words.ts";
 
 /** Everything that was found out about a claim. */
 export interface Parts {
@@ -68,17 +68,19 @@ export function assemble(parts: Parts): ClaimReview {
 
 type ForVerdict = Pick<ClaimReview, "compared" | "explanation" | "alternatives"> & {
   readonly errorsUnknown: number | null;
+  readonly boundsAt: number | null;
 };
 
 const verdictFacts = (
-  { intended, constant }: Parts,
-  { compared, explanation, alternatives, errorsUnknown }: ForVerdict,
+  { bench, intended, constant }: Parts,
+  { compared, explanation, alternatives, errorsUnknown, boundsAt }: ForVerdict,
 ) => ({
   compared: compared.length,
   disagreeing: compared.filter((one) => !one.agrees).length,
   explanation: explanation?.sentence ?? null,
   alternatives: alternatives.length,
   errorsUnknown: errorsUnknown !== null,
+  otherLevel: boundsAt === null ? null : boundsOfAnother(boundsAt, bench.claim.level ?? boundsAt),
   withConstant: constant?.turned.map(({ driver }) => driver) ?? [],
   beyond: intended.beyond.length > 0,
 });

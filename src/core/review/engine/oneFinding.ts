@@ -10,7 +10,7 @@ export const finding = (told: Told): Finding => ({
   reported: null,
   recomputed: null,
   ...told,
-  cells: told.cells.slice(0, mostCells),
+  cells: [...new Set(told.cells)].slice(0, mostCells),
 });
 
 /** A finding that turns the conclusion on any driver is of the gravest rank. */

@@ -77,6 +77,8 @@ export interface VerdictFacts {
   readonly alternatives: number;
   readonly errors: ErrorsFound | null;
   readonly errorsUnknown: boolean;
+  /** What is said of bounds that come out at another level; null where they do not. */
+  readonly otherLevel: string | null;
   readonly consequences: readonly Consequence[];
   /** Drivers whose conclusion is another one with the constant that was left out. */
   readonly withConstant: readonly string[];
@@ -96,6 +98,7 @@ function numbersSentence({
   explanation,
   alternatives,
   errorsUnknown,
+  otherLevel,
   beyond,
 }: VerdictFacts): string {
   const more = beyond ? " The data go on beyond them." : "";
@@ -109,6 +112,7 @@ function numbersSentence({
         : ` ${alternatives === 1 ? "Another change does" : `${alternatives} other changes do`} so too.`;
     return `The reported numbers do not come out of the cells as claimed, but they do as follows. ${explanation}${others}`;
   }
+  if (otherLevel !== null) return `The coefficients come out of the cells. ${otherLevel}${more}`;
   if (errorsUnknown)
     return `The coefficients come out of the cells, the figures that rest on standard errors do not.${more}`;
   return `${outOf(disagreeing, compared)} not come out of the cells, and nothing that was tried explains it.${more}`;

@@ -189,7 +189,8 @@ describe("reports with brackets beside their coefficients, and with intervals", 
     expect(on("Under 99")[0]!.level).toBeUndefined();
     expect(on("Under 99")[0]!.assumed!.join(" ")).toContain("95 %, 90 % and 99 % were tried");
     const wrong: Claim = { ...on("Under 90")[0]!, level: 0.05 };
-    const { compared, findings } = reviewOf(wrong);
+    const { compared, findings, verdict } = reviewOf(wrong);
+    expect(verdict).toContain("The coefficients come out of the cells. The bounds come out of the cells at 90 %");
     expect(compared.some(({ agrees }) => !agrees)).toBe(true);
     expect(findings.find(({ code }) => code === "bounds-of-another-level")!.what).toBe(
       "The bounds come out of the cells at 90 %, not at 95 % as the report says.",
