@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { percentOf, roundTicks, scaleOver, tickLabel } from "../../src/taskpane/pictures/scale.ts";
+import { percentOf, roundTicks, scaleOver, tickLabel, wholeTicks } from "../../src/taskpane/pictures/scale.ts";
 
 describe("scales", () => {
   it("place the values between the margins", () => {
@@ -20,6 +20,11 @@ describe("scales", () => {
     expect(roundTicks(scaleOver([0.05, 0.42], 0), 4)).toEqual([0.1, 0.2, 0.3, 0.4]);
     expect(roundTicks(scaleOver([-4200, 3900], 0), 3)).toEqual([0]);
   });
+});
+
+it("names whole numbers alone where something is counted", () => {
+  expect(roundTicks(scaleOver([0, 10], 0), 4)).toEqual([0, 2.5, 5, 7.5, 10]);
+  expect(wholeTicks(scaleOver([0, 10], 0), 4)).toEqual([0, 5, 10]);
 });
 
 it("writes ticks short, with a minus sign", () => {

@@ -46,8 +46,10 @@ function rowsInWords(rows: RowsSummary, observations: number): string {
   switch (rows.kind) {
     case "cases":
       return `${count} separate cases`;
-    case "time":
-      return `${count} ${rows.period.unit}s from ${rows.first} to ${rows.last}`;
+    case "time": {
+      const all = rows.gaps === 0 ? "" : ` of ${numberInWords(observations + rows.gaps, 0)}`;
+      return `${count}${all} ${rows.period.unit}s from ${rows.first} to ${rows.last}`;
+    }
     case "groups":
       return `${count} rows in ${[rows, ...(rows.second === null ? [] : [rows.second])]
         .map(({ groups, by }) => `${numberInWords(groups, 0)} groups by ${by}`)

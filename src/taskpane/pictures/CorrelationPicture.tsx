@@ -1,6 +1,6 @@
 import { type ReactNode, useMemo } from "react";
-import { LevelLine, PlotFrame, heightOf } from "./PlotFrame.tsx";
-import { percentOf, scaleOver } from "./scale.ts";
+import { LevelLine, PlotFrame, heightOf, ticksAcross } from "./PlotFrame.tsx";
+import { percentOf, scaleOver, wholeTicks } from "./scale.ts";
 
 export interface CorrelationPictureProps {
   /** One a lag, from lag 1. */
@@ -15,7 +15,14 @@ export function CorrelationPicture({ values, bound, xTitle, alternative }: Corre
   const across = useMemo(() => scaleOver([0, values.length + 1], 0), [values]);
   const up = useMemo(() => scaleOver([...values, bound, -bound]), [values, bound]);
   return (
-    <PlotFrame across={across} up={up} xTitle={xTitle} yTitle="correlation" alternative={alternative}>
+    <PlotFrame
+      across={across}
+      up={up}
+      ticks={wholeTicks(across, ticksAcross)}
+      xTitle={xTitle}
+      yTitle="correlation"
+      alternative={alternative}
+    >
       <line x1="0" x2="100%" y1={heightOf(up, 0)} y2={heightOf(up, 0)} stroke="currentColor" />
       {[bound, -bound].map((level) => (
         <LevelLine key={level} up={up} at={level} />

@@ -5,6 +5,8 @@ import { type Scale, percentOf, roundTicks, tickLabel } from "./scale.ts";
 export interface PlotFrameProps {
   readonly across: Scale;
   readonly up: Scale;
+  /** The values named across; round ones where nothing is said. */
+  readonly ticks?: readonly number[];
   readonly xTitle: string;
   readonly yTitle: string;
   /** What the picture shows, for those who do not see it. */
@@ -41,9 +43,13 @@ const useStyles = makeStyles({
   xTitle: { gridColumn: "2", textAlign: "right", overflowWrap: "anywhere" },
 });
 
+/** About so many values are named across. */
+export const ticksAcross = 4;
+
 /** Two axes with round numbers, and room for what is drawn between them. */
-export function PlotFrame({ across, up, xTitle, yTitle, alternative, children }: PlotFrameProps): ReactNode {
+export function PlotFrame({ across, up, ticks, xTitle, yTitle, alternative, children }: PlotFrameProps): ReactNode {
   const styles = useStyles();
+  const named = ticks ?? roundTicks(across, ticksAcross);
   return (
     <figure className={styles.figure} role="img" aria-label={alternative}>
       <span className={styles.yTitle}>{yTitle}</span>
@@ -58,7 +64,7 @@ export function PlotFrame({ across, up, xTitle, yTitle, alternative, children }:
         {children}
       </svg>
       <div className={styles.xTicks} aria-hidden="true">
-        {roundTicks(across, 4).map((tick) => (
+        {named.map((tick) => (
           <span key={tick} className={styles.xTick} style={{ left: percentOf(across, tick) }}>
             {tickLabel(tick)}
           </span>
@@ -74,7 +80,7 @@ export const heightOf = (up: Scale, value: number): string => `${(100 - up.perce
 
 const useLineStyles = makeStyles({ line: { color: tokens.colorNeutralForeground3 } });
 
-/** A dashed level line: zero, or a bound. */
+/** A dotted level line: zero, or a bound. */
 export function LevelLine({ up, at }: { readonly up: Scale; readonly at: number }): ReactNode {
   const styles = useLineStyles();
   const height = heightOf(up, at);

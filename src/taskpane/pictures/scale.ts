@@ -41,5 +41,9 @@ export function roundTicks({ low, high }: Scale, wanted: number): readonly numbe
   return Array.from({ length: Math.max(0, last - first + 1) }, (_, index) => tidy((first + index) * step));
 }
 
+/** The same for what is counted: half a lag, or half a month, is none. */
+export const wholeTicks = (scale: Scale, wanted: number): readonly number[] =>
+  roundTicks(scale, wanted).filter(Number.isInteger);
+
 /** Takes off the rounding dust of a product, so that 0.30000000000000004 reads 0.3. */
 const tidy = (value: number): number => Number(value.toPrecision(12));

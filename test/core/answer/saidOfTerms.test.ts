@@ -43,6 +43,20 @@ describe("a driver that enters with its square", () => {
   });
 });
 
+it("periods without a row are counted in how many there are", () => {
+  const gapped = sourceOf({
+    Month: price.map((_, row) => `${2020 + Math.floor(row / 12)}-${String((row % 12) + 1).padStart(2, "0")}`),
+    Repairs: price.map((one, row) => (row === 3 ? null : 90 + 3 * one + draws.normal())),
+    Price: price,
+  });
+  const opening = (rows: Model["rows"]): string | undefined =>
+    must(analyse({ source: gapped, model: modelWith({ rows }), options: defaultOptions }, () => undefined)).verdict[0];
+  expect(opening({ kind: "time", order: "Month" })).toMatch(
+    / over 59 of 60 months from January 2020 to December 2024: /,
+  );
+  expect(opening({ kind: "cases" })).toMatch(/ over 59 separate cases: /);
+});
+
 it("a driver of categories stands once in the title, and each of its terms has a sentence", () => {
   const { title, verdict, terms } = answerTo({ drivers: [driver("Price"), driver("Region", { as: "category" })] });
   expect(terms.filter((term) => term.startsWith("Region: "))).toHaveLength(2);
