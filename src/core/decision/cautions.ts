@@ -6,7 +6,7 @@ type Settled = Pick<Decision, "policy" | "fourCase" | "called" | "inForce" | "re
 
 interface Caution {
   readonly applies: (settled: Settled, evidence: Evidence) => boolean;
-  readonly sentence: (evidence: Evidence) => string;
+  readonly sentence: (evidence: Evidence, settled: Settled) => string;
 }
 
 /** Below this many degrees of freedom the tests often miss what is there (the Monte Carlo behind the careful policy). */
@@ -19,6 +19,10 @@ const degreesOfFreedom = ({ sizes }: Evidence): number => sizes.rows - sizes.col
 
 /** With so few rows to spare neither the tests nor the standard errors have anything to go by. */
 const hardlyAny = 10;
+
+/** Bell and McCaffrey (2002), Survey Methodology 28, 169-181: made for few groups. */
+const remedyFor = ({ errors }: Settled["inForce"]): string =>
+  errors.kind === "grouped" && errors.version !== "CR2" ? " The version CR2 corrects for part of it." : "";
 
 const cautions: readonly Caution[] = [
   {
@@ -51,8 +55,8 @@ const cautions: readonly Caution[] = [
   },
   {
     applies: (_, { order }) => order.kind === "groups" && fewestGroups(order) < fewGroups,
-    sentence: ({ order }) =>
-      `There are only ${order.kind === "groups" ? fewestGroups(order) : 0} groups: the standard errors by group are then too small more often than not.`,
+    sentence: ({ order }, { inForce }) =>
+      `There are only ${order.kind === "groups" ? fewestGroups(order) : 0} groups: the standard errors by group are then too small more often than not.${remedyFor(inForce)}`,
   },
   {
     applies: ({ called, inForce }) => called.errors.kind !== inForce.errors.kind,
@@ -62,4 +66,4 @@ const cautions: readonly Caution[] = [
 
 /** What the reader must know beside the choice, as sentences, most pressing first. */
 export const cautionsOf = (settled: Settled, evidence: Evidence): string[] =>
-  cautions.filter(({ applies }) => applies(settled, evidence)).map(({ sentence }) => sentence(evidence));
+  cautions.filter(({ applies }) => applies(settled, evidence)).map(({ sentence }) => sentence(evidence, settled));

@@ -250,5 +250,10 @@ describe("cautions", () => {
 
   it("count the groups where they are few", () => {
     expect(decided(evidence(clean, shops, 40)).cautions[0]).toContain("only 2 groups");
+    const said = (groupedVersion: "CR1" | "CR2"): string =>
+      decided(evidence(clean, shops, 40), { groupedVersion }).cautions.join(" ");
+    expect(said("CR1")).toContain("The version CR2 corrects for part of it.");
+    expect(said("CR2")).toContain("only 2 groups");
+    expect(said("CR2")).not.toContain("corrects for part");
   });
 });
