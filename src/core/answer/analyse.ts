@@ -23,7 +23,7 @@ import { type RowPlaces, rowPlacesOf } from "./rowPlaces.ts";
 import { rowsSummary } from "./rowsSummary.ts";
 import { decidingTests, furtherTests } from "./runTests.ts";
 import { choiceSentence, scopeInWords } from "./verdict.ts";
-import { driversInWords } from "./wording.ts";
+import { atStart, driversInWords } from "./wording.ts";
 
 /**
  * The whole chain: columns to design, fit, tests, decision, standard errors of every kind, inference, verdict.
@@ -131,7 +131,7 @@ const sentences = (drivers: Answer["drivers"]): string[] =>
 
 function titleOf({ outcome, terms }: Design): string {
   const drivers = new Set(terms.flatMap(({ name, meaning }) => titledAs(name, meaning)));
-  return `${outcome.name} explained by ${driversInWords([...drivers])}`;
+  return `${atStart(outcome.name, outcome.column)} explained by ${driversInWords([...drivers])}`;
 }
 
 /** A driver of categories is named once, and so are the seasons; each of their terms has its sentence. */

@@ -7,6 +7,7 @@ import type { Answer, DriverAnswer } from "./answer.ts";
 import { effectOf } from "./effects.ts";
 import type { Options } from "./options.ts";
 import { driverSentence } from "./verdict.ts";
+import { atStart } from "./wording.ts";
 
 export interface DriverFacts {
   readonly fit: Fit;
@@ -26,7 +27,8 @@ export function driverAnswers(facts: DriverFacts): DriverAnswer[] {
     const effect = effectOf({ meaning: term.meaning, outcome: facts.fit.design.outcome, units: options.units });
     const proviso = provisoOf(term.meaning, facts.fit.design.terms);
     const agreeing = agreeingKinds(inference);
-    const spoken = { driver, effect, decision, lags, level: options.level, agreeing, proviso };
+    const subject = term.meaning.kind === "number" ? atStart(term.name, term.meaning.column) : term.name;
+    const spoken = { driver, subject, effect, decision, lags, level: options.level, agreeing, proviso };
     return { ...driver, sentence: driverSentence(spoken) };
   });
 }

@@ -69,6 +69,8 @@ export function choiceSentence({ decision, lags }: Facts): string {
 
 export interface Spoken {
   readonly driver: Omit<DriverAnswer, "sentence">;
+  /** Its term as a sentence begins with it. */
+  readonly subject: string;
   readonly effect: Effect;
   readonly decision: Decision;
   readonly lags: number | null;
@@ -88,7 +90,7 @@ export function driverSentence(spoken: Spoken): string {
 }
 
 function aboutZero(spoken: Spoken, differs: boolean): string {
-  const { driver, effect, level } = spoken;
+  const { driver, subject, effect, level } = spoken;
   const { amount, words } = effect;
   const [low, high] = [amount(driver.low), amount(driver.high)];
   const decimals = decimalsFor((high - low) / 2);
@@ -102,17 +104,17 @@ function aboutZero(spoken: Spoken, differs: boolean): string {
   const p = pValueInWords(driver.pValue, level);
   const end = (value: number): string => (value < 0 ? words.down : words.up).short(text(value));
   const span = words.span(end(low), end(high));
-  return `${driver.term}: no effect can be shown (${p}). ${effect.step} could go with ${span} (${confidenceInWords(level)}).`;
+  return `${subject}: no effect can be shown (${p}). ${effect.step} could go with ${span} (${confidenceInWords(level)}).`;
 }
 
-function aboutValue({ driver, level }: Spoken, differs: boolean): string {
+function aboutValue({ driver, subject, level }: Spoken, differs: boolean): string {
   const decimals = decimalsFor((driver.high - driver.low) / 2);
   const [coefficient, low, high] = [driver.coefficient, driver.low, driver.high].map((value) =>
     numberInWords(value, decimals),
   );
   const judged = differs ? "differs from" : "is compatible with";
   const p = pValueInWords(driver.pValue, level);
-  return `${driver.term}: the coefficient ${coefficient ?? ""} (between ${low ?? ""} and ${high ?? ""}, ${confidenceInWords(level)}) ${judged} the tested value ${driver.against} (${p}).`;
+  return `${subject}: the coefficient ${coefficient ?? ""} (between ${low ?? ""} and ${high ?? ""}, ${confidenceInWords(level)}) ${judged} the tested value ${driver.against} (${p}).`;
 }
 
 /** Firm, or leaning and on what; where the kind in force says less than another, why it counts all the same. */

@@ -64,4 +64,7 @@ export function shareInWords(share: number): string {
   return percent > 0 && percent < 1 ? `${percent.toFixed(1)} %` : `${percent.toFixed(0)} %`;
 }
 
+/** The name of something made of a column, where a sentence begins with it; a heading of the user's stays as it is written. */
+export const atStart = (name: string, column: string): string => (name.startsWith(column) ? name : capitalised(name));
+
 export const capitalised = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);

@@ -50,6 +50,7 @@ function said({
   const effect = effectOf({ meaning, outcome, units });
   return driverSentence({
     proviso: "",
+    subject: term,
     driver,
     effect,
     decision,

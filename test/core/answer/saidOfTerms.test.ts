@@ -30,6 +30,12 @@ describe("a driver that enters with its square", () => {
       /what a step in it goes with differs along the way/.test(sentence ?? ""),
     );
     expect(ends).toEqual([false, true, true, false]);
+    const logged = answerTo({
+      outcome: { column: "Repairs", transform: { kind: "logarithm" } },
+      drivers: [driver("Rain", { transform: square })],
+    });
+    expect(logged.title).toBe("Logarithm of Repairs explained by square of Rain");
+    expect(logged.drivers[1]!.sentence).toMatch(/^Square of Rain: no effect can be shown/);
   });
 
   it("is read as ever where the square, or another form, enters alone", () => {
