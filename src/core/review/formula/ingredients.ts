@@ -1,5 +1,6 @@
 import { addressOf, type SheetArea } from "../../table/address.ts";
 import type { ClaimedForm } from "../claim.ts";
+import { numberIn } from "./numbersIn.ts";
 import { type Scope, placeOf, standsFor } from "./places.ts";
 import { type Reading, read, unread } from "./reading.ts";
 import { contains, type Formula } from "./tree.ts";
@@ -131,6 +132,8 @@ const readers: Readonly<Record<string, Reader>> = {
     power === undefined ? unread(whyUnread.fewArguments("POWER")) : raised(ingredientsOf(of, scope), power),
   N: ([of], scope) => ingredientsOf(of, scope),
   VALUE: ([of], scope) => ingredientsOf(of, scope),
+  CHOOSECOLS: ([of, ...which], scope) => linesChosen(of, which, { along: "columns", scope }),
+  CHOOSEROWS: ([of, ...which], scope) => linesChosen(of, which, { along: "rows", scope }),
   HSTACK: joined,
   VSTACK: joined,
   CHOOSE: ([which, ...from], scope) =>
@@ -152,6 +155,28 @@ function joined(parts: readonly Formula[], scope: Scope): Reading<readonly Ingre
     found.push(...reading.value);
   }
   return read(found);
+}
+
+interface Choosing {
+  readonly along: "rows" | "columns";
+  readonly scope: Scope;
+}
+
+/** CHOOSECOLS(range,2,{1,3}): some columns of a range, or rows; they count from the end where they are negative. */
+function linesChosen(of: Formula, which: readonly Formula[], { along, scope }: Choosing): Parts {
+  const place = placeOf(of, scope);
+  const name = along === "columns" ? "CHOOSECOLS" : "CHOOSEROWS";
+  if (place?.ok !== true) return place ?? unread(whyUnread.computedData(name));
+  const area = place.value;
+  const positions = which.flatMap((one) => (one.kind === "array" ? one.rows.flat() : [one]));
+  const numbers = positions.map((one) => numberIn(one, scope) ?? NaN);
+  if (numbers.some(Number.isNaN)) return unread(whyUnread.computedPlace(name));
+  const chosen = numbers.map((position) => (position < 0 ? area[along] + position : position - 1));
+  if (chosen.some((at) => at < 0 || at >= area[along]))
+    return unread(whyUnread.noCells(`${name} of ${addressOf(area)}`));
+  const line = (at: number): SheetArea =>
+    along === "columns" ? { ...area, column: area.column + at, columns: 1 } : { ...area, row: area.row + at, rows: 1 };
+  return read(chosen.map((at) => ({ area: line(at), form: "as it is", factor: 1 })));
 }
 
 /** CHOOSE({1,2},first,second) sets ranges side by side. */

@@ -74,7 +74,7 @@ export const isIntervalHeading = (text: string): boolean =>
   );
 
 const intervalWords =
-  /^(?:9\d(?:[.,]\d)? ?(?:%|per ?cent) ?)?(?:c\.?i|conf(?:idence)?\.? ?(?:int(?:erval|ervals)?|limits|bounds|range)?|intervals?|bounds)\.?(?:,? ?9\d(?:[.,]\d)? ?(?:%|per ?cent))?$/;
+  /^(?:9\d(?:[.,]\d)? ?(?:%|per ?cent) ?)?(?:c\.?i|conf(?:idence)?\.? ?(?:int(?:erval|ervals)?|limits|bounds|range)|intervals?|bounds)\.?(?:,? ?9\d(?:[.,]\d)? ?(?:%|per ?cent))?$/;
 
 /** What a word beside a number says of it. */
 export const summaryWordIn = wordIn(summaryWords);

@@ -135,6 +135,23 @@ const forms: readonly Form[] = [
     values: [[1, 2, 3]],
     says: "Cups 5-16 on Rain 5-16, Price 5-16: coefficient 1, coefficient 0, coefficient c",
   },
+  {
+    formula: '=LINEST(Data!B5:B16,CHOOSECOLS(Data!A5:D16,4,MATCH("Price",Data!A3:D3,0)))',
+    values: [[1, 2, 3]],
+    says: "Cups 5-16 on Rain 5-16, Price 5-16: coefficient 1, coefficient 0, coefficient c",
+  },
+  {
+    formula: "=SLOPE(CHOOSEROWS(Across!B1:M3,1),CHOOSEROWS(Across!B1:M3,-2))",
+    says: "Cups 2-13 on Price 2-13: coefficient 0",
+  },
+  {
+    formula: "=SLOPE(Data!B5:B16,CHOOSECOLS(Data!A5:D16,5))",
+    says: "not read: There are no cells in use in CHOOSECOLS of Data!A5:D16.",
+  },
+  {
+    formula: '=SLOPE(Data!B5:B16,CHOOSECOLS(Data!A5:D16,MATCH("Wind",Data!A3:D3,0)))',
+    says: "not read: CHOOSECOLS works out at calculation which cells are used.",
+  },
   { formula: "=SLOPE(INDEX(Data!A5:D16,0,2),INDEX(Data!A5:D16,,3))", says: `${plain}: coefficient 0` },
   {
     formula: "=LOGEST(Data!B5:B16,Data!C5:C16)",
