@@ -29,6 +29,7 @@ const signs = {
   "no-drivers": "invalidValue",
   "ambiguous-heading": "invalidValue",
   "unknown-heading": "invalidValue",
+  "unknown-coefficient": "invalidValue",
   "repeated-heading": "invalidValue",
   "column-used-twice": "invalidValue",
   "no-time-column": "invalidValue",

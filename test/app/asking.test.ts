@@ -28,10 +28,9 @@ describe("what is typed to be asked of the coefficients", () => {
       problem: null,
     });
     expect(readAsked("estimates", "Price indx", answered).problem).toEqual({
-      code: "unknown-heading",
-      heading: "Price indx",
+      code: "unknown-coefficient",
+      name: "Price indx",
       nearest: "Price index",
-      where: "the coefficients",
     });
     expect(readAsked("jointTest", "Advertising > 0", answered).problem).toMatchObject({
       code: "unknown-value",

@@ -57,7 +57,9 @@ it("says beside the field what cannot be read, and leaves the answer as it was",
   await estimates().fill("Price indx + Advertising");
   await equations().fill("Advertising > 0");
   await button(page, "Ask this").click();
-  await page.getByText(/There is no column "Price indx" in the coefficients\. Did you mean "Price index"\?/).waitFor();
+  await page
+    .getByText(/There is no coefficient "Price indx" in this regression\. Did you mean "Price index"\?/)
+    .waitFor();
   await page.getByText(/"Advertising > 0" is not a value of the setting "joint test"\./).waitFor();
   for (const field of [estimates(), equations()]) expect(await field.getAttribute("aria-invalid")).toBe("true");
   expect(await page.getByText(/Out of date/).count()).toBe(0);
@@ -86,7 +88,7 @@ it("lets what was asked be taken back once a driver is gone", async () => {
   await openTab(page, "Data");
   await roleOf(page, "Advertising").selectOption("unused");
   await button(page, "Get the answer").click();
-  await page.getByText(/There is no column "Advertising" in the coefficients/).waitFor();
+  await page.getByText(/There is no coefficient "Advertising" in this regression/).waitFor();
   await openTab(page, "Answer");
   await button(page, "Ask more of the coefficients (1 asked)").click();
   await estimates().fill("");

@@ -33,7 +33,7 @@ const sides = { "=": "both", ">": "above", "<": "below" } as const satisfies Rec
  * Reads arithmetic of coefficients by the names of their terms: "Price + Rain", "Price / (1 - Lagged) = 2", "Price > 0".
  * Names are free of case; one with signs of arithmetic in it is known by its whole, or stands in double quotes. Behind
  * "=" stands the value it is held against, 0 where none does; ">" and "<" look for it on one side alone.
- * @returns Problem "unknown-heading" for a name that no term has, "unknown-value" for what is no sum of coefficients nor
+ * @returns Problem "unknown-coefficient" for a name that no term has, "unknown-value" for what is no sum of coefficients nor
  *   a quotient of two.
  */
 export function readExpression(text: string, vocabulary: Vocabulary): Result<Expression> {
@@ -41,13 +41,8 @@ export function readExpression(text: string, vocabulary: Vocabulary): Result<Exp
   const stranger = tokens.find((token) => token.kind === "unknown");
   if (stranger !== undefined) {
     const known = vocabulary.names.map(({ name }) => name);
-    const heading = stranger.text;
-    return failure({
-      code: "unknown-heading",
-      heading,
-      nearest: nearestName(heading, known),
-      where: "the coefficients",
-    });
+    const name = stranger.text;
+    return failure({ code: "unknown-coefficient", name, nearest: nearestName(name, known) });
   }
   const expression = fromTokens(tokens, vocabulary.size);
   return expression === null ? failure(notUnderstood(text, vocabulary)) : success({ text: text.trim(), ...expression });

@@ -99,6 +99,10 @@ const sentences: { readonly [Code in Problem["code"]]: (problem: Extract<Problem
     `There is no column "${heading}" in ${where}.`,
     suggestion(nearest, "Use one of the headings as it stands in the sheet."),
   ],
+  "unknown-coefficient": ({ name, nearest }) => [
+    `There is no coefficient "${name}" in this regression.`,
+    suggestion(nearest, "Use the names of the drivers as the answer shows them."),
+  ],
   "repeated-heading": ({ heading, cells }) => [
     `The heading "${heading}" stands above more than one column, in ${listed(cells, cells.length)}.`,
     "Give each column a name of its own.",

@@ -51,6 +51,8 @@ export type ModelProblem =
       readonly nearest: string | null;
       readonly where: string;
     }
+  /** A name that no coefficient has, where sums and equations of coefficients are written. */
+  | { readonly code: "unknown-coefficient"; readonly name: string; readonly nearest: string | null }
   | { readonly code: "repeated-heading"; readonly heading: string; readonly cells: readonly string[] }
   | { readonly code: "column-used-twice"; readonly column: string; readonly first: string; readonly second: string }
   | { readonly code: "no-time-column" }

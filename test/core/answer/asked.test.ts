@@ -88,7 +88,7 @@ describe("numbers made of the coefficients", () => {
 
   it("names what it does not know", () => {
     expect(ask([["estimates", "Prize + Rain"]])).toMatchObject({
-      problem: { code: "unknown-heading", heading: "Prize", nearest: "Price" },
+      problem: { code: "unknown-coefficient", name: "Prize", nearest: "Price" },
     });
     expect(ask([["joint test", "Price = 0, Rain > 0"]])).toMatchObject({
       problem: { code: "unknown-value", setting: "joint test", value: "Rain > 0" },

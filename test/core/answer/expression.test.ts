@@ -90,7 +90,7 @@ describe("arithmetic of coefficients", () => {
     ['"Rain, heavyy" > 0', "Rain, heavyy", "Rain, heavy"],
   ])("%s: names what no coefficient is called", (text, heading, nearest) => {
     expect(read(text)).toMatchObject({
-      problem: { code: "unknown-heading", heading, nearest, where: "the coefficients" },
+      problem: { code: "unknown-coefficient", name: heading, nearest },
     });
   });
 });

@@ -82,6 +82,10 @@ const sentences: Sentences = {
     { code: "unknown-heading", heading: "Pirce", nearest: "Price", where: "Months" },
     'There is no column "Pirce" in Months. Did you mean "Price"?',
   ],
+  "unknown-coefficient": [
+    { code: "unknown-coefficient", name: "Pirce", nearest: "Price" },
+    'There is no coefficient "Pirce" in this regression. Did you mean "Price"?',
+  ],
   "ambiguous-heading": [
     { code: "ambiguous-heading", headings: ["Price", "Repairs"], sheets: ["Months", "Copy"] },
     "The sheets Months and Copy all have the headings Price, Repairs. Say which sheet is meant.",
