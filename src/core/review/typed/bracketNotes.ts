@@ -63,9 +63,12 @@ export interface LevelNote {
   readonly level: number;
 }
 
+/** What is low in a text, or high, may be anything. */
+const ofIntervals = /\b(?:confidence|intervals?|c\.?i\.?s?)(?![\p{L}\p{N}])/iu;
+
 export const levelNotes = (sheet: BookSheet): readonly LevelNote[] =>
   saidOn(sheet, (text) => {
-    const level = levelIn(text);
+    const level = ofIntervals.test(text) ? levelIn(text) : null;
     return level === null ? [] : [{ level }];
   });
 

@@ -128,6 +128,7 @@ const accounts: readonly SheetData[] = [
     ["Grants", 120, "(30)"],
     ["Wages", 310, inBrackets(230)],
     ["Count", 12],
+    ["Low season, 90 % of the year"],
   ]),
   sheetOf("Across", [
     ["", "Sales", "Grants", "Wages", "Cases"],
