@@ -48,7 +48,10 @@ export async function listMany(page: Page): Promise<void> {
     };
   });
   await button(page, "List the regressions in this workbook").click();
-  await page.getByText(/^30 regressions reviewed/).first().waitFor();
+  await page
+    .getByText(/^30 regressions reviewed/)
+    .first()
+    .waitFor();
   await page.getByRole("checkbox", { name: "Only those with findings" }).waitFor();
 }
 
