@@ -205,6 +205,7 @@ describe.each(widths)("%i pixels wide", (width) => {
       expect(found).toEqual({ violations: [], colour });
     }
     expect(await widerThanPane(page)).toEqual([]);
+    expect(await outOfLine(page)).toEqual([]);
     expect(await smallTargets(page)).toEqual([]);
     await page.close();
   });
@@ -233,6 +234,16 @@ const widerThanPane = (page: Page): Promise<string[]> =>
     const isShown = (element: Element): boolean => element.getBoundingClientRect().width > 1;
     return [...document.querySelectorAll("main *, header *, footer *")]
       .filter((element) => isShown(element) && element.getBoundingClientRect().right > edge)
+      .map((element) => element.outerHTML.slice(0, 120));
+  });
+
+/** What reaches beyond the right end of the lines, into the room of the scroll bar; boxes that scroll and pictures may. */
+const outOfLine = (page: Page): Promise<string[]> =>
+  page.evaluate(() => {
+    const edge = document.querySelector("#section")!.getBoundingClientRect().right + 0.5;
+    return [...document.querySelectorAll("#section *")]
+      .filter((element) => element.closest("[tabindex='0'], [aria-hidden='true']") === null)
+      .filter((element) => element.getBoundingClientRect().right > edge && element.getBoundingClientRect().width > 1)
       .map((element) => element.outerHTML.slice(0, 120));
   });
 

@@ -2,7 +2,7 @@ import type { ClaimReview } from "../../core/review/claimReview.ts";
 import type { Asked, BookClaims } from "../../core/review/claimsOf.ts";
 import type { DataInHand } from "../dataInHand.ts";
 import type { Setup } from "../setup.ts";
-import type { Listing } from "./listing.ts";
+import type { Listing } from "./reviewState.ts";
 import type { Pointing } from "./reviewState.ts";
 
 /** What can happen to a review. */

@@ -4,15 +4,6 @@ import { counted } from "../../core/problem/spots.ts";
 import { parseAddress } from "../../core/table/address.ts";
 import type { FoundRegression, ReviewInHand } from "./reviewState.ts";
 
-/** How the list of regressions is looked at. */
-export interface Listing {
-  /** The sheets whose regressions are shown one by one. */
-  readonly open: readonly string[];
-  readonly onlyFindings: boolean;
-}
-
-export const wholeListing: Listing = { open: [], onlyFindings: false };
-
 /** More regressions than these are listed sheet by sheet. */
 const mostAtOnce = 12;
 

@@ -2,7 +2,6 @@ import type { Claim } from "../../core/review/claim.ts";
 import type { BookReview, ClaimReview } from "../../core/review/claimReview.ts";
 import { rangeOfLine } from "../../core/review/reviewWords.ts";
 import { addressOf, localAddressOf, parseAddress } from "../../core/table/address.ts";
-import { type Listing, wholeListing } from "./listing.ts";
 import type { Asked, BookClaims, Pointed } from "../../core/review/claimsOf.ts";
 
 /** A regression that the workbook reports, and what a review says of it; null until it has been reviewed. */
@@ -93,3 +92,12 @@ function concerns({ place, outcome, drivers, others }: Claim, cells: readonly st
   const reports = place.slice(0, place.lastIndexOf("!"));
   return cells.some((cell) => [...named, reports].includes(cell.slice(0, cell.lastIndexOf("!"))));
 }
+
+/** How the list of regressions is looked at. */
+export interface Listing {
+  /** The sheets whose regressions are shown one by one. */
+  readonly open: readonly string[];
+  readonly onlyFindings: boolean;
+}
+
+export const wholeListing: Listing = { open: [], onlyFindings: false };

@@ -14,7 +14,8 @@ import { resultsInCells } from "./found/resultsInCells.ts";
 import { groupBehind, withBlock } from "./typed/attachBlock.ts";
 import { dataTables } from "./typed/dataTables.ts";
 import { areaCalled, givenData } from "./typed/pointedAt.ts";
-import { type ReportBlock, reportBlocks } from "./typed/reportBlocks.ts";
+import type { ReportBlock } from "./typed/reportBlock.ts";
+import { reportBlocks } from "./typed/reportBlocks.ts";
 import { type GivenData, typedClaim } from "./typed/typedClaim.ts";
 
 /** Cells that someone points at as the report of a regression, and what they say of its data. */

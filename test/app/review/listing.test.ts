@@ -1,5 +1,6 @@
 import { describe, expect, it } from "vitest";
-import { groupsOf, isLong, listedOf, shownWords, wholeListing } from "../../../src/app/review/listing.ts";
+import { wholeListing } from "../../../src/app/review/reviewState.ts";
+import { groupsOf, isLong, listedOf, shownWords } from "../../../src/app/review/listing.ts";
 import type { FoundRegression, ReviewInHand } from "../../../src/app/review/reviewState.ts";
 import type { Rank } from "../../../src/core/review/finding.ts";
 import { success } from "../../../src/core/problem/result.ts";

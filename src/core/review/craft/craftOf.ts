@@ -8,7 +8,7 @@ import type { Stretch } from "../found/claimedLines.ts";
 import type { Gathered } from "../found/gatherClaims.ts";
 import { saysUnequal } from "../formula/whyUnread.ts";
 import { gravestFirst } from "../reviewWords.ts";
-import type { ReportBlock } from "../typed/reportBlocks.ts";
+import type { ReportBlock } from "../typed/reportBlock.ts";
 import { addressesAlong, craftFinding } from "./craftFinding.ts";
 import { found } from "./craftWords.ts";
 import { type CheckedLine, hiddenLine, typedOverFormulas, unusableCells } from "./lineChecks.ts";

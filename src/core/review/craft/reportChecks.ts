@@ -1,6 +1,6 @@
 import { type CellPlace, addressAt, isCalculatedAt, isSpilledAt } from "../cellsOfBook.ts";
 import type { Finding } from "../finding.ts";
-import type { ReportBlock } from "../typed/reportBlocks.ts";
+import type { ReportBlock } from "../typed/reportBlock.ts";
 import type { Gathered } from "../found/gatherClaims.ts";
 import { craftFinding } from "./craftFinding.ts";
 import { found } from "./craftWords.ts";

@@ -1,12 +1,12 @@
 import { type MomentModel, type MomentSolution, momentSolver } from "../../numeric/momentSolver.ts";
 import { packedLength } from "../../numeric/runningMoments.ts";
-import type { ReportedNumber } from "../claim.ts";
 import { type Moved, evidenceOf } from "./evidence.ts";
 import type { Frame } from "./frame.ts";
 import { madeLines } from "./madeLines.ts";
 import type { ModelRecipe, Recipe } from "./recipe.ts";
 import { type SieveTarget, sieveTargets, targetValue } from "./sieveTargets.ts";
 import { type SummedUp, sumUp, sumUpOnce } from "./summedUp.ts";
+import type { Baseline } from "./sieveTargets.ts";
 
 /** What the sieve lets through: it may reproduce the report, and its agreement may be worth something. */
 export interface Survivor {
@@ -22,12 +22,6 @@ export interface Sieve {
   /** Whether the numbers agree as far as moments tell; the chance is that of the sharpest reading of the report. */
   readonly look: (summed: SummedUp, recipe: Recipe) => Survivor | null;
   readonly looked: () => number;
-}
-
-/** Reported numbers beside what the cells give for them as claimed. */
-export interface Baseline {
-  readonly reported: readonly ReportedNumber[];
-  readonly asClaimed: readonly (number | null)[];
 }
 
 /**

@@ -3,7 +3,6 @@ import type { MomentSolution } from "../../numeric/momentSolver.ts";
 import type { Quantity, ReportedNumber } from "../claim.ts";
 import { isErrorQuantity, plainQuantity, wholeValue } from "./quantities.ts";
 import type { ModelRecipe } from "./recipe.ts";
-import type { Baseline } from "./sieve.ts";
 
 /** A reported number as the sieve looks at it: the range that is shown so. */
 export interface SieveTarget {
@@ -100,4 +99,10 @@ function classicalValue(
   if (kind === "ratio") return solution.slopes[place]! / error;
   const factor = (model.factors[model.outcome] ?? 1) / (model.factors[model.drivers[place]!] ?? 1);
   return error * factor;
+}
+
+/** Reported numbers beside what the cells give for them as claimed. */
+export interface Baseline {
+  readonly reported: readonly ReportedNumber[];
+  readonly asClaimed: readonly (number | null)[];
 }

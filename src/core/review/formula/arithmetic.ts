@@ -1,4 +1,4 @@
-import { type Regression, sameRegression } from "./regression.ts";
+import { type Regression, sameRegression } from "./foundRegression.ts";
 import {
   type Combination,
   type Measure,

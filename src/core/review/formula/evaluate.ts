@@ -3,7 +3,7 @@ import { type CellPlace, numberAt, sheetNamed } from "../cellsOfBook.ts";
 import { combined, quantityIn, scaled } from "./arithmetic.ts";
 import { type Meant, type Scope, placeOf, standsFor } from "./places.ts";
 import { cellOf, isCounting, numberIn } from "./numbersIn.ts";
-import { type Regression, regressionOf } from "./regression.ts";
+import { regressionOf } from "./regression.ts";
 import type { CellResult } from "./results.ts";
 import { valuesOfCalls } from "./regressionValues.ts";
 import { type RegressionFunction, regressionFunctions } from "./telling.ts";
@@ -11,15 +11,7 @@ import type { Formula } from "./tree.ts";
 import { type Value, cornerOf, each, known, unknown } from "./values.ts";
 import { valueFunctions } from "./valueFunctions.ts";
 import { whyUnread } from "./whyUnread.ts";
-
-/** What was met on the way through a formula. */
-export interface Met {
-  readonly regressions: { readonly name: RegressionFunction; readonly regression: Regression }[];
-  /** Why regressions in it could not be read. */
-  readonly unread: string[];
-}
-
-export const nothingMet = (): Met => ({ regressions: [], unread: [] });
+import type { Met } from "./met.ts";
 
 /** What a formula shows, in terms of the regressions in it. */
 export function evaluate(formula: Formula, scope: Scope, met: Met): Value {

@@ -1,5 +1,5 @@
 import type { CellPlace } from "../cellsOfBook.ts";
-import type { Met } from "./evaluate.ts";
+import type { Met } from "./met.ts";
 import type { Value } from "./values.ts";
 
 /** What a formula shows in one of the cells that it fills. */

@@ -1,5 +1,5 @@
 import type { Quantity } from "../claim.ts";
-import type { Regression } from "./regression.ts";
+import type { Regression } from "./foundRegression.ts";
 
 /** What a formula, or a part of it, comes to: a number, or something that a regression gives. */
 export type Value =

@@ -1,7 +1,7 @@
 import { mostColumns, mostRows } from "../../table/address.ts";
 import type { Book } from "../book.ts";
 import { sheetNamed, usedAreaOf } from "../cellsOfBook.ts";
-import type { Regression, UsedLine } from "../formula/regression.ts";
+import type { Regression, UsedLine } from "../formula/foundRegression.ts";
 import { type Stretch, isNumberAlong } from "./claimedLines.ts";
 
 /** The stretches that a regression uses, outcome first: pair by pair the same number of cells. */

@@ -1,7 +1,7 @@
 import { cellKind } from "../../table/cells.ts";
 import type { Book } from "../book.ts";
 import { type CellPlace, kindAt, sheetNamed } from "../cellsOfBook.ts";
-import type { Regression, UsedLine } from "../formula/regression.ts";
+import type { Regression, UsedLine } from "../formula/foundRegression.ts";
 
 /** Beyond so many cells of a line nobody is helped by the first that is no number. */
 const farthest = 100_000;

@@ -1,9 +1,10 @@
 import type { Book, BookFormula, BookSheet } from "../book.ts";
 import { type CellPlace, addressAt, numberAt, wordsAt } from "../cellsOfBook.ts";
 import type { BookReview } from "../claimReview.ts";
-import { type Met, evaluate, nothingMet, quantitiesIn } from "../formula/evaluate.ts";
+import { type Met, nothingMet } from "../formula/met.ts";
+import { evaluate, quantitiesIn } from "../formula/evaluate.ts";
 import { parseFormula } from "../formula/parse.ts";
-import type { Regression } from "../formula/regression.ts";
+import type { Regression } from "../formula/foundRegression.ts";
 import { type Results, noResults } from "../formula/results.ts";
 import { type RegressionFunction, showsRegression } from "../formula/telling.ts";
 import type { Measure, Value } from "../formula/values.ts";

@@ -2,7 +2,7 @@ import { type SheetArea, addressOf } from "../../table/address.ts";
 import type { Book } from "../book.ts";
 import { addressAt } from "../cellsOfBook.ts";
 import type { Claim, ReportedNumber } from "../claim.ts";
-import { type Regression, keyOf } from "../formula/regression.ts";
+import { type Regression, keyOf } from "../formula/foundRegression.ts";
 import { type Aligned, alignedLines } from "./alignedLines.ts";
 import { areaOf, claimedLine } from "./claimedLines.ts";
 import type { FormulaCell } from "./formulaCells.ts";

@@ -1,7 +1,7 @@
 import type { CellPlace } from "../cellsOfBook.ts";
 import { addressAt } from "../cellsOfBook.ts";
 import type { Quantity, ReportedNumber } from "../claim.ts";
-import type { Regression } from "../formula/regression.ts";
+import type { Regression } from "../formula/foundRegression.ts";
 import type { Measure, Step } from "../formula/values.ts";
 import { shownNumberAt } from "./shownNumber.ts";
 

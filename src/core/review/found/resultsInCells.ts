@@ -1,6 +1,7 @@
 import type { Book, BookFormula, BookSheet } from "../book.ts";
 import type { CellPlace } from "../cellsOfBook.ts";
-import { evaluate, nothingMet } from "../formula/evaluate.ts";
+import { nothingMet } from "../formula/met.ts";
+import { evaluate } from "../formula/evaluate.ts";
 import { parseFormula } from "../formula/parse.ts";
 import type { CellResult, Results } from "../formula/results.ts";
 import { showsRegression } from "../formula/telling.ts";

@@ -3,7 +3,7 @@ import { addressAt } from "../cellsOfBook.ts";
 import type { Gathered } from "../found/gatherClaims.ts";
 import type { CellPlace } from "../cellsOfBook.ts";
 import { withBrackets } from "./readInBrackets.ts";
-import type { ReportBlock, ReportedTerm } from "./reportBlocks.ts";
+import type { ReportBlock, ReportedTerm } from "./reportBlock.ts";
 
 /** The group whose formulas give a block its coefficients; null where they are typed, or come from several. */
 export function groupBehind({ terms }: ReportBlock, groups: readonly Gathered[]): Gathered | null {

@@ -7,9 +7,10 @@ import { type BracketTable, bracketPlace, bracketTables, isName } from "./bracke
 import { type InBrackets, inBracketsAt } from "./inBrackets.ts";
 import { intervalInBrackets } from "./intervals.ts";
 import type { Label } from "./labels.ts";
-import { type ReportBlock, type ReportedTerm, areaBetween } from "./reportBlocks.ts";
+import { type ReportBlock, type ReportedTerm, areaBetween } from "./reportBlock.ts";
 import { type SummaryWord, isConstantName } from "./reportWords.ts";
-import { type SummaryNumber, farthestRows, firstOfEach, nearestArea } from "./summaries.ts";
+import type { SummaryNumber } from "./reportBlock.ts";
+import { farthestRows, firstOfEach, nearestArea } from "./summaries.ts";
 import { endsOf } from "./termNumbers.ts";
 import type { BookSheet } from "../book.ts";
 

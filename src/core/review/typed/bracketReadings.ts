@@ -4,7 +4,7 @@ import { type CellPlace, overlap } from "../cellsOfBook.ts";
 import { allInBrackets } from "./inBrackets.ts";
 import { type Label, labelsOf } from "./labels.ts";
 import { type ReadTable, readTables } from "./bracketBlocks.ts";
-import type { ReportBlock } from "./reportBlocks.ts";
+import type { ReportBlock } from "./reportBlock.ts";
 import { spotOf } from "./termNumbers.ts";
 import { turnedPlace, turnedSheet } from "./turnedSheet.ts";
 

@@ -2,17 +2,9 @@ import type { SheetArea } from "../../table/address.ts";
 import type { BookSheet } from "../book.ts";
 import { type CellPlace, kindAt } from "../cellsOfBook.ts";
 import { cellKind } from "../../table/cells.ts";
-import { type ShownNumber, readShownText, shownNumberAt } from "../found/shownNumber.ts";
+import { readShownText, shownNumberAt } from "../found/shownNumber.ts";
 import type { Label } from "./labels.ts";
-import type { ReportBlock } from "./reportBlocks.ts";
-import type { SummaryWord } from "./reportWords.ts";
-
-/** A number of the whole regression beside its word. */
-export interface SummaryNumber {
-  readonly word: SummaryWord;
-  readonly place: CellPlace;
-  readonly shown: ShownNumber;
-}
+import type { ReportBlock, SummaryNumber } from "./reportBlock.ts";
 
 /** So many rows above, below or beside a block its other numbers may stand. */
 export const farthestRows = 14;

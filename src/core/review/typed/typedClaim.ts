@@ -11,7 +11,7 @@ import { guessOutcome } from "./guessOutcome.ts";
 import { textsBetween } from "./labels.ts";
 import { type Match, bestTable, matchNames } from "./matchNames.ts";
 import { type CountedBrackets, withBrackets } from "./readInBrackets.ts";
-import type { ReportBlock } from "./reportBlocks.ts";
+import type { ReportBlock } from "./reportBlock.ts";
 import { assumptions, whyNoData } from "./typedWords.ts";
 
 /** A line of data, and the form in which it enters. */
