@@ -11,7 +11,12 @@ import { Disclosure } from "../parts/Disclosure.tsx";
 import { TextField } from "../parts/TextField.tsx";
 
 const useStyles = makeStyles({
-  form: { display: "grid", rowGap: tokens.spacingVerticalS, padding: `0 0 ${tokens.spacingVerticalS} 16px` },
+  form: {
+    display: "grid",
+    gridTemplateColumns: "minmax(0, 1fr)",
+    rowGap: tokens.spacingVerticalS,
+    padding: `0 0 ${tokens.spacingVerticalS} 16px`,
+  },
   example: { display: "block", overflowWrap: "anywhere", textIndent: "-8px", paddingLeft: "8px" },
 });
 

@@ -12,13 +12,18 @@ import { usePane } from "../paneContext.ts";
 type Fixed = NonNullable<Options["fixed"]>;
 
 const useStyles = makeStyles({
-  fields: { display: "grid", rowGap: tokens.spacingVerticalS, padding: `0 0 ${tokens.spacingVerticalS} 16px` },
+  fields: {
+    display: "grid",
+    gridTemplateColumns: "minmax(0, 1fr)",
+    rowGap: tokens.spacingVerticalS,
+    padding: `0 0 ${tokens.spacingVerticalS} 16px`,
+  },
 });
 
 const policies: readonly (readonly [Policy, string])[] = [
   ["careful", "careful: made for small samples"],
   ["textbook", "textbook: as handbooks teach it"],
-  ["always-robust", "always robust: tests shown, not asked"],
+  ["always-robust", "always robust: tests not asked"],
 ];
 
 /** How the standard errors are chosen, and the way to fix a kind with a reason. A change answers again at once. */

@@ -17,7 +17,7 @@ const useStyles = makeStyles({
   head: {
     fontWeight: tokens.fontWeightRegular,
     textAlign: "right",
-    padding: "4px 0 4px 6px",
+    padding: "4px 0 4px 4px",
     color: tokens.colorNeutralForeground3,
     verticalAlign: "bottom",
   },
@@ -30,7 +30,7 @@ const useStyles = makeStyles({
     color: tokens.colorNeutralForeground3,
     borderTop: `1px solid ${tokens.colorNeutralStroke2}`,
   },
-  cell: { textAlign: "right", padding: "3px 0 3px 6px", borderTop: `1px solid ${tokens.colorNeutralStroke2}` },
+  cell: { textAlign: "right", padding: "3px 0 3px 4px", borderTop: `1px solid ${tokens.colorNeutralStroke2}` },
   inForce: { color: tokens.colorNeutralForeground1, fontWeight: tokens.fontWeightSemibold },
 });
 

@@ -13,7 +13,12 @@ import { AlsoEnters, Transforms } from "./Transforms.tsx";
 import { unusableCells } from "./columnWords.ts";
 
 const useStyles = makeStyles({
-  details: { display: "grid", rowGap: tokens.spacingVerticalS, padding: `0 0 ${tokens.spacingVerticalM} 16px` },
+  details: {
+    display: "grid",
+    gridTemplateColumns: "minmax(0, 1fr)",
+    rowGap: tokens.spacingVerticalS,
+    padding: `0 0 ${tokens.spacingVerticalM} 16px`,
+  },
 });
 
 /** What else can be said of a column: cells that cannot be used, how it is read, its unit, the value tested against. */

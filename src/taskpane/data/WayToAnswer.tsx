@@ -8,7 +8,12 @@ import { NumberField } from "../parts/NumberField.tsx";
 
 const useStyles = makeStyles({
   block: { marginTop: tokens.spacingVerticalS },
-  fields: { display: "grid", rowGap: tokens.spacingVerticalS, paddingLeft: "16px" },
+  fields: {
+    display: "grid",
+    gridTemplateColumns: "minmax(0, 1fr)",
+    rowGap: tokens.spacingVerticalS,
+    paddingLeft: "16px",
+  },
 });
 
 /** The settings that seldom change: the level, the constant. */
