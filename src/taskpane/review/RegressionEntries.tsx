@@ -3,31 +3,14 @@ import type { ReactNode } from "react";
 import type { Listed } from "../../app/review/listing.ts";
 import { capitalised } from "../../core/answer/wording.ts";
 import { gravestRank, originInWords, titleOf } from "../../core/review/reviewWords.ts";
+import { rowButton } from "../look/rowButton.ts";
 import { usePane } from "../paneContext.ts";
 import { RankMark } from "./RankMark.tsx";
 
 const useStyles = makeStyles({
   list: { margin: 0, padding: 0, listStyleType: "none" },
   item: { ":not(:first-child)": { borderTop: `1px solid ${tokens.colorNeutralStroke2}` } },
-  open: {
-    display: "grid",
-    gridTemplateColumns: "16px minmax(0, 1fr)",
-    columnGap: tokens.spacingHorizontalXS,
-    width: "100%",
-    padding: `${tokens.spacingVerticalS} 0`,
-    border: "none",
-    background: "none",
-    color: "inherit",
-    font: "inherit",
-    fontSize: tokens.fontSizeBase200,
-    lineHeight: "17px",
-    textAlign: "left",
-    cursor: "pointer",
-    borderRadius: tokens.borderRadiusSmall,
-    overflowWrap: "anywhere",
-    ":hover": { color: tokens.colorBrandForegroundLink },
-    ":focus-visible": { outline: `2px solid ${tokens.colorStrokeFocus2}`, outlineOffset: "-2px" },
-  },
+  open: { ...rowButton, gridTemplateColumns: "16px minmax(0, 1fr)" },
   mark: { paddingTop: "3px" },
   title: {
     display: "block",

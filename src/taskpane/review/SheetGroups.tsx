@@ -3,6 +3,7 @@ import { type ReactNode, useId } from "react";
 import { type SheetGroup, groupsOf, shownWords } from "../../app/review/listing.ts";
 import type { ReviewInHand } from "../../app/review/reviewState.ts";
 import { counted } from "../../core/problem/spots.ts";
+import { rowButton } from "../look/rowButton.ts";
 import { useType } from "../look/type.ts";
 import { Turn } from "../parts/Disclosure.tsx";
 import { usePane } from "../paneContext.ts";
@@ -12,26 +13,7 @@ import { RegressionEntries } from "./RegressionEntries.tsx";
 const useStyles = makeStyles({
   group: { borderTop: `1px solid ${tokens.colorNeutralStroke2}` },
   head: { margin: 0, font: "inherit" },
-  button: {
-    display: "grid",
-    gridTemplateColumns: "12px 16px minmax(0, 1fr)",
-    columnGap: tokens.spacingHorizontalXS,
-    width: "100%",
-    minHeight: "32px",
-    padding: `${tokens.spacingVerticalS} 0`,
-    border: "none",
-    background: "none",
-    color: "inherit",
-    font: "inherit",
-    fontSize: tokens.fontSizeBase200,
-    lineHeight: "17px",
-    textAlign: "left",
-    cursor: "pointer",
-    borderRadius: tokens.borderRadiusSmall,
-    overflowWrap: "anywhere",
-    ":hover": { color: tokens.colorBrandForegroundLink },
-    ":focus-visible": { outline: `2px solid ${tokens.colorStrokeFocus2}`, outlineOffset: "-2px" },
-  },
+  button: { ...rowButton, gridTemplateColumns: "12px 16px minmax(0, 1fr)", minHeight: "32px" },
   turn: { marginTop: "3px" },
   open: { transform: "rotate(90deg)" },
   mark: { paddingTop: "2px" },
