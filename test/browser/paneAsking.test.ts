@@ -1,21 +1,13 @@
-import type { Browser, Page } from "playwright-core";
-import { afterAll, afterEach, beforeAll, beforeEach, expect, it } from "vitest";
-import { openPane } from "./panePage/openPane.ts";
+import type { Page } from "playwright-core";
+import { expect, it } from "vitest";
+import { paneForEachTest } from "./panePage/paneForEachTest.ts";
 import { announced, button, getAnswer, heading, openTab, roleOf, storeAs } from "./panePage/steps.ts";
-import { launchBrowser } from "./support/browser.ts";
 
-let browser: Browser;
 let page: Page;
-
-beforeAll(async () => {
-  browser = await launchBrowser();
-});
-afterAll(() => browser.close());
-beforeEach(async () => {
-  page = await openPane(browser, { width: 320 });
+paneForEachTest(async (opened) => {
+  page = opened;
   await getAnswer(page);
 });
-afterEach(() => page.close());
 
 const estimates = () => page.getByLabel("Sums and quotients of coefficients");
 const equations = () => page.getByLabel("Equations tested all at once");

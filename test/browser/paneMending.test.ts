@@ -1,20 +1,12 @@
-import type { Browser, Page } from "playwright-core";
-import { afterAll, afterEach, beforeAll, beforeEach, expect, it } from "vitest";
-import { openPane } from "./panePage/openPane.ts";
+import type { Page } from "playwright-core";
+import { expect, it } from "vitest";
+import { paneForEachTest } from "./panePage/paneForEachTest.ts";
 import { button, focused, heading, roleOf, useSelection } from "./panePage/steps.ts";
-import { launchBrowser } from "./support/browser.ts";
 
-let browser: Browser;
 let page: Page;
-
-beforeAll(async () => {
-  browser = await launchBrowser();
+paneForEachTest((opened) => {
+  page = opened;
 });
-afterAll(() => browser.close());
-beforeEach(async () => {
-  page = await openPane(browser, { width: 320 });
-});
-afterEach(() => page.close());
 
 it("chooses other data in place of those before, each part of the section once", async () => {
   await useSelection(page);

@@ -1,22 +1,14 @@
-import type { Browser, Page } from "playwright-core";
-import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from "vitest";
+import type { Page } from "playwright-core";
+import { describe, expect, it } from "vitest";
 import { claimReviewFixture, gravest, slight, smaller } from "../support/reviewFixture.ts";
-import { openPane } from "./panePage/openPane.ts";
+import { paneForEachTest } from "./panePage/paneForEachTest.ts";
 import { announced, button, focused, heading, listMany, openTab } from "./panePage/steps.ts";
-import { launchBrowser } from "./support/browser.ts";
 
-let browser: Browser;
 let page: Page;
-
-beforeAll(async () => {
-  browser = await launchBrowser();
-});
-afterAll(() => browser.close());
-beforeEach(async () => {
-  page = await openPane(browser, { width: 320 });
+paneForEachTest(async (opened) => {
+  page = opened;
   await openTab(page, "Review");
 });
-afterEach(() => page.close());
 
 const list = () => button(page, "List the regressions in this workbook").click();
 const gone = (): Promise<string[]> => page.evaluate(() => [...window.stage.host.gone]);
