@@ -8,7 +8,7 @@ export const chartDataColumn = 13;
 export const liveColumn = 40;
 
 /** Widths in characters: the names, nine columns of figures, the words at the end; then a gutter. */
-export const pageWidths: readonly number[] = [28, 14, 13, 13, 14, 12, 11, 13, 12, 12, 34, 3];
+export const pageWidths: readonly number[] = [28, 14, 13, 13, 16, 12, 11, 13, 12, 12, 32, 3];
 
 /** A character of the normal font is 7 pixels wide, with 5 around the text; a point is 4/3 pixels. */
 export const pointsOf = (characters: number): number => (characters * 7 + 5) * 0.75;
