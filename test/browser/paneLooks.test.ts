@@ -52,6 +52,14 @@ async function keepTwo(page: Page): Promise<void> {
 /** Every state of the pane, as a person comes to it. */
 const states: Readonly<Record<string, (page: Page) => Promise<void>>> = {
   empty: () => Promise.resolve(),
+  "an Excel that is too old": async (page) => {
+    await page.evaluate(() => window.stage.leave({ kind: "too old", missing: "ExcelApi 1.12" }));
+    await page.getByText(/ExcelApi 1\.12/).waitFor();
+  },
+  "no Excel": async (page) => {
+    await page.evaluate(() => window.stage.leave({ kind: "no host" }));
+    await page.getByText(/inside Excel/).waitFor();
+  },
   "no answer": (page) => openTab(page, "Answer"),
   data: async (page) => {
     await useSelection(page);
@@ -240,8 +248,9 @@ const widerThanPane = (page: Page): Promise<string[]> =>
 /** What reaches beyond the right end of the lines, into the room of the scroll bar; boxes that scroll and pictures may. */
 const outOfLine = (page: Page): Promise<string[]> =>
   page.evaluate(() => {
-    const edge = document.querySelector("#section")!.getBoundingClientRect().right + 0.5;
-    return [...document.querySelectorAll("#section *")]
+    const lines = document.querySelector("#section, main > h1")!;
+    const edge = lines.getBoundingClientRect().right + 0.5;
+    return [...document.querySelectorAll("#section *, main > *")]
       .filter((element) => element.closest("[tabindex='0'], [aria-hidden='true']") === null)
       .filter((element) => element.getBoundingClientRect().right > edge && element.getBoundingClientRect().width > 1)
       .map((element) => element.outerHTML.slice(0, 120));

@@ -5,6 +5,7 @@ import type { Problem } from "../../../src/core/problem/problem.ts";
 import { failure, success } from "../../../src/core/problem/result.ts";
 import type { BookClaims } from "../../../src/core/review/claimsOf.ts";
 import { listedFunctions } from "../../../src/functions/listed.ts";
+import { Outside, type WhyOutside } from "../../../src/taskpane/Outside.tsx";
 import { PaneApp } from "../../../src/taskpane/PaneApp.tsx";
 import { inlineAnalyst } from "../../../src/worker/inlineAnalyst.ts";
 import { type FakeHost, fakeHost } from "../../support/fakeHost.ts";
@@ -22,6 +23,8 @@ export interface PaneStage {
   /** What is found when regressions are looked for. */
   listed: BookClaims;
   hostIsDark: boolean | null;
+  /** Shows what stands in place of the pane where no spreadsheet answers. */
+  readonly leave: (why: WhyOutside) => void;
 }
 
 declare global {
@@ -76,7 +79,8 @@ const pane = createPane({
 
 const { claims, unread, craft } = bookReviewFixture;
 const listed: BookClaims = { claims: claims.map(({ claim }) => claim), unread, craft };
-window.stage = { host, pane, hold: null, refusal: null, listed, hostIsDark: null };
-createRoot(document.getElementById("pane")!).render(
-  <PaneApp pane={pane} hostIsDark={() => window.stage.hostIsDark} functions={listedFunctions} />,
-);
+const root = createRoot(document.getElementById("pane")!);
+const hostIsDark = (): boolean | null => window.stage.hostIsDark;
+const leave = (why: WhyOutside): void => root.render(<Outside why={why} hostIsDark={hostIsDark} />);
+window.stage = { host, pane, hold: null, refusal: null, listed, hostIsDark: null, leave };
+root.render(<PaneApp pane={pane} hostIsDark={hostIsDark} functions={listedFunctions} />);
