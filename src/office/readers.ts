@@ -16,9 +16,18 @@ export async function withReaders(
 ): Promise<readonly BookSheet[]> {
   const candidates = sheets.map((sheet, index) => ({ sheet, others: others[index] ?? [] }));
   const found: BookSheet[] = [];
-  for (const [index, readers] of readersAmong(candidates, names).entries()) {
+  for (const [index, readers] of (await inTurns(readersAmong(candidates, names))).entries()) {
     const sheet = sheets[index]!;
     found.push(readers.length === 0 ? sheet : { ...sheet, readers: await withSpills(context, sheet.sheet, readers) });
   }
   return found;
+}
+
+/** Runs what stops on its way to the end, and lets the page do its own at each stop. */
+async function inTurns<T>(steps: Generator<void, T>): Promise<T> {
+  for (;;) {
+    const step = steps.next();
+    if (step.done === true) return step.value;
+    await new Promise((resolve) => setTimeout(resolve));
+  }
 }

@@ -14,11 +14,17 @@ export interface Candidates {
 /** Copies of copies of copies: more than these are nobody's work. */
 const mostRounds = 12;
 
-/** The formulas among others that read cells filled by a regression, or by one another: for each sheet, in row order. */
-export function readersAmong(
+/** So many formulas are looked at in some ten milliseconds. */
+const formulasAtOnce = 1_000;
+
+/**
+ * The formulas among others that read cells filled by a regression, or by one another: for each sheet, in row order. It
+ * stops again and again on the way, so that a page can answer meanwhile; whoever runs it takes it up until it returns.
+ */
+export function* readersAmong(
   sheets: readonly Candidates[],
   names: readonly BookName[],
-): readonly (readonly BookFormula[])[] {
+): Generator<void, readonly (readonly BookFormula[])[]> {
   const filled = filledCells();
   const isTold = showsRegression(names);
   for (const { sheet } of sheets) {
@@ -26,17 +32,12 @@ export function readersAmong(
   }
   const found = sheets.map(() => new Set<BookFormula>());
   if (filled.isEmpty()) return found.map(() => []);
-  const standing = names.flatMap(({ name, refersTo }): Standing[] => {
-    const meant = parseFormula(refersTo);
-    return meant?.kind === "cells" ? [{ name: name.toLowerCase(), area: meant.area }] : [];
-  });
-  const isNamed = mentions(standing.map(({ name }) => name));
-  const isReader = (formula: string, home: string): boolean =>
-    (isNamed(formula) || mayRead(formula, filled)) && reads(formula, home, { filled, standing });
+  const isReader = readerTest(filled, names);
   for (let round = 0, more = true; more && round < mostRounds; round++) {
     more = false;
     for (const [index, { sheet, others }] of sheets.entries()) {
-      const fresh = others.filter((one) => !found[index]!.has(one) && isReader(one.formula, sheet.sheet));
+      const left = others.filter((one) => !found[index]!.has(one));
+      const fresh = yield* chosen(left, ({ formula }) => isReader(formula, sheet.sheet));
       for (const one of fresh) {
         found[index]!.add(one);
         filled.add(sheet.sheet, one);
@@ -45,6 +46,29 @@ export function readersAmong(
     }
   }
   return sheets.map(({ others }, index) => others.filter((one) => found[index]!.has(one)));
+}
+
+function* chosen(
+  formulas: readonly BookFormula[],
+  is: (one: BookFormula) => boolean,
+): Generator<void, readonly BookFormula[]> {
+  const found: BookFormula[] = [];
+  for (const [index, one] of formulas.entries()) {
+    if (index % formulasAtOnce === formulasAtOnce - 1) yield;
+    if (is(one)) found.push(one);
+  }
+  return found;
+}
+
+/** Tells whether a formula on a sheet reads cells that are filled by then. */
+function readerTest(filled: Filled, names: readonly BookName[]): (formula: string, home: string) => boolean {
+  const standing = names.flatMap(({ name, refersTo }): Standing[] => {
+    const meant = parseFormula(refersTo);
+    return meant?.kind === "cells" ? [{ name: name.toLowerCase(), area: meant.area }] : [];
+  });
+  const isNamed = mentions(standing.map(({ name }) => name));
+  return (formula, home) =>
+    (isNamed(formula) || mayRead(formula, filled)) && reads(formula, home, { filled, standing });
 }
 
 /** A quick look, without taking the formula apart. */

@@ -1,6 +1,8 @@
 import { beforeAll, describe, expect, it } from "vitest";
 import type { BookClaims } from "../../../../src/core/review/claimsOf.ts";
+import type { BookFormula } from "../../../../src/core/review/book.ts";
 import type { Claim, Quantity } from "../../../../src/core/review/claim.ts";
+import { readersAmong } from "../../../../src/core/review/formula/readers.ts";
 import { reviewClaim } from "../../../../src/core/review/reviewClaim.ts";
 import type { BookCell, BookData } from "../../../../src/desk/book/bookData.ts";
 import mtcars from "../../../reference/mtcars.json" with { type: "json" };
@@ -132,5 +134,25 @@ describe("formulas that read the results of a regression in other cells", () => 
   it("are not guessed at where the heading is not there, or where its place hangs on the order of the cells", () => {
     const why = found.unread.filter(({ cell }) => cell.startsWith("Chosen!"));
     expect(why).toEqual([{ cell: "Chosen!A3:A4", why: "INDEX works out at calculation which cells are used." }]);
+  });
+});
+
+describe("looking through thousands of formulas", () => {
+  it("stops on the way, and finds the last that reads a result and the copy before it", () => {
+    const formulaAt = (row: number, formula: string): BookFormula => ({ row, column: 5, formula, rows: 1, columns: 1 });
+    const others = Array.from({ length: 3_500 }, (_, row) => formulaAt(row, `=B${row + 1}*2`));
+    others[100] = formulaAt(100, "=F3500+0");
+    others[3_499] = formulaAt(3_499, "=Calc!A2");
+    const linestAt = { row: 1, column: 0, formula: `=${block}`, rows: 2, columns: 3 };
+    const sheets = [
+      { sheet: { sheet: "Calc", formulas: [linestAt] }, others: [] },
+      { sheet: { sheet: "Work", formulas: [] }, others },
+    ];
+    const steps = readersAmong(sheets, []);
+    let stops = 0;
+    let step = steps.next();
+    for (; step.done !== true; step = steps.next()) stops += 1;
+    expect(step.value.map((found) => found.map(({ row }) => row))).toEqual([[], [100, 3_499]]);
+    expect(stops).toBeGreaterThanOrEqual(6);
   });
 });
