@@ -116,7 +116,7 @@ function numberStep(column: string, transform: Transform, unit: string | undefin
       return `The square of ${column} higher by 1`;
     case "lag": {
       const earlier = `${transform.periods === 1 ? "one period" : `${transform.periods} periods`} earlier`;
-      return unit === undefined ? `${column} higher by 1 ${earlier}` : `One more ${unit} ${earlier}`;
+      return unit === undefined ? `${column} higher by 1, ${earlier},` : `One more ${unit}, ${earlier},`;
     }
     case "change":
       return `The change of ${column} higher by 1`;

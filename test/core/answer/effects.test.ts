@@ -77,6 +77,20 @@ describe("what a coefficient goes with, in words", () => {
       "Price higher by 1 goes with Repairs higher by 2.3 (between 0.4 and 4.1 higher, 95 %).",
     ],
     [
+      "of a driver's earlier value",
+      { meaning: numberOf("Price", { kind: "lag", periods: 1 }), figures: [2.26, 0.4, 4.1, 0.018] },
+      "Price higher by 1, one period earlier, goes with Repairs higher by 2.3 (between 0.4 and 4.1 higher, 95 %).",
+    ],
+    [
+      "of a driver's earlier value in units, where nothing shows",
+      {
+        meaning: numberOf("Rainy days", { kind: "lag", periods: 2 }),
+        figures: [-0.4, -1.6, 0.8, 0.5],
+        units: { "Rainy days": "rainy day" },
+      },
+      "One more rainy day, 2 periods earlier, could go with Repairs anywhere from 1.6 lower to 0.8 higher (95 %).",
+    ],
+    [
       "both in logarithms",
       {
         meaning: numberOf("Price", { kind: "logarithm" }),
