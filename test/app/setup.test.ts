@@ -8,19 +8,9 @@ import {
   columnWithRole,
 } from "../../src/app/setup.ts";
 import { defaultOptions } from "../../src/core/answer/options.ts";
+import { columnSetup } from "../support/columnSetup.ts";
 
-const column = (name: string, role: Role): ColumnSetup => ({
-  column: name,
-  role,
-  guessed: true,
-  as: "number",
-  base: null,
-  transform: { kind: "none" },
-  also: { kind: "none" },
-  unit: "",
-  against: 0,
-  textNumbers: null,
-});
+const column = (name: string, role: Role): ColumnSetup => columnSetup(name, { role });
 
 const setup: Setup = {
   columns: [column("Month", "time"), column("Repairs", "outcome"), column("Price", "driver"), column("Shop", "unused")],

@@ -1,17 +1,14 @@
 import { afterEach, beforeEach, describe, expect, it } from "vitest";
 import { parseAddress } from "../../src/core/table/address.ts";
 import type { BookData } from "../../src/desk/book/bookData.ts";
-import { demoBook } from "../../src/desk/demo/demoBook.ts";
-import { type DeskPane, openDeskPane } from "../support/deskPane.ts";
+import { type DeskPane, openAnsweredMonths } from "../support/deskPane.ts";
 import { errand } from "../support/deskHost.ts";
 
 const sheet = "Repairs answer";
 
 let at: DeskPane;
 beforeEach(async () => {
-  at = await openDeskPane(demoBook());
-  await at.carryOut(() => at.pane.commands.read({ kind: "address", address: "Months!A4:E100" }));
-  await at.carryOut(at.pane.commands.answer);
+  at = await openAnsweredMonths();
 });
 afterEach(() => at.close());
 

@@ -1,14 +1,11 @@
 import { afterEach, beforeEach, describe, expect, it } from "vitest";
-import { demoBook } from "../../src/desk/demo/demoBook.ts";
-import { type DeskPane, openDeskPane } from "../support/deskPane.ts";
+import { type DeskPane, openAnsweredMonths, openDeskPane } from "../support/deskPane.ts";
 
 const sheet = "Repairs answer";
 
 let at: DeskPane;
 beforeEach(async () => {
-  at = await openDeskPane(demoBook());
-  await at.carryOut(() => at.pane.commands.read({ kind: "address", address: "Months!A4:E100" }));
-  await at.carryOut(at.pane.commands.answer);
+  at = await openAnsweredMonths();
 });
 afterEach(() => at.close());
 

@@ -2,6 +2,7 @@ import { type Pane, createPane } from "../../src/app/pane.ts";
 import type { PaneState } from "../../src/app/state.ts";
 import { messageOf } from "../../src/core/problem/messages.ts";
 import type { BookData } from "../../src/desk/book/bookData.ts";
+import { demoBook } from "../../src/desk/demo/demoBook.ts";
 import { openXlsx } from "../../src/desk/files/openXlsx.ts";
 import { saveXlsx } from "../../src/desk/files/saveXlsx.ts";
 import { registerFunctions } from "../../src/functions/register.ts";
@@ -61,4 +62,12 @@ export async function openDeskPane(book: BookData): Promise<DeskPane> {
     },
     close: () => at.desk.close(),
   };
+}
+
+/** The demo workbook with the months read and answered. */
+export async function openAnsweredMonths(): Promise<DeskPane> {
+  const at = await openDeskPane(demoBook());
+  await at.carryOut(() => at.pane.commands.read({ kind: "address", address: "Months!A4:E100" }));
+  await at.carryOut(at.pane.commands.answer);
+  return at;
 }

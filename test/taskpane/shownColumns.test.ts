@@ -1,19 +1,9 @@
 import { describe, expect, it } from "vitest";
 import type { ColumnSetup, Role } from "../../src/app/setup.ts";
 import { shownColumns } from "../../src/taskpane/data/shownColumns.ts";
+import { columnSetup } from "../support/columnSetup.ts";
 
-const column = (name: string, role: Role = "unused"): ColumnSetup => ({
-  column: name,
-  role,
-  guessed: true,
-  as: "number",
-  base: null,
-  transform: { kind: "none" },
-  also: { kind: "none" },
-  unit: "",
-  against: 0,
-  textNumbers: null,
-});
+const column = (name: string, role: Role = "unused"): ColumnSetup => columnSetup(name, { role });
 
 const columns = [column("Price"), column("Rain"), column("Old price"), column("Staff"), column("Takings", "outcome")];
 

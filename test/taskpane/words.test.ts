@@ -1,7 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { describeColumn } from "../../src/core/table/describe.ts";
 import type { Cell } from "../../src/core/table/cells.ts";
-import type { ColumnSetup } from "../../src/app/setup.ts";
 import { holdsInWords, unusableCells } from "../../src/taskpane/data/columnWords.ts";
 import { derivationInWords } from "../../src/taskpane/answer/derivation.ts";
 import { intervalsInWords, kindFigures, lawsInWords, writerFor } from "../../src/taskpane/answer/driverFigures.ts";
@@ -13,6 +12,7 @@ import { pFigure } from "../../src/taskpane/parts/pFigure.ts";
 import { rowsInWords } from "../../src/taskpane/parts/rowWords.ts";
 import { answerFixture } from "../support/answerFixture.ts";
 import { columnOf, day } from "../support/sheet.ts";
+import { columnSetup } from "../support/columnSetup.ts";
 
 const describing = (name: string, cells: readonly Cell[]) => describeColumn(columnOf(name, cells));
 const shops = ["North", "South", "North", "South", "North", "South"];
@@ -31,18 +31,7 @@ describe("what a column holds", () => {
 });
 
 describe("cells that cannot be used", () => {
-  const setup: ColumnSetup = {
-    column: "Price",
-    role: "driver",
-    guessed: false,
-    as: "number",
-    base: null,
-    transform: { kind: "none" },
-    also: { kind: "none" },
-    unit: "",
-    against: 0,
-    textNumbers: null,
-  };
+  const setup = columnSetup("Price", { role: "driver", guessed: false });
   const column = describing("Price", [4, "7.5", null, 9, "n/a", 3, 8, 2, 5, 6]);
 
   it("are listed with what they hold", () => {

@@ -1,4 +1,4 @@
-import { Button, Field, Select, makeStyles, tokens } from "@fluentui/react-components";
+import { Button, Field, Select, makeStyles } from "@fluentui/react-components";
 import { type ReactNode, useState } from "react";
 import { type Asked, type Example, examplesFor, readAsked } from "../../app/asking.ts";
 import type { Setup } from "../../app/setup.ts";
@@ -6,17 +6,13 @@ import { capitalised } from "../../core/answer/wording.ts";
 import { messageOf } from "../../core/problem/messages.ts";
 import type { Problem } from "../../core/problem/problem.ts";
 import { useType } from "../look/type.ts";
+import { underLine } from "../look/underLine.ts";
 import { usePane } from "../paneContext.ts";
 import { Disclosure } from "../parts/Disclosure.tsx";
 import { TextField } from "../parts/TextField.tsx";
 
 const useStyles = makeStyles({
-  form: {
-    display: "grid",
-    gridTemplateColumns: "minmax(0, 1fr)",
-    rowGap: tokens.spacingVerticalS,
-    padding: `0 0 ${tokens.spacingVerticalS} 16px`,
-  },
+  form: underLine,
   example: { display: "block", overflowWrap: "anywhere", textIndent: "-8px", paddingLeft: "8px" },
 });
 

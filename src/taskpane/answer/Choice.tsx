@@ -1,9 +1,10 @@
-import { Button, Field, Select, makeStyles, tokens } from "@fluentui/react-components";
+import { Button, Field, Select, makeStyles } from "@fluentui/react-components";
 import { type ReactNode, useState } from "react";
 import type { Setup } from "../../app/setup.ts";
 import type { Options } from "../../core/answer/options.ts";
 import type { Policy } from "../../core/decision/wish.ts";
 import { useType } from "../look/type.ts";
+import { underLine } from "../look/underLine.ts";
 import { Disclosure } from "../parts/Disclosure.tsx";
 import { KindSettings } from "./KindSettings.tsx";
 import { TextField } from "../parts/TextField.tsx";
@@ -12,12 +13,7 @@ import { usePane } from "../paneContext.ts";
 type Fixed = NonNullable<Options["fixed"]>;
 
 const useStyles = makeStyles({
-  fields: {
-    display: "grid",
-    gridTemplateColumns: "minmax(0, 1fr)",
-    rowGap: tokens.spacingVerticalS,
-    padding: `0 0 ${tokens.spacingVerticalS} 16px`,
-  },
+  fields: underLine,
 });
 
 const policies: readonly (readonly [Policy, string])[] = [

@@ -2,6 +2,7 @@ import { makeStyles, tokens } from "@fluentui/react-components";
 import type { ReactNode } from "react";
 import type { ColumnSetup } from "../../app/setup.ts";
 import { useType } from "../look/type.ts";
+import { underLine } from "../look/underLine.ts";
 import { CellList } from "../parts/CellList.tsx";
 import { TextField } from "../parts/TextField.tsx";
 import { usePane } from "../paneContext.ts";
@@ -13,12 +14,7 @@ import { AlsoEnters, Transforms } from "./Transforms.tsx";
 import { unusableCells } from "./columnWords.ts";
 
 const useStyles = makeStyles({
-  details: {
-    display: "grid",
-    gridTemplateColumns: "minmax(0, 1fr)",
-    rowGap: tokens.spacingVerticalS,
-    padding: `0 0 ${tokens.spacingVerticalM} 16px`,
-  },
+  details: { ...underLine, padding: `0 0 ${tokens.spacingVerticalM} 16px` },
 });
 
 /** What else can be said of a column: cells that cannot be used, how it is read, its unit, the value tested against. */
